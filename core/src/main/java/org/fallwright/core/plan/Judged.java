@@ -1,0 +1,41 @@
+package org.fallwright.core.plan;
+
+import java.util.List;
+
+/**
+ * A setup with everything that was found about it.
+ *
+ * @param setup what was judged
+ * @param verdict its worst check
+ * @param weakest the check with the lowest ratio among the worst
+ * @param sentence verdict and weakest link in one sentence, SI-free: units are filled in by the
+ *     reader's display
+ * @param figures its figures
+ * @param checks every check, in a fixed order
+ * @param loads loads on every part
+ * @param line points of the line from the tree outwards
+ * @param haul points of a block system's haul part, from its fixed block to the driver; may be
+ *     empty
+ * @param ground its zones
+ * @param notes warnings, a sentence each
+ */
+public record Judged(
+    Setup setup,
+    Verdict verdict,
+    Check weakest,
+    String sentence,
+    Figures figures,
+    List<Check> checks,
+    List<PartLoad> loads,
+    List<LinePoint> line,
+    List<LinePoint> haul,
+    Ground ground,
+    List<String> notes) {
+  public Judged {
+    checks = List.copyOf(checks);
+    loads = List.copyOf(loads);
+    line = List.copyOf(line);
+    haul = List.copyOf(haul);
+    notes = List.copyOf(notes);
+  }
+}

@@ -1,0 +1,19 @@
+package org.fallwright.core.plan;
+
+/**
+ * Load on one part against its strength.
+ *
+ * @param part what it is called
+ * @param atPlanN load at the working tension [N]
+ * @param atHighN load at the most the source can do [N]
+ * @param strengthN ultimate strength [N]
+ * @param designFactor factor asked at the working tension
+ * @param lastFactor factor asked at the most the source can do
+ */
+public record PartLoad(
+    String part,
+    double atPlanN,
+    double atHighN,
+    double strengthN,
+    double designFactor,
+    double lastFactor) {}

@@ -1,0 +1,34 @@
+package org.fallwright.core.plan;
+
+import java.util.List;
+
+/**
+ * A candidate: everything the planner can choose.
+ *
+ * @param layDeg intended fall direction [degrees from true north]
+ * @param attachHeightM height of the line on the tree above the ground at the stump [m]
+ * @param hingeThicknessM hinge thickness [m]
+ * @param line id of the pull line
+ * @param redirects ids of the anchors with a redirect block, from the tree outwards; may be empty
+ * @param source id of the pull source in the gear
+ * @param mode how it is run
+ * @param place id of the spot or anchor it is at
+ * @param driver the source that drives it, or null
+ */
+public record Setup(
+    double layDeg,
+    double attachHeightM,
+    double hingeThicknessM,
+    String line,
+    List<String> redirects,
+    String source,
+    String mode,
+    String place,
+    Driver driver) {
+  /** The source that hauls a block system: its id in the gear, its mode, its place. */
+  public record Driver(String source, String mode, String place) {}
+
+  public Setup {
+    redirects = List.copyOf(redirects);
+  }
+}

@@ -1,0 +1,28 @@
+package org.fallwright.core.pull;
+
+import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.util.List;
+
+/**
+ * The extension point: something that pulls the line. Stateless; values in, values out. The core
+ * knows no source by name. What an implementation answers is checked like user input.
+ */
+public interface PullSource {
+  /** What it is: stable id, display name, where it can be, its parameters. */
+  SourceDescription describe();
+
+  /**
+   * The ways it can be run with these parameters, at least one, in a fixed order: for example two-
+   * or four-wheel drive, or the number of parts of a block system.
+   *
+   * @throws IllegalArgumentException one sentence naming the parameter, its value and its limit
+   */
+  List<String> modes(ObjectNode parameters);
+
+  /**
+   * What it gives at its place, at the least and at the most.
+   *
+   * @throws IllegalArgumentException one sentence naming the parameter, its value and its limit
+   */
+  PullOffer offer(PullRequest request);
+}

@@ -1,0 +1,140 @@
+package org.fallwright.core.site;
+
+import java.util.HashSet;
+import java.util.List;
+import java.util.Optional;
+import java.util.Set;
+import java.util.stream.Stream;
+import org.fallwright.core.units.Range;
+
+/**
+ * A site: everything a person has entered. Positions are metres east and north of the origin.
+ *
+ * @param version version of the site file's form
+ * @param name what the job is called
+ * @param origin where the plane lies on the earth
+ * @param display units on screen and paper
+ * @param ruleSet key of the rule set
+ * @param declinationDeg magnetic declination, east positive [degrees]; null: not stated
+ * @param picture base map; null: blank ground
+ */
+public record Site(
+    int version,
+    String name,
+    Origin origin,
+    Display display,
+    String ruleSet,
+    Double declinationDeg,
+    Picture picture,
+    SubjectTree tree,
+    CutPlan cut,
+    List<Target> targets,
+    List<Wire> wires,
+    List<Looked> looked,
+    List<DropZone> dropZones,
+    List<Anchor> anchors,
+    List<Spot> spots,
+    Gear gear,
+    Conditions conditions,
+    Offer offer) {
+  /** The version written. */
+  public static final int VERSION = 1;
+
+  /** Units on screen and paper. */
+  public enum Display {
+    US,
+    METRIC
+  }
+
+  public Site {
+    Range.check("version", version, VERSION, VERSION, "");
+    Range.text("name", name);
+    Range.present("origin", origin);
+    Range.present("display", display);
+    Range.text("rule_set", ruleSet);
+    Range.checkOrNull("declination_deg", declinationDeg, -180, 180, "degrees");
+    Range.present("tree", tree);
+    Range.present("cut", cut);
+    targets = List.copyOf(Range.present("targets", targets));
+    wires = List.copyOf(Range.present("wires", wires));
+    looked = List.copyOf(Range.present("looked", looked));
+    dropZones = List.copyOf(Range.present("drop_zones", dropZones));
+    anchors = List.copyOf(Range.present("anchors", anchors));
+    spots = List.copyOf(Range.present("spots", spots));
+    Range.present("gear", gear);
+    Range.present("conditions", conditions);
+    Range.present("offer", offer);
+    oneNameEach(
+        Stream.of(
+                Stream.of(tree.id()),
+                targets.stream().map(Target::id),
+                wires.stream().map(Wire::id),
+                dropZones.stream().map(DropZone::id),
+                anchors.stream().map(Anchor::id),
+                spots.stream().map(Spot::id))
+            .flatMap(s -> s));
+    oneNameEach(gear.sources().stream().map(Gear.Source::id));
+    oneNameEach(gear.lines().stream().map(Gear.Line::id));
+    for (Gear.Source s : gear.sources()) {
+      for (String place : s.places()) {
+        known(anchors, spots, "gear.sources." + s.id() + ".places", place);
+      }
+      for (String place : s.driverPlaces()) {
+        known(anchors, spots, "gear.sources." + s.id() + ".driver_places", place);
+      }
+      for (String driver : s.drivers()) {
+        if (gear.sources().stream().noneMatch(o -> o.id().equals(driver))) {
+          throw new IllegalArgumentException(
+              "gear.sources."
+                  + s.id()
+                  + ".drivers names \""
+                  + driver
+                  + "\"; no source of that name is in the gear");
+        }
+      }
+    }
+    if (looked.stream().map(Looked::what).distinct().count() != looked.size()) {
+      throw new IllegalArgumentException("looked has two entries of one kind; it may have one");
+    }
+  }
+
+  public Optional<Anchor> anchor(String id) {
+    return anchors.stream().filter(a -> a.id().equals(id)).findFirst();
+  }
+
+  public Optional<Spot> spot(String id) {
+    return spots.stream().filter(s -> s.id().equals(id)).findFirst();
+  }
+
+  public Optional<Gear.Source> source(String id) {
+    return gear.sources().stream().filter(s -> s.id().equals(id)).findFirst();
+  }
+
+  /** What was looked for; not looked where the list is silent. */
+  public Looked.Found found(Looked.What what) {
+    return looked.stream()
+        .filter(l -> l.what() == what)
+        .map(Looked::found)
+        .findFirst()
+        .orElse(Looked.Found.NOT_LOOKED);
+  }
+
+  private static void oneNameEach(Stream<String> ids) {
+    Set<String> seen = new HashSet<>();
+    ids.forEach(
+        id -> {
+          if (!seen.add(id)) {
+            throw new IllegalArgumentException(
+                "the name \"" + id + "\" is used twice; each thing must have its own");
+          }
+        });
+  }
+
+  private static void known(List<Anchor> anchors, List<Spot> spots, String field, String id) {
+    if (anchors.stream().noneMatch(a -> a.id().equals(id))
+        && spots.stream().noneMatch(s -> s.id().equals(id))) {
+      throw new IllegalArgumentException(
+          field + " names \"" + id + "\"; no anchor or spot of that name is on the site");
+    }
+  }
+}

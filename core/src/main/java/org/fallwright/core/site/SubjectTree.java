@@ -1,0 +1,77 @@
+package org.fallwright.core.site;
+
+import java.util.List;
+import org.fallwright.core.units.Range;
+
+/**
+ * The tree to be pulled over.
+ *
+ * @param id its name on the plan
+ * @param species key of the species table
+ * @param stump middle of the stump
+ * @param dbhM stem diameter over bark at 1.3 m above the ground [m]
+ * @param stumpDiameterM stem diameter inside the bark at the cut [m]; null: from DBH and flare
+ * @param diameters further stem diameters
+ * @param heightM height above the ground [m]
+ * @param crownBaseM height of the crown's base above the ground [m]
+ * @param crownRadiusM radius of the crown [m]
+ * @param leanDeg lean of the stem axis from the vertical [degrees]
+ * @param leanAzimuthDeg direction the tree leans towards [degrees from true north]
+ * @param massKg green mass above the cut [kg]; null: from the mass equation
+ * @param massCentreM height of the mass centre above the ground [m]; null: 0.40 of the height
+ * @param crownShare share of the mass that is crown [0 to 1]; null: none of it set aside
+ * @param crownOffsetM offset of the crown's middle from the stem axis, [east, north] [m]; null:
+ *     none
+ * @param crownAreaM2 frontal area of the crown [m²]; null: ellipse of its width and depth
+ * @param shellM thickness of the sound shell at the cut and up the stem [m]; null: sound through
+ * @param deadOrDecayed whether the wood at the hinge is dead or decayed
+ * @param inLeaf whether the crown is in leaf
+ */
+public record SubjectTree(
+    String id,
+    String species,
+    Place stump,
+    Quantity dbhM,
+    Quantity stumpDiameterM,
+    List<StemDiameter> diameters,
+    Quantity heightM,
+    double crownBaseM,
+    double crownRadiusM,
+    Quantity leanDeg,
+    Quantity leanAzimuthDeg,
+    Quantity massKg,
+    Quantity massCentreM,
+    Double crownShare,
+    Position crownOffsetM,
+    Double crownAreaM2,
+    Double shellM,
+    boolean deadOrDecayed,
+    boolean inLeaf) {
+  public SubjectTree {
+    Range.text("id", id);
+    Range.text("species", species);
+    Range.present("stump", stump);
+    Range.present("dbh_m", dbhM).within("dbh_m", 0.05, 4, "m");
+    if (stumpDiameterM != null) {
+      stumpDiameterM.within("stump_diameter_m", 0.05, 6, "m");
+    }
+    diameters = List.copyOf(Range.present("diameters", diameters));
+    Range.present("height_m", heightM).within("height_m", 2, 120, "m");
+    Range.check("crown_base_m", crownBaseM, 0, heightM.value(), "m");
+    Range.check("crown_radius_m", crownRadiusM, 0.1, 40, "m");
+    Range.present("lean_deg", leanDeg).within("lean_deg", 0, 45, "degrees");
+    Range.present("lean_azimuth_deg", leanAzimuthDeg).within("lean_azimuth_deg", 0, 360, "degrees");
+    if (massKg != null) {
+      massKg.within("mass_kg", 10, 500_000, "kg");
+    }
+    if (massCentreM != null) {
+      massCentreM.within("mass_centre_m", 0.5, heightM.value(), "m");
+    }
+    Range.checkOrNull("crown_share", crownShare, 0, 1, "");
+    Range.checkOrNull("crown_area_m2", crownAreaM2, 0, 5000, "m²");
+    Range.checkOrNull("shell_m", shellM, 0.001, 3, "m");
+    for (StemDiameter d : diameters) {
+      Range.check("diameters.height_m", d.heightM(), 0, heightM.value(), "m");
+    }
+  }
+}
