@@ -16,19 +16,32 @@ import org.fallwright.core.statics.TreeSide;
 final class Reach {
   private Reach() {}
 
+  /**
+   * What the source feels of the tree.
+   *
+   * @param stiffnessNPerM path stiffness at the tree [N/m]
+   * @param takeUpM line to take in at the tree [m]
+   */
+  record Pulled(double stiffnessNPerM, double takeUpM) {
+    /** Of a tree that cannot be moved nothing is known, and a source is asked without. */
+    static Pulled of(TreeSide t) {
+      return t.movable() ? new Pulled(t.pathNPerM(), t.takeUpM()) : new Pulled(0, 0);
+    }
+  }
+
   /** What the source of the way gives at the end of the pull line. */
   static PullOffer of(
-      Site site, Setup way, Route route, TreeSide tree, PullSource source, PullSource driver) {
+      Site site, Setup way, Route route, Pulled pulled, PullSource source, PullSource driver) {
     Gear.Source gear = site.source(way.source()).orElseThrow();
     if (way.driver() == null) {
       return source.offer(
-          request(site, gear, way.mode(), way.place(), route.points(), tree, 1, null));
+          request(site, gear, way.mode(), way.place(), route.points(), pulled, 1, null));
     }
     // what the block system multiplies by does not depend on who hauls it
     double ratio =
         source
             .offer(
-                request(site, gear, way.mode(), way.place(), route.points(), tree, 1, UNIT))
+                request(site, gear, way.mode(), way.place(), route.points(), pulled, 1, UNIT))
             .velocityRatio();
     Gear.Source hauls = site.source(way.driver().source()).orElseThrow();
     PullOffer haul =
@@ -39,11 +52,11 @@ final class Reach {
                 way.driver().mode(),
                 way.driver().place(),
                 route.haul(),
-                tree,
+                pulled,
                 ratio,
                 null));
     return source.offer(
-        request(site, gear, way.mode(), way.place(), route.points(), tree, 1, haul));
+        request(site, gear, way.mode(), way.place(), route.points(), pulled, 1, haul));
   }
 
   /** One newton, moving as the line moves. */
@@ -57,7 +70,7 @@ final class Reach {
       String mode,
       String place,
       List<Point3> points,
-      TreeSide tree,
+      Pulled pulled,
       double travelRatio,
       PullOffer driver) {
     Point3 end = points.get(points.size() - 1);
@@ -79,9 +92,9 @@ final class Reach {
         rise,
         spot == null ? 0 : Math.toRadians(spot.gradeDeg()),
         off,
-        tree.pathNPerM(),
+        pulled.stiffnessNPerM(),
         travelRatio,
-        tree.takeUpM(),
+        pulled.takeUpM(),
         spot == null ? null : spot.runOutM(),
         driver);
   }

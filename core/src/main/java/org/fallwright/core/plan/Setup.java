@@ -31,4 +31,10 @@ public record Setup(
   public Setup {
     redirects = List.copyOf(redirects);
   }
+
+  /** The same with another lay. */
+  public Setup withLay(double lay) {
+    return new Setup(
+        lay, attachHeightM, hingeThicknessM, line, redirects, source, mode, place, driver);
+  }
 }
