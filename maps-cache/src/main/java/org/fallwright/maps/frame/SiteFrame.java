@@ -111,7 +111,6 @@ public final class SiteFrame {
   }
 
   private static double shortWayRound(double lonDeg) {
-    double wrapped = lonDeg - 360 * Math.floor((lonDeg + 180) / 360);
-    return wrapped >= 180 ? wrapped - 360 : wrapped;
+    return Math.IEEEremainder(lonDeg, 360);
   }
 }
