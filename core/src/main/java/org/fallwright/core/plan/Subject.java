@@ -54,7 +54,7 @@ final class Subject {
             leaf * species.dragC().value(),
             species.dragN().value(),
             figures.crownAreaM2(),
-            figures.crownHeightM() - cut.heightM(),
+            figures.crownMiddleM() - cut.heightM(),
             day.airDensity() == null ? Allowances.AIR_DENSITY.value() : day.airDensity());
   }
 
@@ -68,7 +68,7 @@ final class Subject {
 
   /** Notes on figures that were not entered, a sentence each. */
   List<String> notes() {
-    List<String> notes = new ArrayList<>(figures.notes());
+    List<String> notes = new ArrayList<>(figures.remarks().stream().map(Subject::sentence).toList());
     species
         .assumed()
         .forEach(f -> notes.add("No source gives " + f.note() + "; a planning allowance stands in."));
@@ -144,5 +144,9 @@ final class Subject {
         Spreads.of(Spreads.What.GUST, site.conditions().gustMps()) / gust,
         Spreads.of(Spreads.What.ATTACH_HEIGHT, setup.attachHeightM(), site.offer().attachHow()),
         Allowances.BEARING_ASIDE.value() * route.bearingErrorM());
+  }
+
+  private static String sentence(String remark) {
+    return Character.toUpperCase(remark.charAt(0)) + remark.substring(1) + ".";
   }
 }
