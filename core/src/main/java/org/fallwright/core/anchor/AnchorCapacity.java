@@ -6,11 +6,13 @@ import org.fallwright.core.site.Anchor;
 import org.fallwright.core.site.Anchor.Condition;
 
 /**
- * The strength of any anchor of the site under a load of a given direction: the least of the ways in
- * which it can give way, or a refusal with its reason.
+ * The strength of any anchor of the site under a load of a given direction: the least of the ways
+ * in which it can give way, or a refusal with its reason.
  */
 public final class AnchorCapacity {
-  /** Steepest rise of the load that a tree, stump or vehicle is trusted with [degrees]; allowance. */
+  /**
+   * Steepest rise of the load that a tree, stump or vehicle is trusted with [degrees]; allowance.
+   */
   public static final double STEEPEST_UPLIFT_DEG = 30;
 
   /** Least stem diameter of a tree without a tie-back [m]; planning allowance. */

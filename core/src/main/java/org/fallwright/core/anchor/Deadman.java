@@ -5,10 +5,10 @@ import org.fallwright.core.units.Range;
 /**
  * A log buried across the pull in loam.
  *
- * <p>Holding power P [lb per square foot of face] by mean depth and slope of the line; length L = B/(P·D)
- * + 1 ft, with B the breaking load of the line [lb], D the log's diameter [ft] and 1 ft for the
- * line's trench; a log longer than five diameters is rejected. Published: US Army TM 5-5420-278-10,
- * Table 9 and page 317. Its units are kept, as the table is in feet and pounds.
+ * <p>Holding power P [lb per square foot of face] by mean depth and slope of the line; length L =
+ * B/(P·D) + 1 ft, with B the breaking load of the line [lb], D the log's diameter [ft] and 1 ft for
+ * the line's trench; a log longer than five diameters is rejected. Published: US Army TM
+ * 5-5420-278-10, Table 9 and page 317. Its units are kept, as the table is in feet and pounds.
  *
  * @param powerLbPerSqFt holding power [lb/ft²]
  * @param lengthFt length of the log [ft]

@@ -3,10 +3,12 @@ package org.fallwright.core.anchor;
 import org.fallwright.core.units.Range;
 
 /**
- * Holding power of picket holdfasts, wooden pickets of 3 in by 5 ft driven 3 to 4 ft into undisturbed
- * loam and leaned 15 degrees back: ultimate figures for the breaking load of a rated point.
+ * Holding power of picket holdfasts, wooden pickets of 3 in by 5 ft driven 3 to 4 ft into
+ * undisturbed loam and leaned 15 degrees back: ultimate figures for the breaking load of a rated
+ * point.
  *
- * <p>Published: US Navy NAVEDTRA 14251 pp. 172–173. Other soils hold less: loose sand under a tenth.
+ * <p>Published: US Navy NAVEDTRA 14251 pp. 172–173. Other soils hold less: loose sand under a
+ * tenth.
  */
 public enum Pickets {
   SINGLE(700),
@@ -27,8 +29,9 @@ public enum Pickets {
   }
 
   /**
-   * Mass that a row of steel pickets can be trusted to hold, in kg: 350 each, 2,000 in all; 25 mm by
-   * 1.5 m, two thirds buried, 1 m apart. Published: Australian Emergency Manual, Disaster Rescue, 8.3.
+   * Mass that a row of steel pickets can be trusted to hold, in kg: 350 each, 2,000 in all; 25 mm
+   * by 1.5 m, two thirds buried, 1 m apart. Published: Australian Emergency Manual, Disaster
+   * Rescue, 8.3.
    */
   public static double steelRowKg(int pickets) {
     return Math.min(350 * Range.check("pickets", pickets, 1, 50, ""), 2000);

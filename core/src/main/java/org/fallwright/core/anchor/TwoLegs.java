@@ -24,8 +24,7 @@ public record TwoLegs(double firstN, double secondN) {
     Range.check("load_N", loadN, 0, 1e8, "N");
     Range.check("to_first_deg", toFirstDeg, 0, 150, "degrees");
     Range.check("to_second_deg", toSecondDeg, 0, 150, "degrees");
-    double included =
-        Range.check("included angle", toFirstDeg + toSecondDeg, 1, 150, "degrees");
+    double included = Range.check("included angle", toFirstDeg + toSecondDeg, 1, 150, "degrees");
     double sine = Math.sin(Math.toRadians(included));
     return new TwoLegs(
         loadN * Math.sin(Math.toRadians(toSecondDeg)) / sine,

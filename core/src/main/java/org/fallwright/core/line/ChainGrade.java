@@ -3,10 +3,10 @@ package org.fallwright.core.line;
 import org.fallwright.core.units.Range;
 
 /**
- * Round-link chain by grade: breaking load = R·2·π·d²/4, working load a quarter of it; R the mean stress
- * at break [Pa], d the diameter of the link's wire [m]. Formula of the lifting-chain grades; agrees with
- * the default working loads of 49 CFR 393.108 within 3 %. A chain without a mark counts as the weakest
- * grade, 49 CFR 393.108.
+ * Round-link chain by grade: breaking load = R·2·π·d²/4, working load a quarter of it; R the mean
+ * stress at break [Pa], d the diameter of the link's wire [m]. Formula of the lifting-chain grades;
+ * agrees with the default working loads of 49 CFR 393.108 within 3 %. A chain without a mark counts
+ * as the weakest grade, 49 CFR 393.108.
  */
 public enum ChainGrade {
   UNMARKED(3e8),

@@ -5,9 +5,9 @@ import org.fallwright.core.units.Range;
 /**
  * Stretch and stored energy of a line.
  *
- * <p>Stretch T·L/(EA), energy T²·L/(2·EA): T the tension [N], L the length [m], EA the axial stiffness
- * [N]. Linear; a new fibre rope stretches more at first and stores more. A parted line gives a part of
- * it back as motion. Elasticity.
+ * <p>Stretch T·L/(EA), energy T²·L/(2·EA): T the tension [N], L the length [m], EA the axial
+ * stiffness [N]. Linear; a new fibre rope stretches more at first and stores more. A parted line
+ * gives a part of it back as motion. Elasticity.
  *
  * @param stretchM stretch [m]
  * @param energyJ stored energy [J]

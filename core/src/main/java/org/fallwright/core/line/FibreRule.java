@@ -3,8 +3,9 @@ package org.fallwright.core.line;
 import org.fallwright.core.units.Range;
 
 /**
- * Breaking load of a laid rope without a label: c·C² pounds, C the circumference in inches. Rules of thumb of
- * the US Navy Builder manual (published). For a check of an entered figure, never in its place.
+ * Breaking load of a laid rope without a label: c·C² pounds, C the circumference in inches. Rules
+ * of thumb of the US Navy Builder manual (published). For a check of an entered figure, never in
+ * its place.
  */
 public enum FibreRule {
   MANILA(900),

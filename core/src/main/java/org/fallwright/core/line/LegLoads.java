@@ -7,11 +7,11 @@ import org.fallwright.core.units.Range;
 /**
  * Tensions in the legs of a line and loads on its blocks, per newton in the leg at the tree.
  *
- * <p>A block carries |T1·e1 + T2·e2|, e1 and e2 the unit vectors from it along its two legs; for equal
- * tensions 2·T·cos(θ/2), θ the interior angle. Hauling: each leg nearer the source carries the
- * tension before it divided by the block's efficiency k. Holding: the tension is the same in all
- * legs, friction never credited. Straight legs without weight; a sagging line pulls at other angles.
- * Statics.
+ * <p>A block carries |T1·e1 + T2·e2|, e1 and e2 the unit vectors from it along its two legs; for
+ * equal tensions 2·T·cos(θ/2), θ the interior angle. Hauling: each leg nearer the source carries
+ * the tension before it divided by the block's efficiency k. Holding: the tension is the same in
+ * all legs, friction never credited. Straight legs without weight; a sagging line pulls at other
+ * angles. Statics.
  *
  * @param legs legs from the tree outwards
  * @param blocks blocks from the tree outwards

@@ -14,7 +14,9 @@ public record PartStrength(double strengthN, double designFactor, double lastFac
   /** Factor asked of a fibre line. Published: 29 CFR 1918 App. II Table 2 (fibre slings). */
   public static final double FIBRE = 5;
 
-  /** Factor asked of a wire rope that pulls. Published: Oregon tethered logging, a third of break. */
+  /**
+   * Factor asked of a wire rope that pulls. Published: Oregon tethered logging, a third of break.
+   */
   public static final double WIRE = 3;
 
   /** Factor asked at the most the source can do; planning allowance. */
@@ -35,8 +37,8 @@ public record PartStrength(double strengthN, double designFactor, double lastFac
   }
 
   /**
-   * Rated hardware: its breaking load is its rating times the factor of its standard, and that factor
-   * is asked at the planned load.
+   * Rated hardware: its breaking load is its rating times the factor of its standard, and that
+   * factor is asked at the planned load.
    */
   public static PartStrength rated(double ratedLoadN, double standardFactor) {
     Range.check("rated_load_N", ratedLoadN, 100, 1e7, "N");

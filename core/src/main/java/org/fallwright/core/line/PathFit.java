@@ -6,13 +6,13 @@ import java.util.Locale;
 import org.fallwright.core.units.Range;
 
 /**
- * Whether a line, joined to the source's own wire where it has one, reaches along the path and can be
- * hauled without the joint meeting a block or the source.
+ * Whether a line, joined to the source's own wire where it has one, reaches along the path and can
+ * be hauled without the joint meeting a block or the source.
  *
- * <p>The joint starts at a distance s along the path from the tree, no farther than the line reaches
- * and no nearer than the wire leaves open; it moves towards the source by the take-up and must keep
- * {@link #CLEAR_M} from every block on the way and from the source at the end. The greatest s that
- * does is taken. Geometry.
+ * <p>The joint starts at a distance s along the path from the tree, no farther than the line
+ * reaches and no nearer than the wire leaves open; it moves towards the source by the take-up and
+ * must keep {@link #CLEAR_M} from every block on the way and from the source at the end. The
+ * greatest s that does is taken. Geometry.
  *
  * @param fits whether it does
  * @param neededM length that is needed in all: legs, and what wraps, tails and knots use up [m]
@@ -58,14 +58,15 @@ public record PathFit(
     double joint = Double.NaN;
     if (needed > available) {
       shortOf.add(
-          say("line is %.1f m short: %.1f m asked, %.1f there", needed - available, needed, available));
+          say(
+              "line is %.1f m short: %.1f m asked, %.1f there",
+              needed - available, needed, available));
     } else if (wireM > 0) {
       double least = Math.max(0, total - wireM);
       double most = Math.min(lineM - usedUpM, total - takeUpM - CLEAR_M);
       if (most < least) {
         double wire = total - Math.max(most, 0);
-        shortOf.add(
-            say("%.1f m of wire must be out at the start and %.1f m can be", wire, wireM));
+        shortOf.add(say("%.1f m of wire must be out at the start and %.1f m can be", wire, wireM));
       } else {
         joint = clearOfBlocks(blocks, takeUpM, most);
         if (joint < least) {

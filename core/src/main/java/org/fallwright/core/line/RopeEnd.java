@@ -1,9 +1,9 @@
 package org.fallwright.core.line;
 
 /**
- * What an end or a knot leaves of a rope's strength. Published: wire ends US Army TM 5-3810-305-10 Table 4;
- * fibre ends and knots Jacobson, Knots for the Outdoors, p. 24 (after Plymouth Cordage 1946). HMPE is
- * never knotted: it keeps 30 to 40 % (from memory).
+ * What an end or a knot leaves of a rope's strength. Published: wire ends US Army TM 5-3810-305-10
+ * Table 4; fibre ends and knots Jacobson, Knots for the Outdoors, p. 24 (after Plymouth Cordage
+ * 1946). HMPE is never knotted: it keeps 30 to 40 % (from memory).
  */
 public enum RopeEnd {
   WIRE_RESIN_SOCKET(true, false, 1.00),

@@ -5,8 +5,8 @@ import org.fallwright.core.units.Range;
 /** Shackles: the factor of their standard, side loads, and what an unmarked one may carry. */
 public final class Shackles {
   /**
-   * Design factor up to 150 short tons. Published: ASME B30.26-2010, 26-1. A breaking load is never to
-   * be reckoned with more.
+   * Design factor up to 150 short tons. Published: ASME B30.26-2010, 26-1. A breaking load is never
+   * to be reckoned with more.
    */
   public static final double DESIGN_FACTOR = 5;
 
@@ -15,8 +15,8 @@ public final class Shackles {
   private Shackles() {}
 
   /**
-   * Rated load of a shackle without a readable mark [N]: 3·D² short tons, D the diameter of its body in
-   * inches. Published: US Navy rigging training manual.
+   * Rated load of a shackle without a readable mark [N]: 3·D² short tons, D the diameter of its
+   * body in inches. Published: US Navy rigging training manual.
    */
   public static double unmarkedN(double bodyDiameterM) {
     double inches = Range.check("body_diameter_m", bodyDiameterM, 0.004, 0.1, "m") / 0.0254;
@@ -24,9 +24,9 @@ public final class Shackles {
   }
 
   /**
-   * Share of the rating that is left when it is loaded aside by an angle [degrees]: 1, 0.7 and 0.5 up to
-   * 5, 45 and 90 degrees. Angle bands published in WAC 296-155-33905; shares from training slides on
-   * B30.26.
+   * Share of the rating that is left when it is loaded aside by an angle [degrees]: 1, 0.7 and 0.5
+   * up to 5, 45 and 90 degrees. Angle bands published in WAC 296-155-33905; shares from training
+   * slides on B30.26.
    */
   public static double sideLoad(double asideDeg) {
     Range.check("aside_deg", asideDeg, 0, 90, "degrees");

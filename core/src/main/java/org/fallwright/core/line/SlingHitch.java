@@ -4,8 +4,9 @@ import org.fallwright.core.units.Range;
 
 /**
  * Load on a sling as rigged over its vertical rating. Basket: 2·sin of the angle of its legs to the
- * horizontal (statics). Choker: natural fibre 0.45, the lower of 29 CFR 1918 App. II Table 1 (published);
- * wire 0.75 and synthetic 0.80 from memory of ASME B30.9, for a choke angle above 120 degrees.
+ * horizontal (statics). Choker: natural fibre 0.45, the lower of 29 CFR 1918 App. II Table 1
+ * (published); wire 0.75 and synthetic 0.80 from memory of ASME B30.9, for a choke angle above 120
+ * degrees.
  */
 public enum SlingHitch {
   VERTICAL(1),

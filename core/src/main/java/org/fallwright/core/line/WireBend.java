@@ -4,9 +4,9 @@ import org.fallwright.core.reference.Kind;
 import org.fallwright.core.units.Range;
 
 /**
- * What a bend leaves of a wire rope's strength, by the ratio of the bend's diameter to the rope's, at rest.
- * Straight lines between the points of the Wire Rope Technical Board's curve, from memory. Below a ratio
- * of 1 nothing is known and it is refused.
+ * What a bend leaves of a wire rope's strength, by the ratio of the bend's diameter to the rope's,
+ * at rest. Straight lines between the points of the Wire Rope Technical Board's curve, from memory.
+ * Below a ratio of 1 nothing is known and it is refused.
  */
 public final class WireBend {
   /** What stands behind the curve. */

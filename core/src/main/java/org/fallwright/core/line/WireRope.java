@@ -4,10 +4,10 @@ import org.fallwright.core.reference.Kind;
 import org.fallwright.core.units.Range;
 
 /**
- * Breaking load of a stranded wire rope by its core: F = K'·d²·R, d the diameter [m], R the grade of its
- * wires [Pa]. For 6×19 and 6×36 ropes; new and undamaged. Form of EN 12385-4; its constants are carried
- * from memory, and agree with the sling table of EN 13414-1 and with a published table of 6×19 fibre
- * core ropes (see the tests).
+ * Breaking load of a stranded wire rope by its core: F = K'·d²·R, d the diameter [m], R the grade
+ * of its wires [Pa]. For 6×19 and 6×36 ropes; new and undamaged. Form of EN 12385-4; its constants
+ * are carried from memory, and agree with the sling table of EN 13414-1 and with a published table
+ * of 6×19 fibre core ropes (see the tests).
  */
 public enum WireRope {
   FIBRE_CORE(0.330),
@@ -42,9 +42,9 @@ public enum WireRope {
   }
 
   /**
-   * Length of rope on a drum [m]: in the handbook's form 0.2618·B·h·(D + h)/d² feet
-   * with inches inside, B the barrel's width, D its diameter, h the depth of rope on it. Published:
-   * Handbook of Oceanographic Winch, Wire and Cable Technology, ch. 12.
+   * Length of rope on a drum [m]: in the handbook's form 0.2618·B·h·(D + h)/d² feet with inches
+   * inside, B the barrel's width, D its diameter, h the depth of rope on it. Published: Handbook of
+   * Oceanographic Winch, Wire and Cable Technology, ch. 12.
    */
   public static double onDrumM(
       double barrelWidthM, double barrelDiameterM, double depthM, double diameterM) {

@@ -5,8 +5,8 @@ import java.util.Optional;
 import org.fallwright.core.units.Range;
 
 /**
- * The rules of one place. Where the place has none, the answer is the strictest of all sets, marked as a
- * fallback.
+ * The rules of one place. Where the place has none, the answer is the strictest of all sets, marked
+ * as a fallback.
  */
 public final class RuleSet {
   /** What a rule set says of people who pull a line that nothing captures. */
@@ -95,7 +95,9 @@ public final class RuleSet {
     return all.rule(key, "fibre_factor");
   }
 
-  /** Breaking load of every part from drum to stem over the source's greatest pull; 0: not asked. */
+  /**
+   * Breaking load of every part from drum to stem over the source's greatest pull; 0: not asked.
+   */
   public Rule lineTwiceSource() {
     return all.rule(key, "line_over_source");
   }
@@ -105,7 +107,9 @@ public final class RuleSet {
     return all.rule(key, "redirect_anchor_over_source");
   }
 
-  /** Rated load of shackle and sling at a redirect over the source's greatest pull; 0: not asked. */
+  /**
+   * Rated load of shackle and sling at a redirect over the source's greatest pull; 0: not asked.
+   */
   public Rule redirectGearOverSource() {
     return all.rule(key, "redirect_gear_over_source");
   }
@@ -136,17 +140,18 @@ public final class RuleSet {
   }
 
   /**
-   * Ground distance to a wire below which its owner is asked first [m]; only where this set itself has
-   * one.
+   * Ground distance to a wire below which its owner is asked first [m]; only where this set itself
+   * has one.
    */
   public Optional<Rule> consultDistanceM(boolean towers) {
     return all.own(key, towers ? "consult_towers" : "consult_poles");
   }
 
   /**
-   * Distance to keep from a live wire [m]: the greatest of this set's tables and the table that every set
-   * is held to (EM 385-1-1, voltage between phases). A set without a table takes the greatest of all
-   * sets' tables. Empty where the voltage is not known or no table reaches it: then nobody can judge.
+   * Distance to keep from a live wire [m]: the greatest of this set's tables and the table that
+   * every set is held to (EM 385-1-1, voltage between phases). A set without a table takes the
+   * greatest of all sets' tables. Empty where the voltage is not known or no table reaches it: then
+   * nobody can judge.
    *
    * @param kvPhaseToPhase voltage between phases [kV]; null: not known
    */

@@ -22,6 +22,7 @@ public final class RuleSets {
 
   private static final RuleSets SHIPPED = read();
 
+  private final String dateRead;
   private final Map<String, Item> items;
   private final Map<String, Map<String, Cell>> cells = new LinkedHashMap<>();
   private final Map<String, ApproachTable> tables = new LinkedHashMap<>();
@@ -37,6 +38,7 @@ public final class RuleSets {
   private record Cell(double value, Comparison metWhen, String citation, Status status) {}
 
   private RuleSets(Resource resource) {
+    dateRead = resource.dateRead();
     items = resource.items();
     for (ApproachTable t : resource.tables()) {
       tables.put(t.key(), t);
@@ -59,6 +61,11 @@ public final class RuleSets {
   /** The sets that ship with the program. */
   public static RuleSets shipped() {
     return SHIPPED;
+  }
+
+  /** Year and month in which the texts were last read. */
+  public String dateRead() {
+    return dateRead;
   }
 
   /** Keys of all sets, in a fixed order. */
@@ -87,7 +94,8 @@ public final class RuleSets {
   public ApproachTable table(String key) {
     ApproachTable table = tables.get(key);
     if (table == null) {
-      throw new IllegalArgumentException("table is " + key + "; it must be one of " + tables.keySet());
+      throw new IllegalArgumentException(
+          "table is " + key + "; it must be one of " + tables.keySet());
     }
     return table;
   }
@@ -115,7 +123,8 @@ public final class RuleSets {
   }
 
   private Rule strictest(String item) {
-    // a strict "more than" is stricter than "at least"; between equals the better read text is named
+    // a strict "more than" is stricter than "at least"; between equals the better read text is
+    // named
     Comparator<Rule> byValue = Comparator.comparingDouble(Rule::value);
     Comparator<Rule> stricter =
         (items.get(item).strictest().equals("least") ? byValue.reversed() : byValue)

@@ -3,11 +3,14 @@ package org.fallwright.core.rules;
 import org.fallwright.core.units.Range;
 
 /**
- * What a wire at a distance from the stump means, whichever way the tree is meant to fall: a lost hinge or
- * a parted line can send it anywhere.
+ * What a wire at a distance from the stump means, whichever way the tree is meant to fall: a lost
+ * hinge or a parted line can send it anywhere.
  */
 public enum WireReach {
-  /** Tree, rope or anchor can come within the approach distance: the work stops, its owner is called. */
+  /**
+   * Tree, rope or anchor can come within the approach distance: the work stops, its owner is
+   * called.
+   */
   STOP,
   /** Within two tree lengths and the approach distance where the rule set asks for a plan first. */
   AMBER,
@@ -19,8 +22,8 @@ public enum WireReach {
   /**
    * Judges a wire.
    *
-   * @param distanceM distance on the ground from the stump to below the conductor, position errors taken
-   *     off [m]
+   * @param distanceM distance on the ground from the stump to below the conductor, position errors
+   *     taken off [m]
    * @param heightM height of the tree [m]
    * @param approachM approach distance [m]
    * @param rules the rule set
