@@ -20,8 +20,7 @@ final class FiguresOf {
       Landing.Zones zones) {
     TreeSide t = statics.treeSide();
     boolean cell = site.gear().loadCell() != null;
-    double slack =
-        t.takeUpM() - t.shorteningM() - t.workingN() / t.pathNPerM();
+    double slack = t.takeUpM() - t.shorteningM() - t.workingN() / t.pathNPerM();
     return new Figures(
         t.neededN(),
         t.planN(),

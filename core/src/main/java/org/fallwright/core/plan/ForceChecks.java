@@ -40,13 +40,7 @@ final class ForceChecks {
                   + in.smallLength(t.thicknessThatWouldM())
                   + " would.";
       grade.factored(
-          "hinge lets go",
-          t.hingeNm(),
-          t.hingeNm() + t.windNm(),
-          "N·m",
-          0,
-          stump(),
-          why);
+          "hinge lets go", t.hingeNm(), t.hingeNm() + t.windNm(), "N·m", 0, stump(), why);
     } else {
       grade.factored(
           "hinge lets go",
@@ -128,7 +122,9 @@ final class ForceChecks {
     }
     String rests =
         String.format(
-            Locale.ROOT, "Not asked: sitting back, the tree rests on its stump (%.2f).", t.restShare());
+            Locale.ROOT,
+            "Not asked: sitting back, the tree rests on its stump (%.2f).",
+            t.restShare());
     grade.plain(
         "hold",
         r.source().holdN(),

@@ -71,7 +71,11 @@ final class GearParts {
     }
     Gear.LoadCell cell = site.gear().loadCell();
     if (cell != null) {
-      add("load cell " + cell.id(), PartStrength.rated(cell.ratedLoadN(), cell.standardFactor()), end, 1);
+      add(
+          "load cell " + cell.id(),
+          PartStrength.rated(cell.ratedLoadN(), cell.standardFactor()),
+          end,
+          1);
     }
     site.anchor(setup.place())
         .ifPresent(
@@ -135,13 +139,17 @@ final class GearParts {
   }
 
   private void hold(Anchor a, Point3 pull, double hauling, double holding) {
-    Capacity c =
-        AnchorCapacity.of(a, AnchorLoad.of(pull.e(), pull.n(), pull.up()), tables);
+    Capacity c = AnchorCapacity.of(a, AnchorLoad.of(pull.e(), pull.n(), pull.up()), tables);
     anchors.add(new Held(a, c));
     if (!c.refused()) {
       parts.add(
           new Part(
-              "anchor " + a.id(), c.strengthN(), c.designFactor(), c.lastFactor(), hauling, holding));
+              "anchor " + a.id(),
+              c.strengthN(),
+              c.designFactor(),
+              c.lastFactor(),
+              hauling,
+              holding));
     }
     AnchorCapacity.ratedPoint(a)
         .ifPresent(
@@ -179,7 +187,9 @@ final class GearParts {
                     holding));
   }
 
-  /** Where a rule sizes gear by its rating against the most of the source, that is its last factor. */
+  /**
+   * Where a rule sizes gear by its rating against the most of the source, that is its last factor.
+   */
   private static PartStrength rated(double ratedN, double standard, boolean ratedForSource) {
     PartStrength p = PartStrength.rated(ratedN, standard);
     return ratedForSource

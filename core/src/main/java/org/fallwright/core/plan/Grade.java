@@ -12,7 +12,9 @@ import org.fallwright.core.site.Position;
  * workable, so that checks of both kinds can be ranked together.
  */
 final class Grade {
-  /** Ratio from which a check without a design factor of its own is workable; planning allowance. */
+  /**
+   * Ratio from which a check without a design factor of its own is workable; planning allowance.
+   */
   static final double WORKABLE = 1.25;
 
   private final List<Check> checks = new ArrayList<>();

@@ -24,9 +24,9 @@ import org.fallwright.core.units.DisplayUnits;
  * Judges one setup by every check there is; none is left out because another fails. Safe for use by
  * several threads.
  *
- * <p>The order of the checks is that of the questions a person asks: can it be judged at all, is each
- * anchor usable, does the lay land clear, does the line run clear, does the kit reach, does every part
- * hold, does the source pull and hold, can people stand clear.
+ * <p>The order of the checks is that of the questions a person asks: can it be judged at all, is
+ * each anchor usable, does the lay land clear, does the line run clear, does the kit reach, does
+ * every part hold, does the source pull and hold, can people stand clear.
  */
 public final class Judge {
   private final Site site;
@@ -39,8 +39,8 @@ public final class Judge {
   private final Map<Setup, Route> routes = new ConcurrentHashMap<>();
 
   /**
-   * @throws IllegalArgumentException one sentence, where the site names a species, surface or rule set
-   *     that is not known
+   * @throws IllegalArgumentException one sentence, where the site names a species, surface or rule
+   *     set that is not known
    */
   public Judge(Site site, PullSources sources) {
     this.site = site;
@@ -56,16 +56,24 @@ public final class Judge {
     return subject.notes();
   }
 
-  /** The setup with all its checks. */
+  /** The setup with all its checks, its zones and notes. */
   public Judged judge(Setup setup) {
+    return judge(setup, true);
+  }
+
+  /** The same checks, figures and sentence without zones and notes, which take longer. */
+  Judged quick(Setup setup) {
+    return judge(setup, false);
+  }
+
+  private Judged judge(Setup setup, boolean full) {
     Gear.Source gear = site.source(setup.source()).orElseThrow();
     PullSource source = kind(gear.plugin());
     PullSource driver =
         setup.driver() == null
             ? null
             : kind(site.source(setup.driver().source()).orElseThrow().plugin());
-    Route route =
-        routes.computeIfAbsent(setup.withLay(0), w -> Route.of(site, w, source, driver));
+    Route route = routes.computeIfAbsent(setup.withLay(0), w -> Route.of(site, w, source, driver));
     PullCase pull = subject.pull(setup, route);
     Statics statics = new Statics(pull);
     TreeSide tree = statics.treeSide();
@@ -76,7 +84,7 @@ public final class Judge {
     Grade grade = new Grade();
     landing.knowledge(grade);
     usable(grade, parts);
-    Landing.Zones zones = landing.check(grade, setup, route, tree);
+    Landing.Zones zones = landing.check(grade, setup, route, tree, full);
     new KitChecks(site, in, grade).check(setup, route, tree, offer, parts);
     ForceChecks forces = new ForceChecks(site, in, grade);
     forces.movement(tree, pull.line().attachHeightM());
@@ -93,15 +101,16 @@ public final class Judge {
       }
       figures = FiguresOf.reckon(site, route, statics, r, offer, stopped.leans(), zones);
       loads = loads(r, tree);
-      notes.addAll(SetupNotes.of(site, in, setup, tree, r, offer));
+      if (full) {
+        notes.addAll(SetupNotes.of(site, in, setup, tree, r, offer));
+      }
     } else {
       figures = FiguresOf.unmovable(route, tree, zones);
     }
     for (PullOffer.Finding f : offer.checks()) {
-      grade.factored(
-          f.id(), f.value(), f.limit(), f.unit(), f.ratio(), place(setup).at(), f.why());
+      grade.factored(f.id(), f.value(), f.limit(), f.unit(), f.ratio(), place(setup).at(), f.why());
     }
-    landing.people(grade, setup, route, zones, offer, figures);
+    landing.people(grade, setup, zones, offer);
     notes.addAll(offer.notes());
     Check weakest = grade.weakest();
     return new Judged(
@@ -120,8 +129,8 @@ public final class Judge {
   }
 
   /**
-   * The ratios after any stop, and whether the setup leans on a person who reads a load cell: it does
-   * where a part would give way at the most the source can do, and a load cell is there.
+   * The ratios after any stop, and whether the setup leans on a person who reads a load cell: it
+   * does where a part would give way at the most the source can do, and a load cell is there.
    */
   private record Stopped(Ratios ratios, boolean leans) {}
 
@@ -131,8 +140,7 @@ public final class Judge {
     boolean captured = offer.captured() && offer.holdN() >= tree.holdN();
     boolean wedges = site.cut().wedges();
     SourceAtTree free =
-        new SourceAtTree(
-            low, offer.holdN(), offer.highN(), captured, SourceAtTree.Stop.NONE, 0);
+        new SourceAtTree(low, offer.holdN(), offer.highN(), captured, SourceAtTree.Stop.NONE, 0);
     Ratios without = Ratios.of(statics, wedges, free, parts);
     boolean breaks =
         without.byCheck().entrySet().stream()
@@ -160,8 +168,7 @@ public final class Judge {
             + r.ceiling().part()
             + " is loaded past its factor.";
     if (offer.powered()) {
-      grade.tightAtBest(
-          "stop reading", r.ceiling().tensionN(), r.source().highN(), "N", null, why);
+      grade.tightAtBest("stop reading", r.ceiling().tensionN(), r.source().highN(), "N", null, why);
     } else {
       grade.factored(
           "stop reading",

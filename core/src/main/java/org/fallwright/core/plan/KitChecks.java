@@ -55,9 +55,7 @@ final class KitChecks {
     }
     enough("blocks", site.gear().blocks().size(), setup.redirects().size());
     enough(
-        "slings",
-        site.gear().slings().stream().mapToInt(Gear.Sling::count).sum(),
-        gear.slings());
+        "slings", site.gear().slings().stream().mapToInt(Gear.Sling::count).sum(), gear.slings());
     enough(
         "connectors",
         site.gear().connectors().stream().mapToInt(Gear.Connector::count).sum(),

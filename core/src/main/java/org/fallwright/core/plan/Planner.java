@@ -3,6 +3,7 @@ package org.fallwright.core.plan;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.EnumMap;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
@@ -61,7 +62,7 @@ public final class Planner {
                     if (cancelled.getAsBoolean()) {
                       throw new java.util.concurrent.CancellationException();
                     }
-                    tally.add(judge.judge(all.get(i).withLay(lay)));
+                    tally.add(judge.quick(all.get(i).withLay(lay)));
                   }
                   progress.accept((double) done.incrementAndGet() / all.size());
                   return tally;
@@ -73,7 +74,8 @@ public final class Planner {
       best.add(t.best);
       total.merge(t);
     }
-    best.sort(BEST_FIRST);
+    best = shown(best, judge);
+    total.bestRejected.replaceAll((id, j) -> judge.judge(j.setup()));
     List<String> notes = new ArrayList<>(ways.notes());
     notes.addAll(judge.notes());
     return new Plan(
@@ -83,6 +85,19 @@ public final class Planner {
         total.byBinding,
         total.bestRejected,
         notes);
+  }
+
+  /**
+   * The best lay of each way, best way first. Of ways that differ only in the pull line one is
+   * kept: the better, or of equals the first, for lines are tried from the shortest.
+   */
+  private static List<Judged> shown(List<Judged> best, Judge judge) {
+    Map<Setup, Judged> byWay = new LinkedHashMap<>();
+    for (Judged j : best) {
+      byWay.merge(
+          j.setup().withLay(0).withLine(""), j, (a, b) -> BEST_FIRST.compare(b, a) < 0 ? b : a);
+    }
+    return byWay.values().stream().sorted(BEST_FIRST).map(j -> judge.judge(j.setup())).toList();
   }
 
   /** What one way brought over all its lays. */

@@ -40,8 +40,7 @@ final class Reach {
     // what the block system multiplies by does not depend on who hauls it
     double ratio =
         source
-            .offer(
-                request(site, gear, way.mode(), way.place(), route.points(), pulled, 1, UNIT))
+            .offer(request(site, gear, way.mode(), way.place(), route.points(), pulled, 1, UNIT))
             .velocityRatio();
     Gear.Source hauls = site.source(way.driver().source()).orElseThrow();
     PullOffer haul =

@@ -76,9 +76,7 @@ record Route(
   }
 
   static Place place(Site site, String id) {
-    return site.spot(id)
-        .map(Spot::place)
-        .orElseGet(() -> site.anchor(id).orElseThrow().place());
+    return site.spot(id).map(Spot::place).orElseGet(() -> site.anchor(id).orElseThrow().place());
   }
 
   private static LinePoint attachment(Site site, double heightAboveGround) {

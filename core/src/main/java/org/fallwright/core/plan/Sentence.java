@@ -7,8 +7,7 @@ import org.fallwright.core.units.DisplayUnits;
 final class Sentence {
   private Sentence() {}
 
-  static String of(
-      Verdict verdict, Check weakest, Figures f, String source, DisplayUnits in) {
+  static String of(Verdict verdict, Check weakest, Figures f, String source, DisplayUnits in) {
     String head = verdict.word();
     head = Character.toUpperCase(head.charAt(0)) + head.substring(1) + ". ";
     if (verdict != Verdict.WORKABLE) {
@@ -20,7 +19,8 @@ final class Sentence {
     String link =
         Double.isInfinite(weakest.ratio())
             ? "nothing is near its limit"
-            : String.format(Locale.ROOT, "%s, %.2f times what is asked", weakest.id(), weakest.ratio());
+            : String.format(
+                Locale.ROOT, "%s, %.2f times what is asked", weakest.id(), weakest.ratio());
     return head
         + "Plan for "
         + in.both(u -> u.forceAtLeast(f.pullPlanN()))

@@ -37,4 +37,10 @@ public record Setup(
     return new Setup(
         lay, attachHeightM, hingeThicknessM, line, redirects, source, mode, place, driver);
   }
+
+  /** The same with another line. */
+  Setup withLine(String other) {
+    return new Setup(
+        layDeg, attachHeightM, hingeThicknessM, other, redirects, source, mode, place, driver);
+  }
 }

@@ -45,8 +45,7 @@ final class Subject {
             species.crushPa().value(),
             species.knotFactor().value());
     Conditions day = site.conditions();
-    double leaf =
-        species.broadleaf() && !tree.inLeaf() ? Allowances.LEAFLESS_DRAG.value() : 1;
+    double leaf = species.broadleaf() && !tree.inLeaf() ? Allowances.LEAFLESS_DRAG.value() : 1;
     wind =
         new Wind(
             day.gustMps().value(),
@@ -68,10 +67,12 @@ final class Subject {
 
   /** Notes on figures that were not entered, a sentence each. */
   List<String> notes() {
-    List<String> notes = new ArrayList<>(figures.remarks().stream().map(Subject::sentence).toList());
+    List<String> notes =
+        new ArrayList<>(figures.remarks().stream().map(Subject::sentence).toList());
     species
         .assumed()
-        .forEach(f -> notes.add("No source gives " + f.note() + "; a planning allowance stands in."));
+        .forEach(
+            f -> notes.add("No source gives " + f.note() + "; a planning allowance stands in."));
     return notes;
   }
 
@@ -130,8 +131,7 @@ final class Subject {
   private Spread spread(Setup setup, Route route) {
     SubjectTree tree = site.tree();
     double thickness =
-        Spreads.of(
-            Spreads.What.HINGE_THICKNESS, setup.hingeThicknessM(), site.cut().hingeHow());
+        Spreads.of(Spreads.What.HINGE_THICKNESS, setup.hingeThicknessM(), site.cut().hingeHow());
     double gust = Math.max(Allowances.GUST_LEAST.value(), site.conditions().gustMps().value());
     return new Spread(
         figures.massSdKg() / figures.massKg(),

@@ -1,6 +1,7 @@
 package org.fallwright.core.plan;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
@@ -15,9 +16,9 @@ import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 
 /**
- * All candidates of a site: every source in every mode at every place where it can be, direct or over
- * one redirect on every other anchor, with each attach height and hinge thickness on offer; and every
- * lay. The order is fixed.
+ * All candidates of a site: every source in every mode at every place where it can be, direct or
+ * over one redirect on every other anchor, with each attach height and hinge thickness on offer;
+ * and every lay. The order is fixed.
  */
 final class Ways {
   private final Site site;
@@ -37,7 +38,11 @@ final class Ways {
   /** Every way to pull; the lay of each is 0 and means nothing yet. */
   List<Setup> all() {
     List<Setup> ways = new ArrayList<>();
-    List<Gear.Line> lines = site.gear().lines().stream().filter(Gear.Line::pullLine).toList();
+    List<Gear.Line> lines =
+        site.gear().lines().stream()
+            .filter(Gear.Line::pullLine)
+            .sorted(Comparator.comparingDouble(Gear.Line::lengthM))
+            .toList();
     if (lines.isEmpty()) {
       notes.add("No pull line is in the gear, so nothing can be pulled.");
     }
@@ -75,14 +80,20 @@ final class Ways {
             continue;
           }
           ways.add(
-              new Setup(
-                  0, attach, hinge, line.id(), List.of(), source.id(), mode, place, driver));
+              new Setup(0, attach, hinge, line.id(), List.of(), source.id(), mode, place, driver));
           if (site.offer().redirects() >= 1 && !site.gear().blocks().isEmpty()) {
             for (Anchor a : site.anchors()) {
               if (!a.id().equals(place)) {
                 ways.add(
                     new Setup(
-                        0, attach, hinge, line.id(), List.of(a.id()), source.id(), mode, place,
+                        0,
+                        attach,
+                        hinge,
+                        line.id(),
+                        List.of(a.id()),
+                        source.id(),
+                        mode,
+                        place,
                         driver));
               }
             }
@@ -102,8 +113,7 @@ final class Ways {
         continue;
       }
       for (String place : driver.places()) {
-        boolean allowed =
-            tackle.driverPlaces().isEmpty() || tackle.driverPlaces().contains(place);
+        boolean allowed = tackle.driverPlaces().isEmpty() || tackle.driverPlaces().contains(place);
         if (allowed && canBe(kind.get(), driver, place)) {
           for (String mode : kind.get().modes(driver.parameters())) {
             drivers.add(new Setup.Driver(id, mode, place));
@@ -118,7 +128,10 @@ final class Ways {
     Optional<PullSource> kind = sources.byId(source.plugin());
     if (kind.isEmpty()) {
       notes.add(
-          "Source \"" + source.id() + "\" is left out: no plugin \"" + source.plugin()
+          "Source \""
+              + source.id()
+              + "\" is left out: no plugin \""
+              + source.plugin()
               + "\" is loaded.");
     }
     return kind;
@@ -129,7 +142,11 @@ final class Ways {
     boolean can = kind.describe().places().contains(at);
     if (!can) {
       notes.add(
-          "Source \"" + source.id() + "\" cannot be at \"" + place + "\": it needs "
+          "Source \""
+              + source.id()
+              + "\" cannot be at \""
+              + place
+              + "\": it needs "
               + (at == PlaceKind.SPOT ? "an anchor." : "a spot."));
     }
     return can;

@@ -20,10 +20,13 @@ public interface PullSource {
   List<String> modes(ObjectNode parameters);
 
   /**
-   * Height at which the line meets the source above the ground of its spot [m]; not asked on an
-   * anchor, where the sling's height counts.
+   * Height at which the line meets the source above the ground of its spot [m], from 0 to 5; not
+   * asked on an anchor, where the sling's height counts. Half a metre unless the source knows
+   * better (planning allowance).
    */
-  double lineHeightM(ObjectNode parameters);
+  default double lineHeightM(ObjectNode parameters) {
+    return 0.5;
+  }
 
   /**
    * What it gives at its place, at the least and at the most.

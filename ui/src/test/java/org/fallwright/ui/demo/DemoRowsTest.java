@@ -17,7 +17,8 @@ import org.junit.jupiter.api.Test;
 
 /**
  * What the demo site must bring out: each row's verdict and reason, the figures recomputed here and
- * compared with those worked out beforehand by an earlier hand, and every switch that flips a verdict.
+ * compared with those worked out beforehand by an earlier hand, and every switch that flips a
+ * verdict.
  */
 class DemoRowsTest {
   private static final DemoSite DEMO = DemoSite.asItIs();
@@ -195,16 +196,14 @@ class DemoRowsTest {
     figures(j, 4.73, 6.36, 9.80, 1.54);
     assertThat(check(j, "operator distance").verdict()).isEqualTo(Verdict.TIGHT);
     Judged de =
-        DEMO.with(s -> s.put("rule_set", "DE-DGUV"))
-            .judge(direct(3, "hand-winch", "pull", "A1"));
+        DEMO.with(s -> s.put("rule_set", "DE-DGUV")).judge(direct(3, "hand-winch", "pull", "A1"));
     is(de, Verdict.NOT_WORKABLE);
     assertThat(check(de, "operator distance").verdict()).isEqualTo(Verdict.NOT_WORKABLE);
   }
 
   @Test
   void row11NothingIsJudgedWhileTheVoltageIsNotStated() {
-    DemoSite blank =
-        DEMO.with(s -> DemoSite.entry(s.get("wires"), "W1").putNull("voltage_kv"));
+    DemoSite blank = DEMO.with(s -> DemoSite.entry(s.get("wires"), "W1").putNull("voltage_kv"));
     for (Setup s : new Setup[] {ROW_4, ROW_6, direct(3, "hand-winch", "pull", "A1")}) {
       Judged j = blank.judge(s);
       is(j, Verdict.CANNOT_JUDGE);
@@ -274,8 +273,7 @@ class DemoRowsTest {
     DemoSite eight = DEMO.with(s -> ((ObjectNode) s.at("/tree/lean_deg")).put("value", 8.0));
     tight(eight, ROW_4, 1.04);
     tight(eight, ROW_6, 1.14);
-    assertThat(
-            check(eight.judge(direct(323, "hand-winch", "pull", "A3")), "hinge turning").ratio())
+    assertThat(check(eight.judge(direct(323, "hand-winch", "pull", "A3")), "hinge turning").ratio())
         .isCloseTo(0.71, within(0.02));
   }
 
@@ -353,8 +351,7 @@ class DemoRowsTest {
                 DemoSite.entry(s.get("targets"), "C1")
                     .withObject("/shape")
                     .withArray("points")
-                    .forEach(
-                        p -> ((ArrayNode) p).set(0, p.get(0).asDouble() - 1)));
+                    .forEach(p -> ((ArrayNode) p).set(0, p.get(0).asDouble() - 1)));
     Judged j = moved.judge(ROW_4);
     is(j, Verdict.NOT_WORKABLE);
     assertThat(j.weakest().id()).isEqualTo("line clear of C1");

@@ -24,7 +24,8 @@ public final class DemoSite {
   /** The site file in the tree. */
   public static final Path FILE = Path.of("demo", "oak-behind-the-house.fallsite.json");
 
-  private static final PluginFolder PLUGINS = PluginFolder.open(Path.of("target", "plugins"), "0.1.0");
+  private static final PluginFolder PLUGINS =
+      PluginFolder.open(Path.of("target", "plugins"), "0.1.0");
 
   private final ObjectNode tree;
 

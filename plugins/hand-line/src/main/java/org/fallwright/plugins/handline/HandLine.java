@@ -68,6 +68,11 @@ public final class HandLine implements PullSourceExtension {
   }
 
   @Override
+  public double lineHeightM(ObjectNode parameters) {
+    return new ParameterReader(DESCRIPTION, parameters).number("hand_height_m");
+  }
+
+  @Override
   public PullOffer offer(PullRequest request) {
     Parameters crew = read(request.parameters());
     if (!request.mode().equals("pull")) {

@@ -74,6 +74,16 @@ final class GuardedSource implements PullSource {
   }
 
   @Override
+  public double lineHeightM(ObjectNode parameters) {
+    double answer =
+        guarded("say how high its line is", () -> source.lineHeightM(parameters.deepCopy()));
+    if (!(answer >= 0 && answer <= 5)) {
+      throw nonsense("says its line is " + answer + " m high; it must be from 0 to 5 m", null);
+    }
+    return answer;
+  }
+
+  @Override
   public PullOffer offer(PullRequest request) {
     PullRequest copy =
         new PullRequest(

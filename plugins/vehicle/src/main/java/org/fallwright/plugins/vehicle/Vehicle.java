@@ -81,6 +81,11 @@ public final class Vehicle implements PullSourceExtension {
   }
 
   @Override
+  public double lineHeightM(ObjectNode parameters) {
+    return new ParameterReader(DESCRIPTION, parameters).number("hitch_height_m");
+  }
+
+  @Override
   public PullOffer offer(PullRequest request) {
     ParameterReader reader = new ParameterReader(DESCRIPTION, request.parameters());
     List<String> drives = reader.choices("drives");
