@@ -136,8 +136,9 @@ public final class Winch implements PullSourceExtension {
     }
     notes.add(
         winch.overloadN == null
-            ? "No overload device is stated: the winch is taken to stall at 1.25 times its rated"
-                + " pull on the bare drum."
+            ? "No overload device is stated: the winch is taken to stall at "
+                + STALL
+                + " times its rated pull on the bare drum."
             : "If the overload device gives way, stop: never replace it by a stronger one.");
     return notes;
   }
