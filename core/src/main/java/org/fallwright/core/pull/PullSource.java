@@ -20,6 +20,12 @@ public interface PullSource {
   List<String> modes(ObjectNode parameters);
 
   /**
+   * Height at which the line meets the source above the ground of its spot [m]; not asked on an
+   * anchor, where the sling's height counts.
+   */
+  double lineHeightM(ObjectNode parameters);
+
+  /**
    * What it gives at its place, at the least and at the most.
    *
    * @throws IllegalArgumentException one sentence naming the parameter, its value and its limit
