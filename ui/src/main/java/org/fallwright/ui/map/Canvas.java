@@ -12,6 +12,7 @@ import org.locationtech.jts.geom.Envelope;
 import org.locationtech.jts.geom.Geometry;
 import org.locationtech.jts.geom.GeometryFactory;
 import org.locationtech.jts.geom.Point;
+import org.locationtech.jts.linearref.LengthIndexedLine;
 
 /** What the painters of one drawing share: the scene, the view, the pen and the labels wanted. */
 record Canvas(PlanScene scene, Viewport view, Pen pen, Labels labels) {
@@ -57,6 +58,21 @@ record Canvas(PlanScene scene, Viewport view, Pen pen, Labels labels) {
     labels.want(new Labels.Wanted(text, at, clearanceUnits * unit(), rank, true, c));
   }
 
+  /** Keeps a straight stroke free of labels. */
+  void keepFree(Point2D from, Point2D to) {
+    double step = 5 * unit();
+    int n = (int) Math.ceil(from.distance(to) / step);
+    for (int i = 0; i <= n && n < 2000; i++) {
+      Point2D p =
+          new Point2D.Double(
+              from.getX() + (to.getX() - from.getX()) * i / n,
+              from.getY() + (to.getY() - from.getY()) * i / n);
+      if (view.frame().contains(p)) {
+        labels.keepFree(p, 2.5 * unit());
+      }
+    }
+  }
+
   /** A label on the visible part of an area or line; none where nothing of it is visible. */
   void labelOn(String text, Geometry metres, int rank, boolean must, Color c) {
     Geometry seen = visible(metres);
@@ -72,9 +88,7 @@ record Canvas(PlanScene scene, Viewport view, Pen pen, Labels labels) {
       at = view.toPixel(use.getX(), use.getY());
       clearance = -1;
     } else {
-      Coordinate m =
-          new org.locationtech.jts.linearref.LengthIndexedLine(seen)
-              .extractPoint(seen.getLength() / 2);
+      Coordinate m = new LengthIndexedLine(seen).extractPoint(seen.getLength() / 2);
       at = view.toPixel(m.x, m.y);
       clearance = 5 * unit();
     }

@@ -91,6 +91,7 @@ public final class Labels {
       }
     }
     for (Placed p : placed) {
+      pen.plate(p.box());
       pen.textAround(
           p.label().text(), p.box().getCenterX(), p.box().getCenterY(), p.label().colour());
     }

@@ -65,9 +65,11 @@ final class LinePainter {
     Point2D neck =
         new Point2D.Double(
             to.getX() - way.getX() * 10 * c.unit(), to.getY() - way.getY() * 10 * c.unit());
-    pen.stroke(new Line2D.Double(from, neck), ink, 4.2);
-    pen.plain(new Line2D.Double(from, neck), c.palette().halo(), 1.2);
-    pen.solid(pen.fullHead(neck, way, 14), ink, ink, 1);
+    // hollow and wider than the line, so that both show where they coincide
+    pen.stroke(new Line2D.Double(from, neck), ink, 8);
+    pen.plain(new Line2D.Double(from, neck), Palette.clear(c.palette().halo(), 255), 5.2);
+    pen.solid(pen.fullHead(neck, way, 20), ink, ink, 1);
+    c.keepFree(from, to);
     pen.stroke(pen.disc(to, 5), ink, 1.6);
     double r = 8 * c.unit();
     pen.stroke(new Line2D.Double(to.getX() - r, to.getY(), to.getX() + r, to.getY()), ink, 1.2);
@@ -104,15 +106,7 @@ final class LinePainter {
     if (d > 40 * c.unit()) {
       c.label(c.scene().amounts().length(metres), mid, 7, 4, ink);
     }
-    // a line of small boxes keeps labels off the leg
-    for (double s = 0.1; s < 0.95; s += 0.05) {
-      c.labels()
-          .keepFree(
-              new Point2D.Double(
-                  from.getX() + (to.getX() - from.getX()) * s,
-                  from.getY() + (to.getY() - from.getY()) * s),
-              2 * c.unit());
-    }
+    c.keepFree(from, to);
   }
 
   private static void point(Canvas c, LinePoint p, Color ink) {

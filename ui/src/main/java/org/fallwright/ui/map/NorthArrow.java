@@ -25,11 +25,11 @@ public final class NorthArrow {
     Color ink = palette.ink();
     if (declinationDeg != null) {
       Point2D m = view.direction(declinationDeg);
-      Point2D tip = off(centre, m, length * 0.5 * pen.unit());
+      Point2D tip = off(centre, m, length * 0.75 * pen.unit());
       pen.stroke(new Line2D.Double(off(centre, m, -length * 0.4 * pen.unit()), tip), ink, 1, 3, 2);
       pen.stroke(pen.head(tip, m, 5), ink, 1);
-      Point2D word = off(centre, m, (length * 0.5 + 9) * pen.unit());
-      double aside = (declinationDeg < 0 ? -1 : 1) * 13 * pen.unit();
+      Point2D word = off(centre, m, (length * 0.75 + 2) * pen.unit());
+      double aside = (declinationDeg < 0 ? -1 : 1) * 16 * pen.unit();
       pen.textAround(
           Messages.text("plan.north.magnetic"),
           word.getX() - m.getY() * aside,

@@ -12,6 +12,7 @@ import java.awt.geom.Line2D;
 import java.awt.geom.Path2D;
 import java.awt.geom.Point2D;
 import java.awt.geom.Rectangle2D;
+import java.awt.geom.RoundRectangle2D;
 
 /**
  * Strokes, hatches and text with a halo, so that they stand out on grass, roof and snow alike. All
@@ -131,6 +132,15 @@ public final class Pen {
   public void textAround(String text, double x, double y, Color c) {
     Rectangle2D box = extent(text);
     text(text, x - box.getWidth() / 2, y - box.getHeight() / 2 - box.getY(), c);
+  }
+
+  /** A light plate to read a text on. */
+  void plate(Rectangle2D box) {
+    double round = 5 * unit;
+    fill(
+        new RoundRectangle2D.Double(
+            box.getX(), box.getY(), box.getWidth(), box.getHeight(), round, round),
+        Palette.clear(halo, 185));
   }
 
   /** Room that a text takes; y from its baseline. */

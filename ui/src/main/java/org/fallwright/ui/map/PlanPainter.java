@@ -11,6 +11,9 @@ import org.locationtech.jts.geom.Envelope;
  * take their size from the graphics' font; nothing outside the view's frame is painted.
  */
 public final class PlanPainter {
+  /** Room about everything, enough for a vehicle at an outer spot [m]. */
+  private static final double ROOM_M = 6;
+
   private final PlanScene scene;
 
   public PlanPainter(PlanScene scene) {
@@ -87,6 +90,9 @@ public final class PlanPainter {
     if (chosen != null && scene.shows(PlanLayer.LINE)) {
       LinePainter.setup(canvas, chosen);
     }
+    if (scene.shows(PlanLayer.ANCHORS)) {
+      SupportsPainter.marks(canvas);
+    }
   }
 
   /** The area that shows a site and, where there is one, all zones of a setup on it [m]. */
@@ -104,7 +110,7 @@ public final class PlanPainter {
       e.expandToInclude(ground.sitBack().getEnvelopeInternal());
       chosen.line().forEach(p -> e.expandToInclude(p.at().eastM(), p.at().northM()));
     }
-    e.expandBy(3);
+    e.expandBy(ROOM_M);
     return e;
   }
 }

@@ -50,9 +50,15 @@ final class SupportsPainter {
         diamond.closePath();
         pen.solid(pen.put(diamond, at, 0), c.palette().halo(), ink, 1.6);
       }
-      mark(c, a).ifPresent(v -> beside(c, v, at));
       c.labels().keepFree(at, size * c.unit());
       c.must(words(a), at, size + 2, 2, ink);
+    }
+  }
+
+  /** Marks go on top of everything that may stand at an anchor. */
+  static void marks(Canvas c) {
+    for (Anchor a : c.scene().site().anchors()) {
+      mark(c, a).ifPresent(v -> beside(c, v, c.at(a.place().at())));
     }
   }
 

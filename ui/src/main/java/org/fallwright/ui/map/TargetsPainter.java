@@ -2,11 +2,13 @@ package org.fallwright.ui.map;
 
 import java.awt.Color;
 import java.awt.Shape;
+import java.awt.geom.Line2D;
 import java.awt.geom.Point2D;
 import org.fallwright.core.site.DropZone;
 import org.fallwright.core.site.Target;
 import org.fallwright.ui.text.Messages;
 import org.locationtech.jts.geom.Geometry;
+import org.locationtech.jts.linearref.LengthIndexedLine;
 
 /** Targets, told apart by kind, and drop zones. */
 final class TargetsPainter {
@@ -78,7 +80,7 @@ final class TargetsPainter {
 
   /** Short cross strokes along a fence, some paces apart on the drawing. */
   private static void posts(Canvas c, Geometry m, Color ink) {
-    var line = new org.locationtech.jts.linearref.LengthIndexedLine(m);
+    var line = new LengthIndexedLine(m);
     double step = 16 * c.unit() / c.view().pixelsPerMetre();
     for (double at = step / 2; at < m.getLength(); at += step) {
       var p = line.extractPoint(at);
@@ -91,8 +93,7 @@ final class TargetsPainter {
         double dy = (b.getY() - a.getY()) / n * 3 * c.unit();
         c.pen()
             .plain(
-                new java.awt.geom.Line2D.Double(
-                    a.getX() - dy, a.getY() + dx, a.getX() + dy, a.getY() - dx),
+                new Line2D.Double(a.getX() - dy, a.getY() + dx, a.getX() + dy, a.getY() - dx),
                 ink,
                 1.2);
       }

@@ -3,8 +3,11 @@ package org.fallwright.ui.map;
 import java.awt.BasicStroke;
 import java.awt.Color;
 import java.awt.Shape;
+import java.awt.geom.AffineTransform;
+import java.awt.geom.Area;
 import java.awt.geom.Ellipse2D;
 import java.awt.geom.Path2D;
+import java.awt.geom.Point2D;
 import java.awt.geom.Rectangle2D;
 import org.fallwright.core.plan.Verdict;
 
@@ -28,8 +31,8 @@ public final class VerdictMark {
   /** Paints a mark; size 1 makes it 12 units high. */
   public static void paint(Pen pen, Verdict verdict, double x, double y, double size, Color c) {
     Path2D scaled = new Path2D.Double(shape(verdict));
-    scaled.transform(java.awt.geom.AffineTransform.getScaleInstance(size, size));
-    Shape s = pen.put(scaled, new java.awt.geom.Point2D.Double(x, y), 0);
+    scaled.transform(AffineTransform.getScaleInstance(size, size));
+    Shape s = pen.put(scaled, new Point2D.Double(x, y), 0);
     pen.stroke(s, c, 0.4);
     pen.fill(s, c);
   }
@@ -40,7 +43,7 @@ public final class VerdictMark {
       p.moveTo(ends[i], ends[i + 1]);
       p.lineTo(ends[i + 2], ends[i + 3]);
     }
-    return new java.awt.geom.Area(
+    return new Area(
         new BasicStroke(3.2f, BasicStroke.CAP_BUTT, BasicStroke.JOIN_MITER).createStrokedShape(p));
   }
 

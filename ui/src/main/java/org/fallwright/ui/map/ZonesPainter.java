@@ -15,12 +15,16 @@ import org.locationtech.jts.geom.Geometry;
  * itself.
  */
 final class ZonesPainter {
+  /** How much a zone lightens the picture under it, of 255. */
+  private static final int LIGHTEN = 60;
+
   private ZonesPainter() {}
 
   static void sitBack(Canvas c, Judged chosen) {
     Geometry m = chosen.ground().sitBack();
     Shape s = c.view().toPixels(m);
-    c.pen().hatch(s, Palette.clear(c.palette().sitBack(), 150), 13, 1, 45);
+    c.pen().fill(s, Palette.clear(c.palette().halo(), LIGHTEN));
+    c.pen().hatch(s, Palette.clear(c.palette().sitBack(), 190), 13, 1, 45);
     c.pen().stroke(s, c.palette().sitBack(), 1.8);
     c.labelOn(Messages.text("plan.sit-back"), m, 3, true, c.palette().sitBack());
   }
@@ -28,7 +32,7 @@ final class ZonesPainter {
   static void footprint(Canvas c, Judged chosen) {
     Geometry m = chosen.ground().footprint();
     Shape s = c.view().toPixels(m);
-    c.pen().fill(s, Palette.clear(c.palette().footprint(), 26));
+    c.pen().fill(s, Palette.clear(c.palette().halo(), LIGHTEN));
     c.pen().dots(s, c.palette().footprint(), 15, 2.2);
     c.pen().stroke(s, c.palette().footprint(), 3.2);
   }
@@ -50,8 +54,9 @@ final class ZonesPainter {
   static void bights(Canvas c, Judged chosen) {
     for (Geometry m : chosen.ground().bights()) {
       Shape s = c.view().toPixels(m);
-      c.pen().hatch(s, Palette.clear(c.palette().bight(), 150), 14, 1, 25);
-      c.pen().hatch(s, Palette.clear(c.palette().bight(), 150), 14, 1, 115);
+      c.pen().fill(s, Palette.clear(c.palette().halo(), LIGHTEN));
+      c.pen().hatch(s, Palette.clear(c.palette().bight(), 190), 14, 1, 25);
+      c.pen().hatch(s, Palette.clear(c.palette().bight(), 190), 14, 1, 115);
       c.pen().stroke(s, c.palette().bight(), 1.6);
       c.labelOn(Messages.text("plan.bight"), m, 1, true, c.palette().bight());
     }
@@ -80,6 +85,7 @@ final class ZonesPainter {
       c.pen().stroke(shaft, c.palette().wayOut(), 2.2, 5, 3);
       c.pen().stroke(c.pen().head(to, way, 9), c.palette().wayOut(), 2.4);
       n++;
+      c.keepFree(from, to);
       c.label(Messages.text("plan.way-out", String.valueOf(n)), to, 5, 3, c.palette().wayOut());
     }
   }
