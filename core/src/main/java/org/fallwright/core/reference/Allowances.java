@@ -186,8 +186,7 @@ public final class Allowances {
 
   // Wind
   public static final Figure AIR_DENSITY =
-      published(
-          "air-density", 1.2226, "kg/m³", "mayhead-1973", "density of the air unless entered");
+      remembered("air-density", 1.225, "kg/m³", "isa", "density of the air unless entered");
   public static final Figure GUST_OVER_MEAN =
       allowance("gust-over-mean", 1.6, "", "gust over mean wind at crown height");
   public static final Figure GUST_LEAST =
@@ -401,6 +400,11 @@ public final class Allowances {
   private static Figure published(
       String key, double value, String unit, String source, String note) {
     return add(new Figure(key, value, unit, Kind.PUBLISHED, source, note));
+  }
+
+  private static Figure remembered(
+      String key, double value, String unit, String source, String note) {
+    return add(new Figure(key, value, unit, Kind.FROM_MEMORY, source, note));
   }
 
   private static Figure add(Figure figure) {

@@ -14,7 +14,7 @@ import org.fallwright.core.units.Range;
  * @param name English name
  * @param latin botanical name
  * @param broadleaf whether it bears leaves that it sheds (else a conifer)
- * @param massGroup number of its group of mass equations, 1 to 9
+ * @param massGroup number of its group of mass equations, 1 to 10
  * @param greenDensity green density of the stem with bark [kg/m³], nominal
  * @param otherDensities green densities that other sources give [kg/m³]
  * @param dryToGreen green mass over dry mass, wood and bark of the stem
@@ -53,7 +53,7 @@ public record Species(
     Range.text("key", key);
     Range.text("name", name);
     Range.text("latin", latin);
-    Range.check("mass_group", massGroup, 1, 9, "");
+    Range.check("mass_group", massGroup, 1, 10, "");
     within(greenDensity, 300, 1400);
     otherDensities = List.copyOf(otherDensities);
     otherDensities.forEach(d -> within(d, 300, 1400));
