@@ -75,6 +75,12 @@ public record Site(
             .flatMap(s -> s));
     oneNameEach(gear.sources().stream().map(Gear.Source::id));
     oneNameEach(gear.lines().stream().map(Gear.Line::id));
+    oneNameEach(
+        Stream.of(
+                gear.blocks().stream().map(Gear.Block::id),
+                gear.slings().stream().map(Gear.Sling::id),
+                gear.connectors().stream().map(Gear.Connector::id))
+            .flatMap(s -> s));
     for (Gear.Source s : gear.sources()) {
       for (String place : s.places()) {
         known(anchors, spots, "gear.sources." + s.id() + ".places", place);
