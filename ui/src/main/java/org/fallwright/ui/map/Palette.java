@@ -108,7 +108,7 @@ public record Palette(
   }
 
   /** A colour let through to some share of 255. */
-  static Color clear(Color c, int alpha) {
+  public static Color clear(Color c, int alpha) {
     return new Color(c.getRed(), c.getGreen(), c.getBlue(), alpha);
   }
 }

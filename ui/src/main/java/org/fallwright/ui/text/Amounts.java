@@ -45,6 +45,20 @@ public final class Amounts {
     return fixed(n / POUND_FORCE_N, 0) + " lbf";
   }
 
+  /** A force that is needed [N]: never shown as less than it is. */
+  public String forceNeeded(double n) {
+    return force(Math.ceil(n / forceStep(n) - 1e-9) * forceStep(n));
+  }
+
+  /** A force that something can give [N]: never shown as more than it is. */
+  public String forceGiven(double n) {
+    return force(Math.floor(n / forceStep(n) + 1e-9) * forceStep(n));
+  }
+
+  private double forceStep(double n) {
+    return metric() ? Math.abs(n) < 9995 ? 10 : 100 : POUND_FORCE_N;
+  }
+
   /** A mass [kg]. */
   public String mass(double kg) {
     return metric() ? fixed(kg, 0) + " kg" : fixed(kg / POUND_KG, 0) + " lb";
