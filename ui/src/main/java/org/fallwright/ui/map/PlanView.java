@@ -1,0 +1,229 @@
+package org.fallwright.ui.map;
+
+import java.awt.Graphics;
+import java.awt.Graphics2D;
+import java.awt.Rectangle;
+import java.awt.event.ComponentAdapter;
+import java.awt.event.ComponentEvent;
+import java.awt.event.MouseAdapter;
+import java.awt.event.MouseEvent;
+import java.awt.geom.Line2D;
+import java.awt.geom.Point2D;
+import java.awt.geom.Rectangle2D;
+import java.util.function.Consumer;
+import org.fallwright.core.site.Position;
+import org.fallwright.core.site.Site;
+import org.fallwright.maps.frame.LatLon;
+import org.fallwright.maps.frame.SiteFrame;
+import org.fallwright.ui.text.Messages;
+import org.jxmapviewer.JXMapViewer;
+import org.jxmapviewer.input.PanMouseInputListener;
+import org.jxmapviewer.input.ZoomMouseWheelListenerCursor;
+import org.jxmapviewer.viewer.GeoPosition;
+import org.jxmapviewer.viewer.TileFactory;
+import org.locationtech.jts.geom.Envelope;
+
+/**
+ * The plan on screen: the map widget with tiles, or blank ground with a grid, under the plan
+ * painter. Dragging pans, the wheel zooms about the pointer.
+ */
+public final class PlanView extends JXMapViewer {
+  /** Distance over which the widget's own projection is taken as even [m]. */
+  private static final double SPAN_M = 100;
+
+  private SiteFrame earth;
+  private PlanScene scene;
+  private Position flagged;
+  private Palette palette = Palette.DAY;
+  private Envelope wanted;
+  private boolean blank = true;
+  private transient Consumer<Position> pointed = p -> {};
+
+  public PlanView() {
+    setTileFactory(new BlankTiles());
+    setRestrictOutsidePanning(true);
+    setHorizontalWrapped(false);
+    PanMouseInputListener pan = new PanMouseInputListener(this);
+    addMouseListener(pan);
+    addMouseMotionListener(pan);
+    addMouseWheelListener(new ZoomMouseWheelListenerCursor(this));
+    addMouseWheelListener(e -> wanted = null);
+    addMouseMotionListener(
+        new MouseAdapter() {
+          @Override
+          public void mouseMoved(MouseEvent e) {
+            pointed.accept(place(e));
+          }
+
+          @Override
+          public void mouseDragged(MouseEvent e) {
+            wanted = null;
+          }
+        });
+    addComponentListener(
+        new ComponentAdapter() {
+          @Override
+          public void componentResized(ComponentEvent e) {
+            if (wanted != null) {
+              fit(wanted);
+            }
+          }
+        });
+    setOverlayPainter((g, map, w, h) -> overlay(g));
+    getAccessibleContext().setAccessibleName(Messages.text("plan.name"));
+  }
+
+  /** Shows a site on its picture's tiles; null: blank ground. */
+  public void show(Site site, TileFactory tiles) {
+    earth = new SiteFrame(site.origin());
+    blank = tiles == null;
+    setTileFactory(blank ? new BlankTiles() : tiles);
+    fit(PlanPainter.extent(site, null));
+  }
+
+  /** Draws this scene from now on; null: nothing. */
+  public void draw(PlanScene shown) {
+    scene = shown;
+    repaint();
+  }
+
+  /** Rings a place of the site; null: none. */
+  public void flag(Position place) {
+    flagged = place;
+    repaint();
+  }
+
+  /** Colours of blank ground. */
+  public void use(Palette ground) {
+    palette = ground;
+    setBackground(ground.paper());
+    repaint();
+  }
+
+  /** Who is told the place under the pointer; null where there is none. */
+  public void onPointed(Consumer<Position> listener) {
+    pointed = listener;
+  }
+
+  /** Shows all of an area as large as the zoom steps allow, and again whenever the size changes. */
+  public void fit(Envelope metres) {
+    wanted = metres;
+    if (earth == null || getWidth() == 0 || getHeight() == 0) {
+      return;
+    }
+    LatLon middle = earth.toEarth(metres.centre().x, metres.centre().y);
+    GeoPosition centre = new GeoPosition(middle.latDeg(), middle.lonDeg());
+    int coarsest = getTileFactory().getInfo().getMaximumZoomLevel();
+    for (int zoom = 0; zoom <= coarsest; zoom++) {
+      setZoom(zoom);
+      setCenterPosition(centre);
+      double k = viewport().pixelsPerMetre();
+      if (zoom == coarsest
+          || metres.getWidth() * k <= getWidth() && metres.getHeight() * k <= getHeight()) {
+        break;
+      }
+    }
+    repaint();
+  }
+
+  /** One zoom step nearer (1) or farther (-1), about the middle. */
+  public void step(int nearer) {
+    wanted = null;
+    GeoPosition centre = getCenterPosition();
+    setZoom(getZoom() - nearer);
+    setCenterPosition(centre);
+  }
+
+  /** The view as it is now. */
+  public Viewport viewport() {
+    Rectangle seen = getViewportBounds();
+    return Viewport.through(
+        pixel(0, 0, seen),
+        pixel(SPAN_M, 0, seen),
+        pixel(0, SPAN_M, seen),
+        SPAN_M,
+        new Rectangle2D.Double(0, 0, getWidth(), getHeight()));
+  }
+
+  /** Whether a site is shown. */
+  public boolean hasSite() {
+    return earth != null;
+  }
+
+  @Override
+  protected void drawMapTiles(Graphics g, int zoom, Rectangle seen) {
+    if (!blank) {
+      super.drawMapTiles(g, zoom, seen);
+      return;
+    }
+    g.setColor(palette.paper());
+    g.fillRect(0, 0, getWidth(), getHeight());
+    if (earth != null) {
+      grid((Graphics2D) g.create());
+    }
+  }
+
+  private Point2D pixel(double east, double north, Rectangle seen) {
+    LatLon p = earth.toEarth(east, north);
+    Point2D world = getTileFactory().geoToPixel(new GeoPosition(p.latDeg(), p.lonDeg()), getZoom());
+    return new Point2D.Double(world.getX() - seen.getX(), world.getY() - seen.getY());
+  }
+
+  private void grid(Graphics2D g) {
+    Viewport view = viewport();
+    double step = 10;
+    while (view.pixels(step) < 40) {
+      step *= 10;
+    }
+    Point2D low = view.toMetres(new Point2D.Double(0, getHeight()));
+    Point2D high = view.toMetres(new Point2D.Double(getWidth(), 0));
+    g.setColor(palette.faint());
+    for (double e = Math.floor(low.getX() / step) * step; e <= high.getX(); e += step) {
+      g.draw(new Line2D.Double(view.toPixel(e, low.getY()), view.toPixel(e, high.getY())));
+    }
+    for (double n = Math.floor(low.getY() / step) * step; n <= high.getY(); n += step) {
+      g.draw(new Line2D.Double(view.toPixel(low.getX(), n), view.toPixel(high.getX(), n)));
+    }
+    g.dispose();
+  }
+
+  private void overlay(Graphics2D graphics) {
+    if (scene == null || earth == null) {
+      return;
+    }
+    Graphics2D g = (Graphics2D) graphics.create();
+    g.setFont(getFont());
+    Viewport view = viewport();
+    new PlanPainter(scene).paint(g, view);
+    Pen pen = new Pen(g, scene.palette().halo());
+    double u = pen.unit();
+    if (flagged != null) {
+      pen.stroke(pen.disc(view.toPixel(flagged), 16), scene.palette().notWorkable(), 3);
+    }
+    NorthArrow.paint(
+        pen,
+        view,
+        scene.site().declinationDeg(),
+        scene.palette(),
+        new Point2D.Double(getWidth() - 40 * u, 50 * u),
+        38);
+    ScaleBar.paint(
+        pen, view, scene.amounts(), scene.palette(), 14 * u, getHeight() - 12 * u, 200 * u);
+    String date = PictureDate.words(scene.site());
+    pen.text(
+        date,
+        getWidth() - pen.extent(date).getWidth() - 12 * u,
+        getHeight() - 12 * u,
+        scene.palette().ink());
+    g.dispose();
+  }
+
+  private Position place(MouseEvent e) {
+    if (earth == null) {
+      return null;
+    }
+    Point2D m = viewport().toMetres(e.getPoint());
+    boolean far = Math.max(Math.abs(m.getX()), Math.abs(m.getY())) > Position.FARTHEST;
+    return far ? null : new Position(m.getX(), m.getY());
+  }
+}

@@ -1,0 +1,114 @@
+package org.fallwright.ui.setups;
+
+import java.util.List;
+import org.fallwright.core.plan.Check;
+import org.fallwright.core.plan.Figures;
+import org.fallwright.core.plan.Judged;
+import org.fallwright.core.plan.Plan;
+import org.fallwright.core.plan.Verdict;
+import org.fallwright.core.site.Site;
+import org.fallwright.ui.text.Amounts;
+import org.fallwright.ui.text.Messages;
+
+/**
+ * What the answer strip says of a setup.
+ *
+ * @param verdict its mark; null while there is nothing to judge
+ * @param word the verdict's word
+ * @param sentence one sentence
+ * @param cells the figures beside it, always the same ones in the same order
+ */
+public record Answer(Verdict verdict, String word, String sentence, List<Cell> cells) {
+  /**
+   * One figure of the strip.
+   *
+   * @param key which it is, a key of the bundle
+   * @param value the figure, or a dash
+   * @param note what it stands for, short
+   */
+  public record Cell(String key, String value, String note) {}
+
+  private static final String NONE = "–";
+
+  /** The answer without a site, or while the plan is on its way. */
+  public static Answer empty(String word, String sentence) {
+    return new Answer(
+        null,
+        word,
+        sentence,
+        List.of(
+            new Cell("needs", NONE, ""),
+            new Cell("gives", NONE, ""),
+            new Cell("clears", NONE, ""),
+            new Cell("weakest", NONE, "")));
+  }
+
+  /** Nothing could be ranked. */
+  public static Answer nothing(Plan plan, Amounts amounts) {
+    return empty(
+        Verdict.NOT_WORKABLE.word(),
+        plan.judged() == 0
+            ? Messages.text("answer.no-setup")
+            : Messages.text("answer.none-works", String.valueOf(plan.judged())));
+  }
+
+  public static Answer of(Site site, Judged j, Amounts amounts) {
+    return new Answer(
+        j.verdict(),
+        j.verdict().word(),
+        sentence(j, amounts),
+        List.of(needs(j, amounts), gives(j, amounts), clears(j, amounts), weakest(j, amounts)));
+  }
+
+  private static String sentence(Judged j, Amounts amounts) {
+    String way =
+        Messages.text("answer.way", Way.title(j.setup()), amounts.azimuth(j.setup().layDeg()));
+    Check w = j.weakest();
+    if (w == null) {
+      return Messages.text("answer.only-way", way);
+    }
+    return switch (j.verdict()) {
+      case WORKABLE ->
+          Double.isFinite(w.ratio())
+              ? Messages.text("answer.workable", way, w.id(), amounts.ratio(w.ratio()))
+              : Messages.text("answer.only-way", way);
+      case TIGHT, NOT_WORKABLE, CANNOT_JUDGE ->
+          Messages.text("answer.because", way, w.id(), w.why());
+    };
+  }
+
+  private static Cell needs(Judged j, Amounts amounts) {
+    Figures f = j.figures();
+    if (f == null || Double.isNaN(f.pullPlanN())) {
+      return new Cell("needs", NONE, "");
+    }
+    return new Cell(
+        "needs",
+        amounts.forceNeeded(f.pullPlanN()),
+        Messages.text("answer.needs.note", amounts.forceNeeded(f.pullNeededN())));
+  }
+
+  private static Cell gives(Judged j, Amounts amounts) {
+    Figures f = j.figures();
+    return f == null || Double.isNaN(f.sourceLowN())
+        ? new Cell("gives", NONE, "")
+        : new Cell(
+            "gives",
+            amounts.forceGiven(f.sourceLowN()),
+            Messages.text("answer.gives.note", amounts.ratio(f.pullMargin())));
+  }
+
+  private static Cell clears(Judged j, Amounts amounts) {
+    Figures f = j.figures();
+    return f == null || f.clearanceTarget() == null || Double.isNaN(f.clearanceM())
+        ? new Cell("clears", NONE, Messages.text("answer.clears.none"))
+        : new Cell("clears", amounts.length(f.clearanceM()), f.clearanceTarget());
+  }
+
+  private static Cell weakest(Judged j, Amounts amounts) {
+    Check w = j.weakest();
+    return w == null
+        ? new Cell("weakest", NONE, "")
+        : new Cell("weakest", amounts.ratio(w.ratio()), w.id());
+  }
+}
