@@ -120,14 +120,13 @@ public final class SiteFile {
       line[body.length] = '\n';
       return line;
     } catch (JsonProcessingException e) {
-      throw new IllegalArgumentException("a text or a plugin's parameters are not valid JSON", e);
+      throw new IllegalArgumentException("a plugin's parameters hold what is not JSON", e);
     }
   }
 
   private static String text(byte[] bytes, String name) throws SiteFileException {
     try {
-      String text =
-          StandardCharsets.UTF_8.newDecoder().decode(ByteBuffer.wrap(bytes)).toString();
+      String text = StandardCharsets.UTF_8.newDecoder().decode(ByteBuffer.wrap(bytes)).toString();
       return text.startsWith("\uFEFF") ? text.substring(1) : text;
     } catch (CharacterCodingException e) {
       throw new SiteFileException(name + " is not UTF-8 text; a site file must be.", e);
