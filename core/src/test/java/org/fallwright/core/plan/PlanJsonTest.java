@@ -187,6 +187,8 @@ class PlanJsonTest {
         v,
         pull,
         1,
+        List.of(),
+        0,
         v.word(),
         f,
         List.of(pull, new Check("wires", Double.NaN, 3.05, "m", Double.NaN, v, null, "unknown")),

@@ -78,12 +78,9 @@ class DemoGroundTest {
     assertThat(sum / (3 * 256 * 256)).as("mean difference of 255").isLessThan(6);
   }
 
-  /**
-   * The south-east corner of the house: red roof inside, ground outside, at every zoom that shows
-   * it.
-   */
+  /** Corners of the house: red roof inside, ground outside; JPEG smears colour over two pixels. */
   @ParameterizedTest
-  @CsvSource({"19, 0.6", "20, 0.4", "21, 0.3"})
+  @CsvSource({"19, 1.0", "20, 0.5", "21, 0.3"})
   void theHouseStandsWhereItsCoordinatesSay(int zoom, double step) throws IOException {
     try (MbTiles tiles = MbTiles.open(FILE)) {
       double[][] corners = {{6, 2, 1, 1}, {27, 2, -1, 1}, {27, 13, -1, -1}};
