@@ -224,8 +224,11 @@ final class ForceChecks {
           "N",
           r.byCheck().get(p.name() + " at plan"),
           at(p.name()),
-          () -> in.both(u -> u.forceAtLeast(plan))
-              + " come on it; "
+          () ->
+              capital(p.name())
+                  + " bears "
+                  + in.both(u -> u.forceAtLeast(plan))
+                  + " as planned; "
               + in.both(u -> u.forceAtMost(allowed))
               + " are allowed.");
       grade.factored(
@@ -235,12 +238,18 @@ final class ForceChecks {
           "N",
           r.byCheck().get(p.name() + " at high"),
           at(p.name()),
-          () -> "If the source stalls, slips or jerks "
-              + in.both(u -> u.forceAtLeast(high))
-              + " come on it; "
+          () ->
+              capital(p.name())
+                  + " bears "
+                  + in.both(u -> u.forceAtLeast(high))
+                  + " if the source stalls, slips or jerks; "
               + in.both(u -> u.forceAtMost(last))
               + " are the most.");
     }
+  }
+
+  private static String capital(String name) {
+    return Character.toUpperCase(name.charAt(0)) + name.substring(1);
   }
 
   private Position at(String part) {

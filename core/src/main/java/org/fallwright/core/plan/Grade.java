@@ -45,6 +45,32 @@ final class Grade {
     add(id, value, limit, unit, ratio, 1, at, why);
   }
 
+  /**
+   * A limit of a rule, or one whose allowance is inside it: to meet it is enough, and then it does not
+   * rank.
+   */
+  void rule(
+      String id,
+      double value,
+      double limit,
+      String unit,
+      double ratio,
+      Position at,
+      Supplier<String> why) {
+    boolean met = ratio >= 1;
+    put(
+        new Check(
+            id,
+            value,
+            limit,
+            unit,
+            ratio,
+            met ? Verdict.WORKABLE : Verdict.NOT_WORKABLE,
+            at,
+            said(why)),
+        met ? Double.POSITIVE_INFINITY : ratio);
+  }
+
   /** A thing that is allowed but never better than tight. */
   void tightAtBest(
       String id, double value, double limit, String unit, Position at, Supplier<String> why) {

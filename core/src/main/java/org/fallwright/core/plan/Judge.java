@@ -108,7 +108,7 @@ public final class Judge {
       figures = FiguresOf.unmovable(route, tree, zones);
     }
     for (PullOffer.Finding f : offer.checks()) {
-      grade.factored(f.id(), f.value(), f.limit(), f.unit(), f.ratio(), place(setup).at(), () -> f.why());
+      grade.rule(f.id(), f.value(), f.limit(), f.unit(), f.ratio(), place(setup).at(), () -> f.why());
     }
     landing.people(grade, setup, zones, offer);
     notes.addAll(offer.notes());

@@ -34,7 +34,7 @@ final class KitChecks {
             offer.wireM(),
             takeUp);
     boolean reaches = fit.neededM() <= fit.availableM();
-    grade.factored(
+    grade.rule(
         "line length",
         fit.availableM(),
         fit.neededM(),
@@ -51,7 +51,7 @@ final class KitChecks {
                 ? "."
                 : ": stand " + in.length(fit.neededM() - fit.availableM()) + " nearer."));
     if (reaches && !fit.fits()) {
-      grade.factored("joint", 0, 1, "", 0, null, () -> sentence(fit.shortOf()));
+      grade.rule("joint", 0, 1, "", 0, null, () -> sentence(fit.shortOf()));
     }
     enough("blocks", site.gear().blocks().size(), setup.redirects().size());
     enough(
@@ -64,7 +64,7 @@ final class KitChecks {
 
   private void enough(String what, int there, int needed) {
     if (needed > 0) {
-      grade.factored(
+      grade.rule(
           what,
           there,
           needed,

@@ -180,7 +180,7 @@ final class Landing {
                         landed.footprint(), sitBack, angles.bights(), angles.recoil(), legs(route)),
                     rules.escapeLengthM().value(),
                     site.tree().heightM().value()));
-    grade.factored(
+    grade.rule(
         "ways out",
         ways.size(),
         1,
@@ -291,7 +291,7 @@ final class Landing {
     }
     for (WireCheck.Reach r : reach) {
       double there = r.groundM() - r.errorM();
-      grade.factored(
+      grade.rule(
           "wire " + r.wireId() + " in reach",
           there,
           r.stopM(),
@@ -506,7 +506,7 @@ final class Landing {
             place.at(),
             () -> stands + ": only as one of the team, named on the sheet with the reason.");
       } else {
-        grade.factored(
+        grade.rule(
             "operator distance",
             o.fromStumpM(),
             asked,
@@ -518,7 +518,7 @@ final class Landing {
             () -> stands + (far ? "." : ", and these rules know no exception."));
       }
       boolean clear = o.outsideFootprint() && o.outsideBights();
-      grade.factored(
+      grade.rule(
           "operator clear",
           clear ? 1 : 0,
           1,

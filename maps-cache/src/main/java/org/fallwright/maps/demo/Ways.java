@@ -5,14 +5,10 @@ final class Ways {
   /** Half the driveway's width [m]. */
   private static final double DRIVE = 1.6;
 
-<<<<<<< HEAD
-  /** From the road gate past V1 to the bend, then round the shed to the place before the garage. */
-=======
   /**
    * From the road gate past V1 to the bend, then round the shed to the gravelled place by the
    * house.
    */
->>>>>>> maps
   private static final Trace DRIVEWAY =
       Trace.smooth(
           new double[] {23.2, 92.5},
