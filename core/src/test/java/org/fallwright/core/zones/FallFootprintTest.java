@@ -154,6 +154,19 @@ class FallFootprintTest {
   }
 
   @Test
+  void aHugeStumpAndAHugeLeanStillGiveASoundOutline() {
+    for (double lean : new double[] {0, 20, 45}) {
+      for (double azimuth : new double[] {0, 90, 180, 270}) {
+        FallOutline tree = new FallOutline(5, 0, 12, 6, lean, azimuth);
+        FallFootprint f = FallFootprint.of(tree, Things.at(0, 0), 30, 2, 0);
+        assertThat(f.geometry().isValid()).isTrue();
+        assertThat(f.contains(Things.at(-0.1, -2.9))).isTrue();
+        assertThat(f.geometry().getArea()).isGreaterThan(Math.PI * 2.5 * 12);
+      }
+    }
+  }
+
+  @Test
   void marginsOfShortAndTallTrees() {
     FallOutline small = new FallOutline(10, 4, 2, 0.3, 0, 0);
     FallOutline tall = new FallOutline(40, 15, 4, 1, 0, 0);

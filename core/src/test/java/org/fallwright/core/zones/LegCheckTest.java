@@ -157,6 +157,7 @@ class LegCheckTest {
     LegCheck check = new LegCheck(List.of(), List.of(), List.of(Things.wire(10, 0)));
     LegCheck.Passing p = one(check, level(2));
     assertThat(p.clearanceM()).as("crossing 7.5 m below").isCloseTo(7.5, within(1e-6));
+    assertThat(p.place().eastM()).isCloseTo(10, within(1e-6));
     assertThat(p.askedM()).isCloseTo(3.25, within(1e-12));
   }
 
