@@ -79,8 +79,7 @@ public final class FallFootprint {
     boolean leansAside = Math.abs(push) * (reach + slideM) > 1e-6;
     for (double p : leansAside ? new double[] {0, push} : new double[] {0}) {
       pieces.add(sweep.crown(outline.crownBaseM(), reach, outline.crownRadiusM(), slideM, p));
-      pieces.add(
-          sweep.strip(outline.stumpDiameterM() / 2, reach + slideM, outline.buttM(), p));
+      pieces.add(sweep.strip(outline.stumpDiameterM() / 2, reach + slideM, outline.buttM(), p));
     }
     return new FallFootprint(stump, layDeg, half, reach, pieces);
   }
