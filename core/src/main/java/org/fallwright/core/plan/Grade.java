@@ -35,19 +35,31 @@ final class Grade {
 
   /** A check without a design factor inside. */
   void plain(
-      String id, double value, double limit, String unit, double ratio, Position at, Supplier<String> why) {
+      String id,
+      double value,
+      double limit,
+      String unit,
+      double ratio,
+      Position at,
+      Supplier<String> why) {
     add(id, value, limit, unit, ratio, WORKABLE, at, why);
   }
 
   /** A check with a design factor inside. */
   void factored(
-      String id, double value, double limit, String unit, double ratio, Position at, Supplier<String> why) {
+      String id,
+      double value,
+      double limit,
+      String unit,
+      double ratio,
+      Position at,
+      Supplier<String> why) {
     add(id, value, limit, unit, ratio, 1, at, why);
   }
 
   /**
-   * A limit of a rule, or one whose allowance is inside it: to meet it is enough, and then it does not
-   * rank.
+   * A limit of a rule, or one whose allowance is inside it: to meet it is enough, and then it does
+   * not rank.
    */
   void rule(
       String id,
