@@ -28,6 +28,9 @@ import org.fallwright.core.units.DisplayUnits;
  * every part hold, does the source pull and hold, can people stand clear.
  */
 public final class Judge {
+  /** More than there are checks: those that cannot be made where the tree does not move all count. */
+  private static final int NOT_MADE = 1000;
+
   private final Site site;
   private final PullSources sources;
   private final RuleSet rules;
@@ -119,7 +122,7 @@ public final class Judge {
         weakest,
         grade.standing(),
         grade.standings(),
-        grade.failing(),
+        grade.failing() + (tree.movable() ? 0 : NOT_MADE),
         full ? Sentence.of(grade.verdict(), weakest, figures, name, in) : "",
         figures,
         grade.checks(),

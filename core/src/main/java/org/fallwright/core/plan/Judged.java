@@ -10,7 +10,7 @@ import java.util.List;
  * @param weakest the check with the lowest ratio among the worst
  * @param standing ratio of the weakest link over the ratio from which it is workable
  * @param standings standings of all checks that have a limit, lowest first
- * @param failing how many checks are not workable
+ * @param failing how many checks are not workable; those that could not be made count as well
  * @param sentence verdict and weakest link in one sentence, in the site's units
  * @param figures its figures
  * @param checks every check, in a fixed order
