@@ -365,6 +365,7 @@ public final class DemoLike {
         setup,
         verdict,
         pull,
+        1.1,
         "{verdict}: the source gives {ratio} times the pull to plan for.",
         f,
         checks,

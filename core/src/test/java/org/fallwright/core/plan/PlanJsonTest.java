@@ -186,6 +186,7 @@ class PlanJsonTest {
             new Setup.Driver("pick-up", "4WD", "V1")),
         v,
         pull,
+        1,
         v.word(),
         f,
         List.of(pull, new Check("wires", Double.NaN, 3.05, "m", Double.NaN, v, null, "unknown")),
