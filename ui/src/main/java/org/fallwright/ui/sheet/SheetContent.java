@@ -160,6 +160,10 @@ record SheetContent(
 
   private static List<Line> pull(DisplayUnits in, Figures f) {
     List<Line> lines = new ArrayList<>();
+    if (Double.isNaN(f.pullPlanN())) {
+      lines.add(new Line("Not worked out", "the tree cannot be moved this way"));
+      return lines;
+    }
     lines.add(
         new Line(
             "Source gives",
