@@ -366,6 +366,8 @@ public final class DemoLike {
         verdict,
         pull,
         1.1,
+        List.of(),
+        0,
         "{verdict}: the source gives {ratio} times the pull to plan for.",
         f,
         checks,

@@ -15,9 +15,18 @@ final class Crowns {
    * @param seed of its unevenness
    */
   private record Crown(
-      double e, double n, double radius, double base, double top, boolean pointed, double hue, int seed) {}
+      double e,
+      double n,
+      double radius,
+      double base,
+      double top,
+      boolean pointed,
+      double hue,
+      int seed) {}
 
-  /** T1's crown hangs over by its lean: 5 degrees towards 188 at 11.75 m, the crown's mid height. */
+  /**
+   * T1's crown hangs over by its lean: 5 degrees towards 188 at 11.75 m, the crown's mid height.
+   */
   private static final Crown[] SITE = {
     new Crown(16.0 - 0.14, 24.0 - 1.02, 4.5, 6.0, 17.5, false, 0.42, 101),
     new Crown(17.5, 53.0, 5.0, 6.0, 19.0, false, 0.30, 102),
@@ -33,6 +42,11 @@ final class Crowns {
   };
 
   private static final double CELL = 5.6;
+
+  /** Cells of the woods on each side of the origin: 840 m. */
+  private static final int REACH = 150;
+
+  private static final Crown[][] WOODS = planted();
 
   private Crowns() {}
 
@@ -139,10 +153,10 @@ final class Crowns {
   /** Bunches of leaves, -1 to 1: rounded tops with dark gaps between. */
   private static double lumps(Crown c, double e, double n) {
     double size = Math.max(0.45, Math.min(1, c.radius / 4.5));
-    double limb = 1 - 2 * Math.abs(Noise.at(e, n, 1.9 * size, c.seed + 2));
-    double bunch = 1 - 2 * Math.abs(Noise.at(e, n, 0.85 * size, c.seed + 3));
+    double limb = Noise.heaps(e, n, 2.1 * size, c.seed + 2);
+    double bunch = Noise.heaps(e, n, 0.95 * size, c.seed + 3);
     double leaf = Noise.at(e, n, 0.4, c.seed + 4);
-    return 0.45 * limb + 0.37 * bunch + 0.18 * leaf;
+    return 0.46 * limb + 0.36 * bunch + 0.18 * leaf;
   }
 
   /** A ray towards the sun through the crown, taken as an ellipsoid, and past the stem. */
@@ -166,7 +180,11 @@ final class Crowns {
       // a cone: as wide at each height as is left to its tip
       double z = along * Sun.RISE + height;
       double wide = r * (c.top - z) / (c.top - c.base);
-      return z < c.base ? share : Math.max(share, Noise.step(0.3, -0.3, aside - wide));
+      return z < c.base
+          ? share
+          : Math.max(
+              share,
+              Noise.step(0.3, -0.3, aside - wide * (0.95 + 0.2 * Noise.at(e, n, 0.9, c.seed))));
     }
     // least of ((aside² + (s - along)²)/r² + (s RISE - up)²/tall²) over s
     double k = Sun.RISE;
@@ -179,8 +197,23 @@ final class Crowns {
     return Math.max(share, dense * Noise.step(1.02, 0.86, q + uneven));
   }
 
-  /** The tree of a cell of the woods, if one stands there. */
+  /** The tree of a cell of the woods; null: none. */
   private static Crown wood(int i, int j) {
+    boolean known = Math.abs(i) < REACH && Math.abs(j) < REACH;
+    return known ? WOODS[i + REACH][j + REACH] : null;
+  }
+
+  private static Crown[][] planted() {
+    Crown[][] woods = new Crown[2 * REACH][2 * REACH];
+    for (int i = -REACH; i < REACH; i++) {
+      for (int j = -REACH; j < REACH; j++) {
+        woods[i + REACH][j + REACH] = tree(i, j);
+      }
+    }
+    return woods;
+  }
+
+  private static Crown tree(int i, int j) {
     double e = (i + 0.15 + 0.7 * Noise.hash(i, j, 61)) * CELL;
     double n = (j + 0.15 + 0.7 * Noise.hash(i, j, 62)) * CELL;
     if (Noise.hash(i, j, 63) > 0.9 || woods(e, n, 0) < 0.5) {

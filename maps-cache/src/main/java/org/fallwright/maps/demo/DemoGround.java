@@ -35,7 +35,7 @@ public final class DemoGround {
   public static final Rectangle2D AREA = new Rectangle2D.Double(-110, -80, 240, 240);
 
   /** The part of it shown at the finest zoom [m]. */
-  public static final Rectangle2D CORE = new Rectangle2D.Double(-35, -22, 100, 122);
+  public static final Rectangle2D CORE = new Rectangle2D.Double(-65, -35, 150, 150);
 
   /** Coarsest and finest zoom. */
   public static final int MIN_ZOOM = 16;
@@ -78,8 +78,7 @@ public final class DemoGround {
         "Drawn by the Fallwright project; no real place",
         "2026 (drawn, not photographed)",
         "Ground of the demonstration site, drawn by a program. Its coordinates lie in open sea.",
-        new Bounds(
-            southWest.lonDeg(), southWest.latDeg(), northEast.lonDeg(), northEast.latDeg()),
+        new Bounds(southWest.lonDeg(), southWest.latDeg(), northEast.lonDeg(), northEast.latDeg()),
         MIN_ZOOM,
         MAX_ZOOM);
   }
@@ -89,8 +88,7 @@ public final class DemoGround {
     Point2D[] corner = new Point2D[3];
     for (int i = 0; i < 3; i++) {
       corner[i] =
-          frame.toPlanePoint(
-              WebMercator.place((x + i % 2) * 256.0, (y + i / 2) * 256.0, zoom));
+          frame.toPlanePoint(WebMercator.place((x + i % 2) * 256.0, (y + i / 2) * 256.0, zoom));
     }
     double side = WebMercator.TILE;
     return draw(
@@ -106,9 +104,9 @@ public final class DemoGround {
   /** Draws 256 x 256 pixels laid on the plane by an affine map from pixels to metres. */
   private static BufferedImage draw(AffineTransform toPlane) {
     int side = WebMercator.TILE;
-    // enough samples a pixel that they lie no farther apart than 0.08 m, at most 6 x 6
+    // enough samples a pixel that they lie no farther apart than 0.08 m, at most 4 x 4
     double pixel = Math.sqrt(Math.abs(toPlane.getDeterminant()));
-    int fine = (int) Math.max(1, Math.min(6, Math.ceil(pixel / 0.08)));
+    int fine = (int) Math.max(1, Math.min(4, Math.ceil(pixel / 0.08)));
     BufferedImage image = new BufferedImage(side, side, BufferedImage.TYPE_INT_RGB);
     Tint t = new Tint();
     double[] p = new double[2];

@@ -1,6 +1,9 @@
 package org.fallwright.maps.demo;
 
-/** What is thin: fences F1 and F2 with their gates, the posts of gate G2, the line's poles and wires. */
+/**
+ * What is thin: fences F1 and F2 with their gates, the posts of gate G2, the line's poles and
+ * wires.
+ */
 final class Fences {
   private static final double FENCE_HEIGHT = 1.2;
   private static final double POLE_HEIGHT = 9.5;

@@ -15,7 +15,9 @@ final class Growth {
     lawn(e, n, t, broad, tuft);
     wet(e, n, t, patch, tuft);
     septic(e, n, t, patch);
-    t.light(1 + 0.035 * Noise.at(e, n, 0.35, 4));
+    double blade = Noise.at(e, n, 0.33, 4) + 0.7 * Noise.at(e, n, 0.62, 5);
+    t.light(1 + 0.055 * blade);
+    t.r *= 1 + 0.05 * Noise.at(e, n, 1.7, 6);
   }
 
   private static void meadow(Tint t, double broad, double patch, double tuft) {
@@ -26,14 +28,13 @@ final class Growth {
   }
 
   /** Beyond the site: cropped ground west of the farm track, stubble north of the road. */
-  private static void fields(
-      double e, double n, Tint t, double broad, double patch, double tuft) {
+  private static void fields(double e, double n, Tint t, double broad, double patch, double tuft) {
     double crop = Noise.step(-21, -22.5, e + 0.3 * tuft);
     if (crop > 0) {
       double rows = Math.sin(2 * Math.PI * (e + 0.04 * n) / 0.9);
       double tramline = Math.abs(Math.IEEEremainder(e + 0.04 * n + 3, 18));
       double wheel = Noise.step(0.45, 0.2, Math.abs(tramline - 0.9));
-      t.cover(0.36 + 0.05 * broad, 0.47 + 0.03 * broad, 0.22, crop);
+      t.cover(0.40 + 0.05 * broad, 0.465 + 0.03 * broad, 0.265, crop);
       t.light(1 + crop * (0.06 * rows + 0.06 * tuft + 0.05 * patch));
       t.cover(0.50, 0.45, 0.33, crop * 0.6 * wheel);
     }
@@ -80,7 +81,7 @@ final class Growth {
       return;
     }
     double stripe = Noise.step(-0.25, 0.25, Math.sin(2 * Math.PI * (e + 0.05 * n) / 2.6));
-    t.cover(0.355 + 0.03 * broad, 0.485 + 0.02 * broad, 0.225, 0.93 * mown);
+    t.cover(0.375 + 0.03 * broad, 0.455 + 0.02 * broad, 0.245, 0.9 * mown);
     t.light(1 + mown * (0.075 * (stripe - 0.5) + 0.025 * tuft));
     double dry = Noise.step(0.45, 1.0, Noise.sum(e, n, 4, 2, 12));
     t.cover(0.50, 0.50, 0.29, 0.4 * mown * dry);

@@ -43,6 +43,23 @@ final class Noise {
     return 1.4 * sum / all;
   }
 
+  /** Rounded heaps about {@code size} metres across with creases between, -1 to 1. */
+  static double heaps(double e, double n, double size, int seed) {
+    double x = e / size;
+    double y = n / size;
+    int i = (int) Math.floor(x);
+    int j = (int) Math.floor(y);
+    double nearest = 4;
+    for (int a = i - 1; a <= i + 1; a++) {
+      for (int b = j - 1; b <= j + 1; b++) {
+        double dx = a + hash(a, b, seed) - x;
+        double dy = b + hash(a, b, seed + 7919) - y;
+        nearest = Math.min(nearest, dx * dx + dy * dy);
+      }
+    }
+    return Math.max(-1, 1 - 1.9 * nearest);
+  }
+
   /** 0 below {@code from}, 1 above {@code to}, smooth between. */
   static double step(double from, double to, double x) {
     return smooth(Math.max(0, Math.min(1, (x - from) / (to - from))));

@@ -101,7 +101,9 @@ final class Roofs {
   private static double car(double e, double n) {
     double x = Math.abs(e - 22.6);
     double y = n - 57.5;
-    if (x > 0.9 || Math.abs(y) > 2.3 || Math.hypot(Math.max(0, x - 0.5), Math.max(0, Math.abs(y) - 1.9)) > 0.42) {
+    if (x > 0.9
+        || Math.abs(y) > 2.3
+        || Math.hypot(Math.max(0, x - 0.5), Math.max(0, Math.abs(y) - 1.9)) > 0.42) {
       return 0;
     }
     double cabin = Math.min(Noise.step(1.1, 0.3, y), Noise.step(-2.2, -1.5, y));

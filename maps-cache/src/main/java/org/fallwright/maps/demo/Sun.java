@@ -1,6 +1,8 @@
 package org.fallwright.maps.demo;
 
-/** Where the light comes from: azimuth 150 degrees, 56 degrees high; shadows run north-north-west. */
+/**
+ * Where the light comes from: azimuth 150 degrees, 56 degrees high; shadows run north-north-west.
+ */
 final class Sun {
   private static final double AZIMUTH = Math.toRadians(150);
   private static final double HEIGHT = Math.toRadians(56);

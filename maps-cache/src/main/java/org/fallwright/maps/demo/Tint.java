@@ -30,8 +30,8 @@ final class Tint {
   /** Lays it in shade, which is bluer than sunlight. */
   void shade(double share) {
     double a = Math.max(0, Math.min(1, share));
-    r *= 1 - 0.66 * a;
-    g *= 1 - 0.62 * a;
-    b *= 1 - 0.52 * a;
+    r *= 1 - 0.61 * a;
+    g *= 1 - 0.57 * a;
+    b *= 1 - 0.47 * a;
   }
 }

@@ -95,6 +95,9 @@ final class Trace {
   /** Catmull-Rom curve through b and c. */
   private static double bend(double a, double b, double c, double d, double t) {
     return 0.5
-        * (2 * b + (c - a) * t + (2 * a - 5 * b + 4 * c - d) * t * t + (3 * b - a - 3 * c + d) * t * t * t);
+        * (2 * b
+            + (c - a) * t
+            + (2 * a - 5 * b + 4 * c - d) * t * t
+            + (3 * b - a - 3 * c + d) * t * t * t);
   }
 }

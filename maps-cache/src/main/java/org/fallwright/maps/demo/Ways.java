@@ -5,7 +5,10 @@ final class Ways {
   /** Half the driveway's width [m]. */
   private static final double DRIVE = 1.6;
 
-  /** From the road gate past V1 to the bend, then round the shed to the place before the garage. */
+  /**
+   * From the road gate past V1 to the bend, then round the shed to the gravelled place by the
+   * house.
+   */
   private static final Trace DRIVEWAY =
       Trace.smooth(
           new double[] {23.2, 92.5},
@@ -20,8 +23,7 @@ final class Ways {
           new double[] {34, 26},
           new double[] {34, 14});
 
-  private static final Trace ROAD =
-      new Trace(new double[] {-700, 121.3}, new double[] {700, 65.3});
+  private static final Trace ROAD = new Trace(new double[] {-700, 121.3}, new double[] {700, 65.3});
 
   private static final Trace TRACK =
       Trace.smooth(
@@ -46,14 +48,18 @@ final class Ways {
     double grit = Noise.at(e, n, 0.3, 22);
     ruts(TRACK.beside(e, n, 3), t, rough, grit, 0.9);
     ruts(THROUGH_G2.beside(e, n, 3), t, rough, grit, 0.45);
-    road(e, n, t, rough, grit);
-    paving(e, n, t, rough, grit);
+    double[] at = ROAD.beside(e, n, 6);
+    double off = Math.abs(at == null ? 99 : at[0]);
+    t.cover(0.57, 0.54, 0.45, 0.7 * Noise.step(2.75, 2.1, off + 0.35 * rough));
     driveway(e, n, t, rough, grit);
+    if (off < 2.5) {
+      road(e, n, t, off, rough, grit);
+    }
+    paving(e, n, t, rough, grit);
   }
 
   private static void driveway(double e, double n, Tint t, double rough, double grit) {
-    double pad =
-        Math.max(Math.abs(e - 34.2) - 3.4, Math.abs(n - 13.2) - 4.4);
+    double pad = Math.max(Math.abs(e - 34.2) - 3.4, Math.abs(n - 13.2) - 4.4);
     double on = Noise.step(0.15, -0.15, pad + 0.15 * rough);
     double[] at = DRIVEWAY.beside(e, n, 3);
     double lane = 0;
@@ -74,13 +80,7 @@ final class Ways {
     }
   }
 
-  private static void road(double e, double n, Tint t, double rough, double grit) {
-    double[] at = ROAD.beside(e, n, 6);
-    double off = Math.abs(at == null ? 99 : at[0]);
-    if (off > 4) {
-      return;
-    }
-    t.cover(0.57, 0.54, 0.45, 0.7 * Noise.step(2.75, 2.1, off + 0.35 * rough));
+  private static void road(double e, double n, Tint t, double off, double rough, double grit) {
     double paved = Noise.step(2.06, 1.94, off + 0.06 * rough);
     t.cover(0.50, 0.50, 0.505, paved);
     t.light(1 + paved * (0.03 * grit + 0.05 * Noise.sum(e, n, 3, 2, 24)));

@@ -297,7 +297,8 @@ final class SheetPainter {
         SMALL,
         x,
         y + 1,
-        width, 2);
+        width,
+        2);
   }
 
   private static Font font(boolean over) {
