@@ -275,7 +275,7 @@ final class SheetPainter {
   }
 
   private double loads(TextPen pen, double x, double top, double width) {
-    double[] ends = {width * 0.58, width * 0.72, width * 0.86, width};
+    double[] ends = {width * 0.52, width * 0.67, width * 0.84, width};
     double y = pen.line("Loads on the parts", HEAD, x, top);
     String[] heads = {"at plan", "allowed", "at most", "allowed"};
     for (int i = 0; i < 4; i++) {
@@ -286,7 +286,7 @@ final class SheetPainter {
     List<SheetContent.Load> rows = content.loads();
     int shown = Math.min(rows.size(), mostLoads);
     for (SheetContent.Load r : rows.subList(0, shown)) {
-      pen.fitted(r.part(), BODY, x, y, ends[0] - 52);
+      pen.fitted(r.part(), BODY, x, y, ends[0] - 50);
       pen.right(r.atPlan() + (r.overAtPlan() ? " ×" : ""), font(r.overAtPlan()), x + ends[0], y);
       pen.right(r.allowedAtPlan(), BODY, x + ends[1], y);
       pen.right(r.atMost() + (r.overAtMost() ? " ×" : ""), font(r.overAtMost()), x + ends[2], y);

@@ -282,7 +282,7 @@ class SheetFileTest {
                 if (last != null
                     && Math.abs(last.size - p.getYScale()) < 0.01
                     && Math.abs(last.box.getMaxY() - box.getMaxY()) < 0.1
-                    && box.getMinX() - last.box.getMaxX() < 4) {
+                    && Math.abs(box.getMinX() - last.box.getMaxX()) < 4) {
                   all.remove(all.size() - 1);
                   last = new Words(text, last.box.createUnion(box), last.size);
                 } else {
