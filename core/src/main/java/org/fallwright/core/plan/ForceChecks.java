@@ -58,11 +58,12 @@ final class ForceChecks {
           "m",
           Math.max(0, t.leverMinM() / asked),
           stump(),
-          () -> lost
-              ? "The line loses its lever on the hinge at "
-                  + in.angle(t.leverLostRad())
-                  + ": it pulls the wrong way for this lay."
-              : "The line keeps at least " + in.length(t.leverMinM()) + " of lever.");
+          () ->
+              lost
+                  ? "The line loses its lever on the hinge at "
+                      + in.angle(t.leverLostRad())
+                      + ": it pulls the wrong way for this lay."
+                  : "The line keeps at least " + in.length(t.leverMinM()) + " of lever.");
     }
     if (Double.isFinite(t.endRad())) {
       double face =
@@ -77,11 +78,12 @@ final class ForceChecks {
           "deg",
           open / face,
           stump(),
-          () -> String.format(
-              Locale.ROOT,
-              "The face opens %.0f degrees; %.0f are asked so that it does not shut first.",
-              open,
-              face));
+          () ->
+              String.format(
+                  Locale.ROOT,
+                  "The face opens %.0f degrees; %.0f are asked so that it does not shut first.",
+                  open,
+                  face));
     }
   }
 
@@ -96,17 +98,18 @@ final class ForceChecks {
         "N",
         by.get("pull"),
         null,
-        () -> t.planN() == 0
-            ? "No pull is needed for this lay."
-            : "The pull to plan for is "
-                + in.both(u -> u.forceAtLeast(t.planN()))
-                + " at the tree; "
-                + source
-                + " gives "
-                + gives
-                + " ("
-                + offer.limit()
-                + ").");
+        () ->
+            t.planN() == 0
+                ? "No pull is needed for this lay."
+                : "The pull to plan for is "
+                    + in.both(u -> u.forceAtLeast(t.planN()))
+                    + " at the tree; "
+                    + source
+                    + " gives "
+                    + gives
+                    + " ("
+                    + offer.limit()
+                    + ").");
     if (t.holdN() > t.planN()) {
       double most = Math.min(r.ceiling().tensionN(), r.source().lowN());
       grade.factored(
@@ -116,9 +119,10 @@ final class ForceChecks {
           "N",
           most / t.workingN(),
           null,
-          () -> "Holding the tree asks for more than pulling it: "
-              + in.both(u -> u.forceAtLeast(t.workingN()))
-              + ".");
+          () ->
+              "Holding the tree asks for more than pulling it: "
+                  + in.both(u -> u.forceAtLeast(t.workingN()))
+                  + ".");
     }
     String rests =
         String.format(
@@ -132,15 +136,16 @@ final class ForceChecks {
         "N",
         by.get("hold"),
         null,
-        () -> r.holdAsked()
-            ? "Without its hinge the tree pulls back with "
-                + in.both(u -> u.forceAtLeast(t.holdN()))
-                + "; "
-                + source
-                + " holds "
-                + in.both(u -> u.forceAtMost(r.source().holdN()))
-                + "."
-            : rests);
+        () ->
+            r.holdAsked()
+                ? "Without its hinge the tree pulls back with "
+                    + in.both(u -> u.forceAtLeast(t.holdN()))
+                    + "; "
+                    + source
+                    + " holds "
+                    + in.both(u -> u.forceAtMost(r.source().holdN()))
+                    + "."
+                : rests);
     grade.plain(
         "hold stability",
         r.holding().stability(),
@@ -148,14 +153,15 @@ final class ForceChecks {
         "",
         by.get("hold stability"),
         null,
-        () -> !r.holdAsked()
-            ? rests
-            : !r.source().captured()
-                ? "A constant force can pull a tree over; it can never hold one."
-                : String.format(
-                    Locale.ROOT,
-                    "The line is %.1f times as stiff as the tree is unstable.",
-                    r.holding().stability()));
+        () ->
+            !r.holdAsked()
+                ? rests
+                : !r.source().captured()
+                    ? "A constant force can pull a tree over; it can never hold one."
+                    : String.format(
+                        Locale.ROOT,
+                        "The line is %.1f times as stiff as the tree is unstable.",
+                        r.holding().stability()));
     start(r, t);
     hinge(by, t);
   }
@@ -170,9 +176,10 @@ final class ForceChecks {
         t.holdN(),
         "N",
         stump(),
-        () -> "Held at "
-            + in.force(t.holdN())
-            + " it goes as soon as the hinge is ready: be away before the last wood is cut.");
+        () ->
+            "Held at "
+                + in.force(t.holdN())
+                + " it goes as soon as the hinge is ready: be away before the last wood is cut.");
   }
 
   private void hinge(Map<String, Double> by, TreeSide t) {
@@ -229,8 +236,8 @@ final class ForceChecks {
                   + " bears "
                   + in.both(u -> u.forceAtLeast(plan))
                   + " as planned; "
-              + in.both(u -> u.forceAtMost(allowed))
-              + " are allowed.");
+                  + in.both(u -> u.forceAtMost(allowed))
+                  + " are allowed.");
       grade.factored(
           p.name() + " at high",
           last,
@@ -243,8 +250,8 @@ final class ForceChecks {
                   + " bears "
                   + in.both(u -> u.forceAtLeast(high))
                   + " if the source stalls, slips or jerks; "
-              + in.both(u -> u.forceAtMost(last))
-              + " are the most.");
+                  + in.both(u -> u.forceAtMost(last))
+                  + " are the most.");
     }
   }
 

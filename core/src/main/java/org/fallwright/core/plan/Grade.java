@@ -1,5 +1,6 @@
 package org.fallwright.core.plan;
 
+import org.fallwright.core.reference.Allowances;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.Supplier;
@@ -16,7 +17,7 @@ final class Grade {
   /**
    * Ratio from which a check without a design factor of its own is workable; planning allowance.
    */
-  static final double WORKABLE = 1.25;
+  static final double WORKABLE = Allowances.WORKABLE_RATIO.value();
 
   private final boolean full;
   private final List<Check> checks = new ArrayList<>();
@@ -35,19 +36,31 @@ final class Grade {
 
   /** A check without a design factor inside. */
   void plain(
-      String id, double value, double limit, String unit, double ratio, Position at, Supplier<String> why) {
+      String id,
+      double value,
+      double limit,
+      String unit,
+      double ratio,
+      Position at,
+      Supplier<String> why) {
     add(id, value, limit, unit, ratio, WORKABLE, at, why);
   }
 
   /** A check with a design factor inside. */
   void factored(
-      String id, double value, double limit, String unit, double ratio, Position at, Supplier<String> why) {
+      String id,
+      double value,
+      double limit,
+      String unit,
+      double ratio,
+      Position at,
+      Supplier<String> why) {
     add(id, value, limit, unit, ratio, 1, at, why);
   }
 
   /**
-   * A limit of a rule, or one whose allowance is inside it: to meet it is enough, and then it does not
-   * rank.
+   * A limit of a rule, or one whose allowance is inside it: to meet it is enough, and then it does
+   * not rank.
    */
   void rule(
       String id,

@@ -74,8 +74,7 @@ public final class Judge {
             ? null
             : kind(site.source(setup.driver().source()).orElseThrow().plugin());
     Route route = routes.computeIfAbsent(setup.withLay(0), w -> Route.of(site, w, source, driver));
-    Statics statics =
-        statics(setup, route);
+    Statics statics = statics(setup, route);
     TreeSide tree = statics.treeSide();
     PullOffer offer = Reach.of(site, setup, route, Reach.Pulled.of(tree), source, driver);
     GearParts parts = new GearParts(site, rules, tables).collect(setup, route, offer);
@@ -108,7 +107,8 @@ public final class Judge {
       figures = FiguresOf.unmovable(route, tree, zones);
     }
     for (PullOffer.Finding f : offer.checks()) {
-      grade.rule(f.id(), f.value(), f.limit(), f.unit(), f.ratio(), place(setup).at(), () -> f.why());
+      grade.rule(
+          f.id(), f.value(), f.limit(), f.unit(), f.ratio(), place(setup).at(), () -> f.why());
     }
     landing.people(grade, setup, zones, offer);
     notes.addAll(offer.notes());
@@ -140,8 +140,7 @@ public final class Judge {
 
   private Statics statics(Setup s, Route route) {
     return reckoned.computeIfAbsent(
-        new Pulled(
-            s.layDeg(), s.attachHeightM(), s.hingeThicknessM(), s.line(), route.line()),
+        new Pulled(s.layDeg(), s.attachHeightM(), s.hingeThicknessM(), s.line(), route.line()),
         p -> new Statics(subject.pull(s, route)));
   }
 
@@ -160,8 +159,7 @@ public final class Judge {
         new SourceAtTree(low, offer.holdN(), offer.highN(), captured, SourceAtTree.Stop.NONE, 0);
     Ratios without = Ratios.of(statics, wedges, free, parts);
     // a stop at the ceiling helps only where the plan itself stays below it
-    boolean helps =
-        anyBelowOne(without, " at high") && !anyBelowOne(without, " at plan");
+    boolean helps = anyBelowOne(without, " at high") && !anyBelowOne(without, " at plan");
     if (!helps || site.gear().loadCell() == null) {
       return new Stopped(without, false);
     }
@@ -190,7 +188,8 @@ public final class Judge {
             + r.ceiling().part()
             + " is loaded past its factor.";
     if (offer.powered()) {
-      grade.tightAtBest("stop reading", r.ceiling().tensionN(), r.source().highN(), "N", null, () -> why);
+      grade.tightAtBest(
+          "stop reading", r.ceiling().tensionN(), r.source().highN(), "N", null, () -> why);
     } else {
       grade.factored(
           "stop reading",
@@ -213,9 +212,10 @@ public final class Judge {
           "",
           no ? 0 : Double.POSITIVE_INFINITY,
           h.anchor().place().at(),
-          () -> no
-              ? h.anchor().id() + " is refused: " + h.capacity().why() + "."
-              : h.anchor().id() + " may be used: " + h.capacity().why() + ".");
+          () ->
+              no
+                  ? h.anchor().id() + " is refused: " + h.capacity().why() + "."
+                  : h.anchor().id() + " may be used: " + h.capacity().why() + ".");
     }
   }
 

@@ -41,15 +41,16 @@ final class KitChecks {
         "m",
         fit.availableM() / fit.neededM(),
         null,
-        () -> "Line "
-            + line.id()
-            + (offer.wireM() > 0 ? " and the source's wire reach " : " reaches ")
-            + in.length(fit.availableM())
-            + "; the path with wraps and tails needs "
-            + in.length(fit.neededM())
-            + (reaches
-                ? "."
-                : ": stand " + in.length(fit.neededM() - fit.availableM()) + " nearer."));
+        () ->
+            "Line "
+                + line.id()
+                + (offer.wireM() > 0 ? " and the source's wire reach " : " reaches ")
+                + in.length(fit.availableM())
+                + "; the path with wraps and tails needs "
+                + in.length(fit.neededM())
+                + (reaches
+                    ? "."
+                    : ": stand " + in.length(fit.neededM() - fit.availableM()) + " nearer."));
     if (reaches && !fit.fits()) {
       grade.rule("joint", 0, 1, "", 0, null, () -> sentence(fit.shortOf()));
     }

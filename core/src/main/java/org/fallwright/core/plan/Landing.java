@@ -137,24 +137,27 @@ final class Landing {
         grade.unknown(
             "voltage of " + w.id(),
             w.poles().get(0).at(),
-            () -> "Line "
-                + w.id()
-                + ": voltage not given, so no setup is judged. Ask its owner; write the answer and"
-                + " who gave it.");
+            () ->
+                "Line "
+                    + w.id()
+                    + ": voltage not given, so no setup is judged. Ask its owner; write the answer and"
+                    + " who gave it.");
       }
     }
     if (site.found(Looked.What.WIRES) == Looked.Found.NOT_LOOKED) {
       grade.unknown(
           "wires looked for",
           null,
-          () -> "Nobody has said whether there are wires, so no setup is judged. Look, and say none or"
-              + " draw them.");
+          () ->
+              "Nobody has said whether there are wires, so no setup is judged. Look, and say none or"
+                  + " draw them.");
     }
     if (site.found(Looked.What.PEOPLE_INDOORS) == Looked.Found.NOT_LOOKED) {
       grade.unknown(
           "people indoors",
           null,
-          () -> "Nobody has said who is indoors, so no setup is judged. Ask at every door, and say so.");
+          () ->
+              "Nobody has said who is indoors, so no setup is judged. Ask at every door, and say so.");
     }
   }
 
@@ -187,10 +190,11 @@ final class Landing {
         "",
         ways.isEmpty() ? 0 : Double.POSITIVE_INFINITY,
         site.tree().stump().at(),
-        () -> ways.isEmpty()
-            ? "No way out ends clear of the footprint, the sit-back zone, the line's angle and its"
-                + " ends."
-            : ways.size() + " way(s) out end clear of every zone.");
+        () ->
+            ways.isEmpty()
+                ? "No way out ends clear of the footprint, the sit-back zone, the line's angle and its"
+                    + " ends."
+                : ways.size() + " way(s) out end clear of every zone.");
     Ground ground = full ? ground(landed, sitBack, angles, ways, setup) : null;
     return new Zones(
         landed.footprint(),
@@ -231,17 +235,18 @@ final class Landing {
           "m",
           c.ratio(),
           c.nearest(),
-          () -> c.overlaps()
-              ? "The tree can come down on "
-                  + c.targetId()
-                  + ": "
-                  + amount(c.overlapAmount(), c.overlapUnit())
-                  + " of it."
-              : "It clears "
-                  + c.targetId()
-                  + " by "
-                  + in.length(c.clearanceM())
-                  + (c.askedM() > 0 ? " of the " + in.length(c.askedM()) + " asked." : "."));
+          () ->
+              c.overlaps()
+                  ? "The tree can come down on "
+                      + c.targetId()
+                      + ": "
+                      + amount(c.overlapAmount(), c.overlapUnit())
+                      + " of it."
+                  : "It clears "
+                      + c.targetId()
+                      + " by "
+                      + in.length(c.clearanceM())
+                      + (c.askedM() > 0 ? " of the " + in.length(c.askedM()) + " asked." : "."));
     }
     return nearest;
   }
@@ -267,9 +272,10 @@ final class Landing {
         "m",
         fit.inside() ? Double.POSITIVE_INFINITY : 0,
         fit.place(),
-        () -> fit.inside()
-            ? "It lands inside the drop zone with " + in.length(fit.marginM()) + " to spare."
-            : "It can land outside the drop zone by " + in.length(-fit.marginM()) + ".");
+        () ->
+            fit.inside()
+                ? "It lands inside the drop zone with " + in.length(fit.marginM()) + " to spare."
+                : "It can land outside the drop zone by " + in.length(-fit.marginM()) + ".");
   }
 
   private void wires(Grade grade, Landed landed) {
@@ -281,13 +287,14 @@ final class Landing {
           "m",
           Math.max(0, w.leastM()) / w.askedM(),
           w.place(),
-          () -> "The falling tree stays at least "
-              + in.length(Math.max(0, w.leastM()))
-              + " from line "
-              + w.wireId()
-              + "; "
-              + in.length(w.askedM())
-              + " are asked.");
+          () ->
+              "The falling tree stays at least "
+                  + in.length(Math.max(0, w.leastM()))
+                  + " from line "
+                  + w.wireId()
+                  + "; "
+                  + in.length(w.askedM())
+                  + " are asked.");
     }
     for (WireCheck.Reach r : reach) {
       double there = r.groundM() - r.errorM();
@@ -299,18 +306,19 @@ final class Landing {
           // on the limit itself the work stops too
           r.stops() ? Math.min(there / r.stopM(), Math.nextDown(1.0)) : there / r.stopM(),
           r.place(),
-          () -> r.stops()
-              ? "Line "
-                  + r.wireId()
-                  + " is within reach of the tree whichever way it goes: stop, its owner must make"
-                  + " it dead or attend."
-              : "Line "
-                  + r.wireId()
-                  + " is "
-                  + in.length(there)
-                  + " off; within "
-                  + in.length(r.stopM())
-                  + " the work stops.");
+          () ->
+              r.stops()
+                  ? "Line "
+                      + r.wireId()
+                      + " is within reach of the tree whichever way it goes: stop, its owner must make"
+                      + " it dead or attend."
+                  : "Line "
+                      + r.wireId()
+                      + " is "
+                      + in.length(there)
+                      + " off; within "
+                      + in.length(r.stopM())
+                      + " the work stops.");
     }
   }
 
@@ -325,17 +333,18 @@ final class Landing {
           "m",
           Math.max(0, what.clearanceM()) / what.askedM(),
           what.place(),
-          () -> over
-              ? "The line runs over or through "
-                  + what.what()
-                  + (movable(what.what()) ? "; move it before the work." : ".")
-              : "The line passes "
-                  + what.what()
-                  + " at "
-                  + in.length(what.clearanceM())
-                  + " of "
-                  + in.length(what.askedM())
-                  + " asked.");
+          () ->
+              over
+                  ? "The line runs over or through "
+                      + what.what()
+                      + (movable(what.what()) ? "; move it before the work." : ".")
+                  : "The line passes "
+                      + what.what()
+                      + " at "
+                      + in.length(what.clearanceM())
+                      + " of "
+                      + in.length(what.askedM())
+                      + " asked.");
     }
   }
 
@@ -398,11 +407,7 @@ final class Landing {
   }
 
   private Ground ground(
-      Landed landed,
-      SitBackZone sitBack,
-      Angles angles,
-      List<Position> ways,
-      Setup setup) {
+      Landed landed, SitBackZone sitBack, Angles angles, List<Position> ways, Setup setup) {
     double height = site.tree().heightM().value();
     return new Ground(
         landed.footprint().geometry(),
@@ -487,7 +492,8 @@ final class Landing {
           zones.angles().bights().isEmpty()
               ? List.of()
               : zones.angles().bights().subList(0, zones.angles().bights().size() - 1);
-      OperatorPlace o = OperatorPlace.of(place.at(), zones.footprint(), others, zones.angles().recoil());
+      OperatorPlace o =
+          OperatorPlace.of(place.at(), zones.footprint(), others, zones.angles().recoil());
       double height = site.tree().heightM().value();
       double asked = rules.operatorRadiusFactor().value() * height;
       boolean far = rules.operatorRadiusFactor().metBy(o.fromStumpM(), height);
@@ -525,13 +531,14 @@ final class Landing {
           "",
           clear ? Double.POSITIVE_INFINITY : 0,
           place.at(),
-          () -> clear
-              ? "Who works the source stands outside the footprint and every other angle of the"
-                  + " line."
-              : "Who works the source would stand "
-                  + (o.outsideFootprint()
-                      ? "inside an angle of the line."
-                      : "where the tree can fall."));
+          () ->
+              clear
+                  ? "Who works the source stands outside the footprint and every other angle of the"
+                      + " line."
+                  : "Who works the source would stand "
+                      + (o.outsideFootprint()
+                          ? "inside an angle of the line."
+                          : "where the tree can fall."));
     }
     if (!offer.captured() && !offer.powered() && offer.operators() > 0) {
       boolean refused = rules.freeHand() == RuleSet.FreeHand.REFUSED;

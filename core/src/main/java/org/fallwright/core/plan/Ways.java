@@ -109,8 +109,8 @@ final class Ways {
   }
 
   /**
-   * Whether a shorter line that is as strong and as stiff reaches by itself; then a longer one is no
-   * candidate, for it does the same.
+   * Whether a shorter line that is as strong and as stiff reaches by itself; then a longer one is
+   * no candidate, for it does the same.
    */
   private boolean aShorterLineDoes(Setup way, List<Gear.Line> lines) {
     Gear.Line own = GearParts.line(site, way);

@@ -84,6 +84,9 @@ final class Depth {
 
   private void within() {
     Envelope box = outside ? thing.envelope() : thing.envelope().intersection(area.envelope());
+    if (box.isNull()) {
+      return;
+    }
     double half = Math.max(box.getWidth(), box.getHeight()) / 2;
     PriorityQueue<Square> queue =
         new PriorityQueue<>(Comparator.comparingDouble((Square s) -> -s.most()));

@@ -44,7 +44,7 @@ public final class LegCheck {
    * @param clearanceM distance of the leg; negative where it fouls: how far it runs inside or below
    *     the top [m]
    * @param askedM distance asked, the thing's position error included [m]
-   * @param place where, in plan
+   * @param place where, in plan: on the thing or on the leg beside it
    */
   public record Passing(String what, double clearanceM, double askedM, Position place) {
     public boolean clear() {
@@ -88,17 +88,13 @@ public final class LegCheck {
     }
     Segment3 line = leg.segment();
     for (ReadyWire w : wires) {
-      double best = Double.POSITIVE_INFINITY;
-      Segment3 at = null;
+      Segment3.Nearest best = new Segment3.Nearest(Double.POSITIVE_INFINITY, 0);
       for (Segment3 c : w.chords) {
-        double d = line.distanceTo(c);
-        if (d < best) {
-          best = d;
-          at = c;
-        }
+        Segment3.Nearest n = line.nearest(c);
+        best = n.distanceM() < best.distanceM() ? n : best;
       }
       double asked = approachM.applyAsDouble(w.wire) + w.wire.errorM();
-      all.add(new Passing(w.wire.id(), best, asked, at.planAt(0.5)));
+      all.add(new Passing(w.wire.id(), best.distanceM(), asked, line.planAt(best.at())));
     }
     all.sort((p, q) -> Double.compare(p.clearanceM - p.askedM, q.clearanceM - q.askedM));
     return all;

@@ -69,10 +69,9 @@ final class Prism implements LegCheck.Obstacle {
     for (int i = 0; i < edges.size(); i++) {
       Coordinate a = edges.from(i);
       Coordinate b = edges.to(i);
-      Segment3 rim = new Segment3(a.x, a.y, topM, b.x, b.y, topM);
-      double d = s.distanceTo(rim);
-      if (d < best.clearanceM()) {
-        best = new LegCheck.Near(d, new Position((a.x + b.x) / 2, (a.y + b.y) / 2));
+      Segment3.Nearest n = s.nearest(new Segment3(a.x, a.y, topM, b.x, b.y, topM));
+      if (n.distanceM() < best.clearanceM()) {
+        best = new LegCheck.Near(n.distanceM(), s.planAt(n.at()));
       }
     }
     return best;

@@ -84,31 +84,41 @@ record Segment3(double ax, double ay, double az, double bx, double by, double bz
     return length(p[0] - x, p[1] - y, p[2] - z);
   }
 
-  /** Least distance to another piece: inside both, or at one of the four ends [m]. */
+  /**
+   * The least distance to another piece, inside both or at one of the four ends.
+   *
+   * @param distanceM the distance [m]
+   * @param at share of the way along this piece
+   */
+  record Nearest(double distanceM, double at) {}
+
+  Nearest nearest(Segment3 o) {
+    double a0 = nearestTo(o.ax, o.ay, o.az);
+    double a1 = nearestTo(o.bx, o.by, o.bz);
+    Nearest best = new Nearest(Double.POSITIVE_INFINITY, 0);
+    for (double t : new double[] {0, 1, a0, a1, crossing(o)}) {
+      double[] p = at(t);
+      double d = o.distanceTo(p[0], p[1], p[2]);
+      best = d < best.distanceM ? new Nearest(d, t) : best;
+    }
+    return best;
+  }
+
   double distanceTo(Segment3 o) {
-    double best =
-        Math.min(
-            Math.min(distanceTo(o.ax, o.ay, o.az), distanceTo(o.bx, o.by, o.bz)),
-            Math.min(o.distanceTo(ax, ay, az), o.distanceTo(bx, by, bz)));
+    return nearest(o).distanceM;
+  }
+
+  /** Where the whole lines come nearest, cut to this piece; 0 where they are parallel. */
+  private double crossing(Segment3 o) {
     double[] u = {bx - ax, by - ay, bz - az};
     double[] v = {o.bx - o.ax, o.by - o.ay, o.bz - o.az};
     double[] w = {ax - o.ax, ay - o.ay, az - o.az};
     double a = dot(u, u);
     double b = dot(u, v);
     double c = dot(v, v);
-    double d = dot(u, w);
-    double e = dot(v, w);
     double den = a * c - b * b;
-    if (den > 1e-12 * a * c) {
-      double s = (b * e - c * d) / den;
-      double t = (a * e - b * d) / den;
-      if (s >= 0 && s <= 1 && t >= 0 && t <= 1) {
-        double[] p = at(s);
-        double[] q = o.at(t);
-        best = Math.min(best, length(p[0] - q[0], p[1] - q[1], p[2] - q[2]));
-      }
-    }
-    return best;
+    double s = den > 1e-12 * a * c ? (b * dot(v, w) - c * dot(u, w)) / den : 0;
+    return Math.min(1, Math.max(0, s));
   }
 
   private static double dot(double[] p, double[] q) {

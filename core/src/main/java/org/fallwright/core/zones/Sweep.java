@@ -50,10 +50,12 @@ final class Sweep {
    *
    * @param halfWidthM half the stem's width, across r [m]
    * @param frontM its length ahead of the stump [m]
-   * @param buttM its length behind the stump [m]
+   * @param buttM its length behind the stump [m]; counts as at least half the width, so that the
+   *     flanks meet
    * @param push shift to the right per metre of s
    */
   Polygon strip(double halfWidthM, double frontM, double buttM, double push) {
+    double back = Math.max(buttM, halfWidthM);
     // Front and back flank of one side cross where both, turned apart, are equally far out.
     double notch = halfWidthM / Math.hypot(1, push) / Math.cos(halfAngle);
     double across = Math.hypot(1, push);
@@ -66,8 +68,8 @@ final class Sweep {
     end(ring, List.of(farRight, farLeft));
     ring.add(lay.of(new double[] {-side[0], -side[1]}));
     // Seen from the stump towards the butt, right and left change sides.
-    double[] buttLeft = {-halfWidthM - push * buttM, -buttM};
-    double[] buttRight = {halfWidthM - push * buttM, -buttM};
+    double[] buttLeft = {-halfWidthM - push * back, -back};
+    double[] buttRight = {halfWidthM - push * back, -back};
     end(ring, List.of(buttLeft, buttRight));
     return close(ring);
   }
