@@ -37,7 +37,7 @@ public final class PlanView extends JXMapViewer {
   private Palette palette = Palette.DAY;
   private Envelope wanted;
   private boolean blank = true;
-  private transient Consumer<Position> pointed = p -> {};
+  private Consumer<Position> pointed = p -> {};
 
   public PlanView() {
     setTileFactory(new BlankTiles());

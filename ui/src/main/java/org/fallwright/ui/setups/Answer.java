@@ -6,7 +6,6 @@ import org.fallwright.core.plan.Figures;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.Plan;
 import org.fallwright.core.plan.Verdict;
-import org.fallwright.core.site.Site;
 import org.fallwright.ui.text.Amounts;
 import org.fallwright.ui.text.Messages;
 
@@ -44,7 +43,7 @@ public record Answer(Verdict verdict, String word, String sentence, List<Cell> c
   }
 
   /** Nothing could be ranked. */
-  public static Answer nothing(Plan plan, Amounts amounts) {
+  public static Answer nothing(Plan plan) {
     return empty(
         Verdict.NOT_WORKABLE.word(),
         plan.judged() == 0
@@ -52,7 +51,7 @@ public record Answer(Verdict verdict, String word, String sentence, List<Cell> c
             : Messages.text("answer.none-works", String.valueOf(plan.judged())));
   }
 
-  public static Answer of(Site site, Judged j, Amounts amounts) {
+  public static Answer of(Judged j, Amounts amounts) {
     return new Answer(
         j.verdict(),
         j.verdict().word(),

@@ -14,8 +14,8 @@ final class Findings {
   /** Every check: what there is, what is asked, their ratio. */
   static final class Checks extends AbstractTableModel {
     private static final String[] COLUMNS = {"check", "value", "limit", "ratio"};
-    private final transient List<Check> checks;
-    private final transient Amounts amounts;
+    private final List<Check> checks;
+    private final Amounts amounts;
 
     Checks(List<Check> checks, Amounts amounts) {
       this.checks = checks;
@@ -56,8 +56,8 @@ final class Findings {
   /** Every part: its loads at plan and at the most the source can do, and its strength. */
   static final class Loads extends AbstractTableModel {
     private static final String[] COLUMNS = {"part", "at-plan", "at-high", "strength"};
-    private final transient List<PartLoad> loads;
-    private final transient Amounts amounts;
+    private final List<PartLoad> loads;
+    private final Amounts amounts;
 
     Loads(List<PartLoad> loads, Amounts amounts) {
       this.loads = loads;

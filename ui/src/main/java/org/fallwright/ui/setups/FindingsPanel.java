@@ -28,8 +28,8 @@ public final class FindingsPanel extends JPanel {
   private final JTable loads = new JTable();
   private final JTextArea why = text(3);
   private final JTextArea notes = text(6);
-  private transient Judged shown;
-  private transient Consumer<Check> pointed = c -> {};
+  private Judged shown;
+  private Consumer<Check> pointed = c -> {};
   private boolean setting;
 
   public FindingsPanel() {
@@ -120,7 +120,7 @@ public final class FindingsPanel extends JPanel {
 
   /** A check's name behind the mark of its verdict. */
   private static final class MarkCell extends DefaultTableCellRenderer {
-    private final transient Palette palette;
+    private final Palette palette;
 
     MarkCell(Palette palette) {
       this.palette = palette;

@@ -28,7 +28,7 @@ public final class WaysPanel extends JPanel {
   private final JList<Ways.Row> ranked = list("ways.title");
   private final JList<Ways.Row> ruledOut = list("ways.ruled-out");
   private final JLabel outTitle = new JLabel(Messages.text("ways.ruled-out"));
-  private transient Consumer<Judged> chosen = j -> {};
+  private Consumer<Judged> chosen = j -> {};
   private boolean setting;
 
   public WaysPanel() {

@@ -9,7 +9,7 @@ import org.fallwright.ui.text.Messages;
 
 /** The profile on screen. */
 public final class ProfilePanel extends JPanel {
-  private transient ProfilePainter painter;
+  private ProfilePainter painter;
 
   public ProfilePanel() {
     setPreferredSize(new Dimension(600, 250));
