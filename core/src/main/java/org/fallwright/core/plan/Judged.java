@@ -8,8 +8,8 @@ import java.util.List;
  * @param setup what was judged
  * @param verdict its worst check
  * @param weakest the check with the lowest ratio among the worst
- * @param sentence verdict and weakest link in one sentence, SI-free: units are filled in by the
- *     reader's display
+ * @param standing ratio of the weakest link over the ratio from which it is workable
+ * @param sentence verdict and weakest link in one sentence, in the site's units
  * @param figures its figures
  * @param checks every check, in a fixed order
  * @param loads loads on every part
@@ -23,6 +23,7 @@ public record Judged(
     Setup setup,
     Verdict verdict,
     Check weakest,
+    double standing,
     String sentence,
     Figures figures,
     List<Check> checks,

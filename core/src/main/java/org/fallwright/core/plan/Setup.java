@@ -31,4 +31,16 @@ public record Setup(
   public Setup {
     redirects = List.copyOf(redirects);
   }
+
+  /** The same with another lay. */
+  public Setup withLay(double lay) {
+    return new Setup(
+        lay, attachHeightM, hingeThicknessM, line, redirects, source, mode, place, driver);
+  }
+
+  /** The same with another line. */
+  Setup withLine(String other) {
+    return new Setup(
+        layDeg, attachHeightM, hingeThicknessM, other, redirects, source, mode, place, driver);
+  }
 }

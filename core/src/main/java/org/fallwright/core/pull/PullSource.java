@@ -20,6 +20,15 @@ public interface PullSource {
   List<String> modes(ObjectNode parameters);
 
   /**
+   * Height at which the line meets the source above the ground of its spot [m], from 0 to 5; not
+   * asked on an anchor, where the sling's height counts. Half a metre unless the source knows
+   * better (planning allowance).
+   */
+  default double lineHeightM(ObjectNode parameters) {
+    return 0.5;
+  }
+
+  /**
    * What it gives at its place, at the least and at the most.
    *
    * @throws IllegalArgumentException one sentence naming the parameter, its value and its limit

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Stream;
+import org.fallwright.core.units.DisplayUnits;
 import org.fallwright.core.units.Range;
 
 /**
@@ -42,8 +43,19 @@ public record Site(
 
   /** Units on screen and paper. */
   public enum Display {
-    US,
-    METRIC
+    US(DisplayUnits.US),
+    METRIC(DisplayUnits.METRIC);
+
+    private final DisplayUnits units;
+
+    Display(DisplayUnits units) {
+      this.units = units;
+    }
+
+    /** How quantities are shown in these units. */
+    public DisplayUnits units() {
+      return units;
+    }
   }
 
   public Site {

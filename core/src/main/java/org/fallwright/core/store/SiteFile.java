@@ -126,8 +126,7 @@ public final class SiteFile {
 
   private static String text(byte[] bytes, String name) throws SiteFileException {
     try {
-      String text =
-          StandardCharsets.UTF_8.newDecoder().decode(ByteBuffer.wrap(bytes)).toString();
+      String text = StandardCharsets.UTF_8.newDecoder().decode(ByteBuffer.wrap(bytes)).toString();
       return text.startsWith("\uFEFF") ? text.substring(1) : text;
     } catch (CharacterCodingException e) {
       throw new SiteFileException(name + " is not UTF-8 text; a site file must be.", e);

@@ -161,7 +161,9 @@ final class Tree {
     for (Map.Entry<String, JsonNode> field : node.properties()) {
       whole(field.getKey(), path);
       sound(
-          field.getValue(), child(path, field.getKey()), own || field.getKey().equals("parameters"));
+          field.getValue(),
+          child(path, field.getKey()),
+          own || field.getKey().equals("parameters"));
     }
   }
 

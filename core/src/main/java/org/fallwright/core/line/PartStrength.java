@@ -1,0 +1,53 @@
+package org.fallwright.core.line;
+
+import org.fallwright.core.site.Gear;
+import org.fallwright.core.units.Range;
+
+/**
+ * Ultimate strength of a part of the line and the factors asked of it.
+ *
+ * @param strengthN ultimate strength [N]
+ * @param designFactor factor asked at the planned load
+ * @param lastFactor factor asked at the most the source can do
+ */
+public record PartStrength(double strengthN, double designFactor, double lastFactor) {
+  /** Factor asked of a fibre line. Published: 29 CFR 1918 App. II Table 2 (fibre slings). */
+  public static final double FIBRE = 5;
+
+  /**
+   * Factor asked of a wire rope that pulls. Published: Oregon tethered logging, a third of break.
+   */
+  public static final double WIRE = 3;
+
+  /** Factor asked at the most the source can do; planning allowance. */
+  public static final double LAST = 1.5;
+
+  /**
+   * A pull line: breaking load × ends × bends × wet and age.
+   *
+   * @param line the line
+   * @param ruleFactor least design factor that the rule set asks; 1 where it asks none
+   */
+  public static PartStrength line(Gear.Line line, double ruleFactor) {
+    Range.check("rule_factor", ruleFactor, 1, 20, "");
+    return new PartStrength(
+        line.breakingLoadN() * line.terminationFactor() * line.bendFactor() * line.ageFactor(),
+        Math.max(line.wireRope() ? WIRE : FIBRE, ruleFactor),
+        LAST);
+  }
+
+  /**
+   * Rated hardware: its breaking load is its rating times the factor of its standard, and that
+   * factor is asked at the planned load.
+   */
+  public static PartStrength rated(double ratedLoadN, double standardFactor) {
+    Range.check("rated_load_N", ratedLoadN, 100, 1e7, "N");
+    Range.check("standard_factor", standardFactor, 1, 12, "");
+    return new PartStrength(ratedLoadN * standardFactor, standardFactor, LAST);
+  }
+
+  /** Tension at the planned load that the part allows [N]. */
+  public double allowedN() {
+    return strengthN / designFactor;
+  }
+}

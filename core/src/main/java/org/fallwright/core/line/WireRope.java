@@ -1,0 +1,62 @@
+package org.fallwright.core.line;
+
+import org.fallwright.core.reference.Kind;
+import org.fallwright.core.units.Range;
+
+/**
+ * Breaking load of a stranded wire rope by its core: F = K'·d²·R, d the diameter [m], R the grade
+ * of its wires [Pa]. For 6×19 and 6×36 ropes; new and undamaged. Form of EN 12385-4; its constants
+ * are carried from memory, and agree with the sling table of EN 13414-1 and with a published table
+ * of 6×19 fibre core ropes (see the tests).
+ */
+public enum WireRope {
+  FIBRE_CORE(0.330),
+  STEEL_CORE(0.356);
+
+  /** What stands behind the constants. */
+  public static final Kind KIND = Kind.FROM_MEMORY;
+
+  /** Usual grade of the wires [Pa]. */
+  public static final double GRADE_1770 = 1.77e9;
+
+  private final double constant;
+
+  WireRope(double constant) {
+    this.constant = constant;
+  }
+
+  /** Minimum breaking load [N] of a diameter [m] and a grade [Pa]. */
+  public double breakingN(double diameterM, double gradePa) {
+    Range.check("diameter_m", diameterM, 0.003, 0.1, "m");
+    Range.check("grade_Pa", gradePa, 1e9, 2.5e9, "Pa");
+    return constant * diameterM * diameterM * gradePa;
+  }
+
+  /**
+   * Safe mass on a wire rope whose maker's figures are missing [kg]: 8·d², d in mm. Published:
+   * Australian Emergency Manual, Disaster Rescue, 3.15.
+   */
+  public static double safeMassKg(double diameterM) {
+    double mm = 1000 * Range.check("diameter_m", diameterM, 0.003, 0.1, "m");
+    return 8 * mm * mm;
+  }
+
+  /**
+   * Length of rope on a drum [m]: in the handbook's form 0.2618·B·h·(D + h)/d² feet with inches
+   * inside, B the barrel's width, D its diameter, h the depth of rope on it. Published: Handbook of
+   * Oceanographic Winch, Wire and Cable Technology, ch. 12.
+   */
+  public static double onDrumM(
+      double barrelWidthM, double barrelDiameterM, double depthM, double diameterM) {
+    Range.check("barrel_width_m", barrelWidthM, 0.01, 5, "m");
+    Range.check("barrel_diameter_m", barrelDiameterM, 0.01, 5, "m");
+    Range.check("depth_m", depthM, 0, 2, "m");
+    Range.check("diameter_m", diameterM, 0.003, 0.1, "m");
+    return 0.2618
+        * 12
+        * barrelWidthM
+        * depthM
+        * (barrelDiameterM + depthM)
+        / (diameterM * diameterM);
+  }
+}

@@ -1,0 +1,253 @@
+package org.fallwright.core.plan;
+
+import java.util.Locale;
+import java.util.Map;
+import org.fallwright.core.pull.PullOffer;
+import org.fallwright.core.reference.Allowances;
+import org.fallwright.core.site.Position;
+import org.fallwright.core.site.Site;
+import org.fallwright.core.statics.Part;
+import org.fallwright.core.statics.Ratios;
+import org.fallwright.core.statics.Start;
+import org.fallwright.core.statics.Status;
+import org.fallwright.core.statics.TreeSide;
+import org.fallwright.core.units.DisplayUnits;
+
+/** The checks of the force balance: movement, pull, hold, hinge and every part. */
+final class ForceChecks {
+  private final Site site;
+  private final DisplayUnits in;
+  private final Grade grade;
+
+  ForceChecks(Site site, DisplayUnits in, Grade grade) {
+    this.site = site;
+    this.in = in;
+    this.grade = grade;
+  }
+
+  private Position stump() {
+    return site.tree().stump().at();
+  }
+
+  /** The hinge lets go and the line keeps its lever; said in every case. */
+  void movement(TreeSide t, double attachAboveHingeM) {
+    double asked = Allowances.LEVER_LEAST.value() * attachAboveHingeM;
+    if (t.status() == Status.HINGE_NEVER_LETS_GO) {
+      String why =
+          Double.isNaN(t.thicknessThatWouldM())
+              ? "The hinge never lets go: the wind alone beats the tree's weight."
+              : "The hinge never lets go; one of "
+                  + in.smallLength(t.thicknessThatWouldM())
+                  + " would.";
+      grade.factored(
+          "hinge lets go", t.hingeNm(), t.hingeNm() + t.windNm(), "N·m", 0, stump(), why);
+    } else {
+      grade.factored(
+          "hinge lets go",
+          Math.toDegrees(t.commitRad()),
+          Allowances.MOVEMENT_CAP.value(),
+          "deg",
+          Double.POSITIVE_INFINITY,
+          stump(),
+          "The tree's own weight takes it at " + in.angle(t.commitRad()) + ".");
+      boolean lost = t.status() == Status.LEVER_LOST;
+      grade.factored(
+          "lever",
+          t.leverMinM(),
+          asked,
+          "m",
+          Math.max(0, t.leverMinM() / asked),
+          stump(),
+          lost
+              ? "The line loses its lever on the hinge at "
+                  + in.angle(t.leverLostRad())
+                  + ": it pulls the wrong way for this lay."
+              : "The line keeps at least " + in.length(t.leverMinM()) + " of lever.");
+    }
+    if (Double.isFinite(t.endRad())) {
+      double face =
+          Math.max(
+              Math.toDegrees(t.commitRad()) + Allowances.FACE_OVER_COMMIT.value(),
+              Math.toDegrees(t.endRad()) + Allowances.FACE_OVER_MOVEMENT.value());
+      double open = site.cut().faceOpeningDeg();
+      grade.plain(
+          "face opening",
+          open,
+          face,
+          "deg",
+          open / face,
+          stump(),
+          String.format(
+              Locale.ROOT,
+              "The face opens %.0f degrees; %.0f are asked so that it does not shut first.",
+              open,
+              face));
+    }
+  }
+
+  /** Pull, hold, hinge. */
+  void pull(Ratios r, TreeSide t, PullOffer offer, String source) {
+    Map<String, Double> by = r.byCheck();
+    String gives = in.both(u -> u.forceAtMost(r.source().lowN()));
+    grade.plain(
+        "pull",
+        r.source().lowN(),
+        t.planN(),
+        "N",
+        by.get("pull"),
+        null,
+        t.planN() == 0
+            ? "No pull is needed for this lay."
+            : "The pull to plan for is "
+                + in.both(u -> u.forceAtLeast(t.planN()))
+                + " at the tree; "
+                + source
+                + " gives "
+                + gives
+                + " ("
+                + offer.limit()
+                + ").");
+    if (t.holdN() > t.planN()) {
+      double most = Math.min(r.ceiling().tensionN(), r.source().lowN());
+      grade.factored(
+          "tension window",
+          most,
+          t.workingN(),
+          "N",
+          most / t.workingN(),
+          null,
+          "Holding the tree asks for more than pulling it: "
+              + in.both(u -> u.forceAtLeast(t.workingN()))
+              + ".");
+    }
+    String rests =
+        String.format(
+            Locale.ROOT,
+            "Not asked: sitting back, the tree rests on its stump (%.2f).",
+            t.restShare());
+    grade.plain(
+        "hold",
+        r.source().holdN(),
+        t.holdN(),
+        "N",
+        by.get("hold"),
+        null,
+        r.holdAsked()
+            ? "Without its hinge the tree pulls back with "
+                + in.both(u -> u.forceAtLeast(t.holdN()))
+                + "; "
+                + source
+                + " holds "
+                + in.both(u -> u.forceAtMost(r.source().holdN()))
+                + "."
+            : rests);
+    grade.plain(
+        "hold stability",
+        r.holding().stability(),
+        Allowances.HOLD_STABILITY_ASKED.value(),
+        "",
+        by.get("hold stability"),
+        null,
+        !r.holdAsked()
+            ? rests
+            : !r.source().captured()
+                ? "A constant force can pull a tree over; it can never hold one."
+                : String.format(
+                    Locale.ROOT,
+                    "The line is %.1f times as stiff as the tree is unstable.",
+                    r.holding().stability()));
+    start(r, t);
+    hinge(by, t);
+  }
+
+  private void start(Ratios r, TreeSide t) {
+    if (r.holding().start() != Start.RUNS || !r.holdAsked()) {
+      return;
+    }
+    grade.tightAtBest(
+        "start",
+        r.holding().pretensionTopN(),
+        t.holdN(),
+        "N",
+        stump(),
+        "Held at "
+            + in.force(t.holdN())
+            + " it goes as soon as the hinge is ready: be away before the last wood is cut.");
+  }
+
+  private void hinge(Map<String, Double> by, TreeSide t) {
+    share(
+        false,
+        "steering",
+        t.steerShare(),
+        Ratios.HINGE_SHARE,
+        by.get("steering"),
+        "Side lean, wind and line take %.0f %% of the hinge's side strength; %.0f %% may be used.");
+    share(
+        true,
+        "hinge turning",
+        t.turnShare(),
+        Ratios.HINGE_SHARE,
+        by.get("hinge turning"),
+        "The line turns the hinge with %.0f %% of its strength; %.0f %% may be used.");
+    share(
+        true,
+        "hinge crushing",
+        t.crushShare(),
+        Ratios.CRUSH_SHARE,
+        by.get("hinge crushing"),
+        "Weight and line press the hinge to %.0f %% of its strength; %.0f %% may be used.");
+  }
+
+  private void share(
+      boolean factored, String id, double share, double most, double ratio, String why) {
+    double shown = Math.max(0, share);
+    String text = String.format(Locale.ROOT, why, 100 * shown, 100 * most);
+    if (factored) {
+      grade.factored(id, shown, most, "", ratio, stump(), text);
+    } else {
+      grade.plain(id, shown, most, "", ratio, stump(), text);
+    }
+  }
+
+  /** Every part, at plan and at the most the source can do. */
+  void parts(Ratios r, TreeSide t) {
+    for (Part p : r.parts()) {
+      double plan = t.workingN() * p.atPlan();
+      double high = r.source().highN() * p.holding();
+      double allowed = p.strengthN() / p.designFactor();
+      double last = p.strengthN() / p.lastFactor();
+      grade.factored(
+          p.name() + " at plan",
+          allowed,
+          plan,
+          "N",
+          r.byCheck().get(p.name() + " at plan"),
+          at(p.name()),
+          in.both(u -> u.forceAtLeast(plan))
+              + " come on it; "
+              + in.both(u -> u.forceAtMost(allowed))
+              + " are allowed.");
+      grade.factored(
+          p.name() + " at high",
+          last,
+          high,
+          "N",
+          r.byCheck().get(p.name() + " at high"),
+          at(p.name()),
+          "If the source stalls, slips or jerks "
+              + in.both(u -> u.forceAtLeast(high))
+              + " come on it; "
+              + in.both(u -> u.forceAtMost(last))
+              + " are the most.");
+    }
+  }
+
+  private Position at(String part) {
+    if (part.equals("stem")) {
+      return stump();
+    }
+    String id = part.substring(part.lastIndexOf(' ') + 1);
+    return site.anchor(id).map(a -> a.place().at()).orElse(null);
+  }
+}

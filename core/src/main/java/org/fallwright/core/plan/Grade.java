@@ -1,0 +1,94 @@
+package org.fallwright.core.plan;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.fallwright.core.site.Position;
+
+/**
+ * Gathers the checks of one setup and gives each its verdict.
+ *
+ * <p>Workable from a ratio of 1.25, tight from 1, else not; a check that holds a design factor
+ * already is workable from 1. The standing of a check is its ratio over the ratio from which it is
+ * workable, so that checks of both kinds can be ranked together.
+ */
+final class Grade {
+  /**
+   * Ratio from which a check without a design factor of its own is workable; planning allowance.
+   */
+  static final double WORKABLE = 1.25;
+
+  private final List<Check> checks = new ArrayList<>();
+  private final List<Double> standings = new ArrayList<>();
+
+  /** A check without a design factor inside. */
+  void plain(
+      String id, double value, double limit, String unit, double ratio, Position at, String why) {
+    add(id, value, limit, unit, ratio, WORKABLE, at, why);
+  }
+
+  /** A check with a design factor inside. */
+  void factored(
+      String id, double value, double limit, String unit, double ratio, Position at, String why) {
+    add(id, value, limit, unit, ratio, 1, at, why);
+  }
+
+  /** A thing that is allowed but never better than tight. */
+  void tightAtBest(String id, double value, double limit, String unit, Position at, String why) {
+    put(new Check(id, value, limit, unit, 1, Verdict.TIGHT, at, why), 1 / WORKABLE);
+  }
+
+  /** A thing that nobody can judge yet. */
+  void unknown(String id, Position at, String why) {
+    put(
+        new Check(id, Double.NaN, Double.NaN, "", Double.NaN, Verdict.CANNOT_JUDGE, at, why),
+        Double.NEGATIVE_INFINITY);
+  }
+
+  private void add(
+      String id,
+      double value,
+      double limit,
+      String unit,
+      double ratio,
+      double workable,
+      Position at,
+      String why) {
+    Verdict v =
+        ratio >= workable ? Verdict.WORKABLE : ratio >= 1 ? Verdict.TIGHT : Verdict.NOT_WORKABLE;
+    put(new Check(id, value, limit, unit, ratio, v, at, why), ratio / workable);
+  }
+
+  private void put(Check check, double standing) {
+    checks.add(check);
+    standings.add(standing);
+  }
+
+  List<Check> checks() {
+    return checks;
+  }
+
+  Verdict verdict() {
+    return checks.stream().map(Check::verdict).reduce(Verdict.WORKABLE, Verdict::worse);
+  }
+
+  /** Index of the weakest link: among the checks of the worst verdict, the lowest standing. */
+  private int weakestIndex() {
+    Verdict worst = verdict();
+    int weakest = -1;
+    for (int i = 0; i < checks.size(); i++) {
+      if (checks.get(i).verdict() == worst
+          && (weakest < 0 || standings.get(i) < standings.get(weakest))) {
+        weakest = i;
+      }
+    }
+    return weakest;
+  }
+
+  Check weakest() {
+    return checks.get(weakestIndex());
+  }
+
+  double standing() {
+    return standings.get(weakestIndex());
+  }
+}

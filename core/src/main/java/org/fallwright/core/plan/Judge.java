@@ -1,0 +1,230 @@
+package org.fallwright.core.plan;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.concurrent.ConcurrentHashMap;
+import org.fallwright.core.pull.PullOffer;
+import org.fallwright.core.pull.PullSource;
+import org.fallwright.core.pull.PullSources;
+import org.fallwright.core.rules.RuleSet;
+import org.fallwright.core.rules.RuleSets;
+import org.fallwright.core.site.Gear;
+import org.fallwright.core.site.Place;
+import org.fallwright.core.site.Site;
+import org.fallwright.core.statics.Part;
+import org.fallwright.core.statics.PullCase;
+import org.fallwright.core.statics.Ratios;
+import org.fallwright.core.statics.SourceAtTree;
+import org.fallwright.core.statics.Statics;
+import org.fallwright.core.statics.TreeSide;
+import org.fallwright.core.units.DisplayUnits;
+
+/**
+ * Judges one setup by every check there is; none is left out because another fails. Safe for use by
+ * several threads.
+ *
+ * <p>The order of the checks is that of the questions a person asks: can it be judged at all, is
+ * each anchor usable, does the lay land clear, does the line run clear, does the kit reach, does
+ * every part hold, does the source pull and hold, can people stand clear.
+ */
+public final class Judge {
+  private final Site site;
+  private final PullSources sources;
+  private final RuleSet rules;
+  private final DisplayUnits in;
+  private final Subject subject;
+  private final SiteTables tables = new SiteTables();
+  private final Landing landing;
+  private final Map<Setup, Route> routes = new ConcurrentHashMap<>();
+
+  /**
+   * @throws IllegalArgumentException one sentence, where the site names a species, surface or rule
+   *     set that is not known
+   */
+  public Judge(Site site, PullSources sources) {
+    this.site = site;
+    this.sources = sources;
+    rules = RuleSets.shipped().byKey(site.ruleSet());
+    in = DisplayUnits.valueOf(site.display().name());
+    subject = new Subject(site);
+    landing = new Landing(site, rules, in, subject);
+  }
+
+  /** Notes that hold for every setup of the site, a sentence each. */
+  List<String> notes() {
+    return subject.notes();
+  }
+
+  /** The setup with all its checks, its zones and notes. */
+  public Judged judge(Setup setup) {
+    return judge(setup, true);
+  }
+
+  /** The same checks, figures and sentence without zones and notes, which take longer. */
+  Judged quick(Setup setup) {
+    return judge(setup, false);
+  }
+
+  private Judged judge(Setup setup, boolean full) {
+    Gear.Source gear = site.source(setup.source()).orElseThrow();
+    PullSource source = kind(gear.plugin());
+    PullSource driver =
+        setup.driver() == null
+            ? null
+            : kind(site.source(setup.driver().source()).orElseThrow().plugin());
+    Route route = routes.computeIfAbsent(setup.withLay(0), w -> Route.of(site, w, source, driver));
+    PullCase pull = subject.pull(setup, route);
+    Statics statics = new Statics(pull);
+    TreeSide tree = statics.treeSide();
+    PullOffer offer = Reach.of(site, setup, route, Reach.Pulled.of(tree), source, driver);
+    GearParts parts = new GearParts(site, rules, tables).collect(setup, route, offer);
+    String name = name(setup, source);
+
+    Grade grade = new Grade();
+    landing.knowledge(grade);
+    usable(grade, parts);
+    Landing.Zones zones = landing.check(grade, setup, route, tree, full);
+    new KitChecks(site, in, grade).check(setup, route, tree, offer, parts);
+    ForceChecks forces = new ForceChecks(site, in, grade);
+    forces.movement(tree, pull.line().attachHeightM());
+    List<String> notes = new ArrayList<>(zones.notes());
+    Figures figures;
+    List<PartLoad> loads = List.of();
+    if (tree.movable()) {
+      Stopped stopped = stop(statics, offer, route, parts.parts());
+      Ratios r = stopped.ratios();
+      forces.pull(r, tree, offer, name);
+      forces.parts(r, tree);
+      if (stopped.leans()) {
+        leaning(grade, offer, r);
+      }
+      figures = FiguresOf.reckon(site, route, statics, r, offer, stopped.leans(), zones);
+      loads = loads(r, tree);
+      if (full) {
+        notes.addAll(SetupNotes.of(site, in, setup, tree, r, offer));
+      }
+    } else {
+      figures = FiguresOf.unmovable(route, tree, zones);
+    }
+    for (PullOffer.Finding f : offer.checks()) {
+      grade.factored(f.id(), f.value(), f.limit(), f.unit(), f.ratio(), place(setup).at(), f.why());
+    }
+    landing.people(grade, setup, zones, offer);
+    notes.addAll(offer.notes());
+    Check weakest = grade.weakest();
+    return new Judged(
+        setup,
+        grade.verdict(),
+        weakest,
+        grade.standing(),
+        Sentence.of(grade.verdict(), weakest, figures, name, in),
+        figures,
+        grade.checks(),
+        loads,
+        route.line(),
+        route.haulOnSite(),
+        zones.ground(),
+        notes);
+  }
+
+  /**
+   * The ratios after any stop, and whether the setup leans on a person who reads a load cell: it
+   * does where a part would give way at the most the source can do, and a load cell is there.
+   */
+  private record Stopped(Ratios ratios, boolean leans) {}
+
+  private Stopped stop(Statics statics, PullOffer offer, Route route, List<Part> parts) {
+    TreeSide tree = statics.treeSide();
+    double low = offer.lowN() / route.loads().sourceEndPerTree();
+    boolean captured = offer.captured() && offer.holdN() >= tree.holdN();
+    boolean wedges = site.cut().wedges();
+    SourceAtTree free =
+        new SourceAtTree(low, offer.holdN(), offer.highN(), captured, SourceAtTree.Stop.NONE, 0);
+    Ratios without = Ratios.of(statics, wedges, free, parts);
+    boolean breaks =
+        without.byCheck().entrySet().stream()
+            .anyMatch(e -> e.getKey().endsWith(" at high") && e.getValue() < 1);
+    if (!breaks || site.gear().loadCell() == null) {
+      return new Stopped(without, false);
+    }
+    SourceAtTree read =
+        new SourceAtTree(
+            low,
+            offer.holdN(),
+            offer.highN(),
+            captured,
+            SourceAtTree.Stop.READER,
+            offer.overrunM());
+    return new Stopped(Ratios.of(statics, wedges, read, parts), true);
+  }
+
+  private void leaning(Grade grade, PullOffer offer, Ratios r) {
+    String stop = in.both(u -> u.forceAtMost(r.ceiling().tensionN()));
+    String why =
+        "Works only with a person reading the load cell who stops it at "
+            + stop
+            + ": beyond that "
+            + r.ceiling().part()
+            + " is loaded past its factor.";
+    if (offer.powered()) {
+      grade.tightAtBest("stop reading", r.ceiling().tensionN(), r.source().highN(), "N", null, why);
+    } else {
+      grade.factored(
+          "stop reading",
+          r.ceiling().tensionN(),
+          r.source().highN(),
+          "N",
+          Double.POSITIVE_INFINITY,
+          null,
+          why);
+    }
+  }
+
+  private void usable(Grade grade, GearParts parts) {
+    for (GearParts.Held h : parts.anchors()) {
+      boolean no = h.capacity().refused();
+      grade.factored(
+          "usable " + h.anchor().id(),
+          no ? 0 : 1,
+          1,
+          "",
+          no ? 0 : Double.POSITIVE_INFINITY,
+          h.anchor().place().at(),
+          no
+              ? h.anchor().id() + " is refused: " + h.capacity().why() + "."
+              : h.anchor().id() + " may be used: " + h.capacity().why() + ".");
+    }
+  }
+
+  private static List<PartLoad> loads(Ratios r, TreeSide t) {
+    return r.parts().stream()
+        .map(
+            p ->
+                new PartLoad(
+                    p.name(),
+                    t.workingN() * p.atPlan(),
+                    r.source().highN() * p.holding(),
+                    p.strengthN(),
+                    p.designFactor(),
+                    p.lastFactor()))
+        .toList();
+  }
+
+  private Place place(Setup s) {
+    return Route.place(site, s.driver() == null ? s.place() : s.driver().place());
+  }
+
+  private String name(Setup s, PullSource source) {
+    Gear.Source gear = site.source(s.source()).orElseThrow();
+    String mode = source.modes(gear.parameters()).size() > 1 ? " (" + s.mode() + ")" : "";
+    String own = s.source() + mode;
+    return s.driver() == null ? own : own + " hauled by " + s.driver().source();
+  }
+
+  private PullSource kind(String plugin) {
+    return sources
+        .byId(plugin)
+        .orElseThrow(() -> new IllegalArgumentException("no plugin \"" + plugin + "\" is loaded"));
+  }
+}

@@ -1,0 +1,544 @@
+package org.fallwright.core.plan;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.OptionalDouble;
+import java.util.Set;
+import java.util.concurrent.ConcurrentHashMap;
+import java.util.function.ToDoubleFunction;
+import org.fallwright.core.pull.PullOffer;
+import org.fallwright.core.rules.RuleSet;
+import org.fallwright.core.site.Looked;
+import org.fallwright.core.site.Place;
+import org.fallwright.core.site.Position;
+import org.fallwright.core.site.Site;
+import org.fallwright.core.site.SubjectTree;
+import org.fallwright.core.site.Target;
+import org.fallwright.core.site.Wire;
+import org.fallwright.core.statics.TreeSide;
+import org.fallwright.core.units.DisplayUnits;
+import org.fallwright.core.zones.Bight;
+import org.fallwright.core.zones.DropZoneFit;
+import org.fallwright.core.zones.EscapeRoutes;
+import org.fallwright.core.zones.FallFootprint;
+import org.fallwright.core.zones.FallOutline;
+import org.fallwright.core.zones.LayTargets;
+import org.fallwright.core.zones.Leg;
+import org.fallwright.core.zones.LegCheck;
+import org.fallwright.core.zones.OperatorPlace;
+import org.fallwright.core.zones.Recoil;
+import org.fallwright.core.zones.SitBackZone;
+import org.fallwright.core.zones.TargetClearance;
+import org.fallwright.core.zones.WireCheck;
+
+/** The checks on the ground: what is known, where the tree lands, where the line runs, people. */
+final class Landing {
+  private final Site site;
+  private final RuleSet rules;
+  private final DisplayUnits in;
+  private final FallOutline outline;
+  private final LayTargets targets;
+  private final DropZoneFit dropZone;
+  private final WireCheck wires;
+  private final List<WireCheck.Reach> reach;
+  private final LegCheck legs;
+  private final EscapeRoutes escapes;
+  private final boolean wiresKnown;
+  private final Map<Fall, Landed> falls = new ConcurrentHashMap<>();
+  private final Map<Setup, List<Passed>> passed = new ConcurrentHashMap<>();
+
+  /** All that a footprint depends on. */
+  private record Fall(double layDeg, double steeringShare) {}
+
+  /** A footprint and how the things on the site stand to it. */
+  private record Landed(
+      FallFootprint footprint,
+      List<TargetClearance> clearances,
+      DropZoneFit.Fit fit,
+      List<WireCheck.InLay> wires) {}
+
+  /** What a leg passes, with the number of the leg. */
+  private record Passed(int leg, LegCheck.Passing what) {}
+
+  /**
+   * The zones of a setup.
+   *
+   * @param footprint the footprint
+   * @param ground for painting; null in a quick look
+   * @param clearanceM least clearance to a target that must not be hit, the one that is nearest to
+   *     what it asks [m]; NaN: none
+   * @param clearanceTarget that target, or null
+   * @param bights insides of the line's angles
+   * @param recoil where parted ends fly
+   * @param notes sentences
+   */
+  record Zones(
+      FallFootprint footprint,
+      Ground ground,
+      double clearanceM,
+      String clearanceTarget,
+      List<Bight> bights,
+      Recoil recoil,
+      List<String> notes) {}
+
+  Landing(Site site, RuleSet rules, DisplayUnits in, Subject subject) {
+    this.site = site;
+    this.rules = rules;
+    this.in = in;
+    SubjectTree t = site.tree();
+    outline =
+        new FallOutline(
+            t.heightM().value(),
+            t.crownBaseM(),
+            t.crownRadiusM(),
+            subject.figures().stumpDiameterM(),
+            t.leanDeg().value(),
+            t.leanAzimuthDeg().value());
+    targets = new LayTargets(site.targets(), t.stump());
+    dropZone = site.dropZones().isEmpty() ? null : new DropZoneFit(site.dropZones());
+    wires = new WireCheck(site.wires(), t.stump(), site.cut().heightM(), outline);
+    wiresKnown = site.wires().stream().allMatch(w -> approach(w).isPresent());
+    reach = wiresKnown ? wires.reach(approach()) : List.of();
+    legs =
+        new LegCheck(
+            site.targets().stream().filter(Landing::mattersToALine).toList(),
+            site.anchors(),
+            wiresKnown ? site.wires() : List.of());
+    escapes = new EscapeRoutes(site.targets());
+  }
+
+  /** A private way that asks for no distance is closed for the work; a plant may be brushed. */
+  private static boolean mattersToALine(Target t) {
+    return !t.mayBeHit() && !(t.kind() == Target.Kind.ROAD && t.requiredDistanceM() == 0);
+  }
+
+  private OptionalDouble approach(Wire w) {
+    return rules
+        .approachDistanceM(w.voltageKv())
+        .map(r -> OptionalDouble.of(r.value()))
+        .orElse(OptionalDouble.empty());
+  }
+
+  private ToDoubleFunction<Wire> approach() {
+    return w -> approach(w).orElseThrow();
+  }
+
+  /** What must be known before anything is judged. */
+  void knowledge(Grade grade) {
+    for (Wire w : site.wires()) {
+      if (approach(w).isEmpty()) {
+        grade.unknown(
+            "voltage of " + w.id(),
+            w.poles().get(0).at(),
+            "Line "
+                + w.id()
+                + ": voltage not given, so no setup is judged. Ask its owner; write the answer and"
+                + " who gave it.");
+      }
+    }
+    if (site.found(Looked.What.WIRES) == Looked.Found.NOT_LOOKED) {
+      grade.unknown(
+          "wires looked for",
+          null,
+          "Nobody has said whether there are wires, so no setup is judged. Look, and say none or"
+              + " draw them.");
+    }
+    if (site.found(Looked.What.PEOPLE_INDOORS) == Looked.Found.NOT_LOOKED) {
+      grade.unknown(
+          "people indoors",
+          null,
+          "Nobody has said who is indoors, so no setup is judged. Ask at every door, and say so.");
+    }
+  }
+
+  /** Landing, wires and the line's own way. */
+  Zones check(Grade grade, Setup setup, Route route, TreeSide tree, boolean full) {
+    double share = tree.movable() ? Math.max(0, tree.steerShare()) : Double.POSITIVE_INFINITY;
+    Landed landed = falls.computeIfAbsent(new Fall(setup.layDeg(), share), this::land);
+    TargetClearance nearest = targets(grade, landed);
+    dropZone(grade, landed);
+    wires(grade, landed);
+    line(grade, setup, route);
+    List<Position> path = path(route);
+    List<Bight> bights = Bight.along(path);
+    Recoil recoil = new Recoil(path);
+    double back = setup.layDeg() + Math.toDegrees(Math.atan2(tree.vgM(), tree.ugM()));
+    SitBackZone sitBack =
+        SitBackZone.of(site.tree().stump().at(), normal(back), site.tree().heightM().value());
+    List<Position> ways =
+        escapes.ends(
+            new EscapeRoutes.Zones(landed.footprint(), sitBack, bights, recoil, legs(route)),
+            rules.escapeLengthM().value(),
+            site.tree().heightM().value());
+    grade.factored(
+        "ways out",
+        ways.size(),
+        1,
+        "",
+        ways.isEmpty() ? 0 : Double.POSITIVE_INFINITY,
+        site.tree().stump().at(),
+        ways.isEmpty()
+            ? "No way out ends clear of the footprint, the sit-back zone, the line's angle and its"
+                + " ends."
+            : ways.size() + " way(s) out end clear of every zone.");
+    Ground ground = full ? ground(landed, sitBack, bights, recoil, ways, setup) : null;
+    return new Zones(
+        landed.footprint(),
+        ground,
+        nearest == null ? Double.NaN : nearest.clearanceM(),
+        nearest == null ? null : nearest.targetId(),
+        bights,
+        recoil,
+        full ? notes(landed, sitBack, route) : List.of());
+  }
+
+  private Landed land(Fall fall) {
+    FallFootprint f =
+        FallFootprint.of(outline, site.tree().stump().at(), fall.layDeg(), fall.steeringShare(), 0);
+    return new Landed(
+        f,
+        targets.clearances(f),
+        dropZone == null ? null : dropZone.of(f),
+        wiresKnown ? wires.inLay(f, approach()) : List.of());
+  }
+
+  private TargetClearance targets(Grade grade, Landed landed) {
+    TargetClearance nearest = null;
+    for (TargetClearance c : landed.clearances()) {
+      if (c.mayBeHit()) {
+        continue;
+      }
+      if (c.askedM() > 0 && (nearest == null || spare(c) < spare(nearest))) {
+        nearest = c;
+      }
+      grade.plain(
+          "clear of " + c.targetId(),
+          c.clearanceM(),
+          c.askedM(),
+          "m",
+          c.ratio(),
+          c.nearest(),
+          c.overlaps()
+              ? "The tree can come down on "
+                  + c.targetId()
+                  + ": "
+                  + amount(c.overlapAmount(), c.overlapUnit())
+                  + " of it."
+              : "It clears "
+                  + c.targetId()
+                  + " by "
+                  + in.length(c.clearanceM())
+                  + (c.askedM() > 0 ? " of the " + in.length(c.askedM()) + " asked." : "."));
+    }
+    return nearest;
+  }
+
+  private static double spare(TargetClearance c) {
+    return c.clearanceM() - c.askedM();
+  }
+
+  private String amount(double amount, String unit) {
+    return unit.equals("m") ? in.length(amount) : in.area(amount);
+  }
+
+  private void dropZone(Grade grade, Landed landed) {
+    if (landed.fit() == null) {
+      return;
+    }
+    DropZoneFit.Fit fit = landed.fit();
+    String id = site.dropZones().size() == 1 ? site.dropZones().get(0).id() : "drop zones";
+    grade.factored(
+        "inside " + id,
+        fit.marginM(),
+        0,
+        "m",
+        fit.inside() ? Double.POSITIVE_INFINITY : 0,
+        fit.place(),
+        fit.inside()
+            ? "It lands inside the drop zone with " + in.length(fit.marginM()) + " to spare."
+            : "It can land outside the drop zone by " + in.length(-fit.marginM()) + ".");
+  }
+
+  private void wires(Grade grade, Landed landed) {
+    for (WireCheck.InLay w : landed.wires()) {
+      grade.plain(
+          "wire " + w.wireId() + " in the lay",
+          w.leastM(),
+          w.askedM(),
+          "m",
+          Math.max(0, w.leastM()) / w.askedM(),
+          w.place(),
+          "The falling tree stays at least "
+              + in.length(Math.max(0, w.leastM()))
+              + " from line "
+              + w.wireId()
+              + "; "
+              + in.length(w.askedM())
+              + " are asked.");
+    }
+    for (WireCheck.Reach r : reach) {
+      double there = r.groundM() - r.errorM();
+      grade.plain(
+          "wire " + r.wireId() + " in reach",
+          there,
+          r.stopM(),
+          "m",
+          // on the limit itself the work stops too
+          r.stops() ? Math.min(there / r.stopM(), Math.nextDown(1.0)) : there / r.stopM(),
+          r.place(),
+          r.stops()
+              ? "Line "
+                  + r.wireId()
+                  + " is within reach of the tree whichever way it goes: stop, its owner must make"
+                  + " it dead or attend."
+              : "Line "
+                  + r.wireId()
+                  + " is "
+                  + in.length(there)
+                  + " off; within "
+                  + in.length(r.stopM())
+                  + " the work stops.");
+    }
+  }
+
+  private void line(Grade grade, Setup setup, Route route) {
+    for (Passed p : passed.computeIfAbsent(setup.withLay(0), w -> passing(setup, route))) {
+      LegCheck.Passing what = p.what();
+      boolean over = what.clearanceM() <= 0;
+      grade.plain(
+          "line clear of " + what.what() + (p.leg() > 0 ? ", leg " + (p.leg() + 1) : ""),
+          what.clearanceM(),
+          what.askedM(),
+          "m",
+          Math.max(0, what.clearanceM()) / what.askedM(),
+          what.place(),
+          over
+              ? "The line runs over or through "
+                  + what.what()
+                  + (movable(what.what()) ? "; move it before the work." : ".")
+              : "The line passes "
+                  + what.what()
+                  + " at "
+                  + in.length(what.clearanceM())
+                  + " of "
+                  + in.length(what.askedM())
+                  + " asked.");
+    }
+  }
+
+  private boolean movable(String id) {
+    return site.targets().stream().anyMatch(t -> t.id().equals(id) && t.movable());
+  }
+
+  /** What the legs pass within ten times the distance asked; the rest is plainly clear. */
+  private List<Passed> passing(Setup setup, Route route) {
+    List<Passed> all = new ArrayList<>();
+    List<Leg> list = legs(route);
+    List<LinePoint> points = points(route);
+    for (int i = 0; i < list.size(); i++) {
+      double error = Math.max(error(points.get(i).id()), error(points.get(i + 1).id()));
+      for (LegCheck.Passing p :
+          legs.passing(list.get(i), error, w -> approach(w).orElseThrow() + error)) {
+        boolean wire = site.wires().stream().anyMatch(w -> w.id().equals(p.what()));
+        if (wire || p.clearanceM() < NEAR * p.askedM()) {
+          all.add(new Passed(i, p));
+        }
+      }
+    }
+    return all;
+  }
+
+  /** Multiple of what is asked beyond which a thing beside the line is not listed. */
+  private static final double NEAR = 10;
+
+  private double error(String id) {
+    return id.equals(site.tree().id())
+        ? site.tree().stump().errorM()
+        : Route.place(site, id).errorM();
+  }
+
+  private static List<LinePoint> points(Route route) {
+    List<LinePoint> points = new ArrayList<>(route.line());
+    if (!route.haulOnSite().isEmpty()) {
+      points.add(route.haulOnSite().get(1));
+    }
+    return points;
+  }
+
+  private static List<Position> path(Route route) {
+    return points(route).stream().map(LinePoint::at).toList();
+  }
+
+  private static List<Leg> legs(Route route) {
+    List<LinePoint> p = points(route);
+    List<Leg> legs = new ArrayList<>();
+    for (int i = 0; i + 1 < p.size(); i++) {
+      legs.add(
+          new Leg(
+              p.get(i).at(),
+              p.get(i).elevationM(),
+              p.get(i + 1).at(),
+              p.get(i + 1).elevationM(),
+              Set.of(p.get(i).id(), p.get(i + 1).id())));
+    }
+    return legs;
+  }
+
+  private Ground ground(
+      Landed landed,
+      SitBackZone sitBack,
+      List<Bight> bights,
+      Recoil recoil,
+      List<Position> ways,
+      Setup setup) {
+    double height = site.tree().heightM().value();
+    return new Ground(
+        landed.footprint().geometry(),
+        site.tree().stump().at().along(setup.layDeg(), height),
+        sitBack.geometry(),
+        rules.peopleRadiusFactor().value() * height,
+        bights.stream().map(Bight::geometry).toList(),
+        recoil.geometry(),
+        ways,
+        landed.footprint().halfAngleDeg(),
+        reach.stream().mapToDouble(WireCheck.Reach::stopM).max().orElse(Double.NaN));
+  }
+
+  private List<String> notes(Landed landed, SitBackZone sitBack, Route route) {
+    List<String> notes = new ArrayList<>();
+    for (TargetClearance c : landed.clearances()) {
+      if (c.mayBeHit() && c.overlaps()) {
+        notes.add(
+            "The tree can come down on "
+                + c.targetId()
+                + " ("
+                + amount(c.overlapAmount(), c.overlapUnit())
+                + "), which may be hit.");
+      }
+    }
+    List<String> stake =
+        sitBack.atStake(targets).stream()
+            .filter(o -> !ground(o.targetId()))
+            .map(o -> o.targetId() + " (" + amount(o.amount(), o.unit()) + ")")
+            .toList();
+    notes.add(
+        stake.isEmpty()
+            ? "If line or hinge is lost the tree falls back; no line stops it once it goes."
+            : "If line or hinge is lost the tree falls back on "
+                + String.join(", ", stake)
+                + ": nobody indoors, nobody on that side. No line stops it once it goes.");
+    for (WireCheck.Reach r : reach) {
+      if (!r.stops() && r.advises()) {
+        notes.add(
+            "Line "
+                + r.wireId()
+                + " lies within two tree lengths and the approach distance: "
+                + (rules.extraAdviceTwoH().yes()
+                    ? "its owner's plan is asked for first."
+                    : "ask its owner before the work."));
+      }
+    }
+    for (Target t : site.targets()) {
+      if (!mattersToALine(t) && t.kind() == Target.Kind.ROAD && crosses(t, route)) {
+        notes.add("The line runs along or over " + t.id() + ": close it for the work.");
+      }
+    }
+    return notes;
+  }
+
+  private boolean ground(String id) {
+    return site.targets().stream()
+        .anyMatch(
+            t ->
+                t.id().equals(id)
+                    && (t.kind() == Target.Kind.ROAD || t.kind() == Target.Kind.BURIED));
+  }
+
+  private static boolean crosses(Target t, Route route) {
+    List<Position> path = path(route);
+    return t.shape()
+        .geometry()
+        .intersects(
+            org.fallwright.core.site.Shape.FACTORY.createLineString(
+                path.stream()
+                    .map(p -> new org.locationtech.jts.geom.Coordinate(p.eastM(), p.northM()))
+                    .toArray(org.locationtech.jts.geom.Coordinate[]::new)));
+  }
+
+  /** People at the source. */
+  void people(Grade grade, Setup setup, Zones zones, PullOffer offer) {
+    String at = setup.driver() == null ? setup.place() : setup.driver().place();
+    Place place = Route.place(site, at);
+    if (offer.operators() > 0) {
+      // the operator stands at the end of the last leg, a corner of its own angle
+      List<Bight> others =
+          zones.bights().isEmpty()
+              ? List.of()
+              : zones.bights().subList(0, zones.bights().size() - 1);
+      OperatorPlace o = OperatorPlace.of(place.at(), zones.footprint(), others, zones.recoil());
+      double height = site.tree().heightM().value();
+      double asked = rules.operatorRadiusFactor().value() * height;
+      boolean far = rules.operatorRadiusFactor().metBy(o.fromStumpM(), height);
+      String stands =
+          "Who works the source stands "
+              + in.length(o.fromStumpM())
+              + " from the stump; "
+              + in.length(asked)
+              + " are asked";
+      if (!far && rules.teamException().yes()) {
+        grade.tightAtBest(
+            "operator distance",
+            o.fromStumpM(),
+            asked,
+            "m",
+            place.at(),
+            stands + ": only as one of the team, named on the sheet with the reason.");
+      } else {
+        grade.factored(
+            "operator distance",
+            o.fromStumpM(),
+            asked,
+            "m",
+            far
+                ? Math.max(1, o.fromStumpM() / asked)
+                : Math.min(o.fromStumpM() / asked, Math.nextDown(1.0)),
+            place.at(),
+            stands + (far ? "." : ", and these rules know no exception."));
+      }
+      boolean clear = o.outsideFootprint() && o.outsideBights();
+      grade.factored(
+          "operator clear",
+          clear ? 1 : 0,
+          1,
+          "",
+          clear ? Double.POSITIVE_INFINITY : 0,
+          place.at(),
+          clear
+              ? "Who works the source stands outside the footprint and every other angle of the"
+                  + " line."
+              : "Who works the source would stand "
+                  + (o.outsideFootprint()
+                      ? "inside an angle of the line."
+                      : "where the tree can fall."));
+    }
+    if (!offer.captured() && !offer.powered() && offer.operators() > 0) {
+      boolean refused = rules.freeHand() == RuleSet.FreeHand.REFUSED;
+      String why =
+          "People pull with nothing that holds the line"
+              + (refused
+                  ? "; these rules refuse that."
+                  : ": a swaying pull rocks the tree while it is cut. Use a device that holds.");
+      if (refused) {
+        grade.factored("free hand", 0, 1, "", 0, place.at(), why);
+      } else {
+        grade.tightAtBest("free hand", 0, 1, "", place.at(), why);
+      }
+    }
+  }
+
+  private static double normal(double deg) {
+    double d = deg % 360;
+    return d < 0 ? d + 360 : d;
+  }
+}

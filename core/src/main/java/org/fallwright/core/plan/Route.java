@@ -1,0 +1,116 @@
+package org.fallwright.core.plan;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.fallwright.core.line.LegLoads;
+import org.fallwright.core.line.Point3;
+import org.fallwright.core.pull.PullSource;
+import org.fallwright.core.site.Anchor;
+import org.fallwright.core.site.Gear;
+import org.fallwright.core.site.Place;
+import org.fallwright.core.site.Position;
+import org.fallwright.core.site.Site;
+import org.fallwright.core.site.Spot;
+
+/**
+ * Where the line of a way runs in space; the same for every lay.
+ *
+ * @param points attachment, redirects, end; metres from the stump's centre at hinge level
+ * @param loads tensions and loads of those legs
+ * @param line the same points on the site
+ * @param haul for a block system, its fixed block and its driver, relative; else empty
+ * @param haulOnSite the same on the site
+ * @param bearingErrorM position error of the first bearing point [m]
+ */
+record Route(
+    List<Point3> points,
+    LegLoads loads,
+    List<LinePoint> line,
+    List<Point3> haul,
+    List<LinePoint> haulOnSite,
+    double bearingErrorM) {
+
+  static Route of(Site site, Setup way, PullSource source, PullSource driver) {
+    List<LinePoint> line = new ArrayList<>();
+    line.add(attachment(site, way.attachHeightM()));
+    Place bearing = null;
+    List<Double> efficiencies = new ArrayList<>();
+    for (String id : way.redirects()) {
+      Anchor a = site.anchor(id).orElseThrow();
+      bearing = bearing == null ? a.place() : bearing;
+      line.add(at(a, LinePoint.Role.REDIRECT));
+      efficiencies.add(block(site).efficiency());
+    }
+    Gear.Source gear = site.source(way.source()).orElseThrow();
+    LinePoint end =
+        end(
+            site,
+            way.place(),
+            gear,
+            source,
+            way.driver() == null ? LinePoint.Role.SOURCE : LinePoint.Role.BLOCK_SYSTEM);
+    line.add(end);
+    if (bearing == null) {
+      bearing = place(site, way.place());
+    }
+    List<LinePoint> haul = List.of();
+    if (way.driver() != null) {
+      Gear.Source hauls = site.source(way.driver().source()).orElseThrow();
+      haul = List.of(end, end(site, way.driver().place(), hauls, driver, LinePoint.Role.SOURCE));
+    }
+    List<Point3> points = line.stream().map(p -> relative(site, p)).toList();
+    return new Route(
+        points,
+        LegLoads.of(points, efficiencies),
+        List.copyOf(line),
+        haul.stream().map(p -> relative(site, p)).toList(),
+        haul,
+        bearing.errorM());
+  }
+
+  /** The redirect block used; the strongest there is. */
+  static Gear.Block block(Site site) {
+    return site.gear().blocks().stream()
+        .max(java.util.Comparator.comparingDouble(Gear.Block::ratedLoadN))
+        .orElseThrow();
+  }
+
+  static Place place(Site site, String id) {
+    return site.spot(id).map(Spot::place).orElseGet(() -> site.anchor(id).orElseThrow().place());
+  }
+
+  private static LinePoint attachment(Site site, double heightAboveGround) {
+    Place stump = site.tree().stump();
+    double above = heightAboveGround - site.cut().heightM();
+    double off = above * Math.tan(Math.toRadians(site.tree().leanDeg().value()));
+    Position at = stump.at().along(site.tree().leanAzimuthDeg().value(), off);
+    return new LinePoint(
+        at, stump.groundM() + heightAboveGround, LinePoint.Role.ATTACHMENT, site.tree().id());
+  }
+
+  private static LinePoint at(Anchor a, LinePoint.Role role) {
+    return new LinePoint(a.place().at(), a.place().groundM() + a.slingHeightM(), role, a.id());
+  }
+
+  private static LinePoint end(
+      Site site, String id, Gear.Source gear, PullSource source, LinePoint.Role role) {
+    return site.spot(id)
+        .map(
+            s ->
+                new LinePoint(
+                    s.place().at(),
+                    s.place().groundM() + source.lineHeightM(gear.parameters()),
+                    role,
+                    id))
+        .orElseGet(() -> at(site.anchor(id).orElseThrow(), role));
+  }
+
+  /** A point of the site as metres from the stump's centre at hinge level. */
+  static Point3 relative(Site site, LinePoint p) {
+    Place stump = site.tree().stump();
+    return new Point3(
+        p.at().eastM() - stump.at().eastM(),
+        p.at().northM() - stump.at().northM(),
+        p.elevationM() - stump.groundM() - site.cut().heightM());
+  }
+}

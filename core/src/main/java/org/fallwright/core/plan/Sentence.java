@@ -1,0 +1,35 @@
+package org.fallwright.core.plan;
+
+import java.util.Locale;
+import org.fallwright.core.units.DisplayUnits;
+
+/** The one sentence that says how a setup stands. */
+final class Sentence {
+  private Sentence() {}
+
+  static String of(Verdict verdict, Check weakest, Figures f, String source, DisplayUnits in) {
+    String head = verdict.word();
+    head = Character.toUpperCase(head.charAt(0)) + head.substring(1) + ". ";
+    if (verdict != Verdict.WORKABLE) {
+      return head + weakest.why();
+    }
+    if (f.pullPlanN() == 0) {
+      return head + "No pull is needed for this lay; beware of a stem that splits.";
+    }
+    String link =
+        Double.isInfinite(weakest.ratio())
+            ? "nothing is near its limit"
+            : String.format(
+                Locale.ROOT, "%s, %.2f times what is asked", weakest.id(), weakest.ratio());
+    return head
+        + "Plan for "
+        + in.both(u -> u.forceAtLeast(f.pullPlanN()))
+        + " on the line at the tree; "
+        + source
+        + " gives "
+        + in.force(f.sourceLowN())
+        + ". Weakest link: "
+        + link
+        + ".";
+  }
+}

@@ -1,0 +1,28 @@
+package org.fallwright.core.plan;
+
+import org.fallwright.core.anchor.AnchorFigures;
+import org.fallwright.core.anchor.StemForm;
+import org.fallwright.core.anchor.WoodFigures;
+import org.fallwright.core.reference.Species;
+import org.fallwright.core.reference.SpeciesTable;
+import org.fallwright.core.reference.SurfaceTable;
+import org.fallwright.core.site.Anchor;
+
+/** The species and surface tables as anchors need them: everything taken low, for it helps. */
+final class SiteTables implements AnchorFigures {
+  @Override
+  public WoodFigures wood(String species, Anchor.Soil soil, boolean deepRooting) {
+    Species s = SpeciesTable.of(species);
+    return new WoodFigures(
+        s.morPa().value(),
+        s.morCv().value(),
+        s.densityLow(),
+        s.rootPlate(soil, deepRooting).value(),
+        s.key().endsWith("spruce") ? StemForm.SPRUCE : StemForm.OTHER);
+  }
+
+  @Override
+  public double tyreGrip(String surface, boolean wet) {
+    return SurfaceTable.of(surface, wet).tyreLow();
+  }
+}

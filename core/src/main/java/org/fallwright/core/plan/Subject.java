@@ -1,0 +1,152 @@
+package org.fallwright.core.plan;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.fallwright.core.line.Point3;
+import org.fallwright.core.reference.Allowances;
+import org.fallwright.core.reference.Species;
+import org.fallwright.core.reference.SpeciesTable;
+import org.fallwright.core.reference.Spreads;
+import org.fallwright.core.site.Conditions;
+import org.fallwright.core.site.CutPlan;
+import org.fallwright.core.site.Gear;
+import org.fallwright.core.site.Position;
+import org.fallwright.core.site.Site;
+import org.fallwright.core.site.SubjectTree;
+import org.fallwright.core.statics.CutMade;
+import org.fallwright.core.statics.LineSet;
+import org.fallwright.core.statics.PullCase;
+import org.fallwright.core.statics.Spread;
+import org.fallwright.core.statics.TreeBody;
+import org.fallwright.core.statics.Wind;
+import org.fallwright.core.statics.Wood;
+import org.fallwright.core.tree.TreeFigures;
+
+/** The site's tree, wood and wind as the force balance needs them. */
+final class Subject {
+  private final Site site;
+  private final Species species;
+  private final TreeFigures figures;
+  private final Wood wood;
+  private final Wind wind;
+
+  Subject(Site site) {
+    this.site = site;
+    SubjectTree tree = site.tree();
+    CutPlan cut = site.cut();
+    species = SpeciesTable.of(tree.species());
+    figures = TreeFigures.of(tree, cut, species);
+    wood =
+        new Wood(
+            species.morPa().value(),
+            species.morCv().value(),
+            species.moePa().value(),
+            species.shearPa().value(),
+            species.crushPa().value(),
+            species.knotFactor().value());
+    Conditions day = site.conditions();
+    double leaf = species.broadleaf() && !tree.inLeaf() ? Allowances.LEAFLESS_DRAG.value() : 1;
+    wind =
+        new Wind(
+            day.gustMps().value(),
+            day.windTowardDeg(),
+            leaf * species.dragC().value(),
+            species.dragN().value(),
+            figures.crownAreaM2(),
+            figures.crownMiddleM() - cut.heightM(),
+            day.airDensity() == null ? Allowances.AIR_DENSITY.value() : day.airDensity());
+  }
+
+  TreeFigures figures() {
+    return figures;
+  }
+
+  Species species() {
+    return species;
+  }
+
+  /** Notes on figures that were not entered, a sentence each. */
+  List<String> notes() {
+    List<String> notes =
+        new ArrayList<>(figures.remarks().stream().map(Subject::sentence).toList());
+    species
+        .assumed()
+        .forEach(
+            f -> notes.add("No source gives " + f.note() + "; a planning allowance stands in."));
+    return notes;
+  }
+
+  /** The case of a setup whose line runs along a route. */
+  PullCase pull(Setup setup, Route route) {
+    SubjectTree tree = site.tree();
+    CutPlan cut = site.cut();
+    Position shift = tree.crownOffsetM();
+    double share = tree.crownShare() == null ? 0 : tree.crownShare();
+    Point3 crown =
+        shift == null
+            ? new Point3(0, 0, 0)
+            : new Point3(share * shift.eastM(), share * shift.northM(), 0);
+    TreeBody body =
+        new TreeBody(
+            tree.heightM().value(),
+            tree.dbhM().value(),
+            cut.heightM(),
+            tree.diameters(),
+            figures.stumpDiameterM(),
+            tree.shellM(),
+            tree.deadOrDecayed(),
+            figures.massKg(),
+            figures.massCentreM() - cut.heightM(),
+            tree.leanDeg().value(),
+            tree.leanAzimuthDeg().value(),
+            crown);
+    Gear.Line line =
+        site.gear().lines().stream()
+            .filter(l -> l.id().equals(setup.line()))
+            .findFirst()
+            .orElseThrow();
+    List<Point3> points = route.points().subList(1, route.points().size());
+    Double slack = site.conditions().slackM();
+    return new PullCase(
+        setup.layDeg(),
+        body,
+        wood,
+        new CutMade(
+            cut.faceFraction(),
+            setup.hingeThicknessM(),
+            cut.hingeWidthM(),
+            cut.kerfM(),
+            cut.wedges(),
+            Allowances.HINGE_K_LEAST.value()),
+        wind,
+        new LineSet(
+            setup.attachHeightM() - cut.heightM(),
+            points,
+            points.stream().map(p -> line.stiffnessN()).toList(),
+            null,
+            slack == null ? Allowances.SLACK.value() : slack),
+        spread(setup, route));
+  }
+
+  private Spread spread(Setup setup, Route route) {
+    SubjectTree tree = site.tree();
+    double thickness =
+        Spreads.of(Spreads.What.HINGE_THICKNESS, setup.hingeThicknessM(), site.cut().hingeHow());
+    double gust = Math.max(Allowances.GUST_LEAST.value(), site.conditions().gustMps().value());
+    return new Spread(
+        figures.massSdKg() / figures.massKg(),
+        figures.massCentreSdM(),
+        Spreads.of(Spreads.What.LEAN, tree.leanDeg()),
+        Spreads.of(Spreads.What.LEAN_AZIMUTH, tree.leanAzimuthDeg()),
+        figures.stumpDiameterSdM() / figures.stumpDiameterM(),
+        species.morCv().value(),
+        thickness / setup.hingeThicknessM(),
+        Spreads.of(Spreads.What.GUST, site.conditions().gustMps()) / gust,
+        Spreads.of(Spreads.What.ATTACH_HEIGHT, setup.attachHeightM(), site.offer().attachHow()),
+        Allowances.BEARING_ASIDE.value() * route.bearingErrorM());
+  }
+
+  private static String sentence(String remark) {
+    return Character.toUpperCase(remark.charAt(0)) + remark.substring(1) + ".";
+  }
+}

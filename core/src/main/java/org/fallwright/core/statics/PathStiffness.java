@@ -1,0 +1,55 @@
+package org.fallwright.core.statics;
+
+import org.fallwright.core.line.Point3;
+
+/**
+ * Stiffness of what the pull stretches, seen at the tree.
+ *
+ * <p>Line: 1/K = Σ L·r²/(EA) over all loaded legs as found standing, the softest EA, r the leg's
+ * tension over the tension at the tree while holding. Path, while the stem is whole: 1/K_p = 1/K +
+ * cos²α·Σ (w_a − z)²·Δz/(E·π·d⁴/64·(1 − loss)), z the middles of ⌈w_a/0.5⌉ equal slices from the
+ * hinge to the attachment, E the mean green modulus, d inside the bark, α the rise of the first
+ * leg. Left out: what slings, anchors and sag give.
+ *
+ * @param lineNPerM K [N/m]
+ * @param pathNPerM K_p [N/m]
+ * @param riseRad α [rad]
+ * @param lengthM all legs without a base leg [m]
+ */
+record PathStiffness(double lineNPerM, double pathNPerM, double riseRad, double lengthM) {
+  private static final double SLICE = 0.5;
+
+  static PathStiffness of(PullCase c, StemTaperLine taper) {
+    LineSet line = c.line();
+    Point3 from = StemStrength.attachment(c);
+    double give = 0;
+    double length = 0;
+    double rise = 0;
+    for (int i = 0; i < line.points().size(); i++) {
+      Point3 leg = line.points().get(i).minus(from);
+      double l = leg.length();
+      if (i == 0) {
+        rise = Math.asin(-leg.up() / l);
+      }
+      give += l / line.legStiffnessN().get(i);
+      length += l;
+      from = line.points().get(i);
+    }
+    if (line.base() != null) {
+      LineSet.BaseLeg b = line.base();
+      give += b.lengthM() * b.ratio() * b.ratio() / b.stiffnessN();
+    }
+    double wa = line.attachHeightM();
+    int slices = (int) Math.ceil(wa / SLICE);
+    double dz = wa / slices;
+    double bend = 0;
+    for (int i = 0; i < slices; i++) {
+      double z = (i + 0.5) * dz;
+      double d = taper.insideBark(z + c.tree().cutHeightM());
+      double ei = c.wood().moePa() * Math.PI * Math.pow(d, 4) / 64 * (1 - taper.loss(d));
+      bend += (wa - z) * (wa - z) * dz / ei;
+    }
+    double cos = Math.cos(rise);
+    return new PathStiffness(1 / give, 1 / (give + cos * cos * bend), rise, length);
+  }
+}

@@ -1,0 +1,226 @@
+package org.fallwright.core.statics;
+
+/**
+ * The statics of one pull: what the tree asks of the line, and how it behaves on what a source
+ * gives. Built for one case; immutable.
+ */
+public final class Statics {
+  /** A strongest hinge factor; planning allowance. */
+  private static final double STRONGEST_HINGE = 1.5;
+
+  private final PullCase c;
+  private final Posture nominal;
+  private final OneAtATime spread;
+  private final TreeSide side;
+
+  public Statics(PullCase c) {
+    this.c = c;
+    nominal = new Posture(c, Draw.nominal(c));
+    spread = new OneAtATime(c);
+    side = reckon();
+  }
+
+  /** What the tree asks. */
+  public TreeSide treeSide() {
+    return side;
+  }
+
+  private TreeSide reckon() {
+    double back = nominal.sitBack();
+    double commit = CommitAngle.exists(nominal) ? CommitAngle.of(nominal) : Double.NaN;
+    if (Double.isNaN(commit)) {
+      double would = CommitAngle.thicknessThatWould(c, STRONGEST_HINGE).orElse(Double.NaN);
+      return unmovable(
+          Status.HINGE_NEVER_LETS_GO, commit, Double.NaN, Double.NaN, Double.NaN, would);
+    }
+    double end = Math.min(Movement.CAP, spread.p95(CommitAngle::unfloored));
+    end = Math.max(end, commit);
+    double leverMin = Double.POSITIVE_INFINITY;
+    double lost = Double.NaN;
+    for (int i = 0; i < Movement.ANGLES; i++) {
+      double phi = Movement.angle(-back, end, i);
+      double lever = nominal.lever(phi);
+      leverMin = Math.min(leverMin, lever);
+      if (Double.isNaN(lost) && lever <= Movement.LOST_SHARE * nominal.wa) {
+        lost = phi;
+      }
+    }
+    if (!Double.isNaN(lost)) {
+      return unmovable(Status.LEVER_LOST, commit, end, leverMin, lost, Double.NaN);
+    }
+    double needed = Math.max(0, ForceBalance.need(nominal, -back));
+    double plan =
+        Math.max(0, Math.max(needed, spread.p95(p -> ForceBalance.need(p, -p.sitBack()))));
+    double hold = Math.max(0, spread.p95(ForceBalance::hold));
+    double working = Math.max(plan, hold);
+    double rest = spread.p95(ForceBalance::rest);
+    StemTaperLine taper = new StemTaperLine(c.tree());
+    PathStiffness stiff = PathStiffness.of(c, taper);
+    StemStrength stem = StemStrength.of(c, taper);
+    double shortening = nominal.leg(-back) - nominal.leg(end);
+    double takeUp = shortening + working / stiff.pathNPerM() + c.line().slackM();
+    return new TreeSide(
+        plan > 0 ? Status.BACK_LEANER : Status.NO_PULL_NEEDED,
+        nominal.hinge,
+        nominal.hingeNm,
+        nominal.windNm,
+        nominal.windAsideNm,
+        nominal.ug,
+        nominal.vg,
+        nominal.weightMoment(0),
+        commit,
+        end,
+        nominal.lever(0),
+        nominal.lever(-back),
+        leverMin,
+        Double.NaN,
+        Double.NaN,
+        needed,
+        plan,
+        hold,
+        working,
+        rest,
+        stiff.lineNPerM(),
+        stiff.pathNPerM(),
+        stiff.riseRad(),
+        stiff.lengthM(),
+        shortening,
+        nominal.leg(-back) - nominal.leg(commit),
+        takeUp,
+        c.cut().kerfM() + nominal.hinge.backCutM() * commit,
+        steering(working, end),
+        turning(working, end),
+        crushing(working, stiff.riseRad()),
+        stem.tensionN(),
+        stem.sectionM());
+  }
+
+  private TreeSide unmovable(
+      Status status, double commit, double end, double leverMin, double lost, double would) {
+    double none = Double.NaN;
+    return new TreeSide(
+        status,
+        nominal.hinge,
+        nominal.hingeNm,
+        nominal.windNm,
+        nominal.windAsideNm,
+        nominal.ug,
+        nominal.vg,
+        nominal.weightMoment(0),
+        commit,
+        end,
+        nominal.lever(0),
+        nominal.lever(-nominal.sitBack()),
+        leverMin,
+        lost,
+        would,
+        none,
+        none,
+        none,
+        none,
+        none,
+        none,
+        none,
+        none,
+        none,
+        none,
+        none,
+        none,
+        none,
+        none,
+        none,
+        none,
+        none,
+        none);
+  }
+
+  private double steering(double working, double end) {
+    double most = Double.NEGATIVE_INFINITY;
+    for (int sign = -1; sign <= 1; sign += 2) {
+      for (double tension : new double[] {0, working}) {
+        int s = sign;
+        most = Math.max(most, spread.p95(p -> HingeStress.steering(p, -p.sitBack(), tension, s)));
+        most = Math.max(most, spread.p95(p -> HingeStress.steering(p, end, tension, s)));
+        if (working == 0) {
+          break;
+        }
+      }
+    }
+    return most;
+  }
+
+  private double turning(double working, double end) {
+    if (working == 0) {
+      return 0;
+    }
+    double shear = c.wood().shearPa();
+    double most = Double.NEGATIVE_INFINITY;
+    for (int sign = -1; sign <= 1; sign += 2) {
+      int s = sign;
+      most =
+          Math.max(most, spread.p95(p -> HingeStress.turning(p, -p.sitBack(), working, s, shear)));
+      most = Math.max(most, spread.p95(p -> HingeStress.turning(p, end, working, s, shear)));
+    }
+    return most;
+  }
+
+  private double crushing(double working, double rise) {
+    double massHigh = 1 + OneAtATime.Z * c.spread().massRel();
+    double push = nominal.weightN * massHigh + (rise > 0 ? working * Math.sin(rise) : 0);
+    return push / (c.wood().crushPa() * nominal.hinge.steerWidthM() * nominal.hinge.thicknessM());
+  }
+
+  /**
+   * How the tree behaves at the hold tension on a line that is held or that gives a constant force.
+   *
+   * @param captured whether the far end of the line stays where it is
+   */
+  public Holding holding(boolean captured) {
+    double back = nominal.sitBack();
+    double k = captured ? side.lineNPerM() : 0;
+    double kp = captured ? side.pathNPerM() : 0;
+    double massHigh = 1 + OneAtATime.Z * c.spread().massRel();
+    double pendulum =
+        nominal.weightN * massHigh * (nominal.wg * Math.cos(-back) - nominal.ug * Math.sin(-back));
+    double lever = nominal.lever(-back);
+    double stability = (k * lever * lever - side.holdN() * leverSlope(-back)) / pendulum;
+    double phi = Math.max(Math.toRadians(1), Math.min(Math.toRadians(2), side.commitRad() / 5));
+    double letsGo = Math.max(0, spread.p5(p -> ForceBalance.letsGo(p, phi)));
+    double top = letsGo + kp * (nominal.leg(0) - nominal.leg(phi));
+    double atOnce = Math.max(0, spread.p5(p -> ForceBalance.letsGo(p, 0)));
+    Start start = side.holdN() < atOnce ? Start.NO : side.holdN() <= top ? Start.STOPS : Start.RUNS;
+    return new Holding(stability, top, start);
+  }
+
+  /** dℓ/dφ [m/rad], from ℓ = N/L with the derivatives of both. */
+  private double leverSlope(double phi) {
+    double u = nominal.ua(phi);
+    double w = nominal.wa(phi);
+    double leg = nominal.leg(phi);
+    double moment = w * nominal.pu - u * nominal.pw;
+    // du/dφ = w and dw/dφ = −u
+    double dMoment = -u * nominal.pu - w * nominal.pw;
+    double dLeg = (-(nominal.pu - u) * w + (nominal.pw - w) * u) / leg;
+    return dMoment / leg - moment * dLeg / (leg * leg);
+  }
+
+  /**
+   * Tension that each angle of the movement needs [N], for the curve; 65 pairs of angle and need.
+   */
+  public double[][] needCurve() {
+    double[][] curve = new double[Movement.ANGLES][];
+    for (int i = 0; i < Movement.ANGLES; i++) {
+      double phi = Movement.angle(-nominal.sitBack(), side.endRad(), i);
+      curve[i] = new double[] {phi, ForceBalance.need(nominal, phi)};
+    }
+    return curve;
+  }
+
+  /**
+   * Rise of the pull to plan for that each entered quantity alone brings [N], as {@link
+   * Draw#NAMES}.
+   */
+  public double[] planRises() {
+    return spread.rises(p -> ForceBalance.need(p, -p.sitBack()));
+  }
+}

@@ -1,0 +1,10 @@
+/**
+ * What the tree to be pulled weighs, where its mass sits and how thick its stem is, from what was
+ * measured on it.
+ *
+ * <p>Read first: {@link org.fallwright.core.tree.TreeFigures} (mass and mass centre with their
+ * spreads), then {@link org.fallwright.core.tree.StemTaper}. Heights are above the ground at the
+ * stump [m], diameters in metres, masses in kg. The balance of forces is elsewhere: nothing here
+ * knows of a lay, a hinge or a line.
+ */
+package org.fallwright.core.tree;

@@ -1,0 +1,86 @@
+package org.fallwright.core.zones;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.fallwright.core.site.Place;
+import org.fallwright.core.site.Position;
+import org.fallwright.core.site.Target;
+import org.fallwright.core.units.Range;
+import org.locationtech.jts.geom.Coordinate;
+import org.locationtech.jts.geom.Geometry;
+import org.locationtech.jts.operation.overlayng.OverlayNG;
+import org.locationtech.jts.operation.overlayng.OverlayNGRobust;
+
+/** A site's targets, made ready once to be held against the footprints of many lays. */
+public final class LayTargets {
+  private final List<Ready> ready;
+
+  private record Ready(Target target, Geometry geometry, Edges edges, double askedM) {}
+
+  /** A target that lies in a zone: how much of it, in m² for an area and m for a line. */
+  public record Overlap(String targetId, double amount, String unit) {}
+
+  /**
+   * @param targets the targets
+   * @param stump the stump, for its position error
+   */
+  public LayTargets(List<Target> targets, Place stump) {
+    List<Ready> all = new ArrayList<>();
+    for (Target t : Range.present("targets", targets)) {
+      Geometry g = t.shape().geometry();
+      double required = t.requiredDistanceM();
+      double asked = required > 0 ? required + t.errorM() + stump.errorM() : 0;
+      all.add(new Ready(t, g, new Edges(g), asked));
+    }
+    ready = List.copyOf(all);
+  }
+
+  /** Every target against a footprint, in the order of the site. */
+  public List<TargetClearance> clearances(FallFootprint footprint) {
+    return ready.stream().map(r -> clearance(footprint, r)).toList();
+  }
+
+  private static TargetClearance clearance(FallFootprint footprint, Ready r) {
+    Edges.Gap gap = footprint.edges().gapTo(r.edges());
+    double clearance = gap.distanceM();
+    Coordinate at = gap.onOther();
+    double amount = 0;
+    if (clearance <= 0) {
+      Depth.Deepest deepest = Depth.inside(r.edges(), footprint.edges());
+      clearance = -deepest.depthM();
+      at = deepest.at() != null ? deepest.at() : at;
+      amount = amountIn(footprint.geometry(), r.geometry());
+    }
+    return new TargetClearance(
+        r.target().id(),
+        clearance,
+        r.askedM(),
+        amount,
+        unit(r.geometry()),
+        new Position(at.x, at.y),
+        r.target().mayBeHit());
+  }
+
+  /** The targets that lie wholly or partly in a zone, in the order of the site. */
+  public List<Overlap> in(Geometry zone) {
+    List<Overlap> in = new ArrayList<>();
+    for (Ready r : ready) {
+      if (zone.getEnvelopeInternal().intersects(r.edges().envelope())) {
+        double amount = amountIn(zone, r.geometry());
+        if (amount > 0) {
+          in.add(new Overlap(r.target().id(), amount, unit(r.geometry())));
+        }
+      }
+    }
+    return in;
+  }
+
+  private static double amountIn(Geometry zone, Geometry target) {
+    Geometry common = OverlayNGRobust.overlay(zone, target, OverlayNG.INTERSECTION);
+    return target.getDimension() == 2 ? common.getArea() : common.getLength();
+  }
+
+  private static String unit(Geometry target) {
+    return target.getDimension() == 2 ? "m²" : "m";
+  }
+}

@@ -1,0 +1,183 @@
+package org.fallwright.core.rules;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
+
+import java.util.List;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.ValueSource;
+
+/** Published figures of the rules, the source beside each. */
+class RuleReferenceTest {
+  private static final double FT = 0.3048;
+  private static final double IN = 0.0254;
+  private static final RuleSets ALL = RuleSets.shipped();
+
+  /** 29 CFR 1910.266(h)(1)(iv), DGUV Regel 114-018, B.C. Reg. 296/97 26.1: two tree lengths. */
+  @ParameterizedTest
+  @ValueSource(strings = {"US-OSHA", "US-EM385", "UK", "DE-DGUV", "CA-BC", "AU", "NZ"})
+  void twoTreeLengths(String key) {
+    Rule rule = ALL.byKey(key).peopleRadiusFactor();
+    assertThat(rule.value() * 24).isEqualTo(48);
+    assertThat(rule.value() * 60 * FT).isCloseTo(36.58, within(0.005));
+    assertThat(rule.fallback()).isFalse();
+    assertThat(rule.metBy(48, 24)).isTrue();
+    assertThat(rule.metBy(47.9, 24)).isFalse();
+  }
+
+  /** NWCG safety note: 2.5 lengths of a 20 m tree. */
+  @Test
+  void wildlandFireCuttingArea() {
+    assertThat(ALL.byKey("US-OSHA").stricterPeopleRadiusFactor().value() * 20).isEqualTo(50);
+  }
+
+  /** Wildlife Tree Committee of British Columbia 2001: 1.5 lengths of a 30 m tree. */
+  @Test
+  void dangerousTreeLeftStanding() {
+    assertThat(ALL.byKey("CA-BC").leftStandingFactor().value() * 30).isEqualTo(45);
+    assertThat(ALL.byKey("US-OSHA").leftStandingFactor().value() * 30).isEqualTo(60);
+  }
+
+  /**
+   * 69 kV between phases by 29 CFR 1910.333, EM 385-1-1, 29 CFR 1926.1408 Table A, BC Table 19-1A.
+   */
+  @ParameterizedTest
+  @CsvSource({"US-1910.333, 10, 0", "US-EM385, 10, 7.6", "US-1926.1408, 15, 0"})
+  void sixtyNineKilovolts(String table, double feet, double inches) {
+    assertThat(distance(table, 69)).isCloseTo(feet * FT + inches * IN, within(0.0005));
+  }
+
+  /** British Columbia Table 19-1A: 3, 4.5 and 6 m, upper voltages inclusive. */
+  @ParameterizedTest
+  @CsvSource({"69, 3", "75, 3", "75.1, 4.5", "250, 4.5", "250.1, 6", "550, 6"})
+  void britishColumbia(double kv, double metres) {
+    assertThat(distance("CA-BC-19-1A", kv)).isEqualTo(metres);
+  }
+
+  /**
+   * 230 kV: EM 385-1-1 16 ft 0 in; 132.8 kV to ground by 1910.333, begun steps whole: 13 ft 0 in.
+   */
+  @ParameterizedTest
+  @CsvSource({"US-EM385, 16", "US-1910.333, 13"})
+  void twoHundredAndThirtyKilovolts(String table, double feet) {
+    assertThat(distance(table, 230)).isCloseTo(feet * FT, within(0.0005));
+  }
+
+  /** 29 CFR 1926.1408 Table A at the edges of its bands and at 500 kV; upper limits inclusive. */
+  @ParameterizedTest
+  @CsvSource({
+    "50, 10",
+    "50.1, 15",
+    "200, 15",
+    "200.1, 20",
+    "350, 20",
+    "500, 25",
+    "750, 35",
+    "1000, 45"
+  })
+  void craneTable(double kv, double feet) {
+    assertThat(distance("US-1926.1408", kv)).isCloseTo(feet * FT, within(0.0005));
+  }
+
+  /** EM 385-1-1 at 500 kV: 25 ft 0 in. */
+  @Test
+  void fiveHundredKilovolts() {
+    assertThat(distance("US-EM385", 500)).isCloseTo(25 * FT, within(0.0005));
+  }
+
+  /**
+   * The rows of the US consensus table for tree work follow from the same growth at the top of each
+   * band (rows from memory, arithmetic checked): 72.5, 121, 145, 169, 242, 362, 550, 800 kV.
+   */
+  @ParameterizedTest
+  @CsvSource({
+    "72.5, 10, 9",
+    "121, 12, 4",
+    "145, 13, 2",
+    "169, 14, 0",
+    "242, 16, 5",
+    "362, 20, 5",
+    "550, 26, 8",
+    "800, 35, 0"
+  })
+  void consensusTable(double kv, double feet, double inches) {
+    assertThat(distance("US-EM385", kv)).isCloseTo(feet * FT + inches * IN, within(0.5 * IN));
+  }
+
+  /** 29 CFR 1910.333 and 1910.269(x): 10 ft or 3.05 m for a 12.47 kV line. */
+  @Test
+  void distributionLine() {
+    Rule rule = ALL.byKey("US-OSHA").approachDistanceM(12.47).orElseThrow();
+    assertThat(rule.value()).isCloseTo(3.05, within(0.005));
+    assertThat(rule.fallback()).isFalse();
+    // a 15 m tree 17 m from the line
+    assertThat(WireReach.of(17, 15, rule.value(), ALL.byKey("US-OSHA"))).isEqualTo(WireReach.STOP);
+  }
+
+  /** HSE GS6 as restated: 9 m from wood poles, 15 m from towers. */
+  @ParameterizedTest
+  @CsvSource({"false, 8.9, false", "false, 9.1, true", "true, 14.9, false", "true, 15.1, true"})
+  void britishConsultation(boolean towers, double metres, boolean met) {
+    Rule rule = ALL.byKey("UK").consultDistanceM(towers).orElseThrow();
+    assertThat(rule.metBy(metres, 1)).isEqualTo(met);
+  }
+
+  /** DGUV Regel 114-018, 3.2.6.6: a direct rope longer than two lengths of a 20 m tree. */
+  @Test
+  void germanDirectPull() {
+    Rule rule = ALL.byKey("DE-DGUV").operatorRadiusFactor();
+    assertThat(rule.metBy(40.0, 20)).isFalse();
+    assertThat(rule.metBy(40.1, 20)).isTrue();
+    // on the ground a rope of 40 m to 12 m up the stem reaches only 38.2 m
+    double ground = Math.sqrt(40 * 40 - 12 * 12);
+    assertThat(ground).isCloseTo(38.2, within(0.05));
+    assertThat(rule.metBy(ground, 20)).isFalse();
+  }
+
+  /** 45 degrees off the line opposite the fall, either side (glossaries). */
+  @ParameterizedTest
+  @CsvSource({"90, 225, 315", "350, 125, 215", "30, 165, 255"})
+  void escapeAzimuths(double lay, double first, double second) {
+    assertThat(ALL.byKey("US-OSHA").escapeAzimuthsDeg(lay)).isEqualTo(List.of(first, second));
+  }
+
+  /** OAR 437-007-0810(9): 25 ft. */
+  @Test
+  void oregonEscapeLength() {
+    assertThat(ALL.byKey("US-OSHA").escapeLengthM().value()).isCloseTo(25 * FT, within(1e-9));
+  }
+
+  /** Bavarian state forest-owner school and GUV-I 8627, a 55 kN winch, in kN. */
+  @Test
+  void germanGearForAWinch() {
+    RuleSet de = ALL.byKey("DE-DGUV");
+    assertThat(de.lineTwiceSource().value() * 55).isEqualTo(110);
+    assertThat(de.chokerOverSource().value() * 55).isEqualTo(55);
+    assertThat(de.redirectGearOverSource().value() * 55).isEqualTo(110);
+    assertThat(de.redirectStropOverSource().value() * 55).isEqualTo(220);
+    assertThat(de.redirectAnchorTwiceT().value() * 55).isEqualTo(110);
+    // 20 kN: the anchor is sized for 40 whatever the angle
+    assertThat(de.redirectAnchorTwiceT().value() * 20).isEqualTo(40);
+  }
+
+  /** HSE, Chainsaws and tree felling continue to kill; DGUV Regel 114-018, 3.2.6.6. */
+  @Test
+  void freeHandPulling() {
+    assertThat(ALL.byKey("UK").freeHand()).isEqualTo(RuleSet.FreeHand.REFUSED);
+    assertThat(ALL.byKey("DE-DGUV").freeHand()).isEqualTo(RuleSet.FreeHand.REFUSED);
+    assertThat(ALL.byKey("US-OSHA").freeHand()).isEqualTo(RuleSet.FreeHand.FLAGGED);
+  }
+
+  /** Victoria, No Go Zone rules: 6.4 m from poles, 10 m from towers without a spotter. */
+  @ParameterizedTest
+  @CsvSource({"22, 6.4", "66, 10"})
+  void victoria(double kv, double metres) {
+    assertThat(ALL.byKey("AU").approachDistanceM(kv).orElseThrow().value()).isEqualTo(metres);
+  }
+
+  private static double distance(String table, double kv) {
+    return ALL.table(table).distance(kv).orElseThrow().value();
+  }
+}
