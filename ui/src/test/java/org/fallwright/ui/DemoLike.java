@@ -365,7 +365,10 @@ public final class DemoLike {
         setup,
         verdict,
         pull,
-        "{verdict}: the source gives {ratio} times the pull to plan for.",
+        margin / 1.25,
+        "Workable. Plan for 6.36 kN (1,430 lbf) on the line at the tree; "
+            + source
+            + " gives 9.31 kN. Weakest link: pull margin, 1.46 times what is asked.",
         f,
         checks,
         List.of(

@@ -60,7 +60,7 @@ final class Desk extends JPanel {
     this.look = look;
     this.status = status;
     strip.putClientProperty("FlatLaf.styleClass", "strip");
-    JSplitPane drawings = split(JSplitPane.VERTICAL_SPLIT, plan, profile, 0.7);
+    JSplitPane drawings = split(JSplitPane.VERTICAL_SPLIT, plan, profile, 1);
     middle.add(start, "start");
     middle.add(drawings, "site");
     JSplitPane right = split(JSplitPane.VERTICAL_SPLIT, ways, findings, 0.5);

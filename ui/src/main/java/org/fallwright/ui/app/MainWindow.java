@@ -99,7 +99,7 @@ public final class MainWindow extends JFrame {
 
   /** Plans the open site again. */
   public void plan() {
-    open.site().ifPresent(this::plan);
+    open.site().map(s -> s.in(open.display())).ifPresent(this::plan);
   }
 
   void choose() {
@@ -117,7 +117,28 @@ public final class MainWindow extends JFrame {
   }
 
   void otherUnits() {
-    open.show(open.display() == Site.Display.US ? Site.Display.METRIC : Site.Display.US);
+    Site.Display other = open.display() == Site.Display.US ? Site.Display.METRIC : Site.Display.US;
+    open.show(other);
+    if (open.plan().isEmpty()) {
+      plan();
+      return;
+    }
+    Site site = open.site().orElseThrow().in(other);
+    Plan plan = open.plan().get();
+    planning.start(
+        (progress, cancelled) -> wiring.planning().again(site, plan),
+        new Telling<Plan>() {
+          @Override
+          public void done(Plan again) {
+            open.reworded(site, again);
+          }
+
+          @Override
+          public void failed(Exception cause) {
+            LOG.error("Not said again in other units", cause);
+            open.notPlanned(sentence(cause));
+          }
+        });
   }
 
   void otherLook() {

@@ -10,6 +10,7 @@ import java.awt.event.MouseEvent;
 import java.awt.geom.Line2D;
 import java.awt.geom.Point2D;
 import java.awt.geom.Rectangle2D;
+import java.util.Arrays;
 import java.util.function.Consumer;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
@@ -31,6 +32,7 @@ public final class PlanView extends JXMapViewer {
   /** Distance over which the widget's own projection is taken as even [m]. */
   private static final double SPAN_M = 100;
 
+  private final Offscreen offscreen = new Offscreen();
   private SiteFrame earth;
   private PlanScene scene;
   private Position flagged;
@@ -191,31 +193,30 @@ public final class PlanView extends JXMapViewer {
     if (scene == null || earth == null) {
       return;
     }
-    Graphics2D g = (Graphics2D) graphics.create();
-    g.setFont(getFont());
     Viewport view = viewport();
+    graphics.setFont(getFont());
+    offscreen.paint(
+        graphics,
+        getWidth(),
+        getHeight(),
+        Arrays.asList(scene, view.transform(), flagged, getFont()),
+        g -> drawing(g, view));
+  }
+
+  private void drawing(Graphics2D g, Viewport view) {
     new PlanPainter(scene).paint(g, view);
     Pen pen = new Pen(g, scene.palette().halo());
     double u = pen.unit();
     if (flagged != null) {
       pen.stroke(pen.disc(view.toPixel(flagged), 16), scene.palette().notWorkable(), 3);
     }
-    NorthArrow.paint(
-        pen,
-        view,
-        scene.site().declinationDeg(),
-        scene.palette(),
-        new Point2D.Double(getWidth() - 40 * u, 50 * u),
-        38);
-    ScaleBar.paint(
-        pen, view, scene.amounts(), scene.palette(), 14 * u, getHeight() - 12 * u, 200 * u);
+    Point2D corner = new Point2D.Double(getWidth() - 40 * u, 50 * u);
+    NorthArrow.paint(pen, view, scene.site().declinationDeg(), scene.palette(), corner, 38);
+    double base = getHeight() - 12 * u;
+    ScaleBar.paint(pen, view, scene.amounts(), scene.palette(), 14 * u, base, 200 * u);
     String date = PictureDate.words(scene.site());
-    pen.text(
-        date,
-        getWidth() - pen.extent(date).getWidth() - 12 * u,
-        getHeight() - 12 * u,
-        scene.palette().ink());
-    g.dispose();
+    double left = getWidth() - pen.extent(date).getWidth() - 12 * u;
+    pen.text(date, left, base, scene.palette().ink());
   }
 
   private Position place(MouseEvent e) {
