@@ -131,7 +131,12 @@ final class Desk extends JPanel {
         chosenShown();
         redraw();
       }
-      case SITE, PLAN, UNITS -> {
+      case PLAN -> {
+        plan.flag(null);
+        showAll();
+        fit();
+      }
+      case SITE, UNITS -> {
         plan.flag(null);
         showAll();
       }

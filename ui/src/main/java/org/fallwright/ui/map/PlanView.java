@@ -38,11 +38,11 @@ public final class PlanView extends JXMapViewer {
   private Position flagged;
   private Palette palette = Palette.DAY;
   private Envelope wanted;
-  private boolean blank = true;
+  private TileFactory picture;
   private Consumer<Position> pointed = p -> {};
 
   public PlanView() {
-    setTileFactory(new BlankTiles());
+    setTileFactory(new StretchedTiles(null, StretchedTiles.TILE));
     setRestrictOutsidePanning(true);
     setHorizontalWrapped(false);
     PanMouseInputListener pan = new PanMouseInputListener(this);
@@ -78,8 +78,14 @@ public final class PlanView extends JXMapViewer {
   /** Shows a site on its picture's tiles; null: blank ground. */
   public void show(Site site, TileFactory tiles) {
     earth = new SiteFrame(site.origin());
-    blank = tiles == null;
-    setTileFactory(blank ? new BlankTiles() : tiles);
+    if (picture != null) {
+      picture.dispose();
+    }
+    picture = tiles;
+    if (tiles != null) {
+      tiles.addTileListener(t -> repaint());
+    }
+    setTileFactory(new StretchedTiles(picture, StretchedTiles.TILE));
     fit(PlanPainter.extent(site, null));
   }
 
@@ -107,7 +113,7 @@ public final class PlanView extends JXMapViewer {
     pointed = listener;
   }
 
-  /** Shows all of an area as large as the zoom steps allow, and again whenever the size changes. */
+  /** Shows all of an area as large as the frame lets it, and again whenever the size changes. */
   public void fit(Envelope metres) {
     wanted = metres;
     if (earth == null || getWidth() == 0 || getHeight() == 0) {
@@ -115,16 +121,17 @@ public final class PlanView extends JXMapViewer {
     }
     LatLon middle = earth.toEarth(metres.centre().x, metres.centre().y);
     GeoPosition centre = new GeoPosition(middle.latDeg(), middle.lonDeg());
-    int coarsest = getTileFactory().getInfo().getMaximumZoomLevel();
-    for (int zoom = 0; zoom <= coarsest; zoom++) {
-      setZoom(zoom);
-      setCenterPosition(centre);
-      double k = viewport().pixelsPerMetre();
-      if (zoom == coarsest
-          || metres.getWidth() * k <= getWidth() && metres.getHeight() * k <= getHeight()) {
-        break;
-      }
-    }
+    setTileFactory(new StretchedTiles(picture, StretchedTiles.TILE));
+    setZoom(0);
+    setCenterPosition(centre);
+    double wantedScale = Math.min(getWidth() / metres.getWidth(), getHeight() / metres.getHeight());
+    double coarser = Math.log(viewport().pixelsPerMetre() / wantedScale) / Math.log(2);
+    int zoom = Math.max(0, (int) Math.ceil(coarser));
+    zoom = Math.min(zoom, getTileFactory().getInfo().getMaximumZoomLevel());
+    double stretch = Math.max(1, Math.min(1.99, Math.pow(2, zoom - coarser)));
+    setTileFactory(new StretchedTiles(picture, (int) (StretchedTiles.TILE * stretch)));
+    setZoom(zoom);
+    setCenterPosition(centre);
     repaint();
   }
 
@@ -154,13 +161,11 @@ public final class PlanView extends JXMapViewer {
 
   @Override
   protected void drawMapTiles(Graphics g, int zoom, Rectangle seen) {
-    if (!blank) {
-      super.drawMapTiles(g, zoom, seen);
-      return;
-    }
     g.setColor(palette.paper());
     g.fillRect(0, 0, getWidth(), getHeight());
-    if (earth != null) {
+    if (picture != null) {
+      ((StretchedTiles) getTileFactory()).paint((Graphics2D) g, zoom, seen);
+    } else if (earth != null) {
       grid((Graphics2D) g.create());
     }
   }
