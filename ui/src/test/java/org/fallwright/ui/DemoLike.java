@@ -366,6 +366,8 @@ public final class DemoLike {
         verdict,
         pull,
         margin / 1.25,
+        List.of(),
+        0,
         "Workable. Plan for 6.36 kN (1,430 lbf) on the line at the tree; "
             + source
             + " gives 9.31 kN. Weakest link: pull margin, 1.46 times what is asked.",

@@ -40,7 +40,7 @@ final class ForceChecks {
                   + in.smallLength(t.thicknessThatWouldM())
                   + " would.";
       grade.factored(
-          "hinge lets go", t.hingeNm(), t.hingeNm() + t.windNm(), "N·m", 0, stump(), why);
+          "hinge lets go", t.hingeNm(), t.hingeNm() + t.windNm(), "N·m", 0, stump(), () -> why);
     } else {
       grade.factored(
           "hinge lets go",
@@ -49,7 +49,7 @@ final class ForceChecks {
           "deg",
           Double.POSITIVE_INFINITY,
           stump(),
-          "The tree's own weight takes it at " + in.angle(t.commitRad()) + ".");
+          () -> "The tree's own weight takes it at " + in.angle(t.commitRad()) + ".");
       boolean lost = t.status() == Status.LEVER_LOST;
       grade.factored(
           "lever",
@@ -58,7 +58,7 @@ final class ForceChecks {
           "m",
           Math.max(0, t.leverMinM() / asked),
           stump(),
-          lost
+          () -> lost
               ? "The line loses its lever on the hinge at "
                   + in.angle(t.leverLostRad())
                   + ": it pulls the wrong way for this lay."
@@ -77,7 +77,7 @@ final class ForceChecks {
           "deg",
           open / face,
           stump(),
-          String.format(
+          () -> String.format(
               Locale.ROOT,
               "The face opens %.0f degrees; %.0f are asked so that it does not shut first.",
               open,
@@ -96,7 +96,7 @@ final class ForceChecks {
         "N",
         by.get("pull"),
         null,
-        t.planN() == 0
+        () -> t.planN() == 0
             ? "No pull is needed for this lay."
             : "The pull to plan for is "
                 + in.both(u -> u.forceAtLeast(t.planN()))
@@ -116,7 +116,7 @@ final class ForceChecks {
           "N",
           most / t.workingN(),
           null,
-          "Holding the tree asks for more than pulling it: "
+          () -> "Holding the tree asks for more than pulling it: "
               + in.both(u -> u.forceAtLeast(t.workingN()))
               + ".");
     }
@@ -132,7 +132,7 @@ final class ForceChecks {
         "N",
         by.get("hold"),
         null,
-        r.holdAsked()
+        () -> r.holdAsked()
             ? "Without its hinge the tree pulls back with "
                 + in.both(u -> u.forceAtLeast(t.holdN()))
                 + "; "
@@ -148,7 +148,7 @@ final class ForceChecks {
         "",
         by.get("hold stability"),
         null,
-        !r.holdAsked()
+        () -> !r.holdAsked()
             ? rests
             : !r.source().captured()
                 ? "A constant force can pull a tree over; it can never hold one."
@@ -170,7 +170,7 @@ final class ForceChecks {
         t.holdN(),
         "N",
         stump(),
-        "Held at "
+        () -> "Held at "
             + in.force(t.holdN())
             + " it goes as soon as the hinge is ready: be away before the last wood is cut.");
   }
@@ -204,9 +204,9 @@ final class ForceChecks {
     double shown = Math.max(0, share);
     String text = String.format(Locale.ROOT, why, 100 * shown, 100 * most);
     if (factored) {
-      grade.factored(id, shown, most, "", ratio, stump(), text);
+      grade.factored(id, shown, most, "", ratio, stump(), () -> text);
     } else {
-      grade.plain(id, shown, most, "", ratio, stump(), text);
+      grade.plain(id, shown, most, "", ratio, stump(), () -> text);
     }
   }
 
@@ -224,8 +224,11 @@ final class ForceChecks {
           "N",
           r.byCheck().get(p.name() + " at plan"),
           at(p.name()),
-          in.both(u -> u.forceAtLeast(plan))
-              + " come on it; "
+          () ->
+              capital(p.name())
+                  + " bears "
+                  + in.both(u -> u.forceAtLeast(plan))
+                  + " as planned; "
               + in.both(u -> u.forceAtMost(allowed))
               + " are allowed.");
       grade.factored(
@@ -235,12 +238,18 @@ final class ForceChecks {
           "N",
           r.byCheck().get(p.name() + " at high"),
           at(p.name()),
-          "If the source stalls, slips or jerks "
-              + in.both(u -> u.forceAtLeast(high))
-              + " come on it; "
+          () ->
+              capital(p.name())
+                  + " bears "
+                  + in.both(u -> u.forceAtLeast(high))
+                  + " if the source stalls, slips or jerks; "
               + in.both(u -> u.forceAtMost(last))
               + " are the most.");
     }
+  }
+
+  private static String capital(String name) {
+    return Character.toUpperCase(name.charAt(0)) + name.substring(1);
   }
 
   private Position at(String part) {

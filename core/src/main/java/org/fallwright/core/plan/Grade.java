@@ -2,6 +2,7 @@ package org.fallwright.core.plan;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.Supplier;
 import org.fallwright.core.site.Position;
 
 /**
@@ -17,30 +18,69 @@ final class Grade {
    */
   static final double WORKABLE = 1.25;
 
+  private final boolean full;
   private final List<Check> checks = new ArrayList<>();
   private final List<Double> standings = new ArrayList<>();
 
+  /**
+   * @param full whether each check says why; a quick look leaves that empty
+   */
+  Grade(boolean full) {
+    this.full = full;
+  }
+
+  private String said(Supplier<String> why) {
+    return full ? why.get() : "";
+  }
+
   /** A check without a design factor inside. */
   void plain(
-      String id, double value, double limit, String unit, double ratio, Position at, String why) {
+      String id, double value, double limit, String unit, double ratio, Position at, Supplier<String> why) {
     add(id, value, limit, unit, ratio, WORKABLE, at, why);
   }
 
   /** A check with a design factor inside. */
   void factored(
-      String id, double value, double limit, String unit, double ratio, Position at, String why) {
+      String id, double value, double limit, String unit, double ratio, Position at, Supplier<String> why) {
     add(id, value, limit, unit, ratio, 1, at, why);
   }
 
+  /**
+   * A limit of a rule, or one whose allowance is inside it: to meet it is enough, and then it does not
+   * rank.
+   */
+  void rule(
+      String id,
+      double value,
+      double limit,
+      String unit,
+      double ratio,
+      Position at,
+      Supplier<String> why) {
+    boolean met = ratio >= 1;
+    put(
+        new Check(
+            id,
+            value,
+            limit,
+            unit,
+            ratio,
+            met ? Verdict.WORKABLE : Verdict.NOT_WORKABLE,
+            at,
+            said(why)),
+        met ? Double.POSITIVE_INFINITY : ratio);
+  }
+
   /** A thing that is allowed but never better than tight. */
-  void tightAtBest(String id, double value, double limit, String unit, Position at, String why) {
-    put(new Check(id, value, limit, unit, 1, Verdict.TIGHT, at, why), 1 / WORKABLE);
+  void tightAtBest(
+      String id, double value, double limit, String unit, Position at, Supplier<String> why) {
+    put(new Check(id, value, limit, unit, 1, Verdict.TIGHT, at, said(why)), 1 / WORKABLE);
   }
 
   /** A thing that nobody can judge yet. */
-  void unknown(String id, Position at, String why) {
+  void unknown(String id, Position at, Supplier<String> why) {
     put(
-        new Check(id, Double.NaN, Double.NaN, "", Double.NaN, Verdict.CANNOT_JUDGE, at, why),
+        new Check(id, Double.NaN, Double.NaN, "", Double.NaN, Verdict.CANNOT_JUDGE, at, said(why)),
         Double.NEGATIVE_INFINITY);
   }
 
@@ -52,10 +92,10 @@ final class Grade {
       double ratio,
       double workable,
       Position at,
-      String why) {
+      Supplier<String> why) {
     Verdict v =
         ratio >= workable ? Verdict.WORKABLE : ratio >= 1 ? Verdict.TIGHT : Verdict.NOT_WORKABLE;
-    put(new Check(id, value, limit, unit, ratio, v, at, why), ratio / workable);
+    put(new Check(id, value, limit, unit, ratio, v, at, said(why)), ratio / workable);
   }
 
   private void put(Check check, double standing) {
@@ -86,6 +126,16 @@ final class Grade {
 
   Check weakest() {
     return checks.get(weakestIndex());
+  }
+
+  /** How many checks are not workable. */
+  int failing() {
+    return (int) checks.stream().filter(c -> c.verdict() == Verdict.NOT_WORKABLE).count();
+  }
+
+  /** The standings of all checks that have a limit, lowest first. */
+  List<Double> standings() {
+    return standings.stream().filter(Double::isFinite).sorted().toList();
   }
 
   double standing() {

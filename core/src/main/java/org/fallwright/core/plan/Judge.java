@@ -13,7 +13,6 @@ import org.fallwright.core.site.Gear;
 import org.fallwright.core.site.Place;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.statics.Part;
-import org.fallwright.core.statics.PullCase;
 import org.fallwright.core.statics.Ratios;
 import org.fallwright.core.statics.SourceAtTree;
 import org.fallwright.core.statics.Statics;
@@ -37,6 +36,7 @@ public final class Judge {
   private final SiteTables tables = new SiteTables();
   private final Landing landing;
   private final Map<Setup, Route> routes = new ConcurrentHashMap<>();
+  private final Map<Pulled, Statics> reckoned = new ConcurrentHashMap<>();
 
   /**
    * @throws IllegalArgumentException one sentence, where the site names a species, surface or rule
@@ -74,20 +74,20 @@ public final class Judge {
             ? null
             : kind(site.source(setup.driver().source()).orElseThrow().plugin());
     Route route = routes.computeIfAbsent(setup.withLay(0), w -> Route.of(site, w, source, driver));
-    PullCase pull = subject.pull(setup, route);
-    Statics statics = new Statics(pull);
+    Statics statics =
+        statics(setup, route);
     TreeSide tree = statics.treeSide();
     PullOffer offer = Reach.of(site, setup, route, Reach.Pulled.of(tree), source, driver);
     GearParts parts = new GearParts(site, rules, tables).collect(setup, route, offer);
     String name = name(setup, source);
 
-    Grade grade = new Grade();
+    Grade grade = new Grade(full);
     landing.knowledge(grade);
     usable(grade, parts);
     Landing.Zones zones = landing.check(grade, setup, route, tree, full);
     new KitChecks(site, in, grade).check(setup, route, tree, offer, parts);
     ForceChecks forces = new ForceChecks(site, in, grade);
-    forces.movement(tree, pull.line().attachHeightM());
+    forces.movement(tree, setup.attachHeightM() - site.cut().heightM());
     List<String> notes = new ArrayList<>(zones.notes());
     Figures figures;
     List<PartLoad> loads = List.of();
@@ -108,7 +108,7 @@ public final class Judge {
       figures = FiguresOf.unmovable(route, tree, zones);
     }
     for (PullOffer.Finding f : offer.checks()) {
-      grade.factored(f.id(), f.value(), f.limit(), f.unit(), f.ratio(), place(setup).at(), f.why());
+      grade.rule(f.id(), f.value(), f.limit(), f.unit(), f.ratio(), place(setup).at(), () -> f.why());
     }
     landing.people(grade, setup, zones, offer);
     notes.addAll(offer.notes());
@@ -118,7 +118,9 @@ public final class Judge {
         grade.verdict(),
         weakest,
         grade.standing(),
-        Sentence.of(grade.verdict(), weakest, figures, name, in),
+        grade.standings(),
+        grade.failing(),
+        full ? Sentence.of(grade.verdict(), weakest, figures, name, in) : "",
         figures,
         grade.checks(),
         loads,
@@ -126,6 +128,21 @@ public final class Judge {
         route.haulOnSite(),
         zones.ground(),
         notes);
+  }
+
+  /** All that the statics of a setup depend on; the source is no part of it. */
+  private record Pulled(
+      double layDeg,
+      double attachHeightM,
+      double hingeThicknessM,
+      String line,
+      List<LinePoint> points) {}
+
+  private Statics statics(Setup s, Route route) {
+    return reckoned.computeIfAbsent(
+        new Pulled(
+            s.layDeg(), s.attachHeightM(), s.hingeThicknessM(), s.line(), route.line()),
+        p -> new Statics(subject.pull(s, route)));
   }
 
   /**
@@ -142,10 +159,10 @@ public final class Judge {
     SourceAtTree free =
         new SourceAtTree(low, offer.holdN(), offer.highN(), captured, SourceAtTree.Stop.NONE, 0);
     Ratios without = Ratios.of(statics, wedges, free, parts);
-    boolean breaks =
-        without.byCheck().entrySet().stream()
-            .anyMatch(e -> e.getKey().endsWith(" at high") && e.getValue() < 1);
-    if (!breaks || site.gear().loadCell() == null) {
+    // a stop at the ceiling helps only where the plan itself stays below it
+    boolean helps =
+        anyBelowOne(without, " at high") && !anyBelowOne(without, " at plan");
+    if (!helps || site.gear().loadCell() == null) {
       return new Stopped(without, false);
     }
     SourceAtTree read =
@@ -159,6 +176,11 @@ public final class Judge {
     return new Stopped(Ratios.of(statics, wedges, read, parts), true);
   }
 
+  private static boolean anyBelowOne(Ratios r, String checks) {
+    return r.byCheck().entrySet().stream()
+        .anyMatch(e -> e.getKey().endsWith(checks) && e.getValue() < 1);
+  }
+
   private void leaning(Grade grade, PullOffer offer, Ratios r) {
     String stop = in.both(u -> u.forceAtMost(r.ceiling().tensionN()));
     String why =
@@ -168,7 +190,7 @@ public final class Judge {
             + r.ceiling().part()
             + " is loaded past its factor.";
     if (offer.powered()) {
-      grade.tightAtBest("stop reading", r.ceiling().tensionN(), r.source().highN(), "N", null, why);
+      grade.tightAtBest("stop reading", r.ceiling().tensionN(), r.source().highN(), "N", null, () -> why);
     } else {
       grade.factored(
           "stop reading",
@@ -177,7 +199,7 @@ public final class Judge {
           "N",
           Double.POSITIVE_INFINITY,
           null,
-          why);
+          () -> why);
     }
   }
 
@@ -191,7 +213,7 @@ public final class Judge {
           "",
           no ? 0 : Double.POSITIVE_INFINITY,
           h.anchor().place().at(),
-          no
+          () -> no
               ? h.anchor().id() + " is refused: " + h.capacity().why() + "."
               : h.anchor().id() + " may be used: " + h.capacity().why() + ".");
     }

@@ -9,6 +9,8 @@ import java.util.List;
  * @param verdict its worst check
  * @param weakest the check with the lowest ratio among the worst
  * @param standing ratio of the weakest link over the ratio from which it is workable
+ * @param standings standings of all checks that have a limit, lowest first
+ * @param failing how many checks are not workable
  * @param sentence verdict and weakest link in one sentence, in the site's units
  * @param figures its figures
  * @param checks every check, in a fixed order
@@ -24,6 +26,8 @@ public record Judged(
     Verdict verdict,
     Check weakest,
     double standing,
+    List<Double> standings,
+    int failing,
     String sentence,
     Figures figures,
     List<Check> checks,

@@ -34,14 +34,14 @@ final class KitChecks {
             offer.wireM(),
             takeUp);
     boolean reaches = fit.neededM() <= fit.availableM();
-    grade.factored(
+    grade.rule(
         "line length",
         fit.availableM(),
         fit.neededM(),
         "m",
         fit.availableM() / fit.neededM(),
         null,
-        "Line "
+        () -> "Line "
             + line.id()
             + (offer.wireM() > 0 ? " and the source's wire reach " : " reaches ")
             + in.length(fit.availableM())
@@ -51,7 +51,7 @@ final class KitChecks {
                 ? "."
                 : ": stand " + in.length(fit.neededM() - fit.availableM()) + " nearer."));
     if (reaches && !fit.fits()) {
-      grade.factored("joint", 0, 1, "", 0, null, sentence(fit.shortOf()));
+      grade.rule("joint", 0, 1, "", 0, null, () -> sentence(fit.shortOf()));
     }
     enough("blocks", site.gear().blocks().size(), setup.redirects().size());
     enough(
@@ -64,14 +64,14 @@ final class KitChecks {
 
   private void enough(String what, int there, int needed) {
     if (needed > 0) {
-      grade.factored(
+      grade.rule(
           what,
           there,
           needed,
           "",
-          (double) there / needed,
+          there >= needed ? Double.POSITIVE_INFINITY : (double) there / needed,
           null,
-          String.format(Locale.ROOT, "%d %s needed, %d in the kit.", needed, what, there));
+          () -> String.format(Locale.ROOT, "%d %s needed, %d in the kit.", needed, what, there));
     }
   }
 

@@ -46,6 +46,8 @@ final class Landing {
   private final EscapeRoutes escapes;
   private final boolean wiresKnown;
   private final Map<Fall, Landed> falls = new ConcurrentHashMap<>();
+  private final Map<Out, List<Position>> waysOut = new ConcurrentHashMap<>();
+  private final Map<List<Position>, Angles> angles = new ConcurrentHashMap<>();
   private final Map<Setup, List<Passed>> passed = new ConcurrentHashMap<>();
 
   /** All that a footprint depends on. */
@@ -58,6 +60,12 @@ final class Landing {
       DropZoneFit.Fit fit,
       List<WireCheck.InLay> wires) {}
 
+  /** All that the ways out depend on; the sit-back zone follows from the lay. */
+  private record Out(double layDeg, double steeringShare, List<Position> path) {}
+
+  /** The insides of a line's angles, and where its parted ends fly. */
+  record Angles(List<Bight> bights, Recoil recoil) {}
+
   /** What a leg passes, with the number of the leg. */
   private record Passed(int leg, LegCheck.Passing what) {}
 
@@ -69,8 +77,7 @@ final class Landing {
    * @param clearanceM least clearance to a target that must not be hit, the one that is nearest to
    *     what it asks [m]; NaN: none
    * @param clearanceTarget that target, or null
-   * @param bights insides of the line's angles
-   * @param recoil where parted ends fly
+   * @param angles insides of the line's angles, and where parted ends fly
    * @param notes sentences
    */
   record Zones(
@@ -78,8 +85,7 @@ final class Landing {
       Ground ground,
       double clearanceM,
       String clearanceTarget,
-      List<Bight> bights,
-      Recoil recoil,
+      Angles angles,
       List<String> notes) {}
 
   Landing(Site site, RuleSet rules, DisplayUnits in, Subject subject) {
@@ -131,7 +137,7 @@ final class Landing {
         grade.unknown(
             "voltage of " + w.id(),
             w.poles().get(0).at(),
-            "Line "
+            () -> "Line "
                 + w.id()
                 + ": voltage not given, so no setup is judged. Ask its owner; write the answer and"
                 + " who gave it.");
@@ -141,14 +147,14 @@ final class Landing {
       grade.unknown(
           "wires looked for",
           null,
-          "Nobody has said whether there are wires, so no setup is judged. Look, and say none or"
+          () -> "Nobody has said whether there are wires, so no setup is judged. Look, and say none or"
               + " draw them.");
     }
     if (site.found(Looked.What.PEOPLE_INDOORS) == Looked.Found.NOT_LOOKED) {
       grade.unknown(
           "people indoors",
           null,
-          "Nobody has said who is indoors, so no setup is judged. Ask at every door, and say so.");
+          () -> "Nobody has said who is indoors, so no setup is judged. Ask at every door, and say so.");
     }
   }
 
@@ -161,36 +167,42 @@ final class Landing {
     wires(grade, landed);
     line(grade, setup, route);
     List<Position> path = path(route);
-    List<Bight> bights = Bight.along(path);
-    Recoil recoil = new Recoil(path);
+    Angles angles = angles(path);
     double back = setup.layDeg() + Math.toDegrees(Math.atan2(tree.vgM(), tree.ugM()));
     SitBackZone sitBack =
         SitBackZone.of(site.tree().stump().at(), normal(back), site.tree().heightM().value());
     List<Position> ways =
-        escapes.ends(
-            new EscapeRoutes.Zones(landed.footprint(), sitBack, bights, recoil, legs(route)),
-            rules.escapeLengthM().value(),
-            site.tree().heightM().value());
-    grade.factored(
+        waysOut.computeIfAbsent(
+            new Out(setup.layDeg(), share, path),
+            o ->
+                escapes.ends(
+                    new EscapeRoutes.Zones(
+                        landed.footprint(), sitBack, angles.bights(), angles.recoil(), legs(route)),
+                    rules.escapeLengthM().value(),
+                    site.tree().heightM().value()));
+    grade.rule(
         "ways out",
         ways.size(),
         1,
         "",
         ways.isEmpty() ? 0 : Double.POSITIVE_INFINITY,
         site.tree().stump().at(),
-        ways.isEmpty()
+        () -> ways.isEmpty()
             ? "No way out ends clear of the footprint, the sit-back zone, the line's angle and its"
                 + " ends."
             : ways.size() + " way(s) out end clear of every zone.");
-    Ground ground = full ? ground(landed, sitBack, bights, recoil, ways, setup) : null;
+    Ground ground = full ? ground(landed, sitBack, angles, ways, setup) : null;
     return new Zones(
         landed.footprint(),
         ground,
         nearest == null ? Double.NaN : nearest.clearanceM(),
         nearest == null ? null : nearest.targetId(),
-        bights,
-        recoil,
+        angles,
         full ? notes(landed, sitBack, route) : List.of());
+  }
+
+  private Angles angles(List<Position> path) {
+    return angles.computeIfAbsent(path, p -> new Angles(Bight.along(p), new Recoil(p)));
   }
 
   private Landed land(Fall fall) {
@@ -219,7 +231,7 @@ final class Landing {
           "m",
           c.ratio(),
           c.nearest(),
-          c.overlaps()
+          () -> c.overlaps()
               ? "The tree can come down on "
                   + c.targetId()
                   + ": "
@@ -255,7 +267,7 @@ final class Landing {
         "m",
         fit.inside() ? Double.POSITIVE_INFINITY : 0,
         fit.place(),
-        fit.inside()
+        () -> fit.inside()
             ? "It lands inside the drop zone with " + in.length(fit.marginM()) + " to spare."
             : "It can land outside the drop zone by " + in.length(-fit.marginM()) + ".");
   }
@@ -269,7 +281,7 @@ final class Landing {
           "m",
           Math.max(0, w.leastM()) / w.askedM(),
           w.place(),
-          "The falling tree stays at least "
+          () -> "The falling tree stays at least "
               + in.length(Math.max(0, w.leastM()))
               + " from line "
               + w.wireId()
@@ -279,7 +291,7 @@ final class Landing {
     }
     for (WireCheck.Reach r : reach) {
       double there = r.groundM() - r.errorM();
-      grade.plain(
+      grade.rule(
           "wire " + r.wireId() + " in reach",
           there,
           r.stopM(),
@@ -287,7 +299,7 @@ final class Landing {
           // on the limit itself the work stops too
           r.stops() ? Math.min(there / r.stopM(), Math.nextDown(1.0)) : there / r.stopM(),
           r.place(),
-          r.stops()
+          () -> r.stops()
               ? "Line "
                   + r.wireId()
                   + " is within reach of the tree whichever way it goes: stop, its owner must make"
@@ -313,7 +325,7 @@ final class Landing {
           "m",
           Math.max(0, what.clearanceM()) / what.askedM(),
           what.place(),
-          over
+          () -> over
               ? "The line runs over or through "
                   + what.what()
                   + (movable(what.what()) ? "; move it before the work." : ".")
@@ -388,8 +400,7 @@ final class Landing {
   private Ground ground(
       Landed landed,
       SitBackZone sitBack,
-      List<Bight> bights,
-      Recoil recoil,
+      Angles angles,
       List<Position> ways,
       Setup setup) {
     double height = site.tree().heightM().value();
@@ -398,8 +409,8 @@ final class Landing {
         site.tree().stump().at().along(setup.layDeg(), height),
         sitBack.geometry(),
         rules.peopleRadiusFactor().value() * height,
-        bights.stream().map(Bight::geometry).toList(),
-        recoil.geometry(),
+        angles.bights().stream().map(Bight::geometry).toList(),
+        angles.recoil().geometry(),
         ways,
         landed.footprint().halfAngleDeg(),
         reach.stream().mapToDouble(WireCheck.Reach::stopM).max().orElse(Double.NaN));
@@ -473,10 +484,10 @@ final class Landing {
     if (offer.operators() > 0) {
       // the operator stands at the end of the last leg, a corner of its own angle
       List<Bight> others =
-          zones.bights().isEmpty()
+          zones.angles().bights().isEmpty()
               ? List.of()
-              : zones.bights().subList(0, zones.bights().size() - 1);
-      OperatorPlace o = OperatorPlace.of(place.at(), zones.footprint(), others, zones.recoil());
+              : zones.angles().bights().subList(0, zones.angles().bights().size() - 1);
+      OperatorPlace o = OperatorPlace.of(place.at(), zones.footprint(), others, zones.angles().recoil());
       double height = site.tree().heightM().value();
       double asked = rules.operatorRadiusFactor().value() * height;
       boolean far = rules.operatorRadiusFactor().metBy(o.fromStumpM(), height);
@@ -493,9 +504,9 @@ final class Landing {
             asked,
             "m",
             place.at(),
-            stands + ": only as one of the team, named on the sheet with the reason.");
+            () -> stands + ": only as one of the team, named on the sheet with the reason.");
       } else {
-        grade.factored(
+        grade.rule(
             "operator distance",
             o.fromStumpM(),
             asked,
@@ -504,17 +515,17 @@ final class Landing {
                 ? Math.max(1, o.fromStumpM() / asked)
                 : Math.min(o.fromStumpM() / asked, Math.nextDown(1.0)),
             place.at(),
-            stands + (far ? "." : ", and these rules know no exception."));
+            () -> stands + (far ? "." : ", and these rules know no exception."));
       }
       boolean clear = o.outsideFootprint() && o.outsideBights();
-      grade.factored(
+      grade.rule(
           "operator clear",
           clear ? 1 : 0,
           1,
           "",
           clear ? Double.POSITIVE_INFINITY : 0,
           place.at(),
-          clear
+          () -> clear
               ? "Who works the source stands outside the footprint and every other angle of the"
                   + " line."
               : "Who works the source would stand "
@@ -530,9 +541,9 @@ final class Landing {
                   ? "; these rules refuse that."
                   : ": a swaying pull rocks the tree while it is cut. Use a device that holds.");
       if (refused) {
-        grade.factored("free hand", 0, 1, "", 0, place.at(), why);
+        grade.factored("free hand", 0, 1, "", 0, place.at(), () -> why);
       } else {
-        grade.tightAtBest("free hand", 0, 1, "", place.at(), why);
+        grade.tightAtBest("free hand", 0, 1, "", place.at(), () -> why);
       }
     }
   }

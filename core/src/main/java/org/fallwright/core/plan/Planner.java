@@ -17,15 +17,29 @@ import org.fallwright.core.site.Site;
 /**
  * Judges every candidate of a site and ranks them: the exhaustive search.
  *
- * <p>Better verdict first, then the higher standing of the weakest link, then fewer parts, then the
- * lower lay and the candidates' own order, so that the answer is the same on every run.
+ * <p>Better verdict first, then fewer checks that fail, then the higher standing of the weakest link,
+ * then fewer parts, then the stronger next-weakest link and so on, then the lower lay and the
+ * candidates' own order, so that the answer is the same on every run.
  */
 public final class Planner {
   private static final Comparator<Judged> BEST_FIRST =
       Comparator.comparing(Judged::verdict)
+          .thenComparingInt(Judged::failing)
           .thenComparing(Comparator.comparingDouble(Judged::standing).reversed())
           .thenComparing(j -> j.loads().size())
+          .thenComparing(Judged::standings, Planner::nextWeakest)
           .thenComparing(j -> j.setup().layDeg());
+
+  /** Of two lists of standings, lowest first, the one whose next weakest is stronger comes first. */
+  private static int nextWeakest(List<Double> a, List<Double> b) {
+    for (int i = 0; i < Math.min(a.size(), b.size()); i++) {
+      int c = Double.compare(b.get(i), a.get(i));
+      if (c != 0) {
+        return c;
+      }
+    }
+    return Integer.compare(a.size(), b.size());
+  }
 
   private final PullSources sources;
 

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import org.fallwright.core.line.Point3;
 import org.fallwright.core.reference.Allowances;
+import org.fallwright.core.reference.Figure;
 import org.fallwright.core.reference.Species;
 import org.fallwright.core.reference.SpeciesTable;
 import org.fallwright.core.reference.Spreads;
@@ -69,10 +70,15 @@ final class Subject {
   List<String> notes() {
     List<String> notes =
         new ArrayList<>(figures.remarks().stream().map(Subject::sentence).toList());
-    species
-        .assumed()
-        .forEach(
-            f -> notes.add("No source gives " + f.note() + "; a planning allowance stands in."));
+    List<String> assumed = species.assumed().stream().map(Figure::key).toList();
+    if (!assumed.isEmpty()) {
+      notes.add(
+          "For "
+              + species.name()
+              + " no source was read for "
+              + String.join(", ", assumed)
+              + "; planning allowances stand in.");
+    }
     return notes;
   }
 

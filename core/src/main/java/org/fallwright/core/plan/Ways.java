@@ -7,9 +7,11 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
+import org.fallwright.core.line.PartStrength;
 import org.fallwright.core.pull.PullSource;
 import org.fallwright.core.pull.PullSources;
 import org.fallwright.core.pull.SourceDescription.PlaceKind;
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.site.Anchor;
 import org.fallwright.core.site.Gear;
 import org.fallwright.core.site.Position;
@@ -50,7 +52,9 @@ final class Ways {
       for (double hinge : site.cut().hingeThicknessesM()) {
         for (Gear.Source source : site.gear().sources()) {
           for (Gear.Line line : lines) {
-            ways.addAll(of(attach, hinge, line, source));
+            of(attach, hinge, line, source).stream()
+                .filter(way -> !aShorterLineDoes(way, lines))
+                .forEach(ways::add);
           }
         }
       }
@@ -102,6 +106,33 @@ final class Ways {
       }
     }
     return ways;
+  }
+
+  /**
+   * Whether a shorter line that is as strong and as stiff reaches by itself; then a longer one is no
+   * candidate, for it does the same.
+   */
+  private boolean aShorterLineDoes(Setup way, List<Gear.Line> lines) {
+    Gear.Line own = GearParts.line(site, way);
+    PullSource source = kind(site.source(way.source()).orElseThrow()).orElseThrow();
+    PullSource driver =
+        way.driver() == null
+            ? null
+            : kind(site.source(way.driver().source()).orElseThrow()).orElseThrow();
+    double needed =
+        Route.of(site, way, source, driver).loads().lengthM() + Allowances.LINE_SPARE.value();
+    return lines.stream()
+        .takeWhile(l -> l != own)
+        .anyMatch(
+            l ->
+                l.lengthM() >= needed
+                    && strength(l) == strength(own)
+                    && l.wireRope() == own.wireRope()
+                    && l.stiffnessN() == own.stiffnessN());
+  }
+
+  private static double strength(Gear.Line l) {
+    return PartStrength.line(l, 1).strengthN();
   }
 
   private List<Setup.Driver> drivers(Gear.Source tackle) {

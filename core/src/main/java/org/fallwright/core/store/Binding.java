@@ -12,6 +12,7 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
@@ -41,33 +42,55 @@ final class Binding {
   private static String sentence(JsonNode root, JsonMappingException e) {
     String path = path(e.getPath());
     if (e instanceof UnrecognizedPropertyException unknown) {
-      return Said.cut(path)
-          + " is not a known field; known there are "
-          + unknown.getKnownPropertyIds().stream()
-              .map(String::valueOf)
-              .collect(Collectors.joining(", "));
+      return unknown(path, Said.fields(unknown.getReferringClass()));
     }
     if (e instanceof ValueInstantiationException refused
         && refused.getCause() instanceof IllegalArgumentException cause) {
-      return refused(root, path, refused.getType().getRawClass(), cause.getMessage());
+      return refused(
+          root, at(root, e.getPath()), path, refused.getType().getRawClass(), cause.getMessage());
     }
     JsonNode found = at(root, e.getPath());
+    if (found.isMissingNode()) {
+      Optional<String> misspelled = misspelled(root, e.getPath());
+      if (misspelled.isPresent()) {
+        return misspelled.get();
+      }
+    }
     if (e instanceof InvalidTypeIdException type) {
       String kinds = "it must be one of " + kinds(type.getBaseType().getRawClass());
       JsonNode given = found.path("type");
-      return Tree.child(path, "type")
-          + (given.isMissingNode() ? " is missing; " : " is " + Said.value(given) + "; ")
-          + kinds;
+      return Tree.child(path, "type") + " is " + Said.value(given) + "; " + kinds;
     }
-    String is = found.isMissingNode() ? " is missing" : " is " + Said.value(found);
+    String is = " is " + Said.value(found);
     if (e instanceof MismatchedInputException mismatch && mismatch.getTargetType() != null) {
       return path + is + "; it must be " + Said.expected(mismatch.getTargetType());
     }
-    return path + is + "; no number of that size or kind can stand there";
+    return path + is + "; it must be a whole number, and a smaller one";
+  }
+
+  private static String unknown(String path, List<String> fields) {
+    return Said.path(path) + " is not a known field; known there are " + String.join(", ", fields);
+  }
+
+  /** An unknown field beside a missing one: most likely the missing one, misspelled. */
+  private static Optional<String> misspelled(
+      JsonNode root, List<JsonMappingException.Reference> missing) {
+    List<JsonMappingException.Reference> parent = missing.subList(0, missing.size() - 1);
+    if (!(missing.get(parent.size()).getFrom() instanceof Class<?> record) || !record.isRecord()) {
+      return Optional.empty();
+    }
+    List<String> fields = Said.fields(record);
+    boolean typed = !kinds(record).isEmpty();
+    return at(root, parent).properties().stream()
+        .map(Map.Entry::getKey)
+        .filter(f -> !fields.contains(f) && !(typed && f.equals("type")))
+        .findFirst()
+        .map(f -> unknown(Tree.child(path(parent), f), fields));
   }
 
   /** What a record's constructor said, with the path to the field that it named. */
-  private static String refused(JsonNode root, String path, Class<?> record, String said) {
+  private static String refused(
+      JsonNode root, JsonNode given, String path, Class<?> record, String said) {
     List<String> fields = Said.fields(record);
     String first = said.split("[ .]", 2)[0];
     String places = record == Site.class ? String.join(" and ", named(root, said)) : "";
@@ -76,6 +99,14 @@ final class Binding {
       return dangling.matches() ? places + dangling.group(1) : places + ": " + said;
     }
     if (fields.contains(first)) {
+      Class<?> type = record.getRecordComponents()[fields.indexOf(first)].getType();
+      if (given.path(first).isTextual() && !type.isAssignableFrom(String.class)) {
+        return Tree.child(path, first)
+            + " is "
+            + Said.value(given.path(first))
+            + "; it must be "
+            + Said.expected(type);
+      }
       return Tree.child(path, said);
     }
     return (fields.size() == 1 ? Tree.child(path, fields.get(0)) : path) + ": " + said;

@@ -1,7 +1,6 @@
 package org.fallwright.core.store;
 
 import com.fasterxml.jackson.databind.JsonNode;
-import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.lang.reflect.RecordComponent;
 import java.util.Arrays;
 import java.util.List;
@@ -10,26 +9,32 @@ import org.fallwright.core.site.Position;
 
 /** Values and expectations in plain words. */
 final class Said {
-  private static final int LONGEST = 60;
+  private static final int LONGEST_VALUE = 60;
+  private static final int LONGEST_PATH = 200;
 
   private Said() {}
 
   /** A value as it stands in the file, cut where it is long. */
   static String value(JsonNode node) {
     if (node == null || node.isMissingNode()) {
-      return "nothing";
+      return "missing";
     }
     if (node.isArray()) {
-      return "a list of " + node.size();
+      return node.isEmpty() ? "an empty list" : "a list of " + node.size();
     }
     if (node.isObject()) {
       return "an object";
     }
-    return cut(node.toString());
+    return cut(node.toString(), LONGEST_VALUE);
   }
 
-  static String cut(String text) {
-    return text.length() <= LONGEST ? text : text.substring(0, LONGEST) + "…";
+  /** A path, cut where it is long. */
+  static String path(String path) {
+    return cut(path, LONGEST_PATH);
+  }
+
+  private static String cut(String text, int longest) {
+    return text.length() <= longest ? text : text.substring(0, longest) + "…";
   }
 
   /** What a field of this type must be. */
@@ -55,7 +60,7 @@ final class Said {
     if (List.class.isAssignableFrom(type)) {
       return "a list in [ ]";
     }
-    if (type.isRecord() && type != ObjectNode.class) {
+    if (type.isRecord()) {
       return "an object with the fields " + String.join(", ", fields(type));
     }
     return "an object in { }";

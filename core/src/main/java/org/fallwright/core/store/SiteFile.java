@@ -120,7 +120,7 @@ public final class SiteFile {
       line[body.length] = '\n';
       return line;
     } catch (JsonProcessingException e) {
-      throw new IllegalArgumentException("a text or a plugin's parameters are not valid JSON", e);
+      throw new IllegalArgumentException("a plugin's parameters hold what is not JSON", e);
     }
   }
 

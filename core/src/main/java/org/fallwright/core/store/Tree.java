@@ -101,7 +101,7 @@ final class Tree {
             + where.getLineNr()
             + ", column "
             + where.getColumnNr()
-            + (path.isEmpty() ? "" : ", in " + path)
+            + (path.isEmpty() ? "" : ", in " + Said.path(path))
             + ": "
             + what
             + ".");
@@ -109,27 +109,20 @@ final class Tree {
 
   private void version(JsonNode root) throws SiteFileException {
     JsonNode version = root.get("version");
-    String upTo = "this one reads up to form " + Site.VERSION;
-    if (version == null) {
-      throw new SiteFileException(
-          file + ": version is missing; it must be from 1 to " + Site.VERSION + ".");
-    }
-    if (!version.isIntegralNumber() || version.bigIntegerValue().signum() <= 0) {
+    if (version == null || !version.isIntegralNumber() || version.bigIntegerValue().signum() <= 0) {
       throw new SiteFileException(
           file
               + ": version is "
               + Said.value(version)
-              + "; it must be a whole number from 1 to "
-              + Site.VERSION
-              + ".");
+              + "; it must be a whole number, at least 1.");
     }
     if (!version.canConvertToInt() || version.intValue() > Site.VERSION) {
       throw new SiteFileException(
           file
               + " was written by a newer Fallwright (form "
               + Said.value(version)
-              + "); "
-              + upTo
+              + "); this one reads up to form "
+              + Site.VERSION
               + ".");
     }
   }

@@ -2,7 +2,6 @@ package org.fallwright.core.zones;
 
 import java.util.Comparator;
 import java.util.PriorityQueue;
-import org.locationtech.jts.algorithm.Distance;
 import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Envelope;
 
@@ -53,7 +52,7 @@ final class Depth {
     for (int i = 0; i < thing.size(); i++) {
       along(thing.from(i), thing.to(i));
     }
-    if (thing.contains(thing.from(0))) {
+    if (thing.isArea()) {
       within();
     }
     return new Deepest(best, place);
@@ -128,11 +127,11 @@ final class Depth {
     double low = 0;
     double high = 0;
     for (int i = 0; i < area.size(); i++) {
-      Coordinate a = area.from(i);
-      Coordinate b = area.to(i);
-      if (Distance.pointToSegment(middle, a, b) > far) {
+      if (area.toEdge(middle, i) > far) {
         continue;
       }
+      Coordinate a = area.from(i);
+      Coordinate b = area.to(i);
       double dx = b.x - a.x;
       double dy = b.y - a.y;
       double length = Math.hypot(dx, dy);

@@ -2,84 +2,118 @@ package org.fallwright.core.zones;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.locationtech.jts.algorithm.Distance;
-import org.locationtech.jts.algorithm.RayCrossingCounter;
 import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Envelope;
 import org.locationtech.jts.geom.Geometry;
 import org.locationtech.jts.geom.GeometryComponentFilter;
-import org.locationtech.jts.geom.LineSegment;
 import org.locationtech.jts.geom.LineString;
-import org.locationtech.jts.geom.Location;
 
 /**
- * The edges of an outline, ready for many distance questions. Plain loops: outlines here have tens
- * of edges, for which building an index costs more than it saves.
+ * The edges of an outline, ready for the many distance questions of a search. Plain loops over
+ * numbers: outlines here have tens of edges, for which the library's indexed distances cost more to
+ * set up than they save.
  */
 final class Edges {
-  private final Coordinate[] from;
-  private final Coordinate[] to;
+  private final double[] ax;
+  private final double[] ay;
+  private final double[] bx;
+  private final double[] by;
   private final Envelope envelope;
   private final boolean area;
+  private final double[][] corners;
 
   Edges(Geometry geometry) {
-    List<Coordinate> a = new ArrayList<>();
-    List<Coordinate> b = new ArrayList<>();
+    List<Coordinate[]> lines = new ArrayList<>();
     geometry.apply(
         (GeometryComponentFilter)
             part -> {
               if (part instanceof LineString line) {
-                Coordinate[] c = line.getCoordinates();
-                for (int i = 1; i < c.length; i++) {
-                  a.add(c[i - 1]);
-                  b.add(c[i]);
-                }
+                lines.add(line.getCoordinates());
               }
             });
-    from = a.toArray(Coordinate[]::new);
-    to = b.toArray(Coordinate[]::new);
+    int n = lines.stream().mapToInt(c -> c.length - 1).sum();
+    ax = new double[n];
+    ay = new double[n];
+    bx = new double[n];
+    by = new double[n];
+    int at = 0;
+    List<double[]> all = new ArrayList<>();
+    for (Coordinate[] c : lines) {
+      for (int i = c[0].equals2D(c[c.length - 1]) ? 1 : 0; i < c.length; i++) {
+        all.add(new double[] {c[i].x, c[i].y});
+      }
+      for (int i = 1; i < c.length; i++, at++) {
+        ax[at] = c[i - 1].x;
+        ay[at] = c[i - 1].y;
+        bx[at] = c[i].x;
+        by[at] = c[i].y;
+      }
+    }
+    corners = all.toArray(double[][]::new);
     envelope = geometry.getEnvelopeInternal();
     area = geometry.getDimension() == 2;
   }
 
-  /** Least distance to another outline, 0 where they meet or one holds the other. */
+  /**
+   * The least distance between two outlines, 0 where they meet or one holds the other.
+   *
+   * @param onOther the other's nearest point; where they meet, a point at which they do
+   */
   record Gap(double distanceM, Coordinate onOther) {}
 
   int size() {
-    return from.length;
+    return ax.length;
   }
 
   Coordinate from(int edge) {
-    return from[edge];
+    return new Coordinate(ax[edge], ay[edge]);
   }
 
   Coordinate to(int edge) {
-    return to[edge];
+    return new Coordinate(bx[edge], by[edge]);
   }
 
   Envelope envelope() {
     return envelope;
   }
 
-  /** Whether this is an area and the point lies in it or on its edge. */
+  boolean isArea() {
+    return area;
+  }
+
+  /** Whether this is an area and the point lies in it. */
   boolean contains(Coordinate p) {
-    if (!area || !envelope.covers(p)) {
+    return contains(p.x, p.y);
+  }
+
+  private boolean contains(double x, double y) {
+    if (!area || !envelope.covers(x, y)) {
       return false;
     }
-    RayCrossingCounter counter = new RayCrossingCounter(p);
-    for (int i = 0; i < from.length; i++) {
-      counter.countSegment(from[i], to[i]);
+    boolean in = false;
+    for (int i = 0; i < ax.length; i++) {
+      if (ay[i] > y != by[i] > y) {
+        double cross = (bx[i] - ax[i]) * (y - ay[i]) - (x - ax[i]) * (by[i] - ay[i]);
+        if (cross > 0 == by[i] > ay[i]) {
+          in = !in;
+        }
+      }
     }
-    return counter.getLocation() != Location.EXTERIOR;
+    return in;
   }
 
   /** Distance from a point to the nearest edge [m]. */
   double toEdge(Coordinate p) {
     double best = Double.POSITIVE_INFINITY;
-    for (int i = 0; i < from.length; i++) {
-      best = Math.min(best, Distance.pointToSegment(p, from[i], to[i]));
+    for (int i = 0; i < ax.length; i++) {
+      best = Math.min(best, squared(p.x, p.y, i));
     }
-    return best;
+    return Math.sqrt(best);
+  }
+
+  /** Distance from a point to one edge [m]. */
+  double toEdge(Coordinate p, int edge) {
+    return Math.sqrt(squared(p.x, p.y, edge));
   }
 
   /** Distance from a point to this, 0 inside an area [m]. */
@@ -87,39 +121,100 @@ final class Edges {
     return contains(p) ? 0 : toEdge(p);
   }
 
-  /** The gap between this and another outline, with the other's nearest point. */
+  private double squared(double x, double y, int i) {
+    double t = share(x, y, i);
+    double dx = ax[i] + t * (bx[i] - ax[i]) - x;
+    double dy = ay[i] + t * (by[i] - ay[i]) - y;
+    return dx * dx + dy * dy;
+  }
+
+  /** Share of the way along an edge at which it is nearest to a point, 0 to 1. */
+  private double share(double x, double y, int i) {
+    double dx = bx[i] - ax[i];
+    double dy = by[i] - ay[i];
+    double dot = (x - ax[i]) * dx + (y - ay[i]) * dy;
+    if (dot <= 0) {
+      return 0;
+    }
+    double l2 = dx * dx + dy * dy;
+    return dot >= l2 ? 1 : dot / l2;
+  }
+
+  /** The gap between this and another outline. */
   Gap gapTo(Edges other) {
+    Coordinate meet = envelope.intersects(other.envelope) ? meeting(other) : null;
+    if (meet != null) {
+      return new Gap(0, meet);
+    }
+    // Apart, the nearest pair of places always has a corner of one of the two.
     double best = Double.POSITIVE_INFINITY;
-    int mine = 0;
-    int theirs = 0;
-    for (int i = 0; i < from.length; i++) {
-      if (boxDistance(from[i], to[i], other.envelope) >= best) {
-        continue;
-      }
-      for (int j = 0; j < other.from.length; j++) {
-        double d = Distance.segmentToSegment(from[i], to[i], other.from[j], other.to[j]);
+    double x = 0;
+    double y = 0;
+    for (double[] c : other.corners) {
+      for (int i = 0; i < ax.length; i++) {
+        double d = squared(c[0], c[1], i);
         if (d < best) {
           best = d;
-          mine = i;
-          theirs = j;
+          x = c[0];
+          y = c[1];
         }
       }
     }
-    if (best > 0 && contains(other.from[0])) {
-      return new Gap(0, other.from[0]);
+    for (double[] c : corners) {
+      if (boxSquared(c, other.envelope) >= best) {
+        continue;
+      }
+      for (int i = 0; i < other.ax.length; i++) {
+        double d = other.squared(c[0], c[1], i);
+        if (d < best) {
+          best = d;
+          double t = other.share(c[0], c[1], i);
+          x = other.ax[i] + t * (other.bx[i] - other.ax[i]);
+          y = other.ay[i] + t * (other.by[i] - other.ay[i]);
+        }
+      }
     }
-    if (best > 0 && other.contains(from[0])) {
-      return new Gap(0, from[0]);
-    }
-    LineSegment a = new LineSegment(from[mine], to[mine]);
-    return new Gap(best, a.closestPoints(new LineSegment(other.from[theirs], other.to[theirs]))[1]);
+    return new Gap(Math.sqrt(best), new Coordinate(x, y));
   }
 
-  private static double boxDistance(Coordinate a, Coordinate b, Envelope box) {
-    double dx = Math.max(box.getMinX() - Math.max(a.x, b.x), Math.min(a.x, b.x) - box.getMaxX());
-    double dy = Math.max(box.getMinY() - Math.max(a.y, b.y), Math.min(a.y, b.y) - box.getMaxY());
-    dx = Math.max(0, dx);
-    dy = Math.max(0, dy);
-    return Math.sqrt(dx * dx + dy * dy);
+  private Coordinate meeting(Edges o) {
+    for (int i = 0; i < ax.length; i++) {
+      double minX = Math.min(ax[i], bx[i]);
+      double maxX = Math.max(ax[i], bx[i]);
+      double minY = Math.min(ay[i], by[i]);
+      double maxY = Math.max(ay[i], by[i]);
+      if (!o.envelope.intersects(new Envelope(minX, maxX, minY, maxY))) {
+        continue;
+      }
+      for (int j = 0; j < o.ax.length; j++) {
+        boolean boxes =
+            Math.max(o.ax[j], o.bx[j]) >= minX
+                && Math.min(o.ax[j], o.bx[j]) <= maxX
+                && Math.max(o.ay[j], o.by[j]) >= minY
+                && Math.min(o.ay[j], o.by[j]) <= maxY;
+        if (boxes
+            && side(i, o.ax[j], o.ay[j]) * side(i, o.bx[j], o.by[j]) <= 0
+            && o.side(j, ax[i], ay[i]) * o.side(j, bx[i], by[i]) <= 0) {
+          double a = o.side(j, ax[i], ay[i]);
+          double b = o.side(j, bx[i], by[i]);
+          double t = a == b ? 0 : a / (a - b);
+          return new Coordinate(ax[i] + t * (bx[i] - ax[i]), ay[i] + t * (by[i] - ay[i]));
+        }
+      }
+    }
+    if (contains(o.ax[0], o.ay[0])) {
+      return o.from(0);
+    }
+    return o.contains(ax[0], ay[0]) ? from(0) : null;
+  }
+
+  private double side(int i, double x, double y) {
+    return (bx[i] - ax[i]) * (y - ay[i]) - (by[i] - ay[i]) * (x - ax[i]);
+  }
+
+  private static double boxSquared(double[] c, Envelope box) {
+    double dx = Math.max(0, Math.max(box.getMinX() - c[0], c[0] - box.getMaxX()));
+    double dy = Math.max(0, Math.max(box.getMinY() - c[1], c[1] - box.getMaxY()));
+    return dx * dx + dy * dy;
   }
 }

@@ -1,5 +1,7 @@
 package org.fallwright.core.zones;
 
+import java.util.ArrayList;
+import java.util.List;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.units.Range;
 import org.locationtech.jts.geom.Coordinate;
@@ -41,17 +43,19 @@ public final class FallFootprint {
   private final double layDeg;
   private final double halfAngleDeg;
   private final double lengthM;
-  private final Geometry geometry;
-  private final Edges edges;
+  private final List<Polygon> pieces;
+  private final List<Edges> pieceEdges;
+  private Geometry geometry;
+  private Edges edges;
 
   private FallFootprint(
-      Position stump, double layDeg, double halfAngleDeg, double lengthM, Geometry geometry) {
+      Position stump, double layDeg, double halfAngleDeg, double lengthM, List<Polygon> pieces) {
     this.stump = stump;
     this.layDeg = layDeg;
     this.halfAngleDeg = halfAngleDeg;
     this.lengthM = lengthM;
-    this.geometry = geometry;
-    this.edges = new Edges(geometry);
+    this.pieces = List.copyOf(pieces);
+    this.pieceEdges = pieces.stream().map(Edges::new).toList();
   }
 
   /**
@@ -71,21 +75,14 @@ public final class FallFootprint {
     double reach = outline.reachM();
     double push = outline.sideLean(layDeg);
     Sweep sweep = new Sweep(stump, layDeg, half);
-    Geometry all = pieces(sweep, outline, slideM, 0);
-    if (Math.abs(push) * (reach + slideM) > 1e-6) {
-      all = union(all, pieces(sweep, outline, slideM, push));
+    List<Polygon> pieces = new ArrayList<>(4);
+    boolean leansAside = Math.abs(push) * (reach + slideM) > 1e-6;
+    for (double p : leansAside ? new double[] {0, push} : new double[] {0}) {
+      pieces.add(sweep.crown(outline.crownBaseM(), reach, outline.crownRadiusM(), slideM, p));
+      pieces.add(
+          sweep.strip(outline.stumpDiameterM() / 2, reach + slideM, outline.buttM(), p));
     }
-    return new FallFootprint(stump, layDeg, half, reach, all);
-  }
-
-  private static Geometry pieces(Sweep sweep, FallOutline o, double slideM, double push) {
-    double reach = o.reachM();
-    Polygon stem = sweep.strip(o.stumpDiameterM() / 2, reach + slideM, o.buttM(), push);
-    return union(stem, sweep.crown(o.crownBaseM(), reach, o.crownRadiusM(), slideM, push));
-  }
-
-  private static Geometry union(Geometry a, Geometry b) {
-    return OverlayNGRobust.overlay(a, b, OverlayNG.UNION);
+    return new FallFootprint(stump, layDeg, half, reach, pieces);
   }
 
   /**
@@ -135,17 +132,44 @@ public final class FallFootprint {
     return lengthM;
   }
 
-  /** The ground covered [m]. */
-  public Geometry geometry() {
+  /** The ground covered [m]; worked out when first asked for. */
+  public synchronized Geometry geometry() {
+    if (geometry == null) {
+      Geometry all = pieces.get(0);
+      for (Polygon p : pieces.subList(1, pieces.size())) {
+        all = OverlayNGRobust.overlay(all, p, OverlayNG.UNION);
+      }
+      geometry = all;
+    }
     return geometry;
   }
 
-  /** Whether a point lies in the footprint or on its edge. */
+  /** Whether a point lies in the footprint. */
   public boolean contains(Position p) {
-    return edges.contains(new Coordinate(p.eastM(), p.northM()));
+    Coordinate c = new Coordinate(p.eastM(), p.northM());
+    return pieceEdges.stream().anyMatch(e -> e.contains(c));
   }
 
-  Edges edges() {
+  /** The gap to another outline: that of the nearest piece, so the whole is not needed. */
+  Edges.Gap gapTo(Edges other) {
+    Edges.Gap best = null;
+    for (Edges piece : pieceEdges) {
+      Edges.Gap gap = piece.gapTo(other);
+      if (best == null || gap.distanceM() < best.distanceM()) {
+        best = gap;
+      }
+      if (best.distanceM() <= 0) {
+        break;
+      }
+    }
+    return best;
+  }
+
+  /** The edges of the whole. */
+  synchronized Edges edges() {
+    if (edges == null) {
+      edges = new Edges(geometry());
+    }
     return edges;
   }
 }

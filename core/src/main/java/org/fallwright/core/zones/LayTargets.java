@@ -40,8 +40,26 @@ public final class LayTargets {
     return ready.stream().map(r -> clearance(footprint, r)).toList();
   }
 
+  /**
+   * The least {@link TargetClearance#ratio} of a footprint, without depths and amounts: the quick
+   * question of a search. Infinite where nothing limits.
+   */
+  public double leastRatio(FallFootprint footprint) {
+    double least = Double.POSITIVE_INFINITY;
+    for (Ready r : ready) {
+      if (!r.target().mayBeHit()) {
+        double gap = footprint.gapTo(r.edges()).distanceM();
+        if (gap <= 0) {
+          return 0;
+        }
+        least = r.askedM() > 0 ? Math.min(least, gap / r.askedM()) : least;
+      }
+    }
+    return least;
+  }
+
   private static TargetClearance clearance(FallFootprint footprint, Ready r) {
-    Edges.Gap gap = footprint.edges().gapTo(r.edges());
+    Edges.Gap gap = footprint.gapTo(r.edges());
     double clearance = gap.distanceM();
     Coordinate at = gap.onOther();
     double amount = 0;

@@ -8,6 +8,8 @@ import java.awt.geom.Point2D;
 import java.awt.geom.Rectangle2D;
 import java.awt.image.BufferedImage;
 import java.io.IOException;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
 import org.fallwright.core.units.Range;
 import org.fallwright.maps.frame.LatLon;
@@ -38,6 +40,18 @@ public final class GroundPainter {
    *     tile was drawn
    */
   public record Drawn(int tiles, boolean blurred, double sourceMetresPerPixel) {}
+
+  /** A tile and its way from its pixels to user space. */
+  private record Laid(BufferedImage image, AffineTransform place) {
+    AffineTransform enlarged() {
+      AffineTransform larger = new AffineTransform(place);
+      double half = WebMercator.TILE / 2.0;
+      larger.translate(half, half);
+      larger.scale((half + 1) / half, (half + 1) / half);
+      larger.translate(-half, -half);
+      return larger;
+    }
+  }
 
   private final TilePyramid pyramid;
   private final SiteFrame frame;
@@ -130,7 +144,7 @@ public final class GroundPainter {
     int x1 = tileOf(pixels.getMaxX());
     int y1 = tileOf(pixels.getMaxY());
     int across = WebMercator.tilesAcross(zoom);
-    int count = 0;
+    List<Laid> laid = new ArrayList<>();
     int coarsest = zoom;
     for (int y = tileOf(pixels.getMinY()); y <= y1; y++) {
       for (int x = tileOf(pixels.getMinX()); x <= x1; x++) {
@@ -139,12 +153,15 @@ public final class GroundPainter {
         if (ground.isPresent()) {
           AffineTransform place = new AffineTransform(planeToUser);
           place.concatenate(tileToPlane(frame, zoom, within, y));
-          on.drawImage(ground.get().image(), place, null);
+          laid.add(new Laid(ground.get().image(), place));
           coarsest = Math.min(coarsest, ground.get().sourceZoom());
-          count++;
         }
       }
     }
+    // first a pixel too large all round, so that rounding leaves no bare line between tiles
+    laid.forEach(tile -> on.drawImage(tile.image, tile.enlarged(), null));
+    laid.forEach(tile -> on.drawImage(tile.image, tile.place, null));
+    int count = laid.size();
     double source = count == 0 ? 0 : WebMercator.metresPerPixel(frame.origin().latDeg(), coarsest);
     return new Drawn(count, count > 0 && coarsest < wanted, source);
   }

@@ -11,6 +11,7 @@ import java.awt.geom.Point2D;
 import java.awt.geom.Rectangle2D;
 import java.awt.image.BufferedImage;
 import java.io.IOException;
+import java.util.Random;
 import org.fallwright.core.site.Origin;
 import org.fallwright.maps.frame.LatLon;
 import org.fallwright.maps.frame.SiteFrame;
@@ -105,6 +106,35 @@ class GroundPainterTest {
     assertThat(image.getRGB((int) beyond.getX(), (int) beyond.getY()))
         .as("outside the rectangle")
         .isEqualTo(Color.MAGENTA.getRGB());
+  }
+
+  @Test
+  void tilesLeaveNoBareLineBetweenThem() throws IOException {
+    SiteFrame frame = new SiteFrame(new Origin(45, -40));
+    GroundPainter painter = new GroundPainter(world(frame, 18, 20), frame);
+    long seed = 77;
+    Random random = new Random(seed);
+    for (int i = 0; i < 40; i++) {
+      double turn = i % 2 == 0 ? 0 : 2 * Math.PI * random.nextDouble();
+      double metresPerPixel = 0.08 + 0.3 * random.nextDouble();
+      AffineTransform planeToUser = AffineTransform.getTranslateInstance(150, 150);
+      planeToUser.rotate(turn);
+      planeToUser.scale(1 / metresPerPixel, -1 / metresPerPixel);
+      BufferedImage image = new BufferedImage(300, 300, BufferedImage.TYPE_INT_RGB);
+      Graphics2D g = image.createGraphics();
+      g.setColor(Color.MAGENTA);
+      g.fillRect(0, 0, 300, 300);
+      painter.paint(g, planeToUser, new Rectangle2D.Double(-20, -20, 40, 40));
+      g.dispose();
+      int bare = 0;
+      int half = (int) (12 / metresPerPixel);
+      for (int x = Math.max(0, 150 - half); x < Math.min(300, 150 + half); x++) {
+        for (int y = Math.max(0, 150 - half); y < Math.min(300, 150 + half); y++) {
+          bare += image.getRGB(x, y) == Color.MAGENTA.getRGB() ? 1 : 0;
+        }
+      }
+      assertThat(bare).as("seed %d, drawing %d", seed, i).isZero();
+    }
   }
 
   @Test

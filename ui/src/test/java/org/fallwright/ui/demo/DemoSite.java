@@ -63,8 +63,12 @@ public final class DemoSite {
   }
 
   public Site site() {
-    byte[] bytes = tree.toString().getBytes(java.nio.charset.StandardCharsets.UTF_8);
-    return SiteFile.read(new ByteArrayInputStream(bytes), "demo");
+    try {
+      byte[] bytes = tree.toString().getBytes(java.nio.charset.StandardCharsets.UTF_8);
+      return SiteFile.read(new ByteArrayInputStream(bytes), "demo");
+    } catch (org.fallwright.core.store.SiteFileException e) {
+      throw new AssertionError(e);
+    }
   }
 
   Judged judge(Setup setup) {

@@ -6,7 +6,6 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Set;
 import org.fallwright.core.pull.PullOffer;
-import org.fallwright.core.pull.PullOffer.Part;
 import org.fallwright.core.pull.PullRequest;
 import org.fallwright.core.pull.SourceDescription;
 import org.fallwright.core.pull.SourceDescription.Parameter;
@@ -34,9 +33,6 @@ public final class Winch implements PullSourceExtension {
 
   /** How long a powered winch still turns after "stop" [s]. Planning allowance. */
   private static final double STOP_S = 1.5;
-
-  /** Least factor on the winch's body at the most it can do. Planning allowance. */
-  private static final double LAST_FACTOR = 1.5;
 
   /**
    * Wraps of wire that must stay on a drum. Published: five in an army winch manual (TM
@@ -68,7 +64,6 @@ public final class Winch implements PullSourceExtension {
                   "overload_N", "Overload device acts at (if there is one)", "N", 500, 3e6),
               Parameter.number("wire_m", "Wire on it", "m", 0, 500),
               Parameter.number("stroke_m", "Wire a stroke (by hand)", "m", 0.001, 1),
-              Parameter.number("standard_factor", "Its standard's factor", "", 1, 12),
               Parameter.number("drum_m", "Bare drum, diameter", "m", 0.02, 1),
               Parameter.number("rope_m", "Wire, diameter (drum)", "m", 0.002, 0.06),
               new Parameter(
@@ -113,9 +108,7 @@ public final class Winch implements PullSourceExtension {
         1,
         1,
         1,
-        List.of(
-            new Part(
-                "winch", ratedN * winch.standardFactor, winch.standardFactor, LAST_FACTOR, 1, 1)),
+        List.of(),
         List.of(),
         notes(winch, request.takeUpM() * request.travelRatio()));
   }
@@ -148,7 +141,6 @@ public final class Winch implements PullSourceExtension {
       double ratedN,
       Double overloadN,
       double wireM,
-      double standardFactor,
       Double strokeM,
       Drum drum,
       int layers,
@@ -175,7 +167,6 @@ public final class Winch implements PullSourceExtension {
           ratedN,
           overloadN,
           reader.number("wire_m"),
-          reader.number("standard_factor"),
           powered ? null : reader.number("stroke_m"),
           onDrum ? new Drum(reader.number("drum_m"), reader.number("rope_m")) : null,
           onDrum ? reader.wholeNumber("layer") : 1,

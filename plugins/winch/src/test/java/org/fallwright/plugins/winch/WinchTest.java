@@ -30,7 +30,7 @@ class WinchTest {
     assertThat(offer.overrunM()).isEqualTo(0.06);
     assertThat(offer.anchorHauling()).isEqualTo(1);
     assertThat(offer.anchorHolding()).isEqualTo(1);
-    assertThat(offer.parts()).containsExactly(new PullOffer.Part("winch", 49_000, 5, 1.5, 1, 1));
+    assertThat(offer.parts()).isEmpty();
   }
 
   @Test
@@ -141,8 +141,7 @@ class WinchTest {
         .put("rated_N", 9800)
         .put("overload_N", 14_700)
         .put("wire_m", 20)
-        .put("stroke_m", 0.06)
-        .put("standard_factor", 5);
+        .put("stroke_m", 0.06);
   }
 
   private static ObjectNode poweredDrum() {
@@ -151,7 +150,6 @@ class WinchTest {
         .put("kind", "powered-drum")
         .put("rated_N", 40_000)
         .put("wire_m", 60)
-        .put("standard_factor", 2)
         .put("drum_m", 0.1)
         .put("rope_m", 0.012)
         .put("layer", 4)

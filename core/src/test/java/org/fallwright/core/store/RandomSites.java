@@ -1,0 +1,344 @@
+package org.fallwright.core.store;
+
+import com.fasterxml.jackson.databind.node.JsonNodeFactory;
+import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Random;
+import java.util.function.IntFunction;
+import java.util.function.Supplier;
+import java.util.stream.IntStream;
+import org.fallwright.core.site.Anchor;
+import org.fallwright.core.site.Conditions;
+import org.fallwright.core.site.CutPlan;
+import org.fallwright.core.site.DropZone;
+import org.fallwright.core.site.Fix;
+import org.fallwright.core.site.Gear;
+import org.fallwright.core.site.How;
+import org.fallwright.core.site.Looked;
+import org.fallwright.core.site.Offer;
+import org.fallwright.core.site.Origin;
+import org.fallwright.core.site.Picture;
+import org.fallwright.core.site.Place;
+import org.fallwright.core.site.Position;
+import org.fallwright.core.site.Quantity;
+import org.fallwright.core.site.Shape;
+import org.fallwright.core.site.Site;
+import org.fallwright.core.site.Spot;
+import org.fallwright.core.site.StemDiameter;
+import org.fallwright.core.site.SubjectTree;
+import org.fallwright.core.site.Target;
+import org.fallwright.core.site.Wire;
+
+/** Valid sites from a seed: every kind of thing, stated and not stated, over its whole range. */
+final class RandomSites {
+  private static final String[] SIGNS = {"a", "Z", "ü", "–", "\"", "\\", "/", "\n", "木", "🌳", " "};
+  private final Random random;
+
+  RandomSites(long seed) {
+    random = new Random(seed);
+  }
+
+  Site site() {
+    double height = in(2, 120);
+    List<Anchor> anchors = list(0, 5, i -> anchor("anchor " + i));
+    List<Spot> spots =
+        list(
+            1,
+            4,
+            i ->
+                new Spot(
+                    "spot " + i,
+                    place(),
+                    maybe(() -> in(0, 360)),
+                    text(),
+                    flag(),
+                    in(-30, 30),
+                    maybe(() -> in(0, 1000)),
+                    maybe(this::text)));
+    List<String> places = new ArrayList<>();
+    anchors.forEach(a -> places.add(a.id()));
+    spots.forEach(s -> places.add(s.id()));
+    return new Site(
+        Site.VERSION,
+        text(),
+        new Origin(in(-84, 84), in(-180, 180)),
+        any(Site.Display.values()),
+        text(),
+        maybe(() -> in(-180, 180)),
+        maybe(() -> new Picture(text(), maybe(this::text), text())),
+        tree(height),
+        cut(),
+        list(0, 4, i -> target("target " + i)),
+        list(0, 3, i -> wire("wire " + i)),
+        looked(),
+        list(0, 2, i -> new DropZone("zone " + i, polygon())),
+        anchors,
+        spots,
+        gear(places),
+        new Conditions(
+            quantity(0, 40),
+            maybe(() -> in(0, 360)),
+            maybe(() -> in(0, 20)),
+            maybe(() -> in(0.5, 1.6))),
+        new Offer(
+            list(1, 3, i -> in(0.5, 100)),
+            any(How.values()),
+            in(0.25, 90),
+            list(0, 3, i -> in(0, 360)),
+            random.nextInt(2)));
+  }
+
+  private SubjectTree tree(double height) {
+    return new SubjectTree(
+        "tree",
+        text(),
+        place(),
+        quantity(0.05, 4),
+        maybe(() -> quantity(0.05, 6)),
+        list(0, 3, i -> new StemDiameter(in(0, height), in(0.01, 6))),
+        new Quantity(height, How.MEASURED, null),
+        in(0, height),
+        in(0.1, 40),
+        quantity(0, 45),
+        quantity(0, 360),
+        maybe(() -> quantity(10, 500_000)),
+        maybe(() -> quantity(0.5, height)),
+        maybe(() -> in(0, 1)),
+        maybe(this::position),
+        maybe(() -> in(0, 5000)),
+        maybe(() -> in(0.001, 3)),
+        flag(),
+        flag());
+  }
+
+  private CutPlan cut() {
+    return new CutPlan(
+        in(0, 5),
+        in(0.05, 0.6),
+        in(10, 120),
+        list(1, 3, i -> in(0.005, 0.5)),
+        any(How.values()),
+        maybe(() -> in(0.02, 6)),
+        in(0, 0.05),
+        flag());
+  }
+
+  private Target target(String id) {
+    return new Target(
+        id,
+        any(Target.Kind.values()),
+        shape(),
+        any(Fix.values()),
+        maybe(() -> in(0, 100)),
+        in(-500, 9000),
+        in(0, 300),
+        in(0, 100),
+        flag(),
+        flag(),
+        flag());
+  }
+
+  private Shape shape() {
+    return switch (random.nextInt(3)) {
+      case 0 -> polygon();
+      case 1 -> new Shape.Line(list(2, 5, i -> position()));
+      default -> new Shape.Circle(position(), in(0.01, 1000));
+    };
+  }
+
+  /** Corners in the order of their bearings from a middle: never crossing. */
+  private Shape.Polygon polygon() {
+    Position middle = new Position(in(-4000, 4000), in(-4000, 4000));
+    int corners = 3 + random.nextInt(5);
+    return new Shape.Polygon(
+        IntStream.range(0, corners)
+            .mapToObj(
+                i -> middle.along((i + random.nextDouble() * 0.9) * 360 / corners, in(1, 900)))
+            .toList());
+  }
+
+  private Wire wire(String id) {
+    return new Wire(
+        id,
+        maybe(() -> in(0.01, 1500)),
+        maybe(this::text),
+        any(Wire.State.values()),
+        list(2, 4, i -> new Wire.Pole(position(), in(-500, 9000), in(1, 200))),
+        in(0, 50),
+        any(Fix.values()),
+        maybe(() -> in(0, 100)));
+  }
+
+  private List<Looked> looked() {
+    List<Looked> all = new ArrayList<>();
+    for (Looked.What what : Looked.What.values()) {
+      Looked.Found found = any(Looked.Found.values());
+      if (flag()) {
+        all.add(
+            new Looked(what, found, found == Looked.Found.NOT_LOOKED ? maybe(this::text) : text()));
+      }
+    }
+    return all;
+  }
+
+  private Anchor anchor(String id) {
+    double height = in(1, 120);
+    return switch (random.nextInt(4)) {
+      case 0 ->
+          new Anchor.StandingTree(
+              id,
+              place(),
+              in(0, 10),
+              maybe(this::text),
+              maybe(this::text),
+              text(),
+              in(0.02, 4),
+              height,
+              in(0, height),
+              in(0.1, 40),
+              any(Anchor.Soil.values()),
+              flag(),
+              flag(),
+              any(Anchor.Condition.values()),
+              flag());
+      case 1 ->
+          new Anchor.Stump(
+              id,
+              place(),
+              in(0, 3),
+              maybe(this::text),
+              maybe(this::text),
+              text(),
+              in(0.02, 4),
+              height,
+              maybe(() -> in(1, 200_000)),
+              any(Anchor.Soil.values()),
+              flag(),
+              flag(),
+              any(Anchor.Condition.values()));
+      case 2 ->
+          new Anchor.ParkedVehicle(
+              id,
+              place(),
+              in(0, 3),
+              maybe(this::text),
+              maybe(this::text),
+              in(200, 60_000),
+              text(),
+              flag(),
+              in(-30, 30),
+              in(100, 1e6));
+      default ->
+          new Anchor.RatedPoint(
+              id, place(), in(0, 10), maybe(this::text), maybe(this::text), in(100, 1e7), text());
+    };
+  }
+
+  private Gear gear(List<String> places) {
+    return new Gear(
+        list(
+            0,
+            3,
+            i ->
+                new Gear.Line(
+                    "line " + i,
+                    text(),
+                    flag(),
+                    in(0.003, 0.1),
+                    in(1, 1000),
+                    in(500, 5e6),
+                    in(0.1, 1),
+                    in(0.1, 1),
+                    in(0.1, 1),
+                    in(1e3, 1e9),
+                    flag())),
+        list(0, 2, i -> new Gear.Block("block " + i, in(100, 1e7), in(1, 12), in(0.3, 1))),
+        list(0, 2, i -> new Gear.Sling("sling " + i, in(100, 1e7), in(1, 12), random.nextInt(101))),
+        list(
+            0,
+            2,
+            i -> new Gear.Connector("link " + i, in(100, 1e7), in(1, 12), random.nextInt(101))),
+        maybe(() -> new Gear.LoadCell(text(), in(100, 1e7), in(1, 12))),
+        list(
+            0,
+            4,
+            i ->
+                new Gear.Source(
+                    "source " + i,
+                    text(),
+                    list(0, 3, j -> one(places)),
+                    i == 0 ? List.of() : List.of("source 0"),
+                    list(0, 2, j -> one(places)),
+                    parameters(3))));
+  }
+
+  private ObjectNode parameters(int depth) {
+    ObjectNode node = JsonNodeFactory.instance.objectNode();
+    for (int i = random.nextInt(6); i > 0; i--) {
+      String key = text();
+      switch (random.nextInt(depth > 0 ? 7 : 5)) {
+        case 0 -> node.put(key, random.nextInt());
+        case 1 -> node.put(key, in(-1e300, 1e300));
+        case 2 -> node.put(key, text());
+        case 3 -> node.put(key, flag());
+        case 4 -> node.putNull(key);
+        case 5 -> node.set(key, parameters(depth - 1));
+        default -> node.putArray(key).add(random.nextInt()).addNull().add(parameters(depth - 1));
+      }
+    }
+    return node;
+  }
+
+  private Place place() {
+    return new Place(position(), in(-500, 9000), any(Fix.values()), maybe(() -> in(0, 100)));
+  }
+
+  private Position position() {
+    return new Position(in(-5000, 5000), in(-5000, 5000));
+  }
+
+  private Quantity quantity(double least, double most) {
+    return new Quantity(in(least, most), any(How.values()), maybe(() -> in(0, 1e9)));
+  }
+
+  /** From a range, its ends and short figures included. */
+  private double in(double least, double most) {
+    double value = least + random.nextDouble() * (most - least);
+    double rounded = Math.rint(value * 100) / 100;
+    return switch (random.nextInt(10)) {
+      case 0 -> least;
+      case 1 -> most;
+      case 2, 3, 4 -> rounded >= least && rounded <= most ? rounded : value;
+      default -> value;
+    };
+  }
+
+  private String text() {
+    StringBuilder text = new StringBuilder("x");
+    for (int i = random.nextInt(12); i > 0; i--) {
+      text.append(one(List.of(SIGNS)));
+    }
+    return text.toString();
+  }
+
+  private boolean flag() {
+    return random.nextBoolean();
+  }
+
+  private <T> T maybe(Supplier<T> stated) {
+    return flag() ? stated.get() : null;
+  }
+
+  private <T> T any(T[] all) {
+    return all[random.nextInt(all.length)];
+  }
+
+  private <T> T one(List<T> all) {
+    return all.get(random.nextInt(all.size()));
+  }
+
+  private <T> List<T> list(int least, int most, IntFunction<T> one) {
+    return IntStream.range(0, least + random.nextInt(most - least + 1)).mapToObj(one).toList();
+  }
+}
