@@ -15,6 +15,7 @@ import org.fallwright.core.plan.Judged;
 import org.fallwright.core.site.Fix;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
+import org.fallwright.maps.tiles.TileStore;
 import org.fallwright.ui.document.OpenSite;
 import org.fallwright.ui.map.GroundPainter;
 import org.fallwright.ui.map.Palette;
@@ -34,7 +35,6 @@ import org.fallwright.ui.side.ProfilePainter;
 import org.fallwright.ui.side.ProfilePanel;
 import org.fallwright.ui.text.Amounts;
 import org.fallwright.ui.text.Messages;
-import org.jxmapviewer.viewer.TileFactory;
 
 /**
  * The regions of the window: answer strip, what was entered, plan over profile, ways over findings,
@@ -64,7 +64,7 @@ final class Desk extends JPanel {
     middle.add(start, "start");
     middle.add(drawings, "site");
     JSplitPane right = split(JSplitPane.VERTICAL_SPLIT, ways, findings, 0.5);
-    right.setPreferredSize(new Dimension(430, 600));
+    right.setPreferredSize(new Dimension(450, 600));
     JScrollPane rail = new JScrollPane(entered);
     rail.setBorder(null);
     rail.setPreferredSize(new Dimension(240, 600));
@@ -83,10 +83,11 @@ final class Desk extends JPanel {
   }
 
   /** Shows a site on its picture's tiles; null: blank ground. */
-  void open(Site site, TileFactory tiles) {
+  void open(Site site, TileStore tiles) {
     picture = tiles != null;
     plan.show(site, tiles);
     scale();
+    status.picture(PictureDate.words(site, picture));
     redraw();
   }
 
@@ -150,7 +151,7 @@ final class Desk extends JPanel {
     Palette palette = look.palette();
     entered.show(open.site().map(s -> Entered.of(s, amounts)).orElse(null), palette);
     status.progress(open.progress());
-    status.picture(open.site().map(PictureDate::words).orElse(" "));
+    status.picture(open.site().map(s -> PictureDate.words(s, picture)).orElse(" "));
     status.next(NextThing.of(open));
     answer();
     chosenShown();

@@ -16,10 +16,10 @@ import javax.swing.JOptionPane;
 import javax.swing.SwingUtilities;
 import org.fallwright.core.plan.Plan;
 import org.fallwright.core.site.Site;
+import org.fallwright.maps.tiles.TileStore;
 import org.fallwright.ui.document.OpenSite;
 import org.fallwright.ui.task.NewestWins;
 import org.fallwright.ui.text.Messages;
-import org.jxmapviewer.viewer.TileFactory;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
 
@@ -58,6 +58,7 @@ public final class MainWindow extends JFrame {
             planning.cancel();
             reading.cancel();
             worker.shutdownNow();
+            desk.plan().close();
           }
         });
     setMinimumSize(new Dimension(1024, 640));
@@ -76,7 +77,7 @@ public final class MainWindow extends JFrame {
     reading.start(
         (progress, cancelled) -> {
           Site site = wiring.sites().read(file);
-          TileFactory tiles = wiring.pictures().open(site, file);
+          TileStore tiles = wiring.pictures().open(site, file);
           return new Read(site, tiles);
         },
         new Telling<Read>() {
@@ -164,9 +165,9 @@ public final class MainWindow extends JFrame {
     return desk;
   }
 
-  private record Read(Site site, TileFactory tiles) {}
+  private record Read(Site site, TileStore tiles) {}
 
-  private void show(Site site, TileFactory tiles, Path file) {
+  private void show(Site site, TileStore tiles, Path file) {
     setTitle(Messages.text("window.title.site", site.name()));
     open.open(file, site);
     desk.open(site, tiles);

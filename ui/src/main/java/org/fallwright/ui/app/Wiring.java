@@ -3,8 +3,8 @@ package org.fallwright.ui.app;
 import java.io.IOException;
 import java.nio.file.Path;
 import org.fallwright.core.site.Site;
+import org.fallwright.maps.tiles.TileStore;
 import org.fallwright.ui.task.Planning;
-import org.jxmapviewer.viewer.TileFactory;
 
 /**
  * What the window is given.
@@ -31,6 +31,6 @@ public record Wiring(Planning planning, Sites sites, Pictures pictures, Path dem
      * @return the tiles, or null where the site names no picture or its file is not there
      * @throws IOException with one sentence, where the file is there and cannot be read
      */
-    TileFactory open(Site site, Path siteFile) throws IOException;
+    TileStore open(Site site, Path siteFile) throws IOException;
   }
 }

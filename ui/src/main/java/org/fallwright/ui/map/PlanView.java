@@ -16,19 +16,24 @@ import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.fallwright.maps.frame.LatLon;
 import org.fallwright.maps.frame.SiteFrame;
+import org.fallwright.maps.tiles.TileStore;
+import org.fallwright.ui.map.tile.OfflineTileFactory;
 import org.fallwright.ui.text.Messages;
 import org.jxmapviewer.JXMapViewer;
 import org.jxmapviewer.input.PanMouseInputListener;
 import org.jxmapviewer.input.ZoomMouseWheelListenerCursor;
 import org.jxmapviewer.viewer.GeoPosition;
-import org.jxmapviewer.viewer.TileFactory;
 import org.locationtech.jts.geom.Envelope;
+import org.slf4j.Logger;
+import org.slf4j.LoggerFactory;
 
 /**
  * The plan on screen: the map widget with tiles, or blank ground with a grid, under the plan
  * painter. Dragging pans, the wheel zooms about the pointer.
  */
 public final class PlanView extends JXMapViewer {
+  private static final Logger LOG = LoggerFactory.getLogger(PlanView.class);
+
   /** Distance over which the widget's own projection is taken as even [m]. */
   private static final double SPAN_M = 100;
 
@@ -38,7 +43,7 @@ public final class PlanView extends JXMapViewer {
   private Position flagged;
   private Palette palette = Palette.DAY;
   private Envelope wanted;
-  private TileFactory picture;
+  private OfflineTileFactory picture;
   private Consumer<Position> pointed = p -> {};
 
   public PlanView() {
@@ -75,18 +80,30 @@ public final class PlanView extends JXMapViewer {
     getAccessibleContext().setAccessibleName(Messages.text("plan.name"));
   }
 
-  /** Shows a site on its picture's tiles; null: blank ground. */
-  public void show(Site site, TileFactory tiles) {
+  /** Shows a site on its picture's tiles; null: blank ground. The store is closed in the end. */
+  public void show(Site site, TileStore tiles) {
+    close();
     earth = new SiteFrame(site.origin());
-    if (picture != null) {
-      picture.dispose();
-    }
-    picture = tiles;
     if (tiles != null) {
-      tiles.addTileListener(t -> repaint());
+      picture = new OfflineTileFactory(tiles);
+      picture.addTileListener(t -> repaint());
     }
     setTileFactory(new StretchedTiles(picture, StretchedTiles.TILE));
     fit(PlanPainter.extent(site, null));
+  }
+
+  /** Lets the picture's file go. */
+  public void close() {
+    OfflineTileFactory old = picture;
+    picture = null;
+    if (old != null) {
+      old.dispose();
+      try {
+        old.store().orElseThrow().close();
+      } catch (Exception e) {
+        LOG.warn("Picture not closed", e);
+      }
+    }
   }
 
   /** Draws this scene from now on; null: nothing. */
@@ -219,7 +236,7 @@ public final class PlanView extends JXMapViewer {
     NorthArrow.paint(pen, view, scene.site().declinationDeg(), scene.palette(), corner, 38);
     double base = getHeight() - 12 * u;
     ScaleBar.paint(pen, view, scene.amounts(), scene.palette(), 14 * u, base, 200 * u);
-    String date = PictureDate.words(scene.site());
+    String date = PictureDate.words(scene.site(), picture != null);
     double left = getWidth() - pen.extent(date).getWidth() - 12 * u;
     pen.text(date, left, base, scene.palette().ink());
   }

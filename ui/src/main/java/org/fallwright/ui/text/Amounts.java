@@ -63,17 +63,14 @@ public final class Amounts {
         : String.format(Locale.ROOT, "%05.1f°", tenths / 10.0);
   }
 
-  /**
-   * A ratio of capacity to demand, never shown as more than it is; a word where nothing is demanded
-   * or nobody can say.
-   */
+  /** A ratio of capacity to demand; a word where nothing is demanded or nobody can say. */
   public String ratio(double r) {
     if (Double.isNaN(r)) {
       return Messages.text("ratio.unknown");
     }
     return Double.isInfinite(r) || r >= 100
         ? Messages.text("ratio.free")
-        : String.format(Locale.ROOT, "%.2f", Math.floor(r * 100 + 1e-9) / 100);
+        : String.format(Locale.ROOT, "%.2f", r);
   }
 
   /** An amount in an SI unit named by its text, as checks carry it. */

@@ -104,7 +104,8 @@ class DemoRowsTest {
   void row5TwoPartsAreTight() {
     Judged j = DEMO.judge(tackle(3, "2", "pickup", "rwd", "V1"));
     is(j, Verdict.TIGHT);
-    // the page takes the haul level; it falls a little towards the oak and presses the rear axle down
+    // the page takes the haul level; it falls a little towards the oak and presses the rear axle
+    // down
     figures(j, 4.73, 6.36, 6.71, 1.055);
     assertThat(j.weakest().id()).isEqualTo("pull");
     assertThat(j.figures().sourceTravelM()).isCloseTo(5.6, within(0.1));
