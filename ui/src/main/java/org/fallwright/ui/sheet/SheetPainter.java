@@ -8,6 +8,7 @@ import java.awt.RenderingHints;
 import java.awt.geom.Line2D;
 import java.awt.geom.Point2D;
 import java.awt.geom.Rectangle2D;
+import java.util.ArrayList;
 import java.util.List;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.site.Site;
@@ -39,6 +40,12 @@ final class SheetPainter {
 
   /** Least height of the plan. */
   private static final double LEAST_PLAN = 230;
+
+  /** How far the list of what is not known may stand out under the cautions. */
+  private static final double MORE_NOT_KNOWN = 12;
+
+  /** Size of the labels on the plan, a size of their own. */
+  static final double LABELS = 7.2;
 
   private static final Font SMALL = SheetFonts.plain(7);
   private static final Font BODY = SheetFonts.plain(7.8);
@@ -92,22 +99,18 @@ final class SheetPainter {
   }
 
   /**
-   * Where the tables begin, so that they end above one height and leave what lies above another.
+   * Where the tables begin so that they end above a height; rows are left out where they would
+   * begin above another.
    */
   private double tablesTop(double bottom, double highest) {
     TextPen measure = new TextPen(null);
-    double middle = middleOfTables();
-    while (bottom - GAP - tables(null, measure, 0) < highest + GAP) {
-      double a = loads(measure, left, 0, middle - left);
-      double b = unsettled(null, measure, middle + GAP, 0, right - middle - GAP);
-      if (a >= b && mostLoads > 3) {
-        mostLoads--;
-      } else if (mostNotes > 2) {
-        mostNotes--;
-      } else if (mostUnsettled > 2) {
-        mostUnsettled--;
-      } else {
-        break;
+    double room = bottom - highest - 2 * GAP;
+    for (int floor : new int[] {6, 4, 2}) {
+      while (tables(null, measure, 0) > room
+          && Math.max(mostLoads, Math.max(mostNotes, mostUnsettled)) > floor) {
+        mostNotes = Math.max(floor, mostNotes - 1);
+        mostUnsettled = Math.max(floor, mostUnsettled - 1);
+        mostLoads = Math.max(floor, mostLoads - 1);
       }
     }
     return bottom - GAP - tables(null, measure, 0);
@@ -150,14 +153,14 @@ final class SheetPainter {
       x = to + 6;
     }
     y = MARGIN + boxHeight + 4;
-    return pen.wrapped(content.sentence(), SheetFonts.bold(9.5), left, y, right - left) + 4;
+    return pen.wrapped(content.sentence(), SheetFonts.bold(9.5), left, y, right - left, 3) + 4;
   }
 
   private void plan(Graphics2D g, Rectangle2D frame) {
     Viewport view = MapScale.view(site, judged, frame);
     Amounts amounts = new Amounts(site.display());
     Graphics2D map = (Graphics2D) g.create();
-    map.setFont(SheetFonts.plain(7.2));
+    map.setFont(SheetFonts.plain(LABELS));
     new PlanPainter(PlanScene.of(site, judged).in(amounts).over(SheetGround.faded(ground)))
         .paint(map, view);
     map.dispose();
@@ -191,11 +194,14 @@ final class SheetPainter {
   private void checkBar(Graphics2D g, double x, double y) {
     double end = x + Paper.points(100);
     g.setColor(Color.BLACK);
-    g.setStroke(new BasicStroke(1f, BasicStroke.CAP_BUTT, BasicStroke.JOIN_MITER));
+    float pen = 0.8f;
+    g.setStroke(new BasicStroke(pen, BasicStroke.CAP_BUTT, BasicStroke.JOIN_MITER));
     g.draw(new Line2D.Double(x, y, end, y));
     for (int mm = 0; mm <= 100; mm += 10) {
       double tick = mm % 50 == 0 ? 4 : 2.2;
-      double at = x + Paper.points(mm);
+      // the outer edges of the end ticks are what is 100 mm apart
+      double inward = mm == 0 ? pen / 2 : mm == 100 ? -pen / 2 : 0;
+      double at = x + Paper.points(mm) + inward;
       g.draw(new Line2D.Double(at, y - tick, at, y + tick));
     }
     new TextPen(g)
@@ -210,7 +216,7 @@ final class SheetPainter {
     double width = right - x;
     double y = pen.line("Line tension at the tree", HEAD, x, top - 1) + 1;
     double w = (width - 4) / 2;
-    double h = 39;
+    double h = 36;
     for (int i = 0; i < content.readings().size(); i++) {
       SheetContent.Reading r = content.readings().get(i);
       double bx = x + (i % 2) * (w + 4);
@@ -222,7 +228,7 @@ final class SheetPainter {
       }
       pen.fitted(r.name(), SMALL, bx + 3, by + 2, w - 6);
       pen.line(r.shown(), SheetFonts.bold(13), bx + 3, by + 10);
-      pen.line(r.other(), BODY, bx + 3, by + 27);
+      pen.line(r.other(), BODY, bx + 3, by + 25);
     }
     y += 2 * (h + 4) + 3;
     y = table(pen, content.pull(), x, y, width) + 5;
@@ -237,8 +243,8 @@ final class SheetPainter {
     double names = 62;
     double at = y;
     for (SheetContent.Line l : lines) {
-      double a = pen.wrapped(l.name(), BODY_BOLD, x, at, names - 4);
-      double b = pen.wrapped(l.value(), BODY, x + names, at, width - names);
+      double a = pen.wrapped(l.name(), BODY_BOLD, x, at, names - 4, 2);
+      double b = pen.wrapped(l.value(), BODY, x + names, at, width - names, 3);
       at = Math.max(a, b) + 1.2;
     }
     return at;
@@ -248,11 +254,28 @@ final class SheetPainter {
     double middle = middleOfTables();
     double a = loads(pen, left, top, middle - left);
     double b = unsettled(g, pen, middle + GAP, top, right - middle - GAP);
-    return Math.max(a, b);
+    return a <= b
+        ? Math.max(b, notes(pen, left, a + 3, middle - left))
+        : Math.max(a, notes(pen, middle + GAP, b + 3, right - middle - GAP));
+  }
+
+  private double notes(TextPen pen, double x, double top, double width) {
+    List<String> all = content.notes();
+    if (all.isEmpty()) {
+      return top;
+    }
+    double y = pen.line("Take note", HEAD, x, top);
+    int shown = Math.min(all.size(), mostNotes);
+    for (String note : all.subList(0, shown)) {
+      y = pen.item("–", note, SMALL, x, y, width, 3);
+    }
+    return shown < all.size()
+        ? pen.line((all.size() - shown) + " more are in the plan document.", SMALL, x, y)
+        : y;
   }
 
   private double loads(TextPen pen, double x, double top, double width) {
-    double[] ends = {width * 0.58, width * 0.72, width * 0.86, width};
+    double[] ends = {width * 0.52, width * 0.67, width * 0.84, width};
     double y = pen.line("Loads on the parts", HEAD, x, top);
     String[] heads = {"at plan", "allowed", "at most", "allowed"};
     for (int i = 0; i < 4; i++) {
@@ -263,7 +286,7 @@ final class SheetPainter {
     List<SheetContent.Load> rows = content.loads();
     int shown = Math.min(rows.size(), mostLoads);
     for (SheetContent.Load r : rows.subList(0, shown)) {
-      pen.fitted(r.part(), BODY, x, y, ends[0] - 52);
+      pen.fitted(r.part(), BODY, x, y, ends[0] - 50);
       pen.right(r.atPlan() + (r.overAtPlan() ? " ×" : ""), font(r.overAtPlan()), x + ends[0], y);
       pen.right(r.allowedAtPlan(), BODY, x + ends[1], y);
       pen.right(r.atMost() + (r.overAtMost() ? " ×" : ""), font(r.overAtMost()), x + ends[2], y);
@@ -280,7 +303,8 @@ final class SheetPainter {
         SMALL,
         x,
         y + 1,
-        width);
+        width,
+        2);
   }
 
   private static Font font(boolean over) {
@@ -303,22 +327,10 @@ final class SheetPainter {
         VerdictMark.paint(new Pen(mark, Color.WHITE), u.verdict(), x + 4, y + 5, 1, Color.BLACK);
         mark.dispose();
       }
-      y = pen.wrapped(u.text(), BODY, x + 12, y, width - 12) + 1;
+      y = pen.wrapped(u.text(), BODY, x + 12, y, width - 12, 3) + 1;
     }
     if (shown < all.size()) {
       y = pen.line((all.size() - shown) + " more checks are in the plan document.", SMALL, x, y);
-    }
-    if (!content.notes().isEmpty()) {
-      y = pen.line("Take note", HEAD, x, y + 3);
-      int notes = Math.min(content.notes().size(), mostNotes);
-      for (String note : content.notes().subList(0, notes)) {
-        y = pen.item("–", note, SMALL, x, y, width);
-      }
-      if (notes < content.notes().size()) {
-        y =
-            pen.line(
-                (content.notes().size() - notes) + " more are in the plan document.", SMALL, x, y);
-      }
     }
     return y;
   }
@@ -335,14 +347,26 @@ final class SheetPainter {
         items(pen, cautions.subList(half, cautions.size()), left + column + GAP, bottom, column);
     double x = left + 2 * (column + GAP);
     pen.line("Not known, not checked", HEAD, x, y);
-    double c = items(pen, content.notKnown(), x, bottom, column);
+    double room = Math.max(a, b) - bottom + MORE_NOT_KNOWN;
+    double c = items(pen, shortened(content.notKnown(), column, room), x, bottom, column);
     return Math.max(a, Math.max(b, c));
+  }
+
+  /** The items of a list that a column of some height holds, and how many it does not. */
+  private static List<String> shortened(List<String> items, double width, double height) {
+    TextPen measure = new TextPen(null);
+    List<String> shown = items;
+    for (int n = items.size() - 1; n >= 0 && items(measure, shown, 0, 0, width) > height; n--) {
+      shown = new ArrayList<>(items.subList(0, n));
+      shown.add((items.size() - n) + " more are in the plan document.");
+    }
+    return shown;
   }
 
   private static double items(TextPen pen, List<String> items, double x, double top, double width) {
     double y = top;
     for (String item : items) {
-      y = pen.item("–", item, SMALL, x, y, width) + 0.6;
+      y = pen.item("–", item, SMALL, x, y, width, 7) + 0.6;
     }
     return y;
   }
