@@ -1,9 +1,9 @@
 package org.fallwright.core.plan;
 
-import org.fallwright.core.reference.Allowances;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.Supplier;
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.site.Position;
 
 /**

@@ -28,7 +28,9 @@ import org.fallwright.core.units.DisplayUnits;
  * every part hold, does the source pull and hold, can people stand clear.
  */
 public final class Judge {
-  /** More than there are checks: those that cannot be made where the tree does not move all count. */
+  /**
+   * More than there are checks: those that cannot be made where the tree does not move all count.
+   */
   private static final int NOT_MADE = 1000;
 
   private final Site site;

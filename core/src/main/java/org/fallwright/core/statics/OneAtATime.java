@@ -1,8 +1,8 @@
 package org.fallwright.core.statics;
 
+import java.util.function.ToDoubleFunction;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.reference.Spreads;
-import java.util.function.ToDoubleFunction;
 
 /**
  * 95th and 5th percentile of a signed quantity, one input at a time.

@@ -1,10 +1,10 @@
 package org.fallwright.core.statics;
 
-import org.fallwright.core.reference.Allowances;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import org.fallwright.core.reference.Allowances;
 
 /**
  * Every ratio of a pull, capacity over demand; infinite where nothing is demanded.

@@ -1,8 +1,7 @@
 package org.fallwright.core.statics;
 
-import org.fallwright.core.tree.StemTaper;
-
 import org.fallwright.core.reference.Allowances;
+import org.fallwright.core.tree.StemTaper;
 
 /**
  * The statics of one pull: what the tree asks of the line, and how it behaves on what a source

@@ -1,7 +1,7 @@
 package org.fallwright.core.statics;
 
-import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.line.Point3;
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.tree.StemTaper;
 
 /**

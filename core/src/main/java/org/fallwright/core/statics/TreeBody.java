@@ -41,8 +41,8 @@ public record TreeBody(
   }
 
   /**
-   * Share of a section's stiffness and strength that the cavity takes, (inner/outer)⁴, the sound shell
-   * counted from inside the bark.
+   * Share of a section's stiffness and strength that the cavity takes, (inner/outer)⁴, the sound
+   * shell counted from inside the bark.
    *
    * @param insideBarkM diameter inside the bark [m]
    */

@@ -1,8 +1,8 @@
 package org.fallwright.core.zones;
 
-import org.fallwright.core.reference.Allowances;
 import java.util.ArrayList;
 import java.util.List;
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Shape;
 import org.locationtech.jts.geom.Coordinate;

@@ -1,7 +1,7 @@
 package org.fallwright.core.zones;
 
-import org.fallwright.core.reference.Allowances;
 import java.util.List;
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.site.Position;
 import org.locationtech.jts.geom.Geometry;
 

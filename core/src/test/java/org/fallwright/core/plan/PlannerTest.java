@@ -27,10 +27,10 @@ class PlannerTest {
   }
 
   /**
-   * By hand: hinge middle 0.06 m ahead, kerf 2.936 deg; mass centre 3.8 m up and 0.2592 m behind the
-   * hinge, attachment 5.8 m up and 0.3640 m behind; hinge 57 MPa x 0.24 m x (0.03 m)^2 / 6 = 2,052 N m,
-   * wind at 2 m/s 61.7 N m; weight sat back -2,223.3 N m; lever 5.593 m; so 4,337 N m / 5.593 m
-   * = 775.4 N. Commit: asin(2,113.7 / (4,903.3 N x 3.809 m)) + 3.902 deg = 10.40 deg.
+   * By hand: hinge middle 0.06 m ahead, kerf 2.936 deg; mass centre 3.8 m up and 0.2592 m behind
+   * the hinge, attachment 5.8 m up and 0.3640 m behind; hinge 57 MPa x 0.24 m x (0.03 m)^2 / 6 =
+   * 2,052 N m, wind at 2 m/s 61.7 N m; weight sat back -2,223.3 N m; lever 5.593 m; so 4,337 N m /
+   * 5.593 m = 775.4 N. Commit: asin(2,113.7 / (4,903.3 N x 3.809 m)) + 3.902 deg = 10.40 deg.
    */
   @Test
   void theStraightPullIsThatWorkedByHand() {
@@ -71,9 +71,7 @@ class PlannerTest {
     Site site =
         TinySite.site(
             4_000,
-            s ->
-                TinySite.add(
-                    s, "targets", HOUSE.formatted("-6, 8], [6, 8], [6, 12], [-6, 12")));
+            s -> TinySite.add(s, "targets", HOUSE.formatted("-6, 8], [6, 8], [6, 12], [-6, 12")));
     Judged j = new Judge(site, TinySite.SOURCES).judge(north());
     assertThat(j.verdict()).isEqualTo(Verdict.NOT_WORKABLE);
     assertThat(j.weakest().id()).isEqualTo("clear of House");
@@ -87,8 +85,7 @@ class PlannerTest {
     Site site =
         TinySite.site(
             4_000,
-            s ->
-                TinySite.add(s, "targets", HOUSE.formatted("5, 2], [9, 2], [9, 6], [5, 6")));
+            s -> TinySite.add(s, "targets", HOUSE.formatted("5, 2], [9, 2], [9, 6], [5, 6")));
     Judged with = new Judge(site, TinySite.SOURCES).judge(north());
     assertThat(with.standing()).isLessThanOrEqualTo(without.standing());
     assertThat(with.verdict()).isGreaterThanOrEqualTo(without.verdict());
@@ -154,9 +151,7 @@ class PlannerTest {
   @Test
   void itCanBeCancelled() {
     assertThatThrownBy(
-            () ->
-                new Planner(TinySite.SOURCES)
-                    .plan(TinySite.site(1_500), share -> {}, () -> true))
+            () -> new Planner(TinySite.SOURCES).plan(TinySite.site(1_500), share -> {}, () -> true))
         .isInstanceOf(CancellationException.class);
   }
 }

@@ -19,8 +19,8 @@ import org.fallwright.core.site.Site;
 import org.fallwright.core.store.SiteFile;
 
 /**
- * Sites small enough to be worked by hand: a tree of ten metres leaning three degrees to the south, a
- * rated point thirty metres north of it, and a source that gives what it is told to.
+ * Sites small enough to be worked by hand: a tree of ten metres leaning three degrees to the south,
+ * a rated point thirty metres north of it, and a source that gives what it is told to.
  */
 final class TinySite {
   private static final Path DEMO =
@@ -35,8 +35,7 @@ final class TinySite {
       return new SourceDescription(
           "steady",
           "Steady pull",
-          Set.of(
-              SourceDescription.PlaceKind.ANCHOR, SourceDescription.PlaceKind.SPOT),
+          Set.of(SourceDescription.PlaceKind.ANCHOR, SourceDescription.PlaceKind.SPOT),
           false,
           List.of(SourceDescription.Parameter.number("pull_N", "Pull", "N", 0, 1e6)));
     }
