@@ -68,6 +68,9 @@ final class Desk extends JPanel {
     JScrollPane rail = new JScrollPane(entered);
     rail.setBorder(null);
     rail.setPreferredSize(new Dimension(240, 600));
+    rail.setMinimumSize(new Dimension(200, 100));
+    middle.setPreferredSize(new Dimension(330, 400));
+    middle.setMinimumSize(new Dimension(300, 300));
     rail.setHorizontalScrollBarPolicy(JScrollPane.HORIZONTAL_SCROLLBAR_NEVER);
     JSplitPane inner = split(JSplitPane.HORIZONTAL_SPLIT, middle, right, 1);
     add(strip, BorderLayout.PAGE_START);

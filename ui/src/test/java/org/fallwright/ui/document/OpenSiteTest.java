@@ -1,0 +1,74 @@
+package org.fallwright.ui.document;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import org.fallwright.core.plan.Plan;
+import org.fallwright.core.site.Site;
+import org.fallwright.ui.DemoLike;
+import org.junit.jupiter.api.Test;
+
+class OpenSiteTest {
+  private final Site site = DemoLike.site(Site.Display.US);
+  private final Plan plan = DemoLike.plan(site);
+  private final OpenSite open = new OpenSite();
+  private final List<OpenSite.Change> told = new ArrayList<>();
+
+  @Test
+  void aPlanBringsItsBestSetup() {
+    open.open(null, site);
+    open.planned(plan);
+    assertThat(open.chosen()).contains(plan.ranked().get(0));
+    assertThat(open.display()).isEqualTo(Site.Display.US);
+    assertThat(open.progress()).isNaN();
+  }
+
+  @Test
+  void aPlanWithoutSetupsChoosesNone() {
+    open.planned(new Plan(List.of(), 0, Map.of(), Map.of(), Map.of(), List.of()));
+    assertThat(open.chosen()).isEmpty();
+  }
+
+  @Test
+  void anotherSiteForgetsThePlan() {
+    open.open(null, site);
+    open.planned(plan);
+    open.notPlanned("stopped");
+    open.open(null, site);
+    assertThat(open.plan()).isEmpty();
+    assertThat(open.chosen()).isEmpty();
+    assertThat(open.failure()).isEmpty();
+  }
+
+  @Test
+  void inOtherUnitsTheSameSetupStaysChosen() {
+    open.open(null, site);
+    open.planned(plan);
+    open.choose(plan.bestRejected().get("clearance"));
+    Site metric = site.in(Site.Display.METRIC);
+    Plan again = DemoLike.plan(metric);
+    open.reworded(metric, again);
+    assertThat(open.chosen()).contains(again.bestRejected().get("clearance"));
+    assertThat(open.site()).contains(metric);
+  }
+
+  @Test
+  void listenersHearWhatChangedOnceEach() {
+    open.listen(told::add);
+    open.open(null, site);
+    open.planned(plan);
+    open.choose(plan.ranked().get(1));
+    open.choose(plan.ranked().get(1));
+    open.point(plan.ranked().get(1).checks().get(1));
+    open.show(Site.Display.METRIC);
+    assertThat(told)
+        .containsExactly(
+            OpenSite.Change.SITE,
+            OpenSite.Change.PLAN,
+            OpenSite.Change.CHOICE,
+            OpenSite.Change.CHECK,
+            OpenSite.Change.UNITS);
+  }
+}
