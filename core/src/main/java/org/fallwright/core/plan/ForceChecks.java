@@ -189,21 +189,21 @@ final class ForceChecks {
         t.steerShare(),
         Ratios.HINGE_SHARE,
         by.get("steering"),
-        "Side lean, wind and line take %.0f %% of the hinge's side strength; %.0f %% may be used.");
+        "Side lean, wind and line take %.1f %% of the hinge's side strength; %.0f %% may be used.");
     share(
         true,
         "hinge turning",
         t.turnShare(),
         Ratios.HINGE_SHARE,
         by.get("hinge turning"),
-        "The line turns the hinge with %.0f %% of its strength; %.0f %% may be used.");
+        "The line turns the hinge with %.1f %% of its strength; %.0f %% may be used.");
     share(
         true,
         "hinge crushing",
         t.crushShare(),
         Ratios.CRUSH_SHARE,
         by.get("hinge crushing"),
-        "Weight and line press the hinge to %.0f %% of its strength; %.0f %% may be used.");
+        "Weight and line press the hinge to %.1f %% of its strength; %.0f %% may be used.");
   }
 
   private void share(

@@ -20,14 +20,17 @@ final class Sentence {
         Double.isInfinite(weakest.ratio())
             ? "nothing is near its limit"
             : String.format(
-                Locale.ROOT, "%s, %.2f times what is asked", weakest.id(), weakest.ratio());
+                Locale.ROOT,
+                "%s, %.2f times what is asked",
+                weakest.id(),
+                Math.floor(100 * weakest.ratio()) / 100);
     return head
         + "Plan for "
         + in.both(u -> u.forceAtLeast(f.pullPlanN()))
         + " on the line at the tree; "
         + source
         + " gives "
-        + in.force(f.sourceLowN())
+        + in.both(u -> u.forceAtMost(f.sourceLowN()))
         + ". Weakest link: "
         + link
         + ".";

@@ -70,7 +70,11 @@ final class Subject {
   List<String> notes() {
     List<String> notes =
         new ArrayList<>(figures.remarks().stream().map(Subject::sentence).toList());
-    List<String> assumed = species.assumed().stream().map(Figure::key).toList();
+    List<String> assumed =
+        species.assumed().stream()
+            .map(Figure::key)
+            .map(k -> k.substring(k.indexOf('.') + 1).replace('-', ' '))
+            .toList();
     if (!assumed.isEmpty()) {
       notes.add(
           "For "

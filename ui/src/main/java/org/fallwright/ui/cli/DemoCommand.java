@@ -39,6 +39,7 @@ final class DemoCommand extends Subcommand {
     PlanText text = new PlanText(demo.site(), demo.plan(), out());
     text.head();
     text.setups(5, false);
+    text.ruledOut();
     out().println();
     write(demo);
     boolean display = OpenCommand.hasDisplay();

@@ -108,7 +108,8 @@ final class PlanText {
     row("     %sweakest: %s, %s", clearance, j.weakest().id(), ratio(j.weakest().ratio()));
   }
 
-  private void ruledOut() {
+  /** What rules the other setups out. */
+  void ruledOut() {
     if (plan.byBindingCheck().isEmpty()) {
       return;
     }
