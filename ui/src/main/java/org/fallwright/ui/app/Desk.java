@@ -66,7 +66,7 @@ final class Desk extends JPanel {
     JSplitPane right = split(JSplitPane.VERTICAL_SPLIT, ways, findings, 0.5);
     right.setPreferredSize(new Dimension(450, 600));
     JScrollPane rail = new JScrollPane(entered);
-    rail.setBorder(null);
+    rail.setBorder(BorderFactory.createEmptyBorder());
     rail.setPreferredSize(new Dimension(240, 600));
     rail.setMinimumSize(new Dimension(200, 100));
     middle.setPreferredSize(new Dimension(330, 400));
@@ -134,6 +134,10 @@ final class Desk extends JPanel {
         answer();
         chosenShown();
         redraw();
+        if (open.chosen().isPresent()) {
+          plan.reveal(PlanPainter.extent(open.site().orElseThrow(), open.chosen().get()));
+          scale();
+        }
       }
       case PLAN -> {
         plan.flag(null);

@@ -20,7 +20,7 @@ final class Words {
     text.setBorder(BorderFactory.createEmptyBorder(8, 10, 8, 10));
     text.setCaretPosition(0);
     JScrollPane scroll = new JScrollPane(text);
-    scroll.setPreferredSize(new Dimension(620, 400));
+    scroll.setPreferredSize(new Dimension(640, 460));
     JOptionPane.showMessageDialog(over, scroll, Messages.text(titleKey), JOptionPane.PLAIN_MESSAGE);
   }
 }

@@ -135,7 +135,7 @@ public final class Pen {
   }
 
   /** A light plate to read a text on. */
-  void plate(Rectangle2D box) {
+  public void plate(Rectangle2D box) {
     double round = 5 * unit;
     fill(
         new RoundRectangle2D.Double(

@@ -152,6 +152,21 @@ public final class PlanView extends JXMapViewer {
     repaint();
   }
 
+  /** Shows all of an area if some of it is out of sight. */
+  public void reveal(Envelope metres) {
+    if (earth == null) {
+      return;
+    }
+    Viewport view = viewport();
+    Rectangle2D seen = view.frame();
+    boolean all =
+        seen.contains(view.toPixel(metres.getMinX(), metres.getMinY()))
+            && seen.contains(view.toPixel(metres.getMaxX(), metres.getMaxY()));
+    if (!all) {
+      fit(metres);
+    }
+  }
+
   /** One zoom step nearer (1) or farther (-1), about the middle. */
   public void step(int nearer) {
     wanted = null;

@@ -88,7 +88,7 @@ public final class EnteredPanel extends JPanel implements Scrollable {
     t.setOpaque(false);
     t.setLineWrap(true);
     t.setWrapStyleWord(true);
-    t.setBorder(null);
+    t.setBorder(BorderFactory.createEmptyBorder());
     t.setAlignmentX(Component.LEFT_ALIGNMENT);
     if (c != null) {
       t.setForeground(c);

@@ -34,7 +34,7 @@ public final class AnswerStrip extends JPanel {
     sentence.setOpaque(false);
     sentence.setLineWrap(true);
     sentence.setWrapStyleWord(true);
-    sentence.setBorder(null);
+    sentence.setBorder(BorderFactory.createEmptyBorder());
     sentence.setMinimumSize(new Dimension(120, 36));
     JPanel said = new JPanel();
     said.setOpaque(false);

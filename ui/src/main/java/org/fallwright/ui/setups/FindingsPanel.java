@@ -49,6 +49,7 @@ public final class FindingsPanel extends JPanel {
     checks.getSelectionModel().addListSelectionListener(e -> point());
     notes.getAccessibleContext().setAccessibleName(Messages.text("findings.notes"));
     why.getAccessibleContext().setAccessibleName(Messages.text("findings.why"));
+    getAccessibleContext().setAccessibleName(Messages.text("findings.name"));
     setPreferredSize(new Dimension(420, 320));
   }
 
@@ -107,7 +108,7 @@ public final class FindingsPanel extends JPanel {
 
   private static JScrollPane scroll(Component c) {
     JScrollPane s = new JScrollPane(c);
-    s.setBorder(null);
+    s.setBorder(BorderFactory.createEmptyBorder());
     return s;
   }
 

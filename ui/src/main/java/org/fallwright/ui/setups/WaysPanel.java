@@ -54,7 +54,7 @@ public final class WaysPanel extends JPanel {
     both.add(ruledOut, row);
     both.setBackground(ranked.getBackground());
     JScrollPane scroll = new JScrollPane(both);
-    scroll.setBorder(null);
+    scroll.setBorder(BorderFactory.createEmptyBorder());
     scroll.getVerticalScrollBar().setUnitIncrement(24);
     scroll.setHorizontalScrollBarPolicy(JScrollPane.HORIZONTAL_SCROLLBAR_NEVER);
     add(head, BorderLayout.PAGE_START);

@@ -57,15 +57,15 @@ public final class ProfilePainter {
       Labels labels = new Labels(frame);
       ProfileView view = view(frame, pen.unit());
       String title = Messages.text("profile.title", amounts.azimuth(plane.layDeg()));
-      Rectangle2D room = pen.extent(title);
       double pad = 8 * pen.unit();
-      pen.text(title, frame.getMinX() + pad, frame.getMinY() + pad - room.getY(), palette.ink());
-      labels.keepFree(
+      Rectangle2D text = pen.extent(title);
+      Rectangle2D head =
           new Rectangle2D.Double(
-              frame.getMinX(),
-              frame.getMinY(),
-              room.getWidth() + 2 * pad,
-              room.getHeight() + 2 * pad));
+              frame.getMinX() + pad / 2,
+              frame.getMinY() + pad / 2,
+              text.getWidth() + pad,
+              text.getHeight() + pad / 2);
+      labels.keepFree(head);
       labels.keepFree(
           new Rectangle2D.Double(
               frame.getMinX(),
@@ -78,6 +78,8 @@ public final class ProfilePainter {
       wires(pen, view, labels);
       line(pen, view, labels);
       labels.paint(pen);
+      pen.plate(head);
+      pen.textAround(title, head.getCenterX(), head.getCenterY(), palette.ink());
     } finally {
       g.dispose();
     }

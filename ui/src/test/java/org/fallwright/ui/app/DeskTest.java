@@ -9,6 +9,7 @@ import java.awt.image.BufferedImage;
 import java.io.File;
 import java.util.HashSet;
 import java.util.Set;
+import java.util.function.Consumer;
 import javax.imageio.ImageIO;
 import javax.swing.JComponent;
 import javax.swing.SwingUtilities;
@@ -110,11 +111,21 @@ class DeskTest {
     return image;
   }
 
-  private static void layOut(Component c) {
-    c.doLayout();
+  /**
+   * Without a display nothing validates by itself; twice, as wrapped text needs its width first.
+   */
+  private static void layOut(Component desk) {
+    for (int i = 0; i < 2; i++) {
+      each(desk, Component::invalidate);
+      each(desk, Component::doLayout);
+    }
+  }
+
+  private static void each(Component c, Consumer<Component> act) {
+    act.accept(c);
     if (c instanceof Container box) {
       for (Component inner : box.getComponents()) {
-        layOut(inner);
+        each(inner, act);
       }
     }
   }
