@@ -19,7 +19,7 @@ final class SheetGround {
   private static final double DPI = 200;
 
   /** Share of white laid over the picture. */
-  private static final float FADE = 0.45f;
+  private static final float FADE = 0.6f;
 
   private SheetGround() {}
 

@@ -33,13 +33,16 @@ final class SheetPainter {
   private static final double GAP = 9;
 
   /** Share of the page's width that the plan takes. */
-  private static final double PLAN_SHARE = 0.645;
+  private static final double PLAN_SHARE = 0.62;
 
   /** Height of the strip under the plan: scale bar, north, check bar. */
   private static final double STRIP = 50;
 
   /** Least height of the plan. */
   private static final double LEAST_PLAN = 230;
+
+  /** Rows of each table that are kept however little room there is. */
+  private static final int FEWEST = 2;
 
   /** How far the list of what is not known may stand out under the cautions. */
   private static final double MORE_NOT_KNOWN = 12;
@@ -105,15 +108,29 @@ final class SheetPainter {
   private double tablesTop(double bottom, double highest) {
     TextPen measure = new TextPen(null);
     double room = bottom - highest - 2 * GAP;
-    for (int floor : new int[] {6, 4, 2}) {
-      while (tables(null, measure, 0) > room
-          && Math.max(mostLoads, Math.max(mostNotes, mostUnsettled)) > floor) {
-        mostNotes = Math.max(floor, mostNotes - 1);
-        mostUnsettled = Math.max(floor, mostUnsettled - 1);
-        mostLoads = Math.max(floor, mostLoads - 1);
-      }
+    while (tables(null, measure, 0) > room && fewerRows(measure)) {
+      // one row less of the taller column
     }
     return bottom - GAP - tables(null, measure, 0);
+  }
+
+  /** Takes a row from the taller column of the tables; false where none has any to spare. */
+  private boolean fewerRows(TextPen measure) {
+    double middle = middleOfTables();
+    double loads = loads(measure, left, 0, middle - left);
+    double unsettled = unsettled(null, measure, middle + GAP, 0, right - middle - GAP);
+    boolean notesDecide = tables(null, measure, 0) > Math.max(loads, unsettled);
+    boolean leftDecides = notesDecide ? loads <= unsettled : loads > unsettled;
+    if (notesDecide && mostNotes > FEWEST) {
+      mostNotes--;
+    } else if (mostLoads > FEWEST && (leftDecides || mostUnsettled == FEWEST)) {
+      mostLoads--;
+    } else if (mostUnsettled > FEWEST) {
+      mostUnsettled--;
+    } else {
+      return false;
+    }
+    return true;
   }
 
   private double middleOfTables() {
