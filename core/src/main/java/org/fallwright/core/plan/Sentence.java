@@ -1,6 +1,5 @@
 package org.fallwright.core.plan;
 
-import java.util.Locale;
 import org.fallwright.core.units.DisplayUnits;
 
 /** The one sentence that says how a setup stands. */
@@ -19,11 +18,7 @@ final class Sentence {
     String link =
         Double.isInfinite(weakest.ratio())
             ? "nothing is near its limit"
-            : String.format(
-                Locale.ROOT,
-                "%s, %.2f times what is asked",
-                weakest.id(),
-                Math.floor(100 * weakest.ratio()) / 100);
+            : weakest.id() + ", " + DisplayUnits.ratio(weakest.ratio()) + " times what is asked";
     return head
         + "Plan for "
         + in.both(u -> u.forceAtLeast(f.pullPlanN()))

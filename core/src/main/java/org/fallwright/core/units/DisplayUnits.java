@@ -64,6 +64,18 @@ public enum DisplayUnits {
     return this == US ? measure.us : measure.metric;
   }
 
+  /** Decimals that a ratio is shown with, as a factor. */
+  private static final double RATIO_STEP = 100;
+
+  /** A ratio of capacity over demand: two decimals, never shown as more than it is. */
+  public static String ratio(double ratio) {
+    if (!Double.isFinite(ratio)) {
+      return Double.isNaN(ratio) ? NONE : ratio > 0 ? "∞" : "-∞";
+    }
+    // a hair is forgiven, so that 1.5 computed a little low does not show as 1.49
+    return String.format(Locale.ROOT, "%.2f", Math.floor(ratio * RATIO_STEP + 1e-9) / RATIO_STEP);
+  }
+
   /** A force [N] to three digits. */
   public String force(double n) {
     return digits(Measure.FORCE, n, RoundingMode.HALF_EVEN);

@@ -159,8 +159,6 @@ final class PlanText {
     if (Double.isNaN(r)) {
       return "not known";
     }
-    return Double.isInfinite(r)
-        ? "nothing asked"
-        : String.format(Locale.ROOT, "%.2f", Math.floor(r * 100 + 1e-9) / 100);
+    return Double.isInfinite(r) ? "nothing asked" : DisplayUnits.ratio(r);
   }
 }

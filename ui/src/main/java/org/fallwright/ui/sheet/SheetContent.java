@@ -353,7 +353,7 @@ record SheetContent(
         : Double.isInfinite(r)
             ? "no pull asked"
             // never shown as more than it is
-            : String.format(Locale.ROOT, "%.2f", Math.floor(r * 100 + 1e-9) / 100);
+            : DisplayUnits.ratio(r);
   }
 
   private static String picture(Picture p) {

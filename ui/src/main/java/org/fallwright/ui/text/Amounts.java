@@ -68,9 +68,7 @@ public final class Amounts {
     if (Double.isNaN(r)) {
       return Messages.text("ratio.unknown");
     }
-    return Double.isInfinite(r) || r >= 100
-        ? Messages.text("ratio.free")
-        : String.format(Locale.ROOT, "%.2f", r);
+    return Double.isInfinite(r) || r >= 100 ? Messages.text("ratio.free") : DisplayUnits.ratio(r);
   }
 
   /** An amount in an SI unit named by its text, as checks carry it. */
