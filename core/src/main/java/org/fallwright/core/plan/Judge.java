@@ -39,7 +39,9 @@ public final class Judge {
   private final DisplayUnits in;
   private final Subject subject;
   private final SiteTables tables = new SiteTables();
+  private final Knowledge knowledge;
   private final Landing landing;
+  private final LineRun lineRun;
   private final Map<Setup, Route> routes = new ConcurrentHashMap<>();
   private final Map<Pulled, Statics> reckoned = new ConcurrentHashMap<>();
 
@@ -53,7 +55,9 @@ public final class Judge {
     rules = RuleSets.shipped().byKey(site.ruleSet());
     in = DisplayUnits.valueOf(site.display().name());
     subject = new Subject(site);
-    landing = new Landing(site, rules, in, subject);
+    knowledge = new Knowledge(site, rules);
+    landing = new Landing(site, rules, in, subject, knowledge);
+    lineRun = new LineRun(site, in, knowledge);
   }
 
   /** Notes that hold for every setup of the site, a sentence each. */
@@ -86,9 +90,10 @@ public final class Judge {
     String name = name(setup, source);
 
     Grade grade = new Grade(full);
-    landing.knowledge(grade);
+    knowledge.check(grade);
     usable(grade, parts);
     Landing.Zones zones = landing.check(grade, setup, route, tree, full);
+    lineRun.check(grade, setup, route);
     new KitChecks(site, in, grade).check(setup, route, tree, offer, parts);
     ForceChecks forces = new ForceChecks(site, in, grade);
     forces.movement(tree, setup.attachHeightM() - site.cut().heightM());
@@ -115,7 +120,7 @@ public final class Judge {
       grade.rule(
           f.id(), f.value(), f.limit(), f.unit(), f.ratio(), place(setup).at(), () -> f.why());
     }
-    landing.people(grade, setup, zones, offer);
+    new People(site, rules, in, grade).check(setup, zones, offer);
     notes.addAll(offer.notes());
     Check weakest = grade.weakest();
     return new Judged(

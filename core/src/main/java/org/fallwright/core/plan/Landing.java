@@ -3,19 +3,13 @@ package org.fallwright.core.plan;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
-import java.util.OptionalDouble;
-import java.util.Set;
 import java.util.concurrent.ConcurrentHashMap;
-import java.util.function.ToDoubleFunction;
-import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.rules.RuleSet;
-import org.fallwright.core.site.Looked;
-import org.fallwright.core.site.Place;
 import org.fallwright.core.site.Position;
+import org.fallwright.core.site.Shape;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.SubjectTree;
 import org.fallwright.core.site.Target;
-import org.fallwright.core.site.Wire;
 import org.fallwright.core.statics.TreeSide;
 import org.fallwright.core.units.DisplayUnits;
 import org.fallwright.core.zones.Bight;
@@ -24,31 +18,27 @@ import org.fallwright.core.zones.EscapeRoutes;
 import org.fallwright.core.zones.FallFootprint;
 import org.fallwright.core.zones.FallOutline;
 import org.fallwright.core.zones.LayTargets;
-import org.fallwright.core.zones.Leg;
-import org.fallwright.core.zones.LegCheck;
-import org.fallwright.core.zones.OperatorPlace;
 import org.fallwright.core.zones.Recoil;
 import org.fallwright.core.zones.SitBackZone;
 import org.fallwright.core.zones.TargetClearance;
 import org.fallwright.core.zones.WireCheck;
+import org.locationtech.jts.geom.Coordinate;
 
-/** The checks on the ground: what is known, where the tree lands, where the line runs, people. */
+/** Where the tree lands: targets, drop zone, wires, the zones about it and the ways out. */
 final class Landing {
   private final Site site;
   private final RuleSet rules;
   private final DisplayUnits in;
+  private final Knowledge knowledge;
   private final FallOutline outline;
   private final LayTargets targets;
   private final DropZoneFit dropZone;
   private final WireCheck wires;
   private final List<WireCheck.Reach> reach;
-  private final LegCheck legs;
   private final EscapeRoutes escapes;
-  private final boolean wiresKnown;
   private final Map<Fall, Landed> falls = new ConcurrentHashMap<>();
   private final Map<Out, List<Position>> waysOut = new ConcurrentHashMap<>();
   private final Map<List<Position>, Angles> angles = new ConcurrentHashMap<>();
-  private final Map<Setup, List<Passed>> passed = new ConcurrentHashMap<>();
 
   /** All that a footprint depends on. */
   private record Fall(double layDeg, double steeringShare) {}
@@ -65,9 +55,6 @@ final class Landing {
 
   /** The insides of a line's angles, and where its parted ends fly. */
   record Angles(List<Bight> bights, Recoil recoil) {}
-
-  /** What a leg passes, with the number of the leg. */
-  private record Passed(int leg, LegCheck.Passing what) {}
 
   /**
    * The zones of a setup.
@@ -88,10 +75,11 @@ final class Landing {
       Angles angles,
       List<String> notes) {}
 
-  Landing(Site site, RuleSet rules, DisplayUnits in, Subject subject) {
+  Landing(Site site, RuleSet rules, DisplayUnits in, Subject subject, Knowledge knowledge) {
     this.site = site;
     this.rules = rules;
     this.in = in;
+    this.knowledge = knowledge;
     SubjectTree t = site.tree();
     outline =
         new FallOutline(
@@ -104,72 +92,18 @@ final class Landing {
     targets = new LayTargets(site.targets(), t.stump());
     dropZone = site.dropZones().isEmpty() ? null : new DropZoneFit(site.dropZones());
     wires = new WireCheck(site.wires(), t.stump(), site.cut().heightM(), outline);
-    wiresKnown = site.wires().stream().allMatch(w -> approach(w).isPresent());
-    reach = wiresKnown ? wires.reach(approach()) : List.of();
-    legs =
-        new LegCheck(
-            site.targets().stream().filter(Landing::mattersToALine).toList(),
-            site.anchors(),
-            wiresKnown ? site.wires() : List.of());
+    reach = knowledge.ofWires() ? wires.reach(knowledge.approach()) : List.of();
     escapes = new EscapeRoutes(site.targets());
   }
 
-  /** A private way that asks for no distance is closed for the work; a plant may be brushed. */
-  private static boolean mattersToALine(Target t) {
-    return !t.mayBeHit() && !(t.kind() == Target.Kind.ROAD && t.requiredDistanceM() == 0);
-  }
-
-  private OptionalDouble approach(Wire w) {
-    return rules
-        .approachDistanceM(w.voltageKv())
-        .map(r -> OptionalDouble.of(r.value()))
-        .orElse(OptionalDouble.empty());
-  }
-
-  private ToDoubleFunction<Wire> approach() {
-    return w -> approach(w).orElseThrow();
-  }
-
-  /** What must be known before anything is judged. */
-  void knowledge(Grade grade) {
-    for (Wire w : site.wires()) {
-      if (approach(w).isEmpty()) {
-        grade.unknown(
-            "voltage of " + w.id(),
-            w.poles().get(0).at(),
-            () ->
-                "Line "
-                    + w.id()
-                    + ": voltage not given, so no setup is judged. Ask its owner; write the answer and"
-                    + " who gave it.");
-      }
-    }
-    if (site.found(Looked.What.WIRES) == Looked.Found.NOT_LOOKED) {
-      grade.unknown(
-          "wires looked for",
-          null,
-          () ->
-              "Nobody has said whether there are wires, so no setup is judged. Look, and say none or"
-                  + " draw them.");
-    }
-    if (site.found(Looked.What.PEOPLE_INDOORS) == Looked.Found.NOT_LOOKED) {
-      grade.unknown(
-          "people indoors",
-          null,
-          () ->
-              "Nobody has said who is indoors, so no setup is judged. Ask at every door, and say so.");
-    }
-  }
-
-  /** Landing, wires and the line's own way. */
+  /** Where the tree lands, wires, ways out. */
   Zones check(Grade grade, Setup setup, Route route, TreeSide tree, boolean full) {
     double share = tree.movable() ? Math.max(0, tree.steerShare()) : Double.POSITIVE_INFINITY;
     Landed landed = falls.computeIfAbsent(new Fall(setup.layDeg(), share), this::land);
     TargetClearance nearest = targets(grade, landed);
     dropZone(grade, landed);
     wires(grade, landed);
-    line(grade, setup, route);
-    List<Position> path = path(route);
+    List<Position> path = route.path();
     Angles angles = angles(path);
     double back = setup.layDeg() + Math.toDegrees(Math.atan2(tree.vgM(), tree.ugM()));
     SitBackZone sitBack =
@@ -180,7 +114,11 @@ final class Landing {
             o ->
                 escapes.ends(
                     new EscapeRoutes.Zones(
-                        landed.footprint(), sitBack, angles.bights(), angles.recoil(), legs(route)),
+                        landed.footprint(),
+                        sitBack,
+                        angles.bights(),
+                        angles.recoil(),
+                        route.legs()),
                     rules.escapeLengthM().value(),
                     site.tree().heightM().value()));
     grade.rule(
@@ -216,7 +154,7 @@ final class Landing {
         f,
         targets.clearances(f),
         dropZone == null ? null : dropZone.of(f),
-        wiresKnown ? wires.inLay(f, approach()) : List.of());
+        knowledge.ofWires() ? wires.inLay(f, knowledge.approach()) : List.of());
   }
 
   private TargetClearance targets(Grade grade, Landed landed) {
@@ -322,90 +260,6 @@ final class Landing {
     }
   }
 
-  private void line(Grade grade, Setup setup, Route route) {
-    for (Passed p : passed.computeIfAbsent(setup.withLay(0), w -> passing(setup, route))) {
-      LegCheck.Passing what = p.what();
-      boolean over = what.clearanceM() <= 0;
-      grade.plain(
-          "line clear of " + what.what() + (p.leg() > 0 ? ", leg " + (p.leg() + 1) : ""),
-          what.clearanceM(),
-          what.askedM(),
-          "m",
-          Math.max(0, what.clearanceM()) / what.askedM(),
-          what.place(),
-          () ->
-              over
-                  ? "The line runs over or through "
-                      + what.what()
-                      + (movable(what.what()) ? "; move it before the work." : ".")
-                  : "The line passes "
-                      + what.what()
-                      + " at "
-                      + in.length(what.clearanceM())
-                      + " of "
-                      + in.length(what.askedM())
-                      + " asked.");
-    }
-  }
-
-  private boolean movable(String id) {
-    return site.targets().stream().anyMatch(t -> t.id().equals(id) && t.movable());
-  }
-
-  /** What the legs pass within ten times the distance asked; the rest is plainly clear. */
-  private List<Passed> passing(Setup setup, Route route) {
-    List<Passed> all = new ArrayList<>();
-    List<Leg> list = legs(route);
-    List<LinePoint> points = points(route);
-    for (int i = 0; i < list.size(); i++) {
-      double error = Math.max(error(points.get(i).id()), error(points.get(i + 1).id()));
-      for (LegCheck.Passing p :
-          legs.passing(list.get(i), error, w -> approach(w).orElseThrow() + error)) {
-        boolean wire = site.wires().stream().anyMatch(w -> w.id().equals(p.what()));
-        if (wire || p.clearanceM() < NEAR * p.askedM()) {
-          all.add(new Passed(i, p));
-        }
-      }
-    }
-    return all;
-  }
-
-  /** Multiple of what is asked beyond which a thing beside the line is not listed. */
-  private static final double NEAR = 10;
-
-  private double error(String id) {
-    return id.equals(site.tree().id())
-        ? site.tree().stump().errorM()
-        : Route.place(site, id).errorM();
-  }
-
-  private static List<LinePoint> points(Route route) {
-    List<LinePoint> points = new ArrayList<>(route.line());
-    if (!route.haulOnSite().isEmpty()) {
-      points.add(route.haulOnSite().get(1));
-    }
-    return points;
-  }
-
-  private static List<Position> path(Route route) {
-    return points(route).stream().map(LinePoint::at).toList();
-  }
-
-  private static List<Leg> legs(Route route) {
-    List<LinePoint> p = points(route);
-    List<Leg> legs = new ArrayList<>();
-    for (int i = 0; i + 1 < p.size(); i++) {
-      legs.add(
-          new Leg(
-              p.get(i).at(),
-              p.get(i).elevationM(),
-              p.get(i + 1).at(),
-              p.get(i + 1).elevationM(),
-              Set.of(p.get(i).id(), p.get(i + 1).id())));
-    }
-    return legs;
-  }
-
   private Ground ground(
       Landed landed, SitBackZone sitBack, Angles angles, List<Position> ways, Setup setup) {
     double height = site.tree().heightM().value();
@@ -456,7 +310,7 @@ final class Landing {
       }
     }
     for (Target t : site.targets()) {
-      if (!mattersToALine(t) && t.kind() == Target.Kind.ROAD && crosses(t, route)) {
+      if (!LineRun.matters(t) && t.kind() == Target.Kind.ROAD && crosses(t, route)) {
         notes.add("The line runs along or over " + t.id() + ": close it for the work.");
       }
     }
@@ -472,87 +326,14 @@ final class Landing {
   }
 
   private static boolean crosses(Target t, Route route) {
-    List<Position> path = path(route);
+    List<Position> path = route.path();
     return t.shape()
         .geometry()
         .intersects(
-            org.fallwright.core.site.Shape.FACTORY.createLineString(
+            Shape.FACTORY.createLineString(
                 path.stream()
-                    .map(p -> new org.locationtech.jts.geom.Coordinate(p.eastM(), p.northM()))
-                    .toArray(org.locationtech.jts.geom.Coordinate[]::new)));
-  }
-
-  /** People at the source. */
-  void people(Grade grade, Setup setup, Zones zones, PullOffer offer) {
-    String at = setup.driver() == null ? setup.place() : setup.driver().place();
-    Place place = Route.place(site, at);
-    if (offer.operators() > 0) {
-      // the operator stands at the end of the last leg, a corner of its own angle
-      List<Bight> others =
-          zones.angles().bights().isEmpty()
-              ? List.of()
-              : zones.angles().bights().subList(0, zones.angles().bights().size() - 1);
-      OperatorPlace o =
-          OperatorPlace.of(place.at(), zones.footprint(), others, zones.angles().recoil());
-      double height = site.tree().heightM().value();
-      double asked = rules.operatorRadiusFactor().value() * height;
-      boolean far = rules.operatorRadiusFactor().metBy(o.fromStumpM(), height);
-      String stands =
-          "Who works the source stands "
-              + in.length(o.fromStumpM())
-              + " from the stump; "
-              + in.length(asked)
-              + " are asked";
-      if (!far && rules.teamException().yes()) {
-        grade.tightAtBest(
-            "operator distance",
-            o.fromStumpM(),
-            asked,
-            "m",
-            place.at(),
-            () -> stands + ": only as one of the team, named on the sheet with the reason.");
-      } else {
-        grade.rule(
-            "operator distance",
-            o.fromStumpM(),
-            asked,
-            "m",
-            far
-                ? Math.max(1, o.fromStumpM() / asked)
-                : Math.min(o.fromStumpM() / asked, Math.nextDown(1.0)),
-            place.at(),
-            () -> stands + (far ? "." : ", and these rules know no exception."));
-      }
-      boolean clear = o.outsideFootprint() && o.outsideBights();
-      grade.rule(
-          "operator clear",
-          clear ? 1 : 0,
-          1,
-          "",
-          clear ? Double.POSITIVE_INFINITY : 0,
-          place.at(),
-          () ->
-              clear
-                  ? "Who works the source stands outside the footprint and every other angle of the"
-                      + " line."
-                  : "Who works the source would stand "
-                      + (o.outsideFootprint()
-                          ? "inside an angle of the line."
-                          : "where the tree can fall."));
-    }
-    if (!offer.captured() && !offer.powered() && offer.operators() > 0) {
-      boolean refused = rules.freeHand() == RuleSet.FreeHand.REFUSED;
-      String why =
-          "People pull with nothing that holds the line"
-              + (refused
-                  ? "; these rules refuse that."
-                  : ": a swaying pull rocks the tree while it is cut. Use a device that holds.");
-      if (refused) {
-        grade.factored("free hand", 0, 1, "", 0, place.at(), () -> why);
-      } else {
-        grade.tightAtBest("free hand", 0, 1, "", place.at(), () -> why);
-      }
-    }
+                    .map(p -> new Coordinate(p.eastM(), p.northM()))
+                    .toArray(Coordinate[]::new)));
   }
 
   private static double normal(double deg) {

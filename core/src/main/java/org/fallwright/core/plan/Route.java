@@ -2,6 +2,7 @@ package org.fallwright.core.plan;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Set;
 import org.fallwright.core.line.LegLoads;
 import org.fallwright.core.line.Point3;
 import org.fallwright.core.pull.PullSource;
@@ -11,6 +12,7 @@ import org.fallwright.core.site.Place;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Spot;
+import org.fallwright.core.zones.Leg;
 
 /**
  * Where the line of a way runs in space; the same for every lay.
@@ -112,5 +114,35 @@ record Route(
         p.at().eastM() - stump.at().eastM(),
         p.at().northM() - stump.at().northM(),
         p.elevationM() - stump.groundM() - site.cut().heightM());
+  }
+
+  /** Points of line and haul, from the tree outwards. */
+  List<LinePoint> all() {
+    List<LinePoint> points = new ArrayList<>(line);
+    if (!haulOnSite.isEmpty()) {
+      points.add(haulOnSite.get(1));
+    }
+    return points;
+  }
+
+  /** The same in plan. */
+  List<Position> path() {
+    return all().stream().map(LinePoint::at).toList();
+  }
+
+  /** The legs between them. */
+  List<Leg> legs() {
+    List<LinePoint> p = all();
+    List<Leg> legs = new ArrayList<>();
+    for (int i = 0; i + 1 < p.size(); i++) {
+      legs.add(
+          new Leg(
+              p.get(i).at(),
+              p.get(i).elevationM(),
+              p.get(i + 1).at(),
+              p.get(i + 1).elevationM(),
+              Set.of(p.get(i).id(), p.get(i + 1).id())));
+    }
+    return legs;
   }
 }
