@@ -12,7 +12,7 @@ import org.locationtech.jts.geom.Envelope;
 /** Chooses the part of the site that the sheet shows and its scale. */
 final class MapScale {
   private static final int[] ROUND = {
-    50, 100, 200, 250, 300, 400, 500, 750, 1000, 1250, 1500, 2000, 2500, 5000, 10_000, 20_000
+    50, 100, 200, 250, 300, 400, 500, 600, 750, 1000, 1250, 1500, 2000, 2500, 5000, 10_000, 20_000
   };
 
   /** Room about what must be seen [m]. */

@@ -287,7 +287,7 @@ final class SheetPainter {
       y = pen.item("–", note, SMALL, x, y, width, 3);
     }
     return shown < all.size()
-        ? pen.line((all.size() - shown) + " more are in the plan document.", SMALL, x, y)
+        ? pen.line((all.size() - shown) + " more in the plan document.", SMALL, x, y)
         : y;
   }
 
@@ -313,7 +313,7 @@ final class SheetPainter {
       y = pen.line("None worked out: see the sentence above.", BODY, x, y);
     }
     if (shown < rows.size()) {
-      y = pen.line((rows.size() - shown) + " more parts are in the plan document.", SMALL, x, y);
+      y = pen.line((rows.size() - shown) + " more parts in the plan document.", SMALL, x, y);
     }
     return pen.wrapped(
         "At most: the source stalls, slips or jerks. × over what is allowed.",
@@ -347,7 +347,7 @@ final class SheetPainter {
       y = pen.wrapped(u.text(), BODY, x + 12, y, width - 12, 3) + 1;
     }
     if (shown < all.size()) {
-      y = pen.line((all.size() - shown) + " more checks are in the plan document.", SMALL, x, y);
+      y = pen.line((all.size() - shown) + " more checks in the plan document.", SMALL, x, y);
     }
     return y;
   }
@@ -375,7 +375,7 @@ final class SheetPainter {
     List<String> shown = items;
     for (int n = items.size() - 1; n >= 0 && items(measure, shown, 0, 0, width) > height; n--) {
       shown = new ArrayList<>(items.subList(0, n));
-      shown.add((items.size() - n) + " more are in the plan document.");
+      shown.add((items.size() - n) + " more in the plan document.");
     }
     return shown;
   }
