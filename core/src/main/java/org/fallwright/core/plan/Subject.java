@@ -39,12 +39,13 @@ final class Subject {
     figures = TreeFigures.of(tree, cut, species);
     wood =
         new Wood(
-            species.morPa().value(),
+            species.morResists(),
             species.morCv().value(),
             species.moePa().value(),
             species.shearPa().value(),
             species.crushPa().value(),
-            species.knotFactor().value());
+            species.knotFactor().value(),
+            species.morHolds());
     Conditions day = site.conditions();
     double leaf = species.broadleaf() && !tree.inLeaf() ? Allowances.LEAFLESS_DRAG.value() : 1;
     wind =
