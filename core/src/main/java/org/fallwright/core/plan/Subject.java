@@ -87,12 +87,8 @@ final class Subject {
   PullCase pull(Setup setup, Route route) {
     SubjectTree tree = site.tree();
     CutPlan cut = site.cut();
-    Position shift = tree.crownOffsetM();
-    double share = tree.crownShare() == null ? 0 : tree.crownShare();
-    Point3 crown =
-        shift == null
-            ? new Point3(0, 0, 0)
-            : new Point3(share * shift.eastM(), share * shift.northM(), 0);
+    Position shift = figures.crownShiftM();
+    Point3 crown = new Point3(shift.eastM(), shift.northM(), 0);
     TreeBody body =
         new TreeBody(
             tree.heightM().value(),

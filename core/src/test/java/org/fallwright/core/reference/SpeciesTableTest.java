@@ -66,6 +66,26 @@ class SpeciesTableTest {
     assertThat(fir.densityHigh()).isEqualTo(850);
   }
 
+  /** Low where the wood must hold, high where it resists; nothing else tells the two apart. */
+  @Test
+  void sourcesThatDisagreeOnRuptureBothStay() {
+    Species sitka = SpeciesTable.of("sitka-spruce");
+    assertThat(sitka.morHolds()).isEqualTo(34e6);
+    assertThat(sitka.morResists()).isEqualTo(39.3e6);
+    Species elm = SpeciesTable.of("american-elm");
+    assertThat(elm.morHolds()).isEqualTo(elm.morResists()).isEqualTo(elm.morPa().value());
+    for (Species s : SpeciesTable.all()) {
+      assertThat(s.morPa().value()).as(s.key()).isBetween(s.morHolds(), s.morResists());
+    }
+  }
+
+  @Test
+  void everySpeciesHasItsOwnNameInBothLanguages() {
+    assertThat(SpeciesTable.all().stream().map(Species::spanish).distinct())
+        .hasSize(SpeciesTable.all().size());
+    assertThat(SpeciesTable.of("northern-red-oak").spanish()).isEqualTo("roble rojo americano");
+  }
+
   @Test
   void aBareBroadleafHasLessDragAndAConiferHasNot() {
     Species oak = SpeciesTable.of("northern-red-oak");
