@@ -69,8 +69,11 @@ public final class DemoLike {
             null,
             null,
             null,
+            null,
+            null,
             false,
-            true);
+            true,
+            false);
     return new Site(
         1,
         "Oak behind the house",

@@ -14,7 +14,7 @@ final class SiteTables implements AnchorFigures {
   public WoodFigures wood(String species, Anchor.Soil soil, boolean deepRooting) {
     Species s = SpeciesTable.of(species);
     return new WoodFigures(
-        s.morPa().value(),
+        s.morHolds(),
         s.morCv().value(),
         s.densityLow(),
         s.rootPlate(soil, deepRooting).value(),

@@ -39,12 +39,13 @@ final class Subject {
     figures = TreeFigures.of(tree, cut, species);
     wood =
         new Wood(
-            species.morPa().value(),
+            species.morResists(),
             species.morCv().value(),
             species.moePa().value(),
             species.shearPa().value(),
             species.crushPa().value(),
-            species.knotFactor().value());
+            species.knotFactor().value(),
+            species.morHolds());
     Conditions day = site.conditions();
     double leaf = species.broadleaf() && !tree.inLeaf() ? Allowances.LEAFLESS_DRAG.value() : 1;
     wind =
@@ -90,12 +91,8 @@ final class Subject {
   PullCase pull(Setup setup, Route route) {
     SubjectTree tree = site.tree();
     CutPlan cut = site.cut();
-    Position shift = tree.crownOffsetM();
-    double share = tree.crownShare() == null ? 0 : tree.crownShare();
-    Point3 crown =
-        shift == null
-            ? new Point3(0, 0, 0)
-            : new Point3(share * shift.eastM(), share * shift.northM(), 0);
+    Position shift = figures.crownShiftM();
+    Point3 crown = new Point3(shift.eastM(), shift.northM(), 0);
     TreeBody body =
         new TreeBody(
             tree.heightM().value(),

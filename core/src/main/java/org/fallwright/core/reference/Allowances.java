@@ -373,6 +373,12 @@ public final class Allowances {
           0.5,
           "",
           "standard deviation of a bearing point aside, over its position error");
+  public static final Figure ICE_OR_WET_CROWN =
+      allowance(
+          "ice-or-wet-crown",
+          1.25,
+          "",
+          "crown's mass under rain, wet snow or rime over its mass without; glaze can be far more");
   public static final Figure MASS_CENTRE_SHARE =
       allowance(
           "mass-centre-share",

@@ -12,13 +12,16 @@ import org.fallwright.core.units.Range;
  *
  * @param key stable name
  * @param name English name
+ * @param spanish Spanish name
  * @param latin botanical name
  * @param broadleaf whether it bears leaves that it sheds (else a conifer)
  * @param massGroup number of its group of mass equations, 1 to 10
  * @param greenDensity green density of the stem with bark [kg/m³], nominal
  * @param otherDensities green densities that other sources give [kg/m³]
+ * @param moisture moisture of its green wood; null: not known
  * @param dryToGreen green mass over dry mass, wood and bark of the stem
- * @param morPa mean green modulus of rupture [Pa]
+ * @param morPa mean green modulus of rupture [Pa], nominal
+ * @param otherMors the same as other sources give it [Pa]
  * @param morCv its coefficient of variation
  * @param moePa mean green modulus of elasticity in bending [Pa]
  * @param shearPa mean green shear strength along the grain [Pa]
@@ -33,13 +36,16 @@ import org.fallwright.core.units.Range;
 public record Species(
     String key,
     String name,
+    String spanish,
     String latin,
     boolean broadleaf,
     int massGroup,
     Figure greenDensity,
     List<Figure> otherDensities,
+    Moisture moisture,
     Figure dryToGreen,
     Figure morPa,
+    List<Figure> otherMors,
     Figure morCv,
     Figure moePa,
     Figure shearPa,
@@ -52,6 +58,7 @@ public record Species(
   public Species {
     Range.text("key", key);
     Range.text("name", name);
+    Range.text("spanish", spanish);
     Range.text("latin", latin);
     Range.check("mass_group", massGroup, 1, 10, "");
     within(greenDensity, 300, 1400);
@@ -59,6 +66,8 @@ public record Species(
     otherDensities.forEach(d -> within(d, 300, 1400));
     within(dryToGreen, 1.2, 2.6);
     within(morPa, 15e6, 150e6);
+    otherMors = List.copyOf(otherMors);
+    otherMors.forEach(m -> within(m, 15e6, 150e6));
     within(morCv, 0.05, 0.4);
     within(moePa, 2e9, 20e9);
     within(shearPa, 2e6, 20e6);
@@ -81,6 +90,18 @@ public record Species(
   /** The greatest green density that any source gives [kg/m³]: where mass resists. */
   public double densityHigh() {
     return densities().mapToDouble(Figure::value).max().orElseThrow();
+  }
+
+  /** The least rupture strength that any source gives [Pa]: where it holds. */
+  public double morHolds() {
+    return mors().mapToDouble(Figure::value).min().orElseThrow();
+  }
+
+  /**
+   * The greatest rupture strength that any source gives [Pa]: where it resists, as a hinge does.
+   */
+  public double morResists() {
+    return mors().mapToDouble(Figure::value).max().orElseThrow();
   }
 
   /**
@@ -111,7 +132,9 @@ public record Species(
   public List<Figure> figures() {
     return Stream.of(
             densities(),
-            Stream.of(dryToGreen, morPa, morCv, moePa, shearPa, crushPa, knotFactor, dragC, dragN),
+            moisture == null ? Stream.<Figure>of() : moisture.figures(),
+            mors(),
+            Stream.of(dryToGreen, morCv, moePa, shearPa, crushPa, knotFactor, dragC, dragN),
             shallowPlate.values().stream(),
             deepPlate.values().stream())
         .flatMap(f -> f)
@@ -121,6 +144,10 @@ public record Species(
   /** The figures that no source gives for this species, so that ours stand in for them. */
   public List<Figure> assumed() {
     return figures().stream().filter(f -> f.kind() == Kind.PLANNING_ALLOWANCE).toList();
+  }
+
+  private Stream<Figure> mors() {
+    return Stream.concat(Stream.of(morPa), otherMors.stream());
   }
 
   private Stream<Figure> densities() {

@@ -34,14 +34,19 @@ public final class SpeciesTable {
   /** Root-plate constants in the order of {@link Anchor.Soil}. */
   private record Plate(List<Double> shallow, List<Double> deep, String source, Kind kind) {}
 
+  /** Specific gravity and moisture of heart and sap [%]; null where not known. */
+  private record Wet(Cell gravity, Cell heart, Cell sap) {}
+
   private record Row(
       String name,
+      String spanish,
       String latin,
       boolean broadleaf,
       int massGroup,
       List<Cell> greenDensity,
+      Wet moisture,
       Cell dryToGreen,
-      Cell morMPa,
+      List<Cell> morMPa,
       Cell morCv,
       Cell moeGPa,
       Cell shearMPa,
@@ -59,28 +64,41 @@ public final class SpeciesTable {
   }
 
   private static Species species(String key, Row r) {
-    Figure mor = figure(key, "rupture", r.morMPa(), 1e6, "Pa");
+    List<Figure> mors = r.morMPa().stream().map(c -> figure(key, "rupture", c, 1e6, "Pa")).toList();
+    double least = mors.stream().mapToDouble(Figure::value).min().orElseThrow();
     List<Figure> densities =
         r.greenDensity().stream().map(c -> figure(key, "green-density", c, 1, "kg/m³")).toList();
     return new Species(
         key,
         r.name(),
+        r.spanish(),
         r.latin(),
         r.broadleaf(),
         r.massGroup(),
         densities.get(0),
         densities.subList(1, densities.size()),
+        moisture(key, r.moisture()),
         figure(key, "dry-to-green", r.dryToGreen(), 1, ""),
-        mor,
+        mors.get(0),
+        mors.subList(1, mors.size()),
         or(key, "rupture-cv", r.morCv(), 1, "", Allowances.RUPTURE_CV, 1),
         figure(key, "elasticity", r.moeGPa(), 1e9, "Pa"),
-        or(key, "shear", r.shearMPa(), 1e6, "Pa", Allowances.SHEAR_OVER_RUPTURE, mor.value()),
-        or(key, "crushing", r.crushMPa(), 1e6, "Pa", Allowances.CRUSH_OVER_RUPTURE, mor.value()),
+        or(key, "shear", r.shearMPa(), 1e6, "Pa", Allowances.SHEAR_OVER_RUPTURE, least),
+        or(key, "crushing", r.crushMPa(), 1e6, "Pa", Allowances.CRUSH_OVER_RUPTURE, least),
         or(key, "knot-factor", r.knotFactor(), 1, "", Allowances.KNOT_FACTOR, 1),
         figure(key, "drag-c", r.dragC(), 1, ""),
         figure(key, "drag-n", r.dragN(), 1, ""),
         plate(key, r.rootPlate(), false),
         plate(key, r.rootPlate(), true));
+  }
+
+  private static Moisture moisture(String key, Wet w) {
+    return w == null
+        ? null
+        : new Moisture(
+            figure(key, "gravity", w.gravity(), 1, ""),
+            figure(key, "heart-moisture", w.heart(), 1, "%"),
+            figure(key, "sap-moisture", w.sap(), 1, "%"));
   }
 
   private static Figure figure(String species, String what, Cell c, double scale, String unit) {

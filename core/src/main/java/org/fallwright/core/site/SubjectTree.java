@@ -19,13 +19,19 @@ import org.fallwright.core.units.Range;
  * @param leanAzimuthDeg direction the tree leans towards [degrees from true north]
  * @param massKg green mass above the cut [kg]; null: from the mass equation
  * @param massCentreM height of the mass centre above the ground [m]; null: 0.40 of the height
- * @param crownShare share of the mass that is crown [0 to 1]; null: none of it set aside
+ * @param sections what its weighed pieces add up to, in place of mass and mass centre; null: not
+ *     weighed
+ * @param crownShare share of the mass that is crown [0 to 1]; null: by DBH, where an offset or an
+ *     outline of the crown is given
  * @param crownOffsetM offset of the crown's middle from the stem axis, [east, north] [m]; null:
  *     none
+ * @param crownOutline the crown seen from above, on the site plane, in place of its offset; null:
+ *     not drawn
  * @param crownAreaM2 frontal area of the crown [m²]; null: ellipse of its width and depth
  * @param shellM thickness of the sound shell at the cut and up the stem [m]; null: sound through
  * @param deadOrDecayed whether the wood at the hinge is dead or decayed
  * @param inLeaf whether the crown is in leaf
+ * @param iceOrWet whether ice, wet snow or rain loads the crown
  */
 public record SubjectTree(
     String id,
@@ -41,12 +47,18 @@ public record SubjectTree(
     Quantity leanAzimuthDeg,
     Quantity massKg,
     Quantity massCentreM,
+    List<WeighedSection> sections,
     Double crownShare,
     Position crownOffsetM,
+    Shape.Polygon crownOutline,
     Double crownAreaM2,
     Double shellM,
     boolean deadOrDecayed,
-    boolean inLeaf) {
+    boolean inLeaf,
+    boolean iceOrWet) {
+  /** Farthest a point of the crown's outline may lie from the stump [m]. */
+  public static final double OUTLINE_FARTHEST = 100;
+
   public SubjectTree {
     Range.text("id", id);
     Range.text("species", species);
@@ -67,11 +79,37 @@ public record SubjectTree(
     if (massCentreM != null) {
       massCentreM.within("mass_centre_m", 0.5, heightM.value(), "m");
     }
+    if (sections != null) {
+      sections = List.copyOf(sections);
+      if (sections.isEmpty()) {
+        throw new IllegalArgumentException("sections is empty; it must have at least one, or null");
+      }
+      for (WeighedSection s : sections) {
+        Range.check("sections.mid_height_m", s.midHeightM(), 0, heightM.value(), "m");
+      }
+      double together = sections.stream().mapToDouble(WeighedSection::massKg).sum();
+      Range.check("sections.mass_kg, added up,", together, 10, 500_000, "kg");
+      oneOf("sections", sections, "mass_kg", massKg);
+      oneOf("sections", sections, "mass_centre_m", massCentreM);
+    }
+    if (crownOutline != null) {
+      double far =
+          crownOutline.points().stream().mapToDouble(stump.at()::distanceTo).max().orElseThrow();
+      Range.check("crown_outline.points farthest off the stump", far, 0, OUTLINE_FARTHEST, "m");
+    }
+    oneOf("crown_outline", crownOutline, "crown_offset_m", crownOffsetM);
     Range.checkOrNull("crown_share", crownShare, 0, 1, "");
     Range.checkOrNull("crown_area_m2", crownAreaM2, 0, 5000, "m²");
     Range.checkOrNull("shell_m", shellM, 0.001, 3, "m");
     for (StemDiameter d : diameters) {
       Range.check("diameters.height_m", d.heightM(), 0, heightM.value(), "m");
+    }
+  }
+
+  private static void oneOf(String field, Object stated, String other, Object alsoStated) {
+    if (stated != null && alsoStated != null) {
+      throw new IllegalArgumentException(
+          field + " is stated and so is " + other + "; one of them must be null");
     }
   }
 }

@@ -24,7 +24,7 @@ final class ForceBalance {
 
   /** Tension at which the hinge alone, in calm air, lets the tree move [N]. */
   static double letsGo(Posture p, double phi) {
-    return (p.hingeNm - p.weightMoment(phi)) / p.lever(phi);
+    return (p.holdsShare * p.hingeNm - p.weightMoment(phi)) / p.lever(phi);
   }
 
   /** Back-lean against what the stump's edge holds; 1 where the tree just rocks back. */

@@ -16,7 +16,7 @@ final class HingeStress {
     double ev = (p.pv - p.va) / leg;
     double ew = (p.pw - p.wa(phi)) / leg;
     double side = p.weightN * p.vg + tensionN * (p.wa(phi) * ev - p.va * ew);
-    return (sign * side + p.windAsideNm) / (p.draw.morPa() * section(p));
+    return (sign * side + p.windAsideNm) / (p.holdsShare * p.draw.morPa() * section(p));
   }
 
   /** Turning share of one sign at one angle and tension. */

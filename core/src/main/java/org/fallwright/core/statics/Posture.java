@@ -18,6 +18,10 @@ final class Posture {
   final HingeShape hinge;
   final double weightN;
   final double hingeNm;
+
+  /** Share of the rupture strength that may be counted on where the hinge holds. */
+  final double holdsShare;
+
   final double windNm;
   final double windAsideNm;
 
@@ -73,6 +77,7 @@ final class Posture {
     pw = p.up();
     weightN = d.massKg() * G;
     hingeNm = HingeMoment.of(d.hingeFactor(), d.morPa(), hinge.widthM(), hinge.thicknessM());
+    holdsShare = c.wood().holdsShare();
     WindMoment wind = WindMoment.of(c.wind(), d.gustMps(), d.drag(), c.layDeg());
     windNm = wind.againstNm();
     windAsideNm = wind.asideNm();

@@ -23,7 +23,7 @@ record StemStrength(double tensionN, double sectionM) {
     Point3 leg = c.line().bearing().minus(a);
     double length = leg.length();
     double strength =
-        c.wood().knotFactor() * c.wood().morPa() * (1 - OneAtATime.Z * c.wood().morCv());
+        c.wood().knotFactor() * c.wood().morHoldsPa() * (1 - OneAtATime.Z * c.wood().morCv());
     double least = Double.POSITIVE_INFINITY;
     double where = 0;
     for (int i = 1; i * STEP < c.line().attachHeightM(); i++) {

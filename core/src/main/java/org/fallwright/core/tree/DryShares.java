@@ -36,6 +36,11 @@ public record DryShares(double wood, double bark, double foliage) {
     return 1 - wood - bark - foliage;
   }
 
+  /** Share of the crown in a tree that has shed its leaves. */
+  public double bareCrown() {
+    return branches() / (1 - foliage);
+  }
+
   /** Share of the crown: branches and leaves. */
   public double crown() {
     return branches() + foliage;

@@ -67,6 +67,54 @@ class SpeciesReferenceTest {
     assertThat(s.moePa().value()).isCloseTo(moe, within(0.02 * moe));
   }
 
+  /**
+   * European and plantation species: green rupture [MPa] and elasticity [GPa] after Lavers 1969,
+   * and what knots leave, as carried by a public wind-risk model.
+   */
+  @ParameterizedTest(name = "{0}")
+  @CsvSource({
+    "sitka-spruce, 34, 5.9, 1.00",
+    "norway-spruce, 36, 6.3, 0.90",
+    "scots-pine, 46, 7.3, 0.85",
+    "corsican-pine, 41, 7.9, 0.85",
+    "maritime-pine, 36, 6.6, 0.85",
+    "radiata-pine, 32, 6.8, 1.00",
+    "european-larch, 53, 7.9, 0.85",
+    "japanese-larch, 48, 6.8, 0.85",
+    "hybrid-larch, 43, 5.9, 0.85",
+    "noble-fir, 35, 5.7, 1.00",
+    "silver-birch, 63, 9.9, 1.00",
+    "european-beech, 65, 9.8, 1.00",
+    "english-oak, 59, 8.3, 1.00"
+  })
+  void europeanGreenStrength(String key, double mor, double moe, double knots) {
+    Species s = SpeciesTable.of(key);
+    assertThat(s.morPa().value()).isEqualTo(mor * 1e6);
+    assertThat(s.moePa().value()).isCloseTo(moe * 1e9, within(1.0));
+    assertThat(s.knotFactor().value()).isEqualTo(knots);
+  }
+
+  /**
+   * Rupture [MPa] where two sources differ: the Wood Handbook's means, and after Lavers 1969 or for
+   * Canada as carried by a public wind-risk model.
+   */
+  @ParameterizedTest(name = "{0}")
+  @CsvSource({
+    "sitka-spruce, 34, 39.3",
+    "western-hemlock, 41, 46",
+    "grand-fir, 34, 40",
+    "lodgepole-pine, 38, 41",
+    "balsam-fir, 36.5, 38",
+    "black-spruce, 40.5, 42.1",
+    "white-spruce, 34.5, 35.2",
+    "jack-pine, 41, 43.5"
+  })
+  void ruptureWhereSourcesDiffer(String key, double holds, double resists) {
+    Species s = SpeciesTable.of(key);
+    assertThat(s.morHolds()).isEqualTo(holds * 1e6);
+    assertThat(s.morResists()).isEqualTo(resists * 1e6);
+  }
+
   /** USDA FPL-GTR-190 (2010) Table 5-3b, page read: psi and million psi; rounding 0.5 %. */
   @ParameterizedTest(name = "{0}")
   @CsvSource({
@@ -140,7 +188,9 @@ class SpeciesReferenceTest {
     "scots-pine, .546, .403, .325, .275",
     "lodgepole-pine, .581, .450, .376, .326",
     "douglas-fir-coast, .479, .361, .295, .252",
-    "grand-fir, .855, .634, .512, .434"
+    "grand-fir, .855, .634, .512, .434",
+    "noble-fir, .855, .634, .512, .434",
+    "corsican-pine, .631, .493, .413, .361"
   })
   void dragByWind(String key, double at10, double at15, double at20, double at25) {
     Species s = SpeciesTable.of(key);

@@ -28,6 +28,7 @@ import org.fallwright.core.site.Spot;
 import org.fallwright.core.site.StemDiameter;
 import org.fallwright.core.site.SubjectTree;
 import org.fallwright.core.site.Target;
+import org.fallwright.core.site.WeighedSection;
 import org.fallwright.core.site.Wire;
 
 /** Valid sites from a seed: every kind of thing, stated and not stated, over its whole range. */
@@ -90,10 +91,13 @@ final class RandomSites {
   }
 
   private SubjectTree tree(double height) {
+    boolean weighed = flag();
+    Place stump = place();
+    boolean drawn = flag() && inner(stump.at());
     return new SubjectTree(
         "tree",
         text(),
-        place(),
+        stump,
         quantity(0.05, 4),
         maybe(() -> quantity(0.05, 6)),
         list(0, 3, i -> new StemDiameter(in(0, height), in(0.01, 6))),
@@ -102,12 +106,15 @@ final class RandomSites {
         in(0.1, 40),
         quantity(0, 45),
         quantity(0, 360),
-        maybe(() -> quantity(10, 500_000)),
-        maybe(() -> quantity(0.5, height)),
+        weighed ? null : maybe(() -> quantity(10, 500_000)),
+        weighed ? null : maybe(() -> quantity(0.5, height)),
+        weighed ? list(1, 4, i -> new WeighedSection(in(10, 100_000), in(0, height))) : null,
         maybe(() -> in(0, 1)),
-        maybe(this::position),
+        drawn ? null : maybe(this::position),
+        drawn ? polygon(stump.at(), 90) : null,
         maybe(() -> in(0, 5000)),
         maybe(() -> in(0.001, 3)),
+        flag(),
         flag(),
         flag());
   }
@@ -149,12 +156,19 @@ final class RandomSites {
 
   /** Corners in the order of their bearings from a middle: never crossing. */
   private Shape.Polygon polygon() {
-    Position middle = new Position(in(-4000, 4000), in(-4000, 4000));
+    return polygon(new Position(in(-4000, 4000), in(-4000, 4000)), 900);
+  }
+
+  private static boolean inner(Position p) {
+    return Math.max(Math.abs(p.eastM()), Math.abs(p.northM())) < 4900;
+  }
+
+  private Shape.Polygon polygon(Position middle, double most) {
     int corners = 3 + random.nextInt(5);
     return new Shape.Polygon(
         IntStream.range(0, corners)
             .mapToObj(
-                i -> middle.along((i + random.nextDouble() * 0.9) * 360 / corners, in(1, 900)))
+                i -> middle.along((i + random.nextDouble() * 0.9) * 360 / corners, in(1, most)))
             .toList());
   }
 

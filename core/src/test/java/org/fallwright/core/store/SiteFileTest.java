@@ -33,6 +33,9 @@ class SiteFileTest {
     assertThat(site.version()).isEqualTo(1);
     assertThat(site.tree().dbhM().how()).isEqualTo(How.GUESSED);
     assertThat(site.tree().massKg()).isNull();
+    assertThat(site.tree().sections()).extracting(s -> s.midHeightM()).containsExactly(4.5, 11.0);
+    assertThat(site.tree().crownOutline()).isNull();
+    assertThat(site.tree().iceOrWet()).isTrue();
     assertThat(site.tree().crownOffsetM().northM()).isEqualTo(0.2);
     assertThat(site.anchors().get(3)).isInstanceOf(Anchor.RatedPoint.class);
     assertThat(site.found(Looked.What.BURIED_SERVICES)).isEqualTo(Looked.Found.NOT_LOOKED);

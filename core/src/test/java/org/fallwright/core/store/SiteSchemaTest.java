@@ -107,6 +107,28 @@ class SiteSchemaTest {
     assertThat(tried).isGreaterThan(2000);
   }
 
+  /** What is said twice is refused by both, whatever else the tree says. */
+  @Test
+  void itRefusesATreeThatIsWeighedTwiceOrDrawnTwice() throws IOException {
+    JsonNode mass =
+        SiteJson.MAPPER.readTree("{\"value\":3e3,\"how\":\"measured\",\"plus_minus\":null}");
+    JsonNode outline =
+        SiteJson.MAPPER.readTree("{\"type\":\"polygon\",\"points\":[[-15,5],[-9,5],[-12,10]]}");
+    for (int i = 0; i < 4; i++) {
+      JsonNode root = SiteJson.MAPPER.readTree(Samples.frozen());
+      ObjectNode tree = (ObjectNode) root.get("tree");
+      tree.set(i == 0 ? "mass_kg" : "sections", i == 0 ? mass : NODES.nullNode());
+      tree.set("mass_centre_m", i == 1 ? mass.deepCopy() : NODES.nullNode());
+      tree.set("crown_outline", i == 2 ? outline : NODES.nullNode());
+      if (i == 1) {
+        ((ObjectNode) tree.get("mass_centre_m")).put("value", 7);
+      }
+      boolean once = i == 1 || i == 3;
+      assertThat(verdict(root).equals("taken")).as("%d: %s", i, verdict(root)).isEqualTo(once);
+      assertThat(schema.validate(root).isEmpty()).as("schema, %d", i).isEqualTo(once);
+    }
+  }
+
   private static String verdict(JsonNode root) throws IOException {
     try {
       SiteFile.read(SiteJson.MAPPER.writeValueAsBytes(root), "changed");

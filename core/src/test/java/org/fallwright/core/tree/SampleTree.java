@@ -7,8 +7,10 @@ import org.fallwright.core.site.How;
 import org.fallwright.core.site.Place;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Quantity;
+import org.fallwright.core.site.Shape;
 import org.fallwright.core.site.StemDiameter;
 import org.fallwright.core.site.SubjectTree;
+import org.fallwright.core.site.WeighedSection;
 
 /** An invented northern red oak, DBH 0.52 m and 17.5 m high, and variations of it. */
 final class SampleTree {
@@ -50,7 +52,44 @@ final class SampleTree {
         null,
         null,
         null,
+        null,
+        null,
         false,
-        true);
+        true,
+        false);
+  }
+
+  /** The sample oak with what is known of its pieces and its crown. */
+  static SubjectTree crowned(
+      List<WeighedSection> sections,
+      Double crownShare,
+      Position crownOffset,
+      Shape.Polygon outline,
+      boolean inLeaf,
+      boolean iceOrWet) {
+    SubjectTree t = oak();
+    return new SubjectTree(
+        t.id(),
+        t.species(),
+        t.stump(),
+        t.dbhM(),
+        t.stumpDiameterM(),
+        t.diameters(),
+        t.heightM(),
+        t.crownBaseM(),
+        t.crownRadiusM(),
+        t.leanDeg(),
+        t.leanAzimuthDeg(),
+        null,
+        null,
+        sections,
+        crownShare,
+        crownOffset,
+        outline,
+        null,
+        null,
+        false,
+        inLeaf,
+        iceOrWet);
   }
 }

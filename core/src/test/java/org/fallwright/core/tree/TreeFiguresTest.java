@@ -83,8 +83,11 @@ class TreeFiguresTest {
             null,
             null,
             null,
+            null,
+            null,
             false,
-            true);
+            true,
+            false);
     assertThat(figures(wide).crownAreaM2()).isCloseTo(94.25, within(0.005));
     assertThat(figures(wide).crownMiddleM()).isEqualTo(14);
     assertThat(figures(t).crownAreaM2()).isCloseTo(81.3, within(0.05));
