@@ -96,6 +96,7 @@ public final class PlanJson {
     ObjectNode weakest = o.putObject("weakest");
     weakest.put("check", j.weakest().id());
     number(weakest, "ratio", j.weakest().ratio());
+    number(o, "standing", j.standing());
     ArrayNode checks = o.putArray("checks");
     j.checks().forEach(c -> checks.add(check(c)));
     ArrayNode loads = o.putArray("loads");
@@ -133,12 +134,12 @@ public final class PlanJson {
     number(o, "working_tension_N", f.workingN());
     number(o, "rest_share", f.restShare());
     number(o, "hold_stability", f.holdStability());
-    o.put("starts_itself", f.startsItself());
+    o.put("starts_itself", known(f.startsItself()));
     number(o, "pretension_top_N", f.pretensionTopN());
     number(o, "source_low_N", f.sourceLowN());
     number(o, "source_high_N", f.sourceHighN());
     number(o, "ceiling_N", f.ceilingN());
-    o.put("ceiling_part", f.ceilingPart());
+    o.put("ceiling_part", known(f.ceilingPart()));
     number(o, "pull_margin", f.pullMargin());
     number(o, "clearance_m", f.clearanceM());
     o.put("clearance_target", f.clearanceTarget());
@@ -155,7 +156,7 @@ public final class PlanJson {
     number(o, "line_length_m", f.lineLengthM());
     o.put("leans_on_stop_reading", f.leansOnStopReading());
     number(o, "stop_reading_N", f.stopReadingN());
-    o.put("stop_reading_at", f.stopReadingAt());
+    o.put("stop_reading_at", known(f.stopReadingAt()));
     number(o, "source_end_per_tree", f.sourceEndPerTree());
     o.put("runs_on_stretch", f.runsOnStretch());
   }
@@ -206,6 +207,10 @@ public final class PlanJson {
   private static void texts(ObjectNode o, String name, List<String> texts) {
     ArrayNode all = o.putArray(name);
     texts.forEach(all::add);
+  }
+
+  private static String known(String text) {
+    return text == null || text.isBlank() ? null : text;
   }
 
   private static void number(ObjectNode o, String name, double value) {

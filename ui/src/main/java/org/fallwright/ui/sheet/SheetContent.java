@@ -111,7 +111,7 @@ record SheetContent(
   /** What is on the sheet of one of a plan's setups; rank 1 is the best. */
   static SheetContent of(Site site, Plan plan, int rank, String program, String pictureFault) {
     Judged j = plan.ranked().get(rank - 1);
-    DisplayUnits in = DisplayUnits.valueOf(site.display().name());
+    DisplayUnits in = site.display().units();
     String subtitle =
         String.format(
             Locale.ROOT,
@@ -160,6 +160,10 @@ record SheetContent(
 
   private static List<Line> pull(DisplayUnits in, Figures f) {
     List<Line> lines = new ArrayList<>();
+    if (Double.isNaN(f.pullPlanN())) {
+      lines.add(new Line("Not worked out", "the tree cannot be moved this way"));
+      return lines;
+    }
     lines.add(
         new Line(
             "Source gives",

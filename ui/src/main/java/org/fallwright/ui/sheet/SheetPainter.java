@@ -8,6 +8,7 @@ import java.awt.RenderingHints;
 import java.awt.geom.Line2D;
 import java.awt.geom.Point2D;
 import java.awt.geom.Rectangle2D;
+import java.util.ArrayList;
 import java.util.List;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.site.Site;
@@ -39,6 +40,9 @@ final class SheetPainter {
 
   /** Least height of the plan. */
   private static final double LEAST_PLAN = 230;
+
+  /** How far the list of what is not known may stand out under the cautions. */
+  private static final double MORE_NOT_KNOWN = 12;
 
   private static final Font SMALL = SheetFonts.plain(7);
   private static final Font BODY = SheetFonts.plain(7.8);
@@ -92,22 +96,18 @@ final class SheetPainter {
   }
 
   /**
-   * Where the tables begin, so that they end above one height and leave what lies above another.
+   * Where the tables begin so that they end above a height; rows are left out where they would
+   * begin above another.
    */
   private double tablesTop(double bottom, double highest) {
     TextPen measure = new TextPen(null);
-    double middle = middleOfTables();
-    while (bottom - GAP - tables(null, measure, 0) < highest + GAP) {
-      double a = loads(measure, left, 0, middle - left);
-      double b = unsettled(null, measure, middle + GAP, 0, right - middle - GAP);
-      if (a >= b && mostLoads > 3) {
-        mostLoads--;
-      } else if (mostNotes > 2) {
-        mostNotes--;
-      } else if (mostUnsettled > 2) {
-        mostUnsettled--;
-      } else {
-        break;
+    double room = bottom - highest - 2 * GAP;
+    for (int floor : new int[] {6, 4, 2}) {
+      while (tables(null, measure, 0) > room
+          && Math.max(mostLoads, Math.max(mostNotes, mostUnsettled)) > floor) {
+        mostNotes = Math.max(floor, mostNotes - 1);
+        mostUnsettled = Math.max(floor, mostUnsettled - 1);
+        mostLoads = Math.max(floor, mostLoads - 1);
       }
     }
     return bottom - GAP - tables(null, measure, 0);
@@ -150,7 +150,7 @@ final class SheetPainter {
       x = to + 6;
     }
     y = MARGIN + boxHeight + 4;
-    return pen.wrapped(content.sentence(), SheetFonts.bold(9.5), left, y, right - left) + 4;
+    return pen.wrapped(content.sentence(), SheetFonts.bold(9.5), left, y, right - left, 3) + 4;
   }
 
   private void plan(Graphics2D g, Rectangle2D frame) {
@@ -237,8 +237,8 @@ final class SheetPainter {
     double names = 62;
     double at = y;
     for (SheetContent.Line l : lines) {
-      double a = pen.wrapped(l.name(), BODY_BOLD, x, at, names - 4);
-      double b = pen.wrapped(l.value(), BODY, x + names, at, width - names);
+      double a = pen.wrapped(l.name(), BODY_BOLD, x, at, names - 4, 2);
+      double b = pen.wrapped(l.value(), BODY, x + names, at, width - names, 3);
       at = Math.max(a, b) + 1.2;
     }
     return at;
@@ -248,7 +248,24 @@ final class SheetPainter {
     double middle = middleOfTables();
     double a = loads(pen, left, top, middle - left);
     double b = unsettled(g, pen, middle + GAP, top, right - middle - GAP);
-    return Math.max(a, b);
+    return a <= b
+        ? Math.max(b, notes(pen, left, a + 3, middle - left))
+        : Math.max(a, notes(pen, middle + GAP, b + 3, right - middle - GAP));
+  }
+
+  private double notes(TextPen pen, double x, double top, double width) {
+    List<String> all = content.notes();
+    if (all.isEmpty()) {
+      return top;
+    }
+    double y = pen.line("Take note", HEAD, x, top);
+    int shown = Math.min(all.size(), mostNotes);
+    for (String note : all.subList(0, shown)) {
+      y = pen.item("–", note, SMALL, x, y, width, 3);
+    }
+    return shown < all.size()
+        ? pen.line((all.size() - shown) + " more are in the plan document.", SMALL, x, y)
+        : y;
   }
 
   private double loads(TextPen pen, double x, double top, double width) {
@@ -280,7 +297,8 @@ final class SheetPainter {
         SMALL,
         x,
         y + 1,
-        width);
+        width,
+        2);
   }
 
   private static Font font(boolean over) {
@@ -303,22 +321,10 @@ final class SheetPainter {
         VerdictMark.paint(new Pen(mark, Color.WHITE), u.verdict(), x + 4, y + 5, 1, Color.BLACK);
         mark.dispose();
       }
-      y = pen.wrapped(u.text(), BODY, x + 12, y, width - 12) + 1;
+      y = pen.wrapped(u.text(), BODY, x + 12, y, width - 12, 3) + 1;
     }
     if (shown < all.size()) {
       y = pen.line((all.size() - shown) + " more checks are in the plan document.", SMALL, x, y);
-    }
-    if (!content.notes().isEmpty()) {
-      y = pen.line("Take note", HEAD, x, y + 3);
-      int notes = Math.min(content.notes().size(), mostNotes);
-      for (String note : content.notes().subList(0, notes)) {
-        y = pen.item("–", note, SMALL, x, y, width);
-      }
-      if (notes < content.notes().size()) {
-        y =
-            pen.line(
-                (content.notes().size() - notes) + " more are in the plan document.", SMALL, x, y);
-      }
     }
     return y;
   }
@@ -335,14 +341,26 @@ final class SheetPainter {
         items(pen, cautions.subList(half, cautions.size()), left + column + GAP, bottom, column);
     double x = left + 2 * (column + GAP);
     pen.line("Not known, not checked", HEAD, x, y);
-    double c = items(pen, content.notKnown(), x, bottom, column);
+    double room = Math.max(a, b) - bottom + MORE_NOT_KNOWN;
+    double c = items(pen, shortened(content.notKnown(), column, room), x, bottom, column);
     return Math.max(a, Math.max(b, c));
+  }
+
+  /** The items of a list that a column of some height holds, and how many it does not. */
+  private static List<String> shortened(List<String> items, double width, double height) {
+    TextPen measure = new TextPen(null);
+    List<String> shown = items;
+    for (int n = items.size() - 1; n >= 0 && items(measure, shown, 0, 0, width) > height; n--) {
+      shown = new ArrayList<>(items.subList(0, n));
+      shown.add((items.size() - n) + " more are in the plan document.");
+    }
+    return shown;
   }
 
   private static double items(TextPen pen, List<String> items, double x, double top, double width) {
     double y = top;
     for (String item : items) {
-      y = pen.item("–", item, SMALL, x, y, width) + 0.6;
+      y = pen.item("–", item, SMALL, x, y, width, 7) + 0.6;
     }
     return y;
   }

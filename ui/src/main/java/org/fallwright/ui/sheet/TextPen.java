@@ -55,20 +55,23 @@ final class TextPen {
     return line(fit(text, font, width), font, x, y);
   }
 
-  /** Lines broken between words; returns the lower edge. */
-  double wrapped(String text, Font font, double x, double y, double width) {
+  /** Lines broken between words, the rest cut where there are too many; returns the lower edge. */
+  double wrapped(String text, Font font, double x, double y, double width, int most) {
+    List<String> lines = lines(text, font, width);
     double at = y;
-    for (String l : lines(text, font, width)) {
-      at = line(l, font, x, at);
+    for (String l : lines.subList(0, Math.min(most, lines.size()))) {
+      boolean cut =
+          most < lines.size() && at + 1.5 * lineHeight(font) > y + most * lineHeight(font);
+      at = line(cut ? fit(l + " …", font, width) : l, font, x, at);
     }
     return at;
   }
 
   /** A list's item with its mark hanging to the left. */
-  double item(String mark, String text, Font font, double x, double y, double width) {
+  double item(String mark, String text, Font font, double x, double y, double width, int most) {
     double indent = width(mark + " ", font);
     line(mark, font, x, y);
-    return wrapped(text, font, x + indent, y, width - indent);
+    return wrapped(text, font, x + indent, y, width - indent, most);
   }
 
   /** A thin rule. */
@@ -84,7 +87,7 @@ final class TextPen {
     if (width(text, font) <= width) {
       return text;
     }
-    int end = text.length();
+    int end = text.endsWith(" …") ? text.length() - 2 : text.length();
     while (end > 0 && width(text.substring(0, end).stripTrailing() + "…", font) > width) {
       end = text.offsetByCodePoints(end, -1);
     }
