@@ -365,10 +365,12 @@ public final class DemoLike {
         setup,
         verdict,
         pull,
-        1.1,
+        margin / 1.25,
         List.of(),
         0,
-        "{verdict}: the source gives {ratio} times the pull to plan for.",
+        "Workable. Plan for 6.36 kN (1,430 lbf) on the line at the tree; "
+            + source
+            + " gives 9.31 kN. Weakest link: pull margin, 1.46 times what is asked.",
         f,
         checks,
         List.of(

@@ -1,5 +1,7 @@
 package org.fallwright.core.cut;
 
+import org.fallwright.core.reference.Allowances;
+
 /**
  * Shape of the hinge at the cut.
  *
@@ -27,7 +29,7 @@ public record HingeShape(
     double backCutM) {
 
   /** Share of the stem diameter that a hinge is wide by the rule of proportion (published). */
-  public static final double WIDTH_SHARE = 0.8;
+  public static final double WIDTH_SHARE = Allowances.STEERING_WIDTH_SHARE.value();
 
   /**
    * The hinge of a cut.

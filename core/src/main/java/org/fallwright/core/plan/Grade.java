@@ -1,5 +1,6 @@
 package org.fallwright.core.plan;
 
+import org.fallwright.core.reference.Allowances;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.Supplier;
@@ -16,7 +17,7 @@ final class Grade {
   /**
    * Ratio from which a check without a design factor of its own is workable; planning allowance.
    */
-  static final double WORKABLE = 1.25;
+  static final double WORKABLE = Allowances.WORKABLE_RATIO.value();
 
   private final boolean full;
   private final List<Check> checks = new ArrayList<>();

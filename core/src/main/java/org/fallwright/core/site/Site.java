@@ -116,6 +116,29 @@ public record Site(
     }
   }
 
+  /** The same site, shown in other units. */
+  public Site in(Display other) {
+    return new Site(
+        version,
+        name,
+        origin,
+        other,
+        ruleSet,
+        declinationDeg,
+        picture,
+        tree,
+        cut,
+        targets,
+        wires,
+        looked,
+        dropZones,
+        anchors,
+        spots,
+        gear,
+        conditions,
+        offer);
+  }
+
   public Optional<Anchor> anchor(String id) {
     return anchors.stream().filter(a -> a.id().equals(id)).findFirst();
   }

@@ -1,5 +1,7 @@
 package org.fallwright.core.statics;
 
+import org.fallwright.core.reference.Allowances;
+import org.fallwright.core.reference.Spreads;
 import java.util.function.ToDoubleFunction;
 
 /**
@@ -13,13 +15,13 @@ import java.util.function.ToDoubleFunction;
  */
 final class OneAtATime {
   /** Standard deviations from the mean to the 95th percentile of a normal quantity. */
-  static final double Z = 1.645;
+  static final double Z = Allowances.PERCENTILE_SDS.value();
 
-  private static final double DRAG_SD = 0.3;
-  private static final double LEAST_GUST_SD = 1;
-  private static final double K_MEAN = 1.25;
-  private static final double K_5 = 1.025;
-  private static final double K_95 = 1.475;
+  private static final double DRAG_SD = Allowances.DRAG_SD.value();
+  private static final double LEAST_GUST_SD = Spreads.GUST_LEAST_SD.value();
+  private static final double K_MEAN = Allowances.HINGE_K_MEAN.value();
+  private static final double K_5 = Allowances.HINGE_K_P05.value();
+  private static final double K_95 = Allowances.HINGE_K_P95.value();
 
   final Posture mean;
   private final Posture[] low = new Posture[Draw.COUNT];

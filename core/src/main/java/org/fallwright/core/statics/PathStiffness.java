@@ -1,6 +1,8 @@
 package org.fallwright.core.statics;
 
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.line.Point3;
+import org.fallwright.core.tree.StemTaper;
 
 /**
  * Stiffness of what the pull stretches, seen at the tree.
@@ -17,9 +19,9 @@ import org.fallwright.core.line.Point3;
  * @param lengthM all legs without a base leg [m]
  */
 record PathStiffness(double lineNPerM, double pathNPerM, double riseRad, double lengthM) {
-  private static final double SLICE = 0.5;
+  private static final double SLICE = Allowances.STEM_SLICE.value();
 
-  static PathStiffness of(PullCase c, StemTaperLine taper) {
+  static PathStiffness of(PullCase c, StemTaper taper) {
     LineSet line = c.line();
     Point3 from = StemStrength.attachment(c);
     double give = 0;
@@ -45,8 +47,8 @@ record PathStiffness(double lineNPerM, double pathNPerM, double riseRad, double 
     double bend = 0;
     for (int i = 0; i < slices; i++) {
       double z = (i + 0.5) * dz;
-      double d = taper.insideBark(z + c.tree().cutHeightM());
-      double ei = c.wood().moePa() * Math.PI * Math.pow(d, 4) / 64 * (1 - taper.loss(d));
+      double d = taper.insideBarkM(z + c.tree().cutHeightM());
+      double ei = c.wood().moePa() * Math.PI * Math.pow(d, 4) / 64 * (1 - c.tree().cavityLoss(d));
       bend += (wa - z) * (wa - z) * dz / ei;
     }
     double cos = Math.cos(rise);

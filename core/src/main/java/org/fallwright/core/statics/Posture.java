@@ -2,6 +2,7 @@ package org.fallwright.core.statics;
 
 import org.fallwright.core.cut.HingeShape;
 import org.fallwright.core.line.Point3;
+import org.fallwright.core.units.Units;
 
 /**
  * The tree on its hinge for one draw: everything derived, in the tree frame.
@@ -11,7 +12,7 @@ import org.fallwright.core.line.Point3;
  * w·cos φ.
  */
 final class Posture {
-  static final double G = 9.80665;
+  static final double G = Units.GRAVITY;
 
   final Draw draw;
   final HingeShape hinge;

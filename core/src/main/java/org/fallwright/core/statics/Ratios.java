@@ -1,5 +1,6 @@
 package org.fallwright.core.statics;
 
+import org.fallwright.core.reference.Allowances;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -28,27 +29,27 @@ public record Ratios(
    * Greatest share of the hinge's strength that steering, and turning, may take (planning
    * allowance).
    */
-  public static final double HINGE_SHARE = 0.45;
+  public static final double HINGE_SHARE = Allowances.STEERING_MOST.value();
 
   /** Greatest share of the compression strength in the hinge (planning allowance). */
-  public static final double CRUSH_SHARE = 1.0 / 3;
+  public static final double CRUSH_SHARE = Allowances.CRUSHING_MOST.value();
 
   /** Hold stability asked (planning allowance). */
-  public static final double STABILITY = 1.2;
+  public static final double STABILITY = Allowances.HOLD_STABILITY_ASKED.value();
 
   /** Rest share below which the tree still rests on its stump (planning allowance). */
-  public static final double REST = 0.7;
+  public static final double REST = Allowances.REST_LEAST.value();
 
   /** The same where wedges are set. */
-  public static final double REST_WEDGED = 0.85;
+  public static final double REST_WEDGED = Allowances.REST_LEAST_WEDGED.value();
 
   /** Design factor of the stem (planning allowance). */
-  public static final double STEM_DESIGN = 3;
+  public static final double STEM_DESIGN = Allowances.STEM_FACTOR.value();
 
   /** Last factor of the stem (planning allowance). */
-  public static final double STEM_LAST = 1.5;
+  public static final double STEM_LAST = Allowances.LAST_FACTOR.value();
 
-  private static final double NOTHING = 1e-9;
+  private static final double NOTHING = Allowances.DEMAND_NONE.value();
 
   /** The stem below the line as a part. */
   public static Part stem(TreeSide side) {

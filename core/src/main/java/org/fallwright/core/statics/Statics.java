@@ -1,12 +1,16 @@
 package org.fallwright.core.statics;
 
+import org.fallwright.core.tree.StemTaper;
+
+import org.fallwright.core.reference.Allowances;
+
 /**
  * The statics of one pull: what the tree asks of the line, and how it behaves on what a source
  * gives. Built for one case; immutable.
  */
 public final class Statics {
   /** A strongest hinge factor; planning allowance. */
-  private static final double STRONGEST_HINGE = 1.5;
+  private static final double STRONGEST_HINGE = Allowances.HINGE_K_MOST.value();
 
   private final PullCase c;
   private final Posture nominal;
@@ -54,7 +58,7 @@ public final class Statics {
     double hold = Math.max(0, spread.p95(ForceBalance::hold));
     double working = Math.max(plan, hold);
     double rest = spread.p95(ForceBalance::rest);
-    StemTaperLine taper = new StemTaperLine(c.tree());
+    StemTaper taper = c.tree().taper();
     PathStiffness stiff = PathStiffness.of(c, taper);
     StemStrength stem = StemStrength.of(c, taper);
     double shortening = nominal.leg(-back) - nominal.leg(end);

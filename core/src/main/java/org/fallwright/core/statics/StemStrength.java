@@ -1,6 +1,8 @@
 package org.fallwright.core.statics;
 
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.line.Point3;
+import org.fallwright.core.tree.StemTaper;
 
 /**
  * The tension at the tree that breaks the stem below the line.
@@ -14,9 +16,9 @@ import org.fallwright.core.line.Point3;
  * @param sectionM height of the weakest section above the hinge [m]
  */
 record StemStrength(double tensionN, double sectionM) {
-  private static final double STEP = 0.5;
+  private static final double STEP = Allowances.STEM_SLICE.value();
 
-  static StemStrength of(PullCase c, StemTaperLine taper) {
+  static StemStrength of(PullCase c, StemTaper taper) {
     Point3 a = attachment(c);
     Point3 leg = c.line().bearing().minus(a);
     double length = leg.length();
@@ -29,8 +31,8 @@ record StemStrength(double tensionN, double sectionM) {
       double share = 1 - h / c.line().attachHeightM();
       Point3 arm = new Point3(a.e() * share, a.n() * share, c.line().attachHeightM() - h);
       double moment = cross(arm, leg) / length;
-      double d = taper.insideBark(h + c.tree().cutHeightM());
-      double breaks = strength * Math.PI * d * d * d * (1 - taper.loss(d)) / (32 * moment);
+      double d = taper.insideBarkM(h + c.tree().cutHeightM());
+      double breaks = strength * Math.PI * d * d * d * (1 - c.tree().cavityLoss(d)) / (32 * moment);
       if (breaks < least) {
         least = breaks;
         where = h;

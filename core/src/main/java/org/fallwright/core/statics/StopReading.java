@@ -1,5 +1,7 @@
 package org.fallwright.core.statics;
 
+import org.fallwright.core.reference.Allowances;
+
 /**
  * What a stop at the ceiling leaves of a source.
  *
@@ -8,8 +10,8 @@ package org.fallwright.core.statics;
  * most 0.9 of it (planning allowance: its tolerance).
  */
 final class StopReading {
-  private static final double DEVICE_HIGH = 1.1;
-  private static final double DEVICE_LOW = 0.9;
+  private static final double DEVICE_HIGH = Allowances.DEVICE_HIGH.value();
+  private static final double DEVICE_LOW = Allowances.DEVICE_LOW.value();
 
   private StopReading() {}
 

@@ -3,6 +3,7 @@ package org.fallwright.core.statics;
 import java.util.List;
 import org.fallwright.core.line.Point3;
 import org.fallwright.core.site.StemDiameter;
+import org.fallwright.core.tree.StemTaper;
 
 /**
  * The tree as a body, with the stem below and above the cut.
@@ -32,4 +33,23 @@ public record TreeBody(
     double massCentreM,
     double leanDeg,
     double leanAzimuthDeg,
-    Point3 crownShift) {}
+    Point3 crownShift) {
+
+  /** The stem's diameters. */
+  StemTaper taper() {
+    return StemTaper.of(heightM, dbhM, diameters, cutHeightM, stumpDiameterM);
+  }
+
+  /**
+   * Share of a section's stiffness and strength that the cavity takes, (inner/outer)⁴, the sound shell
+   * counted from inside the bark.
+   *
+   * @param insideBarkM diameter inside the bark [m]
+   */
+  double cavityLoss(double insideBarkM) {
+    if (shellM == null || insideBarkM <= 2 * shellM) {
+      return 0;
+    }
+    return Math.pow((insideBarkM - 2 * shellM) / insideBarkM, 4);
+  }
+}

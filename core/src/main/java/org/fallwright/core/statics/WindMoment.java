@@ -1,5 +1,7 @@
 package org.fallwright.core.statics;
 
+import org.fallwright.core.reference.Allowances;
+
 /**
  * Moment of the wind on the crown about the hinge.
  *
@@ -14,10 +16,10 @@ package org.fallwright.core.statics;
  */
 public record WindMoment(double againstNm, double asideNm) {
   /** Least gust reckoned with [m/s]; planning allowance. */
-  public static final double LEAST_GUST = 2;
+  public static final double LEAST_GUST = Allowances.GUST_LEAST.value();
 
   /** Speed below which the drag coefficient stays constant [m/s]; start of the published fits. */
-  public static final double CLAMP = 10;
+  public static final double CLAMP = Allowances.WIND_CLAMP.value();
 
   public static WindMoment of(Wind wind, double gustMps, double dragFactor, double layDeg) {
     double v = Math.max(LEAST_GUST, gustMps);

@@ -1,5 +1,6 @@
 package org.fallwright.core.tree;
 
+import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
 import org.fallwright.core.reference.Allowances;
@@ -27,16 +28,39 @@ public final class StemTaper {
 
   /** The stem of that tree, cut as planned. */
   public static StemTaper of(SubjectTree tree, CutPlan cut) {
-    StemTaper taper = new StemTaper(tree.heightM().value());
-    for (StemDiameter d : tree.diameters()) {
-      if (d.heightM() < tree.heightM().value()) {
+    return of(
+        tree.heightM().value(),
+        tree.dbhM().value(),
+        tree.diameters(),
+        cut.heightM(),
+        stumpInsideBarkM(tree));
+  }
+
+  /**
+   * A stem from its figures.
+   *
+   * @param heightM height of the tree [m]
+   * @param dbhM diameter over bark at 1.3 m [m]
+   * @param diameters further diameters over bark
+   * @param cutM height of the cut [m]
+   * @param stumpInsideBarkM diameter inside the bark at the cut [m]
+   */
+  public static StemTaper of(
+      double heightM,
+      double dbhM,
+      List<StemDiameter> diameters,
+      double cutM,
+      double stumpInsideBarkM) {
+    StemTaper taper = new StemTaper(heightM);
+    for (StemDiameter d : diameters) {
+      if (d.heightM() < heightM) {
         taper.known.put(d.heightM(), d.diameterM());
       }
     }
-    if (tree.heightM().value() > BREAST_HEIGHT_M) {
-      taper.known.put(BREAST_HEIGHT_M, tree.dbhM().value());
+    if (heightM > BREAST_HEIGHT_M) {
+      taper.known.put(BREAST_HEIGHT_M, dbhM);
     }
-    taper.known.put(cut.heightM(), stumpInsideBarkM(tree) / Allowances.BARK_RATIO.value());
+    taper.known.put(cutM, stumpInsideBarkM / Allowances.BARK_RATIO.value());
     return taper;
   }
 

@@ -1,5 +1,6 @@
 package org.fallwright.core.zones;
 
+import org.fallwright.core.reference.Allowances;
 import java.util.ArrayList;
 import java.util.List;
 import org.fallwright.core.site.Position;
@@ -16,7 +17,7 @@ import org.locationtech.jts.geom.Geometry;
  */
 public final class Bight {
   /** Margin about the triangle [m]: planning allowance. */
-  static final double MARGIN_M = 5;
+  static final double MARGIN_M = Allowances.BIGHT_MARGIN.value();
 
   private static final int QUARTER = 24;
 

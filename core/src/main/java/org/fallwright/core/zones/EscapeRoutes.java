@@ -1,5 +1,6 @@
 package org.fallwright.core.zones;
 
+import org.fallwright.core.reference.Allowances;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
@@ -23,10 +24,10 @@ import org.locationtech.jts.geom.Coordinate;
  * steps and the 3 m are planning allowances.
  */
 public final class EscapeRoutes {
-  private static final int LEAST_DEG = 90;
-  private static final int MOST_DEG = 150;
+  private static final int LEAST_DEG = (int) Allowances.ESCAPE_LEAST.value();
+  private static final int MOST_DEG = (int) Allowances.ESCAPE_MOST.value();
   private static final int STEP_DEG = 5;
-  private static final int USUAL_DEG = 135;
+  private static final int USUAL_DEG = (int) Allowances.ESCAPE_AZIMUTH.value();
 
   /** Step by which a way is made longer [m]: planning allowance. */
   private static final double LONGER_M = 1;

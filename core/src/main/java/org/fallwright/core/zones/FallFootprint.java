@@ -1,5 +1,6 @@
 package org.fallwright.core.zones;
 
+import org.fallwright.core.reference.Allowances;
 import java.util.ArrayList;
 import java.util.List;
 import org.fallwright.core.site.Position;
@@ -25,19 +26,19 @@ import org.locationtech.jts.operation.overlayng.OverlayNGRobust;
  */
 public final class FallFootprint {
   /** Aim half-angle of a hinge that steers nothing [degrees]: planning allowance. */
-  static final double AIM_LEAST_DEG = 5;
+  static final double AIM_LEAST_DEG = Allowances.AIM_LEAST.value();
 
   /** Growth of the aim half-angle with the steering share [degrees]: planning allowance. */
-  static final double AIM_PER_SHARE_DEG = 20;
+  static final double AIM_PER_SHARE_DEG = Allowances.AIM_PER_STEERING.value();
 
   /** Greatest aim half-angle [degrees]: planning allowance. */
-  static final double AIM_MOST_DEG = 30;
+  static final double AIM_MOST_DEG = Allowances.AIM_MOST.value();
 
   /** Fall of the ground along the lay beyond which the tree may slide [degrees]: as above. */
-  static final double SLIDE_FROM_DEG = 10;
+  static final double SLIDE_FROM_DEG = Allowances.SLIDE_SLOPE.value();
 
   /** Slide where nobody has stated one, share of the height: planning allowance. */
-  static final double SLIDE_SHARE = 0.5;
+  static final double SLIDE_SHARE = Allowances.SLIDE_SHARE.value();
 
   private final Position stump;
   private final double layDeg;

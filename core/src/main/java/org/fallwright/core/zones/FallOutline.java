@@ -1,5 +1,6 @@
 package org.fallwright.core.zones;
 
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.units.Range;
 
 /**
@@ -20,16 +21,16 @@ public record FallOutline(
     double leanDeg,
     double leanAzimuthDeg) {
   /** Margin beyond the tip, share of the height: planning allowance. */
-  static final double TIP_SHARE = 0.1;
+  static final double TIP_SHARE = Allowances.TIP_SHARE.value();
 
   /** Least margin beyond the tip [m]: planning allowance. */
-  static final double TIP_LEAST_M = 3;
+  static final double TIP_LEAST_M = Allowances.TIP_LEAST.value();
 
   /** Ground behind the stump for the butt, share of the height: planning allowance. */
-  static final double BUTT_SHARE = 0.1;
+  static final double BUTT_SHARE = Allowances.BUTT_SHARE.value();
 
   /** Least ground behind the stump for the butt [m]: planning allowance. */
-  static final double BUTT_LEAST_M = 2;
+  static final double BUTT_LEAST_M = Allowances.BUTT_LEAST.value();
 
   public FallOutline {
     Range.check("height_m", heightM, 2, 120, "m");

@@ -1,5 +1,6 @@
 package org.fallwright.core.zones;
 
+import org.fallwright.core.reference.Allowances;
 import java.util.ArrayList;
 import java.util.List;
 import org.fallwright.core.site.Position;
@@ -24,7 +25,7 @@ import org.locationtech.jts.operation.union.UnaryUnionOp;
  */
 public final class Recoil {
   /** Half-angle of the fans [degrees]: planning allowance. */
-  static final double HALF_ANGLE_DEG = 20;
+  static final double HALF_ANGLE_DEG = Allowances.RECOIL_ANGLE.value();
 
   private static final int QUARTER = 24;
   private static final double LEAST_LEG_M = 0.05;

@@ -1,5 +1,6 @@
 package org.fallwright.core.zones;
 
+import org.fallwright.core.reference.Allowances;
 import java.util.List;
 import org.fallwright.core.site.Position;
 import org.locationtech.jts.geom.Geometry;
@@ -13,7 +14,7 @@ import org.locationtech.jts.geom.Geometry;
  */
 public final class SitBackZone {
   /** Half its opening [degrees]: planning allowance. */
-  static final double HALF_ANGLE_DEG = 60;
+  static final double HALF_ANGLE_DEG = Allowances.SIT_BACK_ANGLE.value();
 
   private final Sector sector;
 

@@ -187,11 +187,8 @@ class PlanJsonTest {
         v,
         pull,
         1,
-<<<<<<< HEAD
-=======
         List.of(),
         0,
->>>>>>> main
         v.word(),
         f,
         List.of(pull, new Check("wires", Double.NaN, 3.05, "m", Double.NaN, v, null, "unknown")),

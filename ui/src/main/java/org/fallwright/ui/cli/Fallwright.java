@@ -7,6 +7,8 @@ import java.io.PrintWriter;
 import java.io.UncheckedIOException;
 import java.nio.charset.Charset;
 import java.nio.charset.StandardCharsets;
+import org.fallwright.plugins.host.PluginFolder;
+import org.fallwright.ui.app.Start;
 import org.fallwright.ui.home.Home;
 import org.slf4j.bridge.SLF4JBridgeHandler;
 import picocli.CommandLine;
@@ -48,57 +50,74 @@ public final class Fallwright implements Runnable {
   public static void main(String[] args) {
     SLF4JBridgeHandler.removeHandlersForRootLogger();
     SLF4JBridgeHandler.install();
-    int status = run(Home.found(), args, writer(FileDescriptor.out), writer(FileDescriptor.err));
-    System.exit(status);
+    Home home = Home.found();
+    boolean[] open = {false};
+    OpenCommand.Desktop desktop =
+        site -> {
+          Start.open(
+              PluginFolder.open(home.plugins(), home.version()),
+              home.demoSite(),
+              home.baseMaps(),
+              site);
+          open[0] = true;
+        };
+    int status = run(home, desktop, args, writer(FileDescriptor.out), writer(FileDescriptor.err));
+    if (!open[0]) {
+      System.exit(status);
+    }
   }
 
   /**
    * Runs one command.
    *
+   * @param desktop opens the window where one is asked for
    * @return the exit status
    */
-  static int run(Home home, String[] args, PrintWriter out, PrintWriter err) {
-    OpenCommand.Desktop desktop = site -> err.println("This build has no desktop.");
-    CommandLine[] line = new CommandLine[1];
-
-    line[0] =
-        new CommandLine(
-                new Fallwright(
-                    () -> {
-                      if (OpenCommand.hasDisplay()) {
-                        desktop.open(null);
-                      } else {
-                        line[0].usage(out);
-                      }
-                    }))
-            .addSubcommand(new PlanCommand(home))
-            .addSubcommand(new SheetCommand(home))
-            .addSubcommand(new CheckCommand(home))
-            .addSubcommand(new SourcesCommand(home))
-            .addSubcommand(new OpenCommand(home, desktop))
-            .addSubcommand(new DemoCommand(home, desktop));
-    line[0].getCommandSpec().version("Fallwright " + home.version());
-    line[0]
-        .setOut(out)
-        .setErr(err)
-        .setCaseInsensitiveEnumValuesAllowed(true)
-        .setParameterExceptionHandler(
-            (e, given) -> {
-              err.println(e.getMessage());
-              err.println(
-                  "See: " + e.getCommandLine().getCommandSpec().qualifiedName() + " --help");
-              return Exit.BAD_INPUT;
-            })
-        .setExecutionExceptionHandler((e, command, result) -> fault(e, err));
+  static int run(
+      Home home, OpenCommand.Desktop desktop, String[] args, PrintWriter out, PrintWriter err) {
+    Runnable without =
+        () -> {
+          if (OpenCommand.hasDisplay()) {
+            desktop.open(null);
+          } else {
+            line(home, desktop, () -> {}).usage(out);
+          }
+        };
+    CommandLine line =
+        line(home, desktop, without)
+            .setOut(out)
+            .setErr(err)
+            .setCaseInsensitiveEnumValuesAllowed(true)
+            .setParameterExceptionHandler(
+                (e, given) -> {
+                  err.println(e.getMessage());
+                  err.println(
+                      "See: " + e.getCommandLine().getCommandSpec().qualifiedName() + " --help");
+                  return Exit.BAD_INPUT;
+                })
+            .setExecutionExceptionHandler((e, command, result) -> fault(e, err));
     int status;
     try {
-      status = line[0].execute(args);
+      status = line.execute(args);
     } catch (LinkageError | OutOfMemoryError | StackOverflowError e) {
       status = fault(e, err);
     }
     out.flush();
     err.flush();
     return status;
+  }
+
+  private static CommandLine line(Home home, OpenCommand.Desktop desktop, Runnable without) {
+    CommandLine line =
+        new CommandLine(new Fallwright(without))
+            .addSubcommand(new PlanCommand(home))
+            .addSubcommand(new SheetCommand(home))
+            .addSubcommand(new CheckCommand(home))
+            .addSubcommand(new SourcesCommand(home))
+            .addSubcommand(new OpenCommand(home, desktop))
+            .addSubcommand(new DemoCommand(home, desktop));
+    line.getCommandSpec().version("Fallwright " + home.version());
+    return line;
   }
 
   @Override

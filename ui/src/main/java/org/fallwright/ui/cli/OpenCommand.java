@@ -8,7 +8,7 @@ import picocli.CommandLine.Parameters;
 
 @Command(name = "open", description = "Open the desktop.")
 final class OpenCommand extends Subcommand {
-  /** Opens the desktop's window and comes back when it is closed. */
+  /** Opens the desktop's window and comes back at once; the program then lives on with it. */
   interface Desktop {
     /**
      * @param site the site to open; null: none

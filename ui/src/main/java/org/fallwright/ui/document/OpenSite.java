@@ -4,9 +4,11 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import org.fallwright.core.plan.Check;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.Plan;
+import org.fallwright.core.plan.Setup;
 import org.fallwright.core.site.Site;
 
 /**
@@ -79,6 +81,20 @@ public final class OpenSite {
     chosen = made.ranked().isEmpty() ? null : made.ranked().get(0);
     check = null;
     tell(Change.PLAN);
+  }
+
+  /** The same plan in other words: what was chosen stays chosen. */
+  public void reworded(Site shown, Plan again) {
+    Setup before = chosen == null ? null : chosen.setup();
+    site = shown;
+    plan = again;
+    chosen =
+        Stream.concat(again.ranked().stream(), again.bestRejected().values().stream())
+            .filter(j -> j.setup().equals(before))
+            .findFirst()
+            .orElse(null);
+    check = null;
+    tell(Change.UNITS);
   }
 
   public void choose(Judged setup) {

@@ -8,10 +8,16 @@ import org.fallwright.ui.text.Messages;
 public final class PictureDate {
   private PictureDate() {}
 
-  public static String words(Site site) {
+  /**
+   * @param shown whether the picture's file was found
+   */
+  public static String words(Site site, boolean shown) {
     Picture p = site.picture();
     if (p == null) {
       return Messages.text("plan.no-picture");
+    }
+    if (!shown) {
+      return Messages.text("plan.picture-missing", p.file());
     }
     return p.taken() == null
         ? Messages.text("plan.picture-date.unknown")

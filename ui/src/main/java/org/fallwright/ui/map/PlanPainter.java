@@ -3,6 +3,7 @@ package org.fallwright.ui.map;
 import java.awt.Graphics2D;
 import org.fallwright.core.plan.Ground;
 import org.fallwright.core.plan.Judged;
+import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.locationtech.jts.geom.Envelope;
 
@@ -95,22 +96,31 @@ public final class PlanPainter {
     }
   }
 
-  /** The area that shows a site and, where there is one, all zones of a setup on it [m]. */
+  /**
+   * The area that shows a setup with its zones; without one, all anchors and spots of the site [m].
+   */
   public static Envelope extent(Site site, Judged chosen) {
     Envelope e = new Envelope();
     double h = site.tree().heightM().value();
     var stump = site.tree().stump().at();
     e.expandToInclude(stump.eastM() - h, stump.northM() - h);
     e.expandToInclude(stump.eastM() + h, stump.northM() + h);
-    site.anchors().forEach(a -> e.expandToInclude(a.place().at().eastM(), a.place().at().northM()));
-    site.spots().forEach(s -> e.expandToInclude(s.place().at().eastM(), s.place().at().northM()));
     Ground ground = chosen == null ? null : chosen.ground();
-    if (ground != null) {
+    if (ground == null) {
+      site.anchors().forEach(a -> include(e, a.place().at()));
+      site.spots().forEach(s -> include(e, s.place().at()));
+    } else {
       e.expandToInclude(ground.footprint().getEnvelopeInternal());
       e.expandToInclude(ground.sitBack().getEnvelopeInternal());
-      chosen.line().forEach(p -> e.expandToInclude(p.at().eastM(), p.at().northM()));
+      ground.bights().forEach(b -> e.expandToInclude(b.getEnvelopeInternal()));
+      chosen.line().forEach(p -> include(e, p.at()));
+      chosen.haul().forEach(p -> include(e, p.at()));
     }
     e.expandBy(ROOM_M);
     return e;
+  }
+
+  private static void include(Envelope e, Position p) {
+    e.expandToInclude(p.eastM(), p.northM());
   }
 }

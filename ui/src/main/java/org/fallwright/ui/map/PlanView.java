@@ -10,37 +10,44 @@ import java.awt.event.MouseEvent;
 import java.awt.geom.Line2D;
 import java.awt.geom.Point2D;
 import java.awt.geom.Rectangle2D;
+import java.util.Arrays;
 import java.util.function.Consumer;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.fallwright.maps.frame.LatLon;
 import org.fallwright.maps.frame.SiteFrame;
+import org.fallwright.maps.tiles.TileStore;
+import org.fallwright.ui.map.tile.OfflineTileFactory;
 import org.fallwright.ui.text.Messages;
 import org.jxmapviewer.JXMapViewer;
 import org.jxmapviewer.input.PanMouseInputListener;
 import org.jxmapviewer.input.ZoomMouseWheelListenerCursor;
 import org.jxmapviewer.viewer.GeoPosition;
-import org.jxmapviewer.viewer.TileFactory;
 import org.locationtech.jts.geom.Envelope;
+import org.slf4j.Logger;
+import org.slf4j.LoggerFactory;
 
 /**
  * The plan on screen: the map widget with tiles, or blank ground with a grid, under the plan
  * painter. Dragging pans, the wheel zooms about the pointer.
  */
 public final class PlanView extends JXMapViewer {
+  private static final Logger LOG = LoggerFactory.getLogger(PlanView.class);
+
   /** Distance over which the widget's own projection is taken as even [m]. */
   private static final double SPAN_M = 100;
 
+  private final Offscreen offscreen = new Offscreen();
   private SiteFrame earth;
   private PlanScene scene;
   private Position flagged;
   private Palette palette = Palette.DAY;
   private Envelope wanted;
-  private boolean blank = true;
-  private transient Consumer<Position> pointed = p -> {};
+  private OfflineTileFactory picture;
+  private Consumer<Position> pointed = p -> {};
 
   public PlanView() {
-    setTileFactory(new BlankTiles());
+    setTileFactory(new StretchedTiles(null, StretchedTiles.TILE));
     setRestrictOutsidePanning(true);
     setHorizontalWrapped(false);
     PanMouseInputListener pan = new PanMouseInputListener(this);
@@ -73,12 +80,30 @@ public final class PlanView extends JXMapViewer {
     getAccessibleContext().setAccessibleName(Messages.text("plan.name"));
   }
 
-  /** Shows a site on its picture's tiles; null: blank ground. */
-  public void show(Site site, TileFactory tiles) {
+  /** Shows a site on its picture's tiles; null: blank ground. The store is closed in the end. */
+  public void show(Site site, TileStore tiles) {
+    close();
     earth = new SiteFrame(site.origin());
-    blank = tiles == null;
-    setTileFactory(blank ? new BlankTiles() : tiles);
+    if (tiles != null) {
+      picture = new OfflineTileFactory(tiles);
+      picture.addTileListener(t -> repaint());
+    }
+    setTileFactory(new StretchedTiles(picture, StretchedTiles.TILE));
     fit(PlanPainter.extent(site, null));
+  }
+
+  /** Lets the picture's file go. */
+  public void close() {
+    OfflineTileFactory old = picture;
+    picture = null;
+    if (old != null) {
+      old.dispose();
+      try {
+        old.store().orElseThrow().close();
+      } catch (Exception e) {
+        LOG.warn("Picture not closed", e);
+      }
+    }
   }
 
   /** Draws this scene from now on; null: nothing. */
@@ -105,7 +130,7 @@ public final class PlanView extends JXMapViewer {
     pointed = listener;
   }
 
-  /** Shows all of an area as large as the zoom steps allow, and again whenever the size changes. */
+  /** Shows all of an area as large as the frame lets it, and again whenever the size changes. */
   public void fit(Envelope metres) {
     wanted = metres;
     if (earth == null || getWidth() == 0 || getHeight() == 0) {
@@ -113,16 +138,17 @@ public final class PlanView extends JXMapViewer {
     }
     LatLon middle = earth.toEarth(metres.centre().x, metres.centre().y);
     GeoPosition centre = new GeoPosition(middle.latDeg(), middle.lonDeg());
-    int coarsest = getTileFactory().getInfo().getMaximumZoomLevel();
-    for (int zoom = 0; zoom <= coarsest; zoom++) {
-      setZoom(zoom);
-      setCenterPosition(centre);
-      double k = viewport().pixelsPerMetre();
-      if (zoom == coarsest
-          || metres.getWidth() * k <= getWidth() && metres.getHeight() * k <= getHeight()) {
-        break;
-      }
-    }
+    setTileFactory(new StretchedTiles(picture, StretchedTiles.TILE));
+    setZoom(0);
+    setCenterPosition(centre);
+    double wantedScale = Math.min(getWidth() / metres.getWidth(), getHeight() / metres.getHeight());
+    double coarser = Math.log(viewport().pixelsPerMetre() / wantedScale) / Math.log(2);
+    int zoom = Math.max(0, (int) Math.ceil(coarser));
+    zoom = Math.min(zoom, getTileFactory().getInfo().getMaximumZoomLevel());
+    double stretch = Math.max(1, Math.min(1.99, Math.pow(2, zoom - coarser)));
+    setTileFactory(new StretchedTiles(picture, (int) (StretchedTiles.TILE * stretch)));
+    setZoom(zoom);
+    setCenterPosition(centre);
     repaint();
   }
 
@@ -152,13 +178,11 @@ public final class PlanView extends JXMapViewer {
 
   @Override
   protected void drawMapTiles(Graphics g, int zoom, Rectangle seen) {
-    if (!blank) {
-      super.drawMapTiles(g, zoom, seen);
-      return;
-    }
     g.setColor(palette.paper());
     g.fillRect(0, 0, getWidth(), getHeight());
-    if (earth != null) {
+    if (picture != null) {
+      ((StretchedTiles) getTileFactory()).paint((Graphics2D) g, zoom, seen);
+    } else if (earth != null) {
       grid((Graphics2D) g.create());
     }
   }
@@ -191,31 +215,30 @@ public final class PlanView extends JXMapViewer {
     if (scene == null || earth == null) {
       return;
     }
-    Graphics2D g = (Graphics2D) graphics.create();
-    g.setFont(getFont());
     Viewport view = viewport();
+    graphics.setFont(getFont());
+    offscreen.paint(
+        graphics,
+        getWidth(),
+        getHeight(),
+        Arrays.asList(scene, view.transform(), flagged, getFont()),
+        g -> drawing(g, view));
+  }
+
+  private void drawing(Graphics2D g, Viewport view) {
     new PlanPainter(scene).paint(g, view);
     Pen pen = new Pen(g, scene.palette().halo());
     double u = pen.unit();
     if (flagged != null) {
       pen.stroke(pen.disc(view.toPixel(flagged), 16), scene.palette().notWorkable(), 3);
     }
-    NorthArrow.paint(
-        pen,
-        view,
-        scene.site().declinationDeg(),
-        scene.palette(),
-        new Point2D.Double(getWidth() - 40 * u, 50 * u),
-        38);
-    ScaleBar.paint(
-        pen, view, scene.amounts(), scene.palette(), 14 * u, getHeight() - 12 * u, 200 * u);
-    String date = PictureDate.words(scene.site());
-    pen.text(
-        date,
-        getWidth() - pen.extent(date).getWidth() - 12 * u,
-        getHeight() - 12 * u,
-        scene.palette().ink());
-    g.dispose();
+    Point2D corner = new Point2D.Double(getWidth() - 40 * u, 50 * u);
+    NorthArrow.paint(pen, view, scene.site().declinationDeg(), scene.palette(), corner, 38);
+    double base = getHeight() - 12 * u;
+    ScaleBar.paint(pen, view, scene.amounts(), scene.palette(), 14 * u, base, 200 * u);
+    String date = PictureDate.words(scene.site(), picture != null);
+    double left = getWidth() - pen.extent(date).getWidth() - 12 * u;
+    pen.text(date, left, base, scene.palette().ink());
   }
 
   private Position place(MouseEvent e) {

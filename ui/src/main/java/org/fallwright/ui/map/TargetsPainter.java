@@ -20,7 +20,7 @@ final class TargetsPainter {
       Shape s = c.view().toPixels(m);
       c.pen().stroke(s, c.palette().wayOut(), 1.4, 10, 3, 2, 3);
       Geometry edge = c.visible(m.getBoundary());
-      c.labelOn(Messages.text("plan.drop-zone", z.id()), edge, 6, false, c.palette().wayOut());
+      c.labelOn(z.id(), edge, 6, false, c.palette().wayOut());
     }
   }
 

@@ -1,43 +1,50 @@
 package org.fallwright.ui.particulars;
 
+import java.awt.BorderLayout;
+import java.awt.Color;
 import java.awt.Component;
 import java.awt.Dimension;
+import java.awt.Rectangle;
 import javax.swing.BorderFactory;
 import javax.swing.Box;
 import javax.swing.BoxLayout;
 import javax.swing.JLabel;
 import javax.swing.JPanel;
 import javax.swing.JTextArea;
+import javax.swing.Scrollable;
 import org.fallwright.ui.map.Palette;
 import org.fallwright.ui.text.Messages;
 
 /** The rail at the left: what was entered, what is still to be said, what the tool filled in. */
-public final class EnteredPanel extends JPanel {
+public final class EnteredPanel extends JPanel implements Scrollable {
+  private final JPanel lines = new JPanel();
+
   public EnteredPanel() {
-    setLayout(new BoxLayout(this, BoxLayout.Y_AXIS));
+    super(new BorderLayout());
+    lines.setLayout(new BoxLayout(lines, BoxLayout.Y_AXIS));
+    add(lines, BorderLayout.PAGE_START);
     setBorder(BorderFactory.createEmptyBorder(8, 12, 8, 10));
     getAccessibleContext().setAccessibleName(Messages.text("entered.title"));
   }
 
   /** Shows what was entered; null: nothing. */
   public void show(Entered e, Palette palette) {
-    removeAll();
+    lines.removeAll();
     heading("entered.title", "h3");
     if (e != null) {
       e.numbers().forEach(l -> line(l, palette));
-      add(Box.createVerticalStrut(12));
+      lines.add(Box.createVerticalStrut(12));
       heading("entered.looked", "h4");
       e.looked().forEach(l -> line(l, palette));
       words(
           Messages.text("entered.not-said", String.valueOf(e.notSaid())),
           e.notSaid() > 0 ? palette.notWorkable() : null);
-      add(Box.createVerticalStrut(12));
+      lines.add(Box.createVerticalStrut(12));
       heading("entered.filled", "h4");
       words(String.join(", ", e.defaults()), null);
     } else {
       words(Messages.text("entered.none"), null);
     }
-    add(Box.createVerticalGlue());
     revalidate();
     repaint();
   }
@@ -47,7 +54,7 @@ public final class EnteredPanel extends JPanel {
     l.putClientProperty("FlatLaf.styleClass", style);
     l.setAlignmentX(Component.LEFT_ALIGNMENT);
     l.setBorder(BorderFactory.createEmptyBorder(0, 0, 4, 0));
-    add(l);
+    lines.add(l);
   }
 
   private void line(Entered.Line l, Palette palette) {
@@ -68,14 +75,14 @@ public final class EnteredPanel extends JPanel {
     top.add(note);
     top.setAlignmentX(Component.LEFT_ALIGNMENT);
     value.setAlignmentX(Component.LEFT_ALIGNMENT);
-    add(top);
-    add(value);
-    add(Box.createVerticalStrut(6));
+    lines.add(top);
+    lines.add(value);
+    lines.add(Box.createVerticalStrut(6));
     top.setMaximumSize(new Dimension(Integer.MAX_VALUE, top.getPreferredSize().height));
   }
 
-  private void words(String text, java.awt.Color c) {
-    JTextArea t = new JTextArea(text);
+  private void words(String text, Color c) {
+    JTextArea t = new JTextArea(text, 0, 12);
     t.setEditable(false);
     t.setFocusable(false);
     t.setOpaque(false);
@@ -86,6 +93,31 @@ public final class EnteredPanel extends JPanel {
     if (c != null) {
       t.setForeground(c);
     }
-    add(t);
+    lines.add(t);
+  }
+
+  @Override
+  public Dimension getPreferredScrollableViewportSize() {
+    return getPreferredSize();
+  }
+
+  @Override
+  public int getScrollableUnitIncrement(Rectangle seen, int orientation, int direction) {
+    return 24;
+  }
+
+  @Override
+  public int getScrollableBlockIncrement(Rectangle seen, int orientation, int direction) {
+    return seen.height;
+  }
+
+  @Override
+  public boolean getScrollableTracksViewportWidth() {
+    return true;
+  }
+
+  @Override
+  public boolean getScrollableTracksViewportHeight() {
+    return getParent() != null && getPreferredSize().height < getParent().getHeight();
   }
 }

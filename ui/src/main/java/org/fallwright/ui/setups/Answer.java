@@ -6,7 +6,6 @@ import org.fallwright.core.plan.Figures;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.Plan;
 import org.fallwright.core.plan.Verdict;
-import org.fallwright.core.site.Site;
 import org.fallwright.ui.text.Amounts;
 import org.fallwright.ui.text.Messages;
 
@@ -44,7 +43,7 @@ public record Answer(Verdict verdict, String word, String sentence, List<Cell> c
   }
 
   /** Nothing could be ranked. */
-  public static Answer nothing(Plan plan, Amounts amounts) {
+  public static Answer nothing(Plan plan) {
     return empty(
         Verdict.NOT_WORKABLE.word(),
         plan.judged() == 0
@@ -52,7 +51,7 @@ public record Answer(Verdict verdict, String word, String sentence, List<Cell> c
             : Messages.text("answer.none-works", String.valueOf(plan.judged())));
   }
 
-  public static Answer of(Site site, Judged j, Amounts amounts) {
+  public static Answer of(Judged j, Amounts amounts) {
     return new Answer(
         j.verdict(),
         j.verdict().word(),
@@ -60,26 +59,21 @@ public record Answer(Verdict verdict, String word, String sentence, List<Cell> c
         List.of(needs(j, amounts), gives(j, amounts), clears(j, amounts), weakest(j, amounts)));
   }
 
+  /** The way, then what was found of it; the verdict's word stands beside the mark already. */
   private static String sentence(Judged j, Amounts amounts) {
-    String way =
-        Messages.text("answer.way", Way.title(j.setup()), amounts.azimuth(j.setup().layDeg()));
-    Check w = j.weakest();
-    if (w == null) {
-      return Messages.text("answer.only-way", way);
-    }
-    return switch (j.verdict()) {
-      case WORKABLE ->
-          Double.isFinite(w.ratio())
-              ? Messages.text("answer.workable", way, w.id(), amounts.ratio(w.ratio()))
-              : Messages.text("answer.only-way", way);
-      case TIGHT, NOT_WORKABLE, CANNOT_JUDGE ->
-          Messages.text("answer.because", way, w.id(), w.why());
-    };
+    String word = Way.name(j.verdict().word()) + ". ";
+    String found =
+        j.sentence().startsWith(word) ? j.sentence().substring(word.length()) : j.sentence();
+    return Messages.text(
+        "answer.sentence",
+        Way.name(Way.title(j.setup())),
+        amounts.azimuth(j.setup().layDeg()),
+        found);
   }
 
   private static Cell needs(Judged j, Amounts amounts) {
     Figures f = j.figures();
-    if (f == null || Double.isNaN(f.pullPlanN())) {
+    if (f == null || !Double.isFinite(f.pullPlanN())) {
       return new Cell("needs", NONE, "");
     }
     return new Cell(
@@ -90,7 +84,7 @@ public record Answer(Verdict verdict, String word, String sentence, List<Cell> c
 
   private static Cell gives(Judged j, Amounts amounts) {
     Figures f = j.figures();
-    return f == null || Double.isNaN(f.sourceLowN())
+    return f == null || !Double.isFinite(f.sourceLowN())
         ? new Cell("gives", NONE, "")
         : new Cell(
             "gives",

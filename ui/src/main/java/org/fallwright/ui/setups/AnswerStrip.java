@@ -10,7 +10,9 @@ import javax.swing.Box;
 import javax.swing.BoxLayout;
 import javax.swing.JLabel;
 import javax.swing.JPanel;
+import javax.swing.JSeparator;
 import javax.swing.JTextArea;
+import javax.swing.SwingConstants;
 import org.fallwright.core.plan.Verdict;
 import org.fallwright.ui.map.Palette;
 import org.fallwright.ui.text.Messages;
@@ -45,6 +47,10 @@ public final class AnswerStrip extends JPanel {
     cells.setOpaque(false);
     cells.setLayout(new BoxLayout(cells, BoxLayout.X_AXIS));
     for (String key : new String[] {"needs", "gives", "clears", "weakest", "case", "defaults"}) {
+      JSeparator between = new JSeparator(SwingConstants.VERTICAL);
+      between.setMaximumSize(new Dimension(1, Integer.MAX_VALUE));
+      between.setAlignmentY(Component.TOP_ALIGNMENT);
+      cells.add(between);
       cells.add(cell(key));
     }
     add(said, BorderLayout.CENTER);
@@ -85,11 +91,7 @@ public final class AnswerStrip extends JPanel {
     JPanel p = new JPanel();
     p.setOpaque(false);
     p.setLayout(new BoxLayout(p, BoxLayout.Y_AXIS));
-    p.setBorder(
-        BorderFactory.createCompoundBorder(
-            BorderFactory.createMatteBorder(
-                0, 1, 0, 0, javax.swing.UIManager.getColor("Separator.foreground")),
-            BorderFactory.createEmptyBorder(0, 10, 0, 12)));
+    p.setBorder(BorderFactory.createEmptyBorder(0, 10, 0, 12));
     p.add(caption);
     p.add(value);
     p.add(note);

@@ -1,5 +1,6 @@
 package org.fallwright.ui.setups;
 
+import java.util.Comparator;
 import java.util.List;
 import javax.swing.table.AbstractTableModel;
 import org.fallwright.core.plan.Check;
@@ -11,14 +12,15 @@ import org.fallwright.ui.text.Messages;
 final class Findings {
   private Findings() {}
 
-  /** Every check: what there is, what is asked, their ratio. */
+  /** Every check, the worst verdict first: what there is, what is asked, their ratio. */
   static final class Checks extends AbstractTableModel {
     private static final String[] COLUMNS = {"check", "value", "limit", "ratio"};
-    private final transient List<Check> checks;
-    private final transient Amounts amounts;
+    private final List<Check> checks;
+    private final Amounts amounts;
 
     Checks(List<Check> checks, Amounts amounts) {
-      this.checks = checks;
+      this.checks =
+          checks.stream().sorted(Comparator.comparing(Check::verdict).reversed()).toList();
       this.amounts = amounts;
     }
 
@@ -56,8 +58,8 @@ final class Findings {
   /** Every part: its loads at plan and at the most the source can do, and its strength. */
   static final class Loads extends AbstractTableModel {
     private static final String[] COLUMNS = {"part", "at-plan", "at-high", "strength"};
-    private final transient List<PartLoad> loads;
-    private final transient Amounts amounts;
+    private final List<PartLoad> loads;
+    private final Amounts amounts;
 
     Loads(List<PartLoad> loads, Amounts amounts) {
       this.loads = loads;

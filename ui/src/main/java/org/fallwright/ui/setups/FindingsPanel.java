@@ -28,8 +28,8 @@ public final class FindingsPanel extends JPanel {
   private final JTable loads = new JTable();
   private final JTextArea why = text(3);
   private final JTextArea notes = text(6);
-  private transient Judged shown;
-  private transient Consumer<Check> pointed = c -> {};
+  private Judged shown;
+  private Consumer<Check> pointed = c -> {};
   private boolean setting;
 
   public FindingsPanel() {
@@ -41,6 +41,8 @@ public final class FindingsPanel extends JPanel {
     tabs.addTab(Messages.text("findings.checks"), first);
     tabs.addTab(Messages.text("findings.loads"), scroll(loads));
     tabs.addTab(Messages.text("findings.notes"), scroll(notes));
+    tabs.putClientProperty("JTabbedPane.tabWidthMode", "equal");
+    tabs.putClientProperty("JTabbedPane.tabAreaAlignment", "fill");
     add(tabs, BorderLayout.CENTER);
     setUp(checks, "findings.checks");
     setUp(loads, "findings.loads");
@@ -76,10 +78,10 @@ public final class FindingsPanel extends JPanel {
 
   private void point() {
     int row = checks.getSelectedRow();
-    if (setting || shown == null || row < 0 || row >= shown.checks().size()) {
+    if (setting || shown == null || row < 0 || row >= checks.getRowCount()) {
       return;
     }
-    Check c = shown.checks().get(row);
+    Check c = ((Findings.Checks) checks.getModel()).check(row);
     why.setText(c.why());
     pointed.accept(c);
   }
@@ -120,7 +122,7 @@ public final class FindingsPanel extends JPanel {
 
   /** A check's name behind the mark of its verdict. */
   private static final class MarkCell extends DefaultTableCellRenderer {
-    private final transient Palette palette;
+    private final Palette palette;
 
     MarkCell(Palette palette) {
       this.palette = palette;

@@ -1,6 +1,5 @@
 package org.fallwright.ui.setups;
 
-import java.util.StringJoiner;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.Setup;
 import org.fallwright.ui.text.Amounts;
@@ -8,33 +7,38 @@ import org.fallwright.ui.text.Messages;
 
 /** A setup in words. */
 public final class Way {
+  /** The mode of sources that know only one. */
+  private static final String PLAIN = "pull";
+
   private Way() {}
 
-  /** What pulls, from where, over what: "hand winch at A3 over A1". */
+  /** What pulls, from where, over what: "hand-winch at A3 over A1". */
   public static String title(Setup s) {
-    String words = Messages.text("way.at", s.source(), s.place());
+    String words = at(s.source(), s.mode(), s.place());
     if (!s.redirects().isEmpty()) {
-      StringJoiner over = new StringJoiner(", ");
-      s.redirects().forEach(over::add);
-      words = Messages.text("way.over", words, over.toString());
+      words = Messages.text("way.over", words, String.join(", ", s.redirects()));
     }
     return s.driver() == null
         ? words
-        : Messages.text("way.driven", words, s.driver().source(), s.driver().place());
+        : Messages.text(
+            "way.driven", words, at(s.driver().source(), s.driver().mode(), s.driver().place()));
   }
 
-  /** Lay, height of the line and how the source is run. */
+  private static String at(String source, String mode, String place) {
+    return mode == null || mode.isBlank() || mode.equals(PLAIN)
+        ? Messages.text("way.at", source, place)
+        : Messages.text("way.at.mode", source, mode, place);
+  }
+
+  /** Lay, height of the line, hinge, and the line itself. */
   public static String detail(Judged j, Amounts amounts) {
     Setup s = j.setup();
-    String words =
-        Messages.text(
-            "way.detail",
-            amounts.azimuth(s.layDeg()),
-            amounts.length(s.attachHeightM()),
-            amounts.small(s.hingeThicknessM()));
-    return s.mode() == null || s.mode().isBlank()
-        ? words
-        : Messages.text("way.mode", words, s.mode());
+    return Messages.text(
+        "way.detail",
+        amounts.azimuth(s.layDeg()),
+        s.line(),
+        amounts.length(s.attachHeightM()),
+        amounts.small(s.hingeThicknessM()));
   }
 
   /** A check's id as a name: first letter large. */

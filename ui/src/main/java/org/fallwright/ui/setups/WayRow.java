@@ -15,7 +15,7 @@ import org.fallwright.ui.text.Messages;
 
 /** A line of the list of ways: rank, mark, what and how, ratio of its weakest check. */
 final class WayRow extends JPanel implements ListCellRenderer<Ways.Row> {
-  private final transient Palette palette;
+  private final Palette palette;
   private final JLabel lead = new JLabel("", SwingConstants.RIGHT);
   private final JLabel mark = new JLabel();
   private final JLabel title = new JLabel();

@@ -17,6 +17,9 @@ import org.fallwright.ui.text.Messages;
  * @param notes what was left out
  */
 public record Ways(String summary, List<Row> ranked, List<Row> ruledOut, List<String> notes) {
+  /** Ways that do not work are shown up to this many; the reasons under them stand for the rest. */
+  private static final int NOT_WORKABLE_SHOWN = 12;
+
   /**
    * A line of the list.
    *
@@ -29,7 +32,11 @@ public record Ways(String summary, List<Row> ranked, List<Row> ruledOut, List<St
 
   public static Ways of(Plan plan, Amounts amounts) {
     List<Row> ranked = new ArrayList<>();
+    int failing = 0;
     for (Judged j : plan.ranked()) {
+      if (j.verdict() == Verdict.NOT_WORKABLE && ++failing > NOT_WORKABLE_SHOWN) {
+        break;
+      }
       ranked.add(
           new Row(
               j,

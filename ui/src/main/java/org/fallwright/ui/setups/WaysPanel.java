@@ -1,15 +1,14 @@
 package org.fallwright.ui.setups;
 
 import java.awt.BorderLayout;
-import java.awt.Component;
 import java.awt.Dimension;
+import java.awt.GridBagConstraints;
+import java.awt.GridBagLayout;
 import java.awt.Rectangle;
 import java.util.List;
 import java.util.function.Consumer;
 import javax.swing.BorderFactory;
-import javax.swing.BoxLayout;
 import javax.swing.DefaultListModel;
-import javax.swing.JComponent;
 import javax.swing.JLabel;
 import javax.swing.JList;
 import javax.swing.JPanel;
@@ -28,7 +27,7 @@ public final class WaysPanel extends JPanel {
   private final JList<Ways.Row> ranked = list("ways.title");
   private final JList<Ways.Row> ruledOut = list("ways.ruled-out");
   private final JLabel outTitle = new JLabel(Messages.text("ways.ruled-out"));
-  private transient Consumer<Judged> chosen = j -> {};
+  private Consumer<Judged> chosen = j -> {};
   private boolean setting;
 
   public WaysPanel() {
@@ -43,11 +42,16 @@ public final class WaysPanel extends JPanel {
     outTitle.putClientProperty("FlatLaf.styleClass", "h4");
     outTitle.setBorder(BorderFactory.createEmptyBorder(10, 10, 4, 10));
     JPanel both = new Stack();
-    both.setLayout(new BoxLayout(both, BoxLayout.Y_AXIS));
-    for (JComponent c : List.of(ranked, outTitle, ruledOut)) {
-      c.setAlignmentX(Component.LEFT_ALIGNMENT);
-      both.add(c);
-    }
+    both.setLayout(new GridBagLayout());
+    GridBagConstraints row = new GridBagConstraints();
+    row.gridx = 0;
+    row.weightx = 1;
+    row.fill = GridBagConstraints.HORIZONTAL;
+    row.anchor = GridBagConstraints.PAGE_START;
+    both.add(ranked, row);
+    both.add(outTitle, row);
+    row.weighty = 1;
+    both.add(ruledOut, row);
     both.setBackground(ranked.getBackground());
     JScrollPane scroll = new JScrollPane(both);
     scroll.setBorder(null);

@@ -44,6 +44,9 @@ final class SheetPainter {
   /** How far the list of what is not known may stand out under the cautions. */
   private static final double MORE_NOT_KNOWN = 12;
 
+  /** Size of the labels on the plan, a size of their own. */
+  static final double LABELS = 7.2;
+
   private static final Font SMALL = SheetFonts.plain(7);
   private static final Font BODY = SheetFonts.plain(7.8);
   private static final Font BODY_BOLD = SheetFonts.bold(7.8);
@@ -157,7 +160,7 @@ final class SheetPainter {
     Viewport view = MapScale.view(site, judged, frame);
     Amounts amounts = new Amounts(site.display());
     Graphics2D map = (Graphics2D) g.create();
-    map.setFont(SheetFonts.plain(7.2));
+    map.setFont(SheetFonts.plain(LABELS));
     new PlanPainter(PlanScene.of(site, judged).in(amounts).over(SheetGround.faded(ground)))
         .paint(map, view);
     map.dispose();
@@ -191,11 +194,14 @@ final class SheetPainter {
   private void checkBar(Graphics2D g, double x, double y) {
     double end = x + Paper.points(100);
     g.setColor(Color.BLACK);
-    g.setStroke(new BasicStroke(1f, BasicStroke.CAP_BUTT, BasicStroke.JOIN_MITER));
+    float pen = 0.8f;
+    g.setStroke(new BasicStroke(pen, BasicStroke.CAP_BUTT, BasicStroke.JOIN_MITER));
     g.draw(new Line2D.Double(x, y, end, y));
     for (int mm = 0; mm <= 100; mm += 10) {
       double tick = mm % 50 == 0 ? 4 : 2.2;
-      double at = x + Paper.points(mm);
+      // the outer edges of the end ticks are what is 100 mm apart
+      double inward = mm == 0 ? pen / 2 : mm == 100 ? -pen / 2 : 0;
+      double at = x + Paper.points(mm) + inward;
       g.draw(new Line2D.Double(at, y - tick, at, y + tick));
     }
     new TextPen(g)
@@ -210,7 +216,7 @@ final class SheetPainter {
     double width = right - x;
     double y = pen.line("Line tension at the tree", HEAD, x, top - 1) + 1;
     double w = (width - 4) / 2;
-    double h = 39;
+    double h = 36;
     for (int i = 0; i < content.readings().size(); i++) {
       SheetContent.Reading r = content.readings().get(i);
       double bx = x + (i % 2) * (w + 4);
@@ -222,7 +228,7 @@ final class SheetPainter {
       }
       pen.fitted(r.name(), SMALL, bx + 3, by + 2, w - 6);
       pen.line(r.shown(), SheetFonts.bold(13), bx + 3, by + 10);
-      pen.line(r.other(), BODY, bx + 3, by + 27);
+      pen.line(r.other(), BODY, bx + 3, by + 25);
     }
     y += 2 * (h + 4) + 3;
     y = table(pen, content.pull(), x, y, width) + 5;
@@ -269,7 +275,7 @@ final class SheetPainter {
   }
 
   private double loads(TextPen pen, double x, double top, double width) {
-    double[] ends = {width * 0.58, width * 0.72, width * 0.86, width};
+    double[] ends = {width * 0.52, width * 0.67, width * 0.84, width};
     double y = pen.line("Loads on the parts", HEAD, x, top);
     String[] heads = {"at plan", "allowed", "at most", "allowed"};
     for (int i = 0; i < 4; i++) {
@@ -280,7 +286,7 @@ final class SheetPainter {
     List<SheetContent.Load> rows = content.loads();
     int shown = Math.min(rows.size(), mostLoads);
     for (SheetContent.Load r : rows.subList(0, shown)) {
-      pen.fitted(r.part(), BODY, x, y, ends[0] - 52);
+      pen.fitted(r.part(), BODY, x, y, ends[0] - 50);
       pen.right(r.atPlan() + (r.overAtPlan() ? " ×" : ""), font(r.overAtPlan()), x + ends[0], y);
       pen.right(r.allowedAtPlan(), BODY, x + ends[1], y);
       pen.right(r.atMost() + (r.overAtMost() ? " ×" : ""), font(r.overAtMost()), x + ends[2], y);

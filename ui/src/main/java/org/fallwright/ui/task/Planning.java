@@ -13,4 +13,13 @@ public interface Planning {
    * @param cancelled asked now and then; once true, the run may end with any exception
    */
   Plan plan(Site site, DoubleConsumer progress, BooleanSupplier cancelled);
+
+  /**
+   * Judges the setups of a plan again without a search: for a site that differs from the planned
+   * one only in how it is shown, so that sentences come in its units. Without an answer of its own,
+   * the plan as it is.
+   */
+  default Plan again(Site site, Plan plan) {
+    return plan;
+  }
 }

@@ -1,0 +1,36 @@
+package org.fallwright.ui.app;
+
+import java.io.IOException;
+import java.nio.file.Path;
+import org.fallwright.core.site.Site;
+import org.fallwright.maps.tiles.TileStore;
+import org.fallwright.ui.task.Planning;
+
+/**
+ * What the window is given.
+ *
+ * @param planning plans a site
+ * @param sites reads a site file
+ * @param pictures finds the picture under the plan
+ * @param demo the demonstration site's file; null: none at hand
+ */
+public record Wiring(Planning planning, Sites sites, Pictures pictures, Path demo) {
+  /** Reads a site file; called off the event thread. */
+  @FunctionalInterface
+  public interface Sites {
+    /**
+     * @throws IOException with one sentence for the person at the screen
+     */
+    Site read(Path file) throws IOException;
+  }
+
+  /** Finds the tiles of the picture that a site names; called off the event thread. */
+  @FunctionalInterface
+  public interface Pictures {
+    /**
+     * @return the tiles, or null where the site names no picture or its file is not there
+     * @throws IOException with one sentence, where the file is there and cannot be read
+     */
+    TileStore open(Site site, Path siteFile) throws IOException;
+  }
+}
