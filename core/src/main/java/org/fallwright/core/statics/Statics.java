@@ -1,8 +1,7 @@
 package org.fallwright.core.statics;
 
-import org.fallwright.core.tree.StemTaper;
-
 import org.fallwright.core.reference.Allowances;
+import org.fallwright.core.tree.StemTaper;
 
 /**
  * The statics of one pull: what the tree asks of the line, and how it behaves on what a source
@@ -27,6 +26,11 @@ public final class Statics {
   /** What the tree asks. */
   public TreeSide treeSide() {
     return side;
+  }
+
+  /** What stands behind it, to be worked again. */
+  public Worked worked() {
+    return new Worked(c, spread, side);
   }
 
   private TreeSide reckon() {
