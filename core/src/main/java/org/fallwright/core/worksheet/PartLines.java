@@ -240,17 +240,17 @@ final class PartLines {
   private void high(int i, Part p) {
     w.section("At the most the source can do: " + p.name());
     w.given("Q_" + i, "last factor", p.lastFactor(), NUMBER, last(p));
-    w.work("Z_" + i, "load allowed then", "B_" + i + " ÷ Q_" + i, FORCE, Basis.RULE);
+    w.work("G_" + i, "load allowed then", "B_" + i + " ÷ Q_" + i, FORCE, Basis.RULE);
     w.work("V_" + i, "load then", "S_high × j_" + i, FORCE, Basis.STATICS);
     double exact = ratios.byCheck().get(p.name() + " at high");
     if (Double.isFinite(exact)) {
       w.work(
-          "Y_" + i,
+          "r_" + i,
           p.name() + ", allowed over load then",
-          "Z_" + i + " ÷ V_" + i,
+          "G_" + i + " ÷ V_" + i,
           NUMBER,
           Basis.RULE);
-      w.compare("Y_" + i, exact, NUMBER);
+      w.compare("r_" + i, exact, NUMBER);
     }
   }
 

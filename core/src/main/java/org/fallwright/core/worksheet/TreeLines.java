@@ -150,8 +150,6 @@ final class TreeLines {
         "W × (u_g × cos(δ) − w_g × sin(δ))",
         MOMENT,
         Basis.STATICS);
-    w.compare("u_g", side.ugM(), LENGTH);
-    w.compare("v_g", side.vgM(), LENGTH);
     w.compare("M_g0", side.weightNm(), MOMENT);
   }
 
@@ -175,7 +173,7 @@ final class TreeLines {
         NUMBER,
         Basis.PUBLISHED);
     w.work(
-        "w_c",
+        "w_k",
         "middle of the crown above the hinge",
         "(h_b + H) ÷ 2 − h_c",
         LENGTH,
@@ -185,7 +183,7 @@ final class TreeLines {
     w.work(
         "M_v",
         "moment of the wind, whatever its direction",
-        "0.5 × ρ × C_d × A_c × V_r^2 × w_c" + Workings.fit(units),
+        "0.5 × ρ × C_d × A_c × V_r^2 × w_k" + Workings.fit(units),
         MOMENT,
         Basis.STATICS);
     if (site.conditions().windTowardDeg() == null) {

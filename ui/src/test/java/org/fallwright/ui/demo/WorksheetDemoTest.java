@@ -76,7 +76,9 @@ class WorksheetDemoTest {
                     m -> {
                       String sign = m.group();
                       String n =
-                          WORDS.contains(sign) ? sign : above.getOrDefault(sign, end(sign, r));
+                          WORDS.contains(sign)
+                              ? sign
+                              : above.containsKey(sign) ? above.get(sign) : end(sign, r);
                       return n.startsWith("−") ? "(" + n + ")" : n;
                     });
         assertThat(numbers).as(r.symbol()).isEqualTo(r.numbers());
