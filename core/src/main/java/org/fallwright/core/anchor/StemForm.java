@@ -28,6 +28,21 @@ public enum StemForm {
     this.heightPower = heightPower;
   }
 
+  /** a of the equation. */
+  public double factor() {
+    return factor;
+  }
+
+  /** b of the equation. */
+  public double diameterPower() {
+    return diameterPower;
+  }
+
+  /** c of the equation. */
+  public double heightPower() {
+    return heightPower;
+  }
+
   /**
    * Stem volume [m³].
    *

@@ -25,16 +25,8 @@ final class GearParts {
   private final RuleSet rules;
   private final SiteTables tables;
 
-  /**
-   * An anchor of the way and what it holds.
-   *
-   * @param anchor the anchor
-   * @param capacity what it holds under this load
-   */
-  record Held(Anchor anchor, Capacity capacity) {}
-
   private final List<Part> parts = new ArrayList<>();
-  private final List<Held> anchors = new ArrayList<>();
+  private final List<HeldAnchor> anchors = new ArrayList<>();
   private int slings;
   private int connectors;
 
@@ -48,7 +40,7 @@ final class GearParts {
     return parts;
   }
 
-  List<Held> anchors() {
+  List<HeldAnchor> anchors() {
     return anchors;
   }
 
@@ -139,8 +131,9 @@ final class GearParts {
   }
 
   private void hold(Anchor a, Point3 pull, double hauling, double holding) {
-    Capacity c = AnchorCapacity.of(a, AnchorLoad.of(pull.e(), pull.n(), pull.up()), tables);
-    anchors.add(new Held(a, c));
+    AnchorLoad load = AnchorLoad.of(pull.e(), pull.n(), pull.up());
+    Capacity c = AnchorCapacity.of(a, load, tables);
+    anchors.add(new HeldAnchor(a, load, c));
     if (!c.refused()) {
       parts.add(
           new Part(

@@ -75,13 +75,44 @@ public final class Judge {
     return judge(setup, false);
   }
 
+  /** The setup as judged, with all that its figures were reckoned from. */
+  public Reckoned reckon(Setup setup) {
+    PullSource source = source(setup);
+    PullSource driver = driver(setup);
+    Route route = Route.of(site, setup, source, driver);
+    Statics statics = statics(setup, route);
+    TreeSide tree = statics.treeSide();
+    PullOffer offer = Reach.of(site, setup, route, Reach.Pulled.of(tree), source, driver);
+    GearParts parts = new GearParts(site, rules, tables).collect(setup, route, offer);
+    return new Reckoned(
+        judge(setup),
+        subject.species(),
+        subject.figures(),
+        subject.pull(setup, route),
+        statics,
+        route.points(),
+        route.loads(),
+        setup.redirects().isEmpty() ? null : Route.block(site),
+        GearParts.line(site, setup),
+        offer,
+        tree.movable() ? stop(statics, offer, route, parts.parts()).ratios() : null,
+        parts.anchors(),
+        tables);
+  }
+
+  private PullSource source(Setup setup) {
+    return kind(site.source(setup.source()).orElseThrow().plugin());
+  }
+
+  private PullSource driver(Setup setup) {
+    return setup.driver() == null
+        ? null
+        : kind(site.source(setup.driver().source()).orElseThrow().plugin());
+  }
+
   private Judged judge(Setup setup, boolean full) {
-    Gear.Source gear = site.source(setup.source()).orElseThrow();
-    PullSource source = kind(gear.plugin());
-    PullSource driver =
-        setup.driver() == null
-            ? null
-            : kind(site.source(setup.driver().source()).orElseThrow().plugin());
+    PullSource source = source(setup);
+    PullSource driver = driver(setup);
     Route route = routes.computeIfAbsent(setup.withLay(0), w -> Route.of(site, w, source, driver));
     Statics statics = statics(setup, route);
     TreeSide tree = statics.treeSide();
@@ -213,7 +244,7 @@ public final class Judge {
   }
 
   private void usable(Grade grade, GearParts parts) {
-    for (GearParts.Held h : parts.anchors()) {
+    for (HeldAnchor h : parts.anchors()) {
       boolean no = h.capacity().refused();
       grade.factored(
           "usable " + h.anchor().id(),

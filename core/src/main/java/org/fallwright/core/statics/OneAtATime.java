@@ -1,6 +1,9 @@
 package org.fallwright.core.statics;
 
+import java.util.Arrays;
+import java.util.List;
 import java.util.function.ToDoubleFunction;
+import java.util.stream.IntStream;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.reference.Spreads;
 
@@ -61,6 +64,24 @@ final class OneAtATime {
 
   double p5(ToDoubleFunction<Posture> f) {
     return edge(f, -1);
+  }
+
+  /** The entered quantities at their means and ends. */
+  List<Worked.Input> inputs() {
+    return IntStream.range(0, Draw.COUNT)
+        .mapToObj(
+            i ->
+                new Worked.Input(
+                    Draw.NAMES[i], mean.draw.get(i), low[i].draw.get(i), high[i].draw.get(i)))
+        .toList();
+  }
+
+  /** A quantity at the means and at every end. */
+  Varied varied(ToDoubleFunction<Posture> f) {
+    return new Varied(
+        f.applyAsDouble(mean),
+        Arrays.stream(low).map(f::applyAsDouble).toList(),
+        Arrays.stream(high).map(f::applyAsDouble).toList());
   }
 
   /** Rise of the quantity that each input alone brings, in the order of the draw. */

@@ -28,6 +28,11 @@ public final class Statics {
     return side;
   }
 
+  /** What stands behind it, to be worked again. */
+  public Worked worked() {
+    return new Worked(c, spread, side);
+  }
+
   private TreeSide reckon() {
     double back = nominal.sitBack();
     double commit = CommitAngle.exists(nominal) ? CommitAngle.of(nominal) : Double.NaN;

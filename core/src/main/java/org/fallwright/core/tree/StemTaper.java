@@ -1,7 +1,9 @@
 package org.fallwright.core.tree;
 
+import java.util.Collections;
 import java.util.List;
 import java.util.Map;
+import java.util.SortedMap;
 import java.util.TreeMap;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.site.CutPlan;
@@ -88,6 +90,11 @@ public final class StemTaper {
     }
     double way = (heightM - below.getKey()) / (above.getKey() - below.getKey());
     return below.getValue() + way * (above.getValue() - below.getValue());
+  }
+
+  /** The known diameters over bark [m] by height above the ground [m], the top's 0 among them. */
+  public SortedMap<Double, Double> known() {
+    return Collections.unmodifiableSortedMap(known);
   }
 
   /** Diameter inside the bark [m], at that height above the ground [m]. */

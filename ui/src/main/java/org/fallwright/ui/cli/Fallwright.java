@@ -112,6 +112,7 @@ public final class Fallwright implements Runnable {
         new CommandLine(new Fallwright(without))
             .addSubcommand(new PlanCommand(home))
             .addSubcommand(new SheetCommand(home))
+            .addSubcommand(new WorksheetCommand(home))
             .addSubcommand(new CheckCommand(home))
             .addSubcommand(new SourcesCommand(home))
             .addSubcommand(new OpenCommand(home, desktop))

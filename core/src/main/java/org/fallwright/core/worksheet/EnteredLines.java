@@ -1,0 +1,222 @@
+package org.fallwright.core.worksheet;
+
+import static org.fallwright.core.worksheet.Dimension.ANGLE;
+import static org.fallwright.core.worksheet.Dimension.AREA;
+import static org.fallwright.core.worksheet.Dimension.DENSITY;
+import static org.fallwright.core.worksheet.Dimension.FORCE;
+import static org.fallwright.core.worksheet.Dimension.LENGTH;
+import static org.fallwright.core.worksheet.Dimension.MASS;
+import static org.fallwright.core.worksheet.Dimension.NUMBER;
+import static org.fallwright.core.worksheet.Dimension.SMALL_LENGTH;
+import static org.fallwright.core.worksheet.Dimension.SPEED;
+import static org.fallwright.core.worksheet.Dimension.STRESS;
+
+import java.util.List;
+import org.fallwright.core.plan.LinePoint;
+import org.fallwright.core.plan.Reckoned;
+import org.fallwright.core.plan.Setup;
+import org.fallwright.core.reference.Allowances;
+import org.fallwright.core.reference.Species;
+import org.fallwright.core.site.Conditions;
+import org.fallwright.core.site.CutPlan;
+import org.fallwright.core.site.Place;
+import org.fallwright.core.site.Site;
+import org.fallwright.core.site.SubjectTree;
+import org.fallwright.core.tree.MassEquation;
+
+/** What the setup chooses and what was entered of tree, cut, wood, day and line. */
+final class EnteredLines {
+  private final Workings w;
+  private final Site site;
+  private final Reckoned r;
+
+  EnteredLines(Workings w, Site site, Reckoned r) {
+    this.w = w;
+    this.site = site;
+    this.r = r;
+  }
+
+  void write() {
+    setup();
+    tree();
+    wood();
+    day();
+    points();
+  }
+
+  private void setup() {
+    Setup s = r.judged().setup();
+    CutPlan cut = site.cut();
+    w.section("The setup and the cut");
+    w.given("β", "lay: direction of fall, from true north", s.layDeg(), ANGLE, Basis.CHOSEN);
+    w.given("h_a", "height of the line on the tree", s.attachHeightM(), LENGTH, Basis.CHOSEN);
+    w.given("t", "hinge thickness", s.hingeThicknessM(), SMALL_LENGTH, Basis.CHOSEN);
+    w.given("h_c", "height of the hinge above the ground", cut.heightM(), LENGTH, Basis.ENTERED);
+    w.given(
+        "f_a",
+        "face depth over the diameter at the cut",
+        cut.faceFraction(),
+        NUMBER,
+        Basis.ENTERED);
+    w.given("F_o", "opening of the face", cut.faceOpeningDeg(), ANGLE, Basis.ENTERED);
+    if (cut.hingeWidthM() != null) {
+      w.given("b_e", "hinge width", cut.hingeWidthM(), SMALL_LENGTH, Basis.ENTERED);
+    }
+    if (!cut.wedges()) {
+      w.given("s_k", "width of the saw kerf", cut.kerfM(), SMALL_LENGTH, Basis.ENTERED);
+    }
+  }
+
+  private void tree() {
+    SubjectTree t = site.tree();
+    w.section("The tree");
+    w.note(
+        "Heights are above the ground at the stump, unless they are said to be above the hinge.");
+    w.given("H", "height of the tree", t.heightM(), LENGTH);
+    w.given("D", "stem diameter over bark at breast height", t.dbhM(), SMALL_LENGTH);
+    w.given("λ", "lean of the stem from the vertical", t.leanDeg(), ANGLE);
+    w.given("γ", "direction of the lean, from true north", t.leanAzimuthDeg(), ANGLE);
+    w.allow("q_B", Allowances.BARK_RATIO, NUMBER);
+    if (t.stumpDiameterM() != null) {
+      w.given("D_s", "stem diameter inside the bark at the cut", t.stumpDiameterM(), SMALL_LENGTH);
+    } else {
+      w.allow("q_F", Allowances.FLARE, NUMBER);
+      w.work(
+          "D_s",
+          "stem diameter inside the bark at the cut",
+          "D × q_F × q_B",
+          SMALL_LENGTH,
+          Basis.PLANNING_ALLOWANCE);
+    }
+    if (t.shellM() != null) {
+      w.given("s_w", "sound shell of the hollow stem", t.shellM(), SMALL_LENGTH, Basis.ENTERED);
+    }
+    mass(t);
+    if (t.massCentreM() != null) {
+      w.given("h_g", "height of the mass centre", t.massCentreM(), LENGTH);
+    } else {
+      w.allow("q_g", Allowances.MASS_CENTRE_SHARE, NUMBER);
+      w.work("h_g", "height of the mass centre", "q_g × H", LENGTH, Basis.PLANNING_ALLOWANCE);
+    }
+    if (crownAside()) {
+      w.given("q_c", "share of the mass that is crown", t.crownShare(), NUMBER, Basis.ENTERED);
+      w.given(
+          "c_E",
+          "crown off the stem's axis, to the east",
+          t.crownOffsetM().eastM(),
+          LENGTH,
+          Basis.ENTERED);
+      w.given(
+          "c_N",
+          "crown off the stem's axis, to the north",
+          t.crownOffsetM().northM(),
+          LENGTH,
+          Basis.ENTERED);
+    }
+  }
+
+  /** Whether the crown's offset moves the mass centre. */
+  boolean crownAside() {
+    SubjectTree t = site.tree();
+    return t.crownOffsetM() != null && t.crownShare() != null;
+  }
+
+  private void mass(SubjectTree t) {
+    if (t.massKg() != null) {
+      w.given("m", "green mass of the tree", t.massKg(), MASS);
+      return;
+    }
+    MassEquation e = MassEquation.of(r.species().massGroup());
+    w.given(
+        "b_0",
+        "constant of the mass equation, " + e.name(),
+        e.b0(),
+        NUMBER,
+        Basis.PUBLISHED,
+        e.source());
+    w.given("b_1", "slope of the mass equation", e.b1(), NUMBER, Basis.PUBLISHED, e.source());
+    w.given("q_w", "green mass over dry mass", r.species().dryToGreen(), NUMBER);
+    String cm = Workings.fit(100 * w.unit(SMALL_LENGTH));
+    w.work(
+        "m",
+        "green mass of the tree; the equation takes centimetres and gives kilograms",
+        "exp(b_0 + b_1 × ln(D" + cm + ")) × q_w" + Workings.fit(1 / w.unit(MASS)),
+        MASS,
+        Basis.PUBLISHED);
+  }
+
+  private void wood() {
+    Species s = r.species();
+    w.section("Green wood of the pulled tree, " + s.name());
+    w.given("σ_r", "mean rupture strength", s.morPa(), STRESS);
+    w.given("v_r", "coefficient of variation of the rupture strength", s.morCv(), NUMBER);
+    w.given("E_w", "mean modulus of elasticity", s.moePa(), STRESS);
+    w.given("τ_w", "mean shear strength along the grain", s.shearPa(), STRESS);
+    w.given("σ_c", "compression strength along the grain", s.crushPa(), STRESS);
+    w.given("f_k", "what knots leave of a stem's rupture strength", s.knotFactor(), NUMBER);
+  }
+
+  private void day() {
+    Conditions day = site.conditions();
+    w.section("Wind on the crown");
+    w.given("V", "gust at crown height", day.gustMps(), SPEED);
+    if (day.windTowardDeg() != null) {
+      w.given("θ_w", "direction the wind blows towards", day.windTowardDeg(), ANGLE, Basis.ENTERED);
+    }
+    w.given("C_0", "drag coefficient C, of C·V^(−N)", r.species().dragC(), NUMBER);
+    w.given("N_d", "its power N, V in metres a second", r.species().dragN(), NUMBER);
+    if (r.species().broadleaf() && !site.tree().inLeaf()) {
+      w.allow("q_l", Allowances.LEAFLESS_DRAG, NUMBER);
+    }
+    if (day.airDensity() != null) {
+      w.given("ρ", "density of the air", day.airDensity(), DENSITY, Basis.ENTERED);
+    } else {
+      w.given("ρ", "density of the air", Allowances.AIR_DENSITY, DENSITY);
+    }
+    if (site.tree().crownAreaM2() != null) {
+      w.given("A_c", "frontal area of the crown", site.tree().crownAreaM2(), AREA, Basis.ENTERED);
+    } else {
+      w.given("r_c", "radius of the crown", site.tree().crownRadiusM(), LENGTH, Basis.ENTERED);
+    }
+    w.given("h_b", "height of the crown's base", site.tree().crownBaseM(), LENGTH, Basis.ENTERED);
+    if (site.tree().crownAreaM2() == null) {
+      w.work(
+          "A_c",
+          "frontal area of the crown, an ellipse",
+          "π ÷ 4 × 2 × r_c × (H − h_b)",
+          AREA,
+          Basis.GEOMETRY);
+    }
+  }
+
+  private void points() {
+    w.section("Where the line runs");
+    w.note(
+        "East and north of the site's origin; heights Z of ground and of the line at each support in"
+            + " the site's own levels.");
+    Place stump = site.tree().stump();
+    w.given("X_0", "middle of the stump, east", stump.at().eastM(), LENGTH, Basis.ENTERED);
+    w.given("Y_0", "middle of the stump, north", stump.at().northM(), LENGTH, Basis.ENTERED);
+    w.given("Z_0", "ground at the stump", stump.groundM(), LENGTH, Basis.ENTERED);
+    List<LinePoint> line = r.judged().line();
+    for (int i = 1; i < line.size(); i++) {
+      LinePoint p = line.get(i);
+      w.given("X_" + i, p.id() + ", east", p.at().eastM(), LENGTH, Basis.ENTERED);
+      w.given("Y_" + i, p.id() + ", north", p.at().northM(), LENGTH, Basis.ENTERED);
+      w.given(
+          "Z_" + i, p.id() + ", the line's height there", p.elevationM(), LENGTH, Basis.ENTERED);
+    }
+    w.given(
+        "EA",
+        "softest axial stiffness of line " + r.line().id(),
+        r.line().stiffnessN(),
+        FORCE,
+        Basis.ENTERED);
+    if (site.conditions().slackM() != null) {
+      w.given(
+          "s_0", "slack and sag of the line", site.conditions().slackM(), LENGTH, Basis.ENTERED);
+    } else {
+      w.given("s_0", "slack and sag of the line", Allowances.SLACK, LENGTH);
+    }
+  }
+}
