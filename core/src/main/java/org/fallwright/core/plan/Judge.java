@@ -36,7 +36,7 @@ public final class Judge {
   private final SiteTables tables = new SiteTables();
   private final Landing landing;
   private final Map<Setup, Route> routes = new ConcurrentHashMap<>();
-  private final Map<Pulled, Statics> reckoned = new ConcurrentHashMap<>();
+  private final Map<Pulled, Statics> balances = new ConcurrentHashMap<>();
 
   /**
    * @throws IllegalArgumentException one sentence, where the site names a species, surface or rule
@@ -66,7 +66,23 @@ public final class Judge {
     return judge(setup, false);
   }
 
-  private Judged judge(Setup setup, boolean full) {
+  /**
+   * Every part of the setup, the stem among them, with its strength and its load per newton at the
+   * tree; none where the tree cannot be moved.
+   */
+  public List<Part> parts(Setup setup) {
+    Reckoned r = reckon(setup);
+    TreeSide tree = r.statics().treeSide();
+    return tree.movable()
+        ? stop(r.statics(), r.offer(), r.route(), r.gear().parts()).ratios().parts()
+        : List.of();
+  }
+
+  /** A setup's line, balance, source and gear, before anything is graded. */
+  private record Reckoned(
+      PullSource source, Route route, Statics statics, PullOffer offer, GearParts gear) {}
+
+  private Reckoned reckon(Setup setup) {
     Gear.Source gear = site.source(setup.source()).orElseThrow();
     PullSource source = kind(gear.plugin());
     PullSource driver =
@@ -75,10 +91,20 @@ public final class Judge {
             : kind(site.source(setup.driver().source()).orElseThrow().plugin());
     Route route = routes.computeIfAbsent(setup.withLay(0), w -> Route.of(site, w, source, driver));
     Statics statics = statics(setup, route);
-    TreeSide tree = statics.treeSide();
-    PullOffer offer = Reach.of(site, setup, route, Reach.Pulled.of(tree), source, driver);
+    PullOffer offer =
+        Reach.of(site, setup, route, Reach.Pulled.of(statics.treeSide()), source, driver);
     GearParts parts = new GearParts(site, rules, tables).collect(setup, route, offer);
-    String name = name(setup, source);
+    return new Reckoned(source, route, statics, offer, parts);
+  }
+
+  private Judged judge(Setup setup, boolean full) {
+    Reckoned reckoned = reckon(setup);
+    Route route = reckoned.route();
+    Statics statics = reckoned.statics();
+    TreeSide tree = statics.treeSide();
+    PullOffer offer = reckoned.offer();
+    GearParts parts = reckoned.gear();
+    String name = name(setup, reckoned.source());
 
     Grade grade = new Grade(full);
     landing.knowledge(grade);
@@ -139,7 +165,7 @@ public final class Judge {
       List<LinePoint> points) {}
 
   private Statics statics(Setup s, Route route) {
-    return reckoned.computeIfAbsent(
+    return balances.computeIfAbsent(
         new Pulled(s.layDeg(), s.attachHeightM(), s.hingeThicknessM(), s.line(), route.line()),
         p -> new Statics(subject.pull(s, route)));
   }
