@@ -79,17 +79,17 @@ public record HingeRange(
     Span keep = workable != null ? workable : tight;
     StringBuilder s = new StringBuilder();
     if (workable == null) {
-      s.append("No thickness makes it workable (")
+      s.append("Workable with no hinge (")
           .append(best.weakest().id())
-          .append("); it is tight with a hinge of ");
+          .append("), tight with one from ");
     } else {
-      s.append("Keep the hinge between ");
+      s.append("Workable with a hinge from ");
     }
     s.append(in.thicknessFrom(keep.lowest()))
-        .append(workable == null ? " to " : " and ")
+        .append(" to ")
         .append(in.thicknessTo(keep.highest()));
-    s.append(keep.below() == null ? "" : "; thinner, it fails by " + keep.below().id());
-    s.append(keep.above() == null ? "" : "; thicker, it fails by " + keep.above().id());
+    s.append(keep.below() == null ? "" : "; thinner, the limit is " + keep.below().id());
+    s.append(keep.above() == null ? "" : "; thicker, " + keep.above().id());
     if (!keep.holds(setup.hingeThicknessM())) {
       s.append("; the planned ")
           .append(in.thicknessTo(setup.hingeThicknessM()))

@@ -80,11 +80,11 @@ public record LineHeightRange(
         there.verdict(),
         workable,
         tight,
-        sentence(in, stem, scan.setting(best), there, workable, tight));
+        sentence(in, stem, setup, scan.setting(best), there, workable, tight));
   }
 
   private static String sentence(
-      Inward in, Stem stem, double best, Judged there, Span workable, Span tight) {
+      Inward in, Stem stem, Setup setup, double best, Judged there, Span workable, Span tight) {
     if (tight == null) {
       return there.verdict() == Verdict.CANNOT_JUDGE
           ? "No line height can be advised yet: " + there.weakest().why()
@@ -98,10 +98,12 @@ public record LineHeightRange(
         + in.lengthTo(keep.highest())
         + " above the ground, best at "
         + in.lengthTo(best)
-        + (keep.below() == null ? "" : "; lower, it fails by " + keep.below().id())
+        + (keep.below() == null ? "" : "; lower, the limit is " + keep.below().id())
         + "; higher, "
-        + (keep.above() == null ? stem.reason() : "it fails by " + keep.above().id())
-        + ".";
+        + (keep.above() == null ? stem.reason() : keep.above().id())
+        + (keep.holds(setup.attachHeightM())
+            ? "."
+            : "; the planned " + in.lengthTo(setup.attachHeightM()) + " lies outside.");
   }
 
   /**

@@ -7,6 +7,7 @@ import java.util.stream.Stream;
 import org.fallwright.core.plan.Figures;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.Setup;
+import org.fallwright.core.plan.Verdict;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.reference.SpeciesTable;
 import org.fallwright.core.site.Anchor;
@@ -15,7 +16,7 @@ import org.fallwright.core.tree.StemTaper;
 import org.fallwright.core.units.DisplayUnits;
 
 /**
- * The one test of anchors, slings, grip and roots that a crew can make: the whole tree is pulled to
+ * The one test of anchors, slings, grip and roots that a crew can make: the uncut tree is pulled to
  * the pull to plan for before any cut, looked at, and let slack again. Common practice, no source.
  *
  * <p>The pulled tree's own roots are not among the checks. Beside the proof pull stands what a root
@@ -58,10 +59,10 @@ public record ProofPull(
     watch = List.copyOf(watch);
   }
 
-  /** The proof pull of a judged setup; empty where it cannot be moved or needs no pull. */
+  /** The proof pull of a judged setup; empty where it needs no pull or is not to be made. */
   public static Optional<ProofPull> of(Site site, Judged judged) {
     Figures f = judged.figures();
-    if (!(f.pullPlanN() > 0)) {
+    if (judged.verdict().compareTo(Verdict.TIGHT) > 0 || f.pullPlanN() == 0) {
       return Optional.empty();
     }
     DisplayUnits in = site.display().units();
@@ -81,10 +82,14 @@ public record ProofPull(
             watch(site, judged.setup()),
             "Before any cut pull to "
                 + in.both(u -> u.forceAtLeast(f.pullPlanN()))
-                + " at the tree ("
-                + in.both(u -> u.forceAtLeast(end))
-                + " at the source end while the line comes in), look, and let it slack again; stop"
-                + " where a level on a root flare turns by more than "
+                + " at the tree"
+                + (f.sourceEndPerTree() > 1
+                    ? ", which reads "
+                        + in.both(u -> u.forceAtLeast(end))
+                        + " at the source end while the line comes in"
+                    : "")
+                + "; look, and let it slack again; stop where a level on a root flare turns by more"
+                + " than "
                 + slope(in)
                 + ", a tilt of 0.2°, and never pass 0.25°."));
   }

@@ -10,6 +10,7 @@ import org.fallwright.core.plan.Judge;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.LinePoint;
 import org.fallwright.core.site.Site;
+import org.fallwright.core.units.DisplayUnits;
 
 /**
  * What a load cell shows, wherever along the pull line it is put.
@@ -61,6 +62,7 @@ public record Readings(List<Reading> places, String sentence) {
           List.of(), "The tree cannot be moved by this setup, so there is nothing to read.");
     }
     List<Reading> places = places(judged);
+    Reading last = places.get(places.size() - 1);
     String end = judged.setup().place();
     if (site.anchor(end).isPresent()) {
       judge.parts(judged.setup()).stream()
@@ -69,30 +71,21 @@ public record Readings(List<Reading> places, String sentence) {
           .ifPresent(
               p -> places.add(reading(p.name(), judged.figures(), p.hauling(), p.holding())));
     }
-    Reading last = places.get(judged.setup().redirects().size() == 0 ? 0 : legEnd(places));
-    return new Readings(
-        places,
-        "A pull is there when the greater of its two readings shows, and the ceiling is reached as"
-            + " soon as the lesser shows: at the "
-            + last.at()
-            + " plan for "
-            + site.display().units().both(u -> u.forceAtLeast(last.plan().surelyN()))
-            + " and stop at "
-            + site.display().units().both(u -> u.forceAtMost(last.ceiling().notPassedN()))
-            + ".");
+    return new Readings(places, sentence(site.display().units(), last));
   }
 
-  private static int legEnd(List<Reading> places) {
-    for (int i = 0; i < places.size(); i++) {
-      if (places.get(i).at().startsWith(SOURCE_END)) {
-        return i;
-      }
-    }
-    return 0;
+  private static String sentence(DisplayUnits in, Reading at) {
+    return "A pull is there when the greater of its two readings shows, and the ceiling is reached as"
+        + " soon as the lesser shows: at the "
+        + at.at()
+        + " plan for "
+        + in.both(u -> u.forceAtLeast(at.plan().surelyN()))
+        + " and never pass "
+        + in.both(u -> u.forceAtMost(at.ceiling().notPassedN()))
+        + ".";
   }
 
-  private static final String SOURCE_END = "source end";
-
+  /** The legs and blocks from the tree outwards, the last leg last. */
   private static List<Reading> places(Judged judged) {
     List<LinePoint> line = judged.line();
     int blocks = line.size() - 2;
@@ -106,7 +99,10 @@ public record Readings(List<Reading> places, String sentence) {
     for (int i = 0; i < loads.legs().size(); i++) {
       String between = " (" + line.get(i).id() + " to " + line.get(i + 1).id() + ")";
       String name =
-          i == 0 ? "tree end" : i == blocks ? SOURCE_END + between : "leg " + (i + 1) + between;
+          (blocks == 0
+                  ? "tree end and source end"
+                  : i == 0 ? "tree end" : i == blocks ? "source end" : "leg " + (i + 1))
+              + between;
       places.add(reading(name, judged.figures(), loads.legs().get(i).haulingPerTree(), 1));
       if (i < blocks) {
         LegLoads.Block b = loads.blocks().get(i);

@@ -45,15 +45,23 @@ final class AdviceText {
     part("Hinge", advice.hinge().sentence());
     part("Line height", advice.lineHeight().sentence());
     part("Wind", advice.wind().sentence());
-    part("When it goes", advice.observables().sentence());
     part("What gives first", advice.firstToGive().sentence());
+    part("Limits card", advice.card().sentence());
+    card();
+    if (advice.judged().verdict().compareTo(Verdict.TIGHT) > 0) {
+      part(
+          "Work",
+          "This setup is "
+              + advice.judged().verdict().word()
+              + ", so no proof pull, readings or signs to work by are given.");
+      return;
+    }
+    part("When it goes", advice.observables().sentence());
     if (advice.proofPull() != null) {
       proofPull(advice.proofPull());
     }
     part("Load cell", advice.readings().sentence());
     readings();
-    part("Limits card", advice.card().sentence());
-    card();
   }
 
   private void part(String title, String sentence) {
@@ -75,19 +83,28 @@ final class AdviceText {
   }
 
   private void readings() {
-    row("", "hold", "plan for", "stop at");
+    row("", "hold", "plan for", "ceiling", "never pass");
     for (Readings.Reading r : advice.readings().places()) {
-      row(r.at() + ", coming in", r.hold().haulingN(), r.plan().haulingN(), r.ceiling().haulingN());
-      row(r.at() + ", standing", r.hold().holdingN(), r.plan().holdingN(), r.ceiling().holdingN());
+      Readings.Shown ceiling = r.ceiling();
+      row(
+          r.at() + ", coming in",
+          in.forceAtLeast(r.hold().haulingN()),
+          in.forceAtLeast(r.plan().haulingN()),
+          in.forceAtMost(ceiling.haulingN()),
+          in.forceAtMost(ceiling.notPassedN()));
+      row(
+          r.at() + ", standing",
+          in.forceAtLeast(r.hold().holdingN()),
+          in.forceAtLeast(r.plan().holdingN()),
+          in.forceAtMost(ceiling.holdingN()),
+          in.forceAtMost(ceiling.notPassedN()));
     }
   }
 
-  private void row(String at, double hold, double plan, double ceiling) {
-    row(at, in.forceAtLeast(hold), in.forceAtLeast(plan), in.forceAtMost(ceiling));
-  }
-
-  private void row(String at, String hold, String plan, String ceiling) {
-    out.println(String.format(Locale.ROOT, "  %-36s %12s %12s %12s", at, hold, plan, ceiling));
+  private void row(String at, String hold, String plan, String ceiling, String never) {
+    out.println(
+        String.format(
+            Locale.ROOT, "  %-44s %11s %11s %11s %11s", at, hold, plan, ceiling, never));
   }
 
   private void card() {
