@@ -85,9 +85,7 @@ public record HingeRange(
     } else {
       s.append("Workable with a hinge from ");
     }
-    s.append(in.thicknessFrom(keep.lowest()))
-        .append(" to ")
-        .append(in.thicknessTo(keep.highest()));
+    s.append(in.thicknessFrom(keep.lowest())).append(" to ").append(in.thicknessTo(keep.highest()));
     s.append(keep.below() == null ? "" : "; thinner, the limit is " + keep.below().id());
     s.append(keep.above() == null ? "" : "; thicker, " + keep.above().id());
     if (!keep.holds(setup.hingeThicknessM())) {
