@@ -103,8 +103,7 @@ final class AdviceText {
 
   private void row(String at, String hold, String plan, String ceiling, String never) {
     out.println(
-        String.format(
-            Locale.ROOT, "  %-44s %11s %11s %11s %11s", at, hold, plan, ceiling, never));
+        String.format(Locale.ROOT, "  %-44s %11s %11s %11s %11s", at, hold, plan, ceiling, never));
   }
 
   private void card() {
