@@ -100,6 +100,15 @@ public final class Judge {
         tables);
   }
 
+  /**
+   * Every part of the setup, the stem among them, with its strength and its load per newton at the
+   * tree; none where the tree cannot be moved.
+   */
+  public List<Part> parts(Setup setup) {
+    Ratios ratios = reckon(setup).ratios();
+    return ratios == null ? List.of() : ratios.parts();
+  }
+
   private PullSource source(Setup setup) {
     return kind(site.source(setup.source()).orElseThrow().plugin());
   }
