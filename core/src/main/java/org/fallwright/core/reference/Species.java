@@ -1,7 +1,9 @@
 package org.fallwright.core.reference;
 
+import java.util.Collections;
 import java.util.List;
 import java.util.Map;
+import java.util.TreeMap;
 import java.util.stream.Stream;
 import org.fallwright.core.site.Anchor;
 import org.fallwright.core.units.Range;
@@ -75,8 +77,8 @@ public record Species(
     within(knotFactor, 0.3, 1);
     within(dragC, 0.1, 6);
     within(dragN, 0, 1);
-    shallowPlate = Map.copyOf(shallowPlate);
-    deepPlate = Map.copyOf(deepPlate);
+    shallowPlate = Collections.unmodifiableMap(new TreeMap<>(shallowPlate));
+    deepPlate = Collections.unmodifiableMap(new TreeMap<>(deepPlate));
     Stream.of(shallowPlate, deepPlate)
         .flatMap(m -> m.values().stream())
         .forEach(c -> within(c, 20, 400));

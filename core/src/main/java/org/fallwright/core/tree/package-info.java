@@ -3,8 +3,8 @@
  * measured on it.
  *
  * <p>Read first: {@link org.fallwright.core.tree.TreeFigures} (mass and mass centre with their
- * spreads), then {@link org.fallwright.core.tree.StemTaper}. Heights are above the ground at the
- * stump [m], diameters in metres, masses in kg. The balance of forces is elsewhere: nothing here
- * knows of a lay, a hinge or a line.
+ * spreads), then {@link org.fallwright.core.tree.StemTaper}; how a tape or a clinometer is read is
+ * in the package field below. Heights are above the ground at the stump [m], diameters in metres,
+ * masses in kg. The balance of forces is elsewhere: nothing here knows of a lay, a hinge or a line.
  */
 package org.fallwright.core.tree;

@@ -87,10 +87,8 @@ final class SpeciesCommand implements Callable<Integer> {
     }
     out.println();
     out.println(said("count", all.size()));
-    for (String kind : List.of("read", "secondary", "memory", "practice", "allowance")) {
-      if (!kind.equals("practice")) {
-        out.println("  " + words.getString("mark." + kind) + "  " + words.getString(kind));
-      }
+    for (String kind : List.of("read", "secondary", "memory", "allowance")) {
+      out.println("  " + words.getString("mark." + kind) + "  " + words.getString(kind));
     }
     out.println(words.getString("ranges"));
   }
@@ -148,11 +146,7 @@ final class SpeciesCommand implements Callable<Integer> {
     if (f.kind() == Kind.PUBLISHED) {
       return Sources.of(f.source()).seen() == Sources.Seen.READ ? "read" : "secondary";
     }
-    return switch (f.kind()) {
-      case FROM_MEMORY -> "memory";
-      case COMMON_PRACTICE -> "practice";
-      default -> "allowance";
-    };
+    return f.kind() == Kind.FROM_MEMORY ? "memory" : "allowance";
   }
 
   private static String amount(Figure f) {
