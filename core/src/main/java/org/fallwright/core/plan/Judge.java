@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
+import org.fallwright.core.pull.HaulLine;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullSource;
 import org.fallwright.core.pull.PullSources;
@@ -186,11 +187,20 @@ public final class Judge {
       double attachHeightM,
       double hingeThicknessM,
       String line,
-      List<LinePoint> points) {}
+      List<LinePoint> points,
+      List<LinePoint> haul,
+      HaulLine haulLine) {}
 
   private Statics statics(Setup s, Route route) {
     return reckoned.computeIfAbsent(
-        new Pulled(s.layDeg(), s.attachHeightM(), s.hingeThicknessM(), s.line(), route.line()),
+        new Pulled(
+            s.layDeg(),
+            s.attachHeightM(),
+            s.hingeThicknessM(),
+            s.line(),
+            route.line(),
+            route.haulOnSite(),
+            route.haulLine()),
         p -> new Statics(subject.pull(s, route)));
   }
 

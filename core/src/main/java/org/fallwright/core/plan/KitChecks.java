@@ -54,6 +54,7 @@ final class KitChecks {
     if (reaches && !fit.fits()) {
       grade.rule("joint", 0, 1, "", 0, null, () -> sentence(fit.shortOf()));
     }
+    haulLine(route, takeUp);
     enough("blocks", site.gear().blocks().size(), setup.redirects().size());
     enough(
         "slings", site.gear().slings().stream().mapToInt(Gear.Sling::count).sum(), gear.slings());
@@ -61,6 +62,31 @@ final class KitChecks {
         "connectors",
         site.gear().connectors().stream().mapToInt(Gear.Connector::count).sum(),
         gear.connectors());
+  }
+
+  /** The line of a block system: its parts over the take-up, its haul leg, wraps and tails. */
+  private void haulLine(Route route, double takeUp) {
+    if (route.haulLine() == null) {
+      return;
+    }
+    double there = route.haulLine().lengthM();
+    double needed =
+        route.haulLine().parts() * Math.max(takeUp, Allowances.BLOCKS_APART.value())
+            + route.haulLegM()
+            + Allowances.LINE_SPARE.value();
+    grade.rule(
+        "haul line",
+        there,
+        needed,
+        "m",
+        there / needed,
+        null,
+        () ->
+            "The block system's line is "
+                + in.length(there)
+                + "; its parts, its haul and tails need "
+                + in.length(needed)
+                + ".");
   }
 
   private void enough(String what, int there, int needed) {

@@ -37,11 +37,7 @@ final class Reach {
       return source.offer(
           request(site, gear, way.mode(), way.place(), route.points(), pulled, 1, null));
     }
-    // what the block system multiplies by does not depend on who hauls it
-    double ratio =
-        source
-            .offer(request(site, gear, way.mode(), way.place(), route.points(), pulled, 1, UNIT))
-            .velocityRatio();
+    double ratio = source.haulLine(gear.parameters(), way.mode()).parts();
     Gear.Source hauls = site.source(way.driver().source()).orElseThrow();
     PullOffer haul =
         driver.offer(
@@ -57,11 +53,6 @@ final class Reach {
     return source.offer(
         request(site, gear, way.mode(), way.place(), route.points(), pulled, 1, haul));
   }
-
-  /** One newton, moving as the line moves. */
-  private static final PullOffer UNIT =
-      new PullOffer(
-          1, 1, 1, true, "one newton", 1, false, 0, 0, 0, 0, 0, List.of(), List.of(), List.of());
 
   private static PullRequest request(
       Site site,

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Set;
 import org.fallwright.core.line.LegLoads;
 import org.fallwright.core.line.Point3;
+import org.fallwright.core.pull.HaulLine;
 import org.fallwright.core.pull.PullSource;
 import org.fallwright.core.site.Anchor;
 import org.fallwright.core.site.Gear;
@@ -22,6 +23,7 @@ import org.fallwright.core.zones.Leg;
  * @param line the same points on the site
  * @param haul for a block system, its fixed block and its driver, relative; else empty
  * @param haulOnSite the same on the site
+ * @param haulLine the line of a block system; null: none
  * @param bearingErrorM position error of the first bearing point [m]
  */
 record Route(
@@ -30,6 +32,7 @@ record Route(
     List<LinePoint> line,
     List<Point3> haul,
     List<LinePoint> haulOnSite,
+    HaulLine haulLine,
     double bearingErrorM) {
 
   static Route of(Site site, Setup way, PullSource source, PullSource driver) {
@@ -67,6 +70,7 @@ record Route(
         List.copyOf(line),
         haul.stream().map(p -> relative(site, p)).toList(),
         haul,
+        way.driver() == null ? null : source.haulLine(gear.parameters(), way.mode()),
         bearing.errorM());
   }
 
@@ -144,5 +148,10 @@ record Route(
               Set.of(p.get(i).id(), p.get(i + 1).id())));
     }
     return legs;
+  }
+
+  /** Length of the haul leg of a block system [m]; 0: there is none. */
+  double haulLegM() {
+    return haul.isEmpty() ? 0 : haul.get(0).minus(haul.get(1)).length();
   }
 }

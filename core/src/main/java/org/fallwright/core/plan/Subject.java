@@ -3,6 +3,7 @@ package org.fallwright.core.plan;
 import java.util.ArrayList;
 import java.util.List;
 import org.fallwright.core.line.Point3;
+import org.fallwright.core.pull.HaulLine;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.reference.Figure;
 import org.fallwright.core.reference.Species;
@@ -130,9 +131,23 @@ final class Subject {
             setup.attachHeightM() - cut.heightM(),
             points,
             points.stream().map(p -> line.stiffnessN()).toList(),
-            null,
+            haul(route),
             slack == null ? Allowances.SLACK.value() : slack),
         spread(setup, route));
+  }
+
+  /**
+   * The line of a block system as one more loaded leg: its haul leg and its parts, each with one
+   * over their number of the tension at the tree.
+   */
+  private static LineSet.BaseLeg haul(Route route) {
+    HaulLine haul = route.haulLine();
+    return haul == null
+        ? null
+        : new LineSet.BaseLeg(
+            route.haulLegM() + haul.parts() * Allowances.BLOCKS_APART.value(),
+            haul.stiffnessN(),
+            1 / haul.parts());
   }
 
   private Spread spread(Setup setup, Route route) {

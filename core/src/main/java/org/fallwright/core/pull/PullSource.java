@@ -29,6 +29,14 @@ public interface PullSource {
   }
 
   /**
+   * The line it is rigged with, run in that mode; only a source that another one drives has one,
+   * and must.
+   */
+  default HaulLine haulLine(ObjectNode parameters, String mode) {
+    return null;
+  }
+
+  /**
    * What it gives at its place, at the least and at the most.
    *
    * @throws IllegalArgumentException one sentence naming the parameter, its value and its limit

@@ -152,6 +152,9 @@ public final class Allowances {
           "slack", 0.3, "m", "slack and sag to take in before the line pulls, unless entered");
   public static final Figure LINE_SPARE =
       allowance("line-spare", 2.0, "m", "line used up by wraps, tails and knots");
+  public static final Figure BLOCKS_APART =
+      allowance(
+          "blocks-apart", 3.0, "m", "distance of the two blocks of a block system when it is taut");
   public static final Figure LINE_OFF_HEADING_MOST =
       allowance(
           "line-off-heading-most", 15, "deg", "greatest angle of a line off a vehicle's heading");

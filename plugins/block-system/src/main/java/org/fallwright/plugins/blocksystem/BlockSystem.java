@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Set;
+import org.fallwright.core.pull.HaulLine;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullOffer.Part;
 import org.fallwright.core.pull.PullRequest;
@@ -77,19 +78,21 @@ public final class BlockSystem implements PullSourceExtension {
   }
 
   @Override
+  public HaulLine haulLine(ObjectNode parameters, String mode) {
+    ParameterReader reader = read(parameters);
+    return new HaulLine(
+        parts(mode, reader), reader.number("line_stiffness_N"), reader.number("line_length_m"));
+  }
+
+  @Override
   public PullOffer offer(PullRequest request) {
     ParameterReader reader = read(request.parameters());
-    List<String> rigs = reader.choices("parts");
-    if (!rigs.contains(request.mode())) {
-      throw new IllegalArgumentException(
-          "mode is \"" + request.mode() + "\"; this block system is rigged with " + rigs);
-    }
+    int n = parts(request.mode(), reader);
     PullOffer driver = request.driver();
     if (driver == null) {
       throw new IllegalArgumentException(
           "driver is not stated; a block system needs another source that hauls it");
     }
-    int n = Integer.parseInt(request.mode());
     Tackle tackle = new Tackle(n, reader.number("efficiency"), reader.choice("form").equals(FIXED));
     return new PullOffer(
         driver.lowN() * tackle.gain(),
@@ -107,6 +110,15 @@ public final class BlockSystem implements PullSourceExtension {
         parts(reader, tackle, driver),
         driver.checks(),
         notes(request, n, driver));
+  }
+
+  private static int parts(String mode, ParameterReader reader) {
+    List<String> rigs = reader.choices("parts");
+    if (!rigs.contains(mode)) {
+      throw new IllegalArgumentException(
+          "mode is \"" + mode + "\"; this block system is rigged with " + rigs);
+    }
+    return Integer.parseInt(mode);
   }
 
   private static ParameterReader read(ObjectNode parameters) {

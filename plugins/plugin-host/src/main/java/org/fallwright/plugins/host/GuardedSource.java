@@ -5,6 +5,7 @@ import java.util.Arrays;
 import java.util.HashSet;
 import java.util.List;
 import java.util.function.Supplier;
+import org.fallwright.core.pull.HaulLine;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullRequest;
 import org.fallwright.core.pull.PullSource;
@@ -79,6 +80,16 @@ final class GuardedSource implements PullSource {
         guarded("say how high its line is", () -> source.lineHeightM(parameters.deepCopy()));
     if (!(answer >= 0 && answer <= 5)) {
       throw nonsense("says its line is " + answer + " m high; it must be from 0 to 5 m", null);
+    }
+    return answer;
+  }
+
+  @Override
+  public HaulLine haulLine(ObjectNode parameters, String mode) {
+    HaulLine answer =
+        guarded("say what it is rigged with", () -> source.haulLine(parameters.deepCopy(), mode));
+    if (answer == null && description.needsDriver()) {
+      throw nonsense("needs another source to haul it and names no line for that", null);
     }
     return answer;
   }

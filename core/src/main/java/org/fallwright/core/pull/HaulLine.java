@@ -1,0 +1,19 @@
+package org.fallwright.core.pull;
+
+import org.fallwright.core.units.Range;
+
+/**
+ * The line that a source which another one drives is rigged with.
+ *
+ * @param parts metres of it that are hauled for a metre at the source's line end; each of its parts
+ *     then carries one over that of the tension there
+ * @param stiffnessN its axial stiffness EA, the softest [N]
+ * @param lengthM its length [m]
+ */
+public record HaulLine(double parts, double stiffnessN, double lengthM) {
+  public HaulLine {
+    Range.check("parts", parts, 1, 100, "");
+    Range.check("stiffness_N", stiffnessN, 1e3, 1e9, "N");
+    Range.check("length_m", lengthM, 1, 1000, "m");
+  }
+}
