@@ -1,6 +1,7 @@
 package org.fallwright.core.plan;
 
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
@@ -112,6 +113,9 @@ public final class Judge {
     }
     landing.people(grade, setup, zones, offer);
     notes.addAll(offer.notes());
+    if (full) {
+      notes.addAll(LandNotes.of(site, setup));
+    }
     Check weakest = grade.weakest();
     return new Judged(
         setup,
@@ -203,7 +207,11 @@ public final class Judge {
   }
 
   private void usable(Grade grade, GearParts parts) {
+    Map<String, GearParts.Held> byAnchor = new LinkedHashMap<>();
     for (GearParts.Held h : parts.anchors()) {
+      byAnchor.merge(h.anchor().id(), h, (a, b) -> a.capacity().refused() ? a : b);
+    }
+    for (GearParts.Held h : byAnchor.values()) {
       boolean no = h.capacity().refused();
       grade.factored(
           "usable " + h.anchor().id(),
