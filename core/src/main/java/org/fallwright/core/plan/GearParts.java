@@ -193,8 +193,8 @@ final class GearParts {
             .or(() -> hauling.refused().or(holding::refused).map(Capacity::refuse));
     anchors.add(new Held(two, no.orElseGet(Capacity::shared)));
     if (no.isEmpty()) {
-      bear(first, on.along(apex.minus(one), hauling.first(), holding.first()));
-      bear(second, on.along(apex.minus(other), hauling.second(), holding.second()));
+      bear(first, on.along(hauling.firstPull(), hauling.first(), holding.first()));
+      bear(second, on.along(hauling.secondPull(), hauling.second(), holding.second()));
     }
   }
 

@@ -40,12 +40,22 @@ class BridleTest {
     assertThat(pulled(0, -1, 0).refused()).isPresent();
   }
 
+  /** A load that rises swings both legs up, and both anchors with them. */
   @Test
-  void offThePlaneTheWholeLoadIsStillShared() {
-    double up = 10 * Math.tan(Math.toRadians(14.9));
+  void aRisingLoadLiftsBothAnchors() {
+    double up = 10 * Math.tan(Math.toRadians(20));
     Bridle b = pulled(0, 10, up);
     assertThat(b.first()).isCloseTo(0.625, within(1e-9));
-    assertThat(pulled(0, 10, 10 * Math.tan(Math.toRadians(15.1))).refused()).isPresent();
+    assertThat(b.second()).isCloseTo(0.625, within(1e-9));
+    assertThat(b.firstPull().length()).isCloseTo(5, within(1e-9));
+    // four fifths of the leg lie along the load's rise
+    double rise = Math.toDegrees(Math.asin(0.8 * Math.sin(Math.toRadians(20))));
+    assertThat(b.firstPull().riseDeg()).isCloseTo(rise, within(1e-9));
+    assertThat(b.secondPull().riseDeg()).isCloseTo(rise, within(1e-9));
+    assertThat(b.firstPull().e()).isCloseTo(3, within(1e-9));
+    assertThat(b.secondPull().e()).isCloseTo(-3, within(1e-9));
+    assertThat(pulled(0, 10, 10.2).refused())
+        .hasValueSatisfying(w -> assertThat(w).contains("swing by 46 degrees"));
   }
 
   @Test

@@ -218,15 +218,15 @@ class SpeciesReferenceTest {
     String what = key + " on " + soil;
     CheckValue.of(source, what + ", shallow", shallow, "N·m/kg")
         .isMet(s.rootPlate(soil, false).value(), 0);
-    CheckValue.of(source, what + ", deep", deep, "N·m/kg").isMet(s.rootPlate(soil, true).value(), 0);
+    CheckValue.of(source, what + ", deep", deep, "N·m/kg")
+        .isMet(s.rootPlate(soil, true).value(), 0);
     assertThat(deep / shallow).isBetween(1.10, 1.17);
   }
 
   /** Byrne 2005 (abstract): 77.4 N·m/kg for western hemlock, the least of four species. */
   @Test
   void leastRootPlateConstantRead() {
-    double least =
-        SpeciesTable.of("western-hemlock").rootPlate(Soil.GLEYED_MINERAL, false).value();
+    double least = SpeciesTable.of("western-hemlock").rootPlate(Soil.GLEYED_MINERAL, false).value();
     CheckValue.of("Byrne 2005 (abstract)", "western-hemlock, root plate", 77.4, "N·m/kg")
         .isMet(least, 0);
     assertThat(least).isLessThan(94.5);

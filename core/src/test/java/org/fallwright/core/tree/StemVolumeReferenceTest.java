@@ -54,7 +54,8 @@ class StemVolumeReferenceTest {
     Soil soil = Soil.FREE_DRAINING_MINERAL;
     double shallow = mass * s.rootPlate(soil, false).value();
     worked("the same, overturned, shallow", 145_200, "N·m", shallow, 100);
-    worked("the same, overturned, deep", 168_900, "N·m", mass * s.rootPlate(soil, true).value(), 100);
+    worked(
+        "the same, overturned, deep", 168_900, "N·m", mass * s.rootPlate(soil, true).value(), 100);
   }
 
   /** Beech 40 cm, 25 m by the stand-in: 1.153 m³ and 1,335 kg; spruce 60 cm, 30 m: 2,890 kg. */
