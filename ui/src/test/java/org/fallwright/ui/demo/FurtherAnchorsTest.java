@@ -46,10 +46,10 @@ class FurtherAnchorsTest {
   @Test
   void twoLegsShareTheWinchsLoad() {
     Judged j = withLegs("A1", "A2").judge(ON_LEGS);
-    double whole = part(j, "connector at B1").planN();
-    double one = part(j, "anchor A1").planN();
-    double other = part(j, "anchor A2").planN();
-    assertThat(part(j, "sling at A1").planN()).isCloseTo(one, within(1e-6 * one));
+    double whole = part(j, "connector at B1").atPlanN();
+    double one = part(j, "anchor A1").atPlanN();
+    double other = part(j, "anchor A2").atPlanN();
+    assertThat(part(j, "sling at A1").atPlanN()).isCloseTo(one, within(1e-6 * one));
     // two sides of a triangle
     assertThat(one + other).isGreaterThan(whole);
     assertThat(Math.abs(one - other)).isLessThan(whole);
@@ -70,8 +70,8 @@ class FurtherAnchorsTest {
   void anAnchorThatBearsTwiceIsLoadedByBoth() {
     Setup twice = redirected(0, "hand-winch", "pull", "B1", "A1");
     Setup once = redirected(0, "hand-winch", "pull", "S1", "A1");
-    double both = part(withLegs("A1", "A2").judge(twice), "anchor A1").planN();
-    assertThat(both).isGreaterThan(part(DEMO.judge(once), "anchor A1").planN());
+    double both = part(withLegs("A1", "A2").judge(twice), "anchor A1").atPlanN();
+    assertThat(both).isGreaterThan(part(DEMO.judge(once), "anchor A1").atPlanN());
   }
 
   @Test
