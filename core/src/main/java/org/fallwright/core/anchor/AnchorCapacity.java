@@ -28,8 +28,9 @@ public final class AnchorCapacity {
 
   /** Strength of the anchor under that load. */
   public static Capacity of(Anchor anchor, AnchorLoad load, AnchorFigures figures) {
-    if (anchor.rejected() != null) {
-      return Capacity.refuse("rejected on the site: " + shortened(anchor.rejected()));
+    Optional<Capacity> rejected = rejected(anchor);
+    if (rejected.isPresent()) {
+      return rejected.get();
     }
     if (anchor instanceof Anchor.StandingTree tree) {
       return tree(tree, load, figures.wood(tree.species(), tree.soil(), tree.deepRooting()));
@@ -40,11 +41,26 @@ public final class AnchorCapacity {
     if (anchor instanceof Anchor.ParkedVehicle vehicle) {
       return vehicle(vehicle, load, figures.tyreGrip(vehicle.surface(), vehicle.wet()));
     }
-    Anchor.RatedPoint point = (Anchor.RatedPoint) anchor;
-    return Capacity.holds(
-        point.breakingLoadN(),
-        "rated point",
-        "breaking load vouched for by " + shortened(point.vouchedBy()));
+    if (anchor instanceof Anchor.Pickets pickets) {
+      return Pickets.capacity(pickets, load);
+    }
+    if (anchor instanceof Anchor.BuriedLog log) {
+      return Deadman.capacity(log, load);
+    }
+    if (anchor instanceof Anchor.RatedPoint point) {
+      return Capacity.holds(
+          point.breakingLoadN(),
+          "rated point",
+          "breaking load vouched for by " + shortened(point.vouchedBy()));
+    }
+    throw new IllegalArgumentException(
+        anchor.id() + " has two legs; each leg's anchor must be asked by itself");
+  }
+
+  /** The refusal of an anchor that was rejected on the site. */
+  public static Optional<Capacity> rejected(Anchor anchor) {
+    return Optional.ofNullable(anchor.rejected())
+        .map(why -> Capacity.refuse("rejected on the site: " + shortened(why)));
   }
 
   /**
@@ -73,9 +89,12 @@ public final class AnchorCapacity {
     WoodAnchor holds =
         WoodAnchor.of(
             mass, wood, tree.dbhM(), tree.slingHeightM(), tree.saturated(), load.downhill());
+    String tied = tree.tieBack() ? "; a tie-back that is not tensioned counts nothing" : "";
     return holds.rootPlateN() <= holds.stemN()
-        ? Capacity.holds(holds.rootPlateN(), "root plate", rootPlateWhy(tree.saturated(), load))
-        : Capacity.holds(holds.stemN(), "stem bending", "the stem breaks before the roots let go");
+        ? Capacity.holds(
+            holds.rootPlateN(), "root plate", rootPlateWhy(tree.saturated(), load) + tied)
+        : Capacity.holds(
+            holds.stemN(), "stem bending", "the stem breaks before the roots let go" + tied);
   }
 
   private static Capacity stump(Anchor.Stump stump, AnchorLoad load, WoodFigures wood) {

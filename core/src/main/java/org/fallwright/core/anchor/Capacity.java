@@ -33,11 +33,18 @@ public record Capacity(
     Range.text("why", why);
   }
 
+  /** Of a point that holds nothing by itself: its legs' anchors do, each a part of its own. */
+  public static Capacity shared() {
+    return new Capacity(
+        0, DESIGN_FACTOR, LAST_FACTOR, "legs", false, "the anchors of its legs share its load");
+  }
+
   static Capacity holds(double strengthN, String mode, String why) {
     return new Capacity(strengthN, DESIGN_FACTOR, LAST_FACTOR, mode, false, why);
   }
 
-  static Capacity refuse(String why) {
+  /** Refused, with the reason. */
+  public static Capacity refuse(String why) {
     return new Capacity(0, DESIGN_FACTOR, LAST_FACTOR, "refused", true, why);
   }
 }

@@ -1,22 +1,27 @@
 package org.fallwright.core.line;
 
+import org.fallwright.core.reference.Hardware;
 import org.fallwright.core.units.Range;
 
 /**
  * Round-link chain by grade: breaking load = R·2·π·d²/4, working load a quarter of it; R the mean
- * stress at break [Pa], d the diameter of the link's wire [m]. Formula of the lifting-chain grades;
- * agrees with the default working loads of 49 CFR 393.108 within 3 %. A chain without a mark counts
- * as the weakest grade, 49 CFR 393.108.
+ * stress at break [Pa], d the diameter of the link's wire [m]. Against the default working loads of
+ * 49 CFR 393.108 the two lifting grades come within 3 %; grades 30, 43 and 70 come out lower than
+ * the table, which asks less of a tie-down, or the same. A chain without a mark counts as grade 30,
+ * 49 CFR 393.108. Grade 70 is a tie-down grade and not for slings.
  */
 public enum ChainGrade {
-  UNMARKED(3e8),
-  GRADE_80(8e8),
-  GRADE_100(1e9);
+  /** Also what a chain without a mark counts as. */
+  GRADE_30(30),
+  GRADE_43(43),
+  GRADE_70(70),
+  GRADE_80(80),
+  GRADE_100(100);
 
   private final double stressPa;
 
-  ChainGrade(double stressPa) {
-    this.stressPa = stressPa;
+  ChainGrade(int grade) {
+    stressPa = 1e6 * Hardware.value("chain.g" + grade + ".stress");
   }
 
   /** Breaking load [N] of a wire diameter [m]. */
@@ -27,6 +32,6 @@ public enum ChainGrade {
 
   /** Working load [N] of a wire diameter [m]. */
   public double workingN(double diameterM) {
-    return breakingN(diameterM) / 4;
+    return breakingN(diameterM) / Hardware.value("chain.factor");
   }
 }

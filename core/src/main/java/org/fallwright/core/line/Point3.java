@@ -31,6 +31,11 @@ public record Point3(double e, double n, double up) {
     return new Point3(factor * e, factor * n, factor * up);
   }
 
+  /** Scalar product with the other as vectors. */
+  public double dot(Point3 other) {
+    return e * other.e + n * other.n + up * other.up;
+  }
+
   /** Length as a vector. */
   public double length() {
     return Math.sqrt(e * e + n * n + up * up);
@@ -46,7 +51,6 @@ public record Point3(double e, double n, double up) {
     double ce = n * other.up - up * other.n;
     double cn = up * other.e - e * other.up;
     double cu = e * other.n - n * other.e;
-    double dot = e * other.e + n * other.n + up * other.up;
-    return Math.toDegrees(Math.atan2(Math.sqrt(ce * ce + cn * cn + cu * cu), dot));
+    return Math.toDegrees(Math.atan2(Math.sqrt(ce * ce + cn * cn + cu * cu), dot(other)));
   }
 }

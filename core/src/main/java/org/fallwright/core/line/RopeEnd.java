@@ -1,38 +1,38 @@
 package org.fallwright.core.line;
 
-/**
- * What an end or a knot leaves of a rope's strength. Published: wire ends US Army TM 5-3810-305-10
- * Table 4; fibre ends and knots Jacobson, Knots for the Outdoors, p. 24 (after Plymouth Cordage
- * 1946). HMPE is never knotted: it keeps 30 to 40 % (from memory).
- */
+import org.fallwright.core.reference.Figure;
+import org.fallwright.core.reference.Hardware;
+
+/** What an end or a knot leaves of a rope's strength. */
 public enum RopeEnd {
-  WIRE_RESIN_SOCKET(true, false, 1.00),
-  WIRE_SPLICED_SLEEVE(true, false, 0.925),
-  WIRE_HAND_SPLICE(true, false, 0.86),
-  WIRE_CLIPS(true, false, 0.80),
-  WIRE_WEDGE_SOCKET(true, false, 0.75),
-  EYE_SPLICE(false, false, 0.95),
-  SHORT_SPLICE(false, false, 0.90),
-  TWO_HALF_HITCHES(false, true, 0.75),
-  CLOVE_HITCH(false, true, 0.75),
-  ANCHOR_BEND(false, true, 0.70),
-  TIMBER_HITCH(false, true, 0.70),
-  BOWLINE(false, true, 0.60),
-  OVERHAND(false, true, 0.45);
+  WIRE_RESIN_SOCKET("wire-end.resin-socket", false),
+  WIRE_SWAGED_SOCKET("wire-end.swaged-socket", false),
+  WIRE_SLEEVE_STEEL_CORE("wire-end.sleeve-steel-core", false),
+  WIRE_SLEEVE_FIBRE_CORE("wire-end.sleeve-fibre-core", false),
+  WIRE_HAND_SPLICE("wire-end.hand-splice", false),
+  WIRE_CLIPS("wire-end.clips", false),
+  WIRE_WEDGE_SOCKET("wire-end.wedge-socket", false),
+  EYE_SPLICE("fibre-end.eye-splice", false),
+  SHORT_SPLICE("fibre-end.short-splice", false),
+  TWO_HALF_HITCHES("fibre-end.two-half-hitches", true),
+  CLOVE_HITCH("fibre-end.clove-hitch", true),
+  ANCHOR_BEND("fibre-end.anchor-bend", true),
+  TIMBER_HITCH("fibre-end.timber-hitch", true),
+  BOWLINE("fibre-end.bowline", true),
+  FIGURE_EIGHT_STOPPER("fibre-end.figure-eight-stopper", true),
+  OVERHAND("fibre-end.overhand", true);
 
-  private final boolean wire;
+  private final Figure figure;
   private final boolean knot;
-  private final double factor;
 
-  RopeEnd(boolean wire, boolean knot, double factor) {
-    this.wire = wire;
+  RopeEnd(String key, boolean knot) {
+    figure = Hardware.of(key);
     this.knot = knot;
-    this.factor = factor;
   }
 
   /** Whether it is an end of a wire rope. */
   public boolean wire() {
-    return wire;
+    return figure.key().startsWith("wire-end");
   }
 
   /** Whether it is a knot. */
@@ -40,8 +40,20 @@ public enum RopeEnd {
     return knot;
   }
 
+  /** Share of the rope's breaking load that it keeps, with its source. */
+  public Figure figure() {
+    return figure;
+  }
+
   /** Share of the rope's breaking load that it keeps. */
   public double factor() {
-    return factor;
+    return figure.value();
+  }
+
+  /** The same in a rope of that fibre: a knot in a slippery one keeps much less. */
+  public double factorIn(FibreRope fibre) {
+    return knot && fibre == FibreRope.HMPE
+        ? Math.min(factor(), Hardware.value("fibre-end.hmpe-knot"))
+        : factor();
   }
 }

@@ -1,6 +1,8 @@
 package org.fallwright.core.line;
 
+import org.fallwright.core.reference.Hardware;
 import org.fallwright.core.units.Range;
+import org.fallwright.core.units.Units;
 
 /** Shackles: the factor of their standard, side loads, and what an unmarked one may carry. */
 public final class Shackles {
@@ -8,28 +10,33 @@ public final class Shackles {
    * Design factor up to 150 short tons. Published: ASME B30.26-2010, 26-1. A breaking load is never
    * to be reckoned with more.
    */
-  public static final double DESIGN_FACTOR = 5;
+  public static final double DESIGN_FACTOR = Hardware.value("shackle.factor");
 
-  private static final double SHORT_TON_N = 8896.443230521;
+  private static final double LARGE_N = 150 * Units.SHORT_TON_FORCE;
 
   private Shackles() {}
+
+  /** Design factor of a shackle of that rated load [N]. */
+  public static double designFactor(double ratedN) {
+    Range.check("rated_load_N", ratedN, 100, 1e7, "N");
+    return ratedN <= LARGE_N ? DESIGN_FACTOR : Hardware.value("shackle.factor-large");
+  }
 
   /**
    * Rated load of a shackle without a readable mark [N]: 3·D² short tons, D the diameter of its
    * body in inches. Published: US Navy rigging training manual.
    */
   public static double unmarkedN(double bodyDiameterM) {
-    double inches = Range.check("body_diameter_m", bodyDiameterM, 0.004, 0.1, "m") / 0.0254;
-    return 3 * inches * inches * SHORT_TON_N;
+    double inches = Range.check("body_diameter_m", bodyDiameterM, 0.004, 0.1, "m") / Units.INCH;
+    return Hardware.value("shackle.unmarked") * inches * inches * Units.SHORT_TON_FORCE;
   }
 
   /**
-   * Share of the rating that is left when it is loaded aside by an angle [degrees]: 1, 0.7 and 0.5
-   * up to 5, 45 and 90 degrees. Angle bands published in WAC 296-155-33905; shares from training
-   * slides on B30.26.
+   * Share of the rating that is left when it is loaded aside by an angle [degrees]: full up to 5,
+   * then by the bands that end at 45 and 90.
    */
   public static double sideLoad(double asideDeg) {
     Range.check("aside_deg", asideDeg, 0, 90, "degrees");
-    return asideDeg <= 5 ? 1 : asideDeg <= 45 ? 0.7 : 0.5;
+    return Hardware.value("shackle.aside-" + (asideDeg <= 5 ? 5 : asideDeg <= 45 ? 45 : 90));
   }
 }

@@ -1,23 +1,25 @@
 package org.fallwright.core.line;
 
+import org.fallwright.core.reference.Hardware;
 import org.fallwright.core.units.Range;
 
 /**
- * Load on a sling as rigged over its vertical rating. Basket: 2·sin of the angle of its legs to the
- * horizontal (statics). Choker: natural fibre 0.45, the lower of 29 CFR 1918 App. II Table 1
- * (published); wire 0.75 and synthetic 0.80 from memory of ASME B30.9, for a choke angle above 120
- * degrees.
+ * What a sling may carry as it is laid, over its vertical rating. Basket: 2·sin of the angle of its
+ * legs to the horizontal (statics). Choker: a share by its material, and a share of that by the
+ * angle at which it is choked: a sling hauled tight round a thin stem bends sharply.
  */
 public enum SlingHitch {
-  VERTICAL(1),
-  CHOKER_NATURAL_FIBRE(0.45),
-  CHOKER_WIRE(0.75),
-  CHOKER_SYNTHETIC(0.80);
+  VERTICAL("sling.vertical"),
+  CHOKER_NATURAL_FIBRE("sling.choker-natural"),
+  CHOKER_WIRE("sling.choker-wire"),
+  CHOKER_SYNTHETIC("sling.choker-synthetic");
+
+  private static final int[] CHOKE_FROM_DEG = {120, 90, 60, 30, 0};
 
   private final double factor;
 
-  SlingHitch(double factor) {
-    this.factor = factor;
+  SlingHitch(String key) {
+    factor = Hardware.value(key);
   }
 
   /** Factor on the vertical rating. */
@@ -29,5 +31,19 @@ public enum SlingHitch {
   public static double basket(double legToHorizontalDeg) {
     Range.check("leg_to_horizontal_deg", legToHorizontalDeg, 30, 90, "degrees");
     return 2 * Math.sin(Math.toRadians(legToHorizontalDeg));
+  }
+
+  /**
+   * Share of a choker's rating that is left at an angle of choke [degrees], the angle between the
+   * standing part and the part that runs through the eye.
+   */
+  public static double choke(double chokeDeg) {
+    Range.check("choke_deg", chokeDeg, 0, 180, "degrees");
+    int step = 0;
+    // the edges of the bands are whole degrees; at 120 itself the lower band counts
+    while (chokeDeg < CHOKE_FROM_DEG[step] || step == 0 && chokeDeg == CHOKE_FROM_DEG[0]) {
+      step++;
+    }
+    return Hardware.value("sling.choke-from-" + CHOKE_FROM_DEG[step]);
   }
 }

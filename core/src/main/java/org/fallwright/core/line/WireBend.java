@@ -1,5 +1,7 @@
 package org.fallwright.core.line;
 
+import java.util.Arrays;
+import org.fallwright.core.reference.Hardware;
 import org.fallwright.core.reference.Kind;
 import org.fallwright.core.units.Range;
 
@@ -12,8 +14,9 @@ public final class WireBend {
   /** What stands behind the curve. */
   public static final Kind KIND = Kind.FROM_MEMORY;
 
-  private static final double[] RATIO = {1, 2, 4, 6, 8, 10, 15, 20, 30, 40};
-  private static final double[] KEEPS = {.50, .65, .75, .79, .83, .86, .89, .91, .93, .95};
+  private static final int[] RATIO = {1, 2, 4, 6, 8, 10, 15, 20, 30, 40};
+  private static final double[] KEEPS =
+      Arrays.stream(RATIO).mapToDouble(r -> Hardware.value("wire.bend." + r)).toArray();
 
   private WireBend() {}
 

@@ -1,5 +1,6 @@
 package org.fallwright.core.line;
 
+import org.fallwright.core.reference.Hardware;
 import org.fallwright.core.reference.Kind;
 import org.fallwright.core.units.Range;
 
@@ -10,8 +11,8 @@ import org.fallwright.core.units.Range;
  * of 6×19 fibre core ropes (see the tests).
  */
 public enum WireRope {
-  FIBRE_CORE(0.330),
-  STEEL_CORE(0.356);
+  FIBRE_CORE("wire.fibre-core"),
+  STEEL_CORE("wire.steel-core");
 
   /** What stands behind the constants. */
   public static final Kind KIND = Kind.FROM_MEMORY;
@@ -21,8 +22,8 @@ public enum WireRope {
 
   private final double constant;
 
-  WireRope(double constant) {
-    this.constant = constant;
+  WireRope(String key) {
+    constant = Hardware.value(key);
   }
 
   /** Minimum breaking load [N] of a diameter [m] and a grade [Pa]. */
@@ -38,7 +39,7 @@ public enum WireRope {
    */
   public static double safeMassKg(double diameterM) {
     double mm = 1000 * Range.check("diameter_m", diameterM, 0.003, 0.1, "m");
-    return 8 * mm * mm;
+    return Hardware.value("wire.safe-mass") * mm * mm;
   }
 
   /**

@@ -5,7 +5,8 @@
  * <p>Read {@link org.fallwright.core.line.LegLoads} first (loads by the angles of the path), then
  * {@link org.fallwright.core.line.PathFit} (is there line enough) and {@link
  * org.fallwright.core.line.PartStrength} (ultimate strength and factors of a part). The other
- * classes are published tables of ropes, chains, ends and slings.
+ * classes answer for ropes, chains, ends, slings, sheaves and wraps, each by rows of {@link
+ * org.fallwright.core.reference.Hardware}.
  *
  * <p>Points in metres east, north and up; forces per newton at the tree where a name says so.
  * Searches nothing and knows nothing of plans or rule sets.

@@ -2,8 +2,11 @@ package org.fallwright.core.plan;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import java.util.function.BinaryOperator;
 import org.fallwright.core.anchor.AnchorCapacity;
 import org.fallwright.core.anchor.AnchorLoad;
+import org.fallwright.core.anchor.Bridle;
 import org.fallwright.core.anchor.Capacity;
 import org.fallwright.core.line.LegLoads;
 import org.fallwright.core.line.PartStrength;
@@ -108,26 +111,86 @@ final class GearParts {
         .orElseThrow();
   }
 
+  /**
+   * What bears on an anchor, per newton at the tree.
+   *
+   * @param haulingForce direction of the force while hauling
+   * @param holdingForce the same while holding
+   * @param hauling its amount while hauling
+   * @param holding its amount while holding
+   * @param gearLeast least that slings and connectors must bear at the source's most, by rule
+   * @param anchorLeast the same of the anchor
+   */
+  private record Bearing(
+      Point3 haulingForce,
+      Point3 holdingForce,
+      double hauling,
+      double holding,
+      double gearLeast,
+      double anchorLeast) {
+    Bearing along(Point3 leg, double haulingShare, double holdingShare) {
+      return new Bearing(
+          leg,
+          leg,
+          hauling * haulingShare,
+          holding * holdingShare,
+          gearLeast * holdingShare,
+          anchorLeast * holdingShare);
+    }
+  }
+
   private void redirect(Anchor a, LegLoads.Block block) {
-    double gearOverSource = rules.redirectGearOverSource().value();
-    double anchorOverSource = rules.redirectAnchorTwiceT().value();
     Gear.Block b = Route.block(site);
     add(
         "block at " + a.id(),
         PartStrength.rated(b.ratedLoadN(), b.standardFactor()),
         block.hauling(),
         block.holding());
-    hardware(
-        a.id(), block.hauling(), Math.max(block.holding(), gearOverSource), gearOverSource > 0);
-    hold(a, block.haulingForce(), block.hauling(), Math.max(block.holding(), anchorOverSource));
+    bear(
+        a,
+        new Bearing(
+            block.haulingForce(),
+            block.holdingForce(),
+            block.hauling(),
+            block.holding(),
+            rules.redirectGearOverSource().value(),
+            rules.redirectAnchorTwiceT().value()));
   }
 
   private void fasten(Anchor a, Point3 pull, double hauling, double holding) {
-    if (hauling <= 0 && holding <= 0) {
+    if (hauling > 0 || holding > 0) {
+      bear(a, new Bearing(pull, pull, hauling, holding, 0, 0));
+    }
+  }
+
+  private void bear(Anchor a, Bearing on) {
+    double gear = Math.max(on.holding(), on.gearLeast());
+    if (!(a instanceof Anchor.TwoLegs two)) {
+      slings++;
+      sling(a.id(), on.hauling(), gear, on.gearLeast() > 0);
+      connector(a.id(), on.hauling(), gear, on.gearLeast() > 0);
+      hold(a, on.haulingForce(), on.hauling(), Math.max(on.holding(), on.anchorLeast()));
       return;
     }
-    hardware(a.id(), hauling, holding, false);
-    hold(a, pull, hauling, holding);
+    connector(a.id(), on.hauling(), gear, on.gearLeast() > 0);
+    Anchor first = site.anchor(two.first()).orElseThrow();
+    Anchor second = site.anchor(two.second()).orElseThrow();
+    Point3 apex = Route.fastening(site, two);
+    Point3 one = Route.fastening(site, first);
+    Point3 other = Route.fastening(site, second);
+    Bridle hauling = Bridle.of(apex, one, other, on.haulingForce());
+    Bridle holding = Bridle.of(apex, one, other, on.holdingForce());
+    Optional<Capacity> no =
+        AnchorCapacity.rejected(two)
+            .or(() -> hauling.refused().or(holding::refused).map(Capacity::refuse));
+    Point3 pull = on.haulingForce();
+    anchors.add(
+        new HeldAnchor(
+            two, AnchorLoad.of(pull.e(), pull.n(), pull.up()), no.orElseGet(Capacity::shared)));
+    if (no.isEmpty()) {
+      bear(first, on.along(hauling.firstPull(), hauling.first(), holding.first()));
+      bear(second, on.along(hauling.secondPull(), hauling.second(), holding.second()));
+    }
   }
 
   private void hold(Anchor a, Point3 pull, double hauling, double holding) {
@@ -135,7 +198,7 @@ final class GearParts {
     Capacity c = AnchorCapacity.of(a, load, tables);
     anchors.add(new HeldAnchor(a, load, c));
     if (!c.refused()) {
-      parts.add(
+      together(
           new Part(
               "anchor " + a.id(),
               c.strengthN(),
@@ -147,7 +210,7 @@ final class GearParts {
     AnchorCapacity.ratedPoint(a)
         .ifPresent(
             p ->
-                parts.add(
+                together(
                     new Part(
                         "rated point of " + a.id(),
                         p.strengthN(),
@@ -157,9 +220,7 @@ final class GearParts {
                         holding)));
   }
 
-  private void hardware(String at, double hauling, double holding, boolean ratedForSource) {
-    slings++;
-    connectors++;
+  private void sling(String at, double hauling, double holding, boolean ratedForSource) {
     site.gear().slings().stream()
         .max(java.util.Comparator.comparingDouble(Gear.Sling::ratedLoadN))
         .ifPresent(
@@ -169,6 +230,10 @@ final class GearParts {
                     rated(s.ratedLoadN(), s.standardFactor(), ratedForSource),
                     hauling,
                     holding));
+  }
+
+  private void connector(String at, double hauling, double holding, boolean ratedForSource) {
+    connectors++;
     site.gear().connectors().stream()
         .max(java.util.Comparator.comparingDouble(Gear.Connector::ratedLoadN))
         .ifPresent(
@@ -181,6 +246,33 @@ final class GearParts {
   }
 
   /**
+   * Adds an anchor that may bear twice in one way: its loads are summed as if they pulled alike,
+   * and the weaker direction counts.
+   */
+  private void together(Part p) {
+    merge(
+        p,
+        (a, b) ->
+            new Part(
+                a.name(),
+                Math.min(a.strengthN(), b.strengthN()),
+                Math.max(a.designFactor(), b.designFactor()),
+                Math.max(a.lastFactor(), b.lastFactor()),
+                a.hauling() + b.hauling(),
+                a.holding() + b.holding()));
+  }
+
+  private void merge(Part p, BinaryOperator<Part> both) {
+    for (int i = 0; i < parts.size(); i++) {
+      if (parts.get(i).name().equals(p.name())) {
+        parts.set(i, both.apply(parts.get(i), p));
+        return;
+      }
+    }
+    parts.add(p);
+  }
+
+  /**
    * Where a rule sizes gear by its rating against the most of the source, that is its last factor.
    */
   private static PartStrength rated(double ratedN, double standard, boolean ratedForSource) {
@@ -190,10 +282,19 @@ final class GearParts {
         : p;
   }
 
+  /** Adds a part; of two alike at one place, as two slings at an anchor, the more loaded counts. */
   private void add(String name, PartStrength p, double hauling, double holding) {
-    parts.add(
+    merge(
         new Part(
-            name, p.strengthN(), p.designFactor(), lastFactor(p.lastFactor()), hauling, holding));
+            name, p.strengthN(), p.designFactor(), lastFactor(p.lastFactor()), hauling, holding),
+        (a, b) ->
+            new Part(
+                a.name(),
+                a.strengthN(),
+                a.designFactor(),
+                Math.max(a.lastFactor(), b.lastFactor()),
+                Math.max(a.hauling(), b.hauling()),
+                Math.max(a.holding(), b.holding())));
   }
 
   private double lastFactor(double own) {

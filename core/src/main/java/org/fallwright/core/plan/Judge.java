@@ -1,6 +1,7 @@
 package org.fallwright.core.plan;
 
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
@@ -163,6 +164,9 @@ public final class Judge {
     }
     new People(site, rules, in, grade).check(setup, zones, offer);
     notes.addAll(offer.notes());
+    if (full) {
+      notes.addAll(LandNotes.of(site, setup));
+    }
     Check weakest = grade.weakest();
     return new Judged(
         setup,
@@ -263,7 +267,11 @@ public final class Judge {
   }
 
   private void usable(Grade grade, GearParts parts) {
+    Map<String, HeldAnchor> byAnchor = new LinkedHashMap<>();
     for (HeldAnchor h : parts.anchors()) {
+      byAnchor.merge(h.anchor().id(), h, (a, b) -> a.capacity().refused() ? a : b);
+    }
+    for (HeldAnchor h : byAnchor.values()) {
       boolean no = h.capacity().refused();
       grade.factored(
           "usable " + h.anchor().id(),

@@ -111,6 +111,11 @@ record Route(
         .orElseGet(() -> at(site.anchor(id).orElseThrow(), role));
   }
 
+  /** Where a line is fastened to an anchor, relative. */
+  static Point3 fastening(Site site, Anchor a) {
+    return relative(site, at(a, LinePoint.Role.REDIRECT));
+  }
+
   /** A point of the site as metres from the stump's centre at hinge level. */
   static Point3 relative(Site site, LinePoint p) {
     Place stump = site.tree().stump();

@@ -10,7 +10,10 @@ import org.fallwright.core.units.Range;
   @JsonSubTypes.Type(value = Anchor.StandingTree.class, name = "tree"),
   @JsonSubTypes.Type(value = Anchor.Stump.class, name = "stump"),
   @JsonSubTypes.Type(value = Anchor.ParkedVehicle.class, name = "vehicle"),
-  @JsonSubTypes.Type(value = Anchor.RatedPoint.class, name = "rated")
+  @JsonSubTypes.Type(value = Anchor.RatedPoint.class, name = "rated"),
+  @JsonSubTypes.Type(value = Anchor.Pickets.class, name = "pickets"),
+  @JsonSubTypes.Type(value = Anchor.BuriedLog.class, name = "deadman"),
+  @JsonSubTypes.Type(value = Anchor.TwoLegs.class, name = "two-legs")
 })
 public sealed interface Anchor {
   /** Its name on the plan. */
@@ -34,6 +37,47 @@ public sealed interface Anchor {
     GLEYED_MINERAL,
     PEATY_MINERAL,
     DEEP_PEAT
+  }
+
+  /**
+   * How pickets or pins are set. Wooden pickets are 3 in thick and 5 ft long, 3 to 4 ft in the
+   * ground; the words count those lashed together, from the load backwards.
+   */
+  enum Holdfast {
+    SINGLE,
+    ONE_ONE,
+    ONE_ONE_ONE,
+    TWO_ONE,
+    THREE_TWO_ONE,
+    /** Steel pickets of 25 mm by 1.5 m in one row. */
+    STEEL_ROW,
+    /** Steel pins 1 in thick, 36 in in the ground. */
+    THIN_PINS,
+    /** Steel pins 3 in thick, 36 in in the ground. */
+    THICK_PINS;
+
+    /** Whether it is of wooden pickets, whose number its word gives. */
+    public boolean wooden() {
+      return compareTo(STEEL_ROW) < 0;
+    }
+  }
+
+  /** Ground classes of the published tables of pickets and pins. */
+  enum PicketSoil {
+    UNDISTURBED_LOAM,
+    COHESIVE_POOR,
+    COHESIVE_AVERAGE,
+    COHESIVE_GOOD,
+    SAND_LOOSE,
+    SAND_MEDIUM,
+    SAND_DENSE
+  }
+
+  /** Ground classes of the published table of deadmen. */
+  enum DeadmanSoil {
+    LOAM,
+    /** Fine-grained, sandy or very wet. */
+    SOFT
   }
 
   /** Condition of a tree or stump as seen on the site. */
@@ -171,6 +215,98 @@ public sealed interface Anchor {
       common(id, place, slingHeightM, 10);
       Range.check("breaking_load_N", breakingLoadN, 100, 1e7, "N");
       Range.text("vouched_by", vouchedBy);
+    }
+  }
+
+  /**
+   * Pickets or pins driven into the ground.
+   *
+   * @param holdfast how they are set
+   * @param count how many steel pickets or pins; 1 where the pickets are wooden
+   * @param soil ground class
+   * @param wet whether the ground is wet
+   */
+  record Pickets(
+      String id,
+      Place place,
+      double slingHeightM,
+      String rejected,
+      String land,
+      Holdfast holdfast,
+      int count,
+      PicketSoil soil,
+      boolean wet)
+      implements Anchor {
+    public Pickets {
+      common(id, place, slingHeightM, 0.3);
+      Range.present("holdfast", holdfast);
+      Range.check("count", count, 1, 10, "");
+      if (holdfast.wooden() && count != 1) {
+        throw new IllegalArgumentException(
+            "count is "
+                + count
+                + "; it must be 1 with wooden pickets, whose number the holdfast gives");
+      }
+      Range.present("soil", soil);
+    }
+  }
+
+  /**
+   * A log or timber buried across the pull, its line led to the surface in a trench of its own.
+   *
+   * @param depthM mean depth of its face [m]
+   * @param faceHeightM height of its face; a log's diameter [m]
+   * @param lengthM its length [m]
+   * @param lineRun metres that the trench of its line runs for each metre that it rises, 1 to 4
+   * @param soil ground class
+   */
+  record BuriedLog(
+      String id,
+      Place place,
+      double slingHeightM,
+      String rejected,
+      String land,
+      double depthM,
+      double faceHeightM,
+      double lengthM,
+      int lineRun,
+      DeadmanSoil soil)
+      implements Anchor {
+    public BuriedLog {
+      common(id, place, slingHeightM, 0.3);
+      Range.check("depth_m", depthM, 0.91, 3, "m");
+      Range.check("face_height_m", faceHeightM, 0.1, 1, "m");
+      Range.check("length_m", lengthM, 0.5, 6, "m");
+      Range.check("line_run", lineRun, 1, 4, "");
+      Range.present("soil", soil);
+    }
+  }
+
+  /**
+   * A point held by two legs, each to an anchor of its own.
+   *
+   * @param place where the legs meet
+   * @param slingHeightM height at which they meet above the ground there [m]
+   * @param first id of the anchor of one leg
+   * @param second id of the anchor of the other
+   */
+  record TwoLegs(
+      String id,
+      Place place,
+      double slingHeightM,
+      String rejected,
+      String land,
+      String first,
+      String second)
+      implements Anchor {
+    public TwoLegs {
+      common(id, place, slingHeightM, 10);
+      Range.text("first", first);
+      Range.text("second", second);
+      if (first.equals(second)) {
+        throw new IllegalArgumentException(
+            "second is \"" + second + "\", as the first; each leg must have its own anchor");
+      }
     }
   }
 

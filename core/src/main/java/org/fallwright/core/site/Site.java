@@ -93,6 +93,12 @@ public record Site(
                 gear.slings().stream().map(Gear.Sling::id),
                 gear.connectors().stream().map(Gear.Connector::id))
             .flatMap(s -> s));
+    for (Anchor a : anchors) {
+      if (a instanceof Anchor.TwoLegs two) {
+        ends(anchors, two, "first", two.first());
+        ends(anchors, two, "second", two.second());
+      }
+    }
     for (Gear.Source s : gear.sources()) {
       for (String place : s.places()) {
         known(anchors, spots, "gear.sources." + s.id() + ".places", place);
@@ -169,6 +175,19 @@ public record Site(
                 "the name \"" + id + "\" is used twice; each thing must have its own");
           }
         });
+  }
+
+  private static void ends(List<Anchor> anchors, Anchor.TwoLegs two, String leg, String id) {
+    if (anchors.stream().noneMatch(a -> a.id().equals(id) && !(a instanceof Anchor.TwoLegs))) {
+      throw new IllegalArgumentException(
+          "anchors."
+              + two.id()
+              + "."
+              + leg
+              + " names \""
+              + id
+              + "\"; no anchor of that name that could hold a leg is on the site");
+    }
   }
 
   private static void known(List<Anchor> anchors, List<Spot> spots, String field, String id) {

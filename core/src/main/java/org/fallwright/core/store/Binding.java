@@ -22,7 +22,8 @@ import org.fallwright.core.site.Site;
 /** From a tree of JSON to the site's records; every refusal becomes one sentence. */
 final class Binding {
   private static final Pattern QUOTED = Pattern.compile("\"([^\"]*)\"");
-  private static final Pattern DANGLING = Pattern.compile("gear\\.sources\\..*( names \".*)");
+  private static final Pattern DANGLING =
+      Pattern.compile("(?:gear\\.sources|anchors)\\..*( names \".*)");
 
   private Binding() {}
 

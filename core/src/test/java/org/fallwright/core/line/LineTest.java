@@ -113,7 +113,7 @@ class LineTest {
   @Test
   void unmarkedChainCountsAsTheWeakestGrade() {
     for (ChainGrade grade : ChainGrade.values()) {
-      assertThat(ChainGrade.UNMARKED.workingN(0.01)).isLessThanOrEqualTo(grade.workingN(0.01));
+      assertThat(ChainGrade.GRADE_30.workingN(0.01)).isLessThanOrEqualTo(grade.workingN(0.01));
     }
   }
 

@@ -6,6 +6,7 @@ import java.lang.reflect.Modifier;
 import java.util.Arrays;
 import java.util.HashSet;
 import java.util.Set;
+import org.fallwright.core.outside.CheckValue;
 import org.junit.jupiter.api.Test;
 
 class AllowancesTest {
@@ -64,5 +65,21 @@ class AllowancesTest {
     assertThat(Allowances.REST_LEAST.value()).isLessThan(Allowances.REST_LEAST_WEDGED.value());
     assertThat(Allowances.DEVICE_LOW.value()).isLessThan(1);
     assertThat(Allowances.DEVICE_HIGH.value()).isGreaterThan(1);
+  }
+
+  @Test
+  void publishedProportionsAreThoseOfTheirSources() {
+    CheckValue.of("OSHA Logging eTool, hinge", "hinge width over diameter", 0.8, "")
+        .isMet(Allowances.HINGE_WIDTH_SHARE.value(), 0);
+    CheckValue.of("OSHA Logging eTool, hinge", "hinge thickness over diameter", 0.1, "")
+        .isMet(Allowances.HINGE_THICKNESS_SHARE.value(), 0);
+    // leaves add from 40 to 100 % to bare branches; the least of it counts
+    CheckValue.of("Drag of leafy willow and robinia, 2011", "bare over leafy", 1 / 1.4, "")
+        .isMet(Allowances.LEAFLESS_DRAG.value(), 0.015);
+    CheckValue.of("Mayhead 1973", "least wind of the fits", 10, "m/s")
+        .isMet(Allowances.WIND_CLAMP.value(), 0);
+    CheckValue.of("ISO 2533, sea level and 15 °C", "density of air", 1.225, "kg/m³")
+        .fromMemory()
+        .isMet(Allowances.AIR_DENSITY.value(), 0.01);
   }
 }

@@ -13,6 +13,7 @@ class SourcesTest {
   private static Stream<Figure> everyFigure() {
     return Stream.of(
             Allowances.all().stream(),
+            Hardware.all().stream(),
             SpeciesTable.all().stream().flatMap(s -> s.figures().stream()),
             SurfaceTable.keys().stream()
                 .flatMap(

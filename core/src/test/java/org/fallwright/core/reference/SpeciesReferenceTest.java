@@ -1,8 +1,8 @@
 package org.fallwright.core.reference;
 
 import static org.assertj.core.api.Assertions.assertThat;
-import static org.assertj.core.api.Assertions.within;
 
+import org.fallwright.core.outside.CheckValue;
 import org.fallwright.core.site.Anchor.Soil;
 import org.fallwright.core.units.Units;
 import org.junit.jupiter.api.Test;
@@ -35,11 +35,13 @@ class SpeciesReferenceTest {
   })
   void greenStrength(String key, double mor, double moe, double shear, double crush) {
     Species s = SpeciesTable.of(key);
-    assertThat(s.morPa().value()).isEqualTo(mor * 1e6);
-    assertThat(s.moePa().value()).isCloseTo(moe * 1e6, within(1.0));
-    assertThat(s.shearPa().value()).isCloseTo(shear * 1e6, within(1.0));
+    String source = "USDA FPL-GTR-282 (2021) Table 5-3a, green, by table copy";
+    CheckValue.of(source, key + ", rupture", mor, "MPa").isMet(s.morPa().value() / 1e6, 0);
+    CheckValue.of(source, key + ", elasticity", moe, "MPa").isMet(s.moePa().value() / 1e6, 1e-6);
+    CheckValue.of(source, key + ", shear", shear, "MPa").isMet(s.shearPa().value() / 1e6, 1e-6);
     if (crush > 0) {
-      assertThat(s.crushPa().value()).isCloseTo(crush * 1e6, within(1.0));
+      CheckValue.of(source, key + ", compression", crush, "MPa")
+          .isMet(s.crushPa().value() / 1e6, 1e-6);
     }
   }
 
@@ -60,11 +62,13 @@ class SpeciesReferenceTest {
   })
   void greenStrengthInASecondTable(String key, double psi, double sdPsi, double thousandPsi) {
     Species s = SpeciesTable.of(key);
-    double pa = psi * Units.PSI;
-    assertThat(s.morPa().value()).isCloseTo(pa, within(0.02 * pa));
-    assertThat(s.morCv().value()).isCloseTo(sdPsi / psi, within(0.0006));
-    double moe = thousandPsi * 1000 * Units.PSI;
-    assertThat(s.moePa().value()).isCloseTo(moe, within(0.02 * moe));
+    String source = "Clear wood of green timber, layout of ASTM D2555, public scan";
+    CheckValue.of(source, key + ", rupture", psi, "psi")
+        .isMetWithinShare(s.morPa().value() / Units.PSI, 0.02);
+    CheckValue.of(source, key + ", rupture, variation", sdPsi / psi, "")
+        .isMet(s.morCv().value(), 0.0006);
+    CheckValue.of(source, key + ", elasticity", thousandPsi, "1000 psi")
+        .isMetWithinShare(s.moePa().value() / Units.PSI / 1000, 0.02);
   }
 
   /**
@@ -128,13 +132,18 @@ class SpeciesReferenceTest {
   })
   void handbookPageInInchPounds(String key, double mor, double moe, double shear, double crush) {
     Species s = SpeciesTable.of(key);
-    assertThat(s.morPa().value() / Units.PSI).isCloseTo(mor, within(0.005 * mor));
-    assertThat(s.moePa().value() / Units.PSI / 1e6).isCloseTo(moe, within(0.01));
+    String source = "USDA FPL-GTR-190 (2010) Table 5-3b, green";
+    CheckValue.of(source, key + ", rupture", mor, "psi")
+        .isMetWithinShare(s.morPa().value() / Units.PSI, 0.005);
+    CheckValue.of(source, key + ", elasticity", moe, "million psi")
+        .isMet(s.moePa().value() / Units.PSI / 1e6, 0.01);
     if (shear > 0) {
-      assertThat(s.shearPa().value() / Units.PSI).isCloseTo(shear, within(0.005 * shear));
+      CheckValue.of(source, key + ", shear", shear, "psi")
+          .isMetWithinShare(s.shearPa().value() / Units.PSI, 0.005);
     }
     if (crush > 0) {
-      assertThat(s.crushPa().value() / Units.PSI).isCloseTo(crush, within(0.005 * crush));
+      CheckValue.of(source, key + ", compression", crush, "psi")
+          .isMetWithinShare(s.crushPa().value() / Units.PSI, 0.005);
     }
   }
 
@@ -157,8 +166,12 @@ class SpeciesReferenceTest {
   void greenDensityFromGravityAndMoisture(String key, double sg, double mc, double lbPerFt3) {
     double density = SpeciesTable.of(key).greenDensity().value();
     double reckoned = 1000 * sg * (1 + mc / 100);
-    assertThat(density).isCloseTo(reckoned, within(0.01 * reckoned));
-    assertThat(density / Units.POUND_PER_CUBIC_FOOT).isCloseTo(lbPerFt3, within(0.5));
+    String source = "USDA Forest Inventory and Analysis, REF_SPECIES";
+    CheckValue.of(source, key + ", density by gravity and moisture", reckoned, "kg/m³")
+        .worked()
+        .isMetWithinShare(density, 0.01);
+    CheckValue.of(source, key + ", green weight", lbPerFt3, "lb/ft³")
+        .isMet(density / Units.POUND_PER_CUBIC_FOOT, 0.5);
   }
 
   /**
@@ -177,8 +190,13 @@ class SpeciesReferenceTest {
   })
   void publishedGreenWeightsLieWithinTheRange(String key, double lbPerFt3) {
     Species s = SpeciesTable.of(key);
-    double density = lbPerFt3 * Units.POUND_PER_CUBIC_FOOT;
-    assertThat(density).isBetween(0.99 * s.densityLow(), 1.01 * s.densityHigh());
+    String source =
+        key.equals("yellow-poplar")
+            ? "West Virginia University, yellow-poplar sawlogs (abstract)"
+            : "Oregon State University, green shipping weights";
+    CheckValue weight = CheckValue.of(source, key + ", green weight", lbPerFt3, "lb/ft³");
+    weight.isReached(1.01 * s.densityHigh() / Units.POUND_PER_CUBIC_FOOT);
+    weight.isNotExceeded(0.99 * s.densityLow() / Units.POUND_PER_CUBIC_FOOT);
   }
 
   /** Mayhead 1973 power fits as carried by a public wind-risk model, at 10, 15, 20 and 25 m/s. */
@@ -194,10 +212,17 @@ class SpeciesReferenceTest {
   })
   void dragByWind(String key, double at10, double at15, double at20, double at25) {
     Species s = SpeciesTable.of(key);
-    assertThat(s.drag(10, true)).isCloseTo(at10, within(6e-4));
-    assertThat(s.drag(15, true)).isCloseTo(at15, within(6e-4));
-    assertThat(s.drag(20, true)).isCloseTo(at20, within(6e-4));
-    assertThat(s.drag(25, true)).isCloseTo(at25, within(6e-4));
+    double[] printed = {at10, at15, at20, at25};
+    for (int i = 0; i < printed.length; i++) {
+      int wind = 10 + 5 * i;
+      CheckValue.of(
+              "Mayhead 1973, by a public wind-risk model",
+              key + ", drag at " + wind + " m/s",
+              printed[i],
+              "")
+          .worked()
+          .isMet(s.drag(wind, true), 6e-4);
+    }
     assertThat(s.drag(5, true)).isEqualTo(s.drag(10, true));
     assertThat(s.drag(30, true)).isEqualTo(s.drag(25, true));
   }
@@ -206,10 +231,15 @@ class SpeciesReferenceTest {
   @Test
   void scotsPineInTheFinnishModel() {
     Species s = SpeciesTable.of("scots-pine");
-    assertThat(0.29).isBetween(s.drag(25, true), s.drag(20, true));
-    // the same source: 46 MPa times 0.85 for knots is 39.1 MPa, and 7,000 MPa of elasticity
-    assertThat(s.morPa().value() * s.knotFactor().value()).isCloseTo(39.1e6, within(1e4));
-    assertThat(s.moePa().value()).isCloseTo(7.0e9, within(0.35e9));
+    String source = "Public port of the Finnish wind model";
+    CheckValue drag = CheckValue.of(source, "Scots pine, drag", 0.29, "");
+    drag.isReached(s.drag(20, true));
+    drag.isNotExceeded(s.drag(25, true));
+    // 46 MPa times 0.85 for knots
+    CheckValue.of(source, "Scots pine, rupture with knots", 39.1, "MPa")
+        .isMet(s.morPa().value() * s.knotFactor().value() / 1e6, 0.01);
+    CheckValue.of(source, "Scots pine, elasticity", 7000, "MPa")
+        .isMet(s.moePa().value() / 1e6, 350);
   }
 
   /**
@@ -219,7 +249,8 @@ class SpeciesReferenceTest {
   @Test
   void norwaySpruceInStrongWind() {
     Species s = SpeciesTable.of("norway-spruce");
-    assertThat(s.drag(30, true)).isGreaterThanOrEqualTo(0.594);
+    CheckValue.of("J. Wood Sci. 2016 (abstract)", "Norway spruce, drag at 30 m/s", 0.594, "")
+        .isReached(s.drag(30, true));
     assertThat(s.drag(10, true)).isGreaterThanOrEqualTo(0.726);
   }
 
@@ -233,16 +264,21 @@ class SpeciesReferenceTest {
   })
   void rootPlateConstants(String key, Soil soil, double shallow, double deep) {
     Species s = SpeciesTable.of(key);
-    assertThat(s.rootPlate(soil, false).value()).isEqualTo(shallow);
-    assertThat(s.rootPlate(soil, true).value()).isEqualTo(deep);
+    String source = "Nicoll et al. 2006, by a public wind-risk model";
+    String what = key + " on " + soil;
+    CheckValue.of(source, what + ", shallow", shallow, "N·m/kg")
+        .isMet(s.rootPlate(soil, false).value(), 0);
+    CheckValue.of(source, what + ", deep", deep, "N·m/kg")
+        .isMet(s.rootPlate(soil, true).value(), 0);
     assertThat(deep / shallow).isBetween(1.10, 1.17);
   }
 
   /** Byrne 2005 (abstract): 77.4 N·m/kg for western hemlock, the least of four species. */
   @Test
   void leastRootPlateConstantRead() {
-    assertThat(SpeciesTable.of("western-hemlock").rootPlate(Soil.GLEYED_MINERAL, false).value())
-        .isEqualTo(77.4)
-        .isLessThan(94.5);
+    double least = SpeciesTable.of("western-hemlock").rootPlate(Soil.GLEYED_MINERAL, false).value();
+    CheckValue.of("Byrne 2005 (abstract)", "western-hemlock, root plate", 77.4, "N·m/kg")
+        .isMet(least, 0);
+    assertThat(least).isLessThan(94.5);
   }
 }

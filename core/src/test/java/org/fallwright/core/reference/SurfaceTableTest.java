@@ -3,6 +3,7 @@ package org.fallwright.core.reference;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
+import org.fallwright.core.outside.CheckValue;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -47,14 +48,22 @@ class SurfaceTableTest {
     "concrete, true, 0.60"
   })
   void publishedTyreGrip(String key, boolean wet, double grip) {
-    assertThat(SurfaceTable.of(key, wet).tyreLow()).isEqualTo(grip);
+    String source =
+        key.equals("grass") && !wet
+            ? "Arboriculture Australia 2022, Tree Rescue Manual p. 214"
+            : "Noon 1994, coefficients of traction, by a public table";
+    CheckValue.of(source, key + (wet ? ", wet" : ", dry") + ", tyre grip", grip, "")
+        .isMet(SurfaceTable.of(key, wet).tyreLow(), 0);
   }
 
   /** Navin et al. 1996 (abstract): traction on packed snow 0.20 car, 0.15 truck; ice 0.08, 0.04. */
   @Test
   void snowAndIceAreTakenAtTheLeastMeasured() {
-    assertThat(SurfaceTable.of("snow", false).tyreLow()).isEqualTo(0.15);
-    assertThat(SurfaceTable.of("ice", false).tyreLow()).isEqualTo(0.04);
+    String source = "Navin et al. 1996 (abstract), trucks";
+    CheckValue.of(source, "packed snow, traction", 0.15, "")
+        .isMet(SurfaceTable.of("snow", false).tyreLow(), 0);
+    CheckValue.of(source, "ice, traction", 0.04, "")
+        .isMet(SurfaceTable.of("ice", false).tyreLow(), 0);
   }
 
   @Test

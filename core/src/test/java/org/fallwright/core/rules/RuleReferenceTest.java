@@ -4,10 +4,11 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.util.List;
+import java.util.Map;
+import org.fallwright.core.outside.CheckValue;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
-import org.junit.jupiter.params.provider.ValueSource;
 
 /** Published figures of the rules, the source beside each. */
 class RuleReferenceTest {
@@ -15,11 +16,23 @@ class RuleReferenceTest {
   private static final double IN = 0.0254;
   private static final RuleSets ALL = RuleSets.shipped();
 
-  /** 29 CFR 1910.266(h)(1)(iv), DGUV Regel 114-018, B.C. Reg. 296/97 26.1: two tree lengths. */
+  /** Two tree lengths, by each rule set's own source or as adopted from its neighbours'. */
   @ParameterizedTest
-  @ValueSource(strings = {"US-OSHA", "US-EM385", "UK", "DE-DGUV", "CA-BC", "AU", "NZ"})
-  void twoTreeLengths(String key) {
+  @CsvSource({
+    "US-OSHA, 29 CFR 1910.266(h)(1)(iv)",
+    "US-EM385, 'EM 385-1-1, 31-8'",
+    "UK, ",
+    "DE-DGUV, DGUV Regel 114-018",
+    "CA-BC, B.C. Reg. 296/97 26.1",
+    "AU, ",
+    "NZ, "
+  })
+  void twoTreeLengths(String key, String source) {
     Rule rule = ALL.byKey(key).peopleRadiusFactor();
+    assertThat(rule.value()).isEqualTo(2);
+    if (source != null) {
+      CheckValue.of(source, key + ", people away, tree lengths", 2, "").isMet(rule.value(), 0);
+    }
     assertThat(rule.value() * 24).isEqualTo(48);
     assertThat(rule.value() * 60 * FT).isCloseTo(36.58, within(0.005));
     assertThat(rule.fallback()).isFalse();
@@ -30,13 +43,19 @@ class RuleReferenceTest {
   /** NWCG safety note: 2.5 lengths of a 20 m tree. */
   @Test
   void wildlandFireCuttingArea() {
-    assertThat(ALL.byKey("US-OSHA").stricterPeopleRadiusFactor().value() * 20).isEqualTo(50);
+    CheckValue.of("NWCG safety note, cutting area", "tree lengths in all directions", 2.5, "")
+        .isMet(ALL.byKey("US-OSHA").stricterPeopleRadiusFactor().value(), 0);
   }
 
   /** Wildlife Tree Committee of British Columbia 2001: 1.5 lengths of a 30 m tree. */
   @Test
   void dangerousTreeLeftStanding() {
-    assertThat(ALL.byKey("CA-BC").leftStandingFactor().value() * 30).isEqualTo(45);
+    CheckValue.of(
+            "Wildlife Tree Committee of British Columbia 2001",
+            "tree lengths round a tree left standing",
+            1.5,
+            "")
+        .isMet(ALL.byKey("CA-BC").leftStandingFactor().value(), 0);
     assertThat(ALL.byKey("US-OSHA").leftStandingFactor().value() * 30).isEqualTo(60);
   }
 
@@ -46,13 +65,14 @@ class RuleReferenceTest {
   @ParameterizedTest
   @CsvSource({"US-1910.333, 10, 0", "US-EM385, 10, 7.6", "US-1926.1408, 15, 0"})
   void sixtyNineKilovolts(String table, double feet, double inches) {
-    assertThat(distance(table, 69)).isCloseTo(feet * FT + inches * IN, within(0.0005));
+    approach(table, 69, feet * FT + inches * IN);
   }
 
   /** British Columbia Table 19-1A: 3, 4.5 and 6 m, upper voltages inclusive. */
   @ParameterizedTest
   @CsvSource({"69, 3", "75, 3", "75.1, 4.5", "250, 4.5", "250.1, 6", "550, 6"})
   void britishColumbia(double kv, double metres) {
+    approach("CA-BC-19-1A", kv, metres);
     assertThat(distance("CA-BC-19-1A", kv)).isEqualTo(metres);
   }
 
@@ -62,7 +82,7 @@ class RuleReferenceTest {
   @ParameterizedTest
   @CsvSource({"US-EM385, 16", "US-1910.333, 13"})
   void twoHundredAndThirtyKilovolts(String table, double feet) {
-    assertThat(distance(table, 230)).isCloseTo(feet * FT, within(0.0005));
+    approach(table, 230, feet * FT);
   }
 
   /** 29 CFR 1926.1408 Table A at the edges of its bands and at 500 kV; upper limits inclusive. */
@@ -78,13 +98,13 @@ class RuleReferenceTest {
     "1000, 45"
   })
   void craneTable(double kv, double feet) {
-    assertThat(distance("US-1926.1408", kv)).isCloseTo(feet * FT, within(0.0005));
+    approach("US-1926.1408", kv, feet * FT);
   }
 
   /** EM 385-1-1 at 500 kV: 25 ft 0 in. */
   @Test
   void fiveHundredKilovolts() {
-    assertThat(distance("US-EM385", 500)).isCloseTo(25 * FT, within(0.0005));
+    approach("US-EM385", 500, 25 * FT);
   }
 
   /**
@@ -103,14 +123,17 @@ class RuleReferenceTest {
     "800, 35, 0"
   })
   void consensusTable(double kv, double feet, double inches) {
-    assertThat(distance("US-EM385", kv)).isCloseTo(feet * FT + inches * IN, within(0.5 * IN));
+    CheckValue.of("ANSI Z133, approach by voltage", kv + " kV", feet * FT + inches * IN, "m")
+        .fromMemory()
+        .isMet(distance("US-EM385", kv), 0.5 * IN);
   }
 
   /** 29 CFR 1910.333 and 1910.269(x): 10 ft or 3.05 m for a 12.47 kV line. */
   @Test
   void distributionLine() {
     Rule rule = ALL.byKey("US-OSHA").approachDistanceM(12.47).orElseThrow();
-    assertThat(rule.value()).isCloseTo(3.05, within(0.005));
+    CheckValue.of("29 CFR 1910.333 and 1910.269", "approach at 12.47 kV", 3.05, "m")
+        .isMet(rule.value(), 0.005);
     assertThat(rule.fallback()).isFalse();
     // a 15 m tree 17 m from the line
     assertThat(WireReach.of(17, 15, rule.value(), ALL.byKey("US-OSHA"))).isEqualTo(WireReach.STOP);
@@ -122,6 +145,14 @@ class RuleReferenceTest {
   void britishConsultation(boolean towers, double metres, boolean met) {
     Rule rule = ALL.byKey("UK").consultDistanceM(towers).orElseThrow();
     assertThat(rule.metBy(metres, 1)).isEqualTo(met);
+  }
+
+  @ParameterizedTest
+  @CsvSource({"false, 9", "true, 15"})
+  void britishConsultationDistances(boolean towers, double metres) {
+    CheckValue.of("HSE GS6, restated", towers ? "from towers" : "from wood poles", metres, "m")
+        .fromMemory()
+        .isMet(ALL.byKey("UK").consultDistanceM(towers).orElseThrow().value(), 0);
   }
 
   /** DGUV Regel 114-018, 3.2.6.6: a direct rope longer than two lengths of a 20 m tree. */
@@ -146,18 +177,19 @@ class RuleReferenceTest {
   /** OAR 437-007-0810(9): 25 ft. */
   @Test
   void oregonEscapeLength() {
-    assertThat(ALL.byKey("US-OSHA").escapeLengthM().value()).isCloseTo(25 * FT, within(1e-9));
+    CheckValue.of("OAR 437-007-0810(9)", "length of an escape route", 25, "ft")
+        .isMet(ALL.byKey("US-OSHA").escapeLengthM().value() / FT, 1e-9);
   }
 
   /** Bavarian state forest-owner school and GUV-I 8627, a 55 kN winch, in kN. */
   @Test
   void germanGearForAWinch() {
     RuleSet de = ALL.byKey("DE-DGUV");
-    assertThat(de.lineTwiceSource().value() * 55).isEqualTo(110);
-    assertThat(de.chokerOverSource().value() * 55).isEqualTo(55);
-    assertThat(de.redirectGearOverSource().value() * 55).isEqualTo(110);
-    assertThat(de.redirectStropOverSource().value() * 55).isEqualTo(220);
-    assertThat(de.redirectAnchorTwiceT().value() * 55).isEqualTo(110);
+    winch("rope breaks at", 110, de.lineTwiceSource());
+    winch("choker rated", 55, de.chokerOverSource());
+    winch("redirect gear rated", 110, de.redirectGearOverSource());
+    winch("redirect strop breaks at", 220, de.redirectStropOverSource());
+    winch("redirect anchor bears", 110, de.redirectAnchorTwiceT());
     // 20 kN: the anchor is sized for 40 whatever the angle
     assertThat(de.redirectAnchorTwiceT().value() * 20).isEqualTo(40);
   }
@@ -174,7 +206,26 @@ class RuleReferenceTest {
   @ParameterizedTest
   @CsvSource({"22, 6.4", "66, 10"})
   void victoria(double kv, double metres) {
-    assertThat(ALL.byKey("AU").approachDistanceM(kv).orElseThrow().value()).isEqualTo(metres);
+    CheckValue.of("Victoria, No Go Zone rules", "approach at " + kv + " kV", metres, "m")
+        .isMet(ALL.byKey("AU").approachDistanceM(kv).orElseThrow().value(), 0);
+  }
+
+  private static void winch(String what, double kN, Rule rule) {
+    CheckValue.of(
+            "Bavarian state forest-owner school and GUV-I 8627", "55 kN winch, " + what, kN, "kN")
+        .isMet(55 * rule.value(), 0);
+  }
+
+  private static final Map<String, String> TABLES =
+      Map.of(
+          "US-1910.333", "29 CFR 1910.333, restated",
+          "US-EM385", "EM 385-1-1",
+          "US-1926.1408", "29 CFR 1926.1408 Table A",
+          "CA-BC-19-1A", "British Columbia OHS Regulation, Table 19-1A");
+
+  private static void approach(String table, double kv, double metres) {
+    CheckValue.of(TABLES.get(table), "approach at " + kv + " kV", metres, "m")
+        .isMet(distance(table, kv), 0.0005);
   }
 
   private static double distance(String table, double kv) {

@@ -42,7 +42,18 @@ final class RandomSites {
 
   Site site() {
     double height = in(2, 120);
-    List<Anchor> anchors = list(0, 5, i -> anchor("anchor " + i));
+    List<Anchor> anchors = new ArrayList<>(list(0, 5, i -> anchor("anchor " + i)));
+    if (anchors.size() > 1) {
+      anchors.add(
+          new Anchor.TwoLegs(
+              "legs",
+              place(),
+              in(0, 10),
+              maybe(this::text),
+              maybe(this::text),
+              anchors.get(0).id(),
+              anchors.get(1).id()));
+    }
     List<Spot> spots =
         list(
             1,
@@ -198,7 +209,7 @@ final class RandomSites {
 
   private Anchor anchor(String id) {
     double height = in(1, 120);
-    return switch (random.nextInt(4)) {
+    return switch (random.nextInt(6)) {
       case 0 ->
           new Anchor.StandingTree(
               id,
@@ -243,6 +254,31 @@ final class RandomSites {
               flag(),
               in(-30, 30),
               in(100, 1e6));
+      case 3 -> {
+        Anchor.Holdfast holdfast = any(Anchor.Holdfast.values());
+        yield new Anchor.Pickets(
+            id,
+            place(),
+            in(0, 0.3),
+            maybe(this::text),
+            maybe(this::text),
+            holdfast,
+            holdfast.wooden() ? 1 : 1 + random.nextInt(10),
+            any(Anchor.PicketSoil.values()),
+            flag());
+      }
+      case 4 ->
+          new Anchor.BuriedLog(
+              id,
+              place(),
+              in(0, 0.3),
+              maybe(this::text),
+              maybe(this::text),
+              in(0.91, 3),
+              in(0.1, 1),
+              in(0.5, 6),
+              1 + random.nextInt(4),
+              any(Anchor.DeadmanSoil.values()));
       default ->
           new Anchor.RatedPoint(
               id, place(), in(0, 10), maybe(this::text), maybe(this::text), in(100, 1e7), text());

@@ -2,8 +2,8 @@ package org.fallwright.core.tree;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
-import static org.assertj.core.api.Assertions.within;
 
+import org.fallwright.core.outside.CheckValue;
 import org.fallwright.core.reference.SpeciesTable;
 import org.fallwright.core.units.Units;
 import org.junit.jupiter.api.Test;
@@ -29,11 +29,17 @@ class MassEquationReferenceTest {
   })
   void dryMass(int group, double at30, double at40, double at60, double at80, double at100) {
     MassEquation e = MassEquation.of(group);
-    assertThat(e.dryKg(0.30)).isCloseTo(at30, within(0.6));
-    assertThat(e.dryKg(0.40)).isCloseTo(at40, within(0.6));
-    assertThat(e.dryKg(0.60)).isCloseTo(at60, within(0.6));
-    assertThat(e.dryKg(0.80)).isCloseTo(at80, within(0.6));
-    assertThat(e.dryKg(1.00)).isCloseTo(at100, within(0.6));
+    double[] dbh = {0.30, 0.40, 0.60, 0.80, 1.00};
+    double[] printed = {at30, at40, at60, at80, at100};
+    for (int i = 0; i < dbh.length; i++) {
+      CheckValue.of(
+              "Jenkins et al. 2003, coefficients",
+              "group " + group + ", dry mass at " + dbh[i] + " m",
+              printed[i],
+              "kg")
+          .worked()
+          .isMet(e.dryKg(dbh[i]), 0.6);
+    }
   }
 
   /** Green mass, Jenkins times the Forest Inventory's dry-to-green factor; kg and lb. */
@@ -49,8 +55,10 @@ class MassEquationReferenceTest {
   void greenMass(String species, double dbhM, double kg, double lb) {
     var s = SpeciesTable.of(species);
     double green = MassEquation.of(s.massGroup()).dryKg(dbhM) * s.dryToGreen().value();
-    assertThat(green).isCloseTo(kg, within(0.001 * kg));
-    assertThat(green / Units.POUND).isCloseTo(lb, within(0.001 * lb));
+    String source = "Jenkins et al. 2003 with USDA FIA dry-to-green factors";
+    String what = species + ", green mass at " + dbhM + " m";
+    CheckValue.of(source, what, kg, "kg").worked().isMetWithinShare(green, 0.001);
+    CheckValue.of(source, what, lb, "lb").worked().isMetWithinShare(green / Units.POUND, 0.001);
   }
 
   /**
@@ -72,16 +80,26 @@ class MassEquationReferenceTest {
   })
   void anotherPublishedSetAgrees(int group, String taxon, double at40, double at60) {
     MassEquation e = MassEquation.of(group);
-    assertThat(e.dryKg(0.40)).as(taxon).isCloseTo(at40, within(0.20 * at40));
-    assertThat(e.dryKg(0.60)).as(taxon).isCloseTo(at60, within(0.22 * at60));
+    String source = "Chojnacky et al. 2014, coefficients, by a public database";
+    CheckValue.of(source, taxon + ", dry mass at 0.4 m", at40, "kg")
+        .worked()
+        .isMetWithinShare(e.dryKg(0.40), 0.20);
+    CheckValue.of(source, taxon + ", dry mass at 0.6 m", at60, "kg")
+        .worked()
+        .isMetWithinShare(e.dryKg(0.60), 0.22);
   }
 
   /** Chojnacky et al. 2014, Pinus of gravity 0.45 and more: 822 and 2,404 kg at 40 and 60 cm. */
   @Test
   void heavyPinesTakeTheHeavierEquation() {
     MassEquation heavy = MassEquation.of(SpeciesTable.of("loblolly-pine").massGroup());
-    assertThat(heavy.dryKg(0.40)).isCloseTo(822, within(1.0));
-    assertThat(heavy.dryKg(0.60)).isCloseTo(2404, within(2.0));
+    String source = "Chojnacky et al. 2014, coefficients, by a public database";
+    CheckValue.of(source, "heavier pine, dry mass at 0.4 m", 822, "kg")
+        .worked()
+        .isMet(heavy.dryKg(0.40), 1);
+    CheckValue.of(source, "heavier pine, dry mass at 0.6 m", 2404, "kg")
+        .worked()
+        .isMet(heavy.dryKg(0.60), 2);
     assertThat(heavy.dryKg(0.40)).isGreaterThan(1.25 * MassEquation.of(4).dryKg(0.40));
   }
 
@@ -100,20 +118,28 @@ class MassEquationReferenceTest {
   @Test
   void dryShares() {
     DryShares hard = DryShares.of(true, 0.60);
-    assertThat(hard.wood()).isCloseTo(0.6724, within(5e-5));
-    assertThat(hard.bark()).isCloseTo(0.1299, within(5e-5));
-    assertThat(hard.foliage()).isCloseTo(0.0186, within(5e-5));
-    assertThat(hard.branches()).isCloseTo(0.1791, within(5e-5));
-    assertThat(hard.crown()).isCloseTo(0.198, within(5e-4));
+    share("wood", 0.6724, hard.wood(), 5e-5);
+    share("bark", 0.1299, hard.bark(), 5e-5);
+    share("foliage", 0.0186, hard.foliage(), 5e-5);
+    share("branches", 0.1791, hard.branches(), 5e-5);
+    share("crown", 0.198, hard.crown(), 5e-4);
   }
 
   /** The same, crown share at 20, 40, 60 and 100 cm. */
   @ParameterizedTest
   @CsvSource({"true, .316, .229, .198, .172", "false, .255, .223, .212, .203"})
   void crownShare(boolean broadleaf, double at20, double at40, double at60, double at100) {
-    assertThat(DryShares.of(broadleaf, 0.20).crown()).isCloseTo(at20, within(6e-4));
-    assertThat(DryShares.of(broadleaf, 0.40).crown()).isCloseTo(at40, within(6e-4));
-    assertThat(DryShares.of(broadleaf, 0.60).crown()).isCloseTo(at60, within(6e-4));
-    assertThat(DryShares.of(broadleaf, 1.00).crown()).isCloseTo(at100, within(6e-4));
+    double[] dbh = {0.20, 0.40, 0.60, 1.00};
+    double[] printed = {at20, at40, at60, at100};
+    for (int i = 0; i < dbh.length; i++) {
+      String what = (broadleaf ? "hardwood" : "softwood") + " crown at " + dbh[i] + " m";
+      share(what, printed[i], DryShares.of(broadleaf, dbh[i]).crown(), 6e-4);
+    }
+  }
+
+  private static void share(String what, double theirs, double ours, double tolerance) {
+    CheckValue.of("Jenkins et al. 2003, component ratios", "share of " + what, theirs, "")
+        .worked()
+        .isMet(ours, tolerance);
   }
 }

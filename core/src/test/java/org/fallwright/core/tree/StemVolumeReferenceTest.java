@@ -11,6 +11,7 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.Objects;
 import java.util.function.ToDoubleBiFunction;
+import org.fallwright.core.outside.CheckValue;
 import org.fallwright.core.reference.Species;
 import org.fallwright.core.reference.SpeciesTable;
 import org.fallwright.core.site.Anchor.Soil;
@@ -20,6 +21,10 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 
 class StemVolumeReferenceTest {
+  private static final String FONWEBAN = "Fonweban et al. 2012, by a public wind-risk model";
+  private static final String CHERRIES =
+      "Ryan, Joiner and Ryan 1976, 31 felled black cherry trees, timber";
+
   /** Breast-height form factors that follow from Fonweban et al. 2012, to two digits. */
   @ParameterizedTest
   @CsvSource({
@@ -32,7 +37,10 @@ class StemVolumeReferenceTest {
   })
   void formFactor(StemVolume equation, double dbhM, double heightM, double factor) {
     double cylinder = Math.PI / 4 * dbhM * dbhM * heightM;
-    assertThat(equation.volumeM3(dbhM, heightM) / cylinder).isCloseTo(factor, within(0.006));
+    String what = equation + " " + dbhM + " m, " + heightM + " m, form factor";
+    CheckValue.of(FONWEBAN, what, factor, "")
+        .worked()
+        .isMet(equation.volumeM3(dbhM, heightM) / cylinder, 0.006);
   }
 
   /** Norway spruce 40 cm, 25 m: 1.355 m³, 1,152 kg, pulled over by 145.2 or 168.9 kN·m. */
@@ -40,12 +48,14 @@ class StemVolumeReferenceTest {
   void norwaySpruceFromDiameterToOverturning() {
     Species s = SpeciesTable.of("norway-spruce");
     double volume = StemVolume.of(s).volumeM3(0.40, 25);
-    assertThat(volume).isCloseTo(1.355, within(0.0005));
+    worked("Norway spruce 0.4 m, 25 m, volume", 1.355, "m³", volume, 0.0005);
     double mass = volume * s.greenDensity().value();
-    assertThat(mass).isCloseTo(1152, within(0.5));
+    worked("Norway spruce 0.4 m, 25 m, stem mass", 1152, "kg", mass, 0.5);
     Soil soil = Soil.FREE_DRAINING_MINERAL;
-    assertThat(mass * s.rootPlate(soil, false).value()).isCloseTo(145_200, within(100.0));
-    assertThat(mass * s.rootPlate(soil, true).value()).isCloseTo(168_900, within(100.0));
+    double shallow = mass * s.rootPlate(soil, false).value();
+    worked("the same, overturned, shallow", 145_200, "N·m", shallow, 100);
+    worked(
+        "the same, overturned, deep", 168_900, "N·m", mass * s.rootPlate(soil, true).value(), 100);
   }
 
   /** Beech 40 cm, 25 m by the stand-in: 1.153 m³ and 1,335 kg; spruce 60 cm, 30 m: 2,890 kg. */
@@ -53,9 +63,11 @@ class StemVolumeReferenceTest {
   void stemMasses() {
     Species beech = SpeciesTable.of("european-beech");
     double volume = StemVolume.of(beech).volumeM3(0.40, 25);
-    assertThat(volume).isCloseTo(1.153, within(0.0005));
-    assertThat(volume * beech.greenDensity().value()).isCloseTo(1335, within(0.6));
-    assertThat(StemVolume.SPRUCE.volumeM3(0.60, 30) * 850).isCloseTo(2890, within(1.0));
+    worked("beech 0.4 m, 25 m, volume", 1.153, "m³", volume, 0.0005);
+    double mass = volume * beech.greenDensity().value();
+    worked("beech 0.4 m, 25 m, stem mass", 1335, "kg", mass, 0.6);
+    double spruce = StemVolume.SPRUCE.volumeM3(0.60, 30) * 850;
+    worked("spruce 0.6 m, 30 m, stem mass", 2890, "kg", spruce, 1);
   }
 
   /** Base 0.60 m, 25 m: paraboloid 3.534 m³, cone 2.356 m³; centres at 1/3, 1/4 and 1/5. */
@@ -79,6 +91,9 @@ class StemVolumeReferenceTest {
    */
   @Test
   void blackCherryTrees() throws IOException {
+    double[] sums = sums(StemVolume.PINE::volumeM3);
+    CheckValue.of(CHERRIES, "sum of volumes by the stand-in equation", sums[0], "m³")
+        .isMetWithinShare(sums[1], 0.021);
     Deviation standIn = cherries(StemVolume.PINE::volumeM3);
     assertThat(standIn.ofSum()).isCloseTo(-0.020, within(0.001));
     assertThat(standIn.mean()).isCloseTo(0.029, within(0.001));
@@ -123,6 +138,21 @@ class StemVolumeReferenceTest {
         Math.sqrt(squares / (share.length - 1)),
         Arrays.stream(share).min().orElseThrow(),
         Arrays.stream(share).max().orElseThrow());
+  }
+
+  private static double[] sums(ToDoubleBiFunction<Double, Double> model) throws IOException {
+    double measured = 0;
+    double modelled = 0;
+    for (double[] t : cherries()) {
+      measured += t[2] * Units.CUBIC_FOOT;
+      modelled += model.applyAsDouble(t[0] * Units.INCH, t[1] * Units.FOOT);
+    }
+    return new double[] {measured, modelled};
+  }
+
+  private static void worked(
+      String what, double theirs, String unit, double ours, double tolerance) {
+    CheckValue.of(FONWEBAN, what, theirs, unit).worked().isMet(ours, tolerance);
   }
 
   private static List<double[]> cherries() throws IOException {

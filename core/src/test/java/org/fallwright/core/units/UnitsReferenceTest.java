@@ -3,6 +3,7 @@ package org.fallwright.core.units;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import org.fallwright.core.outside.CheckValue;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -34,8 +35,8 @@ class UnitsReferenceTest {
     "GRAVITY, 9.80665E+00"
   })
   void factorIsAsPrinted(String field, double printed) throws ReflectiveOperationException {
-    double factor = Units.class.getField(field).getDouble(null);
-    assertThat(factor).isCloseTo(printed, within(printed * SEVEN_DIGITS));
+    CheckValue.of("NIST Special Publication 811 (2008), Appendix B.8", field, printed, "SI")
+        .isMetWithinShare(Units.class.getField(field).getDouble(null), SEVEN_DIGITS);
   }
 
   /** Rise over run by hand: 1 in 1, 1 in 10, 1 in 4, and the 30-60-90 triangle. */
@@ -57,6 +58,23 @@ class UnitsReferenceTest {
   /** Wood Handbook Table 5-3 prints ponderosa pine as 5,100 psi and as 35,000 kPa. */
   @Test
   void onePrintedStrengthInBothUnits() {
-    assertThat(5100 * Units.PSI).isCloseTo(35_000_000, within(500_000.0));
+    CheckValue.of("USDA Wood Handbook, Table 5-3", "ponderosa pine, 5100 psi in kPa", 35_000, "kPa")
+        .isMet(5100 * Units.PSI / 1000, 500);
+  }
+
+  /** A table that prints each breaking load in kip and in 100 kN. */
+  @ParameterizedTest
+  @CsvSource({"33.6, 1.495", "74, 3.292", "91, 4.048", "322, 14.323", "680, 30.248"})
+  void kipInHundredKilonewtons(double kip, double printed) {
+    CheckValue.of("UFC 4-159-03 (2005), Table 6-8", kip + " kip", printed, "100 kN")
+        .isMet(kip * 1000 * Units.POUND_FORCE / 1e5, 0.0006);
+  }
+
+  /** Knots and miles per hour at the edges of the forces of the wind, each as a whole number. */
+  @ParameterizedTest
+  @CsvSource({"16, 18", "21, 24", "27, 31", "33, 38", "40, 46", "47, 54", "55, 63", "63, 72"})
+  void knotsInMilesPerHour(double knots, double mph) {
+    CheckValue.of("Beaufort scale, public table", knots + " kn", mph, "mph")
+        .isMet(knots * Units.KNOT / Units.MILE_PER_HOUR, 0.6);
   }
 }

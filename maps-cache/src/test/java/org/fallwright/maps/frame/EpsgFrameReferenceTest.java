@@ -6,6 +6,7 @@ import static org.assertj.core.api.Assertions.within;
 
 import java.awt.geom.Point2D;
 import net.sf.geographiclib.Geodesic;
+import org.fallwright.core.outside.CheckValue;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -16,8 +17,9 @@ class EpsgFrameReferenceTest {
   @Test
   void utm17North() {
     Point2D p = EpsgFrame.of("EPSG:32617").fromEarth(new LatLon(37.2, -80.5));
-    assertThat(p.getX()).isCloseTo(544371.3944, within(1e-4));
-    assertThat(p.getY()).isCloseTo(4117176.4518, within(1e-4));
+    String source = "Two projection libraries that agree, UTM zone 17";
+    CheckValue.of(source, "37.2 N 80.5 W, easting", 544371.3944, "m").isMet(p.getX(), 1e-4);
+    CheckValue.of(source, "37.2 N 80.5 W, northing", 4117176.4518, "m").isMet(p.getY(), 1e-4);
   }
 
   /**
@@ -36,7 +38,8 @@ class EpsgFrameReferenceTest {
     double arc = Math.signum(lat) * Geodesic.WGS84.Inverse(0, lon, lat, lon).s12;
     EpsgFrame frame = EpsgFrame.of(code);
     Point2D p = frame.fromEarth(new LatLon(lat, lon));
-    assertThat(p.getX()).isCloseTo(500000, within(1e-6));
+    CheckValue.of("DMA TM 8358.2, UTM grid", code + ", easting on its meridian", 500_000, "m")
+        .isMet(p.getX(), 1e-6);
     assertThat(p.getY()).isCloseTo(falseNorthing + 0.9996 * arc, within(1e-4));
     LatLon back = frame.toEarth(p.getX(), p.getY());
     assertThat(back.latDeg()).isCloseTo(lat, within(1e-9));

@@ -9,6 +9,7 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.util.stream.Stream;
 import java.util.stream.StreamSupport;
+import org.fallwright.core.outside.CheckValue;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -59,13 +60,20 @@ class TackleReferenceTest {
     "6, 0.50, 1.969, 0.984",
   })
   void gainsByPartsAndEfficiency(int parts, double k, double moving, double fixed) {
-    assertThat(new Tackle(parts, k, false).gain()).isCloseTo(moving, within(0.00051));
-    assertThat(new Tackle(parts, k, true).gain()).isCloseTo(fixed, within(0.00051));
+    String what = parts + " parts, k " + k;
+    CheckValue.of("Sum of powers of k", what + ", from the moving block", moving, "")
+        .worked()
+        .isMet(new Tackle(parts, k, false).gain(), 0.00051);
+    CheckValue.of("Sum of powers of k", what + ", from the fixed block", fixed, "")
+        .worked()
+        .isMet(new Tackle(parts, k, true).gain(), 0.00051);
   }
 
   /** An oilfield handbook's block page: four parts on plain bearings lift 3,250 lb by 1,000 lb. */
   @Test
   void fourPartsOnPlainBearings() {
+    CheckValue.of("Pipeline Rules of Thumb Handbook", "4 parts, plain bearings, gain", 3.25, "")
+        .isMet(new Tackle(4, 0.917, true).gain(), 0.03);
     assertThat(new Tackle(4, 0.917, true).gain()).isCloseTo(3.24, within(0.02));
   }
 
@@ -75,13 +83,23 @@ class TackleReferenceTest {
    */
   @Test
   void theFrictionFactorFormAgrees() {
-    assertThat(new Tackle(4, 1 / 1.09, true).gain()).isCloseTo(3.240, within(0.001));
+    CheckValue.of("Friction-factor form, after Kemp and Young", "K 1.09, 4 on 4, gain", 3.240, "")
+        .worked()
+        .isMet(new Tackle(4, 1 / 1.09, true).gain(), 0.001);
   }
 
   /** Two double blocks give 3 1/3 in a light-artillery handbook, at 8 to 9 % a sheave. */
   @Test
   void twoDoubleBlocks() {
-    assertThat(new Tackle(4, 0.925, true).gain()).isCloseTo(3.33, within(0.03));
+    CheckValue.of("Handbook for Light Artillery", "two double blocks, gain", 10.0 / 3, "")
+        .isMet(new Tackle(4, 0.925, true).gain(), 0.03);
+  }
+
+  /** The same handbook: a double and a treble block give 4, at 8 to 9 % a sheave. */
+  @Test
+  void aDoubleAndATrebleBlock() {
+    CheckValue.of("Handbook for Light Artillery", "double and treble block, gain", 4, "")
+        .isMet(new Tackle(5, 0.925, true).gain(), 0.05);
   }
 
   /** Hand-worked, k 0.9: load on the anchor per newton hauled. */

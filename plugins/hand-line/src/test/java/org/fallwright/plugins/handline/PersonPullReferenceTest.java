@@ -10,6 +10,7 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.util.stream.Stream;
 import java.util.stream.StreamSupport;
+import org.fallwright.core.outside.CheckValue;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -92,7 +93,8 @@ class PersonPullReferenceTest {
   @ParameterizedTest
   @CsvSource({"2, 0.93", "3, 0.85", "8, 0.492"})
   void theFitIsNearTheMeasuredFactors(int people, double measured) {
-    assertThat(Crew.factor(people)).isCloseTo(measured, within(0.02));
+    CheckValue.of("Ringelmann 1913, by popular accounts", "share left of " + people, measured, "")
+        .isMet(Crew.factor(people), 0.02);
   }
 
   private static void same(double value, JsonNode out, String key) {
