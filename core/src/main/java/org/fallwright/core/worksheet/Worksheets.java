@@ -40,7 +40,7 @@ public final class Worksheets {
       anchors.write();
       new PartLines(w, r, anchors.strengths()).write();
     }
-    return w.finish(site.name() + ": " + title(setup, in), lead(r), results(r, in));
+    return w.finish(site.name() + ": " + title(setup, in), lead(), remarks(r), results(r, in));
   }
 
   private static String title(Setup s, DisplayUnits in) {
@@ -68,21 +68,23 @@ public final class Worksheets {
         hauled);
   }
 
-  private static List<String> lead(Reckoned r) {
-    List<String> lead = new ArrayList<>();
-    lead.add(r.judged().sentence());
-    lead.add(
+  private static List<String> lead() {
+    return List.of(
         "Each line can be repeated with a calculator set to degrees: the printed numbers give the"
             + " printed result to its last digit, and that rounded result goes on. So many digits only"
-            + " serve to follow the sums; no tree is known that well.");
-    lead.add(
+            + " serve to follow the sums; no tree is known that well.",
         "Forces are at the tree, in the leg of the line that leaves it, unless another place is"
             + " named. ^ raises to a power, ln is the natural logarithm; all angles are in degrees.");
-    lead.add(
+  }
+
+  private static List<String> remarks(Reckoned r) {
+    List<String> remarks = new ArrayList<>();
+    remarks.add(r.judged().sentence());
+    remarks.addAll(r.judged().notes());
+    remarks.add(
         "Left out: shear and bending together in the hinge, the stem's own weight in its bending, what"
             + " slings, anchors and sag give, the tree's own roots before the cut.");
-    lead.addAll(r.judged().notes());
-    return lead;
+    return remarks;
   }
 
   private static List<Worksheet.Result> results(Reckoned r, DisplayUnits in) {
@@ -92,8 +94,8 @@ public final class Worksheets {
   private static Worksheet.Result result(Check c, DisplayUnits in) {
     return new Worksheet.Result(
         c.id(),
-        amount(c.value(), c.unit(), in),
-        amount(c.limit(), c.unit(), in),
+        c.unit().equals("N") ? in.forceAtMost(c.value()) : amount(c.value(), c.unit(), in),
+        c.unit().equals("N") ? in.forceAtLeast(c.limit()) : amount(c.limit(), c.unit(), in),
         Double.isFinite(c.ratio()) ? String.format(Locale.ROOT, "%.2f", c.ratio()) : "–",
         c.verdict().word(),
         c.why());
@@ -104,7 +106,6 @@ public final class Worksheets {
       return "–";
     }
     return switch (unit) {
-      case "N" -> in.force(si);
       case "m" -> in.length(si);
       case "N·m" -> in.moment(si);
       case "deg" -> in.angle(Math.toRadians(si));
