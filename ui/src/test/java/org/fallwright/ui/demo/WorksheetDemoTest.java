@@ -68,7 +68,7 @@ class WorksheetDemoTest {
         s ->
             anchor(s, "A1", "vehicle")
                 .put("mass_kg", 9000.0)
-                .put("surface", "gravel")
+                .put("surface", "compact-gravel")
                 .put("wet", false)
                 .put("uphill_deg", 2.0)
                 .put("rated_point_N", 40000.0));
