@@ -8,6 +8,7 @@ import org.fallwright.core.plan.Judge;
 import org.fallwright.core.plan.Reckoned;
 import org.fallwright.core.plan.Setup;
 import org.fallwright.core.pull.PullSources;
+import org.fallwright.core.site.Quantity;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.units.DisplayUnits;
 
@@ -33,7 +34,7 @@ public final class Worksheets {
     new ForceLines(w, r, rises, path).write();
     if (r.ratios() != null) {
       new StretchLines(w, r).write();
-      new HoldLines(w, r, rises, path).write();
+      new HoldLines(w, r, massStated(site.tree().massKg()), rises, path).write();
       new HingeLines(w, r, rises).write();
       new BlockLines(w, r).write();
       AnchorLines anchors = new AnchorLines(w, r);
@@ -41,6 +42,11 @@ public final class Worksheets {
       new PartLines(w, r, anchors.strengths()).write();
     }
     return w.finish(site.name() + ": " + title(setup, in), lead(), remarks(r), results(r, in));
+  }
+
+  /** Whether the person gave the mass a plus-or-minus of their own. */
+  private static boolean massStated(Quantity mass) {
+    return mass != null && mass.plusMinus() != null;
   }
 
   private static String title(Setup s, DisplayUnits in) {

@@ -79,7 +79,7 @@ class WorksheetDemoTest {
                 .put("breaking_load_N", 150000.0)
                 .put("vouched_by", "the owner"));
     sites.put("another rule set", s -> s.put("rule_set", "DE-DGUV"));
-    sites.put("hinge too strong", s -> cutThick(s, 0.2));
+    sites.put("hinge too strong", s -> cutThick(s, 0.3));
     sites.put("dead hinge", s -> tree(s).put("dead_or_decayed", true));
     return sites.entrySet().stream()
         .map(
@@ -90,7 +90,7 @@ class WorksheetDemoTest {
                         units,
                         e.getValue(),
                         e.getKey().equals("hinge too strong")
-                            ? withHinge(DemoRowsTest.ROW_6, 0.2)
+                            ? withHinge(DemoRowsTest.ROW_6, 0.3)
                             : DemoRowsTest.ROW_6)));
   }
 
