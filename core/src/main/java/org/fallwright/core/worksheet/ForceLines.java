@@ -45,7 +45,7 @@ final class ForceLines {
     w.work("q", "mass centre from the hinge", "√(u_g^2 + w_g^2)", LENGTH, Basis.GEOMETRY);
     w.work(
         "φ_0",
-        "how far the mass centre lies behind the hinge, below 0 where it does",
+        "angle of the mass centre off upright over the hinge, below 0 behind it",
         "atan(u_g ÷ w_g)",
         ANGLE,
         Basis.GEOMETRY);

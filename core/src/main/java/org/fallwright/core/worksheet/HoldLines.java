@@ -21,15 +21,17 @@ final class HoldLines {
   private final TreeSide side;
   private final Holding holding;
   private final boolean captured;
+  private final boolean massStated;
   private final Rises rises;
   private final PathLines path;
 
-  HoldLines(Workings w, Reckoned r, Rises rises, PathLines path) {
+  HoldLines(Workings w, Reckoned r, boolean massStated, Rises rises, PathLines path) {
     this.w = w;
     this.r = r;
     side = r.statics().treeSide();
     holding = r.ratios().holding();
     captured = r.ratios().source().captured();
+    this.massStated = massStated;
     this.rises = rises;
     this.path = path;
   }
@@ -54,7 +56,7 @@ final class HoldLines {
         "standard deviation of the mass over the mass",
         r.pull().spread().massRel(),
         NUMBER,
-        Basis.PLANNING_ALLOWANCE);
+        massStated ? Basis.ENTERED : Basis.PLANNING_ALLOWANCE);
     w.work("W_h", "weight, 95th percentile", "W × (1 + z_95 × s_m)", FORCE, Basis.SPREAD);
     w.work("y_s", "moment arm product, sat back", "w_s × P_u − u_s × z_1", AREA, Basis.GEOMETRY);
     w.work(

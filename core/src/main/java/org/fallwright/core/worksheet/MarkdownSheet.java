@@ -16,6 +16,7 @@ public final class MarkdownSheet {
     m.line("");
     m.line("**" + cell(w.title()) + "**");
     m.bullets("Cautions", w.cautions());
+    m.bullets("The setup", w.remarks());
     m.bullets("How to read it", w.lead());
     for (Section s : w.sections()) {
       m.section(s);

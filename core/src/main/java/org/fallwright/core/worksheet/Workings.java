@@ -168,9 +168,10 @@ final class Workings {
     return fit(unit(from) / unit(to));
   }
 
-  Worksheet finish(String heading, List<String> lead, List<Worksheet.Result> results) {
+  Worksheet finish(
+      String heading, List<String> lead, List<String> remarks, List<Worksheet.Result> results) {
     close();
-    return new Worksheet(heading, List.of(), lead, sections, results, compared, sources);
+    return new Worksheet(heading, List.of(), lead, remarks, sections, results, compared, sources);
   }
 
   private void close() {

@@ -6,6 +6,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.TreeMap;
 import java.util.stream.Stream;
 
 /**
@@ -14,6 +15,7 @@ import java.util.stream.Stream;
  * @param title what it is of
  * @param cautions what goes with every plan, a sentence each; may be empty
  * @param lead how to read it, a sentence each
+ * @param remarks what is to be said of the setup, a sentence each
  * @param sections its lines in the order in which they are worked
  * @param results what is a result of geometry or a check, and is not worked by hand
  * @param compared figures worked here against the program's own
@@ -23,6 +25,7 @@ public record Worksheet(
     String title,
     List<String> cautions,
     List<String> lead,
+    List<String> remarks,
     List<Section> sections,
     List<Result> results,
     List<Compared> compared,
@@ -43,6 +46,7 @@ public record Worksheet(
   public Worksheet {
     cautions = List.copyOf(cautions);
     lead = List.copyOf(lead);
+    remarks = List.copyOf(remarks);
     sections = List.copyOf(sections);
     results = List.copyOf(results);
     compared = List.copyOf(compared);
@@ -50,7 +54,7 @@ public record Worksheet(
 
   /** The same with these cautions at its head. */
   public Worksheet withCautions(List<String> others) {
-    return new Worksheet(title, others, lead, sections, results, compared, sources);
+    return new Worksheet(title, others, lead, remarks, sections, results, compared, sources);
   }
 
   /** Every line in order. */
@@ -68,6 +72,16 @@ public record Worksheet(
             lines().filter(l -> l.name().toLowerCase(Locale.ROOT).startsWith(asked)))
         .flatMap(s -> s)
         .findFirst();
+  }
+
+  /** The sources that lines name. */
+  private Map<String, String> named(List<Section> few) {
+    Map<String, String> named = new TreeMap<>(sources);
+    named
+        .keySet()
+        .retainAll(
+            few.stream().flatMap(s -> s.lines().stream()).map(Line::source).distinct().toList());
+    return named;
   }
 
   /** Only that line and all that it rests on, in order; what goes with the whole is left off. */
@@ -93,9 +107,10 @@ public record Worksheet(
         of.symbol() + ", " + of.name() + ": " + title,
         cautions,
         lead,
+        List.of(),
         few,
         List.of(),
-        compared.stream().filter(c -> c.symbol().equals(of.symbol())).toList(),
-        sources);
+        compared.stream().filter(c -> kept.contains(c.symbol())).toList(),
+        named(few));
   }
 }

@@ -8,6 +8,7 @@ import org.fallwright.core.plan.Judge;
 import org.fallwright.core.plan.Reckoned;
 import org.fallwright.core.plan.Setup;
 import org.fallwright.core.pull.PullSources;
+import org.fallwright.core.site.Quantity;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.units.DisplayUnits;
 
@@ -33,14 +34,19 @@ public final class Worksheets {
     new ForceLines(w, r, rises, path).write();
     if (r.ratios() != null) {
       new StretchLines(w, r).write();
-      new HoldLines(w, r, rises, path).write();
+      new HoldLines(w, r, massStated(site.tree().massKg()), rises, path).write();
       new HingeLines(w, r, rises).write();
       new BlockLines(w, r).write();
       AnchorLines anchors = new AnchorLines(w, r);
       anchors.write();
       new PartLines(w, r, anchors.strengths()).write();
     }
-    return w.finish(site.name() + ": " + title(setup, in), lead(r), results(r, in));
+    return w.finish(site.name() + ": " + title(setup, in), lead(), remarks(r), results(r, in));
+  }
+
+  /** Whether the person gave the mass a plus-or-minus of their own. */
+  private static boolean massStated(Quantity mass) {
+    return mass != null && mass.plusMinus() != null;
   }
 
   private static String title(Setup s, DisplayUnits in) {
@@ -68,21 +74,23 @@ public final class Worksheets {
         hauled);
   }
 
-  private static List<String> lead(Reckoned r) {
-    List<String> lead = new ArrayList<>();
-    lead.add(r.judged().sentence());
-    lead.add(
+  private static List<String> lead() {
+    return List.of(
         "Each line can be repeated with a calculator set to degrees: the printed numbers give the"
             + " printed result to its last digit, and that rounded result goes on. So many digits only"
-            + " serve to follow the sums; no tree is known that well.");
-    lead.add(
+            + " serve to follow the sums; no tree is known that well.",
         "Forces are at the tree, in the leg of the line that leaves it, unless another place is"
             + " named. ^ raises to a power, ln is the natural logarithm; all angles are in degrees.");
-    lead.add(
+  }
+
+  private static List<String> remarks(Reckoned r) {
+    List<String> remarks = new ArrayList<>();
+    remarks.add(r.judged().sentence());
+    remarks.addAll(r.judged().notes());
+    remarks.add(
         "Left out: shear and bending together in the hinge, the stem's own weight in its bending, what"
             + " slings, anchors and sag give, the tree's own roots before the cut.");
-    lead.addAll(r.judged().notes());
-    return lead;
+    return remarks;
   }
 
   private static List<Worksheet.Result> results(Reckoned r, DisplayUnits in) {
@@ -92,8 +100,8 @@ public final class Worksheets {
   private static Worksheet.Result result(Check c, DisplayUnits in) {
     return new Worksheet.Result(
         c.id(),
-        amount(c.value(), c.unit(), in),
-        amount(c.limit(), c.unit(), in),
+        c.unit().equals("N") ? in.forceAtMost(c.value()) : amount(c.value(), c.unit(), in),
+        c.unit().equals("N") ? in.forceAtLeast(c.limit()) : amount(c.limit(), c.unit(), in),
         Double.isFinite(c.ratio()) ? String.format(Locale.ROOT, "%.2f", c.ratio()) : "–",
         c.verdict().word(),
         c.why());
@@ -104,7 +112,6 @@ public final class Worksheets {
       return "–";
     }
     return switch (unit) {
-      case "N" -> in.force(si);
       case "m" -> in.length(si);
       case "N·m" -> in.moment(si);
       case "deg" -> in.angle(Math.toRadians(si));

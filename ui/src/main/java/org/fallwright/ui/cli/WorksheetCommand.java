@@ -6,6 +6,7 @@ import java.nio.file.Path;
 import java.util.Locale;
 import java.util.stream.Collectors;
 import org.fallwright.core.plan.Judged;
+import org.fallwright.core.worksheet.Compared;
 import org.fallwright.core.worksheet.Line;
 import org.fallwright.core.worksheet.MarkdownSheet;
 import org.fallwright.core.worksheet.Worksheet;
@@ -75,7 +76,7 @@ final class WorksheetCommand extends Subcommand {
               : "--setup is " + rank + "; this plan has setups 1 to " + most + ".");
     }
     Judged judged = planned.plan().ranked().get(rank - 1);
-    Worksheet sheet = asked(whole(planned, judged).withCautions(Cautions.ALWAYS));
+    Worksheet sheet = asked(whole(planned, judged));
     if (out == null) {
       out().print(MarkdownSheet.write(sheet));
     } else {
@@ -97,7 +98,7 @@ final class WorksheetCommand extends Subcommand {
 
   private Worksheet asked(Worksheet whole) {
     if (sum == null) {
-      return whole;
+      return whole.withCautions(Cautions.ALWAYS);
     }
     Line line =
         whole
@@ -107,10 +108,13 @@ final class WorksheetCommand extends Subcommand {
                     new Refused(
                         "--sum is \""
                             + sum
-                            + "\"; this worksheet has: "
-                            + whole.lines().map(Line::symbol).collect(Collectors.joining(" "))
+                            + "\"; this worksheet has no such sign or name. Its main figures are: "
+                            + whole.compared().stream()
+                                .map(Compared::symbol)
+                                .filter(s -> !s.matches(".*\\d"))
+                                .collect(Collectors.joining(" "))
                             + "."));
-    return whole.sum(line);
+    return whole.sum(line).withCautions(Cautions.ALWAYS.subList(0, 2));
   }
 
   private byte[] pages(Worksheet sheet, Paper size) {

@@ -110,6 +110,7 @@ public final class WorksheetPages {
     flow.text("Worksheet", TITLE, "");
     flow.text(printable(sheet.title()), HEADING, "");
     list("Cautions", sheet.cautions());
+    list("The setup", sheet.remarks());
     list("How to read it", sheet.lead());
     sheet.sections().forEach(this::section);
     results();
@@ -131,18 +132,24 @@ public final class WorksheetPages {
     flow.heading(printable(s.title()), HEADING);
     s.notes().forEach(n -> flow.text(printable(n), TEXT, ""));
     List<Column> columns = columns(0.085, 0.29, 0.455, 0.17);
+    List<Column> given = columns(0.085, 0.745, 0.17);
     for (Line l : s.lines()) {
-      flow.row(
-          columns,
-          List.of(
-              List.of(new Paragraph(l.symbol(), STRONG)),
-              List.of(new Paragraph(printable(l.name()), CELL), new Paragraph(l.grounds(), SMALL)),
-              l.worked()
-                  ? List.of(
-                      new Paragraph(l.formula(), CELL), new Paragraph("= " + l.numbers(), CELL))
-                  : List.of(),
-              List.of(
-                  new Paragraph((l.worked() ? "= " : "") + l.result() + " " + l.unit(), STRONG))));
+      List<Paragraph> sign = List.of(new Paragraph(l.symbol(), STRONG));
+      Paragraph result =
+          new Paragraph(((l.worked() ? "= " : "") + l.result() + " " + l.unit()).strip(), STRONG);
+      if (l.worked()) {
+        flow.row(
+            columns,
+            List.of(
+                sign,
+                List.of(
+                    new Paragraph(printable(l.name()), CELL), new Paragraph(l.grounds(), SMALL)),
+                List.of(new Paragraph(l.formula(), CELL), new Paragraph("= " + l.numbers(), CELL)),
+                List.of(result)));
+      } else {
+        String what = printable(l.name()) + " (" + l.grounds() + ")";
+        flow.row(given, List.of(sign, List.of(new Paragraph(what, CELL)), List.of(result)));
+      }
     }
   }
 

@@ -42,7 +42,7 @@ class FallwrightTest {
   }
 
   @ParameterizedTest
-  @ValueSource(strings = {"", "plan", "sheet", "check", "sources", "open", "demo"})
+  @ValueSource(strings = {"", "plan", "sheet", "worksheet", "check", "sources", "open", "demo"})
   void everyCommandHasHelp(String command) {
     Said said = command.isEmpty() ? run(home(), "--help") : run(home(), command, "--help");
     assertThat(said.status).isZero();
