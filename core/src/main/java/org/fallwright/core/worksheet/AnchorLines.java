@@ -79,7 +79,13 @@ final class AnchorLines {
         "M_a" + i + " ÷ z_a" + i,
         FORCE,
         Basis.STATICS);
-    w.given("σ_a" + i, "mean rupture strength of its wood", s.morPa(), STRESS);
+    w.given(
+        "σ_a" + i,
+        "mean rupture strength of its wood, the lowest of its sources",
+        s.morHolds(),
+        STRESS,
+        Basis.of(s.morPa().kind()),
+        s.morPa().source());
     w.given("v_a" + i, "its coefficient of variation", s.morCv(), NUMBER);
     w.allow("z_95", Allowances.PERCENTILE_SDS, NUMBER);
     double small = w.unit(SMALL_LENGTH);

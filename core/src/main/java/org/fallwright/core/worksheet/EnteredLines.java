@@ -11,7 +11,9 @@ import static org.fallwright.core.worksheet.Dimension.SMALL_LENGTH;
 import static org.fallwright.core.worksheet.Dimension.SPEED;
 import static org.fallwright.core.worksheet.Dimension.STRESS;
 
+import java.util.ArrayList;
 import java.util.List;
+import org.fallwright.core.line.Point3;
 import org.fallwright.core.plan.LinePoint;
 import org.fallwright.core.plan.Reckoned;
 import org.fallwright.core.plan.Setup;
@@ -22,6 +24,7 @@ import org.fallwright.core.site.CutPlan;
 import org.fallwright.core.site.Place;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.SubjectTree;
+import org.fallwright.core.site.WeighedSection;
 import org.fallwright.core.tree.MassEquation;
 
 /** What the setup chooses and what was entered of tree, cut, wood, day and line. */
@@ -91,14 +94,26 @@ final class EnteredLines {
     if (t.shellM() != null) {
       w.given("s_w", "sound shell of the hollow stem", t.shellM(), SMALL_LENGTH, Basis.ENTERED);
     }
-    mass(t);
-    if (t.massCentreM() != null) {
-      w.given("h_g", "height of the mass centre", t.massCentreM(), LENGTH);
+    if (loaded(t)) {
+      w.given(
+          "m",
+          "green mass of the tree, reckoned with its crown's share bare, wet or iced",
+          r.tree().massKg(),
+          MASS,
+          Basis.PLANNING_ALLOWANCE);
+      w.given(
+          "h_g",
+          "height of the mass centre, reckoned likewise",
+          r.tree().massCentreM(),
+          LENGTH,
+          Basis.PLANNING_ALLOWANCE);
+    } else if (t.sections() != null) {
+      sections(t);
     } else {
-      w.allow("q_g", Allowances.MASS_CENTRE_SHARE, NUMBER);
-      w.work("h_g", "height of the mass centre", "q_g × H", LENGTH, Basis.PLANNING_ALLOWANCE);
+      mass(t);
+      centre(t);
     }
-    if (crownAside()) {
+    if (plainCrown()) {
       w.given("q_c", "share of the mass that is crown", t.crownShare(), NUMBER, Basis.ENTERED);
       w.given(
           "c_E",
@@ -112,13 +127,62 @@ final class EnteredLines {
           t.crownOffsetM().northM(),
           LENGTH,
           Basis.ENTERED);
+    } else if (aside()) {
+      Point3 shift = r.pull().tree().crownShift();
+      String name = "mass centre moved by the crown, its share times its offset, to the ";
+      w.given("c_E", name + "east", shift.e(), LENGTH, Basis.PLANNING_ALLOWANCE);
+      w.given("c_N", name + "north", shift.n(), LENGTH, Basis.PLANNING_ALLOWANCE);
     }
   }
 
-  /** Whether the crown's offset moves the mass centre. */
-  boolean crownAside() {
+  /** What a sum puts before the crown's offset; empty where the crown moves nothing. */
+  String crownTerm() {
+    return plainCrown() ? " + q_c × " : aside() ? " + " : "";
+  }
+
+  private boolean plainCrown() {
     SubjectTree t = site.tree();
-    return t.crownOffsetM() != null && t.crownShare() != null;
+    return t.crownOffsetM() != null && t.crownShare() != null && !t.iceOrWet();
+  }
+
+  private boolean aside() {
+    Point3 shift = r.pull().tree().crownShift();
+    return shift.e() != 0 || shift.n() != 0;
+  }
+
+  /** Whether the mass holds more or less than what was entered or the equation gives. */
+  private boolean loaded(SubjectTree t) {
+    boolean bare = r.species().broadleaf() && !t.inLeaf();
+    return t.iceOrWet() || bare && t.massKg() == null && t.sections() == null;
+  }
+
+  private void sections(SubjectTree t) {
+    List<String> masses = new ArrayList<>();
+    List<String> moments = new ArrayList<>();
+    for (int i = 0; i < t.sections().size(); i++) {
+      WeighedSection piece = t.sections().get(i);
+      String n = Integer.toString(i + 1);
+      w.given("m_" + n, "piece " + n + ", weighed", piece.massKg(), MASS, Basis.MEASURED);
+      w.given("h_" + n, "height of its middle", piece.midHeightM(), LENGTH, Basis.MEASURED);
+      masses.add("m_" + n);
+      moments.add("m_" + n + " × h_" + n);
+    }
+    w.work("m", "green mass of the tree", String.join(" + ", masses), MASS, Basis.STATICS);
+    w.work(
+        "h_g",
+        "height of the mass centre",
+        "(" + String.join(" + ", moments) + ") ÷ m",
+        LENGTH,
+        Basis.STATICS);
+  }
+
+  private void centre(SubjectTree t) {
+    if (t.massCentreM() != null) {
+      w.given("h_g", "height of the mass centre", t.massCentreM(), LENGTH);
+    } else {
+      w.allow("q_g", Allowances.MASS_CENTRE_SHARE, NUMBER);
+      w.work("h_g", "height of the mass centre", "q_g × H", LENGTH, Basis.PLANNING_ALLOWANCE);
+    }
   }
 
   private void mass(SubjectTree t) {
@@ -148,7 +212,20 @@ final class EnteredLines {
   private void wood() {
     Species s = r.species();
     w.section("Green wood of the pulled tree, " + s.name());
-    w.given("σ_r", "mean rupture strength", s.morPa(), STRESS);
+    w.given(
+        "σ_r",
+        "mean rupture strength, the highest of its sources, where it resists",
+        s.morResists(),
+        STRESS,
+        Basis.of(s.morPa().kind()),
+        s.morPa().source());
+    w.given(
+        "σ_w",
+        "mean rupture strength, the lowest of its sources, where it must hold",
+        s.morHolds(),
+        STRESS,
+        Basis.of(s.morPa().kind()),
+        s.morPa().source());
     w.given("v_r", "coefficient of variation of the rupture strength", s.morCv(), NUMBER);
     w.given("E_w", "mean modulus of elasticity", s.moePa(), STRESS);
     w.given("τ_w", "mean shear strength along the grain", s.shearPa(), STRESS);

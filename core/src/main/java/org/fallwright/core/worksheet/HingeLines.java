@@ -70,7 +70,7 @@ final class HingeLines {
     w.work(
         "Q_s",
         "strength of the hinge against a side moment",
-        "σ_r × t × b_s^2 ÷ 6" + units(),
+        "σ_w × t × b_s^2 ÷ 6" + units(),
         MOMENT,
         Basis.BEAM_THEORY);
     boolean loose = c.tensionN() == 0;

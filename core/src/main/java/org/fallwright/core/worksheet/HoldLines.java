@@ -122,7 +122,7 @@ final class HoldLines {
     w.work(
         "N_m",
         "tension at which the hinge lets the tree move there, at the means",
-        "(M_hm − M_gt) ÷ ℓ_t",
+        "(M_hm × σ_w ÷ σ_r − M_gt) ÷ ℓ_t",
         FORCE,
         Basis.STATICS);
     rises.write(
@@ -144,7 +144,7 @@ final class HoldLines {
     w.work(
         "N_m0",
         "tension at which the hinge lets the tree move from where it stands, at the means",
-        "(M_hm − M_g0) ÷ ℓ_0",
+        "(M_hm × σ_w ÷ σ_r − M_g0) ÷ ℓ_0",
         FORCE,
         Basis.STATICS);
     rises.write(

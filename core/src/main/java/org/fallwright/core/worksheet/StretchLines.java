@@ -16,6 +16,7 @@ import java.util.Map;
 import java.util.SortedMap;
 import org.fallwright.core.plan.Reckoned;
 import org.fallwright.core.reference.Allowances;
+import org.fallwright.core.statics.LineSet;
 import org.fallwright.core.statics.TreeSide;
 
 /** What line and stem give way, and the stem's strength below the line. */
@@ -56,6 +57,18 @@ final class StretchLines {
           Basis.GEOMETRY);
       give.add("L_leg" + (i + 1) + " ÷ EA");
       length.add("L_leg" + (i + 1));
+    }
+    LineSet.BaseLeg haul = r.pull().line().base();
+    if (haul != null) {
+      w.given(
+          "L_h",
+          "line of the block system that stretches, its haul leg and its parts",
+          haul.lengthM(),
+          LENGTH,
+          Basis.GEOMETRY);
+      w.given("EA_h", "its softest axial stiffness", haul.stiffnessN(), FORCE, Basis.ENTERED);
+      w.given("j_h", "its tension over that at the tree", haul.ratio(), NUMBER, Basis.STATICS);
+      give.add("L_h × j_h^2 ÷ EA_h");
     }
     w.work("L_all", "length of all legs", String.join(" + ", length), LENGTH, Basis.GEOMETRY);
     w.work(
@@ -189,7 +202,7 @@ final class StretchLines {
     w.note("Sections each 0.5 m above the hinge were tried; this is the weakest.");
     w.allow("z_95", Allowances.PERCENTILE_SDS, NUMBER);
     w.work(
-        "σ_5", "rupture strength, 5th percentile", "σ_r × (1 − z_95 × v_r)", STRESS, Basis.SPREAD);
+        "σ_5", "rupture strength, 5th percentile", "σ_w × (1 − z_95 × v_r)", STRESS, Basis.SPREAD);
     w.given("h_w", "weakest section above the hinge", side.stemWeakestM(), LENGTH, Basis.STATICS);
     w.work(
         "d_w",

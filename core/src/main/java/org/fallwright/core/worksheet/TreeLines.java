@@ -23,13 +23,13 @@ final class TreeLines {
   private final Workings w;
   private final Site site;
   private final Reckoned r;
-  private final boolean crownAside;
+  private final String crownTerm;
 
-  TreeLines(Workings w, Site site, Reckoned r, boolean crownAside) {
+  TreeLines(Workings w, Site site, Reckoned r, String crownTerm) {
     this.w = w;
     this.site = site;
     this.r = r;
-    this.crownAside = crownAside;
+    this.crownTerm = crownTerm;
   }
 
   void write() {
@@ -116,13 +116,13 @@ final class TreeLines {
     w.work(
         "o_E",
         "mass centre east of the stump's middle",
-        "w_g × tan(λ) × sin(γ)" + (crownAside ? " + q_c × c_E" : ""),
+        "w_g × tan(λ) × sin(γ)" + (crownTerm.isEmpty() ? "" : crownTerm + "c_E"),
         LENGTH,
         Basis.GEOMETRY);
     w.work(
         "o_N",
         "mass centre north of it",
-        "w_g × tan(λ) × cos(γ)" + (crownAside ? " + q_c × c_N" : ""),
+        "w_g × tan(λ) × cos(γ)" + (crownTerm.isEmpty() ? "" : crownTerm + "c_N"),
         LENGTH,
         Basis.GEOMETRY);
     w.work(

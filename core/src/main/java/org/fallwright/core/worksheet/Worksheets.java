@@ -27,7 +27,7 @@ public final class Worksheets {
     Workings w = new Workings(in);
     EnteredLines entered = new EnteredLines(w, site, r);
     entered.write();
-    new TreeLines(w, site, r, entered.crownAside()).write();
+    new TreeLines(w, site, r, entered.crownTerm()).write();
     PathLines path = new PathLines(w, r);
     path.write();
     Rises rises = new Rises(w, r.statics().worked().inputs());

@@ -1,6 +1,7 @@
 package org.fallwright.core.reference;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
 
 import org.fallwright.core.outside.CheckValue;
 import org.fallwright.core.site.Anchor.Soil;

@@ -2,6 +2,7 @@ package org.fallwright.ui.demo;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
@@ -78,6 +79,25 @@ class WorksheetDemoTest {
             anchor(s, "A1", "rated")
                 .put("breaking_load_N", 150000.0)
                 .put("vouched_by", "the owner"));
+    sites.put("sources disagree", s -> tree(s).put("species", "sitka-spruce"));
+    sites.put("iced", s -> tree(s).put("ice_or_wet", true));
+    sites.put(
+        "weighed pieces",
+        s -> {
+          ArrayNode pieces =
+              tree(s).putNull("mass_kg").putNull("mass_centre_m").putArray("sections");
+          pieces.addObject().put("mass_kg", 2100.0).put("mid_height_m", 4.0);
+          pieces.addObject().put("mass_kg", 1500.0).put("mid_height_m", 11.0);
+        });
+    sites.put(
+        "crown by its outline",
+        s -> {
+          ArrayNode points =
+              tree(s).putObject("crown_outline").put("type", "polygon").putArray("points");
+          for (double[] p : new double[][] {{12, 18}, {21, 18}, {21, 27}, {12, 27}}) {
+            points.addArray().add(p[0]).add(p[1]);
+          }
+        });
     sites.put("another rule set", s -> s.put("rule_set", "DE-DGUV"));
     sites.put("hinge too strong", s -> cutThick(s, 0.3));
     sites.put("dead hinge", s -> tree(s).put("dead_or_decayed", true));
