@@ -162,10 +162,10 @@ final class EnteredLines {
     for (int i = 0; i < t.sections().size(); i++) {
       WeighedSection piece = t.sections().get(i);
       String n = Integer.toString(i + 1);
-      w.given("m_" + n, "piece " + n + ", weighed", piece.massKg(), MASS, Basis.MEASURED);
-      w.given("h_" + n, "height of its middle", piece.midHeightM(), LENGTH, Basis.MEASURED);
-      masses.add("m_" + n);
-      moments.add("m_" + n + " × h_" + n);
+      w.given("m_p" + n, "piece " + n + ", weighed", piece.massKg(), MASS, Basis.MEASURED);
+      w.given("h_p" + n, "height of its middle", piece.midHeightM(), LENGTH, Basis.MEASURED);
+      masses.add("m_p" + n);
+      moments.add("m_p" + n + " × h_" + n);
     }
     w.work("m", "green mass of the tree", String.join(" + ", masses), MASS, Basis.STATICS);
     w.work(
