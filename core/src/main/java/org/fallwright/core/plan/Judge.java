@@ -3,12 +3,14 @@ package org.fallwright.core.plan;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
 import org.fallwright.core.pull.HaulLine;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullSource;
 import org.fallwright.core.pull.PullSources;
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.rules.RuleSet;
 import org.fallwright.core.rules.RuleSets;
 import org.fallwright.core.site.Gear;
@@ -54,6 +56,19 @@ public final class Judge {
   public Judge(Site site, PullSources sources) {
     this.site = site;
     this.sources = sources;
+    for (double height : site.offer().attachHeightsM()) {
+      double above = height - site.cut().heightM();
+      if (above <= Allowances.ATTACH_LEAST.value()) {
+        throw new IllegalArgumentException(
+            String.format(
+                Locale.ROOT,
+                "offer.attach_heights_m holds %s m, which is %.2f m above the cut; it must be more"
+                    + " than %.1f m above it",
+                height,
+                above,
+                Allowances.ATTACH_LEAST.value()));
+      }
+    }
     rules = RuleSets.shipped().byKey(site.ruleSet());
     in = DisplayUnits.valueOf(site.display().name());
     subject = new Subject(site);

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.rules.RuleSet;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Shape;
@@ -36,6 +37,7 @@ final class Landing {
   private final WireCheck wires;
   private final List<WireCheck.Reach> reach;
   private final EscapeRoutes escapes;
+  private final GroundFall ground;
   private final Map<Fall, Landed> falls = new ConcurrentHashMap<>();
   private final Map<Out, List<Position>> waysOut = new ConcurrentHashMap<>();
   private final Map<List<Position>, Angles> angles = new ConcurrentHashMap<>();
@@ -94,6 +96,7 @@ final class Landing {
     wires = new WireCheck(site.wires(), t.stump(), site.cut().heightM(), outline);
     reach = knowledge.ofWires() ? wires.reach(knowledge.approach()) : List.of();
     escapes = new EscapeRoutes(site.targets());
+    ground = GroundFall.of(site);
   }
 
   /** Where the tree lands, wires, ways out. */
@@ -140,7 +143,7 @@ final class Landing {
         nearest == null ? Double.NaN : nearest.clearanceM(),
         nearest == null ? null : nearest.targetId(),
         angles,
-        full ? notes(landed, sitBack, route) : List.of());
+        full ? notes(landed, setup, sitBack, route) : List.of());
   }
 
   private Angles angles(List<Position> path) {
@@ -149,7 +152,13 @@ final class Landing {
 
   private Landed land(Fall fall) {
     FallFootprint f =
-        FallFootprint.of(outline, site.tree().stump().at(), fall.layDeg(), fall.steeringShare(), 0);
+        FallFootprint.of(
+            outline,
+            site.tree().stump().at(),
+            fall.layDeg(),
+            fall.steeringShare(),
+            FallFootprint.slideM(
+                site.tree().heightM().value(), ground.alongDeg(fall.layDeg()), null));
     return new Landed(
         f,
         targets.clearances(f),
@@ -275,8 +284,16 @@ final class Landing {
         reach.stream().mapToDouble(WireCheck.Reach::stopM).max().orElse(Double.NaN));
   }
 
-  private List<String> notes(Landed landed, SitBackZone sitBack, Route route) {
+  private List<String> notes(Landed landed, Setup setup, SitBackZone sitBack, Route route) {
     List<String> notes = new ArrayList<>();
+    double fall = ground.alongDeg(setup.layDeg());
+    if (fall > Allowances.SLIDE_SLOPE.value()) {
+      notes.add(
+          "The ground falls about "
+              + in.angle(Math.toRadians(fall))
+              + " along this lay by the heights entered: the felled tree may slide on, and ground for"
+              + " that is counted.");
+    }
     for (TargetClearance c : landed.clearances()) {
       if (c.mayBeHit() && c.overlaps()) {
         notes.add(

@@ -154,4 +154,42 @@ class PlannerTest {
             () -> new Planner(TinySite.SOURCES).plan(TinySite.site(1_500), share -> {}, () -> true))
         .isInstanceOf(CancellationException.class);
   }
+
+  @Test
+  void onALayThatFallsSteeplyTheTreeMaySlideOn() {
+    // the anchor thirty metres north lies six metres lower: 11.3 degrees, more than ten
+    Site steep =
+        TinySite.site(
+            4_000,
+            s ->
+                ((com.fasterxml.jackson.databind.node.ObjectNode)
+                        s.get("anchors").get(0).get("place"))
+                    .put("ground_m", -6));
+    Judged down = new Judge(steep, TinySite.SOURCES).judge(north());
+    Judged level = new Judge(TinySite.site(4_000), TinySite.SOURCES).judge(north());
+    double reach = level.ground().footprint().getEnvelopeInternal().getMaxY();
+    assertThat(down.ground().footprint().getEnvelopeInternal().getMaxY())
+        .isCloseTo(reach + 5, within(0.1));
+    assertThat(down.notes()).anyMatch(n -> n.contains("slide"));
+    assertThat(level.notes()).noneMatch(n -> n.contains("slide"));
+    // uphill there is nothing to slide
+    Judged up = new Judge(steep, TinySite.SOURCES).judge(north().withLay(180));
+    assertThat(up.notes()).noneMatch(n -> n.contains("slide"));
+  }
+
+  @Test
+  void aLineTiedAtTheCutIsRefused() {
+    Site low =
+        TinySite.site(
+            4_000,
+            s ->
+                ((com.fasterxml.jackson.databind.node.ObjectNode) s.get("offer"))
+                    .putArray("attach_heights_m")
+                    .add(0.7));
+    assertThatThrownBy(() -> plan(low))
+        .isInstanceOf(IllegalArgumentException.class)
+        .hasMessage(
+            "offer.attach_heights_m holds 0.7 m, which is 0.50 m above the cut; it must be more"
+                + " than 0.5 m above it");
+  }
 }
