@@ -1,5 +1,6 @@
 package org.fallwright.core.anchor;
 
+import org.fallwright.core.tree.StemVolume;
 import org.fallwright.core.units.Range;
 
 /**
@@ -13,7 +14,7 @@ import org.fallwright.core.units.Range;
  * @param stemForm which volume equation serves for it
  */
 public record WoodFigures(
-    double morPa, double morCv, double greenDensity, double rootPlateNmPerKg, StemForm stemForm) {
+    double morPa, double morCv, double greenDensity, double rootPlateNmPerKg, StemVolume stemForm) {
   /**
    * Lowest overturning moment per kilogram of stem that was read, western hemlock [N·m/kg]; for
    * species without pulling tests. Published: Byrne 2005, critical turning moments of BC conifers.

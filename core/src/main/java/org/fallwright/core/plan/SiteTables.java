@@ -1,12 +1,12 @@
 package org.fallwright.core.plan;
 
 import org.fallwright.core.anchor.AnchorFigures;
-import org.fallwright.core.anchor.StemForm;
 import org.fallwright.core.anchor.WoodFigures;
 import org.fallwright.core.reference.Species;
 import org.fallwright.core.reference.SpeciesTable;
 import org.fallwright.core.reference.SurfaceTable;
 import org.fallwright.core.site.Anchor;
+import org.fallwright.core.tree.StemVolume;
 
 /** The species and surface tables as anchors need them: everything taken low, for it helps. */
 final class SiteTables implements AnchorFigures {
@@ -18,7 +18,7 @@ final class SiteTables implements AnchorFigures {
         s.morCv().value(),
         s.densityLow(),
         s.rootPlate(soil, deepRooting).value(),
-        s.key().endsWith("spruce") ? StemForm.SPRUCE : StemForm.OTHER);
+        StemVolume.of(s));
   }
 
   @Override

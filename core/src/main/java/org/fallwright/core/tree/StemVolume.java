@@ -36,6 +36,21 @@ public enum StemVolume {
     return species.massGroup() == SPRUCE_GROUP ? SPRUCE : PINE;
   }
 
+  /** a of the equation. */
+  public double factor() {
+    return a;
+  }
+
+  /** b of the equation. */
+  public double diameterPower() {
+    return b;
+  }
+
+  /** c of the equation. */
+  public double heightPower() {
+    return c;
+  }
+
   /**
    * Stem volume over bark [m³].
    *

@@ -14,7 +14,6 @@ import static org.fallwright.core.worksheet.Dimension.VOLUME;
 
 import java.util.ArrayDeque;
 import java.util.Deque;
-import org.fallwright.core.anchor.StemForm;
 import org.fallwright.core.plan.HeldAnchor;
 import org.fallwright.core.plan.Reckoned;
 import org.fallwright.core.reference.Allowances;
@@ -22,6 +21,7 @@ import org.fallwright.core.reference.Figure;
 import org.fallwright.core.reference.Species;
 import org.fallwright.core.reference.SpeciesTable;
 import org.fallwright.core.site.Anchor;
+import org.fallwright.core.tree.StemVolume;
 import org.fallwright.core.units.Units;
 
 /** What each anchor holds. */
@@ -133,11 +133,11 @@ final class AnchorLines {
         Basis.PLANNING_ALLOWANCE);
   }
 
-  private StemForm form(String species, Anchor.Soil soil, boolean deep) {
+  private StemVolume form(String species, Anchor.Soil soil, boolean deep) {
     return r.anchorFigures().wood(species, soil, deep).stemForm();
   }
 
-  private void volume(int i, Species s, StemForm form) {
+  private void volume(int i, Species s, StemVolume form) {
     w.given(
         "a_v" + i,
         "factor of the stem volume equation",

@@ -6,6 +6,7 @@ import static org.assertj.core.api.Assertions.within;
 
 import org.fallwright.core.site.Anchor;
 import org.fallwright.core.site.Anchor.Condition;
+import org.fallwright.core.tree.StemVolume;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -13,7 +14,7 @@ import org.junit.jupiter.params.provider.EnumSource;
 
 class AnchorCapacityTest {
   private static final WoodFigures OAK =
-      new WoodFigures(57e6, 0.16, 1010, WoodFigures.LOWEST_ROOT_PLATE, StemForm.OTHER);
+      new WoodFigures(57e6, 0.16, 1010, WoodFigures.LOWEST_ROOT_PLATE, StemVolume.PINE);
   private static final AnchorLoad LEVEL = new AnchorLoad(0, false);
 
   private static Capacity of(Anchor anchor, AnchorLoad load) {
@@ -80,7 +81,7 @@ class AnchorCapacityTest {
 
   @Test
   void aThinStemBreaksBeforeStrongRootsLetGo() {
-    WoodFigures weakWood = new WoodFigures(10e6, 0.16, 1400, 300, StemForm.SPRUCE);
+    WoodFigures weakWood = new WoodFigures(10e6, 0.16, 1400, 300, StemVolume.SPRUCE);
     Capacity c =
         AnchorCapacity.of(Anchors.sound(0.3, 30, 0.3, false), LEVEL, Anchors.figures(weakWood, 0));
     assertThat(c.mode()).isEqualTo("stem bending");

@@ -8,6 +8,7 @@ import com.fasterxml.jackson.databind.ObjectMapper;
 import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
+import org.fallwright.core.tree.StemVolume;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 
@@ -37,14 +38,14 @@ class AnchorCasesTest {
     double mass = in.get("stem_mass").asDouble();
     double dbh = in.get("dbh").asDouble();
     // the height at which the volume equation gives the case's stem mass at 1,000 kg/m³
-    double height = 20 * Math.pow(mass / 1000 / StemForm.OTHER.volumeM3(dbh, 20), 1 / 1.079539);
+    double height = 20 * Math.pow(mass / 1000 / StemVolume.PINE.volumeM3(dbh, 20), 1 / 1.079539);
     WoodFigures wood =
         new WoodFigures(
             in.get("mor").asDouble(),
             in.get("mor_cv").asDouble(),
             1000,
             in.get("c").asDouble(),
-            StemForm.OTHER);
+            StemVolume.PINE);
     boolean downhill = in.get("downhill").asBoolean();
     WoodAnchor holds =
         WoodAnchor.of(

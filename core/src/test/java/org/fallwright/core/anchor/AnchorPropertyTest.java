@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.util.Random;
+import org.fallwright.core.tree.StemVolume;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 
@@ -32,7 +33,7 @@ class AnchorPropertyTest {
   @ValueSource(longs = {11, 12, 13, 14})
   void higherSlingsAndWetterGroundNeverHoldMore(long seed) {
     Random random = new Random(seed);
-    WoodFigures wood = new WoodFigures(50e6, 0.16, 900, 77.4, StemForm.OTHER);
+    WoodFigures wood = new WoodFigures(50e6, 0.16, 900, 77.4, StemVolume.PINE);
     for (int i = 0; i < 200; i++) {
       double dbh = 0.25 + random.nextDouble();
       double height = 5 + 25 * random.nextDouble();

@@ -6,6 +6,7 @@ import static org.assertj.core.api.Assertions.within;
 import org.fallwright.core.outside.CheckValue;
 import org.fallwright.core.site.Anchor.Holdfast;
 import org.fallwright.core.site.Anchor.PicketSoil;
+import org.fallwright.core.tree.StemVolume;
 import org.fallwright.core.units.Units;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -20,7 +21,7 @@ class AnchorReferenceTest {
   /** Norway spruce, DBH 40 cm, 25 m, 850 kg/m³, free-draining mineral soil. */
   @Test
   void norwaySpruceOfTheBritishPullingTests() {
-    double volume = StemForm.SPRUCE.volumeM3(0.40, 25);
+    double volume = StemVolume.SPRUCE.volumeM3(0.40, 25);
     worked(NICOLL, "spruce 40 cm, 25 m, volume", 1.355, "m³", volume, 0.0005);
     double mass = 850 * volume;
     worked(NICOLL, "the same, stem mass", 1152, "kg", mass, 0.5);
@@ -36,7 +37,7 @@ class AnchorReferenceTest {
   /** Beech, DBH 40 cm, 25 m, by the stand-in row; 1,158 kg/m³ and 65 MPa. */
   @Test
   void beechByTheStandInRow() {
-    double volume = StemForm.OTHER.volumeM3(0.40, 25);
+    double volume = StemVolume.PINE.volumeM3(0.40, 25);
     worked(FONWEBAN, "beech 40 cm, 25 m, volume", 1.153, "m³", volume, 0.0005);
     worked(FONWEBAN, "the same, stem mass", 1335, "kg", 1158 * volume, 0.6);
     double stem = WoodAnchor.stemNm(65e6, 0.40) / 1000;
@@ -47,9 +48,9 @@ class AnchorReferenceTest {
   @ParameterizedTest
   @CsvSource({
     "SPRUCE, 0.20, 15, 0.49", "SPRUCE, 0.40, 25, 0.43", "SPRUCE, 0.60, 30, 0.40",
-    "OTHER, 0.20, 15, 0.45", "OTHER, 0.40, 25, 0.37", "OTHER, 0.60, 30, 0.32"
+    "PINE, 0.20, 15, 0.45", "PINE, 0.40, 25, 0.37", "PINE, 0.60, 30, 0.32"
   })
-  void formFactors(StemForm form, double dbh, double height, double factor) {
+  void formFactors(StemVolume form, double dbh, double height, double factor) {
     double cylinder = Math.PI / 4 * dbh * dbh * height;
     String what = "anchor " + form + " " + dbh + " m, " + height + " m, form factor";
     worked(FONWEBAN, what, factor, "", form.volumeM3(dbh, height) / cylinder, 0.0051);
@@ -229,11 +230,11 @@ class AnchorReferenceTest {
    */
   @ParameterizedTest
   @CsvSource({
-    "OTHER, 0.62, 19, 1010, 77.4, 137.1", "OTHER, 0.27, 13, 833, 77.4, 19.3",
-    "SPRUCE, 0.44, 23, 850, 126.0, 159.2", "OTHER, 0.40, 15, 560, 77.4, 28.8"
+    "PINE, 0.62, 19, 1010, 77.4, 137.1", "PINE, 0.27, 13, 833, 77.4, 19.3",
+    "SPRUCE, 0.44, 23, 850, 126.0, 159.2", "PINE, 0.40, 15, 560, 77.4, 28.8"
   })
   void momentsOfTheDemoSite(
-      StemForm form, double dbh, double height, double density, double perKg, double kNm) {
+      StemVolume form, double dbh, double height, double density, double perKg, double kNm) {
     double mass = density * form.volumeM3(dbh, height);
     assertThat(WoodAnchor.rootPlateNm(perKg, mass) / 1000).isCloseTo(kNm, within(0.05));
   }

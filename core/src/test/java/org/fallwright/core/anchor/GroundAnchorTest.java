@@ -8,6 +8,7 @@ import org.fallwright.core.site.Anchor;
 import org.fallwright.core.site.Anchor.DeadmanSoil;
 import org.fallwright.core.site.Anchor.Holdfast;
 import org.fallwright.core.site.Anchor.PicketSoil;
+import org.fallwright.core.tree.StemVolume;
 import org.fallwright.core.units.Units;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -17,7 +18,7 @@ import org.junit.jupiter.params.provider.EnumSource;
 /** Pickets, pins and buried logs as anchors of a site. */
 class GroundAnchorTest {
   private static final WoodFigures WOOD =
-      new WoodFigures(57e6, 0.16, 1010, WoodFigures.LOWEST_ROOT_PLATE, StemForm.OTHER);
+      new WoodFigures(57e6, 0.16, 1010, WoodFigures.LOWEST_ROOT_PLATE, StemVolume.PINE);
   private static final AnchorLoad LEVEL = new AnchorLoad(0, false);
 
   private static Capacity of(Anchor anchor, AnchorLoad load) {
