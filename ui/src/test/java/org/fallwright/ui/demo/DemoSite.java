@@ -7,11 +7,16 @@ import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.Path;
+import java.util.EnumMap;
 import java.util.List;
+import java.util.Locale;
+import java.util.Map;
 import java.util.function.Consumer;
 import org.fallwright.core.plan.Check;
 import org.fallwright.core.plan.Judge;
 import org.fallwright.core.plan.Judged;
+import org.fallwright.core.plan.Plan;
+import org.fallwright.core.plan.Planner;
 import org.fallwright.core.plan.Setup;
 import org.fallwright.core.plan.Verdict;
 import org.fallwright.core.pull.PullSources;
@@ -27,7 +32,10 @@ public final class DemoSite {
   private static final PluginFolder PLUGINS =
       PluginFolder.open(Path.of("target", "plugins"), "0.1.0");
 
+  private static final Map<Site.Display, DemoSite> COARSE = new EnumMap<>(Site.Display.class);
+
   private final ObjectNode tree;
+  private Plan plan;
 
   private DemoSite(ObjectNode tree) {
     this.tree = tree;
@@ -45,6 +53,23 @@ public final class DemoSite {
     }
   }
 
+  /**
+   * The demo in some units, with a coarser grid of lays and those of its rows: one for all tests,
+   * searched once.
+   */
+  public static synchronized DemoSite coarse(Site.Display units) {
+    return COARSE.computeIfAbsent(
+        units,
+        u ->
+            asItIs()
+                .with(
+                    s -> {
+                      s.put("display", u.name().toLowerCase(Locale.ROOT));
+                      ObjectNode offer = (ObjectNode) s.get("offer");
+                      offer.put("lay_step_deg", 10.0).withArray("lays_deg").add(3).add(7).add(342);
+                    }));
+  }
+
   /** A copy with something changed in the file. */
   public DemoSite with(Consumer<ObjectNode> change) {
     ObjectNode copy = tree.deepCopy();
@@ -53,7 +78,7 @@ public final class DemoSite {
   }
 
   /** The entry of a list that has that id. */
-  static ObjectNode entry(JsonNode list, String id) {
+  public static ObjectNode entry(JsonNode list, String id) {
     for (JsonNode n : list) {
       if (n.get("id").asText().equals(id)) {
         return (ObjectNode) n;
@@ -71,19 +96,28 @@ public final class DemoSite {
     }
   }
 
-  Judged judge(Setup setup) {
+  /** What the planner finds; searched once. */
+  public synchronized Plan plan() {
+    if (plan == null) {
+      plan = new Planner(PLUGINS).plan(site());
+    }
+    return plan;
+  }
+
+  public Judged judge(Setup setup) {
     return new Judge(site(), PLUGINS).judge(setup);
   }
 
-  static Setup direct(double lay, String source, String mode, String place) {
+  public static Setup direct(double lay, String source, String mode, String place) {
     return new Setup(lay, 10.5, 0.045, "L1", List.of(), source, mode, place, null);
   }
 
-  static Setup redirected(double lay, String source, String mode, String place, String over) {
+  public static Setup redirected(
+      double lay, String source, String mode, String place, String over) {
     return new Setup(lay, 10.5, 0.045, "L1", List.of(over), source, mode, place, null);
   }
 
-  static Setup tackle(double lay, String parts, String driver, String mode, String place) {
+  public static Setup tackle(double lay, String parts, String driver, String mode, String place) {
     return new Setup(
         lay,
         10.5,
@@ -96,7 +130,7 @@ public final class DemoSite {
         new Setup.Driver(driver, mode, place));
   }
 
-  static Check check(Judged j, String id) {
+  public static Check check(Judged j, String id) {
     return j.checks().stream()
         .filter(c -> c.id().equals(id))
         .findFirst()
