@@ -15,7 +15,7 @@ import javax.swing.JComponent;
 import javax.swing.SwingUtilities;
 import org.fallwright.core.plan.Plan;
 import org.fallwright.core.site.Site;
-import org.fallwright.ui.DemoLike;
+import org.fallwright.ui.demo.DemoSite;
 import org.fallwright.ui.document.OpenSite;
 import org.fallwright.ui.map.PlanPainter;
 import org.fallwright.ui.map.Viewport;
@@ -24,8 +24,8 @@ import org.locationtech.jts.geom.Envelope;
 
 /** The regions of the window painted into an image: needs no display. */
 class DeskTest {
-  private final Site site = DemoLike.site(Site.Display.METRIC);
-  private final Plan plan = DemoLike.plan(site);
+  private final Site site = DemoSite.coarse(Site.Display.METRIC).site();
+  private final Plan plan = DemoSite.coarse(Site.Display.METRIC).plan();
   private final OpenSite open = new OpenSite();
 
   @Test
