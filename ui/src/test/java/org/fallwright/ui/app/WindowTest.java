@@ -82,7 +82,7 @@ class WindowTest {
     List<String> metric = strip();
     assertThat(metric)
         .containsAll(says(Answer.of(ranked(1), new Amounts(Site.Display.METRIC))))
-        .contains("Workable", "6.36 kN", "4.74 kN as entered", "1.46 times the need")
+        .contains("Workable", "6.36 kN", "4.73 kN as entered", "1.46 times the need")
         .contains("gust 4.0 m/s")
         .anyMatch(t -> t.startsWith("Hand-winch at A3 over A1, lay 000°. Plan for 6.36 kN"))
         .noneMatch(t -> t.endsWith(" lbf"));

@@ -43,7 +43,7 @@ class AnswerTest {
         .containsExactly(
             new Answer.Cell("needs", "1,430 lbf", "1,070 lbf as entered"),
             new Answer.Cell("gives", "2,090 lbf", "1.46 times the need"),
-            new Answer.Cell("clears", "11 ft 1 in", "Shed"),
+            new Answer.Cell("clears", "11 ft 2 in", "Shed"),
             new Answer.Cell("weakest", "1.46", "pull"));
   }
 
