@@ -145,6 +145,29 @@ public record Site(
         offer);
   }
 
+  /** The same site with other wires. */
+  public Site withWires(List<Wire> others) {
+    return new Site(
+        version,
+        name,
+        origin,
+        display,
+        ruleSet,
+        declinationDeg,
+        picture,
+        tree,
+        cut,
+        targets,
+        others,
+        looked,
+        dropZones,
+        anchors,
+        spots,
+        gear,
+        conditions,
+        offer);
+  }
+
   public Optional<Anchor> anchor(String id) {
     return anchors.stream().filter(a -> a.id().equals(id)).findFirst();
   }

@@ -59,6 +59,11 @@ public record Wire(
     Range.checkOrNull("stated_error_m", statedErrorM, 0, 100, "m");
   }
 
+  /** The same wire, its voltage stated by nobody. */
+  public Wire unstated() {
+    return new Wire(id, null, null, state, poles, sagM, fix, statedErrorM);
+  }
+
   /** Position error [m]. */
   public double errorM() {
     return statedErrorM != null ? statedErrorM : fix.errorM();

@@ -6,7 +6,6 @@ import java.nio.file.Path;
 import java.util.List;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.Verdict;
-import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Wire;
 import org.fallwright.ui.home.Home;
 import org.fallwright.ui.sheet.Paper;
@@ -73,48 +72,13 @@ final class DemoCommand extends Subcommand {
 
   /** What the plan says when nobody has stated the voltage of the wires. */
   private String blanked(Planned demo) {
-    Planned copy = Planned.of(home, demo.file(), withoutVoltage(demo.site()));
+    List<Wire> unstated = demo.site().wires().stream().map(Wire::unstated).toList();
+    Planned copy = Planned.of(home, demo.file(), demo.site().withWires(unstated));
     Verdict verdict = Exit.standing(copy.plan());
     String why =
         copy.plan().ranked().stream().findFirst().map(Judged::sentence).orElse(verdict.word());
     return "The same site with its wires' voltage left blank: "
         + verdict.word()
         + (verdict == Verdict.CANNOT_JUDGE ? why.replaceFirst("^[^.]*\\.", ".") : ". " + why);
-  }
-
-  private static Site withoutVoltage(Site s) {
-    List<Wire> wires =
-        s.wires().stream()
-            .map(
-                w ->
-                    new Wire(
-                        w.id(),
-                        null,
-                        null,
-                        w.state(),
-                        w.poles(),
-                        w.sagM(),
-                        w.fix(),
-                        w.statedErrorM()))
-            .toList();
-    return new Site(
-        s.version(),
-        s.name(),
-        s.origin(),
-        s.display(),
-        s.ruleSet(),
-        s.declinationDeg(),
-        s.picture(),
-        s.tree(),
-        s.cut(),
-        s.targets(),
-        wires,
-        s.looked(),
-        s.dropZones(),
-        s.anchors(),
-        s.spots(),
-        s.gear(),
-        s.conditions(),
-        s.offer());
   }
 }

@@ -4,19 +4,18 @@ import java.awt.BorderLayout;
 import java.awt.Color;
 import java.awt.Component;
 import java.awt.Dimension;
-import java.awt.Rectangle;
 import javax.swing.BorderFactory;
 import javax.swing.Box;
 import javax.swing.BoxLayout;
 import javax.swing.JLabel;
 import javax.swing.JPanel;
 import javax.swing.JTextArea;
-import javax.swing.Scrollable;
+import org.fallwright.ui.column.Column;
 import org.fallwright.ui.map.Palette;
 import org.fallwright.ui.text.Messages;
 
 /** The rail at the left: what was entered, what is still to be said, what the tool filled in. */
-public final class EnteredPanel extends JPanel implements Scrollable {
+public final class EnteredPanel extends Column {
   private final JPanel lines = new JPanel();
 
   public EnteredPanel() {
@@ -94,30 +93,5 @@ public final class EnteredPanel extends JPanel implements Scrollable {
       t.setForeground(c);
     }
     lines.add(t);
-  }
-
-  @Override
-  public Dimension getPreferredScrollableViewportSize() {
-    return getPreferredSize();
-  }
-
-  @Override
-  public int getScrollableUnitIncrement(Rectangle seen, int orientation, int direction) {
-    return 24;
-  }
-
-  @Override
-  public int getScrollableBlockIncrement(Rectangle seen, int orientation, int direction) {
-    return seen.height;
-  }
-
-  @Override
-  public boolean getScrollableTracksViewportWidth() {
-    return true;
-  }
-
-  @Override
-  public boolean getScrollableTracksViewportHeight() {
-    return getParent() != null && getPreferredSize().height < getParent().getHeight();
   }
 }

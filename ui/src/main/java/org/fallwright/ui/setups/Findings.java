@@ -8,44 +8,63 @@ import org.fallwright.core.plan.PartLoad;
 import org.fallwright.ui.text.Amounts;
 import org.fallwright.ui.text.Messages;
 
-/** The checks and loads of a setup as tables. */
-final class Findings {
-  private Findings() {}
+/**
+ * What was found of a setup as a table.
+ *
+ * @param <T> what stands in a row
+ */
+abstract sealed class Findings<T> extends AbstractTableModel {
+  private final List<T> rows;
+  private final String[] columns;
+
+  private Findings(List<T> rows, String... columns) {
+    this.rows = rows;
+    this.columns = columns;
+  }
+
+  /** What a cell says. */
+  abstract String text(T row, int column);
+
+  T row(int row) {
+    return rows.get(row);
+  }
+
+  @Override
+  public int getRowCount() {
+    return rows.size();
+  }
+
+  @Override
+  public int getColumnCount() {
+    return columns.length;
+  }
+
+  @Override
+  public String getColumnName(int column) {
+    return Messages.text("findings.column." + columns[column]);
+  }
+
+  @Override
+  public String getValueAt(int row, int column) {
+    return text(rows.get(row), column);
+  }
 
   /** Every check, the worst verdict first: what there is, what is asked, their ratio. */
-  static final class Checks extends AbstractTableModel {
-    private static final String[] COLUMNS = {"check", "value", "limit", "ratio"};
-    private final List<Check> checks;
+  static final class Checks extends Findings<Check> {
     private final Amounts amounts;
 
     Checks(List<Check> checks, Amounts amounts) {
-      this.checks =
-          checks.stream().sorted(Comparator.comparing(Check::verdict).reversed()).toList();
+      super(
+          checks.stream().sorted(Comparator.comparing(Check::verdict).reversed()).toList(),
+          "check",
+          "value",
+          "limit",
+          "ratio");
       this.amounts = amounts;
     }
 
-    Check check(int row) {
-      return checks.get(row);
-    }
-
     @Override
-    public int getRowCount() {
-      return checks.size();
-    }
-
-    @Override
-    public int getColumnCount() {
-      return COLUMNS.length;
-    }
-
-    @Override
-    public String getColumnName(int column) {
-      return Messages.text("findings.column." + COLUMNS[column]);
-    }
-
-    @Override
-    public String getValueAt(int row, int column) {
-      Check c = checks.get(row);
+    String text(Check c, int column) {
       return switch (column) {
         case 0 -> Way.name(c.id());
         case 1 -> amounts.amount(c.value(), c.unit());
@@ -56,34 +75,16 @@ final class Findings {
   }
 
   /** Every part: its loads at plan and at the most the source can do, and its strength. */
-  static final class Loads extends AbstractTableModel {
-    private static final String[] COLUMNS = {"part", "at-plan", "at-high", "strength"};
-    private final List<PartLoad> loads;
+  static final class Loads extends Findings<PartLoad> {
     private final Amounts amounts;
 
     Loads(List<PartLoad> loads, Amounts amounts) {
-      this.loads = loads;
+      super(loads, "part", "at-plan", "at-high", "strength");
       this.amounts = amounts;
     }
 
     @Override
-    public int getRowCount() {
-      return loads.size();
-    }
-
-    @Override
-    public int getColumnCount() {
-      return COLUMNS.length;
-    }
-
-    @Override
-    public String getColumnName(int column) {
-      return Messages.text("findings.column." + COLUMNS[column]);
-    }
-
-    @Override
-    public String getValueAt(int row, int column) {
-      PartLoad p = loads.get(row);
+    String text(PartLoad p, int column) {
       return switch (column) {
         case 0 -> Way.name(p.part());
         case 1 -> amounts.forceNeeded(p.atPlanN());

@@ -82,7 +82,7 @@ public final class FindingsPanel extends JPanel {
     if (setting || shown == null || row < 0 || row >= checks.getRowCount()) {
       return;
     }
-    Check c = ((Findings.Checks) checks.getModel()).check(row);
+    Check c = ((Findings.Checks) checks.getModel()).row(row);
     why.setText(c.why());
     pointed.accept(c);
   }
@@ -135,9 +135,9 @@ public final class FindingsPanel extends JPanel {
         JTable t, Object value, boolean selected, boolean focused, int row, int column) {
       JLabel l =
           (JLabel) super.getTableCellRendererComponent(t, value, selected, focused, row, column);
-      Verdict v = ((Findings.Checks) t.getModel()).check(row).verdict();
+      Verdict v = ((Findings.Checks) t.getModel()).row(row).verdict();
       l.setIcon(new VerdictIcon(v, palette, 13));
-      l.setToolTipText(((Findings.Checks) t.getModel()).check(row).why());
+      l.setToolTipText(((Findings.Checks) t.getModel()).row(row).why());
       return l;
     }
   }

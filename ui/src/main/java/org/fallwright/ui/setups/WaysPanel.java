@@ -1,10 +1,8 @@
 package org.fallwright.ui.setups;
 
 import java.awt.BorderLayout;
-import java.awt.Dimension;
 import java.awt.GridBagConstraints;
 import java.awt.GridBagLayout;
-import java.awt.Rectangle;
 import java.util.List;
 import java.util.function.Consumer;
 import javax.swing.BorderFactory;
@@ -14,8 +12,8 @@ import javax.swing.JList;
 import javax.swing.JPanel;
 import javax.swing.JScrollPane;
 import javax.swing.ListSelectionModel;
-import javax.swing.Scrollable;
 import org.fallwright.core.plan.Judged;
+import org.fallwright.ui.column.Column;
 import org.fallwright.ui.map.Palette;
 import org.fallwright.ui.text.Messages;
 
@@ -41,8 +39,7 @@ public final class WaysPanel extends JPanel {
     head.add(summary, BorderLayout.CENTER);
     outTitle.putClientProperty("FlatLaf.styleClass", "h4");
     outTitle.setBorder(BorderFactory.createEmptyBorder(10, 10, 4, 10));
-    JPanel both = new Stack();
-    both.setLayout(new GridBagLayout());
+    JPanel both = new Column(new GridBagLayout());
     GridBagConstraints row = new GridBagConstraints();
     row.gridx = 0;
     row.weightx = 1;
@@ -129,33 +126,5 @@ public final class WaysPanel extends JPanel {
     l.setSelectionMode(ListSelectionModel.SINGLE_SELECTION);
     l.getAccessibleContext().setAccessibleName(Messages.text(name));
     return l;
-  }
-
-  /** As wide as the scroll pane, so that rows never run out at the side. */
-  private static final class Stack extends JPanel implements Scrollable {
-    @Override
-    public Dimension getPreferredScrollableViewportSize() {
-      return getPreferredSize();
-    }
-
-    @Override
-    public int getScrollableUnitIncrement(Rectangle seen, int orientation, int direction) {
-      return 24;
-    }
-
-    @Override
-    public int getScrollableBlockIncrement(Rectangle seen, int orientation, int direction) {
-      return seen.height;
-    }
-
-    @Override
-    public boolean getScrollableTracksViewportWidth() {
-      return true;
-    }
-
-    @Override
-    public boolean getScrollableTracksViewportHeight() {
-      return getParent() != null && getPreferredSize().height < getParent().getHeight();
-    }
   }
 }

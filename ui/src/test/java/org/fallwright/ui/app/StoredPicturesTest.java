@@ -3,12 +3,12 @@ package org.fallwright.ui.app;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
+import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.io.IOException;
 import java.nio.file.Path;
-import org.fallwright.core.site.Picture;
 import org.fallwright.core.site.Site;
 import org.fallwright.maps.tiles.TileStore;
-import org.fallwright.ui.DemoLike;
+import org.fallwright.ui.demo.DemoSite;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
@@ -37,27 +37,8 @@ class StoredPicturesTest {
   }
 
   private TileStore open(String picture) throws IOException {
-    Site s = DemoLike.site(Site.Display.US);
     Site with =
-        new Site(
-            s.version(),
-            s.name(),
-            s.origin(),
-            s.display(),
-            s.ruleSet(),
-            s.declinationDeg(),
-            new Picture(picture, null, "drawn"),
-            s.tree(),
-            s.cut(),
-            s.targets(),
-            s.wires(),
-            s.looked(),
-            s.dropZones(),
-            s.anchors(),
-            s.spots(),
-            s.gear(),
-            s.conditions(),
-            s.offer());
+        DemoSite.asItIs().with(s -> ((ObjectNode) s.get("picture")).put("file", picture)).site();
     return new StoredPictures(BASE_MAPS).open(with, folder.resolve("x.fallsite.json"));
   }
 }

@@ -1,12 +1,10 @@
 package org.fallwright.ui.bench;
 
-import java.util.List;
 import java.util.concurrent.TimeUnit;
 import org.fallwright.core.plan.Judge;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.Plan;
 import org.fallwright.core.plan.Planner;
-import org.fallwright.core.plan.Setup;
 import org.fallwright.core.site.Site;
 import org.fallwright.ui.demo.DemoSite;
 import org.openjdk.jmh.annotations.Benchmark;
@@ -25,9 +23,6 @@ import org.openjdk.jmh.annotations.Warmup;
 @OutputTimeUnit(TimeUnit.MILLISECONDS)
 @Fork(1)
 public class PlanBenchmark {
-  private static final Setup WINCH =
-      new Setup(3, 10.5, 0.045, "L1", List.of("A1"), "hand-winch", "pull", "A3", null);
-
   private final Site site = DemoSite.asItIs().site();
   private final Judge warm = new Judge(site, DemoSite.sources());
   private double lay;
@@ -38,7 +33,7 @@ public class PlanBenchmark {
   @Measurement(iterations = 5, time = 2)
   public Judged oneSetup() {
     lay = (lay + 0.001) % 360;
-    return warm.judge(WINCH.withLay(lay));
+    return warm.judge(DemoSite.ROW_6.withLay(lay));
   }
 
   @Benchmark

@@ -2,7 +2,6 @@ package org.fallwright.ui.demo;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -23,13 +22,6 @@ import org.junit.jupiter.api.io.TempDir;
 /** The demo's whole search, with every plugin and with one taken away. */
 class DemoPlanTest {
   private static final Path ARCHIVES = Path.of("target", "plugins");
-
-  /** The demo with a coarser grid of lays, for the searches that are only compared. */
-  private static Site coarse() {
-    return DemoSite.asItIs()
-        .with(s -> ((ObjectNode) s.get("offer")).put("lay_step_deg", 10.0))
-        .site();
-  }
 
   private static Plan plan(PullSources sources, Site site) {
     return new Planner(sources).plan(site);
@@ -62,8 +54,9 @@ class DemoPlanTest {
   @Test
   void takingAnArchiveAwayTakesItsSetupsAwayAndNothingElse(@TempDir Path folder)
       throws IOException {
-    Site site = coarse();
-    Map<Setup, Verdict> all = verdicts(plan(DemoSite.sources(), site));
+    DemoSite demo = DemoSite.coarse(Site.Display.US);
+    Site site = demo.site();
+    Map<Setup, Verdict> all = verdicts(demo.plan());
     Map<String, String> sourceOf =
         Map.of(
             "fallwright-winch", "hand-winch",

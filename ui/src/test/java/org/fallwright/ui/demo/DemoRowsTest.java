@@ -2,10 +2,13 @@ package org.fallwright.ui.demo;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
+import static org.fallwright.ui.demo.DemoSite.ROW_4;
+import static org.fallwright.ui.demo.DemoSite.ROW_6;
+import static org.fallwright.ui.demo.DemoSite.ROW_7;
+import static org.fallwright.ui.demo.DemoSite.ROW_8;
 import static org.fallwright.ui.demo.DemoSite.check;
 import static org.fallwright.ui.demo.DemoSite.direct;
 import static org.fallwright.ui.demo.DemoSite.failing;
-import static org.fallwright.ui.demo.DemoSite.redirected;
 import static org.fallwright.ui.demo.DemoSite.tackle;
 
 import com.fasterxml.jackson.databind.node.ArrayNode;
@@ -22,8 +25,6 @@ import org.junit.jupiter.api.Test;
  */
 class DemoRowsTest {
   private static final DemoSite DEMO = DemoSite.asItIs();
-  static final Setup ROW_4 = direct(7, "pickup", "awd", "V1");
-  static final Setup ROW_6 = redirected(3, "hand-winch", "pull", "A3", "A1");
 
   private static void figures(
       Judged j, double needKn, double planKn, double givesKn, double margin) {
@@ -163,7 +164,7 @@ class DemoRowsTest {
 
   @Test
   void row7TheWetBirchDoesNotHold() {
-    Judged j = DEMO.judge(redirected(342, "hand-winch", "pull", "A3", "A2"));
+    Judged j = DEMO.judge(ROW_7);
     is(j, Verdict.NOT_WORKABLE);
     figures(j, 4.55, 6.13, 9.31, 1.517);
     assertThat(j.weakest().id()).startsWith("anchor A2");
@@ -174,7 +175,7 @@ class DemoRowsTest {
 
   @Test
   void row8TheCrownComesDownOnTheShed() {
-    Judged j = DEMO.judge(direct(39, "hand-winch", "pull", "S1"));
+    Judged j = DEMO.judge(ROW_8);
     is(j, Verdict.NOT_WORKABLE);
     figures(j, 4.385, 5.925, 9.80, 1.654);
     assertThat(check(j, "clear of Shed").verdict()).isEqualTo(Verdict.NOT_WORKABLE);
@@ -205,7 +206,7 @@ class DemoRowsTest {
 
   @Test
   void row11NothingIsJudgedWhileTheVoltageIsNotStated() {
-    DemoSite blank = DEMO.with(s -> DemoSite.entry(s.get("wires"), "W1").putNull("voltage_kv"));
+    DemoSite blank = DEMO.voltageBlank();
     for (Setup s : new Setup[] {ROW_4, ROW_6, direct(3, "hand-winch", "pull", "A1")}) {
       Judged j = blank.judge(s);
       is(j, Verdict.CANNOT_JUDGE);
@@ -240,12 +241,11 @@ class DemoRowsTest {
 
   @Test
   void thePaddockFenceDecidesTheLaysOfRow7() {
-    Setup row7 = redirected(342, "hand-winch", "pull", "A3", "A2");
     for (double lay : new double[] {342, 342.5}) {
-      assertThat(check(DEMO.judge(row7.withLay(lay)), "clear of F1").verdict())
+      assertThat(check(DEMO.judge(ROW_7.withLay(lay)), "clear of F1").verdict())
           .isEqualTo(Verdict.TIGHT);
     }
-    assertThat(check(DEMO.judge(row7.withLay(341)), "clear of F1").verdict())
+    assertThat(check(DEMO.judge(ROW_7.withLay(341)), "clear of F1").verdict())
         .isEqualTo(Verdict.NOT_WORKABLE);
   }
 
@@ -316,8 +316,7 @@ class DemoRowsTest {
   @Test
   void onDryGroundTheBirchJustReaches() {
     Judged j =
-        DEMO.with(s -> DemoSite.entry(s.get("anchors"), "A2").put("saturated", false))
-            .judge(redirected(342, "hand-winch", "pull", "A3", "A2"));
+        DEMO.with(s -> DemoSite.entry(s.get("anchors"), "A2").put("saturated", false)).judge(ROW_7);
     assertThat(check(j, "anchor A2 at plan").ratio()).isCloseTo(1.00, within(0.03));
   }
 

@@ -2,17 +2,18 @@ package org.fallwright.ui.document;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import com.fasterxml.jackson.databind.node.ArrayNode;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
+import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.Plan;
 import org.fallwright.core.site.Site;
-import org.fallwright.ui.DemoLike;
+import org.fallwright.ui.demo.DemoSite;
 import org.junit.jupiter.api.Test;
 
 class OpenSiteTest {
-  private final Site site = DemoLike.site(Site.Display.US);
-  private final Plan plan = DemoLike.plan(site);
+  private final Site site = DemoSite.coarse(Site.Display.US).site();
+  private final Plan plan = DemoSite.coarse(Site.Display.US).plan();
   private final OpenSite open = new OpenSite();
   private final List<OpenSite.Change> told = new ArrayList<>();
 
@@ -27,7 +28,8 @@ class OpenSiteTest {
 
   @Test
   void aPlanWithoutSetupsChoosesNone() {
-    open.planned(new Plan(List.of(), 0, Map.of(), Map.of(), Map.of(), List.of()));
+    open.planned(
+        DemoSite.asItIs().with(s -> ((ArrayNode) s.at("/gear/sources")).removeAll()).plan());
     assertThat(open.chosen()).isEmpty();
   }
 
@@ -46,11 +48,14 @@ class OpenSiteTest {
   void inOtherUnitsTheSameSetupStaysChosen() {
     open.open(null, site);
     open.planned(plan);
-    open.choose(plan.bestRejected().get("clearance"));
+    Judged before = plan.bestRejected().get("clear of Shed");
+    open.choose(before);
     Site metric = site.in(Site.Display.METRIC);
-    Plan again = DemoLike.plan(metric);
+    Plan again = DemoSite.coarse(Site.Display.METRIC).plan();
     open.reworded(metric, again);
-    assertThat(open.chosen()).contains(again.bestRejected().get("clearance"));
+    assertThat(open.chosen()).contains(again.bestRejected().get("clear of Shed"));
+    assertThat(open.chosen().orElseThrow().setup()).isEqualTo(before.setup());
+    assertThat(open.chosen().orElseThrow().sentence()).isNotEqualTo(before.sentence());
     assertThat(open.site()).contains(metric);
   }
 

@@ -2,6 +2,8 @@ package org.fallwright.ui.map;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import com.fasterxml.jackson.databind.node.ArrayNode;
+import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.awt.Color;
 import java.awt.Font;
 import java.awt.Graphics2D;
@@ -15,44 +17,45 @@ import java.util.List;
 import java.util.Set;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.Plan;
+import org.fallwright.core.plan.Verdict;
 import org.fallwright.core.site.Anchor;
-import org.fallwright.core.site.Fix;
-import org.fallwright.core.site.Place;
 import org.fallwright.core.site.Position;
-import org.fallwright.core.site.Shape;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Target;
-import org.fallwright.core.site.Wire;
-import org.fallwright.ui.DemoLike;
+import org.fallwright.ui.demo.DemoSite;
 import org.fallwright.ui.text.Amounts;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.EnumSource;
+import org.locationtech.jts.geom.Coordinate;
 
 class PlanPainterTest {
   private static final Color GRASS = new Color(0x5E7A45);
   private static final Rectangle2D FRAME = new Rectangle2D.Double(20, 20, 700, 700);
 
-  private final Site site = DemoLike.site(Site.Display.US);
-  private final Plan plan = DemoLike.plan(site);
-  private final Judged best = plan.ranked().get(0);
+  private static final DemoSite DEMO = DemoSite.asItIs();
+  private final Site site = DEMO.site();
+  private final Position stump = site.tree().stump().at();
+  private final Judged best = DEMO.judge(DemoSite.ROW_6);
   private final Viewport view = Viewport.fitting(PlanPainter.extent(site, best), 0, FRAME);
 
   @Test
   void theFootprintHasAnOutlineAndDots() {
     BufferedImage image = paint(scene(PlanLayer.FOOTPRINT));
-    Point2D middle = view.toPixel(DemoLike.STUMP.along(3, 12.5));
+    Point2D middle = view.toPixel(stump.along(3, 12.5));
     assertThat(share(image, middle, 40, Palette.DAY.footprint())).isBetween(0.005, 0.2);
-    Point2D edge = view.toPixel(DemoLike.STUMP.along(3, 12.5).along(270, 6.05));
-    assertThat(share(image, edge, 5, Palette.DAY.footprint())).isGreaterThan(0.15);
+    for (Coordinate c : best.ground().footprint().getBoundary().getCoordinates()) {
+      Point2D edge = view.toPixel(c.getX(), c.getY());
+      assertThat(share(image, edge, 5, Palette.DAY.footprint())).as("%s", c).isGreaterThan(0.15);
+    }
   }
 
   @Test
   void theSitBackZoneIsHatchedAndTheLandBesideItIsNot() {
     BufferedImage image = paint(scene(PlanLayer.SIT_BACK));
-    Point2D behind = view.toPixel(DemoLike.STUMP.along(188, 14));
+    Point2D behind = view.toPixel(stump.along(188, 14));
     assertThat(share(image, behind, 30, GRASS)).isLessThan(0.5);
-    Point2D ahead = view.toPixel(DemoLike.STUMP.along(8, 14));
+    Point2D ahead = view.toPixel(stump.along(8, 14));
     assertThat(share(image, ahead, 30, GRASS)).isEqualTo(1);
   }
 
@@ -69,7 +72,7 @@ class PlanPainterTest {
     int ink = 0;
     int bare = 0;
     for (int a = 0; a < 360; a++) {
-      Point2D p = view.toPixel(DemoLike.STUMP.along(a, 35));
+      Point2D p = view.toPixel(stump.along(a, best.ground().peopleRadiusM()));
       if (FRAME.contains(p)) {
         boolean dark = share(image, p, 1, Palette.DAY.ink()) > 0.3;
         ink += dark ? 1 : 0;
@@ -150,6 +153,8 @@ class PlanPainterTest {
 
   @Test
   void everySetupOfThePlanIsPaintedTurnedAndUnturned() {
+    Plan plan = DemoSite.coarse(Site.Display.US).plan();
+    assertThat(plan.ranked()).extracting(Judged::verdict).contains(Verdict.TIGHT);
     List<Judged> all = new ArrayList<>(plan.ranked());
     all.addAll(plan.bestRejected().values());
     BufferedImage without = paint(PlanScene.of(site, null));
@@ -167,33 +172,35 @@ class PlanPainterTest {
   @ParameterizedTest
   @EnumSource(Target.Kind.class)
   void everyKindOfTargetShowsInEveryShape(Target.Kind kind) {
-    List<Shape> shapes =
+    List<String> shapes =
         List.of(
-            new Shape.Circle(new Position(10, 30), 5),
-            new Shape.Line(List.of(new Position(0, 25), new Position(20, 35))),
-            new Shape.Polygon(
-                List.of(new Position(5, 25), new Position(15, 25), new Position(10, 35))));
-    for (Shape s : shapes) {
-      Target t = new Target("X", kind, s, Fix.TAPES, null, 0, 2, 1, false, false, false);
-      Site one = with(List.of(t), site.wires(), site.anchors());
+            "\"type\": \"circle\", \"centre\": [10, 30], \"radius_m\": 5",
+            "\"type\": \"line\", \"points\": [[0, 25], [20, 35]]",
+            "\"type\": \"polygon\", \"points\": [[5, 25], [15, 25], [10, 35]]");
+    for (String shape : shapes) {
+      Site one = without("/targets").and("/targets", DemoSite.target("X", kind, shape)).site();
+      assertThat(one.targets()).hasSize(1);
       BufferedImage image = paint(PlanScene.of(one, null).showing(Set.of(PlanLayer.TARGETS)));
-      assertThat(same(image, blank())).as(kind + " " + s).isFalse();
+      assertThat(same(image, blank())).as(kind + " " + shape).isFalse();
     }
   }
 
   @Test
   void everyKindOfAnchorLooksDifferent() {
-    Place at = new Place(new Position(16, 30), 0, Fix.TAPES, null);
-    List<Anchor> kinds =
+    List<String> kinds =
         List.of(
-            site.anchor("A1").orElseThrow(),
-            site.anchor("S1").orElseThrow(),
-            new Anchor.ParkedVehicle("P1", at, 0.5, null, null, 2500, "grass", false, 0, 30_000),
-            new Anchor.RatedPoint("R1", at, 0.5, null, null, 50_000, "owner"));
+            entry("A1"),
+            entry("S1"),
+            """
+            {"type": "vehicle", "id": "P1", "mass_kg": 2500, "surface": "grass", "wet": false,
+             "uphill_deg": 0, "rated_point_N": 30000}""",
+            """
+            {"type": "rated", "id": "R1", "breaking_load_N": 50000, "vouched_by": "owner"}""");
     List<BufferedImage> images = new ArrayList<>();
-    for (Anchor a : kinds) {
-      Site one = with(List.of(), site.wires(), List.of(a));
+    for (String a : kinds) {
+      Site one = without("/gear/sources").with(s -> s.putArray("anchors").add(here(a))).site();
       BufferedImage i = paint(PlanScene.of(one, null).showing(Set.of(PlanLayer.ANCHORS)));
+      assertThat(same(i, blank())).isFalse();
       assertThat(images).noneMatch(other -> same(i, other));
       images.add(i);
     }
@@ -201,25 +208,26 @@ class PlanPainterTest {
 
   @Test
   void anAnchorCarriesTheMarkOfItsWorstCheckElseOfItsCondition() {
-    Canvas judged = canvas(PlanScene.of(site, best));
-    Canvas unjudged = canvas(PlanScene.of(site, null));
     Anchor a1 = site.anchor("A1").orElseThrow();
     Anchor a2 = site.anchor("A2").orElseThrow();
-    assertThat(SupportsPainter.mark(judged, a1))
-        .contains(org.fallwright.core.plan.Verdict.WORKABLE);
-    assertThat(SupportsPainter.mark(judged, a2))
-        .contains(org.fallwright.core.plan.Verdict.NOT_WORKABLE);
-    assertThat(SupportsPainter.mark(unjudged, a1)).isEmpty();
-    assertThat(SupportsPainter.mark(unjudged, a2))
+    Canvas six = canvas(PlanScene.of(site, best));
+    assertThat(SupportsPainter.mark(six, a1)).contains(Verdict.WORKABLE);
+    assertThat(SupportsPainter.mark(six, a2)).as("no part of it").isEmpty();
+    Canvas seven = canvas(PlanScene.of(site, DEMO.judge(DemoSite.ROW_7)));
+    assertThat(SupportsPainter.mark(seven, a2)).contains(Verdict.NOT_WORKABLE);
+    Site rejected =
+        DEMO.with(s -> DemoSite.entry(s.get("anchors"), "A2").put("rejected", "moved when kicked"))
+            .site();
+    Canvas unjudged = canvas(PlanScene.of(rejected, null));
+    assertThat(SupportsPainter.mark(unjudged, rejected.anchor("A1").orElseThrow())).isEmpty();
+    assertThat(SupportsPainter.mark(unjudged, rejected.anchor("A2").orElseThrow()))
         .as("rejected on the site")
-        .contains(org.fallwright.core.plan.Verdict.NOT_WORKABLE);
+        .contains(Verdict.NOT_WORKABLE);
   }
 
   @Test
   void anUnknownVoltageIsSaidInWords() {
-    Wire w = site.wires().get(0);
-    Wire blank = new Wire("W1", null, null, w.state(), w.poles(), w.sagM(), w.fix(), null);
-    Site unknown = with(site.targets(), List.of(blank), site.anchors());
+    Site unknown = DEMO.voltageBlank().site();
     Set<PlanLayer> layers = Set.of(PlanLayer.WIRES, PlanLayer.LABELS);
     assertThat(
             same(
@@ -232,27 +240,27 @@ class PlanPainterTest {
     return new Canvas(scene, view, new Pen(graphics(blank()), Color.WHITE), new Labels(FRAME));
   }
 
-  private Site with(List<Target> targets, List<Wire> wires, List<Anchor> anchors) {
-    return new Site(
-        site.version(),
-        site.name(),
-        site.origin(),
-        site.display(),
-        site.ruleSet(),
-        site.declinationDeg(),
-        null,
-        site.tree(),
-        site.cut(),
-        targets,
-        wires,
-        site.looked(),
-        List.of(),
-        anchors,
-        site.spots(),
-        new org.fallwright.core.site.Gear(
-            List.of(), List.of(), List.of(), List.of(), null, List.of()),
-        site.conditions(),
-        site.offer());
+  /** The demo with a list of its file emptied. */
+  private static DemoSite without(String list) {
+    return DEMO.with(s -> ((ArrayNode) s.at(list)).removeAll());
+  }
+
+  private static String entry(String anchor) {
+    List<String> found = new ArrayList<>();
+    DEMO.with(s -> found.add(DemoSite.entry(s.get("anchors"), anchor).toString()));
+    return found.get(0);
+  }
+
+  /** An anchor of the file at one and the same place. */
+  private static ObjectNode here(String anchor) {
+    ObjectNode a = (ObjectNode) DemoSite.parsed(anchor);
+    a.put("sling_height_m", 0.3).putNull("rejected").putNull("land");
+    a.set(
+        "place",
+        DemoSite.parsed(
+            """
+            {"at": [16, 30], "ground_m": 0, "fix": "tapes", "stated_error_m": null}"""));
+    return a;
   }
 
   private PlanScene scene(PlanLayer layer) {

@@ -2,14 +2,18 @@ package org.fallwright.ui.particulars;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import com.fasterxml.jackson.databind.node.ObjectNode;
 import org.fallwright.core.site.Site;
-import org.fallwright.ui.DemoLike;
+import org.fallwright.ui.demo.DemoSite;
 import org.fallwright.ui.text.Amounts;
 import org.junit.jupiter.api.Test;
 
 class EnteredTest {
-  private final Entered metric =
-      Entered.of(DemoLike.site(Site.Display.METRIC), new Amounts(Site.Display.METRIC));
+  private final Entered metric = metric(DemoSite.asItIs());
+
+  private static Entered metric(DemoSite demo) {
+    return Entered.of(demo.site(), new Amounts(Site.Display.METRIC));
+  }
 
   @Test
   void theFiveFieldNumbersComeWithHowTheyWereGot() {
@@ -22,17 +26,32 @@ class EnteredTest {
 
   @Test
   void whatNobodyLookedForIsNotNone() {
-    assertThat(metric.looked()).hasSize(4);
-    assertThat(metric.notSaid()).isEqualTo(2);
-    assertThat(metric.looked().stream().filter(Entered.Line::open))
+    Entered two = metric(DemoSite.asItIs().notLooked("buried-services").notLooked("other-targets"));
+    assertThat(two.looked()).hasSize(4);
+    assertThat(two.notSaid()).isEqualTo(2);
+    assertThat(two.looked().stream().filter(Entered.Line::open))
+        .hasSize(2)
         .extracting(Entered.Line::value)
         .containsOnly("not said");
+    assertThat(metric.notSaid()).isZero();
+    assertThat(metric.looked()).hasSize(4).noneMatch(Entered.Line::open);
   }
 
   @Test
   void everyFigureThatTheToolFillsInIsNamed() {
-    assertThat(metric.defaults())
+    Entered bare =
+        metric(
+            DemoSite.asItIs()
+                .with(
+                    s -> {
+                      ObjectNode tree = (ObjectNode) s.get("tree");
+                      tree.putNull("mass_centre_m").putNull("crown_area_m2");
+                      ((ObjectNode) s.get("cut")).putNull("hinge_width_m");
+                    }));
+    assertThat(metric.defaults()).hasSize(6);
+    assertThat(bare.defaults())
         .hasSize(9)
+        .containsAll(metric.defaults())
         .contains("wind from the worst side")
         .doesNotContain("mass from the equation");
   }

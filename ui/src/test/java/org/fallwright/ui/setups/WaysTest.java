@@ -3,64 +3,84 @@ package org.fallwright.ui.setups;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.ArrayList;
+import java.util.Collections;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.IntStream;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.Plan;
 import org.fallwright.core.plan.Setup;
 import org.fallwright.core.plan.Verdict;
 import org.fallwright.core.site.Site;
-import org.fallwright.ui.DemoLike;
+import org.fallwright.ui.demo.DemoSite;
 import org.fallwright.ui.text.Amounts;
 import org.junit.jupiter.api.Test;
 
 class WaysTest {
-  private final Site site = DemoLike.site(Site.Display.METRIC);
-  private final Amounts metric = new Amounts(Site.Display.METRIC);
+  private final Plan plan = DemoSite.coarse(Site.Display.METRIC).plan();
+  private final Ways ways = Ways.of(plan, new Amounts(Site.Display.METRIC));
 
   @Test
   void ranksCountUpAndReasonsComeMostOftenFirst() {
-    Ways w = Ways.of(DemoLike.plan(site), metric);
-    assertThat(w.ranked()).extracting(Ways.Row::lead).containsExactly("1", "2", "3", "4");
-    assertThat(w.ruledOut())
-        .extracting(Ways.Row::title)
-        .containsExactly("Clearance  (212)", "Anchor A2 at plan  (31)", "Pull margin  (9)");
-    assertThat(w.ruledOut().get(0).detail())
-        .isEqualTo("nearest: hand winch (usual) at S1, lay 039°");
-    assertThat(w.summary()).isEqualTo("279 setups judged: 21 workable, 6 tight");
+    assertThat(ways.ranked())
+        .extracting(Ways.Row::lead)
+        .containsExactlyElementsOf(
+            IntStream.rangeClosed(1, ways.ranked().size()).mapToObj(String::valueOf).toList());
+    assertThat(ways.ranked())
+        .extracting(Ways.Row::setup)
+        .containsExactlyElementsOf(plan.ranked().subList(0, ways.ranked().size()));
+    Map<String, Integer> reasons = plan.byBindingCheck();
+    List<Integer> counts = new ArrayList<>();
+    for (Ways.Row r : ways.ruledOut()) {
+      String check = r.setup().weakest().id();
+      assertThat(r.title()).isEqualTo(Way.name(check) + "  (" + reasons.get(check) + ")");
+      counts.add(reasons.get(check));
+    }
+    assertThat(counts).isSortedAccordingTo(Comparator.reverseOrder()).hasSize(reasons.size());
+    assertThat(ways.ruledOut().get(0).title()).startsWith("Clear of House");
+    assertThat(ways.ruledOut())
+        .filteredOn(r -> r.title().startsWith("Anchor A2 at high"))
+        .extracting(Ways.Row::detail)
+        .containsExactly("nearest: hand-winch at A3 over A2, lay 342°");
+    int workable = plan.byVerdict().get(Verdict.WORKABLE);
+    int tight = plan.byVerdict().get(Verdict.TIGHT);
+    assertThat(workable).isPositive().isNotEqualTo(tight);
+    assertThat(ways.summary())
+        .isEqualTo(
+            plan.judged() + " setups judged: " + workable + " workable, " + tight + " tight");
   }
 
   @Test
   void aWayTellsItsLayLineAndHinge() {
-    Ways w = Ways.of(DemoLike.plan(site), metric);
-    assertThat(w.ranked().get(0).title()).isEqualTo("Hand winch (usual) at A3 over A1");
-    assertThat(w.ranked().get(0).detail()).isEqualTo("lay 003°, line L1 at 10.5 m, hinge 45 mm");
-    assertThat(w.ranked().get(0).margin()).isEqualTo("1.46");
+    Ways.Row first = ways.ranked().get(0);
+    assertThat(first.title()).isEqualTo("Hand-winch at A3 over A1");
+    assertThat(first.detail()).isEqualTo("lay 000°, line L2 at 10.5 m, hinge 45 mm");
+    assertThat(first.margin()).isEqualTo("1.46");
+  }
+
+  @Test
+  void aSourceThatCanBeRunInMoreThanOneWayTellsHow() {
+    assertThat(Way.title(DemoSite.ROW_4)).isEqualTo("pickup (awd) at V1");
+    assertThat(Way.title(DemoSite.ROW_6)).isEqualTo("hand-winch at A3 over A1");
   }
 
   @Test
   void aDrivenTackleNamesItsDriver() {
-    Setup s =
-        new Setup(
-            3,
-            10.5,
-            0.045,
-            "L1",
-            List.of(),
-            "tackle",
-            "3",
-            "A1",
-            new Setup.Driver("pickup", "pull", "V1"));
+    Setup s = DemoSite.tackle(3, "3", "pickup", "pull", "V1");
     assertThat(Way.title(s)).isEqualTo("tackle (3) at A1 by pickup at V1");
   }
 
   @Test
   void ofManyWaysThatDoNotWorkOnlySomeAreListed() {
-    List<Judged> many = new ArrayList<>(DemoLike.plan(site).ranked().subList(0, 2));
-    for (int i = 0; i < 50; i++) {
-      many.add(DemoLike.judged(site, i, "crew", "HC", List.of(), Verdict.NOT_WORKABLE, 0.1));
-    }
-    Ways w = Ways.of(new Plan(many, 52, Map.of(), Map.of(), Map.of(), List.of()), metric);
-    assertThat(w.ranked()).hasSize(14);
+    List<Verdict> all = plan.ranked().stream().map(Judged::verdict).toList();
+    assertThat(Collections.frequency(all, Verdict.NOT_WORKABLE)).isGreaterThan(50);
+    assertThat(ways.ranked())
+        .filteredOn(r -> r.verdict() == Verdict.NOT_WORKABLE)
+        .hasSize(12)
+        .hasSizeLessThan(ways.ranked().size());
+    assertThat(ways.ranked())
+        .filteredOn(r -> r.verdict() != Verdict.NOT_WORKABLE)
+        .hasSize(all.indexOf(Verdict.NOT_WORKABLE));
   }
 }

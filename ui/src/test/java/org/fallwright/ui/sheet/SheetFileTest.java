@@ -8,46 +8,31 @@ import java.awt.geom.Rectangle2D;
 import java.awt.image.BufferedImage;
 import java.io.ByteArrayInputStream;
 import java.io.IOException;
-import java.io.UncheckedIOException;
-import java.util.ArrayList;
-import java.util.Collections;
 import java.util.List;
 import java.util.Map;
-import java.util.regex.Matcher;
-import java.util.regex.Pattern;
-import java.util.stream.Stream;
 import javax.imageio.ImageIO;
-import org.apache.pdfbox.Loader;
 import org.apache.pdfbox.pdmodel.PDDocument;
-import org.apache.pdfbox.rendering.PDFRenderer;
-import org.apache.pdfbox.text.PDFTextStripper;
-import org.apache.pdfbox.text.TextPosition;
 import org.fallwright.core.plan.Check;
 import org.fallwright.core.plan.Judged;
-import org.fallwright.core.plan.PartLoad;
 import org.fallwright.core.plan.Plan;
 import org.fallwright.core.plan.Verdict;
-import org.fallwright.core.site.Fix;
-import org.fallwright.core.site.Position;
-import org.fallwright.core.site.Shape;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Target;
-import org.fallwright.core.site.Wire;
-import org.fallwright.ui.DemoLike;
+import org.fallwright.ui.demo.DemoSite;
 import org.fallwright.ui.map.GroundPainter;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.EnumSource;
-import org.junit.jupiter.params.provider.MethodSource;
 
+/** What the sheet's files are and say. */
 class SheetFileTest {
-  private static final int DPI = 300;
-  private static final double MM_PER_PIXEL = 25.4 / DPI;
+  private static final DemoSite DEMO =
+      DemoSite.asItIs().in(Site.Display.METRIC).only("hand-winch", "A3");
 
   @ParameterizedTest
   @EnumSource(Paper.class)
   void onePageOfThePaperAskedFor(Paper paper) throws IOException {
-    try (PDDocument doc = open(sheet(paper, metric(), DemoLike.plan(metric()), 1).pdf())) {
+    try (PDDocument doc = PrintedPage.of(paper, DEMO).open()) {
       assertThat(doc.getNumberOfPages()).isEqualTo(1);
       assertThat((double) doc.getPage(0).getMediaBox().getWidth())
           .isCloseTo(paper.width(), within(0.01));
@@ -57,92 +42,86 @@ class SheetFileTest {
   }
 
   @Test
-  void paperSizesAreThoseOfTheStandards() {
-    // ISO 216: 210 mm x 297 mm; letter: 8.5 in x 11 in
-    assertThat(Paper.A4.width() / 72 * 25.4).isCloseTo(210, within(1e-9));
-    assertThat(Paper.A4.height() / 72 * 25.4).isCloseTo(297, within(1e-9));
-    assertThat(Paper.LETTER.width() / 72).isEqualTo(8.5);
-    assertThat(Paper.LETTER.height() / 72).isEqualTo(11);
-    assertThat(Paper.points(25.4)).isCloseTo(72, within(1e-9));
-  }
-
-  @ParameterizedTest
-  @EnumSource(Paper.class)
-  void theCheckBarMeasuresAHundredMillimetres(Paper paper) throws IOException {
-    byte[] pdf = sheet(paper, metric(), DemoLike.plan(metric()), 1).pdf();
-    BufferedImage page = rendered(pdf);
-    double label = checkBarLabel(words(pdf)).getMinY() * DPI / 72;
-    double mm = 0;
-    for (int y = (int) (label - 0.15 * DPI); y < label; y++) {
-      mm = Math.max(mm, run(page, y, page.getWidth() * 6 / 10) * MM_PER_PIXEL);
-    }
-    assertThat(mm).isCloseTo(100, within(0.3));
-  }
-
-  @Test
-  void aDistanceOnTheGroundMeasuresAsTheScaleSays() throws IOException {
-    Site site = withWires(metric(), 0, 30);
-    byte[] pdf = sheet(Paper.A4, site, DemoLike.plan(site), 1).pdf();
-    Matcher scale = Pattern.compile("Scale 1:(\\d+)").matcher(text(pdf));
-    assertThat(scale.find()).isTrue();
-    BufferedImage page = rendered(pdf);
-    int[] columns = new int[page.getWidth()];
-    for (int x = 0; x < page.getWidth(); x++) {
-      for (int y = 0; y < page.getHeight(); y++) {
-        columns[x] += near(page.getRGB(x, y), new Color(0x5A2391)) ? 1 : 0;
-      }
-    }
-    double west = peak(columns, 0, page.getWidth() / 3);
-    double east = peak(columns, page.getWidth() / 3, page.getWidth());
-    double wanted = 30_000.0 / Integer.parseInt(scale.group(1));
-    assertThat((east - west) * MM_PER_PIXEL).isCloseTo(wanted, within(0.3));
-  }
-
-  @Test
   void thePageSaysWhatTheSetupIsAndHowItStands() throws IOException {
-    String text = text(sheet(Paper.LETTER, metric(), DemoLike.plan(metric()), 1).pdf());
-    assertThat(text)
+    DemoSite demo =
+        DEMO.notLooked("buried-services")
+            .and(
+                "/gear/sources",
+                """
+                {"id": "old capstan", "plugin": "capstan", "places": ["A1"], "drivers": [],
+                 "driver_places": [], "parameters": {}}""");
+    assertThat(PrintedPage.of(Paper.LETTER, demo).text())
         .contains("Oak behind the house")
-        .contains("Setup 1 of 4")
-        .contains("003° true")
+        .contains("Setup 1 of " + demo.plan().ranked().size())
+        .contains("000° true (003° magnetic)")
         .contains("rules US-OSHA")
         .contains("workable")
-        .contains("5.05 kN")
+        .contains("5.04 kN")
         .contains("4.73 kN")
         .contains("6.36 kN")
         .contains("15.7 kN")
         .contains("1.46 = least it gives / plan for")
         .contains("Going when")
         .contains("House (people)")
-        .contains("anchor at plan 0.67: Root plate of A2 in wet ground.")
+        .contains("Every check is workable.")
         .contains("Not looked for: buried services")
-        .contains("No plugin answers for the source \"old capstan\".")
+        .contains("Source \"old capstan\" is left out: no plugin \"capstan\" is loaded.")
         .contains("Never leave a tree cut and standing.")
-        .contains("Blank ground: no picture.")
+        .contains("Picture: drawn by the project, taken on a date not known. No survey.")
         .contains("Check bar: 100 mm");
+    assertThat(PrintedPage.of(Paper.A4, DEMO.with(s -> s.putNull("picture"))).text())
+        .contains("Blank ground: no picture.");
+  }
+
+  @Test
+  void whatIsNotClearStandsWithItsRatioAndReason() throws IOException {
+    Plan plan = DEMO.plan();
+    int rank = 1;
+    while (!plan.ranked().get(rank - 1).setup().redirects().equals(List.of("A2"))) {
+      rank++;
+    }
+    String text = PrintedPage.of(Paper.A4, DEMO.site(), plan, rank).text();
+    assertThat(text)
+        .contains("Setup " + rank + " of " + plan.ranked().size())
+        .doesNotContain("Every check is workable.");
+    assertThat(plan.ranked().get(rank - 1).checks())
+        .filteredOn(c -> c.verdict() == Verdict.NOT_WORKABLE)
+        .extracting(Check::id)
+        .contains("anchor A2 at plan", "anchor A2 at high")
+        .allSatisfy(id -> assertThat(text).contains(id + " 0."));
+    assertThat(text).contains("allowed.").contains("if the source stalls, slips or jerks;");
   }
 
   @Test
   void theUnitsAreTheSitesWithTheOthersBeside() throws IOException {
-    Site us = DemoLike.site(Site.Display.US);
-    String text = text(sheet(Paper.LETTER, us, DemoLike.plan(us), 1).pdf());
-    assertThat(text).contains("1,430 lbf").contains("6.36 kN").contains("planned to 8.9 mph");
+    assertThat(PrintedPage.of(Paper.LETTER, DEMO.in(Site.Display.US)).text())
+        .contains("1,430 lbf")
+        .contains("6.36 kN")
+        .contains("planned to 8.9 mph");
   }
 
   @Test
   void everyVerdictStandsInItsWord() throws IOException {
-    Site site = metric();
-    for (Verdict v : Verdict.values()) {
-      Judged j = DemoLike.judged(site, 3, "hand winch", "A3", List.of("A1"), v, 1.1);
-      Plan plan = new Plan(List.of(j), 1, Map.of(v, 1), Map.of(), Map.of(), List.of());
-      assertThat(text(sheet(Paper.A4, site, plan, 1).pdf())).contains(v.word());
+    Map<Verdict, DemoSite> sites =
+        Map.of(
+            Verdict.WORKABLE, DEMO,
+            Verdict.TIGHT, DemoSite.asItIs().only("hand-winch", "A1"),
+            Verdict.NOT_WORKABLE, DemoSite.asItIs().only("crew", "HC"),
+            Verdict.CANNOT_JUDGE, DEMO.voltageBlank());
+    assertThat(sites).containsOnlyKeys(Verdict.values());
+    for (Map.Entry<Verdict, DemoSite> e : sites.entrySet()) {
+      Judged best = e.getValue().plan().ranked().get(0);
+      assertThat(best.verdict()).isEqualTo(e.getKey());
+      assertThat(PrintedPage.of(Paper.A4, e.getValue()).text())
+          .contains(e.getKey().word())
+          .contains(best.sentence());
     }
   }
 
   @Test
   void theSameInputGivesTheSameBytes() throws IOException {
-    Site site = metric();
-    Plan plan = DemoLike.plan(site);
+    Site site = DEMO.site();
+    Plan plan = DEMO.plan();
     GroundPainter ground =
         (g, view) -> {
           g.setColor(Color.GREEN);
@@ -156,7 +135,7 @@ class SheetFileTest {
 
   @Test
   void thePictureIsThePageAtItsResolution() throws IOException {
-    SheetFile sheet = sheet(Paper.LETTER, metric(), DemoLike.plan(metric()), 1);
+    SheetFile sheet = PrintedPage.sheet(Paper.LETTER, DEMO.site(), DEMO.plan(), 1);
     byte[] png = sheet.png();
     BufferedImage read = ImageIO.read(new ByteArrayInputStream(png));
     assertThat(read.getWidth()).isEqualTo(1700);
@@ -164,311 +143,26 @@ class SheetFileTest {
     // pHYs: 200 dpi are 7874 pixels a metre, 0x1EC2
     assertThat(new String(png, java.nio.charset.StandardCharsets.ISO_8859_1))
         .contains("pHYs\0\0\u001e\u00c2\0\0\u001e\u00c2\u0001");
-    BufferedImage pdf;
-    try (PDDocument doc = open(sheet.pdf())) {
-      pdf = new PDFRenderer(doc).renderImageWithDPI(0, SheetFile.DPI);
-    }
+    BufferedImage pdf = new PrintedPage(sheet.pdf()).drawn(SheetFile.DPI);
     assertThat(differing(read, pdf)).as("share of pixels that differ much").isLessThan(0.02);
   }
 
   @Test
-  void thePageIsLegibleWithoutColour() throws IOException {
-    BufferedImage page = rendered(sheet(Paper.A4, metric(), DemoLike.plan(metric()), 1).pdf());
-    // what is drawn in colour is dark enough to stand out in grey as well
-    int pale = 0;
-    int coloured = 0;
-    for (int y = 0; y < page.getHeight(); y += 3) {
-      for (int x = 0; x < page.getWidth(); x += 3) {
-        Color c = new Color(page.getRGB(x, y));
-        float[] hsb = Color.RGBtoHSB(c.getRed(), c.getGreen(), c.getBlue(), null);
-        if (hsb[1] > 0.75) {
-          coloured++;
-          pale += 0.3 * c.getRed() + 0.59 * c.getGreen() + 0.11 * c.getBlue() > 140 ? 1 : 0;
-        }
-      }
-    }
-    assertThat(coloured).isGreaterThan(500);
-    assertThat((double) pale / coloured).isLessThan(0.02);
-  }
-
-  @Test
   void namesWithSignsThatNoTypefaceHasDoNotBreakThePage() throws IOException {
-    Site base = metric();
-    List<Target> targets = new ArrayList<>(base.targets());
-    targets.add(
-        new Target(
-            "Tank \uD83D\uDEE2\u0007 \u202E\u05D0",
-            Target.Kind.OTHER,
-            new Shape.Circle(new Position(20, 18), 1),
-            Fix.TAPES,
-            null,
-            0,
-            1,
-            1,
-            false,
-            false,
-            false));
-    Site site =
-        named(with(base, targets, base.wires()), "Eiche \uD83C\uDF33 \n hinterm Haus\u0000");
-    SheetFile sheet = sheet(Paper.A4, site, DemoLike.plan(site), 1);
-    assertThat(text(sheet.pdf())).contains("Eiche ?").contains("hinterm Haus").contains("workable");
+    DemoSite demo =
+        DEMO.with(s -> s.put("name", "Eiche \uD83C\uDF33 \n hinterm Haus\u0000"))
+            .and(
+                "/targets",
+                DemoSite.target(
+                    "Tank \uD83D\uDEE2\u0007 \u202E\u05D0",
+                    Target.Kind.OTHER,
+                    "\"type\": \"circle\", \"centre\": [20, 18], \"radius_m\": 1"));
+    SheetFile sheet = PrintedPage.sheet(Paper.A4, demo.site(), demo.plan(), 1);
+    assertThat(new PrintedPage(sheet.pdf()).text())
+        .contains("Eiche ?")
+        .contains("hinterm Haus")
+        .contains("workable");
     assertThat(sheet.png()).isNotEmpty();
-  }
-
-  static Stream<Arguments3> pages() {
-    Site plain = metric();
-    Site longNamed = named(longNames(DemoLike.site(Site.Display.US)), "Very long name ".repeat(13));
-    return Stream.of(Paper.values())
-        .flatMap(
-            p ->
-                Stream.of(
-                    new Arguments3(p, plain, DemoLike.plan(plain)),
-                    new Arguments3(p, longNamed, crowded(longNamed))));
-  }
-
-  record Arguments3(Paper paper, Site site, Plan plan) {}
-
-  @ParameterizedTest
-  @MethodSource("pages")
-  void noTextIsSmallOrOffThePageOrOverAnother(Arguments3 a) throws IOException {
-    byte[] pdf = sheet(a.paper, a.site, a.plan, 1).pdf();
-    List<Words> words = words(pdf);
-    for (Words w : words) {
-      assertThat(w.size).as(w.text).isGreaterThanOrEqualTo(6.99f);
-    }
-    // labels of the plan keep apart by rules of their own
-    List<Words> page =
-        words.stream().filter(w -> Math.abs(w.size - SheetPainter.LABELS) > 0.01).toList();
-    assertThat(page).hasSizeGreaterThan(60);
-    Rectangle2D inside =
-        new Rectangle2D.Double(20, 20, a.paper.width() - 40, a.paper.height() - 40);
-    assertThat(page).allMatch(w -> inside.contains(w.box));
-    for (int i = 0; i < page.size(); i++) {
-      for (int k = i + 1; k < page.size(); k++) {
-        Rectangle2D both = page.get(i).box.createIntersection(page.get(k).box);
-        assertThat(both.getWidth() > 0.5 && both.getHeight() > 1.2)
-            .as("\"%s\" over \"%s\"", page.get(i).text, page.get(k).text)
-            .isFalse();
-      }
-    }
-  }
-
-  private record Words(String text, Rectangle2D box, float size) {}
-
-  private static Rectangle2D checkBarLabel(List<Words> words) {
-    return words.stream().filter(w -> w.text.startsWith("Check bar")).findFirst().orElseThrow().box;
-  }
-
-  /** Runs of text with their boxes. */
-  private static List<Words> words(byte[] pdf) throws IOException {
-    List<Words> all = new ArrayList<>();
-    try (PDDocument doc = open(pdf)) {
-      PDFTextStripper stripper =
-          new PDFTextStripper() {
-            @Override
-            protected void writeString(String text, List<TextPosition> places) {
-              // the stripper joins neighbours on one line: part them by size and by gaps
-              Words last = null;
-              for (TextPosition p : places) {
-                if (p.getUnicode().isBlank()) {
-                  continue;
-                }
-                Rectangle2D box =
-                    new Rectangle2D.Double(
-                        p.getXDirAdj(),
-                        p.getYDirAdj() - p.getHeightDir(),
-                        p.getWidthDirAdj(),
-                        p.getHeightDir());
-                if (last != null
-                    && Math.abs(last.size - p.getYScale()) < 0.01
-                    && Math.abs(last.box.getMaxY() - box.getMaxY()) < 0.1
-                    && Math.abs(box.getMinX() - last.box.getMaxX()) < 4) {
-                  all.remove(all.size() - 1);
-                  last = new Words(text, last.box.createUnion(box), last.size);
-                } else {
-                  last = new Words(text, box, p.getYScale());
-                }
-                all.add(last);
-              }
-            }
-          };
-      stripper.getText(doc);
-    }
-    return all;
-  }
-
-  private static Plan crowded(Site site) {
-    Judged j = DemoLike.judged(site, 3, "hand winch", "A3", List.of("A1"), Verdict.TIGHT, 1.1);
-    List<Check> checks =
-        new ArrayList<>(
-            Collections.nCopies(
-                20,
-                new Check(
-                    "check of many words " + "long ".repeat(20),
-                    1,
-                    1,
-                    "",
-                    1.1,
-                    Verdict.TIGHT,
-                    null,
-                    "A reason of many words. ".repeat(12))));
-    List<PartLoad> loads =
-        Collections.nCopies(
-            30, new PartLoad("part of a long name ".repeat(9), 120_000, 1_760_000, 1e6, 5, 1.5));
-    Judged more =
-        new Judged(
-            j.setup(),
-            j.verdict(),
-            j.weakest(),
-            j.standing(),
-            j.standings(),
-            j.failing(),
-            "Tight. " + "A sentence that goes on and on. ".repeat(20),
-            j.figures(),
-            checks,
-            loads,
-            j.line(),
-            j.haul(),
-            j.ground(),
-            Collections.nCopies(20, "A note of many words. ".repeat(12)));
-    return new Plan(
-        List.of(more),
-        1,
-        Map.of(Verdict.TIGHT, 1),
-        Map.of(),
-        Map.of(),
-        Collections.nCopies(25, "A remark about the whole plan. ".repeat(6)));
-  }
-
-  private static Site longNames(Site site) {
-    List<Target> targets = new ArrayList<>(site.targets());
-    for (int i = 0; i < 12; i++) {
-      targets.add(
-          new Target(
-              "Shed number " + i + " with a name that does not end".repeat(3),
-              Target.Kind.STRUCTURE,
-              new Shape.Circle(new Position(16 + i / 4.0, 12), 0.5),
-              Fix.PICTURE,
-              null,
-              0,
-              2,
-              1,
-              true,
-              false,
-              false));
-    }
-    return with(site, targets, site.wires());
-  }
-
-  private static Site withWires(Site site, double... easts) {
-    List<Wire> wires = new ArrayList<>();
-    for (double e : easts) {
-      wires.add(
-          new Wire(
-              "W" + e,
-              12.47,
-              "owner",
-              Wire.State.ENERGIZED,
-              List.of(
-                  new Wire.Pole(new Position(e, -50), 0, 9),
-                  new Wire.Pole(new Position(e, 150), 0, 9)),
-              0.8,
-              Fix.TAPES,
-              null));
-    }
-    return with(site, site.targets(), wires);
-  }
-
-  private static Site metric() {
-    return DemoLike.site(Site.Display.METRIC);
-  }
-
-  private static Site named(Site s, String name) {
-    return copy(s, name, s.targets(), s.wires());
-  }
-
-  private static Site with(Site s, List<Target> targets, List<Wire> wires) {
-    return copy(s, s.name(), targets, wires);
-  }
-
-  private static Site copy(Site s, String name, List<Target> targets, List<Wire> wires) {
-    return new Site(
-        s.version(),
-        name,
-        s.origin(),
-        s.display(),
-        s.ruleSet(),
-        s.declinationDeg(),
-        s.picture(),
-        s.tree(),
-        s.cut(),
-        targets,
-        wires,
-        s.looked(),
-        s.dropZones(),
-        s.anchors(),
-        s.spots(),
-        s.gear(),
-        s.conditions(),
-        s.offer());
-  }
-
-  private static SheetFile sheet(Paper paper, Site site, Plan plan, int rank) {
-    return new SheetFile(paper, site, plan, rank, GroundPainter.NONE, null, "9.9.9");
-  }
-
-  private static PDDocument open(byte[] pdf) throws IOException {
-    return Loader.loadPDF(pdf);
-  }
-
-  private static String text(byte[] pdf) {
-    try (PDDocument doc = open(pdf)) {
-      return new PDFTextStripper().getText(doc).replaceAll("\\s+", " ");
-    } catch (IOException e) {
-      throw new UncheckedIOException(e);
-    }
-  }
-
-  private static BufferedImage rendered(byte[] pdf) throws IOException {
-    try (PDDocument doc = open(pdf)) {
-      return new PDFRenderer(doc).renderImageWithDPI(0, DPI);
-    }
-  }
-
-  /** Longest run of dark pixels in a row, left of a limit. */
-  private static int run(BufferedImage page, int y, int limit) {
-    int best = 0;
-    int run = 0;
-    for (int x = 0; x < limit; x++) {
-      run = (page.getRGB(x, y) & 0xFF) < 128 ? run + 1 : 0;
-      best = Math.max(best, run);
-    }
-    return best;
-  }
-
-  /** Middle of the column with the most marks and its neighbours. */
-  private static double peak(int[] columns, int from, int to) {
-    int best = from;
-    for (int x = from; x < to; x++) {
-      best = columns[x] > columns[best] ? x : best;
-    }
-    double sum = 0;
-    double weight = 0;
-    for (int x = Math.max(from, best - 6); x < Math.min(to, best + 7); x++) {
-      if (columns[x] > columns[best] / 2) {
-        sum += (double) x * columns[x];
-        weight += columns[x];
-      }
-    }
-    return sum / weight;
-  }
-
-  private static boolean near(int rgb, Color c) {
-    Color p = new Color(rgb);
-    return Math.abs(p.getRed() - c.getRed())
-            + Math.abs(p.getGreen() - c.getGreen())
-            + Math.abs(p.getBlue() - c.getBlue())
-        < 60;
   }
 
   private static double differing(BufferedImage a, BufferedImage b) {

@@ -6,11 +6,11 @@ import static org.assertj.core.api.Assertions.within;
 import java.util.List;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
-import org.fallwright.ui.DemoLike;
+import org.fallwright.ui.demo.DemoSite;
 import org.junit.jupiter.api.Test;
 
 class LayPlaneTest {
-  private final Site site = DemoLike.site(Site.Display.METRIC);
+  private final Site site = DemoSite.asItIs().site();
 
   @Test
   void distancesRunAlongTheLayFromTheStumpAndToItsRight() {

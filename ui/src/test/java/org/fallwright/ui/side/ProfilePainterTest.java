@@ -7,22 +7,21 @@ import java.awt.Font;
 import java.awt.Graphics2D;
 import java.awt.geom.Rectangle2D;
 import java.awt.image.BufferedImage;
-import java.util.List;
 import org.fallwright.core.plan.Judged;
-import org.fallwright.core.plan.Verdict;
 import org.fallwright.core.site.Site;
-import org.fallwright.ui.DemoLike;
+import org.fallwright.ui.demo.DemoSite;
 import org.fallwright.ui.map.Palette;
 import org.fallwright.ui.text.Amounts;
 import org.junit.jupiter.api.Test;
 
 class ProfilePainterTest {
   private static final Rectangle2D FRAME = new Rectangle2D.Double(10, 10, 900, 240);
-  private final Site site = DemoLike.site(Site.Display.METRIC);
+  private static final DemoSite DEMO = DemoSite.asItIs();
+  private final Site site = DEMO.site();
 
   @Test
   void tipLineAndWireShowInTheirColours() {
-    Judged east = DemoLike.judged(site, 88, "hand winch", "S1", List.of(), Verdict.TIGHT, 1.1);
+    Judged east = DEMO.judge(DemoSite.ROW_8.withLay(88));
     BufferedImage image = paint(east, Site.Display.METRIC);
     assertThat(count(image, Palette.DAY.line())).isGreaterThan(400);
     assertThat(count(image, Palette.DAY.wire())).isGreaterThan(60);
@@ -31,7 +30,7 @@ class ProfilePainterTest {
 
   @Test
   void aLayThatCrossesNoWireShowsNone() {
-    Judged north = DemoLike.plan(site).ranked().get(0);
+    Judged north = DEMO.judge(DemoSite.ROW_6);
     assertThat(count(paint(north, Site.Display.METRIC), Palette.DAY.wire())).isZero();
   }
 
@@ -44,7 +43,7 @@ class ProfilePainterTest {
 
   @Test
   void nothingIsPaintedOutsideTheFrame() {
-    BufferedImage image = paint(DemoLike.plan(site).ranked().get(0), Site.Display.US);
+    BufferedImage image = paint(DEMO.judge(DemoSite.ROW_6), Site.Display.US);
     for (int x = 0; x < image.getWidth(); x++) {
       assertThat(image.getRGB(x, 5)).isEqualTo(Color.WHITE.getRGB());
       assertThat(image.getRGB(x, 255)).isEqualTo(Color.WHITE.getRGB());
