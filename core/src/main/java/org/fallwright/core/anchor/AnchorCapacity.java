@@ -2,6 +2,7 @@ package org.fallwright.core.anchor;
 
 import java.util.Locale;
 import java.util.Optional;
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.site.Anchor;
 import org.fallwright.core.site.Anchor.Condition;
 
@@ -13,16 +14,16 @@ public final class AnchorCapacity {
   /**
    * Steepest rise of the load that a tree, stump or vehicle is trusted with [degrees]; allowance.
    */
-  public static final double STEEPEST_UPLIFT_DEG = 30;
+  public static final double STEEPEST_UPLIFT_DEG = Allowances.UPLIFT_MOST.value();
 
   /** Least stem diameter of a tree without a tie-back [m]; planning allowance. */
-  public static final double LEAST_DIAMETER_M = 0.25;
+  public static final double LEAST_DIAMETER_M = Allowances.ANCHOR_DBH_LEAST.value();
 
   /**
    * What a stump keeps of the root plate of the tree that stood on it; planning allowance, for no
    * published figure could be read.
    */
-  public static final double STUMP = 0.5;
+  public static final double STUMP = Allowances.STUMP_PLATE.value();
 
   private AnchorCapacity() {}
 

@@ -1,5 +1,6 @@
 package org.fallwright.core.anchor;
 
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.units.Range;
 
 /**
@@ -10,7 +11,7 @@ import org.fallwright.core.units.Range;
  */
 public record AnchorLoad(double upliftDeg, boolean downhill) {
   /** Pull below the horizontal past which a root plate counts for less [degrees]; allowance. */
-  public static final double DOWNHILL_DEG = 20;
+  public static final double DOWNHILL_DEG = Allowances.DOWNHILL_SLOPE.value();
 
   public AnchorLoad {
     Range.check("uplift_deg", upliftDeg, -90, 90, "degrees");

@@ -1,5 +1,6 @@
 package org.fallwright.core.anchor;
 
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.units.Range;
 
 /**
@@ -20,10 +21,10 @@ public record Capacity(
     boolean refused,
     String why) {
   /** Factor asked of an anchor at the planned load; planning allowance. */
-  public static final double DESIGN_FACTOR = 3;
+  public static final double DESIGN_FACTOR = Allowances.ANCHOR_FACTOR.value();
 
   /** Factor asked of an anchor at the most the source can do; planning allowance. */
-  public static final double LAST_FACTOR = 2;
+  public static final double LAST_FACTOR = Allowances.ANCHOR_LAST_FACTOR.value();
 
   public Capacity {
     Range.check("strength_N", strengthN, 0, 1e9, "N");

@@ -1,6 +1,7 @@
 package org.fallwright.core.anchor;
 
 import org.fallwright.core.units.Range;
+import org.fallwright.core.units.Units;
 
 /**
  * The line tension at which a parked vehicle with all wheels locked starts to slide.
@@ -14,7 +15,7 @@ import org.fallwright.core.units.Range;
  */
 public final class LockedWheels {
   /** Standard gravity [m/s²]. */
-  private static final double G = 9.80665;
+  private static final double G = Units.GRAVITY;
 
   private LockedWheels() {}
 

@@ -1,5 +1,6 @@
 package org.fallwright.core.anchor;
 
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.units.Range;
 
 /**
@@ -20,22 +21,22 @@ import org.fallwright.core.units.Range;
  */
 public record WoodAnchor(double rootPlateN, double stemN) {
   /** Depth of the turning point below the ground [m]; planning allowance. */
-  static final double TURNING_DEPTH_M = 0.5;
+  static final double TURNING_DEPTH_M = Allowances.SLING_ARM_RISE.value();
 
   /** Least arm [m]; planning allowance. */
-  static final double LEAST_ARM_M = 1.0;
+  static final double LEAST_ARM_M = Allowances.SLING_ARM_LEAST.value();
 
   /** What saturated ground leaves of the root plate; planning allowance. */
-  static final double SATURATED = 0.5;
+  static final double SATURATED = Allowances.SATURATED.value();
 
   /** What a steep downhill pull leaves of the root plate; planning allowance. */
-  static final double DOWNHILL = 0.75;
+  static final double DOWNHILL = Allowances.DOWNHILL.value();
 
   /** Stem diameter inside the bark over that outside; planning allowance. */
-  static final double INSIDE_BARK = 0.94;
+  static final double INSIDE_BARK = Allowances.BARK_RATIO.value();
 
   /** Standard deviations between a mean and its 5th percentile. */
-  static final double FIFTH = 1.645;
+  static final double FIFTH = Allowances.PERCENTILE_SDS.value();
 
   /**
    * The two strengths.

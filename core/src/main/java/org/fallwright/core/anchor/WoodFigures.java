@@ -1,5 +1,6 @@
 package org.fallwright.core.anchor;
 
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.tree.StemVolume;
 import org.fallwright.core.units.Range;
 
@@ -19,7 +20,7 @@ public record WoodFigures(
    * Lowest overturning moment per kilogram of stem that was read, western hemlock [N·m/kg]; for
    * species without pulling tests. Published: Byrne 2005, critical turning moments of BC conifers.
    */
-  public static final double LOWEST_ROOT_PLATE = 77.4;
+  public static final double LOWEST_ROOT_PLATE = Allowances.ROOT_PLATE_LEAST.value();
 
   public WoodFigures {
     Range.check("mor_Pa", morPa, 5e6, 2e8, "Pa");

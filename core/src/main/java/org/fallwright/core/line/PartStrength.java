@@ -1,5 +1,6 @@
 package org.fallwright.core.line;
 
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.site.Gear;
 import org.fallwright.core.units.Range;
 
@@ -12,15 +13,15 @@ import org.fallwright.core.units.Range;
  */
 public record PartStrength(double strengthN, double designFactor, double lastFactor) {
   /** Factor asked of a fibre line. Published: 29 CFR 1918 App. II Table 2 (fibre slings). */
-  public static final double FIBRE = 5;
+  public static final double FIBRE = Allowances.FIBRE_FACTOR.value();
 
   /**
    * Factor asked of a wire rope that pulls. Published: Oregon tethered logging, a third of break.
    */
-  public static final double WIRE = 3;
+  public static final double WIRE = Allowances.WIRE_FACTOR.value();
 
   /** Factor asked at the most the source can do; planning allowance. */
-  public static final double LAST = 1.5;
+  public static final double LAST = Allowances.LAST_FACTOR.value();
 
   /**
    * A pull line: breaking load × ends × bends × wet and age.

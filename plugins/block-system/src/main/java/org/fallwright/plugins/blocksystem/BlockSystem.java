@@ -13,6 +13,7 @@ import org.fallwright.core.pull.SourceDescription;
 import org.fallwright.core.pull.SourceDescription.Parameter;
 import org.fallwright.core.pull.SourceDescription.PlaceKind;
 import org.fallwright.core.pull.SourceDescription.ValueKind;
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.plugins.api.ParameterReader;
 import org.fallwright.plugins.api.PullSourceExtension;
 import org.pf4j.Extension;
@@ -29,10 +30,10 @@ import org.pf4j.Extension;
 @Extension
 public final class BlockSystem implements PullSourceExtension {
   /** Least factor on a fibre line at the planned load. Common practice. */
-  private static final double LINE_FACTOR = 5;
+  private static final double LINE_FACTOR = Allowances.FIBRE_FACTOR.value();
 
   /** Least factor on every part at the most the source can do. Planning allowance. */
-  private static final double LAST_FACTOR = 1.5;
+  private static final double LAST_FACTOR = Allowances.LAST_FACTOR.value();
 
   private static final String FIXED = "fixed";
 

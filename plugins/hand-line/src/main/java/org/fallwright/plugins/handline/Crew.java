@@ -1,5 +1,7 @@
 package org.fallwright.plugins.handline;
 
+import org.fallwright.core.reference.Allowances;
+
 /** What a crew pulls together: less than its people would one by one. */
 final class Crew {
   /**
@@ -7,10 +9,10 @@ final class Crew {
    * people, within 0.02 of the factors 0.93 of two, 0.85 of three and 248 of 8 × 63 kgf of eight;
    * trained teams lose less.
    */
-  private static final double LOSS_A_PERSON = 0.07;
+  private static final double LOSS_A_PERSON = Allowances.GROUP_LOSS.value();
 
   /** The fitted total hardly grows beyond seven and falls beyond eight: more count as seven. */
-  private static final int MOST_COUNTED = 7;
+  private static final int MOST_COUNTED = (int) Allowances.GROUP_MOST.value();
 
   private Crew() {}
 

@@ -10,6 +10,7 @@ import org.fallwright.core.pull.SourceDescription;
 import org.fallwright.core.pull.SourceDescription.Parameter;
 import org.fallwright.core.pull.SourceDescription.PlaceKind;
 import org.fallwright.core.pull.SourceDescription.ValueKind;
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.reference.Surface;
 import org.fallwright.plugins.api.ParameterReader;
 import org.fallwright.plugins.api.PullSourceExtension;
@@ -31,7 +32,7 @@ import org.pf4j.Extension;
 @Extension
 public final class HandLine implements PullSourceExtension {
   /** Over the strongest steady pull, for jerks. Planning allowance. */
-  private static final double HIGH_FACTOR = 1.5;
+  private static final double HIGH_FACTOR = Allowances.HAND_HIGH.value();
 
   /** Line that still comes in after "stop": a hand-over-hand haul [m]. Planning allowance. */
   private static final double OVERRUN_M = 0.3;

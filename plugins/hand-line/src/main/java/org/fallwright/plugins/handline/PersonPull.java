@@ -1,5 +1,7 @@
 package org.fallwright.plugins.handline;
 
+import org.fallwright.core.units.Units;
+
 /**
  * What one person can pull for a moment without moving the feet: the least of three limits.
  *
@@ -8,7 +10,7 @@ package org.fallwright.plugins.handline;
  * @param strengthN what a person keeps up on such footing [N]
  */
 record PersonPull(double tipN, double slipN, double strengthN) {
-  private static final double GRAVITY = 9.80665;
+  private static final double GRAVITY = Units.GRAVITY;
 
   /**
    * Height of the mass centre over stature. From memory, not checked against a table: men 0.55 to

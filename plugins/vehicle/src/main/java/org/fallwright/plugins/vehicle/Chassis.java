@@ -1,5 +1,7 @@
 package org.fallwright.plugins.vehicle;
 
+import org.fallwright.core.units.Units;
+
 /**
  * What of a vehicle decides its axle loads.
  *
@@ -17,7 +19,7 @@ record Chassis(
     double cgHeightM,
     double hitchHeightM,
     double overhangM) {
-  private static final double GRAVITY = 9.80665;
+  private static final double GRAVITY = Units.GRAVITY;
 
   double weightN() {
     return massKg * GRAVITY;

@@ -13,6 +13,7 @@ import org.fallwright.core.pull.SourceDescription;
 import org.fallwright.core.pull.SourceDescription.Parameter;
 import org.fallwright.core.pull.SourceDescription.PlaceKind;
 import org.fallwright.core.pull.SourceDescription.ValueKind;
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.reference.Surface;
 import org.fallwright.plugins.api.ParameterReader;
 import org.fallwright.plugins.api.PullSourceExtension;
@@ -29,25 +30,25 @@ import org.pf4j.Extension;
 @Extension
 public final class Vehicle implements PullSourceExtension {
   /** Creep speed at which the line may stop it [m/s]. Planning allowance. */
-  private static final double CREEP_MPS = 0.5;
+  private static final double CREEP_MPS = Allowances.SURGE_SPEED.value();
 
   /** A stiff line brings more than the mean stiffness says: this many times. Planning allowance. */
-  private static final double STIFFER = 2;
+  private static final double STIFFER = Allowances.SURGE_STIFFNESS.value();
 
   /** Line that still comes in after "stop" [m]. Planning allowance. */
-  private static final double OVERRUN_M = 0.5;
+  private static final double OVERRUN_M = Allowances.OVERRUN_VEHICLE.value();
 
   /** Clear way beyond the travel [m]. Planning allowance. */
-  private static final double RUN_OUT_SPARE_M = 2;
+  private static final double RUN_OUT_SPARE_M = Allowances.RUN_OUT_SPARE.value();
 
   /** Most that the line may be off the heading [deg]. Planning allowance. */
-  private static final double OFF_HEADING_DEG = 15;
+  private static final double OFF_HEADING_DEG = Allowances.LINE_OFF_HEADING_MOST.value();
 
   /** Least share of its level load that the front axle needs to steer. From memory. */
-  private static final double FRONT_SHARE_TO_STEER = 0.2;
+  private static final double FRONT_SHARE_TO_STEER = Allowances.FRONT_AXLE_LEAST.value();
 
   /** Least factor on the tow point at the most the vehicle can do. Planning allowance. */
-  private static final double LAST_FACTOR = 1.5;
+  private static final double LAST_FACTOR = Allowances.LAST_FACTOR.value();
 
   /** Ratio of a check that asks nothing. */
   private static final double MOST_RATIO = 1e6;

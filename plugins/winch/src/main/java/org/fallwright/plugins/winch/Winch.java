@@ -11,6 +11,7 @@ import org.fallwright.core.pull.SourceDescription;
 import org.fallwright.core.pull.SourceDescription.Parameter;
 import org.fallwright.core.pull.SourceDescription.PlaceKind;
 import org.fallwright.core.pull.SourceDescription.ValueKind;
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.plugins.api.ParameterReader;
 import org.fallwright.plugins.api.PullSourceExtension;
 import org.pf4j.Extension;
@@ -26,13 +27,13 @@ import org.pf4j.Extension;
 @Extension
 public final class Winch implements PullSourceExtension {
   /** How far above its setting an overload device may act. Planning allowance. */
-  private static final double DEVICE_SPREAD = 1.2;
+  private static final double DEVICE_SPREAD = Allowances.WINCH_HIGH.value();
 
   /** Stall over rated pull where no overload device is stated. Planning allowance. */
-  private static final double STALL = 1.25;
+  private static final double STALL = Allowances.WINCH_NO_DEVICE.value();
 
   /** How long a powered winch still turns after "stop" [s]. Planning allowance. */
-  private static final double STOP_S = 1.5;
+  private static final double STOP_S = Allowances.OVERRUN_POWERED_WINCH.value();
 
   /**
    * Wraps of wire that must stay on a drum. Published: five in an army winch manual (TM
