@@ -2,8 +2,8 @@ package org.fallwright.ui.demo;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
-import static org.fallwright.ui.demo.DemoRowsTest.ROW_4;
-import static org.fallwright.ui.demo.DemoRowsTest.ROW_6;
+import static org.fallwright.ui.demo.DemoSite.ROW_4;
+import static org.fallwright.ui.demo.DemoSite.ROW_6;
 
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.List;

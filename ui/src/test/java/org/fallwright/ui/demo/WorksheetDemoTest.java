@@ -34,8 +34,8 @@ class WorksheetDemoTest {
 
   private static Stream<Arguments> rows(String units) {
     Map<String, Setup> rows = new LinkedHashMap<>();
-    rows.put("hand winch over A1", DemoRowsTest.ROW_6);
-    rows.put("pick-up on the driveway", DemoRowsTest.ROW_4);
+    rows.put("hand winch over A1", DemoSite.ROW_6);
+    rows.put("pick-up on the driveway", DemoSite.ROW_4);
     rows.put("three parts", DemoSite.tackle(3, "3", "pickup", "rwd", "V1"));
     rows.put("read load cell", DemoSite.tackle(3, "4", "pickup", "rwd", "V1"));
     rows.put("wet birch", DemoSite.redirected(342, "hand-winch", "pull", "A3", "A2"));
@@ -110,8 +110,8 @@ class WorksheetDemoTest {
                         units,
                         e.getValue(),
                         e.getKey().equals("hinge too strong")
-                            ? withHinge(DemoRowsTest.ROW_6, 0.3)
-                            : DemoRowsTest.ROW_6)));
+                            ? withHinge(DemoSite.ROW_6, 0.3)
+                            : DemoSite.ROW_6)));
   }
 
   private static ObjectNode tree(ObjectNode site) {
