@@ -1,6 +1,7 @@
 package org.fallwright.core.plan;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.withinPercentage;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.json.JsonMapper;
@@ -11,28 +12,35 @@ import com.networknt.schema.SchemaRegistry;
 import com.networknt.schema.SpecificationVersion;
 import java.io.IOException;
 import java.io.InputStream;
+import java.math.BigDecimal;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
-import java.util.Map;
-import org.fallwright.core.site.Conditions;
-import org.fallwright.core.site.CutPlan;
-import org.fallwright.core.site.Fix;
-import org.fallwright.core.site.Gear;
-import org.fallwright.core.site.How;
-import org.fallwright.core.site.Offer;
-import org.fallwright.core.site.Origin;
-import org.fallwright.core.site.Place;
-import org.fallwright.core.site.Position;
-import org.fallwright.core.site.Quantity;
+import java.util.Set;
+import java.util.regex.Pattern;
+import org.fallwright.core.pull.PullOffer;
+import org.fallwright.core.pull.PullRequest;
+import org.fallwright.core.pull.PullSource;
+import org.fallwright.core.pull.SourceDescription;
 import org.fallwright.core.site.Site;
-import org.fallwright.core.site.SubjectTree;
+import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
 
 class PlanJsonTest {
   private static final PlanJson.Header HEADER =
       new PlanJson.Header("9.9.9", List.of("A person decides."), List.of("The weather."));
 
-  private final JsonNode doc = read(PlanJson.write(site(), plan(), HEADER));
+  private static Site site;
+  private static Plan plan;
+  private static byte[] bytes;
+  private static JsonNode doc;
+
+  @BeforeAll
+  static void planned() {
+    site = site(2_000, 3, 180);
+    plan = plan(site);
+    bytes = PlanJson.write(site, plan, HEADER);
+    doc = read(bytes);
+  }
 
   @Test
   void theDocumentSaysWhatItIs() {
@@ -47,49 +55,133 @@ class PlanJsonTest {
 
   @Test
   void setupsStandInOrderOfRank() {
-    assertThat(doc.path("setups")).hasSize(2);
-    assertThat(doc.at("/setups/0/rank").asInt()).isEqualTo(1);
-    assertThat(doc.at("/setups/1/rank").asInt()).isEqualTo(2);
-    assertThat(doc.at("/setups/1/verdict").asText()).isEqualTo("tight");
-    assertThat(doc.at("/best_rejected/anchor/rank").isNull()).isTrue();
-    assertThat(doc.at("/by_binding_check/anchor").asInt()).isEqualTo(7);
-    assertThat(doc.at("/by_verdict/not workable").asInt()).isEqualTo(8);
+    assertThat(doc.path("setups")).hasSize(plan.ranked().size()).hasSize(4);
+    for (int i = 0; i < 4; i++) {
+      JsonNode setup = doc.path("setups").get(i);
+      Judged j = plan.ranked().get(i);
+      assertThat(setup.path("rank").asInt()).isEqualTo(i + 1);
+      assertThat(setup.path("sentence").asText()).isEqualTo(j.sentence());
+      assertThat(setup.path("verdict").asText()).isEqualTo(j.verdict().word());
+      same(setup, "standing", j.standing());
+    }
+    assertThat(plan.bestRejected()).containsOnlyKeys("hinge turning", "hold stability", "lever");
+    assertThat(doc.path("best_rejected")).hasSize(3);
+    plan.bestRejected()
+        .forEach(
+            (id, j) -> {
+              JsonNode setup = doc.path("best_rejected").path(id);
+              assertThat(setup.path("rank").isNull()).isTrue();
+              assertThat(setup.path("verdict").asText()).isEqualTo("not workable");
+              assertThat(setup.at("/weakest/check").asText()).isEqualTo(id);
+              assertThat(doc.path("by_binding_check").path(id).asInt())
+                  .isEqualTo(plan.byBindingCheck().get(id))
+                  .isPositive();
+            });
+    assertThat(doc.path("setups_judged").asInt()).isEqualTo(plan.judged());
+    assertThat(doc.at("/by_verdict/not workable").asInt())
+        .isEqualTo(plan.byVerdict().get(Verdict.NOT_WORKABLE))
+        .isPositive();
     assertThat(doc.at("/by_verdict/cannot judge yet").asInt()).isZero();
+    assertThat(doc.path("notes").get(0).asText()).contains("\"capstan\" is left out");
   }
 
   @Test
   void figuresAreInTheUnitOfTheirName() {
     JsonNode first = doc.at("/setups/0");
-    assertThat(first.path("pull_needed_N").asDouble()).isEqualTo(4731.25);
-    assertThat(first.path("hinge_thickness_m").asDouble()).isEqualTo(0.045);
-    assertThat(first.path("blocks").get(0).asText()).isEqualTo("A1");
-    assertThat(first.at("/driver/source_at").asText()).isEqualTo("V1");
-    assertThat(first.at("/weakest/check").asText()).isEqualTo("pull");
-    assertThat(first.at("/path/1/at/1").asDouble()).isEqualTo(53);
-    assertThat(first.at("/checks/0/place/0").asDouble()).isEqualTo(17.5);
+    Figures f = plan.ranked().get(0).figures();
+    same(first, "pull_needed_N", f.pullNeededN());
+    same(first, "pull_plan_N", f.pullPlanN());
+    same(first, "hold_tension_N", f.holdN());
+    same(first, "working_tension_N", f.workingN());
+    same(first, "rest_share", f.restShare());
+    same(first, "hold_stability", f.holdStability());
+    same(first, "pretension_top_N", f.pretensionTopN());
+    same(first, "source_low_N", f.sourceLowN());
+    same(first, "source_high_N", f.sourceHighN());
+    same(first, "ceiling_N", f.ceilingN());
+    same(first, "pull_margin", f.pullMargin());
+    same(first, "commit_deg", f.commitDeg());
+    same(first, "movement_end_deg", f.movementEndDeg());
+    same(first, "take_up_m", f.takeUpM());
+    same(first, "line_in_at_commit_m", f.lineInAtCommitM());
+    same(first, "source_travel_m", f.sourceTravelM());
+    same(first, "line_rise_deg", f.lineRiseDeg());
+    same(first, "lever_m", f.leverM());
+    same(first, "steering_share", f.steeringShare());
+    same(first, "turn_share", f.turnShare());
+    same(first, "gape_m", f.gapeM());
+    same(first, "line_length_m", f.lineLengthM());
+    same(first, "source_end_per_tree", f.sourceEndPerTree());
+    assertThat(first.path("ceiling_part").asText()).isEqualTo("stem");
+    assertThat(first.path("starts_itself").asText()).isEqualTo("stops");
+    assertThat(first.path("hinge_thickness_m").asDouble()).isEqualTo(0.03);
+    assertThat(first.at("/weakest/check").asText()).isEqualTo("stem at high");
+    assertThat(first.at("/checks/0/place/1").asDouble()).isEqualTo(30);
+  }
+
+  @Test
+  void whatIsSetUpIsNamedFromTheTreeOutwards() {
+    JsonNode second = doc.at("/setups/1");
+    assertThat(second.path("blocks").get(0).asText()).isEqualTo("R2");
+    assertThat(second.path("source").asText()).isEqualTo("tackle");
+    assertThat(second.path("source_mode").asText()).isEqualTo("2:1");
+    assertThat(second.path("source_at").asText()).isEqualTo("R1");
+    assertThat(second.at("/driver/source").asText()).isEqualTo("steady");
+    assertThat(second.at("/driver/source_mode").asText()).isEqualTo("pull");
+    assertThat(second.at("/driver/source_at").asText()).isEqualTo("R2");
+    assertThat(second.path("path").findValuesAsText("role"))
+        .containsExactly("attachment", "redirect", "block_system");
+    assertThat(second.path("path").findValuesAsText("id")).containsExactly("T1", "R2", "R1");
+    assertThat(second.at("/path/1/at/0").asDouble()).isEqualTo(6);
+    assertThat(second.at("/path/1/at/1").asDouble()).isEqualTo(34);
+    assertThat(second.path("haul_path").findValuesAsText("id")).containsExactly("R1", "R2");
+    assertThat(doc.at("/setups/2/driver").isNull()).isTrue();
   }
 
   @Test
   void whatIsInfiniteOrCannotBeSaidIsNull() {
-    assertThat(doc.at("/setups/1/pull_margin").isNull()).isTrue();
-    assertThat(doc.at("/setups/1/clearance_m").isNull()).isTrue();
-    assertThat(doc.at("/setups/1/stop_reading_N").isNull()).isTrue();
-    assertThat(new String(PlanJson.write(site(), plan(), HEADER), StandardCharsets.UTF_8))
+    JsonNode first = doc.at("/setups/0");
+    Judged j = plan.ranked().get(0);
+    assertThat(j.figures().clearanceM()).as("nothing stands there").isNaN();
+    assertThat(first.path("clearance_m").isNull()).isTrue();
+    assertThat(first.path("clearance_target").isNull()).isTrue();
+    assertThat(j.figures().stopReadingN()).as("no load cell").isNaN();
+    assertThat(first.path("stop_reading_N").isNull()).isTrue();
+    assertThat(first.path("stop_reading_at").isNull()).isTrue();
+    assertThat(j.checks().get(0).ratio()).isInfinite();
+    assertThat(first.at("/checks/0/ratio").isNull()).isTrue();
+    assertThat(text()).doesNotContain("NaN").doesNotContain("Infinity");
+  }
+
+  @Test
+  void theMarginOfATreeThatNeedsNoPullIsNull() {
+    Site easy = site(2_000, 30, 0);
+    Plan found = plan(easy);
+    assertThat(found.ranked().get(0).figures().pullMargin()).isInfinite();
+    byte[] written = PlanJson.write(easy, found, HEADER);
+    assertThat(read(written).at("/setups/0/pull_margin").isNull()).isTrue();
+    assertThat(new String(written, StandardCharsets.UTF_8))
         .doesNotContain("NaN")
         .doesNotContain("Infinity");
   }
 
   @Test
   void numbersAreWrittenPlainlyWithNineDigits() {
-    assertThat(new String(PlanJson.write(site(), plan(), HEADER), StandardCharsets.UTF_8))
-        .contains("\"lever_m\" : 9.87654321,")
-        .contains("\"ceiling_N\" : 15700000,");
+    assertThat(text()).contains("\"strength_N\" : 8000000,").contains("\"strength_N\" : 120000,");
+    List<String> numbers =
+        Pattern.compile("(?m)(?:\" : |^ +)(-?[0-9][0-9.eE+-]*),?$")
+            .matcher(text())
+            .results()
+            .map(r -> r.group(1))
+            .toList();
+    assertThat(numbers).hasSizeGreaterThan(500).allMatch(n -> n.matches("-?\\d+(\\.\\d+)?"));
+    List<Integer> digits = numbers.stream().map(n -> new BigDecimal(n).precision()).toList();
+    assertThat(digits).contains(9).allMatch(n -> n <= 9);
   }
 
   @Test
   void theSamePlanGivesTheSameBytes() {
-    assertThat(PlanJson.write(site(), plan(), HEADER))
-        .isEqualTo(PlanJson.write(site(), plan(), HEADER));
+    assertThat(PlanJson.write(site, plan(site), HEADER)).isEqualTo(bytes);
   }
 
   @Test
@@ -117,6 +209,17 @@ class PlanJsonTest {
     }
   }
 
+  private static void same(JsonNode object, String name, double value) {
+    assertThat(object.path(name).asDouble())
+        .as(name)
+        .isCloseTo(value, withinPercentage(1e-6))
+        .isNotZero();
+  }
+
+  private static String text() {
+    return new String(bytes, StandardCharsets.UTF_8);
+  }
+
   private static JsonNode read(byte[] bytes) {
     try {
       return JsonMapper.builder().build().readTree(bytes);
@@ -125,124 +228,80 @@ class PlanJsonTest {
     }
   }
 
-  private static Plan plan() {
-    Judged good = judged(Verdict.WORKABLE, 1.46, 1.12, 12_300);
-    Judged tight = judged(Verdict.TIGHT, Double.POSITIVE_INFINITY, Double.NaN, Double.NaN);
-    Judged bad = judged(Verdict.NOT_WORKABLE, 0.2, -3.1, 900);
-    return new Plan(
-        List.of(good, tight),
-        10,
-        Map.of(Verdict.WORKABLE, 1, Verdict.TIGHT, 1, Verdict.NOT_WORKABLE, 8),
-        Map.of("pull", 1, "anchor", 7),
-        Map.of("anchor", bad, "pull", bad),
-        List.of("One source has no plugin."));
+  /** A source that a driver hauls: it gives twice what the driver does. */
+  private static final class Doubled implements PullSource {
+    @Override
+    public SourceDescription describe() {
+      return new SourceDescription(
+          "doubled", "Doubled pull", Set.of(SourceDescription.PlaceKind.ANCHOR), true, List.of());
+    }
+
+    @Override
+    public List<String> modes(ObjectNode parameters) {
+      return List.of("2:1");
+    }
+
+    @Override
+    public PullOffer offer(PullRequest request) {
+      PullOffer d = request.driver();
+      return new PullOffer(
+          2 * d.lowN(),
+          2 * d.highN(),
+          2 * d.holdN(),
+          true,
+          d.limit(),
+          2,
+          false,
+          0.05,
+          0,
+          1,
+          1,
+          0,
+          List.of(),
+          List.of(),
+          List.of());
+    }
   }
 
-  private static Judged judged(Verdict v, double margin, double clearance, double stop) {
-    Check pull = new Check("pull", 9310, 6360, "N", margin, v, new Position(17.5, 53), "why");
-    Figures f =
-        new Figures(
-            4731.25,
-            6360,
-            5050,
-            6360,
-            2.97,
-            12.5,
-            "stops",
-            9590,
-            9310,
-            17_600,
-            15_700_000,
-            "stem",
-            margin,
-            clearance,
-            null,
-            8.96,
-            12.1,
-            2.86,
-            1.8,
-            2.86,
-            16.7,
-            9.876543210987,
-            0.143,
-            0.01,
-            0.071,
-            56,
-            false,
-            stop,
-            "",
-            1.05,
-            false);
-    return new Judged(
-        new Setup(
-            3,
-            10.5,
-            0.045,
-            "L1",
-            List.of("A1"),
-            "tackle",
-            "3:1",
-            "A3",
-            new Setup.Driver("pick-up", "4WD", "V1")),
-        v,
-        pull,
-        1,
-        List.of(),
-        0,
-        v.word(),
-        f,
-        List.of(pull, new Check("wires", Double.NaN, 3.05, "m", Double.NaN, v, null, "unknown")),
-        List.of(new PartLoad("line", 6360, 17_600, 108_000, 5, 1.5)),
-        List.of(
-            new LinePoint(new Position(16, 24), 10.5, LinePoint.Role.ATTACHMENT, "T1"),
-            new LinePoint(new Position(17.5, 53), 1.5, LinePoint.Role.REDIRECT, "A1")),
-        List.of(),
-        null,
-        List.of());
+  /**
+   * Two rated points north of the tree: a source that is doubled at the first, its driver at the
+   * second, the line direct or over the second.
+   */
+  private static Site site(double pullN, double leanDeg, double leanAzimuthDeg) {
+    return TinySite.site(
+        pullN,
+        s -> {
+          s.put("name", "Ash by the barn").put("display", "metric");
+          ((ObjectNode) s.at("/tree/lean_deg")).put("value", leanDeg);
+          ((ObjectNode) s.at("/tree/lean_azimuth_deg")).put("value", leanAzimuthDeg);
+          TinySite.add(
+              s,
+              "anchors",
+              """
+              {"type": "rated", "id": "R2",
+               "place": {"at": [6, 34], "ground_m": 0, "fix": "tapes", "stated_error_m": null},
+               "sling_height_m": 1, "rejected": null, "land": null,
+               "breaking_load_N": 8000000, "vouched_by": "A"}""");
+          ((ObjectNode) s.get("offer")).put("redirects", 1);
+          ObjectNode gear = (ObjectNode) s.get("gear");
+          gear.putNull("load_cell");
+          ((ObjectNode) gear.at("/sources/0")).putArray("places").add("R2");
+          TinySite.add(
+              gear,
+              "sources",
+              """
+              {"id": "tackle", "plugin": "doubled", "places": ["R1"], "drivers": ["steady"],
+               "driver_places": ["R2"], "parameters": {}}""");
+          TinySite.add(
+              gear,
+              "sources",
+              """
+              {"id": "capstan", "plugin": "capstan", "places": ["R1"], "drivers": [],
+               "driver_places": [], "parameters": {}}""");
+        });
   }
 
-  private static Site site() {
-    Place stump = new Place(new Position(16, 24), 0, Fix.TAPES, null);
-    return new Site(
-        1,
-        "Ash by the barn",
-        new Origin(45, -40),
-        Site.Display.METRIC,
-        "US-OSHA",
-        null,
-        null,
-        new SubjectTree(
-            "T1",
-            "quercus-rubra",
-            stump,
-            Quantity.measured(0.52),
-            null,
-            List.of(),
-            Quantity.measured(17.5),
-            6,
-            4.5,
-            Quantity.measured(5),
-            Quantity.measured(188),
-            null,
-            null,
-            null,
-            null,
-            null,
-            null,
-            null,
-            null,
-            false,
-            true,
-            false),
-        new CutPlan(0.3, 0.25, 70, List.of(0.045), How.MEASURED, null, 0.01, false),
-        List.of(),
-        List.of(),
-        List.of(),
-        List.of(),
-        List.of(),
-        List.of(),
-        new Gear(List.of(), List.of(), List.of(), List.of(), null, List.of()),
-        new Conditions(Quantity.estimated(4), null, null, null),
-        new Offer(List.of(10.5), How.MEASURED, 5, List.of(), 1));
+  private static Plan plan(Site site) {
+    return new Planner(() -> List.of(new TinySite.Steady(), new Doubled())).plan(site);
   }
 }

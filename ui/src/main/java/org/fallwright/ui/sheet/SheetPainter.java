@@ -30,7 +30,7 @@ import org.fallwright.ui.text.Amounts;
  */
 final class SheetPainter {
   private static final double MARGIN = 26;
-  private static final double GAP = 9;
+  static final double GAP = 9;
 
   /** Share of the page's width that the plan takes. */
   private static final double PLAN_SHARE = 0.62;
@@ -41,19 +41,16 @@ final class SheetPainter {
   /** Least height of the plan. */
   private static final double LEAST_PLAN = 230;
 
-  /** Rows of each table that are kept however little room there is. */
-  private static final int FEWEST = 2;
-
   /** How far the list of what is not known may stand out under the cautions. */
   private static final double MORE_NOT_KNOWN = 12;
 
   /** Size of the labels on the plan, a size of their own. */
   static final double LABELS = 7.2;
 
-  private static final Font SMALL = SheetFonts.plain(7);
-  private static final Font BODY = SheetFonts.plain(7.8);
-  private static final Font BODY_BOLD = SheetFonts.bold(7.8);
-  private static final Font HEAD = SheetFonts.bold(8);
+  static final Font SMALL = SheetFonts.plain(7);
+  static final Font BODY = SheetFonts.plain(7.8);
+  static final Font BODY_BOLD = SheetFonts.bold(7.8);
+  static final Font HEAD = SheetFonts.bold(8);
 
   private final Paper paper;
   private final Site site;
@@ -62,11 +59,6 @@ final class SheetPainter {
   private final GroundPainter ground;
   private final double left = MARGIN;
   private final double right;
-
-  // rows shown of each table: as many as the page has room for
-  private int mostLoads = 16;
-  private int mostUnsettled = 10;
-  private int mostNotes = 8;
 
   SheetPainter(Paper paper, Site site, Judged judged, SheetContent content, GroundPainter ground) {
     this.paper = paper;
@@ -91,50 +83,15 @@ final class SheetPainter {
     double wordsTop = foot - GAP / 2 - words(measure, 0);
     double middle = left + (right - left) * PLAN_SHARE;
     double least = Math.max(LEAST_PLAN + STRIP, figures(null, measure, middle + GAP, 0));
-    double tablesTop = tablesTop(wordsTop, bodyTop + least);
+    SheetTables tables = new SheetTables(content, left, right);
+    double tablesTop = tables.top(wordsTop - GAP, bodyTop + least + GAP);
     plan(
         g, new Rectangle2D.Double(left, bodyTop, middle - left, tablesTop - GAP - STRIP - bodyTop));
     figures(g, pen, middle + GAP, bodyTop);
-    tables(g, pen, tablesTop);
+    tables.paint(g, pen, tablesTop);
     words(pen, wordsTop);
     pen.rule(left, right, foot - 2);
     pen.fitted(content.picture(), SMALL, left, foot, right - left);
-  }
-
-  /**
-   * Where the tables begin so that they end above a height; rows are left out where they would
-   * begin above another.
-   */
-  private double tablesTop(double bottom, double highest) {
-    TextPen measure = new TextPen(null);
-    double room = bottom - highest - 2 * GAP;
-    while (tables(null, measure, 0) > room && fewerRows(measure)) {
-      // one row less of the taller column
-    }
-    return bottom - GAP - tables(null, measure, 0);
-  }
-
-  /** Takes a row from the taller column of the tables; false where none has any to spare. */
-  private boolean fewerRows(TextPen measure) {
-    double middle = middleOfTables();
-    double loads = loads(measure, left, 0, middle - left);
-    double unsettled = unsettled(null, measure, middle + GAP, 0, right - middle - GAP);
-    boolean notesDecide = tables(null, measure, 0) > Math.max(loads, unsettled);
-    boolean leftDecides = notesDecide ? loads <= unsettled : loads > unsettled;
-    if (notesDecide && mostNotes > FEWEST) {
-      mostNotes--;
-    } else if (mostLoads > FEWEST && (leftDecides || mostUnsettled == FEWEST)) {
-      mostLoads--;
-    } else if (mostUnsettled > FEWEST) {
-      mostUnsettled--;
-    } else {
-      return false;
-    }
-    return true;
-  }
-
-  private double middleOfTables() {
-    return left + (right - left) * 0.56;
   }
 
   /** Title, lines to fill in, verdict with its mark, the sentence; returns the lower edge. */
@@ -265,91 +222,6 @@ final class SheetPainter {
       at = Math.max(a, b) + 1.2;
     }
     return at;
-  }
-
-  private double tables(Graphics2D g, TextPen pen, double top) {
-    double middle = middleOfTables();
-    double a = loads(pen, left, top, middle - left);
-    double b = unsettled(g, pen, middle + GAP, top, right - middle - GAP);
-    return a <= b
-        ? Math.max(b, notes(pen, left, a + 3, middle - left))
-        : Math.max(a, notes(pen, middle + GAP, b + 3, right - middle - GAP));
-  }
-
-  private double notes(TextPen pen, double x, double top, double width) {
-    List<String> all = content.notes();
-    if (all.isEmpty()) {
-      return top;
-    }
-    double y = pen.line("Take note", HEAD, x, top);
-    int shown = Math.min(all.size(), mostNotes);
-    for (String note : all.subList(0, shown)) {
-      y = pen.item("–", note, SMALL, x, y, width, 3);
-    }
-    return shown < all.size()
-        ? pen.line((all.size() - shown) + " more in the plan document.", SMALL, x, y)
-        : y;
-  }
-
-  private double loads(TextPen pen, double x, double top, double width) {
-    double[] ends = {width * 0.52, width * 0.67, width * 0.84, width};
-    double y = pen.line("Loads on the parts", HEAD, x, top);
-    String[] heads = {"at plan", "allowed", "at most", "allowed"};
-    for (int i = 0; i < 4; i++) {
-      pen.right(heads[i], SMALL, x + ends[i], top + 1);
-    }
-    pen.rule(x, x + width, y);
-    y += 1.5;
-    List<SheetContent.Load> rows = content.loads();
-    int shown = Math.min(rows.size(), mostLoads);
-    for (SheetContent.Load r : rows.subList(0, shown)) {
-      pen.fitted(r.part(), BODY, x, y, ends[0] - 50);
-      pen.right(r.atPlan() + (r.overAtPlan() ? " ×" : ""), font(r.overAtPlan()), x + ends[0], y);
-      pen.right(r.allowedAtPlan(), BODY, x + ends[1], y);
-      pen.right(r.atMost() + (r.overAtMost() ? " ×" : ""), font(r.overAtMost()), x + ends[2], y);
-      y = pen.right(r.allowedAtMost(), BODY, x + ends[3], y);
-    }
-    if (rows.isEmpty()) {
-      y = pen.line("None worked out: see the sentence above.", BODY, x, y);
-    }
-    if (shown < rows.size()) {
-      y = pen.line((rows.size() - shown) + " more parts in the plan document.", SMALL, x, y);
-    }
-    return pen.wrapped(
-        "At most: the source stalls, slips or jerks. × over what is allowed.",
-        SMALL,
-        x,
-        y + 1,
-        width,
-        2);
-  }
-
-  private static Font font(boolean over) {
-    return over ? BODY_BOLD : BODY;
-  }
-
-  private double unsettled(Graphics2D g, TextPen pen, double x, double top, double width) {
-    double y = pen.line("Not clear: tight or worse", HEAD, x, top);
-    pen.rule(x, x + width, y);
-    y += 1.5;
-    List<SheetContent.Unsettled> all = content.unsettled();
-    if (all.isEmpty()) {
-      y = pen.line("Every check is workable.", BODY, x, y);
-    }
-    int shown = Math.min(all.size(), mostUnsettled);
-    for (SheetContent.Unsettled u : all.subList(0, shown)) {
-      if (g != null) {
-        Graphics2D mark = (Graphics2D) g.create();
-        mark.setFont(SheetFonts.bold(7));
-        VerdictMark.paint(new Pen(mark, Color.WHITE), u.verdict(), x + 4, y + 5, 1, Color.BLACK);
-        mark.dispose();
-      }
-      y = pen.wrapped(u.text(), BODY, x + 12, y, width - 12, 3) + 1;
-    }
-    if (shown < all.size()) {
-      y = pen.line((all.size() - shown) + " more checks in the plan document.", SMALL, x, y);
-    }
-    return y;
   }
 
   private double words(TextPen pen, double top) {

@@ -234,6 +234,10 @@ class FallwrightTest {
     Said said = run(home, "demo", "--out", out.toString());
     assertThat(said.err).isEmpty();
     assertThat(said.status).isZero();
+    try (Stream<Path> files = Files.list(out)) {
+      assertThat(files.map(f -> f.getFileName().toString()))
+          .containsExactlyInAnyOrder("plan.json", "sheet.pdf", "sheet.png");
+    }
     assertThat(out.resolve("plan.json")).isNotEmptyFile();
     assertThat(out.resolve("sheet.pdf")).isNotEmptyFile();
     assertThat(out.resolve("sheet.png")).isNotEmptyFile();

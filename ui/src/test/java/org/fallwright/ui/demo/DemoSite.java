@@ -77,16 +77,15 @@ public final class DemoSite {
    * searched once; in the other units judged again, as the desktop does.
    */
   public static synchronized DemoSite coarse(Site.Display units) {
-    return COARSE.computeIfAbsent(
-        units,
-        u -> {
-          DemoSite demo = asItIs().in(u).lays(10, 3, 7, 342);
-          if (u != Site.Display.US) {
-            Plan searched = coarse(Site.Display.US).plan();
-            demo.plan = new CorePlanning(PLUGINS).again(demo.site(), searched);
-          }
-          return demo;
-        });
+    if (!COARSE.containsKey(units)) {
+      DemoSite demo = asItIs().in(units).lays(10, 3, 7, 342);
+      if (units != Site.Display.US) {
+        Plan searched = coarse(Site.Display.US).plan();
+        demo.plan = new CorePlanning(PLUGINS).again(demo.site(), searched);
+      }
+      COARSE.put(units, demo);
+    }
+    return COARSE.get(units);
   }
 
   /** The same in other units. */
