@@ -83,7 +83,8 @@ public final class DemoLike {
         -14.5,
         null,
         tree,
-        new CutPlan(0.3, 0.25, 70, List.of(0.045), How.MEASURED, null, 0.01, false),
+        new CutPlan(
+            0.3, CutPlan.Face.OPEN, 0.25, 70, List.of(0.045), How.MEASURED, null, 0.01, false),
         targets(),
         List.of(
             new Wire(

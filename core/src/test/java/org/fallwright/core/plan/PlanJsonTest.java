@@ -234,7 +234,8 @@ class PlanJsonTest {
             false,
             true,
             false),
-        new CutPlan(0.3, 0.25, 70, List.of(0.045), How.MEASURED, null, 0.01, false),
+        new CutPlan(
+            0.3, CutPlan.Face.OPEN, 0.25, 70, List.of(0.045), How.MEASURED, null, 0.01, false),
         List.of(),
         List.of(),
         List.of(),
