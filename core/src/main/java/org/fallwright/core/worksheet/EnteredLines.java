@@ -172,7 +172,7 @@ final class EnteredLines {
       w.given("m_p" + n, "piece " + n + ", weighed", piece.massKg(), MASS, Basis.MEASURED);
       w.given("h_p" + n, "height of its middle", piece.midHeightM(), LENGTH, Basis.MEASURED);
       masses.add("m_p" + n);
-      moments.add("m_p" + n + " × h_" + n);
+      moments.add("m_p" + n + " × h_p" + n);
     }
     w.work("m", "green mass of the tree", String.join(" + ", masses), MASS, Basis.STATICS);
     w.work(

@@ -85,7 +85,7 @@ record ProfileTree(Site site, LayPlane plane, Amounts amounts, Palette palette) 
         pen,
         Messages.text("profile.dbh", amounts.length(SubjectTree.BREAST_HEIGHT_M)),
         under,
-        3,
+        1,
         false);
   }
 

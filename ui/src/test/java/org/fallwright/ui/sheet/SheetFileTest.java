@@ -104,6 +104,7 @@ class SheetFileTest {
     assertThat(text)
         .contains("Oak behind the house")
         .contains("Setup 1 of 4")
+        .contains("open face 70°")
         .contains("003° true")
         .contains("rules US-OSHA")
         .contains("workable")
