@@ -26,6 +26,7 @@ final class SetupNotes {
               + in.smallLength(rule)
               + ".");
     }
+    notes.addAll(FaceNotes.of(site.cut(), in, t));
     if (t.planN() == 0) {
       notes.add("The tree leans the way it is to go: beware of a stem that splits at the cut.");
     }

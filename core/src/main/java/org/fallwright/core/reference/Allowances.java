@@ -52,6 +52,27 @@ public final class Allowances {
           "",
           "osha-hinge",
           "hinge thickness over stem diameter, rule of proportion");
+  public static final Figure OPEN_FACE_LEAST =
+      published(
+          "open-face-least",
+          70,
+          "deg",
+          "osha-notches",
+          "opening from which a face counts as open and shuts just before the tree lands");
+  public static final Figure FACE_DEPTH_LEAST =
+      remembered(
+          "face-depth-least",
+          0.2,
+          "",
+          "fisa-302",
+          "least usual depth of the face over the diameter at the cut");
+  public static final Figure FACE_DEPTH_MOST =
+      published(
+          "face-depth-most",
+          1.0 / 3,
+          "",
+          "osha-notches",
+          "greatest depth of the face over the diameter at the cut");
   public static final Figure STEERING_WIDTH_SHARE =
       allowance(
           "steering-width-share",

@@ -7,6 +7,7 @@ import org.fallwright.core.units.Range;
  * How the tree is to be cut, with the hinge thicknesses on offer.
  *
  * @param heightM height of the hinge above the ground at the stump [m]
+ * @param face kind of face cut
  * @param faceFraction face depth as a share of the stem diameter at the cut
  * @param faceOpeningDeg opening of the face [degrees]
  * @param hingeThicknessesM hinge thicknesses on offer [m]
@@ -17,6 +18,7 @@ import org.fallwright.core.units.Range;
  */
 public record CutPlan(
     double heightM,
+    Face face,
     double faceFraction,
     double faceOpeningDeg,
     List<Double> hingeThicknessesM,
@@ -24,8 +26,32 @@ public record CutPlan(
     Double hingeWidthM,
     double kerfM,
     boolean wedges) {
+  /**
+   * Kinds of face cut. With the hinge in its corner each shuts once the stem turned its opening.
+   */
+  public enum Face {
+    /** Wide open, both cuts sloping, back cut level with the corner. */
+    OPEN("open"),
+    /** Level floor, sloping roof. */
+    CONVENTIONAL("conventional"),
+    /** Level roof, floor sloping into the stump. */
+    HUMBOLDT("Humboldt");
+
+    private final String said;
+
+    Face(String said) {
+      this.said = said;
+    }
+
+    /** The kind as it stands in a sentence. */
+    public String said() {
+      return said;
+    }
+  }
+
   public CutPlan {
     Range.check("height_m", heightM, 0, 5, "m");
+    Range.present("face", face);
     Range.check("face_fraction", faceFraction, 0.05, 0.6, "");
     Range.check("face_opening_deg", faceOpeningDeg, 10, 120, "degrees");
     hingeThicknessesM = List.copyOf(Range.present("hinge_thicknesses_m", hingeThicknessesM));

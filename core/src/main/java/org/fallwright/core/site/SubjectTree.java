@@ -9,7 +9,9 @@ import org.fallwright.core.units.Range;
  * @param id its name on the plan
  * @param species key of the species table
  * @param stump middle of the stump
- * @param dbhM stem diameter over bark at 1.3 m above the ground [m]
+ * @param dbhM stem diameter over bark, square to the stem, {@link #BREAST_HEIGHT_M} along it from
+ *     the ground: on a leaning stem along its underside, the side it leans towards; on a slope from
+ *     the uphill side [m]
  * @param stumpDiameterM stem diameter inside the bark at the cut [m]; null: from DBH and flare
  * @param diameters further stem diameters
  * @param heightM height above the ground [m]
@@ -56,6 +58,9 @@ public record SubjectTree(
     boolean deadOrDecayed,
     boolean inLeaf,
     boolean iceOrWet) {
+  /** Where DBH is measured, along the stem from the ground [m]; common practice. */
+  public static final double BREAST_HEIGHT_M = 1.3;
+
   /** Farthest a point of the crown's outline may lie from the stump [m]. */
   public static final double OUTLINE_FARTHEST = 100;
 

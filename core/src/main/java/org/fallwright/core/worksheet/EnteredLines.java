@@ -51,6 +51,13 @@ final class EnteredLines {
     Setup s = r.judged().setup();
     CutPlan cut = site.cut();
     w.section("The setup and the cut");
+    w.note(
+        switch (cut.face()) {
+          case OPEN -> "Open face: sloping floor and roof, back cut level with its corner.";
+          case CONVENTIONAL -> "Conventional face: level floor, sloping roof.";
+          case HUMBOLDT -> "Humboldt face: level roof, floor sloping into the stump.";
+        });
+    w.note("The hinge sits in the face's corner: the face shuts when the stem has turned F_o.");
     w.given("β", "lay: direction of fall, from true north", s.layDeg(), ANGLE, Basis.CHOSEN);
     w.given("h_a", "height of the line on the tree", s.attachHeightM(), LENGTH, Basis.CHOSEN);
     w.given("t", "hinge thickness", s.hingeThicknessM(), SMALL_LENGTH, Basis.CHOSEN);

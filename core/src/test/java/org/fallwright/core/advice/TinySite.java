@@ -103,7 +103,8 @@ final class TinySite {
             false,
             true,
             false),
-        new CutPlan(0.3, 0.25, 70, List.of(hingeM), How.MEASURED, null, 0.01, false),
+        new CutPlan(
+            0.3, CutPlan.Face.OPEN, 0.25, 70, List.of(hingeM), How.MEASURED, null, 0.01, false),
         List.of(),
         List.of(),
         looked,

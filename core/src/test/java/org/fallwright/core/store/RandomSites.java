@@ -133,6 +133,7 @@ final class RandomSites {
   private CutPlan cut() {
     return new CutPlan(
         in(0, 5),
+        any(CutPlan.Face.values()),
         in(0.05, 0.6),
         in(10, 120),
         list(1, 3, i -> in(0.005, 0.5)),

@@ -15,7 +15,8 @@ import org.fallwright.core.site.WeighedSection;
 /** An invented northern red oak, DBH 0.52 m and 17.5 m high, and variations of it. */
 final class SampleTree {
   static final CutPlan CUT =
-      new CutPlan(0.30, 0.25, 70, List.of(0.045), How.MEASURED, null, 0.010, false);
+      new CutPlan(
+          0.30, CutPlan.Face.OPEN, 0.25, 70, List.of(0.045), How.MEASURED, null, 0.010, false);
 
   private SampleTree() {}
 

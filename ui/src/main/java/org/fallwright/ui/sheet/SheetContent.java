@@ -243,10 +243,11 @@ record SheetContent(
             "Cut",
             String.format(
                 Locale.ROOT,
-                "hinge %s, face %.2f of the diameter, open %.0f°%s",
+                "hinge %s, %s face %.0f°, %.2f of the diameter%s",
                 in.smallLength(s.hingeThicknessM()),
-                cut.faceFraction(),
+                cut.face().said(),
                 cut.faceOpeningDeg(),
+                cut.faceFraction(),
                 cut.wedges() ? ", wedges set" : "")));
     if (!s.redirects().isEmpty()) {
       lines.add(new Line("Block at", String.join(", then ", s.redirects())));

@@ -62,9 +62,31 @@ record ProfileTree(Site site, LayPlane plane, Amounts amounts, Palette palette) 
         view.at(cut * k - 1.6 * half, cut),
         4,
         false);
+    breast(pen, view, labels, k, half);
     for (double z = 0; z < h; z += Math.max(0.5, 8 * pen.unit() / view.pixelsPerMetre())) {
       labels.keepFree(view.at(z * k, z), 3 * pen.unit());
     }
+  }
+
+  /** Where DBH is measured: a tick square to the stem, its label on the side the tree leans to. */
+  private void breast(Pen pen, ProfileView view, Labels labels, double k, double half) {
+    double z =
+        SubjectTree.BREAST_HEIGHT_M * Math.cos(Math.toRadians(site.tree().leanDeg().value()));
+    double reach = half + 4 * pen.unit() / view.pixelsPerMetre();
+    double side = k < 0 ? -reach : reach;
+    double along = Math.hypot(1, k);
+    Point2D under = view.at(z * k + side / along, z - side * k / along);
+    Point2D over = view.at(z * k - side / along, z + side * k / along);
+    pen.stroke(new Line2D.Double(under, over), palette.ink(), 1.6);
+    labels.keepFree(under, 2 * pen.unit());
+    labels.keepFree(over, 2 * pen.unit());
+    want(
+        labels,
+        pen,
+        Messages.text("profile.dbh", amounts.length(SubjectTree.BREAST_HEIGHT_M)),
+        under,
+        1,
+        false);
   }
 
   /** The way of the tip and the tree as it would lie. */

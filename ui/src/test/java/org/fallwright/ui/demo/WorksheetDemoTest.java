@@ -19,6 +19,7 @@ import org.fallwright.core.worksheet.Worksheet;
 import org.fallwright.core.worksheet.Worksheets;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.Arguments;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.MethodSource;
 
 /** The worksheets of the demo site's setups, worked again from the printed text alone. */
@@ -112,6 +113,19 @@ class WorksheetDemoTest {
                         e.getKey().equals("hinge too strong")
                             ? withHinge(DemoSite.ROW_6, 0.3)
                             : DemoSite.ROW_6)));
+  }
+
+  @ParameterizedTest
+  @CsvSource({
+    "open, Open face: sloping floor and roof",
+    "conventional, Conventional face: level floor",
+    "humboldt, Humboldt face: level roof"
+  })
+  void theSetupSaysWhichFaceItIs(String face, String said) {
+    Worksheet w = sheet("us", s -> ((ObjectNode) s.get("cut")).put("face", face), DemoSite.ROW_6);
+    assertThat(MarkdownSheet.write(w))
+        .contains(said)
+        .contains("the face shuts when the stem has turned F_o");
   }
 
   private static ObjectNode tree(ObjectNode site) {

@@ -54,6 +54,7 @@ class SheetFileTest {
         .contains("Oak behind the house")
         .contains("Setup 1 of " + demo.plan().ranked().size())
         .contains("000° true (003° magnetic)")
+        .contains("open face 70°")
         .contains("rules US-OSHA")
         .contains("workable")
         .contains("5.04 kN")
