@@ -27,6 +27,11 @@ final class SupportsPainter {
 
   static void anchors(Canvas c) {
     for (Anchor a : c.scene().site().anchors()) {
+      if (a instanceof Anchor.TwoLegs l) {
+        legs(c, l);
+      }
+    }
+    for (Anchor a : c.scene().site().anchors()) {
       Point2D at = c.at(a.place().at());
       Color ink = c.palette().ink();
       Pen pen = c.pen();
@@ -48,8 +53,10 @@ final class SupportsPainter {
         pickets(pen, at, ink);
       } else if (a instanceof Anchor.BuriedLog) {
         log(pen, at, c.palette().halo(), c.palette().earth());
-      } else if (a instanceof Anchor.TwoLegs l) {
-        legs(c, l, at, ink);
+      } else if (a instanceof Anchor.TwoLegs) {
+        pen.solid(pen.disc(at, 5), c.palette().halo(), ink, 1.6);
+        pen.fill(pen.put(new Ellipse2D.Double(-4, -1.5, 3, 3), at, 0), ink);
+        pen.fill(pen.put(new Ellipse2D.Double(1, -1.5, 3, 3), at, 0), ink);
       } else {
         Path2D diamond = new Path2D.Double();
         diamond.moveTo(0, -7);
@@ -67,12 +74,12 @@ final class SupportsPainter {
   /** Three stakes that slant away from the pull, lashed together. */
   private static void pickets(Pen pen, Point2D at, Color ink) {
     Path2D stakes = new Path2D.Double();
-    for (int x = -5; x <= 5; x += 5) {
+    for (int x = -6; x <= 6; x += 6) {
       stakes.moveTo(x + 2, -6);
       stakes.lineTo(x - 2, 6);
     }
-    stakes.moveTo(-4.5, -2.5);
-    stakes.lineTo(6.5, -2.5);
+    stakes.moveTo(-5.5, -2.5);
+    stakes.lineTo(7.5, -2.5);
     pen.stroke(pen.put(stakes, at, 0), ink, 1.6);
   }
 
@@ -89,18 +96,15 @@ final class SupportsPainter {
     pen.stroke(pen.put(ground, at, 0), earth, 1.2);
   }
 
-  /** The point where two legs meet, and each leg to its anchor. */
-  private static void legs(Canvas c, Anchor.TwoLegs l, Point2D at, Color ink) {
-    Pen pen = c.pen();
+  /** Each of two legs, from where they meet to its anchor; under the symbols. */
+  private static void legs(Canvas c, Anchor.TwoLegs l) {
+    Point2D at = c.at(l.place().at());
     for (String id : List.of(l.first(), l.second())) {
       c.scene()
           .site()
           .anchor(id)
-          .ifPresent(a -> pen.stroke(new Line2D.Double(at, c.at(a.place().at())), ink, 1.2, 5, 3));
+          .ifPresent(a -> c.pen().stroke(new Line2D.Double(at, c.at(a.place().at())), c.palette().ink(), 1.2, 5, 3));
     }
-    pen.solid(pen.disc(at, 5), c.palette().halo(), ink, 1.6);
-    pen.fill(pen.put(new Ellipse2D.Double(-4, -1.5, 3, 3), at, 0), ink);
-    pen.fill(pen.put(new Ellipse2D.Double(1, -1.5, 3, 3), at, 0), ink);
   }
 
   /** Marks go on top of everything that may stand at an anchor. */

@@ -170,7 +170,7 @@ final class SheetPainter {
       x = to + 6;
     }
     y = MARGIN + boxHeight + 4;
-    return pen.wrapped(content.sentence(), SheetFonts.bold(9.5), left, y, right - left, 5) + 4;
+    return pen.wrapped(content.sentence(), SheetFonts.bold(9.5), left, y, right - left, 3) + 4;
   }
 
   private void plan(Graphics2D g, Rectangle2D frame) {
