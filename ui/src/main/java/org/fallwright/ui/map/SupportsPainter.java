@@ -103,7 +103,15 @@ final class SupportsPainter {
       c.scene()
           .site()
           .anchor(id)
-          .ifPresent(a -> c.pen().stroke(new Line2D.Double(at, c.at(a.place().at())), c.palette().ink(), 1.2, 5, 3));
+          .ifPresent(
+              a ->
+                  c.pen()
+                      .stroke(
+                          new Line2D.Double(at, c.at(a.place().at())),
+                          c.palette().ink(),
+                          1.2,
+                          5,
+                          3));
     }
   }
 
