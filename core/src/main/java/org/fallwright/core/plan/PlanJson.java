@@ -41,11 +41,18 @@ public final class PlanJson {
    * @param program version of the program
    * @param cautions cautions that go with every plan
    * @param notChecked what the plan does not look at
+   * @param notByPulling the sentence that pulling is not the method here; null where it may be
    */
-  public record Header(String program, List<String> cautions, List<String> notChecked) {
+  public record Header(
+      String program, List<String> cautions, List<String> notChecked, String notByPulling) {
     public Header {
       cautions = List.copyOf(cautions);
       notChecked = List.copyOf(notChecked);
+    }
+
+    /** A header of a plan whose method is not spoken of. */
+    public Header(String program, List<String> cautions, List<String> notChecked) {
+      this(program, cautions, notChecked, null);
     }
   }
 
@@ -65,6 +72,7 @@ public final class PlanJson {
     for (Verdict v : Verdict.values()) {
       verdicts.put(v.word(), plan.byVerdict().getOrDefault(v, 0));
     }
+    doc.put("not_by_pulling", known(header.notByPulling()));
     ObjectNode binding = doc.putObject("by_binding_check");
     new TreeMap<>(plan.byBindingCheck()).forEach(binding::put);
     ArrayNode setups = doc.putArray("setups");

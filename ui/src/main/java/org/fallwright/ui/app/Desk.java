@@ -205,7 +205,8 @@ final class Desk extends JPanel {
           open.failure().orElse(Messages.text("answer.no-site")));
     }
     if (open.chosen().isPresent()) {
-      return Answer.of(open.chosen().get(), a);
+      Answer answer = Answer.of(open.chosen().get(), a);
+      return open.plan().map(answer::inPlan).orElse(answer);
     }
     if (open.plan().isPresent()) {
       return Answer.nothing(open.plan().get());

@@ -1,5 +1,6 @@
 package org.fallwright.ui.app;
 
+import org.fallwright.core.advice.NotByPulling;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.site.Looked;
 import org.fallwright.core.site.Site;
@@ -25,6 +26,9 @@ final class NextThing {
     }
     if (open.failure().isPresent() || open.plan().isEmpty()) {
       return Messages.text("next.plan-again");
+    }
+    if (NotByPulling.of(open.plan().get()).isPresent()) {
+      return Messages.text("next.not-by-pulling");
     }
     return open.chosen().map(NextThing::of).orElse(Messages.text("next.change-site"));
   }

@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import org.fallwright.core.advice.NotByPulling;
 import org.fallwright.core.plan.Figures;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.Plan;
@@ -60,6 +61,7 @@ final class PlanText {
     boolean works = Exit.of(standing) == Exit.DONE;
     if (!works) {
       out.println();
+      NotByPulling.of(plan).ifPresent(n -> out.println(n.sentence()));
       out.println(
           standing == Verdict.CANNOT_JUDGE
               ? "Cannot judge yet. What stands nearest:"

@@ -2,6 +2,7 @@ package org.fallwright.ui.cli;
 
 import java.io.IOException;
 import java.nio.file.Path;
+import org.fallwright.core.advice.NotByPulling;
 import org.fallwright.core.plan.Plan;
 import org.fallwright.core.plan.PlanJson;
 import org.fallwright.core.plan.Planner;
@@ -44,7 +45,13 @@ record Planned(Home home, Path file, Site site, Plan plan) {
 
   byte[] json() {
     return PlanJson.write(
-        site, plan, new PlanJson.Header(home.version(), Cautions.ALWAYS, Cautions.LEFT_OUT));
+        site,
+        plan,
+        new PlanJson.Header(
+            home.version(),
+            Cautions.ALWAYS,
+            Cautions.LEFT_OUT,
+            NotByPulling.of(plan).map(NotByPulling::sentence).orElse(null)));
   }
 
   /** The sheet of a setup, as the kind of file that the name's end says. */

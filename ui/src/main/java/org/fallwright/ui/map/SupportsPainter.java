@@ -2,10 +2,13 @@ package org.fallwright.ui.map;
 
 import java.awt.Color;
 import java.awt.Shape;
+import java.awt.geom.Ellipse2D;
 import java.awt.geom.Line2D;
 import java.awt.geom.Path2D;
 import java.awt.geom.Point2D;
 import java.awt.geom.Rectangle2D;
+import java.awt.geom.RoundRectangle2D;
+import java.util.List;
 import java.util.Optional;
 import org.fallwright.core.plan.Check;
 import org.fallwright.core.plan.Judged;
@@ -24,6 +27,11 @@ final class SupportsPainter {
 
   static void anchors(Canvas c) {
     for (Anchor a : c.scene().site().anchors()) {
+      if (a instanceof Anchor.TwoLegs l) {
+        legs(c, l);
+      }
+    }
+    for (Anchor a : c.scene().site().anchors()) {
       Point2D at = c.at(a.place().at());
       Color ink = c.palette().ink();
       Pen pen = c.pen();
@@ -41,6 +49,14 @@ final class SupportsPainter {
         Shape box = pen.put(new Rectangle2D.Double(-7, -4.5, 14, 9), at, 0);
         pen.solid(box, c.palette().halo(), ink, 1.6);
         pen.plain(pen.put(new Line2D.Double(2, -4.5, 2, 4.5), at, 0), ink, 1.4);
+      } else if (a instanceof Anchor.Pickets) {
+        pickets(pen, at, ink);
+      } else if (a instanceof Anchor.BuriedLog) {
+        log(pen, at, c.palette().halo(), c.palette().earth());
+      } else if (a instanceof Anchor.TwoLegs) {
+        pen.solid(pen.disc(at, 5), c.palette().halo(), ink, 1.6);
+        pen.fill(pen.put(new Ellipse2D.Double(-4, -1.5, 3, 3), at, 0), ink);
+        pen.fill(pen.put(new Ellipse2D.Double(1, -1.5, 3, 3), at, 0), ink);
       } else {
         Path2D diamond = new Path2D.Double();
         diamond.moveTo(0, -7);
@@ -52,6 +68,50 @@ final class SupportsPainter {
       }
       c.labels().keepFree(at, size * c.unit());
       c.must(words(a), at, size + 2, 2, ink);
+    }
+  }
+
+  /** Three stakes that slant away from the pull, lashed together. */
+  private static void pickets(Pen pen, Point2D at, Color ink) {
+    Path2D stakes = new Path2D.Double();
+    for (int x = -6; x <= 6; x += 6) {
+      stakes.moveTo(x + 2, -6);
+      stakes.lineTo(x - 2, 6);
+    }
+    stakes.moveTo(-5.5, -2.5);
+    stakes.lineTo(7.5, -2.5);
+    pen.stroke(pen.put(stakes, at, 0), ink, 1.6);
+  }
+
+  /** A log that lies across, with earth over it. */
+  private static void log(Pen pen, Point2D at, Color halo, Color earth) {
+    pen.solid(pen.put(new RoundRectangle2D.Double(-8, -1, 16, 7, 6, 6), at, 0), halo, earth, 1.6);
+    Path2D ground = new Path2D.Double();
+    ground.moveTo(-9, -4);
+    ground.lineTo(9, -4);
+    for (int x = -6; x <= 6; x += 4) {
+      ground.moveTo(x, -4);
+      ground.lineTo(x - 2, -1.5);
+    }
+    pen.stroke(pen.put(ground, at, 0), earth, 1.2);
+  }
+
+  /** Each of two legs, from where they meet to its anchor; under the symbols. */
+  private static void legs(Canvas c, Anchor.TwoLegs l) {
+    Point2D at = c.at(l.place().at());
+    for (String id : List.of(l.first(), l.second())) {
+      c.scene()
+          .site()
+          .anchor(id)
+          .ifPresent(
+              a ->
+                  c.pen()
+                      .stroke(
+                          new Line2D.Double(at, c.at(a.place().at())),
+                          c.palette().ink(),
+                          1.2,
+                          5,
+                          3));
     }
   }
 

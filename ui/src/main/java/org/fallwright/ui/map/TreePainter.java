@@ -1,6 +1,7 @@
 package org.fallwright.ui.map;
 
 import java.awt.Color;
+import java.awt.Shape;
 import java.awt.geom.Ellipse2D;
 import java.awt.geom.Line2D;
 import java.awt.geom.Path2D;
@@ -9,7 +10,10 @@ import org.fallwright.core.site.Position;
 import org.fallwright.core.site.SubjectTree;
 import org.fallwright.ui.text.Messages;
 
-/** The tree to be felled: its crown where it hangs now, its stump, and the way it leans. */
+/**
+ * The tree to be felled: its crown where it hangs now, by its outline where one was drawn, its
+ * stump, and the way it leans.
+ */
 final class TreePainter {
   private TreePainter() {}
 
@@ -18,7 +22,10 @@ final class TreePainter {
     Color green = c.palette().tree();
     Position stump = t.stump().at();
     Pen pen = c.pen();
-    Path2D crown = lobes(c, crownCentre(t), t.crownRadiusM());
+    Shape crown =
+        t.crownOutline() == null
+            ? lobes(c, crownCentre(t), t.crownRadiusM())
+            : c.view().toPixels(t.crownOutline().geometry());
     pen.fill(crown, Palette.clear(green, 48));
     pen.stroke(crown, green, 1.8);
     Point2D s = c.at(stump);

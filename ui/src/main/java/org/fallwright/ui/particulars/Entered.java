@@ -76,10 +76,13 @@ public record Entered(List<Line> numbers, List<Line> looked, List<String> defaul
     SubjectTree t = site.tree();
     List<String> names = new ArrayList<>();
     missing(names, "stump-diameter", t.stumpDiameterM());
-    missing(names, "mass", t.massKg());
-    missing(names, "mass-centre", t.massCentreM());
-    missing(names, "crown-share", t.crownShare());
-    missing(names, "crown-offset", t.crownOffsetM());
+    if (t.sections() == null) {
+      missing(names, "mass", t.massKg());
+      missing(names, "mass-centre", t.massCentreM());
+    }
+    boolean inLine = t.crownOffsetM() == null && t.crownOutline() == null;
+    missing(names, inLine ? "crown-share" : "crown-share-by-dbh", t.crownShare());
+    missing(names, "crown-offset", t.crownOutline() == null ? t.crownOffsetM() : t.crownOutline());
     missing(names, "crown-area", t.crownAreaM2());
     missing(names, "shell", t.shellM());
     missing(names, "hinge-width", site.cut().hingeWidthM());

@@ -1,6 +1,7 @@
 package org.fallwright.ui.setups;
 
 import java.util.List;
+import org.fallwright.core.advice.NotByPulling;
 import org.fallwright.core.plan.Check;
 import org.fallwright.core.plan.Figures;
 import org.fallwright.core.plan.Judged;
@@ -57,6 +58,19 @@ public record Answer(Verdict verdict, String word, String sentence, List<Cell> c
         j.verdict().word(),
         sentence(j, amounts),
         List.of(needs(j, amounts), gives(j, amounts), clears(j, amounts), weakest(j, amounts)));
+  }
+
+  /** The same, led by the advice that pulling is not the method where the whole plan fails. */
+  public Answer inPlan(Plan plan) {
+    return NotByPulling.of(plan)
+        .map(
+            n ->
+                new Answer(
+                    verdict,
+                    word,
+                    Messages.text("answer.not-by-pulling", String.valueOf(n.judged()), sentence),
+                    cells))
+        .orElse(this);
   }
 
   /** The way, then what was found of it; the verdict's word stands beside the mark already. */

@@ -102,8 +102,10 @@ final class Entered {
     SubjectTree t = site.tree();
     Map<String, Object> all = new LinkedHashMap<>();
     all.put("stump diameter", t.stumpDiameterM());
-    all.put("mass", t.massKg());
-    all.put("mass centre", t.massCentreM());
+    if (t.sections() == null) {
+      all.put("mass", t.massKg());
+      all.put("mass centre", t.massCentreM());
+    }
     all.put("crown's wind area", t.crownAreaM2());
     all.put("sound stem", t.shellM());
     all.put("hinge width", site.cut().hingeWidthM());

@@ -7,6 +7,7 @@ import java.util.Locale;
 import java.util.Objects;
 import java.util.function.Function;
 import java.util.function.UnaryOperator;
+import org.fallwright.core.advice.NotByPulling;
 import org.fallwright.core.plan.Check;
 import org.fallwright.core.plan.Figures;
 import org.fallwright.core.plan.Judged;
@@ -128,7 +129,7 @@ record SheetContent(
         site.name(),
         subtitle,
         j.verdict(),
-        j.sentence(),
+        sentence(plan, j),
         readings(in, j.figures()),
         pull(in, j.figures()),
         setup(site, in, j),
@@ -139,6 +140,13 @@ record SheetContent(
         Cautions.ALWAYS,
         notKnown,
         pictureFault == null ? picture(site.picture()) : pictureFault);
+  }
+
+  /** The setup's own sentence, behind the advice on the method where no setup will do. */
+  private static String sentence(Plan plan, Judged j) {
+    return NotByPulling.of(plan)
+        .map(n -> n.sentence() + " This setup: " + j.sentence())
+        .orElse(j.sentence());
   }
 
   private static List<Reading> readings(DisplayUnits in, Figures f) {

@@ -74,7 +74,7 @@ public final class ProfilePainter {
               22 * pen.unit()));
       ground(pen, view, frame);
       targets(pen, view, labels);
-      new ProfileTree(site, plane, amounts, palette).paint(pen, view, labels);
+      tree().paint(pen, view, labels);
       wires(pen, view, labels);
       line(pen, view, labels);
       labels.paint(pen);
@@ -85,9 +85,14 @@ public final class ProfilePainter {
     }
   }
 
+  private ProfileTree tree() {
+    return new ProfileTree(site, plane, amounts, palette);
+  }
+
   private ProfileView view(Rectangle2D frame, double unit) {
     double h = site.tree().heightM().value();
-    double from = -Math.max(BEHIND * h, site.tree().crownRadiusM() + 2);
+    double behind = ProfileTree.crownRadius(site.tree()) - tree().crownAlong(site.tree());
+    double from = -Math.max(BEHIND * h, behind + 2);
     double to = h + 4;
     if (chosen != null && chosen.line().size() > 1) {
       to = Math.max(to, plane.s(chosen.line().get(1).at()) + 3);

@@ -7,8 +7,10 @@ import java.awt.geom.Ellipse2D;
 import java.awt.geom.Line2D;
 import java.awt.geom.Path2D;
 import java.awt.geom.Point2D;
+import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.SubjectTree;
+import org.fallwright.core.tree.CrownOutline;
 import org.fallwright.ui.map.Labels;
 import org.fallwright.ui.map.Palette;
 import org.fallwright.ui.map.Pen;
@@ -34,10 +36,10 @@ record ProfileTree(Site site, LayPlane plane, Amounts amounts, Palette palette) 
     move(stem, view.at(half, 0));
     stem.closePath();
     double middle = (t.crownBaseM() + h) / 2;
+    double radius = crownRadius(t);
     Ellipse2D round =
-        new Ellipse2D.Double(
-            -t.crownRadiusM(), -(h - t.crownBaseM()) / 2, 2 * t.crownRadiusM(), h - t.crownBaseM());
-    Point2D centre = view.at(middle * k + offset(t), middle);
+        new Ellipse2D.Double(-radius, -(h - t.crownBaseM()) / 2, 2 * radius, h - t.crownBaseM());
+    Point2D centre = view.at(crownAlong(t), middle);
     AffineTransform lean =
         new AffineTransform(
             view.pixelsPerMetre(),
@@ -107,7 +109,7 @@ record ProfileTree(Site site, LayPlane plane, Amounts amounts, Palette palette) 
     pen.stroke(new Line2D.Double(foot, tip), ink, 1.6, 8, 4);
     double turn = -Math.atan2(base - site.cut().heightM(), h);
     double along = (h - t.crownBaseM()) * view.pixelsPerMetre();
-    double high = 2 * t.crownRadiusM() * view.pixelsPerMetre();
+    double high = 2 * crownRadius(t) * view.pixelsPerMetre();
     var crown =
         AffineTransform.getRotateInstance(turn, tip.getX(), tip.getY())
             .createTransformedShape(
@@ -130,12 +132,29 @@ record ProfileTree(Site site, LayPlane plane, Amounts amounts, Palette palette) 
         * Math.cos(Math.toRadians(t.leanAzimuthDeg().value() - plane.layDeg()));
   }
 
-  private double offset(SubjectTree t) {
-    if (t.crownOffsetM() == null) {
-      return 0;
+  /** Where the middle of the crown hangs, along the lay from the stump [m]. */
+  double crownAlong(SubjectTree t) {
+    if (t.crownOutline() != null) {
+      Position middle = CrownOutline.of(t.crownOutline()).middle();
+      Position stump = t.stump().at();
+      return along(middle.eastM() - stump.eastM(), middle.northM() - stump.northM());
     }
+    double onAxis = (t.crownBaseM() + t.heightM().value()) / 2 * slope(t);
+    return t.crownOffsetM() == null
+        ? onAxis
+        : onAxis + along(t.crownOffsetM().eastM(), t.crownOffsetM().northM());
+  }
+
+  /** Radius of the crown [m]; of a circle as large as its outline where one was drawn. */
+  static double crownRadius(SubjectTree t) {
+    return t.crownOutline() == null
+        ? t.crownRadiusM()
+        : CrownOutline.of(t.crownOutline()).radiusM();
+  }
+
+  private double along(double eastM, double northM) {
     double a = Math.toRadians(plane.layDeg());
-    return t.crownOffsetM().eastM() * Math.sin(a) + t.crownOffsetM().northM() * Math.cos(a);
+    return eastM * Math.sin(a) + northM * Math.cos(a);
   }
 
   private static void move(Path2D p, Point2D to) {

@@ -42,7 +42,8 @@ class FallwrightTest {
   }
 
   @ParameterizedTest
-  @ValueSource(strings = {"", "plan", "sheet", "worksheet", "check", "sources", "open", "demo"})
+  @ValueSource(
+      strings = {"", "plan", "sheet", "worksheet", "check", "sources", "measure", "open", "demo"})
   void everyCommandHasHelp(String command) {
     Said said = command.isEmpty() ? run(home(), "--help") : run(home(), command, "--help");
     assertThat(said.status).isZero();
@@ -71,6 +72,7 @@ class FallwrightTest {
     JsonNode doc = new ObjectMapper().readTree(json.toFile());
     assertThat(doc.at("/setups/0/rank").asInt()).isEqualTo(1);
     assertThat(doc.at("/setups/0/verdict").asText()).isEqualTo("workable");
+    assertThat(doc.at("/not_by_pulling").isNull()).isTrue();
     byte[] first = Files.readAllBytes(json);
     run(home(), "plan", site.toString(), "--json", json.toString());
     assertThat(Files.readAllBytes(json)).isEqualTo(first);
@@ -88,9 +90,12 @@ class FallwrightTest {
   @Test
   void nothingWorkableEndsWithThree() throws IOException {
     Path crewOnly = write("crew.fallsite.json", tree -> keepSources(tree, "crew"));
-    Said said = run(home(), "plan", crewOnly.toString());
+    Path json = folder.resolve("plan.json");
+    Said said = run(home(), "plan", crewOnly.toString(), "--json", json.toString());
     assertThat(said.status).isEqualTo(3);
-    assertThat(said.out).contains("Nothing on this site is workable.");
+    String method = new ObjectMapper().readTree(json.toFile()).path("not_by_pulling").asText();
+    assertThat(method).startsWith("Pulling is not the method here").contains("crane");
+    assertThat(said.out).contains("Nothing on this site is workable.").contains(method);
   }
 
   @Test
@@ -104,7 +109,7 @@ class FallwrightTest {
             });
     Said said = run(home(), "plan", blank.toString());
     assertThat(said.status).isEqualTo(3);
-    assertThat(said.out).contains("Cannot judge yet.");
+    assertThat(said.out).contains("Cannot judge yet.").doesNotContain("Pulling is not the method");
   }
 
   @Test

@@ -61,6 +61,28 @@ public record TapedHeight(double distanceM, Reading top, Reading base) {
   }
 
   /**
+   * Height of the tip above the base [m] of a tree that leans square to the view. Its tip is
+   * farther off than its stump: H − e = tan θ_top·√(d² + (H·tan λ)²), solved for H.
+   *
+   * @param leanDeg its lean, either way [degrees]
+   */
+  public double heightSquareToLeanM(double leanDeg) {
+    double up = top.tangent();
+    double e = eyeM();
+    double aside =
+        up * Math.tan(Math.toRadians(Range.check("lean_deg", leanDeg, -45, 45, "degrees")));
+    double a = 1 - aside * aside;
+    double root = e * e - a * (e * e - up * up * distanceM * distanceM);
+    if (a <= 0) {
+      throw new IllegalArgumentException(
+          "lean_deg is "
+              + leanDeg
+              + " degrees; seen from there no tree of that lean gives these readings");
+    }
+    return (e + Math.signum(up) * Math.sqrt(root)) / a;
+  }
+
+  /**
    * Height that would be read [m] for a tree of that height.
    *
    * @param heightM height of the tip above the base [m]

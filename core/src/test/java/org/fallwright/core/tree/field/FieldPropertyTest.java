@@ -53,6 +53,26 @@ class FieldPropertyTest {
     }
   }
 
+  /** A tree set up with its tip aside, read from its true place, gets its height back. */
+  @ParameterizedTest
+  @ValueSource(longs = {1, 2, 3})
+  void aTipAsideIsReckonedWith(long seed) {
+    Random r = new Random(seed);
+    for (int i = 0; i < 100; i++) {
+      double height = in(r, 5, 40);
+      double lean = in(r, -20, 20);
+      double d = in(r, height, 2 * height);
+      double eye = in(r, -3, height + 5);
+      double off = Math.hypot(d, height * Math.tan(Math.toRadians(lean)));
+      TapedHeight taped =
+          new TapedHeight(
+              d, Reading.percent(100 * (height - eye) / off), Reading.percent(-100 * eye / d));
+      assertThat(taped.heightSquareToLeanM(lean))
+          .as("seed %d, lean %s", seed, lean)
+          .isCloseTo(height, within(1e-9 * height));
+    }
+  }
+
   /** Two views of any tree from any two sides give its lean back; turning all turns the lean. */
   @ParameterizedTest
   @ValueSource(longs = {1, 2, 3})
