@@ -17,6 +17,7 @@ import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Set;
 import java.util.regex.Pattern;
+import org.fallwright.core.pull.HaulLine;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullRequest;
 import org.fallwright.core.pull.PullSource;
@@ -202,16 +203,6 @@ class PlanJsonTest {
     assertThat(schema().validate(future.toString(), InputFormat.JSON)).hasSize(1);
   }
 
-  @Test
-  void whatIsSaidOfTheMethodStandsInTheHead() throws IOException {
-    assertThat(doc.path("not_by_pulling").isNull()).isTrue();
-    PlanJson.Header header =
-        new PlanJson.Header("9.9.9", List.of(), List.of(), "Pulling is not the method here.");
-    JsonNode told = read(PlanJson.write(site(), plan(), header));
-    assertThat(told.path("not_by_pulling").asText()).isEqualTo("Pulling is not the method here.");
-    assertThat(schema().validate(told.toString(), InputFormat.JSON)).isEmpty();
-  }
-
   private static Schema schema() throws IOException {
     try (InputStream in = PlanJson.class.getResourceAsStream("plan-1.schema.json")) {
       return SchemaRegistry.withDefaultDialect(SpecificationVersion.DRAFT_2020_12)
@@ -249,6 +240,11 @@ class PlanJsonTest {
     @Override
     public List<String> modes(ObjectNode parameters) {
       return List.of("2:1");
+    }
+
+    @Override
+    public HaulLine haulLine(ObjectNode parameters, String mode) {
+      return new HaulLine(2, 220_000, 60);
     }
 
     @Override

@@ -29,7 +29,7 @@ public final class NorthArrow {
       pen.stroke(new Line2D.Double(off(centre, m, -length * 0.4 * pen.unit()), tip), ink, 1, 3, 2);
       pen.stroke(pen.head(tip, m, 5), ink, 1);
       Point2D word = off(centre, m, (length * 0.75 + 2) * pen.unit());
-      double aside = (declinationDeg < 0 ? -1 : 1) * 16 * pen.unit();
+      double aside = (declinationDeg < 0 ? -1 : 1) * 25 * pen.unit();
       pen.textAround(
           Messages.text("plan.north.magnetic"),
           word.getX() - m.getY() * aside,
