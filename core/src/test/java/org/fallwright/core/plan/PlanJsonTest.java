@@ -203,6 +203,16 @@ class PlanJsonTest {
     assertThat(schema().validate(future.toString(), InputFormat.JSON)).hasSize(1);
   }
 
+  @Test
+  void whatIsSaidOfTheMethodStandsInTheHead() throws IOException {
+    assertThat(doc.path("not_by_pulling").isNull()).isTrue();
+    PlanJson.Header header =
+        new PlanJson.Header("9.9.9", List.of(), List.of(), "Pulling is not the method here.");
+    JsonNode told = read(PlanJson.write(site(), plan(), header));
+    assertThat(told.path("not_by_pulling").asText()).isEqualTo("Pulling is not the method here.");
+    assertThat(schema().validate(told.toString(), InputFormat.JSON)).isEmpty();
+  }
+
   private static Schema schema() throws IOException {
     try (InputStream in = PlanJson.class.getResourceAsStream("plan-1.schema.json")) {
       return SchemaRegistry.withDefaultDialect(SpecificationVersion.DRAFT_2020_12)
