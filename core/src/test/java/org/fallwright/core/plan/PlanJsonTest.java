@@ -208,7 +208,7 @@ class PlanJsonTest {
     assertThat(doc.path("not_by_pulling").isNull()).isTrue();
     PlanJson.Header header =
         new PlanJson.Header("9.9.9", List.of(), List.of(), "Pulling is not the method here.");
-    JsonNode told = read(PlanJson.write(site(), plan(), header));
+    JsonNode told = read(PlanJson.write(site, plan, header));
     assertThat(told.path("not_by_pulling").asText()).isEqualTo("Pulling is not the method here.");
     assertThat(schema().validate(told.toString(), InputFormat.JSON)).isEmpty();
   }
