@@ -310,6 +310,7 @@ public final class Judge {
                     p.name(),
                     t.workingN() * p.atPlan(),
                     r.source().highN() * p.holding(),
+                    r.ceiling().tensionN() * p.atPlan(),
                     p.strengthN(),
                     p.designFactor(),
                     p.lastFactor()))

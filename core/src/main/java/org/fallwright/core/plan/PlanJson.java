@@ -191,6 +191,7 @@ public final class PlanJson {
     o.put("part", l.part());
     number(o, "at_plan_N", l.atPlanN());
     number(o, "at_high_N", l.atHighN());
+    number(o, "at_ceiling_N", l.atCeilingN());
     number(o, "strength_N", l.strengthN());
     number(o, "design_factor", l.designFactor());
     number(o, "last_factor", l.lastFactor());

@@ -74,12 +74,14 @@ abstract sealed class Findings<T> extends AbstractTableModel {
     }
   }
 
-  /** Every part: its loads at plan and at the most the source can do, and its strength. */
+  /**
+   * Every part: its loads at plan, at the most the source can do and at the ceiling; its strength.
+   */
   static final class Loads extends Findings<PartLoad> {
     private final Amounts amounts;
 
     Loads(List<PartLoad> loads, Amounts amounts) {
-      super(loads, "part", "at-plan", "at-high", "strength");
+      super(loads, "part", "at-plan", "at-high", "at-ceiling", "strength");
       this.amounts = amounts;
     }
 
@@ -89,6 +91,7 @@ abstract sealed class Findings<T> extends AbstractTableModel {
         case 0 -> Way.name(p.part());
         case 1 -> amounts.forceNeeded(p.atPlanN());
         case 2 -> amounts.forceNeeded(p.atHighN());
+        case 3 -> amounts.forceNeeded(p.atCeilingN());
         default -> amounts.forceGiven(p.strengthN());
       };
     }

@@ -14,6 +14,7 @@ import static org.fallwright.ui.demo.DemoSite.tackle;
 import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import org.fallwright.core.plan.Judged;
+import org.fallwright.core.plan.PartLoad;
 import org.fallwright.core.plan.Setup;
 import org.fallwright.core.plan.Verdict;
 import org.junit.jupiter.api.Test;
@@ -159,6 +160,9 @@ class DemoRowsTest {
     assertThat(j.figures().pretensionTopN() / 1000).isCloseTo(9.59, within(0.2));
     assertThat(j.figures().startsItself()).isEqualTo("stops");
     assertThat(check(j, "anchor A1 at high").limit() / 1000).isCloseTo(24.9, within(0.1));
+    PartLoad stem =
+        j.loads().stream().filter(l -> l.part().equals("stem")).findFirst().orElseThrow();
+    assertThat(stem.atCeilingN()).isCloseTo(stem.strengthN() / stem.designFactor(), within(1.0));
     assertThat(j.notes()).anyMatch(n -> n.contains("a tenth of the diameter"));
   }
 

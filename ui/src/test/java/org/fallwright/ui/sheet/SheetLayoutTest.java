@@ -179,7 +179,9 @@ class SheetLayoutTest {
                     "A reason of many words. ".repeat(12))));
     List<PartLoad> loads =
         Collections.nCopies(
-            30, new PartLoad("part of a long name ".repeat(9), 120_000, 1_760_000, 1e6, 5, 1.5));
+            30,
+            new PartLoad(
+                "part of a long name ".repeat(9), 120_000, 1_760_000, 200_000, 1e6, 5, 1.5));
     Judged more =
         new Judged(
             j.setup(),
