@@ -67,7 +67,7 @@ public final class FindingsPanel extends JPanel {
     loads.setModel(new Findings.Loads(j == null ? List.of() : j.loads(), amounts));
     checks.getColumnModel().getColumn(0).setCellRenderer(new MarkCell(palette));
     widths(checks, 120, 74, 74, 56);
-    widths(loads, 110, 70, 70, 80);
+    widths(loads, 116, 72, 76, 76, 80);
     notes.setText(j == null ? "" : String.join("\n", j.notes()));
     if (row >= 0) {
       checks.setRowSelectionInterval(row, row);
