@@ -1,7 +1,6 @@
 package org.fallwright.core.advice;
 
 import java.util.List;
-import org.fallwright.core.plan.Setup;
 import org.fallwright.core.reference.SpeciesTable;
 import org.fallwright.core.site.Conditions;
 import org.fallwright.core.site.How;
@@ -11,37 +10,9 @@ import org.fallwright.core.site.SubjectTree;
 import org.fallwright.core.site.WeighedSection;
 import org.fallwright.core.tree.TreeFigures;
 
-/** Copies of a site or a setup with one thing changed. */
+/** Copies of a site with one thing changed. */
 final class Altered {
   private Altered() {}
-
-  /** The setup with another hinge thickness [m]. */
-  static Setup hinge(Setup s, double thicknessM) {
-    return new Setup(
-        s.layDeg(),
-        s.attachHeightM(),
-        thicknessM,
-        s.line(),
-        s.redirects(),
-        s.source(),
-        s.mode(),
-        s.place(),
-        s.driver());
-  }
-
-  /** The setup with the line at another height above the ground at the stump [m]. */
-  static Setup attach(Setup s, double heightM) {
-    return new Setup(
-        s.layDeg(),
-        heightM,
-        s.hingeThicknessM(),
-        s.line(),
-        s.redirects(),
-        s.source(),
-        s.mode(),
-        s.place(),
-        s.driver());
-  }
 
   /** The site with another gust [m/s]; how it was got stays. */
   static Site gust(Site s, double mps) {

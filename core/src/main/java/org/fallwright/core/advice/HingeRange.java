@@ -50,7 +50,7 @@ public record HingeRange(
             (int) Math.round(LEAST / STEP),
             (int) Math.floor(most / STEP),
             STRIDE,
-            t -> judge.judge(Altered.hinge(setup, t)));
+            t -> judge.judge(setup.withHinge(t)));
     Span workable = scan.run(setup.hingeThicknessM(), Verdict.WORKABLE).orElse(null);
     Span tight = scan.run(setup.hingeThicknessM(), Verdict.TIGHT).orElse(null);
     Judged best = workable == null ? scan.at(scan.best(setup.hingeThicknessM())) : null;

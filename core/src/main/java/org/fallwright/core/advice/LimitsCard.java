@@ -97,7 +97,7 @@ public record LimitsCard(List<Row> rows, String sentence) {
     for (double beside : BESIDE) {
       double height = setup.attachHeightM() + beside;
       if (beside == 0 || stem.takes(height)) {
-        Setup there = Altered.attach(setup, height);
+        Setup there = setup.withAttachHeight(height);
         List<Cell> cells = new ArrayList<>();
         judges.forEach((t, judge) -> cells.add(cell(t, judge.judge(there))));
         rows.add(new Row(height, cells));

@@ -66,7 +66,7 @@ public record LineHeightRange(
           null,
           "No height on this stem takes a line: " + stem.reason() + ".");
     }
-    Scan scan = new Scan(STEP, "m", from, to, 1, h -> judge.judge(Altered.attach(setup, h)));
+    Scan scan = new Scan(STEP, "m", from, to, 1, h -> judge.judge(setup.withAttachHeight(h)));
     int best = scan.best(setup.attachHeightM());
     Judged there = scan.at(best);
     Span workable = scan.around(best, Verdict.WORKABLE).orElse(null);

@@ -38,6 +38,18 @@ public record Setup(
         lay, attachHeightM, hingeThicknessM, line, redirects, source, mode, place, driver);
   }
 
+  /** The same with the line at another height above the ground at the stump [m]. */
+  public Setup withAttachHeight(double heightM) {
+    return new Setup(
+        layDeg, heightM, hingeThicknessM, line, redirects, source, mode, place, driver);
+  }
+
+  /** The same with a hinge of another thickness [m]. */
+  public Setup withHinge(double thicknessM) {
+    return new Setup(
+        layDeg, attachHeightM, thicknessM, line, redirects, source, mode, place, driver);
+  }
+
   /** The same with another line. */
   Setup withLine(String other) {
     return new Setup(

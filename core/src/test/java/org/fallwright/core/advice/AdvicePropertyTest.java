@@ -41,7 +41,7 @@ class AdvicePropertyTest {
   }
 
   private static Judged hinge(TinySite t, double thickness) {
-    return new Judge(t.site(), SteadyPull.ONLY).judge(Altered.hinge(t.direct(), thickness));
+    return new Judge(t.site(), SteadyPull.ONLY).judge(t.direct().withHinge(thickness));
   }
 
   private static Judged gust(TinySite t, double gust) {
@@ -99,7 +99,7 @@ class AdvicePropertyTest {
           Judge judge = judge(t);
           double before = 0;
           for (double thickness = 0.01; thickness <= 0.12; thickness += 0.005) {
-            Figures f = judge.judge(Altered.hinge(t.direct(), thickness)).figures();
+            Figures f = judge.judge(t.direct().withHinge(thickness)).figures();
             if (!Double.isNaN(f.pullNeededN())) {
               assertThat(f.pullNeededN())
                   .as("seed %d, %.3f m", seed, thickness)

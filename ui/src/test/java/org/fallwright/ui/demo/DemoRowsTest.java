@@ -258,8 +258,8 @@ class DemoRowsTest {
     DemoSite low =
         DEMO.with(
             s -> ((ArrayNode) s.get("offer").withArray("attach_heights_m")).removeAll().add(8.0));
-    tight(low, atHeight(ROW_4, 8), 1.03);
-    tight(low, atHeight(ROW_6, 8), 1.14);
+    tight(low, ROW_4.withAttachHeight(8), 1.03);
+    tight(low, ROW_6.withAttachHeight(8), 1.14);
   }
 
   @Test
@@ -293,8 +293,8 @@ class DemoRowsTest {
     DemoSite thick =
         DEMO.with(
             s -> ((ArrayNode) s.get("cut").withArray("hinge_thicknesses_m")).removeAll().add(0.06));
-    tight(thick, withHinge(ROW_4, 0.06), 1.13);
-    tight(thick, withHinge(ROW_6, 0.06), 1.24);
+    tight(thick, ROW_4.withHinge(0.06), 1.13);
+    tight(thick, ROW_6.withHinge(0.06), 1.24);
   }
 
   @Test
@@ -371,31 +371,5 @@ class DemoRowsTest {
     Judged j = site.judge(setup);
     is(j, Verdict.TIGHT);
     assertThat(j.figures().pullMargin()).isCloseTo(margin, within(0.006));
-  }
-
-  private static Setup atHeight(Setup s, double h) {
-    return new Setup(
-        s.layDeg(),
-        h,
-        s.hingeThicknessM(),
-        s.line(),
-        s.redirects(),
-        s.source(),
-        s.mode(),
-        s.place(),
-        s.driver());
-  }
-
-  private static Setup withHinge(Setup s, double t) {
-    return new Setup(
-        s.layDeg(),
-        s.attachHeightM(),
-        t,
-        s.line(),
-        s.redirects(),
-        s.source(),
-        s.mode(),
-        s.place(),
-        s.driver());
   }
 }

@@ -111,7 +111,7 @@ class WorksheetDemoTest {
                         units,
                         e.getValue(),
                         e.getKey().equals("hinge too strong")
-                            ? withHinge(DemoSite.ROW_6, 0.3)
+                            ? DemoSite.ROW_6.withHinge(0.3)
                             : DemoSite.ROW_6)));
   }
 
@@ -139,19 +139,6 @@ class WorksheetDemoTest {
 
   private static void cutThick(ObjectNode site, double thickness) {
     ((ObjectNode) site.get("cut")).putArray("hinge_thicknesses_m").add(thickness);
-  }
-
-  private static Setup withHinge(Setup s, double thickness) {
-    return new Setup(
-        s.layDeg(),
-        s.attachHeightM(),
-        thickness,
-        s.line(),
-        s.redirects(),
-        s.source(),
-        s.mode(),
-        s.place(),
-        s.driver());
   }
 
   private static Worksheet sheet(String units, Consumer<ObjectNode> change, Setup setup) {
