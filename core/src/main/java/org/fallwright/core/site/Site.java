@@ -39,7 +39,7 @@ public record Site(
     Conditions conditions,
     Offer offer) {
   /** The version written. */
-  public static final int VERSION = 1;
+  public static final int VERSION = 2;
 
   /** Units on screen and paper. */
   public enum Display {

@@ -69,7 +69,7 @@ public final class SiteFile {
       throw new SiteFileException(
           name + " is too large for a site file; at most " + LARGEST / 1_000_000 + " MB are read.");
     }
-    JsonNode root = Tree.parse(text(bytes, name), name);
+    JsonNode root = Migrations.toPresent(Tree.parse(text(bytes, name), name));
     return Binding.site(root, name);
   }
 

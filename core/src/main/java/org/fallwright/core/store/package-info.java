@@ -3,7 +3,7 @@
  * a file cannot be trusted.
  *
  * <p>Read {@link org.fallwright.core.store.SiteFile} first; the form itself is written down in
- * {@code core/site-file.md} and in {@code fallsite-1.schema.json} beside this package. Names in the
+ * {@code core/site-file.md} and in {@code fallsite-2.schema.json} beside this package. Names in the
  * file end in their unit, as the components of the site's records do; nothing is converted here.
  *
  * <p>A file is taken whole or refused: no value is defaulted, clipped, rounded or coerced. Ranges

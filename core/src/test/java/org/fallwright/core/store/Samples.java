@@ -13,8 +13,13 @@ final class Samples {
   private Samples() {}
 
   /** The frozen file of form 1; it must never be changed. */
-  static String frozen() throws IOException {
+  static String formOne() throws IOException {
     return resource("frozen-1.fallsite.json");
+  }
+
+  /** A file of the present form with something of everything. */
+  static String present() throws IOException {
+    return resource("sample-2.fallsite.json");
   }
 
   static String demo() throws IOException {

@@ -39,8 +39,8 @@ class SiteFileFaultsTest {
   @MethodSource("faults")
   void isRefusedInOneSentence(String stands, String instead, String said) throws IOException {
     String bad =
-        Samples.frozen().replaceFirst(Pattern.quote(stands), Matcher.quoteReplacement(instead));
-    assertThat(bad).as("the fault must change the sample").isNotEqualTo(Samples.frozen());
+        Samples.present().replaceFirst(Pattern.quote(stands), Matcher.quoteReplacement(instead));
+    assertThat(bad).as("the fault must change the sample").isNotEqualTo(Samples.present());
 
     assertThatThrownBy(() -> SiteFile.read(Samples.utf8(bad), "job.json"))
         .isInstanceOf(SiteFileException.class)
@@ -53,7 +53,7 @@ class SiteFileFaultsTest {
   /** A file that breaks off anywhere is refused, and never with anything but the one sentence. */
   @Test
   void everyTruncationIsRefused() throws IOException {
-    String whole = Samples.frozen().stripTrailing();
+    String whole = Samples.present().stripTrailing();
     for (int length : List.of(0, 1, 2, 10, whole.length() / 2, whole.length() - 1)) {
       assertThatThrownBy(() -> SiteFile.read(Samples.utf8(whole.substring(0, length)), "job.json"))
           .as("cut to %d characters", length)

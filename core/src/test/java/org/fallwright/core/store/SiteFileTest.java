@@ -28,9 +28,15 @@ class SiteFileTest {
   @TempDir Path folder;
 
   @Test
-  void theFrozenSampleOfFormOneReads() throws IOException {
-    Site site = SiteFile.read(Samples.utf8(Samples.frozen()), "frozen");
-    assertThat(site.version()).isEqualTo(1);
+  void theFrozenSampleOfFormOneReadsAsThePresentForm() throws IOException {
+    assertThat(SiteFile.read(Samples.utf8(Samples.formOne()), "one"))
+        .isEqualTo(SiteFile.read(Samples.utf8(Samples.present()), "two"));
+  }
+
+  @Test
+  void theSampleReads() throws IOException {
+    Site site = SiteFile.read(Samples.utf8(Samples.present()), "frozen");
+    assertThat(site.version()).isEqualTo(2);
     assertThat(site.tree().dbhM().how()).isEqualTo(How.GUESSED);
     assertThat(site.tree().massKg()).isNull();
     assertThat(site.tree().sections()).extracting(s -> s.midHeightM()).containsExactly(4.5, 11.0);
@@ -55,7 +61,7 @@ class SiteFileTest {
 
   @Test
   void whatWasReadIsWrittenAgainByteForByte() throws IOException {
-    for (String text : List.of(Samples.frozen(), Samples.demo())) {
+    for (String text : List.of(Samples.present(), Samples.demo())) {
       Site site = SiteFile.read(Samples.utf8(text), "sample");
       assertThat(new String(SiteFile.bytes(site), StandardCharsets.UTF_8)).isEqualTo(text);
     }
@@ -64,7 +70,7 @@ class SiteFileTest {
   @Test
   void parametersOfAnUnknownPluginAreKeptWholeAndInOrder() throws IOException {
     ObjectNode kept =
-        SiteFile.read(Samples.utf8(Samples.frozen()), "frozen")
+        SiteFile.read(Samples.utf8(Samples.present()), "frozen")
             .source("kite")
             .orElseThrow()
             .parameters();
@@ -84,7 +90,7 @@ class SiteFileTest {
   void orderOfFieldsAndSpacesDoNotMatter() throws IOException {
     String demo = Samples.demo();
     String turned =
-        demo.replaceFirst("\"version\": 1,", "")
+        demo.replaceFirst("\"version\": 2,", "")
             .replaceFirst("\\}\\s*$", ",\n\n\"version\" : 1 }\r\n")
             .replace(
                 "\"how\": \"measured\",\n      \"plus_minus\": null",
@@ -97,7 +103,7 @@ class SiteFileTest {
   @Test
   void otherEncodingsAreRefused() throws IOException {
     refused(
-        Samples.frozen().getBytes(StandardCharsets.ISO_8859_1),
+        Samples.present().getBytes(StandardCharsets.ISO_8859_1),
         " is not UTF-8 text; a site file must be.");
     refused(
         Samples.demo().getBytes(StandardCharsets.UTF_16),
@@ -114,7 +120,7 @@ class SiteFileTest {
     refused(Samples.utf8("[1]"), " holds a list of 1; a site file holds one JSON object.");
     refused(Samples.utf8("null"), " holds null; a site file holds one JSON object.");
     refused(Samples.utf8("{}"), ": version is missing; it must be a whole number, at least 1.");
-    refused(Samples.utf8("{\"version\": 1}"), ": name is missing; it must be a text in quotes.");
+    refused(Samples.utf8("{\"version\": 2}"), ": name is missing; it must be a text in quotes.");
     assertThatThrownBy(() -> SiteFile.read(Samples.utf8("[".repeat(2000)), "job.json"))
         .isInstanceOf(SiteFileException.class)
         .message()
@@ -127,7 +133,7 @@ class SiteFileTest {
   void aNewerFormIsRefusedBeforeItsFieldsAreLookedAt() {
     refused(
         Samples.utf8("{\"moon\": NaN, \"version\": 7}"),
-        " was written by a newer Fallwright (form 7); this one reads up to form 1.");
+        " was written by a newer Fallwright (form 7); this one reads up to form 2.");
   }
 
   @Test
@@ -154,7 +160,7 @@ class SiteFileTest {
   void writingReplacesTheOldFileAndLeavesNothingBeside() throws IOException {
     Path file = folder.resolve("job" + SiteFile.EXTENSION);
     Site demo = SiteFile.read(Samples.utf8(Samples.demo()), "demo");
-    SiteFile.write(SiteFile.read(Samples.utf8(Samples.frozen()), "frozen"), file);
+    SiteFile.write(SiteFile.read(Samples.utf8(Samples.present()), "frozen"), file);
     SiteFile.write(demo, file);
     assertThat(SiteFile.read(file)).isEqualTo(demo);
     assertThat(Files.readAllBytes(file)).isEqualTo(SiteFile.bytes(demo));
