@@ -5,12 +5,15 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Set;
+import org.fallwright.core.pull.Parameter;
+import org.fallwright.core.pull.Parameter.Choice;
 import org.fallwright.core.pull.PullOffer;
+import org.fallwright.core.pull.PullOffer.Limit;
+import org.fallwright.core.pull.PullOffer.Standing;
 import org.fallwright.core.pull.PullRequest;
 import org.fallwright.core.pull.SourceDescription;
-import org.fallwright.core.pull.SourceDescription.Parameter;
 import org.fallwright.core.pull.SourceDescription.PlaceKind;
-import org.fallwright.core.pull.SourceDescription.ValueKind;
+import org.fallwright.core.pull.Wording;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.plugins.api.ParameterReader;
 import org.fallwright.plugins.api.PullSourceExtension;
@@ -48,29 +51,96 @@ public final class Winch implements PullSourceExtension {
   private static final SourceDescription DESCRIPTION =
       new SourceDescription(
           "winch",
-          "winch",
+          new Wording("winch", "malacate (winche)"),
           Set.of(PlaceKind.ANCHOR),
           false,
           List.of(
-              new Parameter(
+              Parameter.choice(
                   "kind",
-                  "Kind",
-                  ValueKind.CHOICE,
-                  "",
-                  0,
-                  0,
-                  List.of(THROUGH_ROPE, HAND_DRUM, POWERED_DRUM)),
-              Parameter.number("rated_N", "Rated pull, on the bare drum", "N", 500, 1e6),
+                  new Wording("Kind", "Tipo"),
+                  new Wording(
+                      "How it takes in its wire and who drives it.",
+                      "Cómo recoge su cable de acero y quién lo mueve."),
+                  Choice.of(
+                      THROUGH_ROPE,
+                      "by hand, the wire runs through",
+                      "manual de palanca, el cable de acero pasa por él"),
+                  Choice.of(HAND_DRUM, "by hand, on a drum", "manual, de tambor"),
+                  Choice.of(POWERED_DRUM, "powered, on a drum", "de motor, de tambor")),
               Parameter.number(
-                  "overload_N", "Overload device acts at (if there is one)", "N", 500, 3e6),
-              Parameter.number("wire_m", "Wire on it", "m", 0, 500),
-              Parameter.number("stroke_m", "Wire a stroke (by hand)", "m", 0.001, 1),
-              Parameter.number("drum_m", "Bare drum, diameter", "m", 0.02, 1),
-              Parameter.number("rope_m", "Wire, diameter (drum)", "m", 0.002, 0.06),
-              new Parameter(
-                  "layer", "Layers on a full drum", ValueKind.WHOLE_NUMBER, "", 1, 20, List.of()),
+                  "rated_N",
+                  "N",
+                  500,
+                  1e6,
+                  new Wording("Rated pull, on the bare drum", "Tiro marcado, con el tambor vacío"),
+                  new Wording(
+                      "As stamped on it; of a drum winch with one layer of wire.",
+                      "El que lleva marcado; si es de tambor, con una sola capa de cable.")),
               Parameter.number(
-                  "line_speed_mps", "Line speed on the bare drum (powered)", "m/s", 0.001, 3)));
+                      "overload_N",
+                      "N",
+                      500,
+                      3e6,
+                      new Wording("Overload device acts at", "Seguro de sobrecarga: actúa a"),
+                      new Wording(
+                          "Where a shear pin, clutch or valve gives way; leave it out where there is"
+                              + " none.",
+                          "Donde cede el pasador, embrague o válvula; déjelo vacío si no tiene."))
+                  .mayBeLeftOut(),
+              Parameter.number(
+                  "wire_m",
+                  "m",
+                  0,
+                  500,
+                  new Wording("Wire on it", "Cable de acero que tiene"),
+                  new Wording(
+                      "Wire of its own that can be drawn out towards the tree.",
+                      "Cable propio que se puede sacar hacia el árbol.")),
+              Parameter.number(
+                      "stroke_m",
+                      "m",
+                      0.001,
+                      1,
+                      new Wording("Wire a stroke", "Cable por palancada"),
+                      new Wording(
+                          "Wire that one stroke of the lever, or one turn of the crank, takes in.",
+                          "Cable que recoge una palancada o una vuelta de la manivela."))
+                  .onlyWhere("kind", THROUGH_ROPE, HAND_DRUM),
+              Parameter.number(
+                      "drum_m",
+                      "m",
+                      0.02,
+                      1,
+                      new Wording("Bare drum, diameter", "Diámetro del tambor vacío"),
+                      new Wording("Without any wire on it.", "Sin cable encima."))
+                  .onlyWhere("kind", HAND_DRUM, POWERED_DRUM),
+              Parameter.number(
+                      "rope_m",
+                      "m",
+                      0.002,
+                      0.06,
+                      new Wording("Wire, diameter", "Diámetro del cable de acero"),
+                      new Wording("Of the wire on the drum.", "Del cable que va en el tambor."))
+                  .onlyWhere("kind", HAND_DRUM, POWERED_DRUM),
+              Parameter.wholeNumber(
+                      "layer",
+                      1,
+                      20,
+                      new Wording("Layers on a full drum", "Capas con el tambor lleno"),
+                      new Wording(
+                          "Each layer of wire makes the drum thicker and the pull less.",
+                          "Cada capa de cable hace más grueso el tambor y quita tiro."))
+                  .onlyWhere("kind", HAND_DRUM, POWERED_DRUM),
+              Parameter.number(
+                      "line_speed_mps",
+                      "m/s",
+                      0.001,
+                      3,
+                      new Wording("Line speed on the bare drum", "Velocidad con el tambor vacío"),
+                      new Wording(
+                          "Wire taken in a second, with one layer.",
+                          "Cable que recoge por segundo, con una capa."))
+                  .onlyWhere("kind", POWERED_DRUM)));
 
   @Override
   public SourceDescription describe() {
@@ -94,24 +164,35 @@ public final class Winch implements PullSourceExtension {
     double ratedN = winch.ratedN;
     double lowN = winch.drum == null ? ratedN : winch.drum.pullN(ratedN, winch.layers);
     double settingN = winch.overloadN == null ? STALL * ratedN : winch.overloadN;
-    String layers =
-        winch.drum == null || winch.layers == 1 ? "" : " on layer " + winch.layers + " of its drum";
-    return new PullOffer(
-        lowN,
-        settingN * DEVICE_SPREAD,
-        lowN,
-        true,
-        "rated pull of the winch" + layers,
-        1,
-        powered,
-        powered ? STOP_S * winch.drum.speedMps(winch.bareSpeedMps, winch.layers) : winch.strokeM,
-        winch.wireM,
-        1,
-        1,
-        1,
-        List.of(),
-        List.of(),
-        notes(winch, request.takeUpM() * request.travelRatio()));
+    return PullOffer.giving(lowN, settingN * DEVICE_SPREAD, limit(winch))
+        .holds(lowN, true)
+        .powered(powered)
+        .overrun(
+            powered
+                ? STOP_S * winch.drum.speedMps(winch.bareSpeedMps, winch.layers)
+                : winch.strokeM)
+        .wire(winch.wireM)
+        .people(Standing.one("works the winch", "maneja el malacate"))
+        .notes(notes(winch, request.pull().lineInM()))
+        .done();
+  }
+
+  private static Limit limit(Parameters winch) {
+    if (winch.drum == null || winch.layers == 1) {
+      return new Limit(
+          new Wording("rated pull of the winch", "tiro marcado del malacate"),
+          new Wording(
+              "The winch is rated for no more than this.", "El malacate no está hecho para más."));
+    }
+    return new Limit(
+        new Wording(
+            "rated pull of the winch on layer " + winch.layers + " of its drum",
+            "tiro marcado del malacate en la capa " + winch.layers + " del tambor"),
+        new Wording(
+            "The wire already on the drum makes it thicker, so the winch pulls less than its plate"
+                + " says.",
+            "El cable que ya está en el tambor lo hace más grueso: el malacate jala menos de lo que"
+                + " dice su placa."));
   }
 
   private static List<String> notes(Parameters winch, double travelM) {
@@ -151,15 +232,8 @@ public final class Winch implements PullSourceExtension {
       String kind = reader.choice("kind");
       boolean powered = kind.equals(POWERED_DRUM);
       boolean onDrum = !kind.equals(THROUGH_ROPE);
-      String said = "the kind \"" + kind + "\"";
-      if (!onDrum) {
-        reader.refuse("drum_m", said);
-        reader.refuse("rope_m", said);
-        reader.refuse("layer", said);
-      }
-      reader.refuse(powered ? "stroke_m" : "line_speed_mps", said);
       double ratedN = reader.number("rated_N");
-      Double overloadN = reader.isStated("overload_N") ? reader.number("overload_N") : null;
+      Double overloadN = reader.numberOrNull("overload_N");
       if (overloadN != null && overloadN < ratedN) {
         throw new IllegalArgumentException(
             "overload_N is " + overloadN + " N; it must be at least rated_N, " + ratedN + " N");
