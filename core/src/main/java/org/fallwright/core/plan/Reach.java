@@ -1,6 +1,7 @@
 package org.fallwright.core.plan;
 
 import java.util.List;
+import java.util.function.DoubleUnaryOperator;
 import org.fallwright.core.line.Point3;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullRequest;
@@ -52,6 +53,25 @@ final class Reach {
                 null));
     return source.offer(
         request(site, gear, way.mode(), way.place(), route.points(), pulled, 1, haul));
+  }
+
+  /**
+   * What the source of a direct way gives at its least by the rise of its line [rad to N], pulling
+   * straight ahead on the ground of its own place.
+   */
+  static DoubleUnaryOperator lowByRise(Site site, Setup way, Pulled pulled, PullSource source) {
+    Gear.Source gear = site.source(way.source()).orElseThrow();
+    Double heading = site.spot(way.place()).map(Spot::headingDeg).orElse(null);
+    double ahead = heading == null ? 0 : Math.toRadians(heading);
+    return rise -> {
+      Point3 tree =
+          new Point3(
+              -Math.sin(ahead) * Math.cos(rise), -Math.cos(ahead) * Math.cos(rise), Math.sin(rise));
+      List<Point3> line = List.of(tree, new Point3(0, 0, 0));
+      return source
+          .offer(request(site, gear, way.mode(), way.place(), line, pulled, 1, null))
+          .lowN();
+    };
   }
 
   private static PullRequest request(
