@@ -68,7 +68,8 @@ class StandCommandTest {
     Path lines = folder.resolve("m.geojson");
     Path png = folder.resolve("m.png");
     for (Path out : List.of(asc, lines, png)) {
-      Said said = run("stand", site.toString(), "--setup", "1", "--lay", "7", "--out", out.toString());
+      Said said =
+          run("stand", site.toString(), "--setup", "1", "--lay", "7", "--out", out.toString());
       assertThat(said.err).isEmpty();
       assertThat(said.status).isZero();
     }
