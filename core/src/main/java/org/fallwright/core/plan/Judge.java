@@ -17,6 +17,7 @@ import org.fallwright.core.site.Gear;
 import org.fallwright.core.site.Place;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.statics.Part;
+import org.fallwright.core.statics.PlanField;
 import org.fallwright.core.statics.Ratios;
 import org.fallwright.core.statics.SourceAtTree;
 import org.fallwright.core.statics.Statics;
@@ -124,6 +125,39 @@ public final class Judge {
   public List<Part> parts(Setup setup) {
     Ratios ratios = reckon(setup).ratios();
     return ratios == null ? List.of() : ratios.parts();
+  }
+
+  /**
+   * Where the source of a direct setup could stand instead.
+   *
+   * @throws IllegalArgumentException one sentence, where the setup is none that can be moved about
+   */
+  StandingGround standingGround(Setup setup) {
+    if (!setup.redirects().isEmpty() || setup.driver() != null) {
+      throw new IllegalArgumentException(
+          "a margin map is of a source that pulls direct; this setup leads its line over an anchor");
+    }
+    if (site.spot(setup.place()).isEmpty()) {
+      throw new IllegalArgumentException(
+          "a margin map is of a source that stands on a spot; "
+              + setup.place()
+              + " is an anchor, and its places are the anchors");
+    }
+    PullSource source = source(setup);
+    Route route = Route.of(site, setup, source, null);
+    Statics statics = statics(setup, route);
+    Reach.Pulled pulled = Reach.Pulled.of(statics.treeSide());
+    return new StandingGround(
+        site,
+        rules,
+        knowledge,
+        setup,
+        new PlanField(subject.pull(setup, route)),
+        Reach.lowByRise(site, setup, route, pulled, source),
+        route,
+        landing.widest(setup.layDeg()),
+        GearParts.line(site, setup).lengthM()
+            + Reach.of(site, setup, route, pulled, source, null).wireM());
   }
 
   private PullSource source(Setup setup) {

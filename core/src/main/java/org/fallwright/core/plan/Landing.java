@@ -150,15 +150,22 @@ final class Landing {
     return angles.computeIfAbsent(path, p -> new Angles(Bight.along(p), new Recoil(p)));
   }
 
+  /** The footprint of a lay were the hinge not to steer at all. */
+  FallFootprint widest(double layDeg) {
+    return footprint(new Fall(layDeg, Double.POSITIVE_INFINITY));
+  }
+
+  private FallFootprint footprint(Fall fall) {
+    return FallFootprint.of(
+        outline,
+        site.tree().stump().at(),
+        fall.layDeg(),
+        fall.steeringShare(),
+        FallFootprint.slideM(site.tree().heightM().value(), ground.alongDeg(fall.layDeg()), null));
+  }
+
   private Landed land(Fall fall) {
-    FallFootprint f =
-        FallFootprint.of(
-            outline,
-            site.tree().stump().at(),
-            fall.layDeg(),
-            fall.steeringShare(),
-            FallFootprint.slideM(
-                site.tree().heightM().value(), ground.alongDeg(fall.layDeg()), null));
+    FallFootprint f = footprint(fall);
     return new Landed(
         f,
         targets.clearances(f),

@@ -1,6 +1,7 @@
 package org.fallwright.core.plan;
 
 import java.util.List;
+import java.util.function.DoubleUnaryOperator;
 import org.fallwright.core.line.Point3;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullRequest;
@@ -53,24 +54,48 @@ final class Reach {
                   null,
                   null));
     }
+    return source.offer(request(site, way, route, pulled, haul));
+  }
+
+  private static PullRequest request(
+      Site site, Setup way, Route route, Pulled pulled, PullOffer haul) {
+    Gear.Source gear = site.source(way.source()).orElseThrow();
     Gear.Line line = GearParts.line(site, way);
-    return source.offer(
-        new PullRequest(
-            gear.parameters(),
-            way.mode(),
-            stand(site, way.place(), route.points(), route.line()),
-            new Pull(
-                pulled.stiffnessNPerM(),
-                1,
-                pulled.takeUpM(),
-                pulled.workingN() * route.loads().sourceEndPerTree()),
-            new Line(
-                line.wireRope(),
-                line.diameterM(),
-                line.breakingLoadN(),
-                line.lengthM(),
-                route.loads().lengthM()),
-            haul));
+    return new PullRequest(
+        gear.parameters(),
+        way.mode(),
+        stand(site, way.place(), route.points(), route.line()),
+        new Pull(
+            pulled.stiffnessNPerM(),
+            1,
+            pulled.takeUpM(),
+            pulled.workingN() * route.loads().sourceEndPerTree()),
+        new Line(
+            line.wireRope(),
+            line.diameterM(),
+            line.breakingLoadN(),
+            line.lengthM(),
+            route.loads().lengthM()),
+        haul);
+  }
+
+  /**
+   * What the source of a direct way gives at its least by the rise of its line [rad to N], pulling
+   * straight ahead on the ground of its own place.
+   */
+  static DoubleUnaryOperator lowByRise(
+      Site site, Setup way, Route route, Pulled pulled, PullSource source) {
+    PullRequest here = request(site, way, route, pulled, null);
+    Stand at = here.stand();
+    return rise -> {
+      Stand there =
+          new Stand(at.ground(), rise, at.uphillRad(), 0.0, at.heightM(), at.legM(), at.runOutM());
+      return source
+          .offer(
+              new PullRequest(
+                  here.parameters(), here.mode(), there, here.pull(), here.line(), null))
+          .lowN();
+    };
   }
 
   private static Stand stand(Site site, String place, List<Point3> points, List<LinePoint> onSite) {

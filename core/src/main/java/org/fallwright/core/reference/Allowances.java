@@ -168,6 +168,12 @@ public final class Allowances {
           65,
           "",
           "equally spaced angles looked at over the movement, both ends included");
+  public static final Figure STANDING_ROOM =
+      allowance(
+          "standing-room",
+          1.5,
+          "m",
+          "room beside a thing or an anchor within which nobody and nothing is set to pull");
   public static final Figure SLACK =
       allowance(
           "slack", 0.3, "m", "slack and sag to take in before the line pulls, unless entered");

@@ -58,6 +58,14 @@ final class OneAtATime {
     }
   }
 
+  /** The tree with each input that has a spread at its low and its high end. */
+  List<Posture[]> ends() {
+    return IntStream.range(0, Draw.COUNT)
+        .filter(i -> low[i] != mean || high[i] != mean)
+        .mapToObj(i -> new Posture[] {low[i], high[i]})
+        .toList();
+  }
+
   double p95(ToDoubleFunction<Posture> f) {
     return edge(f, 1);
   }
