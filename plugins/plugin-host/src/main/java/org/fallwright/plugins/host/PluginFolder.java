@@ -7,6 +7,7 @@ import java.io.InputStreamReader;
 import java.io.Reader;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.Duration;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
@@ -16,6 +17,7 @@ import java.util.jar.JarEntry;
 import java.util.jar.JarFile;
 import org.fallwright.core.pull.PullSource;
 import org.fallwright.core.pull.PullSources;
+import org.fallwright.core.pull.SourceFault;
 import org.fallwright.plugins.api.PullSourceExtension;
 import org.pf4j.PluginState;
 import org.pf4j.PluginWrapper;
@@ -33,9 +35,11 @@ public final class PluginFolder implements PullSources, AutoCloseable {
   private final List<PullSource> sources = new ArrayList<>();
   private final List<LoadedPlugin> loaded = new ArrayList<>();
   private final List<NotLoaded> notLoaded = new ArrayList<>();
+  private final Watch watch;
   private final ReasonedManager manager;
 
-  private PluginFolder(Path folder, String hostVersion) {
+  private PluginFolder(Path folder, String hostVersion, Duration limit) {
+    watch = new Watch(limit);
     if (!Files.isDirectory(folder)) {
       notLoaded.add(
           new NotLoaded(
@@ -50,7 +54,7 @@ public final class PluginFolder implements PullSources, AutoCloseable {
       manager = null;
       return;
     }
-    manager = new ReasonedManager(folder, hostVersion);
+    manager = new ReasonedManager(folder, hostVersion, watch);
     manager.loadPlugins();
     manager.startPlugins();
     for (PluginWrapper plugin : manager.inOrder()) {
@@ -70,7 +74,12 @@ public final class PluginFolder implements PullSources, AutoCloseable {
    *     requirement is held
    */
   public static PluginFolder open(Path folder, String hostVersion) {
-    return new PluginFolder(folder, hostVersion);
+    return new PluginFolder(folder, hostVersion, Watch.USUAL);
+  }
+
+  /** The same with another limit of what a call may take. */
+  static PluginFolder open(Path folder, String hostVersion, Duration limit) {
+    return new PluginFolder(folder, hostVersion, limit);
   }
 
   @Override
@@ -91,6 +100,7 @@ public final class PluginFolder implements PullSources, AutoCloseable {
   /** Lets go of the archives; the sources must not be asked afterwards. */
   @Override
   public void close() {
+    watch.close();
     if (manager != null) {
       manager.closeArchives();
     }
@@ -111,7 +121,8 @@ public final class PluginFolder implements PullSources, AutoCloseable {
     for (String className : classNames) {
       GuardedSource source;
       try {
-        source = new GuardedSource(plugin.getPluginId(), extension(plugin, className));
+        PullSourceExtension made = watch.within(() -> extension(plugin, className));
+        source = new GuardedSource(plugin.getPluginId(), made, watch);
       } catch (SourceFault fault) {
         manager.refuse(plugin, fault.getMessage());
         continue;
@@ -136,6 +147,7 @@ public final class PluginFolder implements PullSources, AutoCloseable {
               plugin.getPluginId(),
               plugin.getDescriptor().getVersion(),
               provider == null ? "" : provider,
+              PullSource.CONTRACT,
               ids));
     }
   }
