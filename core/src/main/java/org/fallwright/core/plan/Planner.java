@@ -91,23 +91,27 @@ public final class Planner {
     }
   }
 
-  private static Tally tally(
+  private Tally tally(
       Judge judge, Setup way, List<Double> lays, LeftOut out, BooleanSupplier cancelled) {
-    Tally tally = new Tally();
     try {
-      for (double lay : lays) {
-        if (cancelled.getAsBoolean()) {
-          throw new java.util.concurrent.CancellationException();
-        }
-        if (out.uses(way)) {
-          break;
-        }
-        tally.add(judge.quick(way.withLay(lay)));
-      }
+      return sources.asking(
+          () -> {
+            Tally tally = new Tally();
+            for (double lay : lays) {
+              if (cancelled.getAsBoolean()) {
+                throw new java.util.concurrent.CancellationException();
+              }
+              if (out.uses(way)) {
+                break;
+              }
+              tally.add(judge.quick(way.withLay(lay)));
+            }
+            return tally;
+          });
     } catch (SourceFault fault) {
       out.add(fault);
+      return new Tally();
     }
-    return tally;
   }
 
   private static Plan gathered(

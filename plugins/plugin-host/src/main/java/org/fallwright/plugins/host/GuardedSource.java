@@ -159,12 +159,11 @@ final class GuardedSource implements PullSource {
       throw hung;
     }
     try {
-      return watch.within(call);
+      return watch.within(call, () -> hang(what));
     } catch (Watch.Stopped stopped) {
       throw stopped;
-    } catch (Watch.TooLong e) {
-      hung = failed(what, e);
-      throw hung;
+    } catch (SourceFault fault) {
+      throw fault == hung ? fault : failed(what, fault);
     } catch (IllegalArgumentException e) {
       if (isAnswerOutOfRange(e)) {
         throw nonsense("gives an impossible pull: " + Plainly.said(e), e);
@@ -176,6 +175,11 @@ final class GuardedSource implements PullSource {
     } catch (Throwable thrown) { // a plugin may throw anything, linkage errors included
       throw failed(what, thrown);
     }
+  }
+
+  private SourceFault hang(String what) {
+    hung = failed(what, watch.tooLong());
+    return hung;
   }
 
   /**

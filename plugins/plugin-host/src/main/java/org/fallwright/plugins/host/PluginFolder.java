@@ -13,6 +13,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.function.Supplier;
 import java.util.jar.JarEntry;
 import java.util.jar.JarFile;
 import org.fallwright.core.pull.PullSource;
@@ -85,6 +86,18 @@ public final class PluginFolder implements PullSources, AutoCloseable {
   @Override
   public List<PullSource> all() {
     return List.copyOf(sources);
+  }
+
+  /** Done on a thread that can be given up where a plugin hangs. */
+  @Override
+  public <T> T asking(Supplier<T> work) {
+    try {
+      return watch.piece(work::get);
+    } catch (RuntimeException | Error thrown) {
+      throw thrown;
+    } catch (Throwable thrown) { // a supplier throws nothing else
+      throw new IllegalStateException(thrown);
+    }
   }
 
   /** The plugins in use, by file name. */

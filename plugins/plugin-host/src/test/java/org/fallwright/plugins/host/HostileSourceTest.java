@@ -83,6 +83,49 @@ class HostileSourceTest {
   }
 
   @Test
+  void aPieceOfWorkWithManyCallsIsGivenUpOnlyWhereOneOfThemHangs() throws IOException {
+    PullSource source =
+        loaded(
+            Archive.of("x")
+                .source(
+                    "x",
+                    "sample.Fine",
+                    "static int n;",
+                    "if (n++ == 500) { " + HANG + "}" + " return offer(1);"));
+    PullSource good = opened.byId("good").orElseThrow();
+    String done =
+        opened.asking(
+            () -> {
+              sleep(LIMIT.multipliedBy(2)); // long, but in no plugin
+              return "low " + good.offer(request()).lowN();
+            });
+    assertThat(done).isEqualTo("low 1.0");
+    assertThatExceptionOfType(SourceFault.class)
+        .isThrownBy(
+            () ->
+                opened.asking(
+                    () -> {
+                      double last = 0;
+                      for (int i = 0; i < 1000; i++) {
+                        last = source.offer(request()).lowN();
+                      }
+                      return last;
+                    }))
+        .withMessageStartingWith("The plugin \"x\" failed to work out its pull: no answer within");
+    assertThatExceptionOfType(SourceFault.class).isThrownBy(() -> source.offer(request()));
+    assertThatIllegalArgumentException()
+        .isThrownBy(() -> opened.asking(() -> good.modes(parameters().put("ears", 1))));
+  }
+
+  private static void sleep(Duration time) {
+    try {
+      Thread.sleep(time.toMillis());
+    } catch (InterruptedException e) {
+      throw new AssertionError(e);
+    }
+  }
+
+  @Test
   void modesThatHang() throws IOException {
     PullSource source =
         loaded(Archive.of("x").source("x").modes(HANG + "return List.of(\"pull\");"));
