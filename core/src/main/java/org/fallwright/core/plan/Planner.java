@@ -12,6 +12,7 @@ import java.util.function.BooleanSupplier;
 import java.util.function.DoubleConsumer;
 import java.util.stream.IntStream;
 import org.fallwright.core.pull.PullSources;
+import org.fallwright.core.pull.SourceFault;
 import org.fallwright.core.site.Site;
 
 /**
@@ -64,7 +65,8 @@ public final class Planner {
    */
   public Plan plan(Site site, DoubleConsumer progress, BooleanSupplier cancelled) {
     Judge judge = new Judge(site, sources);
-    Ways ways = new Ways(site, sources);
+    LeftOut out = new LeftOut(site);
+    Ways ways = new Ways(site, sources, out);
     List<Setup> all = ways.all();
     List<Double> lays = ways.lays();
     AtomicInteger done = new AtomicInteger();
@@ -73,34 +75,62 @@ public final class Planner {
             .parallel()
             .mapToObj(
                 i -> {
-                  Tally tally = new Tally();
-                  for (double lay : lays) {
-                    if (cancelled.getAsBoolean()) {
-                      throw new java.util.concurrent.CancellationException();
-                    }
-                    tally.add(judge.quick(all.get(i).withLay(lay)));
-                  }
+                  Tally tally = tally(judge, all.get(i), lays, out, cancelled);
                   progress.accept((double) done.incrementAndGet() / all.size());
                   return tally;
                 })
             .toList();
+    while (true) {
+      try {
+        return gathered(judge, ways, all, tallies, out);
+      } catch (SourceFault fault) { // not before now: gather again without it
+        if (!out.add(fault)) {
+          throw fault;
+        }
+      }
+    }
+  }
+
+  private Tally tally(
+      Judge judge, Setup way, List<Double> lays, LeftOut out, BooleanSupplier cancelled) {
+    try {
+      return sources.asking(
+          () -> {
+            Tally tally = new Tally();
+            for (double lay : lays) {
+              if (cancelled.getAsBoolean()) {
+                throw new java.util.concurrent.CancellationException();
+              }
+              if (out.uses(way)) {
+                break;
+              }
+              tally.add(judge.quick(way.withLay(lay)));
+            }
+            return tally;
+          });
+    } catch (SourceFault fault) {
+      out.add(fault);
+      return new Tally();
+    }
+  }
+
+  private static Plan gathered(
+      Judge judge, Ways ways, List<Setup> all, List<Tally> tallies, LeftOut out) {
     Tally total = new Tally();
     List<Judged> best = new ArrayList<>();
-    for (Tally t : tallies) {
-      best.add(t.best);
-      total.merge(t);
+    for (int i = 0; i < all.size(); i++) {
+      if (!out.uses(all.get(i))) {
+        best.add(tallies.get(i).best);
+        total.merge(tallies.get(i));
+      }
     }
+    int judged = best.size() * ways.lays().size();
     best = shown(best, judge);
     total.bestRejected.replaceAll((id, j) -> judge.judge(j.setup()));
     List<String> notes = new ArrayList<>(ways.notes());
+    notes.addAll(out.notes());
     notes.addAll(judge.notes());
-    return new Plan(
-        best,
-        all.size() * lays.size(),
-        total.byVerdict,
-        total.byBinding,
-        total.bestRejected,
-        notes);
+    return new Plan(best, judged, total.byVerdict, total.byBinding, total.bestRejected, notes);
   }
 
   /**

@@ -11,6 +11,7 @@ import org.fallwright.core.line.PartStrength;
 import org.fallwright.core.pull.PullSource;
 import org.fallwright.core.pull.PullSources;
 import org.fallwright.core.pull.SourceDescription.PlaceKind;
+import org.fallwright.core.pull.SourceFault;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.site.Anchor;
 import org.fallwright.core.site.Gear;
@@ -25,11 +26,13 @@ import org.fallwright.core.site.Site;
 final class Ways {
   private final Site site;
   private final PullSources sources;
+  private final LeftOut out;
   private final List<String> notes = new ArrayList<>();
 
-  Ways(Site site, PullSources sources) {
+  Ways(Site site, PullSources sources, LeftOut out) {
     this.site = site;
     this.sources = sources;
+    this.out = out;
   }
 
   /** What could not be used, a sentence each; filled by {@link #all}. */
@@ -52,14 +55,29 @@ final class Ways {
       for (double hinge : site.cut().hingeThicknessesM()) {
         for (Gear.Source source : site.gear().sources()) {
           for (Gear.Line line : lines) {
-            of(attach, hinge, line, source).stream()
-                .filter(way -> !aShorterLineDoes(way, lines))
-                .forEach(ways::add);
+            ways.addAll(ofWhatWorks(attach, hinge, line, source, lines));
           }
         }
       }
     }
+    ways.removeIf(out::uses);
     return ways;
+  }
+
+  /** Again without it, where a source fails. */
+  private List<Setup> ofWhatWorks(
+      double attach, double hinge, Gear.Line line, Gear.Source source, List<Gear.Line> lines) {
+    while (true) {
+      try {
+        return of(attach, hinge, line, source).stream()
+            .filter(way -> !aShorterLineDoes(way, lines))
+            .toList();
+      } catch (SourceFault fault) {
+        if (!out.add(fault)) {
+          throw fault;
+        }
+      }
+    }
   }
 
   private List<Setup> of(double attach, double hinge, Gear.Line line, Gear.Source source) {
@@ -156,6 +174,9 @@ final class Ways {
   }
 
   private Optional<PullSource> kind(Gear.Source source) {
+    if (out.has(source.plugin())) {
+      return Optional.empty();
+    }
     Optional<PullSource> kind = sources.byId(source.plugin());
     if (kind.isEmpty()) {
       notes.add(

@@ -12,7 +12,10 @@ final class Plainly {
     for (int depth = 0; cause.getCause() != null && depth < 20; depth++) {
       cause = cause.getCause();
     }
-    String kind = cause.getClass().getSimpleName();
+    String kind =
+        cause.getClass().isAnonymousClass()
+            ? cause.getClass().getSuperclass().getSimpleName()
+            : cause.getClass().getSimpleName();
     String message = messageOf(cause);
     return message.isEmpty() ? kind : kind + " (" + message + ")";
   }

@@ -7,15 +7,18 @@ import java.io.InputStreamReader;
 import java.io.Reader;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.Duration;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.function.Supplier;
 import java.util.jar.JarEntry;
 import java.util.jar.JarFile;
 import org.fallwright.core.pull.PullSource;
 import org.fallwright.core.pull.PullSources;
+import org.fallwright.core.pull.SourceFault;
 import org.fallwright.plugins.api.PullSourceExtension;
 import org.pf4j.PluginState;
 import org.pf4j.PluginWrapper;
@@ -33,9 +36,11 @@ public final class PluginFolder implements PullSources, AutoCloseable {
   private final List<PullSource> sources = new ArrayList<>();
   private final List<LoadedPlugin> loaded = new ArrayList<>();
   private final List<NotLoaded> notLoaded = new ArrayList<>();
+  private final Watch watch;
   private final ReasonedManager manager;
 
-  private PluginFolder(Path folder, String hostVersion) {
+  private PluginFolder(Path folder, String hostVersion, Duration limit) {
+    watch = new Watch(limit);
     if (!Files.isDirectory(folder)) {
       notLoaded.add(
           new NotLoaded(
@@ -50,7 +55,7 @@ public final class PluginFolder implements PullSources, AutoCloseable {
       manager = null;
       return;
     }
-    manager = new ReasonedManager(folder, hostVersion);
+    manager = new ReasonedManager(folder, hostVersion, watch);
     manager.loadPlugins();
     manager.startPlugins();
     for (PluginWrapper plugin : manager.inOrder()) {
@@ -70,12 +75,29 @@ public final class PluginFolder implements PullSources, AutoCloseable {
    *     requirement is held
    */
   public static PluginFolder open(Path folder, String hostVersion) {
-    return new PluginFolder(folder, hostVersion);
+    return new PluginFolder(folder, hostVersion, Watch.USUAL);
+  }
+
+  /** The same with another limit of what a call may take. */
+  static PluginFolder open(Path folder, String hostVersion, Duration limit) {
+    return new PluginFolder(folder, hostVersion, limit);
   }
 
   @Override
   public List<PullSource> all() {
     return List.copyOf(sources);
+  }
+
+  /** Done on a thread that can be given up where a plugin hangs. */
+  @Override
+  public <T> T asking(Supplier<T> work) {
+    try {
+      return watch.piece(work::get);
+    } catch (RuntimeException | Error thrown) {
+      throw thrown;
+    } catch (Throwable thrown) { // a supplier throws nothing else
+      throw new IllegalStateException(thrown);
+    }
   }
 
   /** The plugins in use, by file name. */
@@ -91,6 +113,7 @@ public final class PluginFolder implements PullSources, AutoCloseable {
   /** Lets go of the archives; the sources must not be asked afterwards. */
   @Override
   public void close() {
+    watch.close();
     if (manager != null) {
       manager.closeArchives();
     }
@@ -111,7 +134,8 @@ public final class PluginFolder implements PullSources, AutoCloseable {
     for (String className : classNames) {
       GuardedSource source;
       try {
-        source = new GuardedSource(plugin.getPluginId(), extension(plugin, className));
+        PullSourceExtension made = watch.within(() -> extension(plugin, className));
+        source = new GuardedSource(plugin.getPluginId(), made, watch);
       } catch (SourceFault fault) {
         manager.refuse(plugin, fault.getMessage());
         continue;
@@ -136,6 +160,7 @@ public final class PluginFolder implements PullSources, AutoCloseable {
               plugin.getPluginId(),
               plugin.getDescriptor().getVersion(),
               provider == null ? "" : provider,
+              PullSource.CONTRACT,
               ids));
     }
   }

@@ -37,10 +37,12 @@ final class ReasonedManager extends DefaultPluginManager {
   /** Manifest entry by which an archive says for which {@link PullSource#CONTRACT} it was built. */
   static final String CONTRACT_KEY = "Pull-Contract";
 
+  private final Watch watch;
   private final List<NotLoaded> refused = new ArrayList<>();
 
-  ReasonedManager(Path folder, String hostVersion) {
+  ReasonedManager(Path folder, String hostVersion, Watch watch) {
     super(folder);
+    this.watch = watch;
     setSystemVersion(hostVersion); // before loading, else Plugin-Requires is ignored
   }
 
@@ -217,7 +219,7 @@ final class ReasonedManager extends DefaultPluginManager {
   public void startPlugins() {
     for (PluginWrapper plugin : List.copyOf(resolvedPlugins)) {
       try {
-        startPlugin(plugin.getPluginId());
+        watch.within(() -> startPlugin(plugin.getPluginId()));
       } catch (Throwable thrown) { // a plugin may throw anything
         plugin.setPluginState(PluginState.FAILED);
         refuse(plugin, "It failed to start: " + Plainly.said(thrown) + ".");

@@ -27,6 +27,7 @@ import javax.tools.ToolProvider;
 final class Archive {
   private final Map<String, String> manifest = new LinkedHashMap<>();
   private final Map<String, String> sources = new LinkedHashMap<>();
+  private final List<String> forgotten = new ArrayList<>();
   private final List<String> extensions = new ArrayList<>();
 
   /** An archive with this plugin id, version 1.2.3 and contract 2. */
@@ -51,6 +52,12 @@ final class Archive {
   Archive with(String className, String source) {
     sources.put(className, source);
     return this;
+  }
+
+  /** Compiles a class with the rest and leaves it out of the archive. */
+  Archive withoutPacking(String className, String source) {
+    forgotten.add(className.replace('.', '/') + ".class");
+    return with(className, source);
   }
 
   /** Lists a class as an extension. */
@@ -101,6 +108,16 @@ final class Archive {
     return this;
   }
 
+  /** Gives the sources their own body of {@code describe}. */
+  Archive describes(String body) {
+    sources.replaceAll(
+        (name, code) ->
+            code.replace(
+                "public SourceDescription describe() {",
+                "public SourceDescription describe() { if (true) { " + body + " }"));
+    return this;
+  }
+
   /** Compiles and packs it. */
   Path writeTo(Path jar) throws IOException {
     Path classes = Files.createTempDirectory(jar.getParent(), "classes");
@@ -112,7 +129,11 @@ final class Archive {
         JarOutputStream entries = new JarOutputStream(out, lines);
         Stream<Path> files = Files.walk(classes)) {
       for (Path file : files.filter(Files::isRegularFile).toList()) {
-        entries.putNextEntry(new JarEntry(classes.relativize(file).toString().replace('\\', '/')));
+        String name = classes.relativize(file).toString().replace('\\', '/');
+        if (forgotten.contains(name)) {
+          continue;
+        }
+        entries.putNextEntry(new JarEntry(name));
         Files.copy(file, entries);
         entries.closeEntry();
       }

@@ -10,6 +10,7 @@ import java.io.IOException;
 import java.nio.file.Path;
 import org.fallwright.core.pull.PullRequest;
 import org.fallwright.core.pull.PullSource;
+import org.fallwright.core.pull.SourceFault;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -47,8 +48,15 @@ class GuardedSourceTest {
         "return offer(300); | gives an impossible pull: IllegalArgumentException (high_N is 200 N; it must be from 300 to 100000000 N).",
         "new PullOffer.Part(\"hook\", 0, 3, 2, 1, 1); return null; | gives an impossible pull: IllegalArgumentException (strength_N is 0 N; it must be from 1 to 1000000000 N).",
         "Integer.parseInt(\"x\"); return null; | 'failed to work out its pull: NumberFormatException (For input string: \"x\").'",
+        "return offer(Double.POSITIVE_INFINITY); | gives an impossible pull: IllegalArgumentException (low_N is infinite N; it must be from 0 to 10000000 N).",
+        "return PullOffer.giving(1, 2, new PullOffer.Limit(TWICE, TWICE)).notes(Collections.nCopies(100_000, \"a\")).done(); | 'gives an impossible pull: IllegalArgumentException (notes, how many is 100000; it must be from 0 to 60).'",
+        "return PullOffer.giving(1, 2, new PullOffer.Limit(TWICE, TWICE)).notes(List.of(\"a\".repeat(100_000))).done(); | gives an impossible pull: IllegalArgumentException (note must be one line of 1 to 400 characters).",
+        "new Wording(\"\", \"\"); return null; | gives an impossible pull: IllegalArgumentException (english must be one line of 1 to 400 characters).",
+        "throw new OutOfMemoryError(\"full\"); | failed to work out its pull: OutOfMemoryError (full).",
+        "return request.mode().isEmpty() ? null : offer(request); | failed to work out its pull: StackOverflowError.",
+        "throw new ThreadDeath(); | failed to work out its pull: ThreadDeath.",
         "throw new IllegalArgumentException(); | failed to work out its pull: IllegalArgumentException.",
-        "throw new RuntimeException() { public String getMessage() { throw new Error(); } }; | failed to work out its pull: .",
+        "throw new RuntimeException() { public String getMessage() { throw new Error(); } }; | failed to work out its pull: RuntimeException.",
       })
   void aFaultNamesThePluginInOneSentence(String body, String sentence) throws IOException {
     PullSource source = source(body);

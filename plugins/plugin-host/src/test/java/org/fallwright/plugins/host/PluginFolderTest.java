@@ -18,6 +18,8 @@ import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.slf4j.LoggerFactory;
 
 /** Each broken archive lies beside a good one, which must stay in use. */
@@ -60,8 +62,8 @@ class PluginFolderTest {
     assertThat(ids()).containsExactly("ass", "donkey", "zebra");
     assertThat(opened.loaded())
         .containsExactly(
-            new LoadedPlugin("second", "1.2.3", "A stable", List.of("donkey", "ass")),
-            new LoadedPlugin("zebra-plugin", "1.2.3", "", List.of("zebra")));
+            new LoadedPlugin("second", "1.2.3", "A stable", 2, List.of("donkey", "ass")),
+            new LoadedPlugin("zebra-plugin", "1.2.3", "", 2, List.of("zebra")));
     assertThat(opened.notLoaded()).isEmpty();
     assertThat(opened.byId("donkey")).isPresent();
     assertThat(opened.byId("mule")).isEmpty();
@@ -152,6 +154,34 @@ class PluginFolderTest {
     good();
     bad(Archive.of("x").says("Plugin-Requires", "recent").source("x"));
     onlyTheGoodOneStays("Its Plugin-Requires \"recent\" cannot be read as versions.");
+  }
+
+  @ParameterizedTest
+  @CsvSource(
+      delimiter = '|',
+      quoteCharacter = '\'',
+      value = {
+        "1 | 'It was built for pull contract \"1\"; this program takes contract 2.'",
+        "3 | 'It was built for pull contract \"3\"; this program takes contract 2.'",
+        "two | 'It was built for pull contract \"two\"; this program takes contract 2.'",
+        "'' | Its manifest names no Pull-Contract; this program takes contract 2.",
+      })
+  void anotherContractIsRefusedBeforeAClassOfItIsRun(String stated, String reason)
+      throws IOException {
+    good();
+    Archive other = Archive.of("x").silent("Pull-Contract");
+    if (!stated.isEmpty()) {
+      other.says("Pull-Contract", stated);
+    }
+    System.clearProperty("sample.ran");
+    bad(
+        other.source(
+            "x",
+            "sample.Bad",
+            "static { System.setProperty(\"sample.ran\", \"\"); }",
+            "return null;"));
+    onlyTheGoodOneStays(reason);
+    assertThat(System.getProperty("sample.ran")).isNull();
   }
 
   @Test
@@ -317,8 +347,8 @@ class PluginFolderTest {
     assertThat(ids()).containsExactly("extra", "good");
     assertThat(opened.loaded())
         .containsExactly(
-            new LoadedPlugin("good-plugin", "1.2.3", "", List.of("good")),
-            new LoadedPlugin("x", "1.2.3", "", List.of("extra")));
+            new LoadedPlugin("good-plugin", "1.2.3", "", 2, List.of("good")),
+            new LoadedPlugin("x", "1.2.3", "", 2, List.of("extra")));
     assertThat(opened.notLoaded())
         .containsExactly(new NotLoaded("bad.jar", "Its pull source id \"good\" is taken already."));
   }
