@@ -21,13 +21,17 @@ final class GearLines {
     this.w = w;
   }
 
-  /** Breaking load of a line and what its ends, bend, water, weather and age leave of it. */
-  void line(LineFigures l) {
+  /** Breaking load of a line. */
+  void breaking(LineFigures l) {
     if (l.byRule()) {
       byRule(l);
     } else {
       w.given("b_l", "breaking load on its label", l.breakingN(), FORCE, Basis.ENTERED);
     }
+  }
+
+  /** What a line's ends, bend, water, weather and age leave of it. */
+  void line(LineFigures l) {
     share("q_e1", l.treeEnd(), "its end at the tree");
     share("q_e2", l.sourceEnd(), "its other end");
     w.work("q_e", "what its weaker end leaves", "min(q_e1, q_e2)", NUMBER, Basis.RULE);
