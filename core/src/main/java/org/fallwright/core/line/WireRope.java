@@ -1,5 +1,6 @@
 package org.fallwright.core.line;
 
+import org.fallwright.core.reference.Figure;
 import org.fallwright.core.reference.Hardware;
 import org.fallwright.core.reference.Kind;
 import org.fallwright.core.units.Range;
@@ -31,6 +32,25 @@ public enum WireRope {
     Range.check("diameter_m", diameterM, 0.003, 0.1, "m");
     Range.check("grade_Pa", gradePa, 1e9, 2.5e9, "Pa");
     return constant * diameterM * diameterM * gradePa;
+  }
+
+  /**
+   * Axial stiffness EA of a wire rope that breaks at a load, the softest that is known [N]: the
+   * load over the greatest stretch there, at a fifth of it and at break, the lesser. From memory,
+   * for 6×19; chain of the same breaking load counts as no stiffer (planning allowance).
+   */
+  public static double softestN(double breakingN) {
+    return Range.check("breaking_load_N", breakingN, 100, 5e6, "N") / softness().value();
+  }
+
+  /** The greatest stretch over the share of the breaking load at which it is reached. */
+  static Share softness() {
+    Figure atBreak = Hardware.of("wire.stretch-break.high");
+    return new Share(
+        "stretch over share of the breaking load, the softest known of wire rope",
+        Math.max(Hardware.value("wire.stretch-20.high") / 0.2, atBreak.value()),
+        atBreak.kind(),
+        atBreak.source());
   }
 
   /**

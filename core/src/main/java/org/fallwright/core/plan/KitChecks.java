@@ -3,6 +3,7 @@ package org.fallwright.core.plan;
 import java.util.List;
 import java.util.Locale;
 import org.fallwright.core.line.LegLoads;
+import org.fallwright.core.line.LineFigures;
 import org.fallwright.core.line.PathFit;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.reference.Allowances;
@@ -54,6 +55,7 @@ final class KitChecks {
     if (reaches && !fit.fits()) {
       grade.rule("joint", 0, 1, "", 0, null, () -> sentence(fit.shortOf()));
     }
+    overBlock(setup);
     haulLine(route, takeUp);
     takenIn(offer.travel().mostM(), takeUp);
     enough("blocks", site.gear().blocks().size(), setup.redirects().size());
@@ -63,6 +65,39 @@ final class KitChecks {
         "connectors",
         site.gear().connectors().stream().mapToInt(Gear.Connector::count).sum(),
         gear.connectors());
+  }
+
+  /** Whether the line can run over the block at all: no chain does, nor a rope thicker than it. */
+  private void overBlock(Setup setup) {
+    if (setup.redirects().isEmpty()) {
+      return;
+    }
+    Gear.Line line = GearParts.line(site, setup);
+    Double sheave = Route.block(site).sheaveDiameterM();
+    if (line.material().chain()) {
+      grade.rule(
+          "sheave",
+          0,
+          1,
+          "",
+          0,
+          null,
+          () -> "Line " + line.id() + " is a chain: it does not run over a block.");
+    } else if (sheave != null && sheave < LineFigures.LEAST_RATIO * line.diameterM()) {
+      grade.rule(
+          "sheave",
+          sheave,
+          LineFigures.LEAST_RATIO * line.diameterM(),
+          "m",
+          0,
+          null,
+          () ->
+              "The sheave of block "
+                  + Route.block(site).id()
+                  + " is thinner than line "
+                  + line.id()
+                  + ": what so sharp a bend leaves is not known.");
+    }
   }
 
   /** The line of a block system: its parts over the take-up, its haul leg, wraps and tails. */

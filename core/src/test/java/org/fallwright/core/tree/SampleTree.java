@@ -57,7 +57,8 @@ final class SampleTree {
         null,
         false,
         true,
-        false);
+        false,
+        SubjectTree.MassBy.EQUATION);
   }
 
   /** The sample oak with what is known of its pieces and its crown. */
@@ -91,6 +92,35 @@ final class SampleTree {
         null,
         false,
         inLeaf,
-        iceOrWet);
+        iceOrWet,
+        SubjectTree.MassBy.EQUATION);
+  }
+
+  /** The same tree, its mass asked for by its stem. */
+  static SubjectTree byStem(SubjectTree t) {
+    return new SubjectTree(
+        t.id(),
+        t.species(),
+        t.stump(),
+        t.dbhM(),
+        t.stumpDiameterM(),
+        t.diameters(),
+        t.heightM(),
+        t.crownBaseM(),
+        t.crownRadiusM(),
+        t.leanDeg(),
+        t.leanAzimuthDeg(),
+        t.massKg(),
+        t.massCentreM(),
+        t.sections(),
+        t.crownShare(),
+        t.crownOffsetM(),
+        t.crownOutline(),
+        t.crownAreaM2(),
+        t.shellM(),
+        t.deadOrDecayed(),
+        t.inLeaf(),
+        t.iceOrWet(),
+        SubjectTree.MassBy.STEM);
   }
 }
