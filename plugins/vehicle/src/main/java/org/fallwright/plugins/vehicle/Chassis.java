@@ -46,6 +46,10 @@ record Chassis(
       return perNewton < 0 ? Math.max(0, atRestN / -perNewton) : Double.POSITIVE_INFINITY;
     }
 
+    AxleLoad times(double factor) {
+      return new AxleLoad(factor * atRestN, factor * perNewton);
+    }
+
     AxleLoad plus(AxleLoad other) {
       return new AxleLoad(atRestN + other.atRestN, perNewton + other.perNewton);
     }
