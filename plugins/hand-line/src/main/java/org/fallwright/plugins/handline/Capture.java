@@ -1,7 +1,6 @@
 package org.fallwright.plugins.handline;
 
 import java.util.Arrays;
-import java.util.List;
 import java.util.Locale;
 import org.fallwright.core.line.Wraps;
 
@@ -43,28 +42,14 @@ enum Capture {
     return this == TURNS_IN_HAND || this == TURNS_TIED;
   }
 
-  /** All ways of keeping it, for a form. */
-  static List<String> keys() {
-    return Arrays.stream(values()).filter(c -> c != NONE).map(c -> c.key).toList();
-  }
-
   /** The way of that key. */
   static Capture of(String key) {
     return Arrays.stream(values()).filter(c -> c.key.equals(key)).findFirst().orElseThrow();
   }
 
-  /** Wraps of a stable name, for example "hmpe-metal". */
+  /** The wraps of a key, for example "hmpe-on-metal". */
   static Wraps wraps(String key) {
-    return Wraps.valueOf(wrapsName(key));
-  }
-
-  /** What the turns may go round, for a form. */
-  static List<String> wrapsKeys() {
-    return List.of("rope-on-bark", "polyester-on-metal", "hmpe-on-metal");
-  }
-
-  private static String wrapsName(String key) {
-    return key.toUpperCase(Locale.ROOT).replace('-', '_');
+    return Wraps.valueOf(key.toUpperCase(Locale.ROOT).replace('-', '_'));
   }
 
   /**

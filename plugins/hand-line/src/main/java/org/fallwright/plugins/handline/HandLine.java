@@ -86,8 +86,8 @@ public final class HandLine implements PullSourceExtension {
     List<PersonPull> each = gang.low(gang.haul(), ground, rise, slope, diameter);
     double standing = Crew.pullN(gang.low(Haul.NOT_STATED, ground, rise, slope, diameter));
     Limit limit = each.isEmpty() ? Limit.NOBODY : Crew.limit(each);
-    return PullOffer.giving(
-            Crew.pullN(each), gang.highN(ground, rise, slope) * HIGH_FACTOR, limit.said)
+    double low = Crew.pullN(each);
+    return PullOffer.giving(low, gang.highN(ground, rise, slope) * HIGH_FACTOR, limit.at(low))
         .holds(holdN(gang, standing), gang.capture().staysPut())
         .travel(1, mostM(gang, stand.runOutM()))
         .overrun(OVERRUN_M)

@@ -30,6 +30,8 @@ class HandLineTest {
     PullOffer offer = handLine.offer(request(WET, 4, 0.1, 10, false));
     assertThat(offer.lowN()).isCloseTo(4 * 0.79 * 110, within(1e-9));
     assertThat(offer.limit().what().english()).isEqualTo("strength of a person");
+    assertThat(offer.limit().why().english())
+        .startsWith("Their strength ends at 0.347 kN (78.1 lbf) together: better footing");
     assertThat(offer.operators()).isEqualTo(4);
     assertThat(offer.powered()).isFalse();
   }

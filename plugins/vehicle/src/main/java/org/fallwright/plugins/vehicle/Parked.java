@@ -1,7 +1,6 @@
 package org.fallwright.plugins.vehicle;
 
 import java.util.Arrays;
-import java.util.List;
 import org.fallwright.core.anchor.LockedWheels;
 import org.fallwright.plugins.vehicle.Chassis.AxleLoad;
 
@@ -22,10 +21,6 @@ enum Parked {
 
   Parked(String key) {
     this.key = key;
-  }
-
-  static List<String> keys() {
-    return Arrays.stream(values()).map(p -> p.key).toList();
   }
 
   static Parked of(String key) {

@@ -1,7 +1,6 @@
 package org.fallwright.plugins.vehicle;
 
 import java.util.Arrays;
-import java.util.List;
 
 /**
  * What tyres and chains change of a ground's grip.
@@ -43,10 +42,6 @@ enum Tyres {
   /** Grip taken where more of it loads the parts. */
   double highOf(double grip) {
     return Math.min(MOST, grip * high);
-  }
-
-  static List<String> keys() {
-    return Arrays.stream(values()).filter(t -> t != NOT_STATED).map(t -> t.key).toList();
   }
 
   static Tyres of(String key) {

@@ -94,7 +94,7 @@ public final class Vehicle implements PullSourceExtension {
     return PullOffer.giving(
             low.traction().tensionN(),
             highN + surgeN(CREEP_MPS, heaviestKg, pull.pathStiffness(), pull.travelRatio()),
-            low.traction().limit().said)
+            low.traction().limit().at(low.traction().tensionN()))
         .holds(hold.tensionN(), true)
         .powered(true)
         .overrun(OVERRUN_M)

@@ -7,6 +7,8 @@ import org.fallwright.core.pull.PullOffer.Finding;
 import org.fallwright.core.pull.PullOffer.Part;
 import org.fallwright.core.pull.PullRequest;
 import org.fallwright.core.reference.Allowances;
+import org.fallwright.core.units.DisplayUnits;
+import org.fallwright.plugins.vehicle.Chassis.AxleLoad;
 
 /** What is checked and said of a vehicle's pull beside its figures. */
 final class VehicleAdvice {
@@ -95,9 +97,7 @@ final class VehicleAdvice {
             + " forbidden.");
     runUp(notes);
     notes.add("Engine and gearing are not checked; the wheels' grip alone is.");
-    if (low.traction().frontN() < FRONT_SHARE_TO_STEER * low.chassis().frontLevelN()) {
-      notes.add("The pull leaves the front axle too light to steer.");
-    }
+    steering(notes);
     if (towPoint.strengthN() / towPoint.designFactor() < low.traction().tensionN()) {
       notes.add(
           "The wheels can pull more than the tow point is rated for: stop at its rated load.");
@@ -140,6 +140,19 @@ final class VehicleAdvice {
     return notes;
   }
 
+  private void steering(List<String> notes) {
+    PullRequest.Stand stand = request.stand();
+    AxleLoad front =
+        low.chassis().front(stand.lineRiseRad() + stand.uphillRad(), stand.uphillRad());
+    double steersUpTo = front.fallsToAtN(FRONT_SHARE_TO_STEER * low.chassis().frontLevelN());
+    if (steersUpTo < low.traction().tensionN()) {
+      notes.add(
+          "From "
+              + DisplayUnits.METRIC.both(u -> u.forceAtMost(steersUpTo))
+              + " on, the pull leaves the front axle too light to steer.");
+    }
+  }
+
   private void runUp(List<String> notes) {
     double stiffness = request.pull().pathStiffness();
     if (stiffness > 0) {
@@ -147,11 +160,9 @@ final class VehicleAdvice {
           Vehicle.surgeN(
               WALK_MPS, figures.loading().get(0).massKg(), stiffness, request.pull().travelRatio());
       notes.add(
-          String.format(
-              Locale.ROOT,
-              "A run at a slack line, at walking pace even, would put some %.0f kN (%.0f lbf) on it.",
-              jerk / 1000,
-              10 * Math.rint(jerk / 4.4482216 / 10)));
+          "A run at a slack line, at walking pace even, would put "
+              + DisplayUnits.METRIC.both(u -> u.force(jerk))
+              + " on it.");
     }
   }
 }

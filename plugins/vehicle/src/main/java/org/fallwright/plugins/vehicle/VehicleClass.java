@@ -1,7 +1,6 @@
 package org.fallwright.plugins.vehicle;
 
 import java.util.Arrays;
-import java.util.List;
 
 /**
  * Stand-ins for vehicles whose figures nobody has at hand. Every figure is a planning allowance;
@@ -51,10 +50,6 @@ enum VehicleClass {
     this.cgHeightM = cgHeightM;
     this.hitchHeightM = hitchHeightM;
     this.overhangM = overhangM;
-  }
-
-  static List<String> keys() {
-    return Arrays.stream(values()).map(c -> c.key).toList();
   }
 
   static VehicleClass of(String key) {
