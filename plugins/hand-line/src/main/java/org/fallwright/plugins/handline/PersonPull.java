@@ -1,17 +1,16 @@
 package org.fallwright.plugins.handline;
 
-import org.fallwright.core.pull.PullOffer.Limit;
-import org.fallwright.core.pull.Wording;
 import org.fallwright.core.units.Units;
 
 /**
- * What one person can pull for a moment without moving the feet: the least of three limits.
+ * What one person can pull for a moment without moving the feet: the least of four limits.
  *
  * @param tipN pull that brings the body upright about the feet [N]
  * @param slipN pull at which the boots slip [N]
  * @param strengthN what a person keeps up on such footing [N]
+ * @param handsN pull at which the line runs through the hands [N]; infinite: not known
  */
-record PersonPull(double tipN, double slipN, double strengthN) {
+record PersonPull(double tipN, double slipN, double strengthN, double handsN) {
   private static final double GRAVITY = Units.GRAVITY;
 
   /**
@@ -20,40 +19,21 @@ record PersonPull(double tipN, double slipN, double strengthN) {
    */
   private static final double MASS_CENTRE_SHARE = 0.55;
 
-  private static final Limit SLIP =
-      new Limit(
-          new Wording("boots slip", "las botas se resbalan"),
-          new Wording(
-              "On this ground the boots slip before the people run out of strength.",
-              "En este suelo las botas se resbalan antes de que a la gente le falte fuerza."));
-
-  private static final Limit TIP =
-      new Limit(
-          new Wording("body tips forward", "el cuerpo se va hacia adelante"),
-          new Wording(
-              "The line draws the people upright: leaning back farther or holding it lower would"
-                  + " give more.",
-              "La cuerda endereza a la gente: más inclinada hacia atrás o con las manos más abajo"
-                  + " daría más."));
-
-  private static final Limit STRENGTH =
-      new Limit(
-          new Wording("strength of a person", "fuerza de una persona"),
-          new Wording(
-              "The boots grip well enough; a person cannot keep up more than this.",
-              "Las botas agarran bien; una persona no puede sostener más que esto."));
-
   /** The pull that can be had [N]. */
   double leastN() {
-    return Math.min(tipN, Math.min(slipN, strengthN));
+    return Math.min(Math.min(tipN, slipN), Math.min(strengthN, handsN));
   }
 
-  /** What limits it, and why. */
+  /** What limits it. */
   Limit limit() {
-    if (slipN <= tipN && slipN <= strengthN) {
-      return SLIP;
+    double least = leastN();
+    if (slipN == least) {
+      return Limit.BOOTS;
     }
-    return tipN <= strengthN ? TIP : STRENGTH;
+    if (tipN == least) {
+      return Limit.TIPPING;
+    }
+    return strengthN == least ? Limit.STRENGTH : Limit.HANDS;
   }
 
   /**

@@ -38,7 +38,8 @@ class PersonPullReferenceTest {
                 in.get("mu").doubleValue(),
                 rise,
                 toRadians(in.get("slope_deg").doubleValue())),
-            in.get("strength").doubleValue());
+            in.get("strength").doubleValue(),
+            Double.POSITIVE_INFINITY);
     same(pull.tipN(), out, "tip_N");
     same(pull.slipN(), out, "slip_N");
     same(pull.leastN(), out, "one_N");

@@ -43,7 +43,18 @@ record Chassis(
 
     /** Tension at which the axle lifts [N]; infinite where the line presses it down. */
     double liftsAtN() {
-      return perNewton < 0 ? Math.max(0, atRestN / -perNewton) : Double.POSITIVE_INFINITY;
+      return fallsToAtN(0);
+    }
+
+    /** Tension at which no more than this load is left on it [N]; infinite where none does. */
+    double fallsToAtN(double leftN) {
+      return perNewton < 0
+          ? Math.max(0, (atRestN - leftN) / -perNewton)
+          : atRestN < leftN ? 0 : Double.POSITIVE_INFINITY;
+    }
+
+    AxleLoad times(double factor) {
+      return new AxleLoad(factor * atRestN, factor * perNewton);
     }
 
     AxleLoad plus(AxleLoad other) {

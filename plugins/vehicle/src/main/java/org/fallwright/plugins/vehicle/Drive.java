@@ -1,33 +1,24 @@
 package org.fallwright.plugins.vehicle;
 
 import java.util.Locale;
-import org.fallwright.core.pull.PullOffer.Limit;
-import org.fallwright.core.pull.Wording;
 
-/** Which wheels keep a vehicle from being drawn to the tree. */
+/** Which wheels pull. */
 enum Drive {
   /** Rear axle drives, front axle rolls. */
-  RWD(false, true, "the rear axle", "del eje trasero"),
+  RWD(false, true, Limit.REAR_GRIP),
   /** Front axle drives, rear axle rolls. */
-  FWD(true, false, "the front axle", "del eje delantero"),
-  /** All wheels drive, coupled so that each axle takes its share. */
-  AWD(true, true, "all wheels", "de todas las llantas"),
-  /** All wheels locked, standing. */
-  LOCKED(true, true, "all wheels", "de todas las llantas");
+  FWD(true, false, Limit.FRONT_GRIP),
+  /** All wheels drive. */
+  AWD(true, true, Limit.ALL_GRIP);
 
   final boolean front;
   final boolean rear;
   final Limit limit;
 
-  Drive(boolean front, boolean rear, String driven, String spanish) {
+  Drive(boolean front, boolean rear, Limit limit) {
     this.front = front;
     this.rear = rear;
-    limit =
-        new Limit(
-            new Wording("grip of " + driven, "agarre " + spanish),
-            new Wording(
-                "On this ground the wheels slip before the vehicle pulls more.",
-                "En este suelo las llantas patinan antes de que el vehículo jale más."));
+    this.limit = limit;
   }
 
   /** The drive of a mode, for example "rwd". */

@@ -35,9 +35,9 @@ class TractionReferenceTest {
             in.get("hitch_height").doubleValue(),
             in.get("overhang").doubleValue());
     Traction traction =
-        Traction.of(
+        pull(
             chassis,
-            Drive.of(in.get("drive").textValue()),
+            in.get("drive").textValue(),
             in.get("mu").doubleValue(),
             in.get("rolling").doubleValue(),
             toRadians(in.get("rise_deg").doubleValue()),
@@ -103,7 +103,7 @@ class TractionReferenceTest {
   @Test
   void draggedOverGrass() {
     Chassis dragged = new Chassis(3000, 0.5, 3, 0.7, 0.5, 1);
-    double drags = Traction.of(dragged, Drive.LOCKED, 0.35, 0, 0, 0).tensionN();
+    double drags = Parked.CHOCKS.hold(dragged, 0.35, 0, 0).tensionN();
     assertThat(drags).isCloseTo(10_300, within(5.0));
     CheckValue.of(
             "Arboriculture Australia 2022, Tree Rescue Manual p. 214",
@@ -116,13 +116,15 @@ class TractionReferenceTest {
   /** A line's rise above the ground is its rise from the horizontal and the slope together. */
   private static Traction at(
       String drive, double toGroundDeg, double slopeDeg, double grip, double rolling) {
-    return Traction.of(
-        TRUCK,
-        Drive.of(drive),
-        grip,
-        rolling,
-        toRadians(toGroundDeg - slopeDeg),
-        toRadians(slopeDeg));
+    return pull(
+        TRUCK, drive, grip, rolling, toRadians(toGroundDeg - slopeDeg), toRadians(slopeDeg));
+  }
+
+  private static Traction pull(
+      Chassis chassis, String drive, double grip, double rolling, double rise, double slope) {
+    return drive.equals("locked")
+        ? Parked.ALL_WHEELS.hold(chassis, grip, rise, slope)
+        : Traction.of(chassis, Drive.of(drive), grip, rolling, rise, slope);
   }
 
   private static void same(double value, JsonNode out, String key) {
