@@ -41,7 +41,7 @@ final class FiguresOf {
         Math.toDegrees(t.endRad()),
         t.takeUpM(),
         slack + t.shorteningToCommitM(),
-        t.takeUpM() * offer.velocityRatio(),
+        offer.travel().handM(t.takeUpM()),
         Math.toDegrees(t.riseRad()),
         t.leverM(),
         t.steerShare(),

@@ -108,7 +108,7 @@ final class ForceChecks {
                     + " gives "
                     + gives
                     + " ("
-                    + offer.limit()
+                    + offer.limit().what().english()
                     + ").");
     if (t.holdN() > t.planN()) {
       double most = Math.min(r.ceiling().tensionN(), r.source().lowN());

@@ -177,7 +177,7 @@ public final class Judge {
       grade.rule(
           f.id(), f.value(), f.limit(), f.unit(), f.ratio(), place(setup).at(), () -> f.why());
     }
-    new People(site, rules, in, grade).check(setup, zones, offer);
+    new People(site, rules, in, grade).check(setup, route, zones, offer);
     notes.addAll(offer.notes());
     if (full) {
       notes.addAll(LandNotes.of(site, setup));

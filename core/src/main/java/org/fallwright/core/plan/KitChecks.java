@@ -55,6 +55,7 @@ final class KitChecks {
       grade.rule("joint", 0, 1, "", 0, null, () -> sentence(fit.shortOf()));
     }
     haulLine(route, takeUp);
+    takenIn(offer.travel().mostM(), takeUp);
     enough("blocks", site.gear().blocks().size(), setup.redirects().size());
     enough(
         "slings", site.gear().slings().stream().mapToInt(Gear.Sling::count).sum(), gear.slings());
@@ -86,6 +87,26 @@ final class KitChecks {
                 + in.length(there)
                 + "; its parts, its haul and tails need "
                 + in.length(needed)
+                + ".");
+  }
+
+  /** What a source that comes to an end of its way can take in. */
+  private void takenIn(Double most, double takeUp) {
+    if (most == null) {
+      return;
+    }
+    grade.rule(
+        "take-up of the source",
+        most,
+        takeUp,
+        "m",
+        takeUp == 0 ? Double.POSITIVE_INFINITY : most / takeUp,
+        null,
+        () ->
+            "The source can take in "
+                + in.length(most)
+                + " of line; the movement asks for "
+                + in.length(takeUp)
                 + ".");
   }
 

@@ -2,8 +2,11 @@ package org.fallwright.core.plan;
 
 import java.util.List;
 import org.fallwright.core.pull.PullOffer;
+import org.fallwright.core.pull.PullOffer.Standing;
+import org.fallwright.core.pull.PullOffer.Where;
 import org.fallwright.core.rules.RuleSet;
 import org.fallwright.core.site.Place;
+import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.units.DisplayUnits;
 import org.fallwright.core.zones.Bight;
@@ -23,7 +26,7 @@ final class People {
     this.grade = grade;
   }
 
-  void check(Setup setup, Landing.Zones zones, PullOffer offer) {
+  void check(Setup setup, Route route, Landing.Zones zones, PullOffer offer) {
     String at = setup.driver() == null ? setup.place() : setup.driver().place();
     Place place = Route.place(site, at);
     if (offer.operators() > 0) {
@@ -32,8 +35,19 @@ final class People {
           zones.angles().bights().isEmpty()
               ? List.of()
               : zones.angles().bights().subList(0, zones.angles().bights().size() - 1);
+      List<OperatorPlace> all =
+          offer.people().stream()
+              .filter(s -> s.where() != Where.AWAY)
+              .map(s -> stands(s, setup, route, place))
+              .map(p -> OperatorPlace.of(p, zones.footprint(), others, zones.angles().recoil()))
+              .toList();
+      // of several places the worst of each kind counts
       OperatorPlace o =
-          OperatorPlace.of(place.at(), zones.footprint(), others, zones.angles().recoil());
+          new OperatorPlace(
+              all.stream().allMatch(OperatorPlace::outsideFootprint),
+              all.stream().allMatch(OperatorPlace::outsideBights),
+              all.stream().allMatch(OperatorPlace::offAxis),
+              all.stream().mapToDouble(OperatorPlace::fromStumpM).min().orElseThrow());
       double height = site.tree().heightM().value();
       double asked = rules.operatorRadiusFactor().value() * height;
       boolean far = rules.operatorRadiusFactor().metBy(o.fromStumpM(), height);
@@ -93,5 +107,19 @@ final class People {
         grade.tightAtBest("free hand", 0, 1, "", place.at(), () -> why);
       }
     }
+  }
+
+  private Position stands(Standing who, Setup setup, Route route, Place source) {
+    return switch (who.where()) {
+      case AT_SOURCE, AWAY -> source.at();
+      case AT_CAPTURE -> Route.place(site, setup.place()).at();
+      case BESIDE_LINE -> {
+        List<Position> path = route.path();
+        Position end = path.get(path.size() - 1);
+        Position before = path.get(path.size() - 2);
+        double nearer = Math.min(who.nearerM(), end.distanceTo(before));
+        yield nearer == 0 ? source.at() : end.along(end.azimuthTo(before), nearer);
+      }
+    };
   }
 }

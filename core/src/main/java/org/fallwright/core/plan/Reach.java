@@ -4,6 +4,9 @@ import java.util.List;
 import org.fallwright.core.line.Point3;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullRequest;
+import org.fallwright.core.pull.PullRequest.Line;
+import org.fallwright.core.pull.PullRequest.Pull;
+import org.fallwright.core.pull.PullRequest.Stand;
 import org.fallwright.core.pull.PullSource;
 import org.fallwright.core.reference.Surface;
 import org.fallwright.core.reference.SurfaceTable;
@@ -21,11 +24,14 @@ final class Reach {
    *
    * @param stiffnessNPerM path stiffness at the tree [N/m]
    * @param takeUpM line to take in at the tree [m]
+   * @param workingN tension at the tree that the plan asks [N]
    */
-  record Pulled(double stiffnessNPerM, double takeUpM) {
+  record Pulled(double stiffnessNPerM, double takeUpM, double workingN) {
     /** Of a tree that cannot be moved nothing is known, and a source is asked without. */
     static Pulled of(TreeSide t) {
-      return t.movable() ? new Pulled(t.pathNPerM(), t.takeUpM()) : new Pulled(0, 0);
+      return t.movable()
+          ? new Pulled(t.pathNPerM(), t.takeUpM(), t.workingN())
+          : new Pulled(0, 0, 0);
     }
   }
 
@@ -33,36 +39,41 @@ final class Reach {
   static PullOffer of(
       Site site, Setup way, Route route, Pulled pulled, PullSource source, PullSource driver) {
     Gear.Source gear = site.source(way.source()).orElseThrow();
-    if (way.driver() == null) {
-      return source.offer(
-          request(site, gear, way.mode(), way.place(), route.points(), pulled, 1, null));
+    PullOffer haul = null;
+    if (way.driver() != null) {
+      Gear.Source hauls = site.source(way.driver().source()).orElseThrow();
+      double ratio = source.haulLine(gear.parameters(), way.mode()).parts();
+      haul =
+          driver.offer(
+              new PullRequest(
+                  hauls.parameters(),
+                  way.driver().mode(),
+                  stand(site, way.driver().place(), route.haul(), route.haulOnSite()),
+                  new Pull(pulled.stiffnessNPerM(), ratio, pulled.takeUpM(), null),
+                  null,
+                  null));
     }
-    double ratio = source.haulLine(gear.parameters(), way.mode()).parts();
-    Gear.Source hauls = site.source(way.driver().source()).orElseThrow();
-    PullOffer haul =
-        driver.offer(
-            request(
-                site,
-                hauls,
-                way.driver().mode(),
-                way.driver().place(),
-                route.haul(),
-                pulled,
-                ratio,
-                null));
+    Gear.Line line = GearParts.line(site, way);
     return source.offer(
-        request(site, gear, way.mode(), way.place(), route.points(), pulled, 1, haul));
+        new PullRequest(
+            gear.parameters(),
+            way.mode(),
+            stand(site, way.place(), route.points(), route.line()),
+            new Pull(
+                pulled.stiffnessNPerM(),
+                1,
+                pulled.takeUpM(),
+                pulled.workingN() * route.loads().sourceEndPerTree()),
+            new Line(
+                line.wireRope(),
+                line.diameterM(),
+                line.breakingLoadN(),
+                line.lengthM(),
+                route.loads().lengthM()),
+            haul));
   }
 
-  private static PullRequest request(
-      Site site,
-      Gear.Source gear,
-      String mode,
-      String place,
-      List<Point3> points,
-      Pulled pulled,
-      double travelRatio,
-      PullOffer driver) {
+  private static Stand stand(Site site, String place, List<Point3> points, List<LinePoint> onSite) {
     Point3 end = points.get(points.size() - 1);
     Point3 before = points.get(points.size() - 2);
     Point3 leg = before.minus(end);
@@ -75,17 +86,14 @@ final class Reach {
       double turn = pull - Math.toRadians(spot.headingDeg());
       off = Math.abs(Math.atan2(Math.sin(turn), Math.cos(turn)));
     }
-    return new PullRequest(
-        gear.parameters(),
-        mode,
+    double height = onSite.get(onSite.size() - 1).elevationM() - Route.place(site, place).groundM();
+    return new Stand(
         ground,
         rise,
         spot == null ? 0 : Math.toRadians(spot.gradeDeg()),
         off,
-        pulled.stiffnessNPerM(),
-        travelRatio,
-        pulled.takeUpM(),
-        spot == null ? null : spot.runOutM(),
-        driver);
+        height,
+        leg.length(),
+        spot == null ? null : spot.runOutM());
   }
 }

@@ -4,10 +4,18 @@ import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.List;
 
 /**
- * The extension point: something that pulls the line. Stateless; values in, values out. The core
- * knows no source by name. What an implementation answers is checked like user input.
+ * The extension point: something that pulls the line. Stateless; values in, values out; asked by
+ * several threads at once. The core knows no source by name. What an implementation answers is
+ * checked like user input.
  */
 public interface PullSource {
+  /**
+   * The version of this contract: of this interface and all records that it takes and gives. A
+   * plugin's archive states the one it was built for, and another one is refused before a class of
+   * it is looked at.
+   */
+  int CONTRACT = 2;
+
   /** What it is: stable id, display name, where it can be, its parameters. */
   SourceDescription describe();
 

@@ -1,7 +1,12 @@
 package org.fallwright.core.pull;
 
+import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.util.ArrayList;
+import java.util.Iterator;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Collectors;
 import org.fallwright.core.units.Range;
 
 /**
@@ -9,62 +14,24 @@ import org.fallwright.core.units.Range;
  *
  * @param id stable id, lower case with hyphens
  * @param name display name
- * @param places where it can be
+ * @param places where it can be, at least one
  * @param needsDriver whether another source hauls it
- * @param parameters its parameters, so that a form can be drawn without knowing it
+ * @param parameters its parameters, in the order in which a form asks for them
  */
 public record SourceDescription(
     String id,
-    String name,
+    Wording name,
     Set<PlaceKind> places,
     boolean needsDriver,
     List<Parameter> parameters) {
+  private static final int MOST_PARAMETERS = 60;
+
   /** Kinds of place. */
   public enum PlaceKind {
+    /** A place on the ground where something can stand. */
     SPOT,
+    /** A tree, rated point or ground anchor. */
     ANCHOR
-  }
-
-  /** Kinds of value. */
-  public enum ValueKind {
-    NUMBER,
-    WHOLE_NUMBER,
-    FLAG,
-    CHOICE,
-    CHOICES
-  }
-
-  /**
-   * One parameter.
-   *
-   * @param key its key in the parameters object; a unit, if any, ends it
-   * @param label what a form calls it
-   * @param kind kind of value
-   * @param unit SI unit; empty where there is none
-   * @param least least value of a number
-   * @param most greatest value of a number
-   * @param choices what may be chosen
-   */
-  public record Parameter(
-      String key,
-      String label,
-      ValueKind kind,
-      String unit,
-      double least,
-      double most,
-      List<String> choices) {
-    public Parameter {
-      Range.text("key", key);
-      Range.text("label", label);
-      Range.present("kind", kind);
-      Range.present("unit", unit);
-      choices = List.copyOf(Range.present("choices", choices));
-    }
-
-    public static Parameter number(
-        String key, String label, String unit, double least, double most) {
-      return new Parameter(key, label, ValueKind.NUMBER, unit, least, most, List.of());
-    }
   }
 
   public SourceDescription {
@@ -73,8 +40,72 @@ public record SourceDescription(
       throw new IllegalArgumentException(
           "id is \"" + id + "\"; it must be lower-case letters, digits and hyphens");
     }
-    Range.text("name", name);
+    Range.present("name", name);
     places = Set.copyOf(Range.present("places", places));
+    Range.check("places, how many", places.size(), 1, PlaceKind.values().length, "");
     parameters = List.copyOf(Range.present("parameters", parameters));
+    Range.check("parameters, how many", parameters.size(), 0, MOST_PARAMETERS, "");
+    List<Parameter> before = new ArrayList<>();
+    for (Parameter p : parameters) {
+      if (find(before, p.key()).isPresent()) {
+        throw new IllegalArgumentException(p.key() + " is described twice");
+      }
+      if (p.where() != null
+          && !find(before, p.where().key())
+              .map(o -> o.choiceKeys().containsAll(p.where().choices()))
+              .orElse(false)) {
+        throw new IllegalArgumentException(
+            p.key() + " hangs on choices of " + p.where().key() + " that are not described before");
+      }
+      before.add(p);
+    }
+  }
+
+  /** The parameter of a key. */
+  public Optional<Parameter> parameter(String key) {
+    return find(parameters, key);
+  }
+
+  /**
+   * Holds a site's parameters against the description: a key that it does not know, a value of the
+   * wrong kind or out of range, one that is missing and one that does not apply are refused. A
+   * value of null counts as not stated; a preset does not stand in for one.
+   *
+   * @throws IllegalArgumentException one sentence with key, value, limits and unit
+   */
+  public void check(ObjectNode values) {
+    for (Iterator<String> keys = values.fieldNames(); keys.hasNext(); ) {
+      String key = keys.next();
+      if (parameter(key).isEmpty()) {
+        throw new IllegalArgumentException(
+            Parameter.brief(key)
+                + " is not a parameter of the "
+                + name.english()
+                + "; it knows "
+                + parameters.stream().map(Parameter::key).collect(Collectors.joining(", ")));
+      }
+    }
+    List<Parameter> stated = parameters.stream().filter(p -> values.hasNonNull(p.key())).toList();
+    stated.forEach(p -> p.check(values.get(p.key())));
+    for (Parameter p : parameters) {
+      boolean applies = p.appliesTo(values);
+      if (stated.contains(p) && !applies) {
+        String other = p.where().key();
+        throw new IllegalArgumentException(
+            p.key()
+                + " is "
+                + Parameter.brief(values.get(p.key()).toString())
+                + "; it must be left out where "
+                + other
+                + (values.hasNonNull(other) ? " is " + values.get(other) : " is not stated"));
+      }
+      if (!stated.contains(p) && applies && !p.optional()) {
+        throw new IllegalArgumentException(p.key() + " is missing; it must be " + p.asked());
+      }
+    }
+  }
+
+  private static Optional<Parameter> find(List<Parameter> in, String key) {
+    return in.stream().filter(p -> p.key().equals(key)).findFirst();
   }
 }

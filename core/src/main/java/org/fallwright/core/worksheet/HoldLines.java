@@ -172,7 +172,7 @@ final class HoldLines {
     w.given(
         "i_v",
         "travel at the source for line at its end",
-        r.offer().velocityRatio(),
+        r.offer().travel().ratio(),
         NUMBER,
         Basis.SOURCE);
     w.work("X_in", "travel at the source", "i_v × T_in", LENGTH, Basis.GEOMETRY);

@@ -161,7 +161,12 @@ final class PartLines {
   private void source() {
     PullOffer o = r.offer();
     w.section("What the source gives");
-    w.given("S_l", "pull to count on at its line end: " + o.limit(), o.lowN(), FORCE, Basis.SOURCE);
+    w.given(
+        "S_l",
+        "pull to count on at its line end: " + o.limit().what().english(),
+        o.lowN(),
+        FORCE,
+        Basis.SOURCE);
     w.given("S_o", "what it holds at its low", o.holdN(), FORCE, Basis.SOURCE);
     w.given("S_t", "the most it can bring on the parts", o.highN(), FORCE, Basis.SOURCE);
     w.work("S_l1", "pull to count on at the tree", "S_l ÷ i_e", FORCE, Basis.STATICS);

@@ -22,6 +22,7 @@ import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullRequest;
 import org.fallwright.core.pull.PullSource;
 import org.fallwright.core.pull.SourceDescription;
+import org.fallwright.core.pull.Wording;
 import org.fallwright.core.site.Site;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
@@ -244,7 +245,11 @@ class PlanJsonTest {
     @Override
     public SourceDescription describe() {
       return new SourceDescription(
-          "doubled", "Doubled pull", Set.of(SourceDescription.PlaceKind.ANCHOR), true, List.of());
+          "doubled",
+          new Wording("Doubled pull", "tiro doble"),
+          Set.of(SourceDescription.PlaceKind.ANCHOR),
+          true,
+          List.of());
     }
 
     @Override
@@ -260,22 +265,11 @@ class PlanJsonTest {
     @Override
     public PullOffer offer(PullRequest request) {
       PullOffer d = request.driver();
-      return new PullOffer(
-          2 * d.lowN(),
-          2 * d.highN(),
-          2 * d.holdN(),
-          true,
-          d.limit(),
-          2,
-          false,
-          0.05,
-          0,
-          1,
-          1,
-          0,
-          List.of(),
-          List.of(),
-          List.of());
+      return PullOffer.giving(2 * d.lowN(), 2 * d.highN(), d.limit())
+          .holds(2 * d.holdN(), true)
+          .travel(2, null)
+          .overrun(0.05)
+          .done();
     }
   }
 

@@ -10,11 +10,13 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Set;
 import java.util.function.Consumer;
+import org.fallwright.core.pull.Parameter;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullRequest;
 import org.fallwright.core.pull.PullSource;
 import org.fallwright.core.pull.PullSources;
 import org.fallwright.core.pull.SourceDescription;
+import org.fallwright.core.pull.Wording;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.store.SiteFile;
 
@@ -26,6 +28,11 @@ final class TinySite {
   private static final Path DEMO =
       Path.of("..", "ui", "demo", "oak-behind-the-house.fallsite.json");
 
+  private static final PullOffer.Limit AS_TOLD =
+      new PullOffer.Limit(
+          new Wording("as told", "como se dijo"),
+          new Wording("It gives what it is told to.", "Da lo que se le dice."));
+
   private TinySite() {}
 
   /** A source that gives a force by its parameter {@code pull_N}, holds it, and never more. */
@@ -34,10 +41,17 @@ final class TinySite {
     public SourceDescription describe() {
       return new SourceDescription(
           "steady",
-          "Steady pull",
+          new Wording("Steady pull", "tiro constante"),
           Set.of(SourceDescription.PlaceKind.ANCHOR, SourceDescription.PlaceKind.SPOT),
           false,
-          List.of(SourceDescription.Parameter.number("pull_N", "Pull", "N", 0, 1e6)));
+          List.of(
+              Parameter.number(
+                  "pull_N",
+                  "N",
+                  0,
+                  1e6,
+                  new Wording("Pull", "Tiro"),
+                  new Wording("What it gives.", "Lo que da."))));
     }
 
     @Override
@@ -48,9 +62,7 @@ final class TinySite {
     @Override
     public PullOffer offer(PullRequest request) {
       double pull = request.parameters().get("pull_N").asDouble();
-      return new PullOffer(
-          pull, pull, pull, true, "as told", 1, false, 0.05, 0, 1, 1, 0, List.of(), List.of(),
-          List.of());
+      return PullOffer.giving(pull, pull, AS_TOLD).holds(pull, true).overrun(0.05).done();
     }
   }
 

@@ -6,13 +6,15 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Set;
 import org.fallwright.core.pull.HaulLine;
+import org.fallwright.core.pull.Parameter;
+import org.fallwright.core.pull.Parameter.Choice;
 import org.fallwright.core.pull.PullOffer;
+import org.fallwright.core.pull.PullOffer.Limit;
 import org.fallwright.core.pull.PullOffer.Part;
 import org.fallwright.core.pull.PullRequest;
 import org.fallwright.core.pull.SourceDescription;
-import org.fallwright.core.pull.SourceDescription.Parameter;
 import org.fallwright.core.pull.SourceDescription.PlaceKind;
-import org.fallwright.core.pull.SourceDescription.ValueKind;
+import org.fallwright.core.pull.Wording;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.plugins.api.ParameterReader;
 import org.fallwright.plugins.api.PullSourceExtension;
@@ -37,36 +39,109 @@ public final class BlockSystem implements PullSourceExtension {
 
   private static final String FIXED = "fixed";
 
+  private static final String MOVING = "moving";
+
   private static final SourceDescription DESCRIPTION =
       new SourceDescription(
           "block-system",
-          "block system",
+          new Wording("block system", "aparejo de poleas"),
           Set.of(PlaceKind.ANCHOR),
           true,
           List.of(
-              new Parameter(
+              Parameter.choices(
                   "parts",
-                  "Parts of line",
-                  ValueKind.CHOICES,
+                  new Wording("Parts of line", "Ramales de cuerda"),
+                  new Wording(
+                      "How many parts of line pull at the moving block; every number that it can be"
+                          + " rigged with.",
+                      "Cuántos ramales jalan la polea que se mueve; todos los números con que se"
+                          + " puede armar."),
+                  rig("2"),
+                  rig("3"),
+                  rig("4"),
+                  rig("5"),
+                  rig("6")),
+              Parameter.choice(
+                      "form",
+                      new Wording(
+                          "Block that the haul part leaves",
+                          "Polea de donde sale el ramal de tiro"),
+                      new Wording(
+                          "The fixed block costs one more sheave but lets people stand off to the"
+                              + " side.",
+                          "La polea fija gasta una rueda más, pero deja trabajar de lado."),
+                      Choice.of(FIXED, "the fixed block", "la polea fija"),
+                      Choice.of(MOVING, "the moving block", "la polea que se mueve"))
+                  .preset(FIXED),
+              Parameter.number(
+                  "efficiency",
                   "",
-                  0,
-                  0,
-                  List.of("2", "3", "4", "5", "6")),
-              new Parameter(
-                  "form",
-                  "Block that the haul part leaves",
-                  ValueKind.CHOICE,
+                  0.3,
+                  1,
+                  new Wording("Tension passed on by a sheave", "Tensión que pasa cada polea"),
+                  new Wording(
+                      "What is left of the tension after one sheave: 0.9 to 0.98 on bearings, much"
+                          + " less on a bare pin or a connector.",
+                      "Lo que queda de la tensión después de una polea: 0.9 a 0.98 con balero, mucho"
+                          + " menos sobre un perno o un gancho.")),
+              Parameter.number(
+                  "block_rated_N",
+                  "N",
+                  100,
+                  1e7,
+                  new Wording("Rated load of a block", "Carga límite de trabajo de una polea"),
+                  new Wording(
+                      "The working load limit stamped on the weakest block.",
+                      "La carga límite de trabajo (WLL) marcada en la polea más débil.")),
+              Parameter.number(
+                  "block_factor",
                   "",
-                  0,
-                  0,
-                  List.of(FIXED, "moving")),
-              Parameter.number("efficiency", "Tension passed on by a sheave", "", 0.3, 1),
-              Parameter.number("block_rated_N", "Rated load of a block", "N", 100, 1e7),
-              Parameter.number("block_factor", "Its standard's factor", "", 1, 12),
-              Parameter.number("line_breaking_N", "Breaking load of the line", "N", 500, 5e6),
-              Parameter.number("line_termination", "What its ends leave of that", "", 0.1, 1),
-              Parameter.number("line_stiffness_N", "Stiffness EA of the line", "N", 1e3, 1e9),
-              Parameter.number("line_length_m", "Length of the line", "m", 1, 1000)));
+                  1,
+                  12,
+                  new Wording("Its standard's factor", "Factor de diseño de la polea"),
+                  new Wording(
+                      "Breaking load over rated load that the block's standard asks.",
+                      "Carga de ruptura entre carga límite de trabajo, según su norma.")),
+              Parameter.number(
+                  "line_breaking_N",
+                  "N",
+                  500,
+                  5e6,
+                  new Wording("Breaking load of the line", "Carga de ruptura de la cuerda"),
+                  new Wording(
+                      "As on the label of the line in the blocks.",
+                      "La de la etiqueta de la cuerda que va en las poleas.")),
+              Parameter.number(
+                  "line_termination",
+                  "",
+                  0.1,
+                  1,
+                  new Wording("What its ends leave of that", "Lo que dejan sus puntas"),
+                  new Wording(
+                      "Share of the breaking load that knot, splice or eye leaves.",
+                      "Parte de la carga de ruptura que dejan el nudo, el empalme o el ojo.")),
+              Parameter.number(
+                  "line_stiffness_N",
+                  "N",
+                  1e3,
+                  1e9,
+                  new Wording("Stiffness EA of the line", "Rigidez EA de la cuerda"),
+                  new Wording(
+                      "Tension over stretch as a share of length; the softest of its range.",
+                      "Tensión entre alargamiento por metro; la más blanda de su rango.")),
+              Parameter.number(
+                  "line_length_m",
+                  "m",
+                  1,
+                  1000,
+                  new Wording("Length of the line", "Largo de la cuerda"),
+                  new Wording(
+                      "All of the line in the blocks, from end to end.",
+                      "Toda la cuerda de las poleas, de punta a punta."))));
+
+  private static Choice rig(String parts) {
+    return Choice.of(parts, parts + ":1", parts + " a 1");
+  }
 
   @Override
   public SourceDescription describe() {
@@ -95,22 +170,28 @@ public final class BlockSystem implements PullSourceExtension {
           "driver is not stated; a block system needs another source that hauls it");
     }
     Tackle tackle = new Tackle(n, reader.number("efficiency"), reader.choice("form").equals(FIXED));
-    return new PullOffer(
-        driver.lowN() * tackle.gain(),
-        driver.highN() * n,
-        driver.holdN() * n,
-        driver.captured(),
-        driver.limit() + ", through " + n + ":1",
-        driver.velocityRatio() * n,
-        driver.powered(),
-        driver.overrunM() / n,
-        0,
-        tackle.anchorHauling(),
-        tackle.anchorHolding(),
-        driver.operators(),
-        parts(reader, tackle, driver),
-        driver.checks(),
-        notes(request, n, driver));
+    Wording limit = driver.limit().what();
+    return PullOffer.giving(
+            driver.lowN() * tackle.gain(),
+            driver.highN() * n,
+            new Limit(
+                new Wording(
+                    limit.english() + ", through " + n + ":1",
+                    limit.spanish() + ", por " + n + " a 1"),
+                driver.limit().why()))
+        .holds(driver.holdN() * n, driver.captured())
+        .travel(
+            driver.travel().ratio() * n,
+            driver.travel().mostM() == null ? null : driver.travel().mostM() / n)
+        .powered(driver.powered())
+        .overrun(driver.overrunM() / n)
+        .stiffness(driver.stiffnessNPerM() == null ? null : driver.stiffnessNPerM() * n * n)
+        .anchor(tackle.anchorHauling(), tackle.anchorHolding())
+        .people(driver.people())
+        .parts(parts(reader, tackle, driver))
+        .checks(driver.checks())
+        .notes(notes(request, n, driver))
+        .done();
   }
 
   private static int parts(String mode, ParameterReader reader) {
@@ -123,13 +204,7 @@ public final class BlockSystem implements PullSourceExtension {
   }
 
   private static ParameterReader read(ObjectNode parameters) {
-    ParameterReader reader = new ParameterReader(DESCRIPTION, parameters);
-    reader.choices("parts");
-    reader.choice("form");
-    DESCRIPTION.parameters().stream()
-        .filter(p -> p.kind() == ValueKind.NUMBER)
-        .forEach(p -> reader.number(p.key()));
-    return reader;
+    return new ParameterReader(DESCRIPTION, parameters);
   }
 
   private static List<Part> parts(ParameterReader reader, Tackle tackle, PullOffer driver) {
@@ -174,9 +249,9 @@ public final class BlockSystem implements PullSourceExtension {
             Locale.ROOT,
             "The haul end moves %.1f m, %d times the take-up; the blocks must start at least %.1f m"
                 + " apart or the system be reset.",
-            n * request.takeUpM() * request.travelRatio(),
+            n * request.pull().lineInM(),
             n,
-            request.takeUpM() * request.travelRatio()));
+            request.pull().lineInM()));
     notes.addAll(driver.notes());
     return notes;
   }

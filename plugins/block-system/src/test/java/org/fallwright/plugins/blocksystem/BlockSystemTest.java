@@ -14,6 +14,7 @@ import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullOffer.Finding;
 import org.fallwright.core.pull.PullOffer.Part;
 import org.fallwright.core.pull.PullRequest;
+import org.fallwright.core.pull.Wording;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -22,22 +23,21 @@ class BlockSystemTest {
   private static final Finding DRIVERS_CHECK = new Finding("run-out", 10, 8, "m", 1.25, "why");
   private static final Part DRIVERS_PART = new Part("tow point", 90_000, 3, 1.5, 1, 1);
   private static final PullOffer DRIVER =
-      new PullOffer(
-          3720,
-          9270,
-          8000,
-          true,
-          "grip of the rear axle",
-          1,
-          true,
-          0.5,
-          0,
-          0,
-          0,
-          1,
-          List.of(DRIVERS_PART),
-          List.of(DRIVERS_CHECK),
-          List.of("Creep."));
+      PullOffer.giving(
+              3720,
+              9270,
+              new PullOffer.Limit(
+                  new Wording("grip of the rear axle", "agarre del eje trasero"),
+                  new Wording("It slips.", "Patina.")))
+          .holds(8000, true)
+          .powered(true)
+          .overrun(0.5)
+          .anchor(0, 0)
+          .people(PullOffer.Standing.one("drives", "maneja"))
+          .parts(List.of(DRIVERS_PART))
+          .checks(List.of(DRIVERS_CHECK))
+          .notes(List.of("Creep."))
+          .done();
 
   private final BlockSystem blocks = new BlockSystem();
 
@@ -58,14 +58,14 @@ class BlockSystemTest {
   @Test
   void whatTheDriverDoesGoesThroughTheSystem() {
     PullOffer four = offer("4", "fixed");
-    assertThat(four.velocityRatio()).isEqualTo(4);
+    assertThat(four.travel().ratio()).isEqualTo(4);
     assertThat(four.overrunM()).isEqualTo(0.125);
     assertThat(four.captured()).isTrue();
     assertThat(four.powered()).isTrue();
     assertThat(four.operators()).isEqualTo(1);
     assertThat(four.checks()).containsExactly(DRIVERS_CHECK);
     assertThat(four.notes()).contains("Creep.");
-    assertThat(four.limit()).isEqualTo("grip of the rear axle, through 4:1");
+    assertThat(four.limit().what().english()).isEqualTo("grip of the rear axle, through 4:1");
     assertThat(four.notes().get(0)).startsWith("The haul end moves 11.2 m, 4 times the take-up");
   }
 
@@ -159,7 +159,13 @@ class BlockSystemTest {
   }
 
   private static PullRequest request(String mode, ObjectNode parameters, PullOffer driver) {
-    return new PullRequest(parameters, mode, null, 0.3, 0, null, 20_000, 1, 2.8, null, driver);
+    return new PullRequest(
+        parameters,
+        mode,
+        new PullRequest.Stand(null, 0.3, 0, null, 1, 30, null),
+        new PullRequest.Pull(20_000, 1, 2.8, null),
+        null,
+        driver);
   }
 
   private static ObjectNode parameters(String form) {

@@ -4,12 +4,14 @@ import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Set;
+import org.fallwright.core.pull.Parameter;
 import org.fallwright.core.pull.PullOffer;
+import org.fallwright.core.pull.PullOffer.Standing;
+import org.fallwright.core.pull.PullOffer.Where;
 import org.fallwright.core.pull.PullRequest;
 import org.fallwright.core.pull.SourceDescription;
-import org.fallwright.core.pull.SourceDescription.Parameter;
 import org.fallwright.core.pull.SourceDescription.PlaceKind;
-import org.fallwright.core.pull.SourceDescription.ValueKind;
+import org.fallwright.core.pull.Wording;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.reference.Surface;
 import org.fallwright.plugins.api.ParameterReader;
@@ -43,19 +45,74 @@ public final class HandLine implements PullSourceExtension {
   private static final SourceDescription DESCRIPTION =
       new SourceDescription(
           "hand-line",
-          "hand line",
+          new Wording("hand line", "cuerda jalada a mano"),
           Set.of(PlaceKind.SPOT),
           false,
           List.of(
-              new Parameter("people", "People", ValueKind.WHOLE_NUMBER, "", 1, 20, List.of()),
-              Parameter.number("person_mass_kg", "Mass of a person", "kg", 30, 200),
-              Parameter.number("stature_m", "Stature", "m", 1.2, 2.3),
-              Parameter.number("lean_back_deg", "Lean back of the body", "deg", 0, 45),
-              Parameter.number("hand_height_m", "Hands above the feet", "m", 0.3, 2),
+              Parameter.wholeNumber(
+                  "people",
+                  1,
+                  20,
+                  new Wording("People", "Personas"),
+                  new Wording(
+                      "How many pull; more than seven add nothing.",
+                      "Cuántas jalan; más de siete no agregan nada.")),
               Parameter.number(
-                  "hand_ahead_m", "Hands ahead of the feet, to the tree", "m", -0.5, 1),
-              new Parameter(
-                  "captured", "An anchored device holds", ValueKind.FLAG, "", 0, 0, List.of())));
+                  "person_mass_kg",
+                  "kg",
+                  30,
+                  200,
+                  new Wording("Mass of a person", "Peso de una persona (kg)"),
+                  new Wording(
+                      "Of the lightest who pulls, without gear.",
+                      "De la más ligera que jala, sin equipo.")),
+              Parameter.number(
+                  "stature_m",
+                  "m",
+                  1.2,
+                  2.3,
+                  new Wording("Stature", "Estatura"),
+                  new Wording(
+                      "Height of the shortest who pulls.", "Estatura de la más baja que jala.")),
+              Parameter.number(
+                      "lean_back_deg",
+                      "deg",
+                      0,
+                      45,
+                      new Wording("Lean back of the body", "Inclinación del cuerpo hacia atrás"),
+                      new Wording(
+                          "From upright, away from the tree, feet planted.",
+                          "Desde la vertical, alejándose del árbol, con los pies firmes."))
+                  .preset(20),
+              Parameter.number(
+                      "hand_height_m",
+                      "m",
+                      0.3,
+                      2,
+                      new Wording("Hands above the feet", "Altura de las manos"),
+                      new Wording(
+                          "Height of the line in the hands above the soles.",
+                          "Altura de la cuerda en las manos desde la suela."))
+                  .preset(1),
+              Parameter.number(
+                      "hand_ahead_m",
+                      "m",
+                      -0.5,
+                      1,
+                      new Wording(
+                          "Hands ahead of the feet, to the tree",
+                          "Manos delante de los pies, hacia el árbol"),
+                      new Wording(
+                          "Along the ground; negative where the hands are behind the feet.",
+                          "A lo largo del suelo; negativo si las manos quedan atrás de los pies."))
+                  .preset(0.3),
+              Parameter.flag(
+                  "captured",
+                  new Wording("An anchored device holds", "La sostiene un aparato anclado"),
+                  new Wording(
+                      "Whether a device on an anchor keeps the line when people let go.",
+                      "Si un aparato en un anclaje sostiene la cuerda cuando la gente"
+                          + " afloja."))));
 
   @Override
   public SourceDescription describe() {
@@ -80,13 +137,14 @@ public final class HandLine implements PullSourceExtension {
       throw new IllegalArgumentException(
           "mode is \"" + request.mode() + "\"; it must be \"pull\" for a hand line");
     }
-    Surface ground = request.ground();
+    PullRequest.Stand stand = request.stand();
+    Surface ground = stand.ground();
     if (ground == null) {
       throw new IllegalArgumentException(
           "ground is not stated; a hand line needs the ground that its people stand on");
     }
-    double rise = request.lineRiseRad();
-    double slope = request.uphillRad();
+    double rise = stand.lineRiseRad();
+    double slope = stand.uphillRad();
     PersonPull low =
         new PersonPull(
             Math.min(crew.tipN(0, rise), crew.tipN(-crew.handAheadM, rise)),
@@ -96,22 +154,17 @@ public final class HandLine implements PullSourceExtension {
     double oneHighN =
         Math.min(
             PersonPull.slipN(crew.massKg, ground.bootHigh(), rise, slope), ground.personHighN());
-    return new PullOffer(
-        lowN,
-        oneHighN * crew.people * HIGH_FACTOR,
-        lowN,
-        crew.captured,
-        low.limit(),
-        1,
-        false,
-        OVERRUN_M,
-        0,
-        0,
-        0,
-        crew.people,
-        List.of(),
-        List.of(),
-        notes(crew));
+    return PullOffer.giving(lowN, oneHighN * crew.people * HIGH_FACTOR, low.limit())
+        .holds(lowN, crew.captured)
+        .overrun(OVERRUN_M)
+        .people(
+            new Standing(
+                new Wording("pulls on the line", "jala la cuerda"),
+                Where.AT_SOURCE,
+                crew.people,
+                0))
+        .notes(notes(crew))
+        .done();
   }
 
   private static List<String> notes(Parameters crew) {

@@ -1,5 +1,7 @@
 package org.fallwright.plugins.handline;
 
+import org.fallwright.core.pull.PullOffer.Limit;
+import org.fallwright.core.pull.Wording;
 import org.fallwright.core.units.Units;
 
 /**
@@ -18,17 +20,40 @@ record PersonPull(double tipN, double slipN, double strengthN) {
    */
   private static final double MASS_CENTRE_SHARE = 0.55;
 
+  private static final Limit SLIP =
+      new Limit(
+          new Wording("boots slip", "las botas se resbalan"),
+          new Wording(
+              "On this ground the boots slip before the people run out of strength.",
+              "En este suelo las botas se resbalan antes de que a la gente le falte fuerza."));
+
+  private static final Limit TIP =
+      new Limit(
+          new Wording("body tips forward", "el cuerpo se va hacia adelante"),
+          new Wording(
+              "The line draws the people upright: leaning back farther or holding it lower would"
+                  + " give more.",
+              "La cuerda endereza a la gente: más inclinada hacia atrás o con las manos más abajo"
+                  + " daría más."));
+
+  private static final Limit STRENGTH =
+      new Limit(
+          new Wording("strength of a person", "fuerza de una persona"),
+          new Wording(
+              "The boots grip well enough; a person cannot keep up more than this.",
+              "Las botas agarran bien; una persona no puede sostener más que esto."));
+
   /** The pull that can be had [N]. */
   double leastN() {
     return Math.min(tipN, Math.min(slipN, strengthN));
   }
 
-  /** What limits it, in a few words. */
-  String limit() {
+  /** What limits it, and why. */
+  Limit limit() {
     if (slipN <= tipN && slipN <= strengthN) {
-      return "boots slip";
+      return SLIP;
     }
-    return tipN <= strengthN ? "body tips forward" : "strength of a person";
+    return tipN <= strengthN ? TIP : STRENGTH;
   }
 
   /**

@@ -26,7 +26,7 @@ class HandLineTest {
   void fourOnWetGrassGiveAThirdOfAKilonewton() {
     PullOffer offer = handLine.offer(request(WET, 4, 0.1, 10, false));
     assertThat(offer.lowN()).isCloseTo(4 * 0.79 * 110, within(1e-9));
-    assertThat(offer.limit()).isEqualTo("strength of a person");
+    assertThat(offer.limit().what().english()).isEqualTo("strength of a person");
     assertThat(offer.operators()).isEqualTo(4);
     assertThat(offer.powered()).isFalse();
   }
@@ -41,7 +41,7 @@ class HandLineTest {
   void theHighDoesNotDependOnTheLeanEntered() {
     ObjectNode upright = parameters(4, 0.1, false).put("lean_back_deg", 2);
     PullOffer offer = handLine.offer(request(DRY, upright, 0));
-    assertThat(offer.limit()).isEqualTo("body tips forward");
+    assertThat(offer.limit().what().english()).isEqualTo("body tips forward");
     assertThat(offer.highN()).isCloseTo(1.5 * 4 * 310, within(1e-9));
   }
 
@@ -49,7 +49,7 @@ class HandLineTest {
   void onIceBootsDecideAndTheCrewStillDoesNotPullMoreThanTheySlip() {
     Surface ice = new Surface("ice", false, "ice", 0.1, 0.15, 0.01, 0.05, 0.1, 110, 110);
     PullOffer offer = handLine.offer(request(ice, 1, 0.1, 20, false));
-    assertThat(offer.limit()).isEqualTo("boots slip");
+    assertThat(offer.limit().what().english()).isEqualTo("boots slip");
     assertThat(offer.lowN()).isLessThan(50);
     assertThat(offer.highN()).isCloseTo(1.5 * 82 / 80 * 80.6, within(0.1));
   }
@@ -107,33 +107,29 @@ class HandLineTest {
 
   private double tipping(double handAhead, double riseDeg) {
     ObjectNode lazy = parameters(1, handAhead, false).put("lean_back_deg", 3);
-    PullOffer offer =
-        handLine.offer(
-            new PullRequest(
-                lazy, "pull", DRY, Math.toRadians(riseDeg), 0, null, 0, 1, 1, null, null));
-    assertThat(offer.limit()).isEqualTo("body tips forward");
+    PullOffer offer = handLine.offer(request(DRY, lazy, Math.toRadians(riseDeg), 0));
+    assertThat(offer.limit().what().english()).isEqualTo("body tips forward");
     return offer.lowN();
   }
 
   private static PullRequest request(
       Surface ground, int people, double handAhead, double riseDeg, boolean captured) {
-    return new PullRequest(
-        parameters(people, handAhead, captured),
-        "pull",
-        ground,
-        Math.toRadians(riseDeg),
-        0,
-        null,
-        20_000,
-        1,
-        3,
-        null,
-        null);
+    return request(ground, parameters(people, handAhead, captured), Math.toRadians(riseDeg), 0);
   }
 
   private static PullRequest request(Surface ground, ObjectNode parameters, double uphillRad) {
+    return request(ground, parameters, 0, uphillRad);
+  }
+
+  private static PullRequest request(
+      Surface ground, ObjectNode parameters, double riseRad, double uphillRad) {
     return new PullRequest(
-        parameters, "pull", ground, 0, uphillRad, null, 20_000, 1, 3, null, null);
+        parameters,
+        "pull",
+        new PullRequest.Stand(ground, riseRad, uphillRad, null, 1, 30, null),
+        new PullRequest.Pull(20_000, 1, 3, null),
+        null,
+        null);
   }
 
   private static ObjectNode parameters(int people, double handAhead, boolean captured) {

@@ -2,55 +2,31 @@ package org.fallwright.plugins.api;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
-import java.util.ArrayList;
 import java.util.HashSet;
-import java.util.Iterator;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
 import java.util.Set;
-import java.util.stream.Collectors;
+import org.fallwright.core.pull.Parameter;
+import org.fallwright.core.pull.Parameter.Kind;
 import org.fallwright.core.pull.SourceDescription;
-import org.fallwright.core.pull.SourceDescription.Parameter;
-import org.fallwright.core.pull.SourceDescription.ValueKind;
-import org.fallwright.core.units.Range;
 
 /**
- * Reads a source's parameters strictly by its own description: nothing is defaulted, clipped or
- * passed over. A key that the description does not know is refused, and so is every stated value of
- * the wrong kind or out of its range, whether it is asked for or not. A value of null counts as not
- * stated.
- *
- * <p>Whatever is wrong is an {@link IllegalArgumentException} of one sentence that names the key,
- * what was found and what is asked, limits and unit included.
+ * Reads a source's parameters by its own description, which refuses in one sentence whatever is
+ * unknown, wrong, out of range, missing or out of place: nothing is defaulted, clipped or passed
+ * over. A value of null counts as not stated.
  */
 public final class ParameterReader {
-  private final Map<String, Parameter> known = new LinkedHashMap<>();
+  private final SourceDescription description;
   private final ObjectNode values;
 
   /**
-   * Takes the parameters and checks all that are stated.
+   * Takes the parameters and checks all of them.
    *
-   * @throws IllegalArgumentException if a key is unknown or a value is not what its key asks
+   * @throws IllegalArgumentException see {@link SourceDescription#check}
    */
   public ParameterReader(SourceDescription description, ObjectNode values) {
+    description.check(values);
+    this.description = description;
     this.values = values;
-    description.parameters().forEach(p -> known.put(p.key(), p));
-    for (Iterator<String> keys = values.fieldNames(); keys.hasNext(); ) {
-      String key = keys.next();
-      Parameter parameter = known.get(key);
-      if (parameter == null) {
-        throw new IllegalArgumentException(
-            brief(key)
-                + " is not a parameter of the "
-                + description.name()
-                + "; it knows "
-                + String.join(", ", known.keySet()));
-      }
-      if (isStated(key)) {
-        check(parameter, values.get(key));
-      }
-    }
   }
 
   /** Whether the key has a value. */
@@ -58,116 +34,51 @@ public final class ParameterReader {
     return values.hasNonNull(key);
   }
 
-  /** A number that must be stated, in the parameter's unit. */
+  /** A number, in the parameter's unit. */
   public double number(String key) {
-    return stated(key, ValueKind.NUMBER).doubleValue();
+    return stated(key, Kind.NUMBER).doubleValue();
   }
 
-  /** A whole number that must be stated. */
+  /** A number, in the parameter's unit; null where it is not stated. */
+  public Double numberOrNull(String key) {
+    return isStated(key) ? Double.valueOf(number(key)) : null;
+  }
+
+  /** A whole number. */
   public int wholeNumber(String key) {
-    return stated(key, ValueKind.WHOLE_NUMBER).intValue();
+    return stated(key, Kind.WHOLE_NUMBER).intValue();
   }
 
-  /** A flag that must be stated. */
+  /** A flag. */
   public boolean flag(String key) {
-    return stated(key, ValueKind.FLAG).booleanValue();
+    return stated(key, Kind.FLAG).booleanValue();
   }
 
-  /** The one choice that must be stated. */
+  /** The one choice made. */
   public String choice(String key) {
-    return stated(key, ValueKind.CHOICE).textValue();
+    return stated(key, Kind.CHOICE).textValue();
   }
 
   /** The choices made, at least one, in the order of the description. */
   public List<String> choices(String key) {
     Set<String> chosen = new HashSet<>();
-    stated(key, ValueKind.CHOICES).forEach(n -> chosen.add(n.asText()));
-    return known.get(key).choices().stream().filter(chosen::contains).toList();
+    stated(key, Kind.CHOICES).forEach(n -> chosen.add(n.asText()));
+    return parameter(key).choiceKeys().stream().filter(chosen::contains).toList();
   }
 
-  /**
-   * Refuses a value where there must be none.
-   *
-   * @param kind what has no such value, for example "a hand winch"
-   */
-  public void refuse(String key, String kind) {
-    if (isStated(key)) {
-      throw new IllegalArgumentException(
-          key + " is " + brief(values.get(key).toString()) + "; it must be left out for " + kind);
-    }
-  }
-
-  private JsonNode stated(String key, ValueKind kind) {
-    Parameter parameter = known.get(key);
-    if (parameter == null || parameter.kind() != kind) {
+  private JsonNode stated(String key, Kind kind) {
+    if (parameter(key).kind() != kind) {
       throw new IllegalStateException(key + " is not described as " + kind);
     }
     if (!isStated(key)) {
-      throw new IllegalArgumentException(key + " is missing; it must be " + asked(parameter));
+      throw new IllegalArgumentException(key + " is missing; it must be " + parameter(key).asked());
     }
     return values.get(key);
   }
 
-  private static void check(Parameter parameter, JsonNode value) {
-    boolean fits =
-        switch (parameter.kind()) {
-          case NUMBER -> value.isNumber();
-          case WHOLE_NUMBER -> value.isIntegralNumber() && value.canConvertToInt();
-          case FLAG -> value.isBoolean();
-          case CHOICE -> value.isTextual() && parameter.choices().contains(value.textValue());
-          case CHOICES -> areChoices(parameter, value);
-        };
-    if (!fits) {
-      throw new IllegalArgumentException(
-          parameter.key() + " is " + brief(value.toString()) + "; it must be " + asked(parameter));
-    }
-    if (value.isNumber()) {
-      Range.check(
-          parameter.key(),
-          value.doubleValue(),
-          parameter.least(),
-          parameter.most(),
-          parameter.unit());
-    }
-  }
-
-  private static boolean areChoices(Parameter parameter, JsonNode value) {
-    if (!value.isArray() || value.isEmpty()) {
-      return false;
-    }
-    List<String> made = new ArrayList<>();
-    for (JsonNode one : value) {
-      if (!one.isTextual() && !one.isIntegralNumber()) {
-        return false;
-      }
-      made.add(one.asText());
-    }
-    return parameter.choices().containsAll(made) && new HashSet<>(made).size() == made.size();
-  }
-
-  private static String asked(Parameter p) {
-    String unit = p.unit().isEmpty() ? "" : " " + p.unit();
-    return switch (p.kind()) {
-      case NUMBER -> "a number from " + plain(p.least()) + " to " + plain(p.most()) + unit;
-      case WHOLE_NUMBER ->
-          "a whole number from " + plain(p.least()) + " to " + plain(p.most()) + unit;
-      case FLAG -> "true or false";
-      case CHOICE -> "one of " + quoted(p.choices());
-      case CHOICES -> "a list of one or more of " + quoted(p.choices()) + ", each at most once";
-    };
-  }
-
-  private static String quoted(List<String> choices) {
-    return choices.stream().map(c -> "\"" + c + "\"").collect(Collectors.joining(", "));
-  }
-
-  private static String plain(double value) {
-    return value == Math.rint(value) && Math.abs(value) < 1e15
-        ? Long.toString((long) value)
-        : Double.toString(value);
-  }
-
-  private static String brief(String text) {
-    return text.length() <= 60 ? text : text.substring(0, 57) + "...";
+  private Parameter parameter(String key) {
+    return description
+        .parameter(key)
+        .orElseThrow(() -> new IllegalStateException(key + " is not described"));
   }
 }

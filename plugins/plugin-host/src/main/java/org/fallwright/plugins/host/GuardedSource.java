@@ -10,7 +10,6 @@ import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullRequest;
 import org.fallwright.core.pull.PullSource;
 import org.fallwright.core.pull.SourceDescription;
-import org.fallwright.core.pull.SourceDescription.Parameter;
 
 /**
  * A plugin's source behind a guard. The description is asked for once. Whatever else the plugin
@@ -40,18 +39,6 @@ final class GuardedSource implements PullSource {
     }
     if (answer == null) {
       throw nonsense("describes its pull source by nothing at all", null);
-    }
-    if (answer.places().isEmpty()) {
-      throw nonsense("describes a pull source that can stand nowhere", null);
-    }
-    HashSet<String> keys = new HashSet<>();
-    for (Parameter parameter : answer.parameters()) {
-      if (!keys.add(parameter.key())) {
-        throw nonsense("describes the parameter " + parameter.key() + " twice", null);
-      }
-      if (!isUsable(parameter)) {
-        throw nonsense("gives the parameter " + parameter.key() + " no usable limits", null);
-      }
     }
     description = answer;
   }
@@ -96,20 +83,9 @@ final class GuardedSource implements PullSource {
 
   @Override
   public PullOffer offer(PullRequest request) {
-    PullRequest copy =
-        new PullRequest(
-            request.parameters().deepCopy(),
-            request.mode(),
-            request.ground(),
-            request.lineRiseRad(),
-            request.uphillRad(),
-            request.offHeadingRad(),
-            request.pathStiffness(),
-            request.travelRatio(),
-            request.takeUpM(),
-            request.runOutM(),
-            request.driver());
-    PullOffer answer = guarded("work out its pull", () -> source.offer(copy));
+    PullOffer answer =
+        guarded(
+            "work out its pull", () -> source.offer(request.with(request.parameters().deepCopy())));
     if (answer == null) {
       throw nonsense("gives no pull at all, not even none", null);
     }
@@ -148,17 +124,6 @@ final class GuardedSource implements PullSource {
     return e.getClass() == IllegalArgumentException.class
         && e.getMessage() != null
         && !e.getMessage().isBlank();
-  }
-
-  private static boolean isUsable(Parameter parameter) {
-    return switch (parameter.kind()) {
-      case NUMBER, WHOLE_NUMBER ->
-          Double.isFinite(parameter.least())
-              && Double.isFinite(parameter.most())
-              && parameter.least() <= parameter.most();
-      case FLAG -> true;
-      case CHOICE, CHOICES -> !parameter.choices().isEmpty();
-    };
   }
 
   private static List<String> copied(List<String> answer) {

@@ -26,6 +26,11 @@ final class Plainly {
       return ""; // the exception itself comes from the plugin and may be broken too
     }
     String first = message == null ? "" : message.strip().lines().findFirst().orElse("");
-    return first.length() <= MOST_CHARACTERS ? first : first.substring(0, MOST_CHARACTERS) + "...";
+    return brief(first);
+  }
+
+  /** The text, cut where it is long. */
+  static String brief(String text) {
+    return text.length() <= MOST_CHARACTERS ? text : text.substring(0, MOST_CHARACTERS) + "...";
   }
 }

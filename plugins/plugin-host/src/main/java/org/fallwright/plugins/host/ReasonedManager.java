@@ -9,6 +9,8 @@ import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.jar.JarFile;
+import org.fallwright.core.pull.PullSource;
 import org.pf4j.DefaultPluginManager;
 import org.pf4j.JarPluginLoader;
 import org.pf4j.JarPluginRepository;
@@ -32,6 +34,9 @@ import org.pf4j.PluginWrapper;
  * folder is never written to.
  */
 final class ReasonedManager extends DefaultPluginManager {
+  /** Manifest entry by which an archive says for which {@link PullSource#CONTRACT} it was built. */
+  static final String CONTRACT_KEY = "Pull-Contract";
+
   private final List<NotLoaded> refused = new ArrayList<>();
 
   ReasonedManager(Path folder, String hostVersion) {
@@ -84,6 +89,10 @@ final class ReasonedManager extends DefaultPluginManager {
               + plugins.get(id).getPluginPath().getFileName()
               + ".");
     }
+    Optional<String> other = otherContract(archive);
+    if (other.isPresent()) {
+      return other;
+    }
     try {
       loadPluginFromPath(archive);
     } catch (RuntimeException | LinkageError e) {
@@ -107,6 +116,26 @@ final class ReasonedManager extends DefaultPluginManager {
       refuse(plugin, "Its Plugin-Requires \"" + asked + "\" cannot be read as versions.");
     }
     return false;
+  }
+
+  /** Why an archive's contract is not this program's; empty: it is. No class of it is loaded. */
+  private static Optional<String> otherContract(Path archive) {
+    String stated;
+    try (JarFile jar = new JarFile(archive.toFile())) {
+      stated = jar.getManifest().getMainAttributes().getValue(CONTRACT_KEY);
+    } catch (IOException | RuntimeException e) {
+      return Optional.of("It cannot be read as a plugin archive: " + Plainly.said(e) + ".");
+    }
+    if (Integer.toString(PullSource.CONTRACT).equals(stated)) {
+      return Optional.empty();
+    }
+    return Optional.of(
+        (stated == null
+                ? "Its manifest names no " + CONTRACT_KEY
+                : "It was built for pull contract \"" + Plainly.brief(stated) + "\"")
+            + "; this program takes contract "
+            + PullSource.CONTRACT
+            + ".");
   }
 
   /** Leaves out what cannot be sorted, then sorts the rest. */

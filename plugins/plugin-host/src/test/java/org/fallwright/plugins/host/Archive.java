@@ -29,9 +29,12 @@ final class Archive {
   private final Map<String, String> sources = new LinkedHashMap<>();
   private final List<String> extensions = new ArrayList<>();
 
-  /** An archive with this plugin id and version 1.2.3. */
+  /** An archive with this plugin id, version 1.2.3 and contract 2. */
   static Archive of(String pluginId) {
-    return new Archive().says("Plugin-Id", pluginId).says("Plugin-Version", "1.2.3");
+    return new Archive()
+        .says("Plugin-Id", pluginId)
+        .says("Plugin-Version", "1.2.3")
+        .says("Pull-Contract", "2");
   }
 
   Archive says(String key, String value) {
@@ -72,16 +75,16 @@ final class Archive {
         import org.fallwright.core.pull.*;
         import org.fallwright.core.pull.SourceDescription.*;
         public class NAME implements org.fallwright.plugins.api.PullSourceExtension {
+          static final Wording TWICE = new Wording("said", "dicho");
           MEMBERS
           public SourceDescription describe() {
-            return new SourceDescription("ID", "ID", Set.of(PlaceKind.SPOT), false,
-                List.of(Parameter.number("strength_N", "Strength", "N", 0, 1000)));
+            return new SourceDescription("ID", TWICE, Set.of(PlaceKind.SPOT), false,
+                List.of(Parameter.number("strength_N", "N", 0, 1000, TWICE, TWICE).mayBeLeftOut()));
           }
           public List<String> modes(ObjectNode p) { return List.of("pull"); }
           public PullOffer offer(PullRequest request) { BODY }
           PullOffer offer(double low) {
-            return new PullOffer(low, 200, 50, true, "arms", 1, false, 0.3, 0, 1, 1, 1,
-                List.of(), List.of(), List.of());
+            return PullOffer.giving(low, 200, new PullOffer.Limit(TWICE, TWICE)).done();
           }
         }
         """

@@ -28,7 +28,7 @@ class GuardedSourceTest {
 
   @Test
   void aGoodAnswerComesThrough() throws IOException {
-    PullSource source = source("return offer(request.takeUpM());");
+    PullSource source = source("return offer(request.pull().takeUpM());");
     assertThat(source.offer(request()).lowN()).isEqualTo(2);
     assertThat(source.modes(parameters())).containsExactly("pull");
   }
@@ -100,9 +100,8 @@ class GuardedSourceTest {
       quoteCharacter = '\'',
       value = {
         "null | describes its pull source by nothing at all.",
-        "new SourceDescription(\"y\", \"y\", Set.of(), false, List.of()) | describes a pull source that can stand nowhere.",
-        "new SourceDescription(\"y\", \"y\", Set.of(PlaceKind.SPOT), false, List.of(Parameter.number(\"a\", \"A\", \"\", 1, Double.NaN))) | gives the parameter a no usable limits.",
-        "new SourceDescription(\"y\", \"y\", Set.of(PlaceKind.SPOT), false, List.of(Parameter.number(\"a\", \"A\", \"\", 1, 2), Parameter.number(\"a\", \"B\", \"\", 1, 2))) | describes the parameter a twice.",
+        "new SourceDescription(\"y\", new Wording(\"y\", \"y\"), Set.of(), false, List.of()) | 'failed to describe its pull source: IllegalArgumentException (places, how many is 0; it must be from 1 to 2).'",
+        "new SourceDescription(\"y\", new Wording(\"y\", \"y\"), Set.of(PlaceKind.SPOT), false, List.of(Parameter.flag(\"a\", new Wording(\"y\", \"y\"), null))) | 'failed to describe its pull source: IllegalArgumentException (help is null; it must be stated).'",
       })
   void aPoorDescriptionIsNotLoaded(String description, String sentence) throws IOException {
     Archive.of("x")
@@ -144,6 +143,12 @@ class GuardedSourceTest {
   }
 
   private static PullRequest request() {
-    return new PullRequest(parameters(), "pull", null, 0, 0, null, 0, 1, 2, null, null);
+    return new PullRequest(
+        parameters(),
+        "pull",
+        new PullRequest.Stand(null, 0, 0, null, 1, 20, null),
+        new PullRequest.Pull(0, 1, 2, null),
+        null,
+        null);
   }
 }

@@ -1,26 +1,33 @@
 package org.fallwright.plugins.vehicle;
 
 import java.util.Locale;
+import org.fallwright.core.pull.PullOffer.Limit;
+import org.fallwright.core.pull.Wording;
 
 /** Which wheels keep a vehicle from being drawn to the tree. */
 enum Drive {
   /** Rear axle drives, front axle rolls. */
-  RWD(false, true, "grip of the rear axle"),
+  RWD(false, true, "the rear axle", "del eje trasero"),
   /** Front axle drives, rear axle rolls. */
-  FWD(true, false, "grip of the front axle"),
+  FWD(true, false, "the front axle", "del eje delantero"),
   /** All wheels drive, coupled so that each axle takes its share. */
-  AWD(true, true, "grip of all wheels"),
+  AWD(true, true, "all wheels", "de todas las llantas"),
   /** All wheels locked, standing. */
-  LOCKED(true, true, "grip of all wheels");
+  LOCKED(true, true, "all wheels", "de todas las llantas");
 
   final boolean front;
   final boolean rear;
-  final String limit;
+  final Limit limit;
 
-  Drive(boolean front, boolean rear, String limit) {
+  Drive(boolean front, boolean rear, String driven, String spanish) {
     this.front = front;
     this.rear = rear;
-    this.limit = limit;
+    limit =
+        new Limit(
+            new Wording("grip of " + driven, "agarre " + spanish),
+            new Wording(
+                "On this ground the wheels slip before the vehicle pulls more.",
+                "En este suelo las llantas patinan antes de que el vehículo jale más."));
   }
 
   /** The drive of a mode, for example "rwd". */

@@ -1,5 +1,7 @@
 package org.fallwright.plugins.vehicle;
 
+import org.fallwright.core.pull.PullOffer.Limit;
+import org.fallwright.core.pull.Wording;
 import org.fallwright.plugins.vehicle.Chassis.AxleLoad;
 
 /**
@@ -19,9 +21,16 @@ import org.fallwright.plugins.vehicle.Chassis.AxleLoad;
  * @param tensionN T [N]
  * @param frontN load on the front axle under T [N]
  * @param rearN load on the rear axle under T [N]
- * @param limit what limits it, in a few words
+ * @param limit what limits it, and why
  */
-record Traction(double tensionN, double frontN, double rearN, String limit) {
+record Traction(double tensionN, double frontN, double rearN, Limit limit) {
+  static final Limit LIFT =
+      new Limit(
+          new Wording("axle lift", "se levanta un eje"),
+          new Wording(
+              "More pull would lift an axle off the ground.",
+              "Con más tiro se levantaría un eje del suelo."));
+
   /**
    * The pull of one drive.
    *
@@ -49,6 +58,6 @@ record Traction(double tensionN, double frontN, double rearN, String limit) {
     double byLift = Math.min(front.liftsAtN(), rear.liftsAtN());
     double tension = Math.min(byGrip, byLift);
     return new Traction(
-        tension, front.at(tension), rear.at(tension), byLift < byGrip ? "axle lift" : drive.limit);
+        tension, front.at(tension), rear.at(tension), byLift < byGrip ? LIFT : drive.limit);
   }
 }

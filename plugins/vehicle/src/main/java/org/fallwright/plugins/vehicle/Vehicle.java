@@ -5,14 +5,16 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Set;
+import org.fallwright.core.pull.Parameter;
+import org.fallwright.core.pull.Parameter.Choice;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullOffer.Finding;
 import org.fallwright.core.pull.PullOffer.Part;
+import org.fallwright.core.pull.PullOffer.Standing;
 import org.fallwright.core.pull.PullRequest;
 import org.fallwright.core.pull.SourceDescription;
-import org.fallwright.core.pull.SourceDescription.Parameter;
 import org.fallwright.core.pull.SourceDescription.PlaceKind;
-import org.fallwright.core.pull.SourceDescription.ValueKind;
+import org.fallwright.core.pull.Wording;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.reference.Surface;
 import org.fallwright.plugins.api.ParameterReader;
@@ -56,20 +58,85 @@ public final class Vehicle implements PullSourceExtension {
   private static final SourceDescription DESCRIPTION =
       new SourceDescription(
           "vehicle",
-          "vehicle",
+          new Wording("vehicle", "vehículo"),
           Set.of(PlaceKind.SPOT),
           false,
           List.of(
-              Parameter.number("mass_kg", "Mass", "kg", 300, 60_000),
-              Parameter.number("front_share", "Share on the front axle", "", 0.1, 0.9),
-              Parameter.number("wheelbase_m", "Wheelbase", "m", 1, 8),
-              Parameter.number("cg_height_m", "Height of the mass centre", "m", 0.2, 2.5),
-              Parameter.number("hitch_height_m", "Height of the tow point", "m", 0.1, 2),
-              Parameter.number("overhang_m", "Tow point behind the rear axle", "m", 0, 4),
-              new Parameter(
-                  "drives", "Drives", ValueKind.CHOICES, "", 0, 0, List.of("rwd", "fwd", "awd")),
-              Parameter.number("tow_point_N", "Rated load of the tow point", "N", 500, 1e6),
-              Parameter.number("tow_point_factor", "Design factor of the tow point", "", 1, 12)));
+              Parameter.number(
+                  "mass_kg",
+                  "kg",
+                  300,
+                  60_000,
+                  new Wording("Mass", "Peso (kg)"),
+                  new Wording(
+                      "As it stands there, with load and driver.",
+                      "Como está ahí, con carga y conductor.")),
+              Parameter.number(
+                  "front_share",
+                  "",
+                  0.1,
+                  0.9,
+                  new Wording("Share on the front axle", "Parte en el eje delantero"),
+                  new Wording(
+                      "Front axle's share of the weight on level ground: 0.55 is 55 %.",
+                      "Parte del peso en el eje delantero, en plano: 0.55 es 55 %.")),
+              Parameter.number(
+                  "wheelbase_m",
+                  "m",
+                  1,
+                  8,
+                  new Wording("Wheelbase", "Distancia entre ejes"),
+                  new Wording("From axle to axle.", "De un eje al otro.")),
+              Parameter.number(
+                  "cg_height_m",
+                  "m",
+                  0.2,
+                  2.5,
+                  new Wording("Height of the mass centre", "Altura del centro de peso"),
+                  new Wording(
+                      "Above the ground; when not known take it high.",
+                      "Sobre el suelo; si no se sabe, tómela alta.")),
+              Parameter.number(
+                  "hitch_height_m",
+                  "m",
+                  0.1,
+                  2,
+                  new Wording("Height of the tow point", "Altura del punto de enganche"),
+                  new Wording("Above the ground.", "Sobre el suelo.")),
+              Parameter.number(
+                  "overhang_m",
+                  "m",
+                  0,
+                  4,
+                  new Wording("Tow point behind the rear axle", "Enganche detrás del eje trasero"),
+                  new Wording("Along the vehicle.", "A lo largo del vehículo.")),
+              Parameter.choices(
+                  "drives",
+                  new Wording("Drives", "Tracción"),
+                  new Wording(
+                      "Every drive that can be engaged; each is tried.",
+                      "Todas las tracciones que se pueden poner; se prueba cada una."),
+                  Choice.of("rwd", "rear axle", "eje trasero"),
+                  Choice.of("fwd", "front axle", "eje delantero"),
+                  Choice.of("awd", "all wheels", "todas las llantas")),
+              Parameter.number(
+                  "tow_point_N",
+                  "N",
+                  500,
+                  1e6,
+                  new Wording("Rated load of the tow point", "Carga límite del punto de enganche"),
+                  new Wording(
+                      "As marked; an unmarked tow point is not to be used.",
+                      "La marcada; un enganche sin marca no se usa.")),
+              Parameter.number(
+                  "tow_point_factor",
+                  "",
+                  1,
+                  12,
+                  new Wording("Design factor of the tow point", "Factor de diseño del enganche"),
+                  new Wording(
+                      "Breaking load over rated load; 1 where it is not known.",
+                      "Carga de ruptura entre carga límite; 1 si no se sabe."))));
 
   @Override
   public SourceDescription describe() {
@@ -94,7 +161,8 @@ public final class Vehicle implements PullSourceExtension {
       throw new IllegalArgumentException(
           "mode is \"" + request.mode() + "\"; the vehicle's drives are " + drives);
     }
-    Surface ground = request.ground();
+    PullRequest.Stand stand = request.stand();
+    Surface ground = stand.ground();
     if (ground == null) {
       throw new IllegalArgumentException(
           "ground is not stated; a vehicle needs the ground that it stands on");
@@ -108,27 +176,25 @@ public final class Vehicle implements PullSourceExtension {
             reader.number("hitch_height_m"),
             reader.number("overhang_m"));
     Drive drive = Drive.of(request.mode());
-    double rise = request.lineRiseRad();
-    double slope = request.uphillRad();
+    double rise = stand.lineRiseRad();
+    double slope = stand.uphillRad();
     Traction low = Traction.of(chassis, drive, ground.tyreLow(), ground.rolling(), rise, slope);
     Traction high = Traction.of(chassis, drive, ground.tyreHigh(), 0, rise, slope);
     Traction hold = Traction.of(chassis, Drive.LOCKED, ground.tyreLow(), 0, rise, slope);
-    return new PullOffer(
-        low.tensionN(),
-        high.tensionN() + surgeN(chassis.massKg(), request.pathStiffness(), request.travelRatio()),
-        hold.tensionN(),
-        true,
-        low.limit(),
-        1,
-        true,
-        OVERRUN_M,
-        0,
-        0,
-        0,
-        1,
-        List.of(towPoint(reader.number("tow_point_N"), reader.number("tow_point_factor"))),
-        checks(request),
-        notes(request, chassis, low));
+    return PullOffer.giving(
+            low.tensionN(),
+            high.tensionN()
+                + surgeN(
+                    chassis.massKg(), request.pull().pathStiffness(), request.pull().travelRatio()),
+            low.limit())
+        .holds(hold.tensionN(), true)
+        .powered(true)
+        .overrun(OVERRUN_M)
+        .people(Standing.one("drives", "maneja el vehículo"))
+        .parts(List.of(towPoint(reader.number("tow_point_N"), reader.number("tow_point_factor"))))
+        .checks(checks(request))
+        .notes(notes(request, chassis, low))
+        .done();
   }
 
   /**
@@ -148,14 +214,14 @@ public final class Vehicle implements PullSourceExtension {
   }
 
   private static double runOutAskedM(PullRequest request) {
-    return request.takeUpM() * request.travelRatio() + RUN_OUT_SPARE_M;
+    return request.pull().lineInM() + RUN_OUT_SPARE_M;
   }
 
   private static List<Finding> checks(PullRequest request) {
     List<Finding> checks = new ArrayList<>();
-    if (request.runOutM() != null) {
+    if (request.stand().runOutM() != null) {
       double asked = runOutAskedM(request);
-      double there = request.runOutM();
+      double there = request.stand().runOutM();
       checks.add(
           new Finding(
               "run-out",
@@ -170,8 +236,8 @@ public final class Vehicle implements PullSourceExtension {
                   asked,
                   RUN_OUT_SPARE_M)));
     }
-    if (request.offHeadingRad() != null) {
-      double off = Math.toDegrees(request.offHeadingRad());
+    if (request.stand().offHeadingRad() != null) {
+      double off = Math.toDegrees(request.stand().offHeadingRad());
       checks.add(
           new Finding(
               "heading",
@@ -197,7 +263,7 @@ public final class Vehicle implements PullSourceExtension {
     if (low.frontN() < FRONT_SHARE_TO_STEER * chassis.frontLevelN()) {
       notes.add("The pull leaves the front axle too light to steer.");
     }
-    if (request.runOutM() == null) {
+    if (request.stand().runOutM() == null) {
       notes.add(
           String.format(
               Locale.ROOT,

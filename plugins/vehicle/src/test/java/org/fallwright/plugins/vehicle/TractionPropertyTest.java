@@ -23,7 +23,7 @@ class TractionPropertyTest {
     assertThat(t.frontN() + t.rearN())
         .as("seed %d", seed)
         .isCloseTo(weight * Math.cos(s.slope) - t.tensionN() * Math.sin(a), within(1e-9 * weight));
-    if (t.tensionN() > 0 && !t.limit().equals("axle lift")) {
+    if (t.tensionN() > 0 && !t.limit().equals(Traction.LIFT)) {
       double driven = (s.drive.front ? t.frontN() : 0) + (s.drive.rear ? t.rearN() : 0);
       double undriven = t.frontN() + t.rearN() - driven;
       assertThat(t.tensionN() * Math.cos(a) + weight * Math.sin(s.slope) + s.rolling * undriven)

@@ -28,7 +28,7 @@ class VehicleTest {
   void aPickUpWithFourWheelDriveOnGravel() {
     PullOffer offer = vehicle.offer(request("awd").riseDeg(11.28).build());
     assertThat(offer.lowN()).isCloseTo(8179, within(2.0));
-    assertThat(offer.limit()).isEqualTo("grip of all wheels");
+    assertThat(offer.limit().what().english()).isEqualTo("grip of all wheels");
     assertThat(offer.powered()).isTrue();
     assertThat(offer.captured()).isTrue();
     assertThat(offer.holdN()).isEqualTo(offer.lowN());
@@ -39,7 +39,7 @@ class VehicleTest {
     PullOffer rear = vehicle.offer(request("rwd").riseDeg(11.28).build());
     PullOffer all = vehicle.offer(request("awd").riseDeg(11.28).build());
     assertThat(rear.lowN()).isBetween(0.4 * all.lowN(), 0.45 * all.lowN());
-    assertThat(rear.limit()).isEqualTo("grip of the rear axle");
+    assertThat(rear.limit().what().english()).isEqualTo("grip of the rear axle");
     assertThat(rear.holdN()).isEqualTo(all.lowN());
   }
 
@@ -70,7 +70,7 @@ class VehicleTest {
   void aHighTowPointLiftsTheFront() {
     ObjectNode tall = parameters().put("hitch_height_m", 2).put("front_share", 0.25);
     PullOffer offer = vehicle.offer(request("awd").with(tall).grip(0.9).build());
-    assertThat(offer.limit()).isEqualTo("axle lift");
+    assertThat(offer.limit().what().english()).isEqualTo("axle lift");
     assertThat(offer.notes()).anyMatch(n -> n.contains("too light to steer"));
     assertThat(vehicle.offer(request("awd").build()).notes())
         .noneMatch(n -> n.contains("too light to steer"));
@@ -221,7 +221,12 @@ class VehicleTest {
 
     PullRequest build() {
       return new PullRequest(
-          parameters, mode, ground, rise, uphill, off, stiffness, travel, takeUp, runOut, null);
+          parameters,
+          mode,
+          new PullRequest.Stand(ground, rise, uphill, off, 0.5, 30, runOut),
+          new PullRequest.Pull(stiffness, travel, takeUp, null),
+          null,
+          null);
     }
   }
 }

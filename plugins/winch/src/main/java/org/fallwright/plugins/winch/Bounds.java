@@ -44,7 +44,7 @@ record Bounds(double lowN, Limit limit, double holdN, boolean captured) {
               deviceN,
               "overload device of the winch",
               "Its overload device may let go a tenth below its setting.",
-              "seguro de sobrecarga del cabrestante",
+              "seguro de sobrecarga del malacate",
               "Su seguro de sobrecarga puede ceder una décima parte antes de su ajuste."));
     }
     if (winch.drive() != null) {
@@ -57,8 +57,8 @@ record Bounds(double lowN, Limit limit, double holdN, boolean captured) {
               "grip of the line on the capstan",
               "With this pull on the tail and these turns the line slips on the drum; more turns"
                   + " grip more.",
-              "agarre de la cuerda en el cabrestante",
-              "Con este tiro en el cabo y estas vueltas la cuerda resbala; más vueltas agarran"
+              "agarre de la cuerda en el tambor",
+              "Con este tiro en la punta y estas vueltas la cuerda resbala; más vueltas agarran"
                   + " más."));
     }
     double wheelsN = Double.POSITIVE_INFINITY;
@@ -70,7 +70,7 @@ record Bounds(double lowN, Limit limit, double holdN, boolean captured) {
               "machine slides on its locked wheels",
               "The machine under the winch slides towards the tree before the winch pulls harder.",
               "la máquina resbala con las ruedas bloqueadas",
-              "La máquina del cabrestante resbala hacia el árbol antes de que el cabrestante tire"
+              "La máquina del malacate resbala hacia el árbol antes de que el malacate jale"
                   + " más."));
     }
     One least = bounds.stream().min(Comparator.comparingDouble(One::newtons)).orElseThrow();
@@ -104,10 +104,10 @@ record Bounds(double lowN, Limit limit, double holdN, boolean captured) {
                 + layer
                 + "."
             : "This is the pull that its plate states; more would overload it.",
-        "tiro nominal del cabrestante" + en,
+        "tiro marcado del malacate" + en,
         higher
-            ? "Cada capa de cable en el tambor quita tiro; esto queda en la capa " + layer + "."
-            : "Es el tiro que dice su placa; más lo sobrecarga.");
+            ? "Cada capa de cable de acero en el tambor quita tiro; esto queda en la capa " + layer + "."
+            : "Es el tiro que lleva marcado; no está hecho para más.");
   }
 
   private static One hand(Plate winch, int layer) {
@@ -116,7 +116,7 @@ record Bounds(double lowN, Limit limit, double holdN, boolean captured) {
         winch.onLayerN(winch.drive().pullN(crank ? CRANK_N : LEVER_N), layer),
         crank ? "what a person gives at the crank" : "what a person gives at the lever",
         "A person cannot press the handle harder; a longer handle is forbidden.",
-        crank ? "lo que da una persona en la manivela" : "lo que da una persona en la palanca",
+        crank ? "lo que da una persona con la manivela" : "lo que da una persona con la palanca",
         "Una persona no puede hacer más fuerza; prohibido alargar la palanca.");
   }
 

@@ -1,21 +1,22 @@
 package org.fallwright.plugins.winch;
 
 import java.util.Arrays;
+import java.util.function.Predicate;
 import org.fallwright.core.pull.Parameter.Choice;
 
 /** Kinds of winch. */
 enum Kind {
   /** A wire runs through two grips that a lever moves. */
   THROUGH_ROPE(
-      "hand-through-rope", false, false, "wire through it, by a lever", "cable que pasa, con palanca"),
+      "hand-through-rope", false, false, "by hand, the wire runs through", "manual de palanca, el cable de acero pasa por él"),
   /** A crank turns a drum. */
-  HAND_DRUM("hand-drum", false, true, "drum turned by a crank", "tambor con manivela"),
+  HAND_DRUM("hand-drum", false, true, "by hand, a crank turns a drum", "manual, de tambor con manivela"),
   /** A ratchet lever winds in a chain, band or wire of a short lift. */
-  LEVER_HOIST("lever-hoist", false, false, "lever hoist with a ratchet", "polipasto de palanca"),
+  LEVER_HOIST("lever-hoist", false, false, "by hand, a ratchet lever of short lift", "polipasto de palanca, corto"),
   /** A motor or engine turns a drum. */
-  POWERED_DRUM("powered-drum", true, true, "drum turned by power", "tambor con motor"),
+  POWERED_DRUM("powered-drum", true, true, "powered, on a drum", "de motor, de tambor"),
   /** A motor turns a drum that the line itself runs round. */
-  CAPSTAN("capstan", true, false, "capstan: the line runs round it", "cabrestante de fricción");
+  CAPSTAN("capstan", true, false, "powered capstan, the line runs round it", "malacate de cuerda: la cuerda le da vueltas");
 
   private final String key;
   private final boolean powered;
@@ -60,7 +61,7 @@ enum Kind {
         .toArray(Choice[]::new);
   }
 
-  private static String[] keys(java.util.function.Predicate<Kind> which) {
+  private static String[] keys(Predicate<Kind> which) {
     return Arrays.stream(values()).filter(which).map(Kind::key).toArray(String[]::new);
   }
 

@@ -3,8 +3,8 @@ package org.fallwright.plugins.winch;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import org.fallwright.core.line.WireBend;
-import org.fallwright.core.pull.OfferDraft;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullOffer.Finding;
 import org.fallwright.core.pull.PullOffer.Part;
@@ -77,13 +77,16 @@ public final class Winch implements PullSourceExtension {
   @Override
   public PullOffer offer(PullRequest request) {
     Plate winch = Plate.read(DESCRIPTION, request.parameters());
-    request.modeAmong(List.of(PULL));
+    if (!request.mode().equals(PULL)) {
+      throw new IllegalArgumentException(
+          "mode is \"" + request.mode() + "\"; it must be \"pull\" for a winch");
+    }
     int layer = winch.layer(request.pull().lineInM());
     Bounds bounds = Bounds.of(winch, layer, request.stand());
     double settingN = winch.overloadN() == null ? STALL * winch.bareN() : winch.overloadN();
     boolean onGround = request.stand().ground() != null;
-    OfferDraft offer =
-        PullOffer.giving(bounds.lowN(), settingN * DEVICE_SPREAD, bounds.limit())
+    return PullOffer.giving(bounds.lowN(), settingN * DEVICE_SPREAD, bounds.limit())
+            .holds(bounds.holdN(), bounds.captured())
             .travel(1, winch.kind() == Kind.CAPSTAN ? null : winch.usableWireM())
             .powered(winch.kind().powered())
             .overrun(
@@ -94,16 +97,15 @@ public final class Winch implements PullSourceExtension {
             .people(standing(winch))
             .parts(parts(winch))
             .checks(checks(request))
-            .notes(WinchNotes.of(winch, layer, request));
-    return (bounds.captured() ? offer.holdsFast(bounds.holdN()) : offer.holdsByForce(bounds.holdN()))
-        .done();
+            .notes(WinchNotes.of(winch, layer, request))
+            .done();
   }
 
   private static Standing standing(Plate winch) {
     if (winch.kind() == Kind.CAPSTAN) {
-      return Standing.one("keeps the tail tight", "mantiene tenso el cabo libre");
+      return Standing.one("keeps the tail tight", "mantiene tensa la punta de la cuerda");
     }
-    Wording role = new Wording("works the winch", "maneja el cabrestante");
+    Wording role = new Wording("works the winch", "maneja el malacate");
     return new Standing(role, winch.remote() ? Where.AWAY : Where.AT_SOURCE, 1, 0);
   }
 
@@ -140,7 +142,7 @@ public final class Winch implements PullSourceExtension {
             "deg",
             offAxis > OFF_AXIS_DEG / MOST_RATIO ? OFF_AXIS_DEG / offAxis : MOST_RATIO,
             String.format(
-                java.util.Locale.ROOT,
+                Locale.ROOT,
                 "The line is %.0f degrees off the long axis of the winch's machine; at most %.0f.",
                 offAxis,
                 OFF_AXIS_DEG)));

@@ -3,6 +3,7 @@ package org.fallwright.plugins.winch;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 import org.fallwright.core.pull.PullRequest;
 
 /** Remarks and warnings of a winch. */
@@ -59,13 +60,13 @@ final class WinchNotes {
     return notes;
   }
 
-  private static java.util.Optional<String> hand(Plate winch, int layer, Double workingN) {
+  private static Optional<String> hand(Plate winch, int layer, Double workingN) {
     if (winch.drive() == null || workingN == null) {
-      return java.util.Optional.empty();
+      return Optional.empty();
     }
     double pull = Math.min(workingN, winch.ratedOnLayerN(layer));
     double force = winch.drive().handN(pull * winch.further(layer));
-    return java.util.Optional.of(
+    return Optional.of(
         say("At the pull that is planned the hand presses with about %.0f N", force)
             + (force > KEPT_UP_N
                 ? say("; more than %.0f N nobody keeps up: take turns.", KEPT_UP_N)

@@ -63,7 +63,8 @@ class WinchTest {
     assertThat(offer.highN()).isCloseTo(40_000 * 1.25 * 1.2, within(1e-6));
     assertThat(offer.powered()).isTrue();
     assertThat(offer.overrunM()).isCloseTo(1.5 * 0.05 * 92 / 56, within(1e-9));
-    assertThat(offer.limit()).isEqualTo("rated pull of the winch on layer 4 of its drum");
+    assertThat(offer.limit().what().english())
+        .isEqualTo("rated pull of the winch on layer 4 of its drum");
     assertThat(offer.notes()).contains("Keep at least 5 wraps of wire on the drum.");
   }
 
@@ -81,13 +82,13 @@ class WinchTest {
   void eachKindRefusesWhatItDoesNotHave() {
     refuses(
         throughRope().put("layer", 3),
-        "layer is 3; it must be left out for the kind \"hand-through-rope\"");
+        "layer is 3; it must be left out where kind is \"hand-through-rope\"");
     refuses(
         throughRope().put("line_speed_mps", 0.1),
-        "line_speed_mps is 0.1; it must be left out for the kind \"hand-through-rope\"");
+        "line_speed_mps is 0.1; it must be left out where kind is \"hand-through-rope\"");
     refuses(
         poweredDrum().put("stroke_m", 0.1),
-        "stroke_m is 0.1; it must be left out for the kind \"powered-drum\"");
+        "stroke_m is 0.1; it must be left out where kind is \"powered-drum\"");
   }
 
   @Test
@@ -111,7 +112,13 @@ class WinchTest {
   void knowsOneMode() {
     assertThat(winch.modes(throughRope())).containsExactly("pull");
     PullRequest other =
-        new PullRequest(throughRope(), "push", null, 0, 0, null, 0, 1, 1, null, null);
+        new PullRequest(
+            throughRope(),
+            "push",
+            new PullRequest.Stand(null, 0, 0, null, 1, 30, null),
+            new PullRequest.Pull(0, 1, 1, null),
+            null,
+            null);
     assertThatIllegalArgumentException()
         .isThrownBy(() -> winch.offer(other))
         .withMessage("mode is \"push\"; it must be \"pull\" for a winch");
@@ -131,7 +138,12 @@ class WinchTest {
 
   private static PullRequest request(ObjectNode parameters, double takeUp, double travel) {
     return new PullRequest(
-        parameters, "pull", null, 0.2, 0, null, 20_000, travel, takeUp, null, null);
+        parameters,
+        "pull",
+        new PullRequest.Stand(null, 0.2, 0, null, 1, 30, null),
+        new PullRequest.Pull(20_000, travel, takeUp, null),
+        null,
+        null);
   }
 
   private static ObjectNode throughRope() {
