@@ -5,9 +5,9 @@ package org.fallwright.plugins.blocksystem;
  * part of the first.
  *
  * <p>In a compound the haul part of the first leaves its moving block, towards the anchor that both
- * fixed blocks are on, and the second pulls it that way. Gain and parts are the products of the two;
- * that anchor carries the load, less or plus the haul as the haul part of the second leaves the
- * moving or the fixed block. Balance of forces; all parts taken as parallel.
+ * fixed blocks are on, and the second pulls it that way. Gain and parts are the products of the
+ * two; that anchor carries the load, less or plus the haul as the haul part of the second leaves
+ * the moving or the fixed block. Balance of forces; all parts taken as parallel.
  *
  * @param first the tackle at the load
  * @param second the tackle that hauls on it; null: a simple system
@@ -60,9 +60,9 @@ record Rig(Tackle first, Tackle second) {
    * What the stiffness of the line is to be divided by, so that one leg of {@link #parts} parts, as
    * long as the first tackle, gives way as the system does.
    *
-   * <p>A simple system is that leg itself. Of a compound the first tackle gives way by d/(n₁ EA) and
-   * the second, which must be n₁ times as long to haul without a reset, by d/(n₁ n₂ EA), where the
-   * one leg has d/(n₁ n₂ EA): n₂ + 1 times as much. Elasticity, all lines alike.
+   * <p>A simple system is that leg itself. Of a compound the first tackle gives way by d/(n₁ EA)
+   * and the second, which must be n₁ times as long to haul without a reset, by d/(n₁ n₂ EA), where
+   * the one leg has d/(n₁ n₂ EA): n₂ + 1 times as much. Elasticity, all lines alike.
    */
   double softerBy() {
     return compound() ? second.parts() + 1 : 1;

@@ -4,10 +4,10 @@ package org.fallwright.plugins.blocksystem;
  * A simple tackle between the load and an anchor.
  *
  * <p>Hauling, the line passes the sheaves of both blocks in turn and each leaves the share k of its
- * block: gain = 1 + k₁ + k₁k₂ + …, one term a part, where the haul part leaves the moving block, and
- * the anchor carries the load less the haul; or k₁(1 + k₂ + k₂k₃ + …) where it leaves the fixed
- * block, and the anchor carries the load and the haul. With one k for all these are
- * (1 − k^N)/(1 − k) and k times that. Holding, friction is never credited: all parts carry load/N.
+ * block: gain = 1 + k₁ + k₁k₂ + …, one term a part, where the haul part leaves the moving block,
+ * and the anchor carries the load less the haul; or k₁(1 + k₂ + k₂k₃ + …) where it leaves the fixed
+ * block, and the anchor carries the load and the haul. With one k for all these are (1 − k^N)/(1 −
+ * k) and k times that. Holding, friction is never credited: all parts carry load/N.
  *
  * <p>Leaves out the spread of the parts (all taken as parallel) and the weight of blocks and line.
  * The form k (1 − k^N)/(1 − k) is that of oilfield and army rigging handbooks.

@@ -4,8 +4,8 @@ package org.fallwright.plugins.blocksystem;
  * How far a block system takes the line in before its blocks meet, and how often it must be reset.
  *
  * <p>The blocks close by the room between them less what must stay, {@link #CLOSE_M}; in a compound
- * the second tackle closes n₁ times as fast as the first and meets first. Resets: take-up over throw,
- * rounded up, less one. The line's stretch when the load comes off for a reset is left out.
+ * the second tackle closes n₁ times as fast as the first and meets first. Resets: take-up over
+ * throw, rounded up, less one. The line's stretch when the load comes off for a reset is left out.
  *
  * @param metres line taken in at the load between two resets [m]
  */

@@ -81,9 +81,7 @@ record Bounds(double lowN, Limit limit, double holdN, boolean captured) {
 
   private static double holdN(Plate winch, int layer) {
     double brake =
-        winch.brakeN() == null
-            ? winch.ratedOnLayerN(layer)
-            : winch.onLayerN(winch.brakeN(), layer);
+        winch.brakeN() == null ? winch.ratedOnLayerN(layer) : winch.onLayerN(winch.brakeN(), layer);
     if (winch.tail() == null) {
       return brake;
     }
@@ -106,7 +104,9 @@ record Bounds(double lowN, Limit limit, double holdN, boolean captured) {
             : "This is the pull that its plate states; more would overload it.",
         "tiro marcado del malacate" + en,
         higher
-            ? "Cada capa de cable de acero en el tambor quita tiro; esto queda en la capa " + layer + "."
+            ? "Cada capa de cable de acero en el tambor quita tiro; esto queda en la capa "
+                + layer
+                + "."
             : "Es el tiro que lleva marcado; no está hecho para más.");
   }
 
@@ -126,7 +126,9 @@ record Bounds(double lowN, Limit limit, double holdN, boolean captured) {
           "machine_kg is missing; it must be a number from 200 to 60000 kg where the winch stands"
               + " on a spot");
     }
-    return winch.machine().slidesAtN(stand.ground().tyreLow(), stand.uphillRad(), stand.lineRiseRad());
+    return winch
+        .machine()
+        .slidesAtN(stand.ground().tyreLow(), stand.uphillRad(), stand.lineRiseRad());
   }
 
   private static One one(

@@ -8,15 +8,30 @@ import org.fallwright.core.pull.Parameter.Choice;
 enum Kind {
   /** A wire runs through two grips that a lever moves. */
   THROUGH_ROPE(
-      "hand-through-rope", false, false, "by hand, the wire runs through", "manual de palanca, el cable de acero pasa por él"),
+      "hand-through-rope",
+      false,
+      false,
+      "by hand, the wire runs through",
+      "manual de palanca, el cable de acero pasa por él"),
   /** A crank turns a drum. */
-  HAND_DRUM("hand-drum", false, true, "by hand, a crank turns a drum", "manual, de tambor con manivela"),
+  HAND_DRUM(
+      "hand-drum", false, true, "by hand, a crank turns a drum", "manual, de tambor con manivela"),
   /** A ratchet lever winds in a chain, band or wire of a short lift. */
-  LEVER_HOIST("lever-hoist", false, false, "by hand, a ratchet lever of short lift", "polipasto de palanca, corto"),
+  LEVER_HOIST(
+      "lever-hoist",
+      false,
+      false,
+      "by hand, a ratchet lever of short lift",
+      "polipasto de palanca, corto"),
   /** A motor or engine turns a drum. */
   POWERED_DRUM("powered-drum", true, true, "powered, on a drum", "de motor, de tambor"),
   /** A motor turns a drum that the line itself runs round. */
-  CAPSTAN("capstan", true, false, "powered capstan, the line runs round it", "malacate de cuerda: la cuerda le da vueltas");
+  CAPSTAN(
+      "capstan",
+      true,
+      false,
+      "powered capstan, the line runs round it",
+      "malacate de cuerda: la cuerda le da vueltas");
 
   private final String key;
   private final boolean powered;

@@ -32,9 +32,6 @@ record Parked(double massKg) {
     return slopeDeg > STEEPEST_DEG
         ? 0
         : LockedWheels.slidesAtN(
-            massKg,
-            grip,
-            Math.max(slopeDeg, -STEEPEST_DEG),
-            Math.max(toGroundDeg, -STEEPEST_DEG));
+            massKg, grip, Math.max(slopeDeg, -STEEPEST_DEG), Math.max(toGroundDeg, -STEEPEST_DEG));
   }
 }

@@ -77,20 +77,22 @@ record Plate(
     double ratedN = in.number("rated_N");
     double wireM = kind == Kind.CAPSTAN ? 0 : in.number("wire_m");
     Double machine = in.numberOrNull("machine_kg");
+    String ratedOn = in.isStated("rated_on") ? in.choice("rated_on") : WinchDescription.BARE;
+    Reel reel = kind.drum() ? Reel.read(in, wireM) : null;
     Plate plate =
         new Plate(
             kind,
             ratedN,
-            in.isStated("rated_on") ? in.choice("rated_on") : WinchDescription.BARE,
+            ratedOn,
             in.numberOrNull("overload_N"),
             in.numberOrNull("brake_N"),
             wireM,
             wire(in),
             in.numberOrNull("stroke_m"),
-            drive(in, kind, ratedN),
+            drive(in, kind, bareN(ratedN, ratedOn, reel)),
             in.numberOrNull("line_speed_mps"),
             in.isStated("remote") && in.flag("remote"),
-            kind.drum() ? Reel.read(in, wireM) : null,
+            reel,
             kind == Kind.CAPSTAN ? tail(in) : null,
             machine == null ? null : new Parked(machine));
     plate.checkOverload();
@@ -99,6 +101,10 @@ record Plate(
 
   /** Pull on the bare drum; without a drum the rated pull [N]. */
   double bareN() {
+    return bareN(ratedN, ratedOn, reel);
+  }
+
+  private static double bareN(double ratedN, String ratedOn, Reel reel) {
     return reel == null || ratedOn.equals(WinchDescription.BARE)
         ? ratedN
         : ratedN * reel.drum().radiusRatio(reel.fullLayers());
@@ -150,7 +156,7 @@ record Plate(
     return new Wire(in.number("wire_breaking_N"), in.number("wire_termination"));
   }
 
-  private static HandDrive drive(ParameterReader in, Kind kind, double ratedN) {
+  private static HandDrive drive(ParameterReader in, Kind kind, double bareN) {
     if (in.isStated("hand_N") && in.isStated("lever_m")) {
       throw new IllegalArgumentException(
           "hand_N is "
@@ -160,7 +166,7 @@ record Plate(
               + " m; only one of the two may be stated");
     }
     if (in.isStated("hand_N")) {
-      return HandDrive.plate(in.number("hand_N"), ratedN);
+      return HandDrive.plate(in.number("hand_N"), bareN);
     }
     if (!in.isStated("lever_m")) {
       return null;

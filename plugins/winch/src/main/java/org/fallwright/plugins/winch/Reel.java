@@ -28,7 +28,8 @@ record Reel(Drum drum, double wireM, int fullLayers, Double widthM, double start
     double stays = drum.bareTurnsM(WRAPS_LEFT);
     if (wireM <= stays) {
       throw new IllegalArgumentException(
-          say("wire_m is %s m; it must be more than the %d wraps that stay on, %.2f m",
+          say(
+              "wire_m is %s m; it must be more than the %d wraps that stay on, %.2f m",
               wireM, WRAPS_LEFT, stays));
     }
     Double width = in.numberOrNull("barrel_width_m");
@@ -49,7 +50,8 @@ record Reel(Drum drum, double wireM, int fullLayers, Double widthM, double start
     }
     if (out != null && out > wireM - stays) {
       throw new IllegalArgumentException(
-          say("wire_out_m is %s m; it must be at most %.2f m, for %d wraps stay on",
+          say(
+              "wire_out_m is %s m; it must be at most %.2f m, for %d wraps stay on",
               out, wireM - stays, WRAPS_LEFT));
     }
     return new Reel(
@@ -68,7 +70,8 @@ record Reel(Drum drum, double wireM, int fullLayers, Double widthM, double start
     int layers = drum.layers(wireM, widthM);
     if (layers > Plate.MOST_LAYERS) {
       throw new IllegalArgumentException(
-          say("wire_m is %s m, which makes %d layers on this drum; it must make at most %d",
+          say(
+              "wire_m is %s m, which makes %d layers on this drum; it must make at most %d",
               wireM, layers, Plate.MOST_LAYERS));
     }
     return layers;

@@ -22,9 +22,9 @@ import org.pf4j.Extension;
  *
  * <p>Low: the least of its {@link Bounds}. High, for the parts: the setting of the overload device
  * times {@link #DEVICE_SPREAD}; where none is stated the winch is taken to stall at {@link #STALL}
- * times its pull on the bare drum, with the same spread on top; a hand that would tire and a machine
- * that would slide first are not counted on. Holding: see {@link Bounds#holdN}; a capstan's tail
- * gives a constant force unless a rope grab holds the line.
+ * times its pull on the bare drum, with the same spread on top; a hand that would tire and a
+ * machine that would slide first are not counted on. Holding: see {@link Bounds#holdN}; a capstan's
+ * tail gives a constant force unless a rope grab holds the line.
  *
  * <p>Its wire counts as a part of the pull line, stretch included. Left out: wire that winds up
  * unevenly, heat and duty of a motor, tipping of a machine.
@@ -86,19 +86,19 @@ public final class Winch implements PullSourceExtension {
     double settingN = winch.overloadN() == null ? STALL * winch.bareN() : winch.overloadN();
     boolean onGround = request.stand().ground() != null;
     return PullOffer.giving(bounds.lowN(), settingN * DEVICE_SPREAD, bounds.limit())
-            .holds(bounds.holdN(), bounds.captured())
-            .travel(1, winch.kind() == Kind.CAPSTAN ? null : winch.usableWireM())
-            .powered(winch.kind().powered())
-            .overrun(
-                winch.further(layer)
-                    * (winch.kind().powered() ? STOP_S * winch.speedMps() : winch.strokeM()))
-            .wire(winch.usableWireM())
-            .anchor(onGround ? 0 : 1, onGround ? 0 : 1)
-            .people(standing(winch))
-            .parts(parts(winch))
-            .checks(checks(request))
-            .notes(WinchNotes.of(winch, layer, request))
-            .done();
+        .holds(bounds.holdN(), bounds.captured())
+        .travel(1, winch.kind() == Kind.CAPSTAN ? null : winch.usableWireM())
+        .powered(winch.kind().powered())
+        .overrun(
+            winch.further(layer)
+                * (winch.kind().powered() ? STOP_S * winch.speedMps() : winch.strokeM()))
+        .wire(winch.usableWireM())
+        .anchor(onGround ? 0 : 1, onGround ? 0 : 1)
+        .people(standing(winch))
+        .parts(parts(winch))
+        .checks(checks(request))
+        .notes(WinchNotes.of(winch, layer, request))
+        .done();
   }
 
   private static Standing standing(Plate winch) {
@@ -121,8 +121,7 @@ public final class Winch implements PullSourceExtension {
     }
     if (winch.tail() != null && winch.tail().grabN() != null) {
       double factor = winch.tail().grabFactor();
-      parts.add(
-          new Part("rope grab", winch.tail().grabN() * factor, factor, LAST_FACTOR, 0, 1));
+      parts.add(new Part("rope grab", winch.tail().grabN() * factor, factor, LAST_FACTOR, 0, 1));
     }
     return parts;
   }

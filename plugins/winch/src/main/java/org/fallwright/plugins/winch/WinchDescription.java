@@ -26,7 +26,9 @@ final class WinchDescription {
             Parameter.choice(
                     "kind",
                     say("Kind", "Tipo"),
-                    say("How it takes in its wire and who drives it.", "Cómo recoge su cable de acero y quién lo mueve."),
+                    say(
+                        "How it takes in its wire and who drives it.",
+                        "Cómo recoge su cable de acero y quién lo mueve."),
                     Kind.choices())
                 .preset(Kind.THROUGH_ROPE.key()),
             Parameter.number(
@@ -246,7 +248,10 @@ final class WinchDescription {
                     "contact",
                     say("Line on the capstan", "Cuerda en el tambor"),
                     say("What runs on what.", "Qué corre sobre qué."),
-                    Choice.of("polyester-metal", "polyester or nylon on metal", "poliéster o nailon en metal"),
+                    Choice.of(
+                        "polyester-metal",
+                        "polyester or nylon on metal",
+                        "poliéster o nailon en metal"),
                     Choice.of("hmpe-metal", "HMPE on metal", "HMPE en metal"),
                     Choice.of("wire-greasy", "wire on greasy steel", "cable en acero engrasado"),
                     Choice.of("wire-dry", "wire on dry steel", "cable en acero seco"))
@@ -257,7 +262,9 @@ final class WinchDescription {
                     0.5,
                     10,
                     say("Turns round the capstan", "Vueltas en el tambor"),
-                    say("Of the line; more turns grip more.", "De la cuerda; más vueltas, más agarre."))
+                    say(
+                        "Of the line; more turns grip more.",
+                        "De la cuerda; más vueltas, más agarre."))
                 .onlyWhere("kind", Kind.CAPSTAN.key())
                 .preset(3),
             Parameter.number(
@@ -316,7 +323,9 @@ final class WinchDescription {
                     "m",
                     0,
                     3,
-                    say("Height of the wire on the machine", "Altura del cable de acero en la máquina"),
+                    say(
+                        "Height of the wire on the machine",
+                        "Altura del cable de acero en la máquina"),
                     say(
                         "Above the ground, where the wire leaves the winch.",
                         "Sobre el suelo, donde sale."))

@@ -50,7 +50,8 @@ final class WinchNotes {
                 + " times its rated pull on the bare drum."
             : "If the overload device gives way, stop: never replace it by a stronger one.");
     if (winch.tail() != null && winch.tail().grabN() == null) {
-      notes.add("Only the hand on the tail holds the line: a rope grab on it would hold by itself.");
+      notes.add(
+          "Only the hand on the tail holds the line: a rope grab on it would hold by itself.");
     }
     if (request.stand().ground() != null) {
       notes.add(
