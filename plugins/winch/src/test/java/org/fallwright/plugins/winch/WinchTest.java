@@ -9,10 +9,14 @@ import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import org.fallwright.core.line.WireBend;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullRequest;
+import org.fallwright.core.reference.Surface;
+import org.fallwright.core.reference.SurfaceTable;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
 
 class WinchTest {
@@ -74,7 +78,7 @@ class WinchTest {
     drum.remove("line_speed_mps");
     PullOffer offer = winch.offer(request(drum, 1, 1));
     assertThat(offer.powered()).isFalse();
-    assertThat(offer.overrunM()).isEqualTo(0.2);
+    assertThat(offer.overrunM()).isCloseTo(0.2 * 92 / 56, within(1e-12));
     assertThat(offer.lowN()).isCloseTo(24_347.8, within(0.1));
   }
 
@@ -125,6 +129,192 @@ class WinchTest {
   }
 
   @Test
+  void ratedOnAFullDrumItGivesThatThereAndMoreOnTheBareDrum() {
+    PullOffer offer = winch.offer(request(poweredDrum().put("rated_on", "full-drum"), 1, 1));
+    assertThat(offer.lowN()).isCloseTo(40_000, within(1e-6));
+    assertThat(offer.highN()).isCloseTo(40_000 * 92 / 56.0 * 1.25 * 1.2, within(1e-6));
+  }
+
+  /** Width for 10 turns: 3.52, 4.27, 5.03 and 5.78 m on the first four layers. */
+  @ParameterizedTest
+  @CsvSource({"0, 4, 24347.8", "8, 3, 28000", "12, 2, 32941.2"})
+  void layersFollowFromTheWireOnTheDrum(double out, int layer, double low) {
+    ObjectNode drum = poweredDrum().put("wire_m", 18).put("barrel_width_m", 0.12);
+    drum.remove("layer");
+    drum.put("wire_out_m", out);
+    PullOffer offer = winch.offer(request(drum, 1, 1));
+    assertThat(offer.lowN()).isCloseTo(low, within(0.1));
+    assertThat(offer.limit().what().english()).endsWith("on layer " + layer + " of its drum");
+  }
+
+  /** The same at whatever layer, though a barer drum would pull more. */
+  @Test
+  void ratedOnAnyLayerItNeverCountsOnMore() {
+    ObjectNode drum =
+        poweredDrum()
+            .put("wire_m", 18)
+            .put("barrel_width_m", 0.12)
+            .put("rated_on", "any-layer")
+            .put("wire_out_m", 12);
+    drum.remove("layer");
+    assertThat(winch.offer(request(drum, 1, 1)).lowN()).isEqualTo(40_000);
+    assertThat(winch.offer(request(drum.put("rated_on", "full-drum"), 1, 1)).lowN())
+        .isCloseTo(40_000.0 * 92 / 68, within(1e-6));
+  }
+
+  @Test
+  void wrapsThatStayAreNoWireToPayOut() {
+    PullOffer offer = winch.offer(request(poweredDrum(), 1, 1));
+    assertThat(offer.wireM()).isCloseTo(60 - 5 * Math.PI * 0.112, within(1e-9));
+    assertThat(offer.travel().mostM()).isEqualTo(offer.wireM());
+    refuses(
+        poweredDrum().put("wire_m", 1.5),
+        "wire_m is 1.5 m; it must be more than the 5 wraps that stay on, 1.76 m");
+  }
+
+  @Test
+  void aDrumSaysItsLayersOneWay() {
+    ObjectNode none = poweredDrum();
+    none.remove("layer");
+    refuses(
+        none,
+        "layer is missing; it must be a whole number from 1 to 20, or barrel_width_m be stated");
+    refuses(
+        poweredDrum().put("barrel_width_m", 0.2),
+        "layer is 4; it must be left out where barrel_width_m is stated");
+    refuses(
+        poweredDrum().put("wire_out_m", 5),
+        "wire_out_m is 5.0 m; it must be left out where barrel_width_m is not stated");
+    refuses(
+        poweredDrum().put("rope_m", 0.06).put("drum_m", 0.05),
+        "rope_m is 0.06 m; it must be at most drum_m, 0.05 m");
+    none.put("barrel_width_m", 0.02).put("wire_m", 400);
+    refuses(none, "wire_m is 400.0 m, which makes 99 layers on this drum; it must make at most 20");
+  }
+
+  /** Lever 0.7 m through 60 degrees, 60 mm a stroke, 0.7: 8.55 times the hand. */
+  @Test
+  void aHandThatIsTooWeakIsTheLimit() {
+    ObjectNode lever = throughRope().put("lever_m", 0.7).put("swing_deg", 60);
+    PullOffer offer = winch.offer(request(lever, 1, 1));
+    assertThat(offer.lowN()).isCloseTo(550 * 0.7 * Math.PI / 3 / 0.06 * 0.7, within(1e-6));
+    assertThat(offer.limit().what().english()).isEqualTo("what a person gives at the lever");
+    assertThat(offer.holdN()).as("its grip holds all the same").isEqualTo(9800);
+    assertThat(offer.highN()).as("and its pin gives way no sooner").isEqualTo(14_700 * 1.2);
+  }
+
+  @Test
+  void aPlateMayStateTheHandForce() {
+    PullOffer easy = winch.offer(request(throughRope().put("hand_N", 400), 1, 1));
+    assertThat(easy.lowN()).isEqualTo(9800);
+    assertThat(easy.notes())
+        .contains(
+            "At the pull that is planned the hand presses with about 245 N; more than 225 N nobody"
+                + " keeps up: take turns.");
+    PullOffer hard = winch.offer(request(throughRope().put("hand_N", 700), 1, 1));
+    assertThat(hard.lowN()).isCloseTo(9800 * 550 / 700.0, within(1e-9));
+    refuses(
+        throughRope().put("hand_N", 400).put("lever_m", 0.7),
+        "hand_N is 400.0 N and lever_m is 0.7 m; only one of the two may be stated");
+  }
+
+  @Test
+  void anOverloadDeviceNearTheRatingMayLetGoEarlier() {
+    PullOffer offer = winch.offer(request(throughRope().put("overload_N", 10_000), 1, 1));
+    assertThat(offer.lowN()).isEqualTo(9000);
+    assertThat(offer.holdN()).isEqualTo(9000);
+    assertThat(offer.limit().what().english()).isEqualTo("overload device of the winch");
+  }
+
+  @Test
+  void aBrakeMayHoldLessOrMoreThanTheRating() {
+    assertThat(winch.offer(request(throughRope().put("brake_N", 7000), 1, 1)).holdN())
+        .isEqualTo(7000);
+    PullOffer drum = winch.offer(request(poweredDrum().put("brake_N", 60_000), 1, 1));
+    assertThat(drum.holdN()).isCloseTo(60_000 * 56 / 92.0, within(1e-6));
+  }
+
+  @Test
+  void itsOwnWireIsAPart() {
+    ObjectNode wired = poweredDrum().put("wire_breaking_N", 100_000).put("wire_termination", 0.8);
+    PullOffer.Part wire = winch.offer(request(wired, 1, 1)).parts().get(0);
+    double bend = WireBend.keeps(0.1 / 0.012);
+    assertThat(wire.name()).isEqualTo("winch wire");
+    assertThat(wire.strengthN()).isCloseTo(80_000 * bend, within(1e-6));
+    assertThat(wire.designFactor()).isEqualTo(3);
+    ObjectNode noEnd = wired.deepCopy();
+    noEnd.remove("wire_termination");
+    refuses(noEnd, "wire_termination is missing; it must be a number from 0.1 to 1");
+  }
+
+  /** HMPE on metal 0.05, 3 turns: e^(0.05 · 6 pi) = 2.566 times the tail. */
+  @Test
+  void aCapstanSlipsAndHoldsByAConstantForce() {
+    PullOffer offer = winch.offer(request(capstan(), 1, 1));
+    assertThat(offer.lowN()).isCloseTo(100 * Math.exp(0.3 * Math.PI), within(1e-9));
+    assertThat(offer.holdN()).isEqualTo(offer.lowN());
+    assertThat(offer.captured()).isFalse();
+    assertThat(offer.wireM()).isZero();
+    assertThat(offer.travel().mostM()).isNull();
+    assertThat(offer.limit().what().english()).isEqualTo("grip of the line on the capstan");
+    assertThat(offer.highN()).as("turns may ride and jam").isEqualTo(10_000 * 1.25 * 1.2);
+    PullOffer many = winch.offer(request(capstan().put("turns", 10).put("tail_N", 200), 1, 1));
+    assertThat(many.lowN()).isCloseTo(200 * Math.exp(Math.PI), within(1e-6));
+    PullOffer dry =
+        winch.offer(request(capstan().put("contact", "wire-dry").put("turns", 8), 1, 1));
+    assertThat(dry.lowN()).as("its motor limits it").isEqualTo(10_000);
+  }
+
+  @Test
+  void aRopeGrabHoldsForACapstan() {
+    PullOffer offer =
+        winch.offer(request(capstan().put("grab_N", 4000).put("grab_factor", 4), 1, 1));
+    assertThat(offer.captured()).isTrue();
+    assertThat(offer.holdN()).isEqualTo(4000);
+    assertThat(offer.parts()).singleElement().extracting("strengthN").isEqualTo(16_000.0);
+  }
+
+  /** 2,000 kg on wet grass, 0.20: 3.92 kN on the level with a level line. */
+  @Test
+  void onASpotItsMachineMaySlide() {
+    Surface grass = SurfaceTable.of("grass", true);
+    PullRequest spot =
+        new PullRequest(
+            poweredDrum().put("machine_kg", 2000),
+            "pull",
+            new PullRequest.Stand(grass, 0, 0, Math.toRadians(170), 0.5, 30, null),
+            new PullRequest.Pull(20_000, 1, 1, null),
+            null,
+            null);
+    PullOffer offer = winch.offer(spot);
+    assertThat(offer.lowN()).isCloseTo(2000 * 9.80665 * grass.tyreLow(), within(1e-6));
+    assertThat(offer.holdN()).isEqualTo(offer.lowN());
+    assertThat(offer.captured()).isTrue();
+    assertThat(offer.anchorHauling()).isZero();
+    assertThat(offer.limit().what().english()).isEqualTo("machine slides on its locked wheels");
+    assertThat(offer.highN()).as("a bank or chock may hold it").isCloseTo(60_000, within(1e-6));
+    assertThat(offer.checks()).singleElement().extracting("id").isEqualTo("heading");
+    assertThat(offer.checks().get(0).value()).isCloseTo(10, within(1e-9));
+    assertThatIllegalArgumentException()
+        .isThrownBy(() -> winch.offer(spot.with(poweredDrum())))
+        .withMessage(
+            "machine_kg is missing; it must be a number from 200 to 60000 kg where the winch stands"
+                + " on a spot");
+  }
+
+  @Test
+  void aRemoteControlTakesThePersonAway() {
+    assertThat(winch.offer(request(poweredDrum(), 1, 1)).operators()).isEqualTo(1);
+    assertThat(winch.offer(request(poweredDrum().put("remote", true), 1, 1)).operators()).isZero();
+  }
+
+  @Test
+  void tellsHowLongAHaulTakes() {
+    assertThat(winch.offer(request(poweredDrum(), 2.86, 1)).notes())
+        .contains("It takes in 2.86 m in about 58 s.");
+  }
+
+  @Test
   void isListedAsAnExtension() throws IOException {
     assertThat(Files.readString(Path.of("target/classes/META-INF/extensions.idx")))
         .contains(Winch.class.getName());
@@ -141,7 +331,7 @@ class WinchTest {
         parameters,
         "pull",
         new PullRequest.Stand(null, 0.2, 0, null, 1, 30, null),
-        new PullRequest.Pull(20_000, travel, takeUp, null),
+        new PullRequest.Pull(20_000, travel, takeUp, 6000.0),
         null,
         null);
   }
@@ -166,5 +356,16 @@ class WinchTest {
         .put("rope_m", 0.012)
         .put("layer", 4)
         .put("line_speed_mps", 0.05);
+  }
+
+  private static ObjectNode capstan() {
+    return JsonNodeFactory.instance
+        .objectNode()
+        .put("kind", "capstan")
+        .put("rated_N", 10_000)
+        .put("line_speed_mps", 0.2)
+        .put("contact", "hmpe-metal")
+        .put("turns", 3)
+        .put("tail_N", 100);
   }
 }
