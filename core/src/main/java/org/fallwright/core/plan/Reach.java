@@ -71,9 +71,9 @@ final class Reach {
             pulled.takeUpM(),
             pulled.workingN() * route.loads().sourceEndPerTree()),
         new Line(
-            line.wireRope(),
+            line.material().wire(),
             line.diameterM(),
-            line.breakingLoadN(),
+            GearParts.lineFigures(site, way).breakingN(),
             line.lengthM(),
             route.loads().lengthM()),
         haul);
