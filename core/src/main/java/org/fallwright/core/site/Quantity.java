@@ -51,6 +51,11 @@ public record Quantity(double value, How how, Double plusMinus) {
     return how == How.RANGE ? value + plusMinus : value;
   }
 
+  /** The upper end of a range as if it were the value, with nothing beyond it. */
+  public Quantity withHigh() {
+    return how == How.RANGE ? new Quantity(high(), How.RANGE, 0.0) : this;
+  }
+
   /** Checks the nominal value, or both ends of a range, against the limits of its field. */
   Quantity within(String field, double least, double most, String unit) {
     Range.check(field, value, least, most, unit);
