@@ -42,7 +42,7 @@ public record Remedies(
           .thenComparingInt(Judged::failing)
           .thenComparing(Comparator.comparingDouble(Judged::standing).reversed());
 
-  private static final Comparator<Remedy> SMALLEST_FIRST =
+  static final Comparator<Remedy> SMALLEST_FIRST =
       Comparator.<Remedy>comparingInt(r -> r.edits().size())
           .thenComparing(
               r -> r.edits().stream().map(Edit::kind).max(Comparator.naturalOrder()).orElseThrow())
@@ -55,6 +55,11 @@ public record Remedies(
 
   /** The changes for a setup of that site; none where it is workable already. */
   public static Remedies of(Site site, PullSources sources, Setup setup) {
+    return of(site, sources, setup, true);
+  }
+
+  /** The same; pairs of changes are tried only where asked for, for they take long. */
+  static Remedies of(Site site, PullSources sources, Setup setup, boolean pairs) {
     Judged before = new Judge(site, sources).judge(setup);
     Verdict goal = before.verdict() == Verdict.TIGHT ? Verdict.WORKABLE : Verdict.TIGHT;
     List<Remedy> found = new ArrayList<>();
@@ -64,7 +69,7 @@ public record Remedies(
       for (Dial d : edits.dials()) {
         search.smallest(d, goal).ifPresent(e -> found.addAll(search.toBetter(d, e)));
       }
-      if (found.isEmpty()) {
+      if (found.isEmpty() && pairs) {
         found.addAll(search.pairs(edits, before, goal));
       }
       found.sort(SMALLEST_FIRST);

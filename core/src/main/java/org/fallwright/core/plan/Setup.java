@@ -56,6 +56,18 @@ public record Setup(
         layDeg, attachHeightM, hingeThicknessM, line, redirects, source, other, place, driver);
   }
 
+  /** The same with the source at another place. */
+  public Setup withPlace(String other) {
+    return new Setup(
+        layDeg, attachHeightM, hingeThicknessM, line, redirects, source, mode, other, driver);
+  }
+
+  /** The same over other redirects, from the tree outwards. */
+  public Setup withRedirects(List<String> others) {
+    return new Setup(
+        layDeg, attachHeightM, hingeThicknessM, line, others, source, mode, place, driver);
+  }
+
   /** The same driven otherwise. */
   public Setup withDriver(Driver other) {
     return new Setup(
