@@ -1,5 +1,6 @@
 package org.fallwright.core.answers;
 
+import com.fasterxml.jackson.annotation.JsonValue;
 import java.util.List;
 import java.util.regex.Pattern;
 
@@ -62,6 +63,7 @@ public enum Rung {
   }
 
   /** What it is called. */
+  @JsonValue
   public String word() {
     return word;
   }

@@ -1,5 +1,6 @@
 package org.fallwright.core.change;
 
+import com.fasterxml.jackson.annotation.JsonIgnoreProperties;
 import org.fallwright.core.plan.Setup;
 import org.fallwright.core.site.Site;
 
@@ -14,4 +15,5 @@ import org.fallwright.core.site.Site;
  * @param site the changed site
  * @param setup the changed setup
  */
+@JsonIgnoreProperties("site")
 public record Edit(Kind kind, double amount, String unit, String what, Site site, Setup setup) {}

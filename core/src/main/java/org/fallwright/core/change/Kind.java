@@ -1,5 +1,7 @@
 package org.fallwright.core.change;
 
+import com.fasterxml.jackson.annotation.JsonValue;
+
 /**
  * Kinds of change, in the order of the effort they cost: what a word settles, what is only planned
  * otherwise, what is done at the tree, what is fetched from the truck, what is moved, what must be
@@ -32,6 +34,7 @@ public enum Kind {
   }
 
   /** What it is called. */
+  @JsonValue
   public String word() {
     return word;
   }
