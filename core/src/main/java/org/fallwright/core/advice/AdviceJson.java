@@ -45,14 +45,26 @@ public final class AdviceJson {
    * @param program version of the program
    */
   public static byte[] write(Site site, Advice advice, String program) {
+    return write(FORMAT, site, program, "advice", advice);
+  }
+
+  /**
+   * A document of the same make that holds another answer.
+   *
+   * @param format name of the format
+   * @param program version of the program
+   * @param name field that holds the answer
+   * @param answer a record, or a list of records
+   */
+  public static byte[] write(String format, Site site, String program, String name, Object answer) {
     Map<String, Object> doc = new LinkedHashMap<>();
-    doc.put("format", FORMAT);
+    doc.put("format", format);
     doc.put("version", VERSION);
     doc.put("program", program);
     doc.put("units", "SI");
     doc.put("site", site.name());
     doc.put("rule_set", site.ruleSet());
-    doc.put("advice", advice);
+    doc.put(name, answer);
     try {
       return (WRITER.writeValueAsString(doc) + "\n").getBytes(StandardCharsets.UTF_8);
     } catch (JsonProcessingException e) {

@@ -20,8 +20,9 @@ import org.fallwright.core.site.Site;
  *
  * @param rows from the highest line to the lowest
  * @param sentence how to use it, in one sentence
+ * @param wind the same with more lean and a stronger gust, from the least lean to the greatest
  */
-public record LimitsCard(List<Row> rows, String sentence) {
+public record LimitsCard(List<Row> rows, String sentence, List<WindRow> wind) {
   /** How the tree differs from what was entered. */
   public enum Tree {
     AS_PLANNED("as planned", 1, 0),
@@ -82,15 +83,49 @@ public record LimitsCard(List<Row> rows, String sentence) {
   public record Cell(
       Tree tree, Verdict verdict, String weakest, double pullPlanN, double pullMargin) {}
 
+  /** What the gust is raised by in the columns of the wind table [m/s]; planning allowance. */
+  private static final List<Double> STRONGER_MPS = List.of(0.0, 2.0, 4.0, 6.0, 8.0);
+
+  /** What the lean is raised by in its rows [degrees]; planning allowance. */
+  private static final List<Double> FARTHER_DEG = List.of(0.0, 1.5, 3.0);
+
+  /** Strongest gust that a site may have [m/s]. */
+  private static final double STRONGEST = 40;
+
+  /**
+   * One lean.
+   *
+   * @param leanDeg lean of the stem [degrees]
+   * @param cells one for each gust, from the planned one up
+   */
+  public record WindRow(double leanDeg, List<WindCell> cells) {
+    public WindRow {
+      cells = List.copyOf(cells);
+    }
+  }
+
+  /**
+   * One answer.
+   *
+   * @param gustMps the gust [m/s]
+   * @param verdict worst of all checks
+   * @param weakest id of the check that decides
+   * @param pullPlanN pull to plan for at the tree [N]; NaN: the tree cannot be moved so
+   * @param pullMargin source low over that; infinite: no pull is needed
+   */
+  public record WindCell(
+      double gustMps, Verdict verdict, String weakest, double pullPlanN, double pullMargin) {}
+
   public LimitsCard {
     rows = List.copyOf(rows);
+    wind = List.copyOf(wind);
   }
 
   /** The card of a setup. */
   public static LimitsCard of(Site site, PullSources sources, Setup setup) {
     Map<Tree, Judge> judges = new java.util.EnumMap<>(Tree.class);
     Arrays.stream(Tree.values())
-        .filter(t -> site.tree().leanDeg().value() + t.leanDeg <= STEEPEST)
+        .filter(t -> site.tree().leanDeg().high() + t.leanDeg <= STEEPEST)
         .forEach(t -> judges.put(t, new Judge(t.on(site), sources)));
     LineHeightRange.Stem stem = LineHeightRange.Stem.of(site);
     List<Row> rows = new ArrayList<>();
@@ -115,7 +150,36 @@ public record LimitsCard(List<Row> rows, String sentence) {
             + " of the "
             + all
             + " cases on the card are workable or tight; in any other case, and off the card, stop"
-            + " and plan again.");
+            + " and plan again.",
+        wind(site, sources, setup));
+  }
+
+  private static List<WindRow> wind(Site site, PullSources sources, Setup setup) {
+    double lean = site.tree().leanDeg().value();
+    double gust = site.conditions().gustMps().value();
+    List<WindRow> rows = new ArrayList<>();
+    for (double farther : FARTHER_DEG) {
+      if (site.tree().leanDeg().high() + farther > STEEPEST) {
+        continue;
+      }
+      Site leaning = farther == 0 ? site : Altered.leaningMore(site, farther);
+      List<WindCell> cells = new ArrayList<>();
+      for (double stronger : STRONGER_MPS) {
+        if (gust + stronger <= STRONGEST) {
+          Site there = stronger == 0 ? leaning : Altered.gust(leaning, gust + stronger);
+          Judged j = new Judge(there, sources).judge(setup);
+          cells.add(
+              new WindCell(
+                  gust + stronger,
+                  j.verdict(),
+                  j.weakest().id(),
+                  j.figures().pullPlanN(),
+                  j.figures().pullMargin()));
+        }
+      }
+      rows.add(new WindRow(lean + farther, cells));
+    }
+    return rows;
   }
 
   private static Cell cell(Tree tree, Judged j) {

@@ -113,8 +113,9 @@ public record LineHeightRange(
    * @param highestM up to this [m]
    * @param reason why not higher
    */
-  record Stem(double lowestM, double highestM, String reason) {
-    static Stem of(Site site) {
+  public record Stem(double lowestM, double highestM, String reason) {
+    /** Of the site's tree. */
+    public static Stem of(Site site) {
       StemTaper taper =
           TreeFigures.of(site.tree(), site.cut(), SpeciesTable.of(site.tree().species())).taper();
       double top = HIGHEST_SHARE * site.tree().heightM().value();
@@ -132,7 +133,8 @@ public record LineHeightRange(
       return site.display().units().both(u -> u.smallLength(THINNEST));
     }
 
-    boolean takes(double heightM) {
+    /** Whether a line may sit at that height above the ground [m]. */
+    public boolean takes(double heightM) {
       return heightM > lowestM && heightM <= highestM + 1e-9;
     }
   }

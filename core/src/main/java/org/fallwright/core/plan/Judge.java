@@ -14,9 +14,12 @@ import org.fallwright.core.pull.PullSources;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.rules.RuleSet;
 import org.fallwright.core.rules.RuleSets;
+import org.fallwright.core.site.Copy;
 import org.fallwright.core.site.Gear;
+import org.fallwright.core.site.How;
 import org.fallwright.core.site.Place;
 import org.fallwright.core.site.Site;
+import org.fallwright.core.site.SubjectTree;
 import org.fallwright.core.statics.Part;
 import org.fallwright.core.statics.PlanField;
 import org.fallwright.core.statics.Ratios;
@@ -47,6 +50,10 @@ public final class Judge {
   private final SiteTables tables = new SiteTables();
   private final Knowledge knowledge;
   private final Landing landing;
+
+  /** The site with the tree as tall and as far over as its ranges allow, for the zones. */
+  private final Site reaching;
+
   private final LineRun lineRun;
   private final Map<Setup, Route> routes = new ConcurrentHashMap<>();
   private final Map<Pulled, Statics> reckoned = new ConcurrentHashMap<>();
@@ -75,8 +82,18 @@ public final class Judge {
     in = DisplayUnits.valueOf(site.display().name());
     subject = new Subject(site);
     knowledge = new Knowledge(site, rules);
-    landing = new Landing(site, rules, in, subject, knowledge);
+    reaching = reaching(site);
+    landing = new Landing(reaching, rules, in, subject, knowledge);
     lineRun = new LineRun(site, in, knowledge);
+  }
+
+  private static Site reaching(Site site) {
+    SubjectTree t = site.tree();
+    if (t.heightM().how() != How.RANGE && t.leanDeg().how() != How.RANGE) {
+      return site;
+    }
+    SubjectTree tall = Copy.with(t, "heightM", t.heightM().withHigh());
+    return Copy.with(site, "tree", Copy.with(tall, "leanDeg", t.leanDeg().withHigh()));
   }
 
   /** Notes that hold for every setup of the site, a sentence each. */
@@ -90,7 +107,7 @@ public final class Judge {
   }
 
   /** The same checks, figures and sentence without zones and notes, which take longer. */
-  Judged quick(Setup setup) {
+  public Judged quick(Setup setup) {
     return judge(setup, false);
   }
 
@@ -223,7 +240,7 @@ public final class Judge {
       grade.rule(
           f.id(), f.value(), f.limit(), f.unit(), f.ratio(), place(setup).at(), () -> f.why());
     }
-    new People(site, rules, in, grade).check(setup, route, zones, offer);
+    new People(reaching, rules, in, grade).check(setup, route, zones, offer);
     notes.addAll(offer.notes());
     if (full) {
       notes.addAll(LandNotes.of(site, setup));

@@ -4,6 +4,8 @@ import java.util.Optional;
 import java.util.function.ToDoubleFunction;
 import org.fallwright.core.rules.Rule;
 import org.fallwright.core.rules.RuleSet;
+import org.fallwright.core.site.Entry;
+import org.fallwright.core.site.How;
 import org.fallwright.core.site.Looked;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Wire;
@@ -33,6 +35,17 @@ final class Knowledge {
   }
 
   void check(Grade grade) {
+    for (Entry e : Entry.of(site)) {
+      if (e.quantity().how() == How.UNKNOWN) {
+        grade.unknown(
+            "known " + e.name(),
+            e.field().startsWith("tree.") ? site.tree().stump().at() : null,
+            () ->
+                "Nobody knows the "
+                    + e.name()
+                    + " yet, so no setup is judged. Find it out, or write the range that it lies in.");
+      }
+    }
     for (Wire w : site.wires()) {
       if (approach(w).isEmpty()) {
         grade.unknown(

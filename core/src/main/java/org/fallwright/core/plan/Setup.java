@@ -50,8 +50,32 @@ public record Setup(
         layDeg, attachHeightM, thicknessM, line, redirects, source, mode, place, driver);
   }
 
+  /** The same run in another mode. */
+  public Setup withMode(String other) {
+    return new Setup(
+        layDeg, attachHeightM, hingeThicknessM, line, redirects, source, other, place, driver);
+  }
+
+  /** The same with the source at another place. */
+  public Setup withPlace(String other) {
+    return new Setup(
+        layDeg, attachHeightM, hingeThicknessM, line, redirects, source, mode, other, driver);
+  }
+
+  /** The same over other redirects, from the tree outwards. */
+  public Setup withRedirects(List<String> others) {
+    return new Setup(
+        layDeg, attachHeightM, hingeThicknessM, line, others, source, mode, place, driver);
+  }
+
+  /** The same driven otherwise. */
+  public Setup withDriver(Driver other) {
+    return new Setup(
+        layDeg, attachHeightM, hingeThicknessM, line, redirects, source, mode, place, other);
+  }
+
   /** The same with another line. */
-  Setup withLine(String other) {
+  public Setup withLine(String other) {
     return new Setup(
         layDeg, attachHeightM, hingeThicknessM, other, redirects, source, mode, place, driver);
   }

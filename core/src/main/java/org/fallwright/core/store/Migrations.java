@@ -34,6 +34,11 @@ final class Migrations {
     if (gear.path("load_cell") instanceof ObjectNode cell && !cell.has("at")) {
       cell.put("at", "source-end");
     }
+    for (String list : new String[] {"cases", "revisions"}) {
+      if (!site.has(list)) {
+        site.putArray(list);
+      }
+    }
   }
 
   private static Stream<ObjectNode> objects(JsonNode list) {

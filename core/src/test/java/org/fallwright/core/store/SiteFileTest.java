@@ -22,6 +22,7 @@ import org.fallwright.core.line.PartStrength;
 import org.fallwright.core.line.RatedFigures;
 import org.fallwright.core.line.Sheave;
 import org.fallwright.core.site.Anchor;
+import org.fallwright.core.site.Copy;
 import org.fallwright.core.site.Gear;
 import org.fallwright.core.site.How;
 import org.fallwright.core.site.Looked;
@@ -41,7 +42,14 @@ class SiteFileTest {
     for (String gear : List.of("lines", "blocks", "slings", "connectors", "load_cell")) {
       ((ObjectNode) present.get("gear")).set(gear, lifted.get("gear").get(gear));
     }
-    assertThat(one).isEqualTo(SiteFile.read(SiteJson.MAPPER.writeValueAsBytes(present), "present"));
+    assertThat(one)
+        .isEqualTo(
+            withoutWhatFormOneLacks(
+                SiteFile.read(SiteJson.MAPPER.writeValueAsBytes(present), "present")));
+  }
+
+  private static Site withoutWhatFormOneLacks(Site site) {
+    return Copy.with(Copy.with(site, "cases", List.of()), "revisions", List.of());
   }
 
   @Test

@@ -48,6 +48,7 @@ final class AdviceText {
     part("What gives first", advice.firstToGive().sentence());
     part("Limits card", advice.card().sentence());
     card();
+    windCard();
     if (advice.judged().verdict().compareTo(Verdict.TIGHT) > 0) {
       part(
           "Work",
@@ -104,6 +105,25 @@ final class AdviceText {
   private void row(String at, String hold, String plan, String ceiling, String never) {
     out.println(
         String.format(Locale.ROOT, "  %-44s %11s %11s %11s %11s", at, hold, plan, ceiling, never));
+  }
+
+  private void windCard() {
+    out.println("  and with more lean and wind:");
+    for (LimitsCard.WindRow r : advice.card().wind()) {
+      StringBuilder line =
+          new StringBuilder(
+              String.format(Locale.ROOT, "  lean %-7s", in.angle(Math.toRadians(r.leanDeg()))));
+      for (LimitsCard.WindCell c : r.cells()) {
+        String cell =
+            "gust "
+                + in.speed(c.gustMps())
+                + " "
+                + mark(c.verdict())
+                + (c.verdict() == Verdict.WORKABLE ? "" : " " + c.weakest());
+        line.append(String.format(Locale.ROOT, " %-23s", cell));
+      }
+      out.println(line.toString().stripTrailing());
+    }
   }
 
   private void card() {
