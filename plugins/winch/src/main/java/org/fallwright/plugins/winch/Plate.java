@@ -111,8 +111,8 @@ record Plate(
   }
 
   /** Topmost layer at the end of a haul, the fullest; 1 without a drum. */
-  int layer(double lineInM) {
-    return reel == null ? 1 : reel.topLayer(lineInM);
+  int layer(double lineInM, double pathM) {
+    return reel == null ? 1 : reel.topLayer(lineInM, pathM);
   }
 
   /** What a pull on the bare drum is on a layer [N]. */

@@ -81,9 +81,10 @@ record Reel(Drum drum, double wireM, int fullLayers, Double widthM, double start
    * Topmost layer at the end of a haul, the fullest of it.
    *
    * @param lineInM line taken in [m]
+   * @param pathM way from the winch along the line, beyond which no wire can be out [m]
    */
-  int topLayer(double lineInM) {
-    double stillOut = Math.max(0, startOutM - lineInM);
+  int topLayer(double lineInM, double pathM) {
+    double stillOut = Math.max(0, Math.min(startOutM, pathM) - lineInM);
     return widthM == null ? fullLayers : drum.layers(wireM - stillOut, widthM);
   }
 

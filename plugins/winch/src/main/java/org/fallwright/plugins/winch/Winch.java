@@ -81,7 +81,8 @@ public final class Winch implements PullSourceExtension {
       throw new IllegalArgumentException(
           "mode is \"" + request.mode() + "\"; it must be \"pull\" for a winch");
     }
-    int layer = winch.layer(request.pull().lineInM());
+    double pathM = request.line() == null ? request.stand().legM() : request.line().pathM();
+    int layer = winch.layer(request.pull().lineInM(), pathM);
     Bounds bounds = Bounds.of(winch, layer, request.stand());
     double settingN = winch.overloadN() == null ? STALL * winch.bareN() : winch.overloadN();
     boolean onGround = request.stand().ground() != null;

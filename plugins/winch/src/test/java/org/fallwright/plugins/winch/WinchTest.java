@@ -147,6 +147,22 @@ class WinchTest {
     assertThat(offer.limit().what().english()).endsWith("on layer " + layer + " of its drum");
   }
 
+  @Test
+  void noMoreWireCanBeOutThanTheWayToTheTree() {
+    ObjectNode drum =
+        poweredDrum().put("wire_m", 18).put("barrel_width_m", 0.12).put("wire_out_m", 12);
+    drum.remove("layer");
+    PullRequest near =
+        new PullRequest(
+            drum,
+            "pull",
+            new PullRequest.Stand(null, 0.2, 0, null, 1, 9, null),
+            new PullRequest.Pull(20_000, 1, 1, null),
+            null,
+            null);
+    assertThat(winch.offer(near).lowN()).as("8 of 18 m out").isCloseTo(28_000, within(0.1));
+  }
+
   /** The same at whatever layer, though a barer drum would pull more. */
   @Test
   void ratedOnAnyLayerItNeverCountsOnMore() {
