@@ -250,7 +250,7 @@ final class EnteredLines {
     w.given("ρ_g", "green density", r.species().greenDensity(), DENSITY);
     boolean entered = t.crownShare() != null;
     w.given(
-        "q_s",
+        "q_y",
         "share of the mass that is crown" + (entered ? "" : ", by DBH"),
         DerivedMass.crownShare(t, r.species()),
         NUMBER,
@@ -261,7 +261,7 @@ final class EnteredLines {
         "green mass of the tree: its stem and the crown's share",
         "π ÷ 12 × ("
             + String.join(" + ", pieces)
-            + ") × ρ_g ÷ (1 − q_s)"
+            + ") × ρ_g ÷ (1 − q_y)"
             + Workings.fit(w.unit(LENGTH) * small * small * w.unit(DENSITY) / w.unit(MASS)),
         MASS,
         Basis.GEOMETRY);

@@ -36,8 +36,8 @@ final class GearLines {
     share("q_e2", l.sourceEnd(), "its other end");
     w.work("q_e", "what its weaker end leaves", "min(q_e1, q_e2)", NUMBER, Basis.RULE);
     share("q_k", l.bend(), "its tightest bend");
-    share("q_w", l.wet(), "wet");
-    share("q_v", l.weather(), "weather");
+    share("q_n", l.wet(), "wet");
+    share("q_j", l.weather(), "weather");
     share("q_a", l.age(), "age and wear");
   }
 
@@ -109,7 +109,7 @@ final class GearLines {
     }
     StringBuilder formula = new StringBuilder(e);
     for (int j = 0; j < r.shares().size(); j++) {
-      String q = "q_" + (char) ('f' + j) + i;
+      String q = "q_" + (char) ('x' + j) + i;
       share(q, r.shares().get(j), "");
       formula.append(" × ").append(q);
     }

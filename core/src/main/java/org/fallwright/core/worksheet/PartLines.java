@@ -94,7 +94,7 @@ final class PartLines {
       w.given(f, factor, p.designFactor(), NUMBER, Basis.PLANNING_ALLOWANCE);
     } else if (p.name().equals("line " + r.line().line().id())) {
       new GearLines(w).line(r.line());
-      w.work(b, "strength", "b_l × q_e × q_k × q_w × q_v × q_a", FORCE, Basis.COMMON_PRACTICE);
+      w.work(b, "strength", "b_l × q_e × q_k × q_n × q_j × q_a", FORCE, Basis.COMMON_PRACTICE);
       w.given(f, factor, p.designFactor(), NUMBER, Basis.COMMON_PRACTICE);
     } else if (r.rated().containsKey(p.name())) {
       new GearLines(w).rated(i, r.rated().get(p.name()));
