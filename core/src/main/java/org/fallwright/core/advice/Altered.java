@@ -105,6 +105,8 @@ final class Altered {
         s.spots(),
         s.gear(),
         day,
-        s.offer());
+        s.offer(),
+        s.kit(),
+        s.leftBehind());
   }
 }

@@ -64,7 +64,7 @@ public final class Planner {
    */
   public Plan plan(Site site, DoubleConsumer progress, BooleanSupplier cancelled) {
     Judge judge = new Judge(site, sources);
-    Ways ways = new Ways(site, sources);
+    Ways ways = new Ways(site.atHand(), sources);
     List<Setup> all = ways.all();
     List<Double> lays = ways.lays();
     AtomicInteger done = new AtomicInteger();

@@ -27,6 +27,9 @@ final class Ways {
   private final PullSources sources;
   private final List<String> notes = new ArrayList<>();
 
+  /**
+   * @param site the site with the gear at hand alone
+   */
   Ways(Site site, PullSources sources) {
     this.site = site;
     this.sources = sources;
@@ -46,7 +49,7 @@ final class Ways {
             .sorted(Comparator.comparingDouble(Gear.Line::lengthM))
             .toList();
     if (lines.isEmpty()) {
-      notes.add("No pull line is in the gear, so nothing can be pulled.");
+      notes.add("No pull line is at hand, so nothing can be pulled.");
     }
     for (double attach : site.offer().attachHeightsM()) {
       for (double hinge : site.cut().hingeThicknessesM()) {

@@ -2,6 +2,8 @@ package org.fallwright.core.site;
 
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.List;
+import java.util.Set;
+import java.util.stream.Stream;
 import org.fallwright.core.units.Range;
 
 /**
@@ -29,6 +31,54 @@ public record Gear(
     sources = List.copyOf(Range.present("sources", sources));
   }
 
+  /** Anything in the gear, by its name. */
+  public interface Item {
+    String id();
+
+    /** How many of it there are. */
+    default int count() {
+      return 1;
+    }
+  }
+
+  /** Everything in the gear, in the order of the file. */
+  public List<Item> items() {
+    return Stream.of(
+            lines.stream(),
+            blocks.stream(),
+            slings.stream(),
+            connectors.stream(),
+            Stream.ofNullable(loadCell),
+            sources.stream())
+        .<Item>flatMap(s -> s)
+        .toList();
+  }
+
+  /** The same gear but for the things of these names, which drive nothing either. */
+  public Gear without(Set<String> ids) {
+    return new Gear(
+        kept(lines, ids),
+        kept(blocks, ids),
+        kept(slings, ids),
+        kept(connectors, ids),
+        loadCell == null || ids.contains(loadCell.id()) ? null : loadCell,
+        kept(sources, ids).stream()
+            .map(
+                s ->
+                    new Source(
+                        s.id(),
+                        s.plugin(),
+                        s.places(),
+                        s.drivers().stream().filter(d -> !ids.contains(d)).toList(),
+                        s.driverPlaces(),
+                        s.parameters()))
+            .toList());
+  }
+
+  private static <T extends Item> List<T> kept(List<T> items, Set<String> ids) {
+    return items.stream().filter(i -> !ids.contains(i.id())).toList();
+  }
+
   /**
    * A pull line.
    *
@@ -52,7 +102,8 @@ public record Gear(
       double bendFactor,
       double ageFactor,
       double stiffnessN,
-      boolean pullLine) {
+      boolean pullLine)
+      implements Item {
     public Line {
       Range.text("id", id);
       Range.text("material", material);
@@ -73,7 +124,8 @@ public record Gear(
    * @param standardFactor breaking load over rated load that its standard asks
    * @param efficiency tension passed on while hauling, 0 to 1
    */
-  public record Block(String id, double ratedLoadN, double standardFactor, double efficiency) {
+  public record Block(String id, double ratedLoadN, double standardFactor, double efficiency)
+      implements Item {
     public Block {
       Range.text("id", id);
       rated(ratedLoadN, standardFactor);
@@ -82,7 +134,8 @@ public record Gear(
   }
 
   /** Slings of one kind; rated as rigged. */
-  public record Sling(String id, double ratedLoadN, double standardFactor, int count) {
+  public record Sling(String id, double ratedLoadN, double standardFactor, int count)
+      implements Item {
     public Sling {
       Range.text("id", id);
       rated(ratedLoadN, standardFactor);
@@ -91,7 +144,8 @@ public record Gear(
   }
 
   /** Connectors of one kind. */
-  public record Connector(String id, double ratedLoadN, double standardFactor, int count) {
+  public record Connector(String id, double ratedLoadN, double standardFactor, int count)
+      implements Item {
     public Connector {
       Range.text("id", id);
       rated(ratedLoadN, standardFactor);
@@ -100,7 +154,7 @@ public record Gear(
   }
 
   /** A load cell with a person who reads it. */
-  public record LoadCell(String id, double ratedLoadN, double standardFactor) {
+  public record LoadCell(String id, double ratedLoadN, double standardFactor) implements Item {
     public LoadCell {
       Range.text("id", id);
       rated(ratedLoadN, standardFactor);
@@ -124,7 +178,8 @@ public record Gear(
       List<String> places,
       List<String> drivers,
       List<String> driverPlaces,
-      ObjectNode parameters) {
+      ObjectNode parameters)
+      implements Item {
     public Source {
       Range.text("id", id);
       Range.text("plugin", plugin);

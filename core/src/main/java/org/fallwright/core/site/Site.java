@@ -4,6 +4,7 @@ import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.fallwright.core.units.DisplayUnits;
 import org.fallwright.core.units.Range;
@@ -18,6 +19,9 @@ import org.fallwright.core.units.Range;
  * @param ruleSet key of the rule set
  * @param declinationDeg magnetic declination, east positive [degrees]; null: not stated
  * @param picture base map; null: blank ground
+ * @param gear all the gear thought of, also what is left behind
+ * @param kit name of the kit file that the gear was taken from; null: none
+ * @param leftBehind gear that does not come to the site
  */
 public record Site(
     int version,
@@ -37,7 +41,9 @@ public record Site(
     List<Spot> spots,
     Gear gear,
     Conditions conditions,
-    Offer offer) {
+    Offer offer,
+    String kit,
+    List<LeftBehind> leftBehind) {
   /** The version written. */
   public static final int VERSION = 2;
 
@@ -76,6 +82,11 @@ public record Site(
     Range.present("gear", gear);
     Range.present("conditions", conditions);
     Range.present("offer", offer);
+    if (kit != null) {
+      Range.text("kit", kit);
+    }
+    leftBehind = List.copyOf(Range.present("left_behind", leftBehind));
+    leftBehind(gear, leftBehind);
     oneNameEach(
         Stream.of(
                 Stream.of(tree.id()),
@@ -142,7 +153,9 @@ public record Site(
         spots,
         gear,
         conditions,
-        offer);
+        offer,
+        kit,
+        leftBehind);
   }
 
   /** The same site with other wires. */
@@ -165,7 +178,49 @@ public record Site(
         spots,
         gear,
         conditions,
-        offer);
+        offer,
+        kit,
+        leftBehind);
+  }
+
+  /**
+   * The same site with other gear.
+   *
+   * @param from name of the kit file that it was taken from; null: none
+   * @param stays what of it does not come to the site
+   */
+  public Site withGear(Gear other, String from, List<LeftBehind> stays) {
+    return new Site(
+        version,
+        name,
+        origin,
+        display,
+        ruleSet,
+        declinationDeg,
+        picture,
+        tree,
+        cut,
+        targets,
+        wires,
+        looked,
+        dropZones,
+        anchors,
+        spots,
+        other,
+        conditions,
+        offer,
+        from,
+        stays);
+  }
+
+  /** The site as it is judged: with the gear at hand alone. */
+  public Site atHand() {
+    return leftBehind.isEmpty()
+        ? this
+        : withGear(
+            gear.without(leftBehind.stream().map(LeftBehind::item).collect(Collectors.toSet())),
+            kit,
+            List.of());
   }
 
   public Optional<Anchor> anchor(String id) {
@@ -198,6 +253,24 @@ public record Site(
                 "the name \"" + id + "\" is used twice; each thing must have its own");
           }
         });
+  }
+
+  private static void leftBehind(Gear gear, List<LeftBehind> stays) {
+    for (LeftBehind left : stays) {
+      long named = gear.items().stream().filter(i -> i.id().equals(left.item())).count();
+      if (named != 1) {
+        throw new IllegalArgumentException(
+            "left_behind names \""
+                + left.item()
+                + "\"; "
+                + (named == 0 ? "nothing" : "more than one thing")
+                + " of that name is in the gear");
+      }
+      if (stays.stream().filter(l -> l.item().equals(left.item())).count() > 1) {
+        throw new IllegalArgumentException(
+            "left_behind names \"" + left.item() + "\" more than once; once is enough");
+      }
+    }
   }
 
   private static void ends(List<Anchor> anchors, Anchor.TwoLegs two, String leg, String id) {

@@ -22,5 +22,11 @@ final class Migrations {
 
   private static void fromFormOne(ObjectNode site) {
     site.put("version", Site.VERSION);
+    if (!site.has("kit")) {
+      site.putNull("kit");
+    }
+    if (!site.has("left_behind")) {
+      site.putArray("left_behind");
+    }
   }
 }

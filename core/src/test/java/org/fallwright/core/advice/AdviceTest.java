@@ -92,7 +92,9 @@ class AdviceTest {
         List.of(moved),
         s.gear(),
         s.conditions(),
-        s.offer());
+        s.offer(),
+        null,
+        List.of());
   }
 
   @Test

@@ -15,6 +15,7 @@ import org.fallwright.core.site.DropZone;
 import org.fallwright.core.site.Fix;
 import org.fallwright.core.site.Gear;
 import org.fallwright.core.site.How;
+import org.fallwright.core.site.LeftBehind;
 import org.fallwright.core.site.Looked;
 import org.fallwright.core.site.Offer;
 import org.fallwright.core.site.Origin;
@@ -71,6 +72,7 @@ final class RandomSites {
     List<String> places = new ArrayList<>();
     anchors.forEach(a -> places.add(a.id()));
     spots.forEach(s -> places.add(s.id()));
+    Gear gear = gear(places);
     return new Site(
         Site.VERSION,
         text(),
@@ -87,7 +89,7 @@ final class RandomSites {
         list(0, 2, i -> new DropZone("zone " + i, polygon())),
         anchors,
         spots,
-        gear(places),
+        gear,
         new Conditions(
             quantity(0, 40),
             maybe(() -> in(0, 360)),
@@ -98,7 +100,12 @@ final class RandomSites {
             any(How.values()),
             in(0.25, 90),
             list(0, 3, i -> in(0, 360)),
-            random.nextInt(2)));
+            random.nextInt(2)),
+        maybe(this::text),
+        gear.items().stream()
+            .filter(i -> flag())
+            .map(i -> new LeftBehind(i.id(), maybe(this::text)))
+            .toList());
   }
 
   private SubjectTree tree(double height) {
