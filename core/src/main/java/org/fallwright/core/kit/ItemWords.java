@@ -1,5 +1,6 @@
 package org.fallwright.core.kit;
 
+import java.util.List;
 import org.fallwright.core.site.Gear;
 import org.fallwright.core.units.DisplayUnits;
 
@@ -15,6 +16,14 @@ public final class ItemWords {
   LoadOut.Row row(Gear.Item item, int count, String shelf, String condition) {
     return new LoadOut.Row(
         item.id(), what(item), count, length(item), rating(item), ends(item), shelf, condition);
+  }
+
+  /** Everything on a truck of a kit, in the order of the kit. */
+  public List<LoadOut.Row> rows(Kit kit, String truck) {
+    return kit.stowed().stream()
+        .filter(s -> s.truck().equals(truck))
+        .map(s -> row(kit.item(s.item()).orElseThrow(), s.count(), shelf(s), condition(s)))
+        .toList();
   }
 
   String shelf(Stowed s) {

@@ -127,6 +127,12 @@ public record Kit(
     return stowed.stream().filter(s -> s.item().equals(item)).toList();
   }
 
+  /** The trucks that a thing is on, as words; empty where it is not in the kit. */
+  public Optional<String> trucksOf(String item) {
+    List<String> on = where(item).stream().map(Stowed::truck).distinct().toList();
+    return on.isEmpty() ? Optional.empty() : Optional.of(String.join(" and ", on));
+  }
+
   private static Stream<Gear.Item> items(
       List<Gear.Line> lines,
       List<Gear.Block> blocks,

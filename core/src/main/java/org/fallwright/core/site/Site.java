@@ -213,6 +213,19 @@ public record Site(
         stays);
   }
 
+  /** The same site with one more thing left behind; one that is so already stays so. */
+  public Site leaving(LeftBehind thing) {
+    return leftBehind.stream().anyMatch(l -> l.item().equals(thing.item()))
+        ? this
+        : withGear(gear, kit, Stream.concat(leftBehind.stream(), Stream.of(thing)).toList());
+  }
+
+  /** The same site with a thing that was left behind at hand again. */
+  public Site taking(String item) {
+    return withGear(
+        gear, kit, leftBehind.stream().filter(l -> !l.item().equals(item)).toList());
+  }
+
   /** The site as it is judged: with the gear at hand alone. */
   public Site atHand() {
     return leftBehind.isEmpty()

@@ -1,8 +1,12 @@
 package org.fallwright.core.store;
 
+import java.nio.file.Files;
+import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
+import java.util.Optional;
 import java.util.function.UnaryOperator;
 import org.fallwright.core.kit.Kit;
+import org.fallwright.core.site.Site;
 
 /**
  * Reads and writes the kit file (JSON, UTF-8), by the same rules as {@link SiteFile}. The same kit
@@ -25,6 +29,23 @@ public final class KitFile {
    */
   public static Kit read(Path file) throws SiteFileException {
     return KIT.read(file);
+  }
+
+  /**
+   * The kit that a site names, where its file lies beside the site's; else empty.
+   *
+   * @throws SiteFileException where it is there and cannot be read
+   */
+  public static Optional<Kit> beside(Site site, Path siteFile) throws SiteFileException {
+    if (site.kit() == null) {
+      return Optional.empty();
+    }
+    try {
+      Path file = siteFile.toAbsolutePath().resolveSibling(Path.of(site.kit()).getFileName());
+      return Files.isRegularFile(file) ? Optional.of(read(file)) : Optional.empty();
+    } catch (InvalidPathException e) {
+      return Optional.empty();
+    }
   }
 
   /** As {@link #read(Path)}, from bytes; {@code name} is for messages. */

@@ -113,6 +113,8 @@ public final class Fallwright implements Runnable {
             .addSubcommand(new PlanCommand(home))
             .addSubcommand(new SheetCommand(home))
             .addSubcommand(new WorksheetCommand(home))
+            .addSubcommand(new LoadOutCommand(home))
+            .addSubcommand(new KitCommand(home))
             .addSubcommand(new CheckCommand(home))
             .addSubcommand(new SourcesCommand(home))
             .addSubcommand(new AdviseCommand(home.plugins(), home.version()))
