@@ -83,7 +83,8 @@ final class Altered {
         t.shellM(),
         t.deadOrDecayed(),
         t.inLeaf(),
-        iceOrWet);
+        iceOrWet,
+        t.massBy());
   }
 
   private static Site with(Site s, SubjectTree tree, Conditions day) {

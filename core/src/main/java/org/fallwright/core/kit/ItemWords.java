@@ -1,6 +1,7 @@
 package org.fallwright.core.kit;
 
 import java.util.List;
+import org.fallwright.core.line.LineFigures;
 import org.fallwright.core.site.Gear;
 import org.fallwright.core.units.DisplayUnits;
 
@@ -38,25 +39,26 @@ public final class ItemWords {
   /** What it is. */
   public String what(Gear.Item item) {
     if (item instanceof Gear.Line l) {
-      return l.material()
+      return Words.of(l.material())
           + " "
           + in.smallLength(l.diameterM())
-          + (l.pullLine() ? " pull line" : " line for a tackle");
+          + (l.pullLine() ? ", pull line" : ", for a block system");
     }
-    if (item instanceof Gear.Block) {
-      return "redirect block";
+    if (item instanceof Gear.Block b) {
+      return "redirect block"
+          + (b.sheaveDiameterM() == null ? "" : ", sheave " + in.smallLength(b.sheaveDiameterM()));
     }
-    if (item instanceof Gear.Sling) {
-      return "anchor sling";
+    if (item instanceof Gear.Sling s) {
+      return (s.kind() == Gear.Sling.Kind.OTHER ? "sling" : Words.of(s.kind()) + " for an anchor");
     }
-    if (item instanceof Gear.Connector) {
-      return "connector";
+    if (item instanceof Gear.Connector c) {
+      return c.kind() == Gear.Connector.Kind.SHACKLE ? "shackle" : "connector";
     }
     if (item instanceof Gear.LoadCell) {
       return "load cell";
     }
     String plugin = item instanceof Gear.Source s ? s.plugin() : ((Kit.Source) item).plugin();
-    return "pull source, " + plugin.replace('-', ' ');
+    return plugin.replace('-', ' ');
   }
 
   /** Its length; empty where it has none. */
@@ -66,29 +68,24 @@ public final class ItemWords {
 
   /** What it bears, and whether that breaks it or is what it is rated for; empty: no figure. */
   public String rating(Gear.Item item) {
-    if (item instanceof Gear.Line l) {
-      return "breaks at " + in.forceAtMost(l.breakingLoadN());
-    }
-    if (item instanceof Gear.Block b) {
-      return rated(b.ratedLoadN());
-    }
-    if (item instanceof Gear.Sling s) {
-      return rated(s.ratedLoadN());
-    }
-    if (item instanceof Gear.Connector c) {
-      return rated(c.ratedLoadN());
-    }
-    return item instanceof Gear.LoadCell c ? rated(c.ratedLoadN()) : "";
+    return item instanceof Gear.Line l
+        ? "breaks at " + in.forceAtMost(LineFigures.of(l, null).breakingN())
+        : Ratings.of(item).map(r -> "rated " + in.forceAtMost(r.asRiggedN())).orElse("");
   }
 
   /** How it ends; empty where it has no ends. */
   public String ends(Gear.Item item) {
-    return item instanceof Gear.Line l
-        ? String.format(java.util.Locale.ROOT, "ends keep %.2f", l.terminationFactor())
-        : "";
+    if (item instanceof Gear.Line l && !l.material().chain()) {
+      String tree = end(l.treeEnd());
+      String source = end(l.sourceEnd());
+      return tree.equals(source)
+          ? "both ends: " + tree
+          : "tree end: " + tree + "; source end: " + source;
+    }
+    return "";
   }
 
-  private String rated(double n) {
-    return "rated " + in.forceAtMost(n);
+  private static String end(Gear.End end) {
+    return end == null ? "not stated" : Words.of(end.kind());
   }
 }

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import org.fallwright.core.plan.Check;
 import org.fallwright.core.plan.Judged;
@@ -108,7 +109,7 @@ public record LoadOut(
       Setup s = j.setup();
       lines.add(
           String.format(
-              java.util.Locale.ROOT,
+              Locale.ROOT,
               "%s at %s%s%s, lay %05.1f°, line at %s: %s",
               s.source(),
               s.place(),
@@ -133,9 +134,9 @@ public record LoadOut(
       needs.put(s.driver().source(), 1);
     }
     needs.put(s.source(), 1);
-    strongest(gear.blocks(), asked(judged, "blocks"), needs, Gear.Block::ratedLoadN);
-    strongest(gear.slings(), asked(judged, "slings"), needs, Gear.Sling::ratedLoadN);
-    strongest(gear.connectors(), asked(judged, "connectors"), needs, Gear.Connector::ratedLoadN);
+    strongest(gear.blocks(), asked(judged, "blocks"), needs);
+    strongest(gear.slings(), asked(judged, "slings"), needs);
+    strongest(gear.connectors(), asked(judged, "connectors"), needs);
     if (gear.loadCell() != null) {
       needs.put(gear.loadCell().id(), 1);
     }
@@ -143,13 +144,15 @@ public record LoadOut(
   }
 
   /** So many of a kind, the strongest first, for those were judged. */
-  private static <T extends Gear.Item> void strongest(
-      List<T> kind,
-      int asked,
-      Map<String, Integer> needs,
-      java.util.function.ToDoubleFunction<T> rated) {
+  private static void strongest(
+      List<? extends Gear.Item> kind, int asked, Map<String, Integer> needs) {
     int open = asked;
-    for (T item : kind.stream().sorted(Comparator.comparingDouble(rated).reversed()).toList()) {
+    for (Gear.Item item :
+        kind.stream()
+            .sorted(
+                Comparator.comparingDouble(
+                    (Gear.Item i) -> -Ratings.of(i).orElseThrow().asRiggedN()))
+            .toList()) {
       int take = Math.min(open, item.count());
       if (take > 0) {
         needs.put(item.id(), take);

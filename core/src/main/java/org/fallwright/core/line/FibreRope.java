@@ -11,8 +11,8 @@ import org.fallwright.core.units.Units;
  * Fibre ropes by what they are made of: strength where there is no label, stretch, and what water
  * and weather take.
  *
- * <p>Every figure is a row of {@link Hardware} with its source. A rule of thumb is for a check of
- * an entered figure, never in its place; for HMPE none was read.
+ * <p>Every figure is a row of {@link Hardware} with its source. A rule of thumb stands in only
+ * where a line has no label, and is said to; for HMPE none was read.
  */
 public enum FibreRope {
   NYLON("nylon"),
@@ -65,18 +65,22 @@ public enum FibreRope {
    */
   public OptionalDouble breakingN(double diameterM) {
     Range.check("diameter_m", diameterM, 0.003, THICKEST_M, "m");
-    double manila = Hardware.value("fibre.manila.rule");
-    double pounds =
-        switch (this) {
-          case MANILA -> manila;
-          case NYLON -> Hardware.value("fibre.nylon.rule");
-          case POLYESTER, POLYPROPYLENE -> manila * Hardware.value("fibre." + key + ".over-manila");
-          case HMPE -> Double.NaN;
-        };
+    double pounds = poundsPerInch2();
     double circumferenceIn = Math.PI * diameterM / Units.INCH;
     return Double.isNaN(pounds)
         ? OptionalDouble.empty()
         : OptionalDouble.of(pounds * circumferenceIn * circumferenceIn * Units.POUND_FORCE);
+  }
+
+  /** Breaking load over the square of the circumference [lbf/in²]; NaN: none was read. */
+  public double poundsPerInch2() {
+    double manila = Hardware.value("fibre.manila.rule");
+    return switch (this) {
+      case MANILA -> manila;
+      case NYLON -> Hardware.value("fibre.nylon.rule");
+      case POLYESTER, POLYPROPYLENE -> manila * Hardware.value("fibre." + key + ".over-manila");
+      case HMPE -> Double.NaN;
+    };
   }
 
   /** Stretch at that load, where it is known. Polypropylene: two thirds of nylon. */
@@ -93,16 +97,21 @@ public enum FibreRope {
   /**
    * Axial stiffness EA, the softest that is known [N]: the load over the greatest stretch there, at
    * a fifth of the breaking load and at break, the lesser. A soft line holds a tree worse and
-   * stores more, so this is the safe side.
+   * stores more, so this is the safe side. Of manila no stretch was read: it counts as nylon, the
+   * softest of all (planning allowance).
    *
    * @param breakingN breaking load on the label [N]
    */
-  public OptionalDouble softestN(double breakingN) {
-    Range.check("breaking_load_N", breakingN, 500, 5e6, "N");
+  public double softestN(double breakingN) {
+    if (this == MANILA) {
+      return NYLON.softestN(breakingN);
+    }
+    Range.check("breaking_load_N", breakingN, 100, 5e6, "N");
     return Stream.of(At.FIFTH, At.BREAK)
         .flatMap(at -> stretch(at).stream().map(s -> at.share() * breakingN / s.high()))
         .mapToDouble(n -> n)
-        .min();
+        .min()
+        .orElseThrow();
   }
 
   /** Share of its strength that it keeps when wet. */

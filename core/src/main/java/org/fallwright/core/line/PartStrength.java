@@ -1,6 +1,7 @@
 package org.fallwright.core.line;
 
 import org.fallwright.core.reference.Allowances;
+import org.fallwright.core.reference.Hardware;
 import org.fallwright.core.site.Gear;
 import org.fallwright.core.units.Range;
 
@@ -20,21 +21,27 @@ public record PartStrength(double strengthN, double designFactor, double lastFac
    */
   public static final double WIRE = Allowances.WIRE_FACTOR.value();
 
+  /** Factor asked of a chain that pulls: breaking over working load of chain. */
+  public static final double CHAIN = Hardware.value("chain.factor");
+
   /** Factor asked at the most the source can do; planning allowance. */
   public static final double LAST = Allowances.LAST_FACTOR.value();
 
   /**
-   * A pull line: breaking load × ends × bends × wet and age.
+   * A pull line as it is rigged.
    *
-   * @param line the line
    * @param ruleFactor least design factor that the rule set asks; 1 where it asks none
    */
-  public static PartStrength line(Gear.Line line, double ruleFactor) {
+  public static PartStrength line(LineFigures line, double ruleFactor) {
     Range.check("rule_factor", ruleFactor, 1, 20, "");
+    Gear.Material m = line.line().material();
     return new PartStrength(
-        line.breakingLoadN() * line.terminationFactor() * line.bendFactor() * line.ageFactor(),
-        Math.max(line.wireRope() ? WIRE : FIBRE, ruleFactor),
-        LAST);
+        line.strengthN(), Math.max(m.chain() ? CHAIN : m.wire() ? WIRE : FIBRE, ruleFactor), LAST);
+  }
+
+  /** Rated hardware as it is rigged. */
+  public static PartStrength of(RatedFigures rated) {
+    return rated(rated.asRiggedN(), rated.factor().value());
   }
 
   /**
@@ -42,7 +49,7 @@ public record PartStrength(double strengthN, double designFactor, double lastFac
    * factor is asked at the planned load.
    */
   public static PartStrength rated(double ratedLoadN, double standardFactor) {
-    Range.check("rated_load_N", ratedLoadN, 100, 1e7, "N");
+    Range.check("rated_load_N", ratedLoadN, 1, 1e8, "N");
     Range.check("standard_factor", standardFactor, 1, 12, "");
     return new PartStrength(ratedLoadN * standardFactor, standardFactor, LAST);
   }

@@ -36,7 +36,11 @@ public final class Shackles {
    * then by the bands that end at 45 and 90.
    */
   public static double sideLoad(double asideDeg) {
+    return Hardware.value(asideRow(asideDeg));
+  }
+
+  static String asideRow(double asideDeg) {
     Range.check("aside_deg", asideDeg, 0, 90, "degrees");
-    return Hardware.value("shackle.aside-" + (asideDeg <= 5 ? 5 : asideDeg <= 45 ? 45 : 90));
+    return "shackle.aside-" + (asideDeg <= 5 ? 5 : asideDeg <= 45 ? 45 : 90);
   }
 }

@@ -1,6 +1,8 @@
 package org.fallwright.core.line;
 
+import org.fallwright.core.reference.Figure;
 import org.fallwright.core.reference.Hardware;
+import org.fallwright.core.site.Gear;
 
 /**
  * Share k of the tension that a sheave passes on while hauling, by its kind. The low end counts
@@ -17,13 +19,23 @@ public enum Sheave {
   /** A connector that a rope is led through. */
   CONNECTOR("carabiner");
 
+  private final Figure lowest;
   private final double low;
   private final double high;
 
   Sheave(String name) {
     String key = "sheave." + name;
-    low = Hardware.find(key).orElseGet(() -> Hardware.of(key + ".low")).value();
+    lowest = Hardware.find(key).orElseGet(() -> Hardware.of(key + ".low"));
+    low = lowest.value();
     high = Hardware.find(key).orElseGet(() -> Hardware.of(key + ".high")).value();
+  }
+
+  /** What a block passes on while hauling: as stated, else the low end of its sheave's kind. */
+  public static Share of(Gear.Block block) {
+    if (block.efficiency() != null) {
+      return Share.stated("tension that the block passes on, hauling", block.efficiency());
+    }
+    return Share.of(valueOf(block.sheave().name()).lowest);
   }
 
   /** The low end of what is known of k. */

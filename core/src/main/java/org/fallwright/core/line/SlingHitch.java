@@ -14,6 +14,9 @@ public enum SlingHitch {
   CHOKER_WIRE("sling.choker-wire"),
   CHOKER_SYNTHETIC("sling.choker-synthetic");
 
+  /** Flattest legs of a basket [degrees to the horizontal]. */
+  public static final double FLATTEST_DEG = 30;
+
   private static final int[] CHOKE_FROM_DEG = {120, 90, 60, 30, 0};
 
   private final double factor;
@@ -29,7 +32,7 @@ public enum SlingHitch {
 
   /** Factor of a basket whose legs stand at an angle to the horizontal [degrees]. */
   public static double basket(double legToHorizontalDeg) {
-    Range.check("leg_to_horizontal_deg", legToHorizontalDeg, 30, 90, "degrees");
+    Range.check("leg_to_horizontal_deg", legToHorizontalDeg, FLATTEST_DEG, 90, "degrees");
     return 2 * Math.sin(Math.toRadians(legToHorizontalDeg));
   }
 
@@ -38,12 +41,16 @@ public enum SlingHitch {
    * standing part and the part that runs through the eye.
    */
   public static double choke(double chokeDeg) {
+    return Hardware.value(chokeRow(chokeDeg));
+  }
+
+  static String chokeRow(double chokeDeg) {
     Range.check("choke_deg", chokeDeg, 0, 180, "degrees");
     int step = 0;
     // the edges of the bands are whole degrees; at 120 itself the lower band counts
     while (chokeDeg < CHOKE_FROM_DEG[step] || step == 0 && chokeDeg == CHOKE_FROM_DEG[0]) {
       step++;
     }
-    return Hardware.value("sling.choke-from-" + CHOKE_FROM_DEG[step]);
+    return "sling.choke-from-" + CHOKE_FROM_DEG[step];
   }
 }

@@ -34,6 +34,18 @@ public enum WireRope {
   }
 
   /**
+   * Axial stiffness EA of a wire rope that breaks at a load, the softest that is known [N]: the
+   * load over the greatest stretch there, at a fifth of it and at break, the lesser. From memory,
+   * for 6×19; chain of the same breaking load counts as no stiffer (planning allowance).
+   */
+  public static double softestN(double breakingN) {
+    Range.check("breaking_load_N", breakingN, 100, 5e6, "N");
+    return Math.min(
+        0.2 * breakingN / Hardware.value("wire.stretch-20.high"),
+        breakingN / Hardware.value("wire.stretch-break.high"));
+  }
+
+  /**
    * Safe mass on a wire rope whose maker's figures are missing [kg]: 8·d², d in mm. Published:
    * Australian Emergency Manual, Disaster Rescue, 3.15.
    */

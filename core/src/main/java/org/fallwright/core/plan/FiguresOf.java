@@ -1,7 +1,7 @@
 package org.fallwright.core.plan;
 
+import java.util.Optional;
 import org.fallwright.core.pull.PullOffer;
-import org.fallwright.core.site.Site;
 import org.fallwright.core.statics.Ratios;
 import org.fallwright.core.statics.Statics;
 import org.fallwright.core.statics.TreeSide;
@@ -11,7 +11,7 @@ final class FiguresOf {
   private FiguresOf() {}
 
   static Figures reckon(
-      Site site,
+      Optional<CellLoad> cell,
       Route route,
       Statics statics,
       Ratios r,
@@ -19,7 +19,6 @@ final class FiguresOf {
       boolean leans,
       Landing.Zones zones) {
     TreeSide t = statics.treeSide();
-    boolean cell = site.gear().loadCell() != null;
     double slack = t.takeUpM() - t.shorteningM() - t.workingN() / t.pathNPerM();
     return new Figures(
         t.neededN(),
@@ -49,9 +48,9 @@ final class FiguresOf {
         t.gapeM(),
         t.lengthM(),
         leans,
-        // the reading as if the sheaves lost nothing: never later than the ceiling at the tree
-        cell ? r.ceiling().tensionN() : Double.NaN,
-        cell ? "source end of the pull line" : "",
+        // the lesser of its two readings: never later than the ceiling at the tree
+        cell.map(c -> c.least() * r.ceiling().tensionN()).orElse(Double.NaN),
+        cell.map(CellLoad::place).orElse(""),
         route.loads().sourceEndPerTree(),
         t.neededN() / t.pathNPerM() > t.shorteningToCommitM());
   }

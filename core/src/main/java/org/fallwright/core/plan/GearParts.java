@@ -1,16 +1,23 @@
 package org.fallwright.core.plan;
 
 import java.util.ArrayList;
+import java.util.Collections;
+import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.function.BinaryOperator;
+import java.util.stream.Stream;
 import org.fallwright.core.anchor.AnchorCapacity;
 import org.fallwright.core.anchor.AnchorLoad;
 import org.fallwright.core.anchor.Bridle;
 import org.fallwright.core.anchor.Capacity;
 import org.fallwright.core.line.LegLoads;
+import org.fallwright.core.line.LineFigures;
 import org.fallwright.core.line.PartStrength;
 import org.fallwright.core.line.Point3;
+import org.fallwright.core.line.RatedFigures;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.rules.RuleSet;
 import org.fallwright.core.site.Anchor;
@@ -30,8 +37,14 @@ final class GearParts {
 
   private final List<Part> parts = new ArrayList<>();
   private final List<HeldAnchor> anchors = new ArrayList<>();
+  private final Map<String, RatedFigures> rated = new LinkedHashMap<>();
   private int slings;
   private int connectors;
+
+  /** How many of the strongest slings and connectors are in use: the weakest of them counts. */
+  private int slingsOut = 1;
+
+  private int connectorsOut = 1;
 
   GearParts(Site site, RuleSet rules, SiteTables tables) {
     this.site = site;
@@ -47,6 +60,11 @@ final class GearParts {
     return anchors;
   }
 
+  /** What the rated hardware among the parts may carry, by the part's name. */
+  Map<String, RatedFigures> rated() {
+    return rated;
+  }
+
   int slings() {
     return slings;
   }
@@ -56,22 +74,34 @@ final class GearParts {
   }
 
   GearParts collect(Setup setup, Route route, PullOffer offer) {
+    gather(setup, route, offer);
+    if (slings > 1 || connectors > 1) {
+      slingsOut = slings;
+      connectorsOut = connectors;
+      parts.clear();
+      anchors.clear();
+      rated.clear();
+      slings = 0;
+      connectors = 0;
+      gather(setup, route, offer);
+    }
+    return this;
+  }
+
+  private void gather(Setup setup, Route route, PullOffer offer) {
     LegLoads loads = route.loads();
     double end = loads.sourceEndPerTree();
-    Gear.Line line = line(site, setup);
-    PartStrength rope = PartStrength.line(line, rules.fibreFactor().value());
-    add("line " + line.id(), rope, end, 1);
+    PartStrength rope = PartStrength.line(lineFigures(site, setup), rules.fibreFactor().value());
+    add("line " + setup.line(), rope, end, 1);
     for (int i = 0; i < setup.redirects().size(); i++) {
       redirect(site.anchor(setup.redirects().get(i)).orElseThrow(), loads.blocks().get(i));
     }
-    Gear.LoadCell cell = site.gear().loadCell();
-    if (cell != null) {
-      add(
-          "load cell " + cell.id(),
-          PartStrength.rated(cell.ratedLoadN(), cell.standardFactor()),
-          end,
-          1);
-    }
+    CellLoad.of(site, setup, end, offer)
+        .ifPresent(
+            c -> {
+              RatedFigures cell = RatedFigures.of(site.gear().loadCell());
+              addRated("load cell " + cell.id(), cell, false, c.hauling(), c.holding());
+            });
     site.anchor(setup.place())
         .ifPresent(
             a -> {
@@ -101,7 +131,12 @@ final class GearParts {
               end * p.hauling(),
               p.holding()));
     }
-    return this;
+  }
+
+  /** The pull line as it is rigged in a setup. */
+  static LineFigures lineFigures(Site site, Setup setup) {
+    return LineFigures.of(
+        line(site, setup), setup.redirects().isEmpty() ? null : Route.block(site));
   }
 
   static Gear.Line line(Site site, Setup setup) {
@@ -140,10 +175,10 @@ final class GearParts {
   }
 
   private void redirect(Anchor a, LegLoads.Block block) {
-    Gear.Block b = Route.block(site);
-    add(
+    addRated(
         "block at " + a.id(),
-        PartStrength.rated(b.ratedLoadN(), b.standardFactor()),
+        RatedFigures.of(Route.block(site)),
+        false,
         block.hauling(),
         block.holding());
     bear(
@@ -221,28 +256,20 @@ final class GearParts {
   }
 
   private void sling(String at, double hauling, double holding, boolean ratedForSource) {
-    site.gear().slings().stream()
-        .max(java.util.Comparator.comparingDouble(Gear.Sling::ratedLoadN))
-        .ifPresent(
-            s ->
-                add(
-                    "sling at " + at,
-                    rated(s.ratedLoadN(), s.standardFactor(), ratedForSource),
-                    hauling,
-                    holding));
+    nth(
+            slingsOut,
+            site.gear().slings().stream()
+                .flatMap(s -> copies(slingsOut, s.count(), RatedFigures.of(s))))
+        .ifPresent(s -> addRated("sling at " + at, s, ratedForSource, hauling, holding));
   }
 
   private void connector(String at, double hauling, double holding, boolean ratedForSource) {
     connectors++;
-    site.gear().connectors().stream()
-        .max(java.util.Comparator.comparingDouble(Gear.Connector::ratedLoadN))
-        .ifPresent(
-            s ->
-                add(
-                    "connector at " + at,
-                    rated(s.ratedLoadN(), s.standardFactor(), ratedForSource),
-                    hauling,
-                    holding));
+    nth(
+            connectorsOut,
+            site.gear().connectors().stream()
+                .flatMap(c -> copies(connectorsOut, c.count(), RatedFigures.of(c))))
+        .ifPresent(c -> addRated("connector at " + at, c, ratedForSource, hauling, holding));
   }
 
   /**
@@ -275,11 +302,31 @@ final class GearParts {
   /**
    * Where a rule sizes gear by its rating against the most of the source, that is its last factor.
    */
-  private static PartStrength rated(double ratedN, double standard, boolean ratedForSource) {
-    PartStrength p = PartStrength.rated(ratedN, standard);
-    return ratedForSource
-        ? new PartStrength(p.strengthN(), p.designFactor(), Math.max(p.lastFactor(), standard))
-        : p;
+  private void addRated(
+      String name, RatedFigures r, boolean ratedForSource, double hauling, double holding) {
+    PartStrength p = PartStrength.of(r);
+    rated.put(name, r);
+    add(
+        name,
+        ratedForSource
+            ? new PartStrength(
+                p.strengthN(), p.designFactor(), Math.max(p.lastFactor(), p.designFactor()))
+            : p,
+        hauling,
+        holding);
+  }
+
+  private static Stream<RatedFigures> copies(int wanted, int there, RatedFigures of) {
+    return Collections.nCopies(Math.min(wanted, there), of).stream();
+  }
+
+  /** The strongest but n − 1 of what there is; the weakest where there are fewer. */
+  private static Optional<RatedFigures> nth(int n, Stream<RatedFigures> all) {
+    List<RatedFigures> sorted =
+        all.sorted(Comparator.comparingDouble(RatedFigures::asRiggedN).reversed()).toList();
+    return sorted.isEmpty()
+        ? Optional.empty()
+        : Optional.of(sorted.get(Math.min(n, sorted.size()) - 1));
   }
 
   /** Adds a part; of two alike at one place, as two slings at an anchor, the more loaded counts. */

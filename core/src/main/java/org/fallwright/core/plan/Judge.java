@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Optional;
 import java.util.concurrent.ConcurrentHashMap;
 import org.fallwright.core.pull.HaulLine;
 import org.fallwright.core.pull.PullOffer;
@@ -116,9 +117,18 @@ public final class Judge {
         route.points(),
         route.loads(),
         setup.redirects().isEmpty() ? null : Route.block(site),
-        GearParts.line(site, setup),
+        GearParts.lineFigures(site, setup),
+        parts.rated(),
         offer,
-        tree.movable() ? stop(statics, offer, route, parts.parts()).ratios() : null,
+        tree.movable()
+            ? stop(
+                    statics,
+                    offer,
+                    route,
+                    parts.parts(),
+                    CellLoad.of(site, setup, route.loads().sourceEndPerTree(), offer).isPresent())
+                .ratios()
+            : null,
         parts.anchors(),
         tables);
   }
@@ -164,14 +174,15 @@ public final class Judge {
     Figures figures;
     List<PartLoad> loads = List.of();
     if (tree.movable()) {
-      Stopped stopped = stop(statics, offer, route, parts.parts());
+      Optional<CellLoad> cell = CellLoad.of(site, setup, route.loads().sourceEndPerTree(), offer);
+      Stopped stopped = stop(statics, offer, route, parts.parts(), cell.isPresent());
       Ratios r = stopped.ratios();
       forces.pull(r, tree, offer, name);
       forces.parts(r, tree);
       if (stopped.leans()) {
         leaning(grade, offer, r);
       }
-      figures = FiguresOf.reckon(site, route, statics, r, offer, stopped.leans(), zones);
+      figures = FiguresOf.reckon(cell, route, statics, r, offer, stopped.leans(), zones);
       loads = loads(r, tree);
       if (full) {
         notes.addAll(SetupNotes.of(site, in, setup, tree, r, offer));
@@ -235,7 +246,8 @@ public final class Judge {
    */
   private record Stopped(Ratios ratios, boolean leans) {}
 
-  private Stopped stop(Statics statics, PullOffer offer, Route route, List<Part> parts) {
+  private Stopped stop(
+      Statics statics, PullOffer offer, Route route, List<Part> parts, boolean cell) {
     TreeSide tree = statics.treeSide();
     double low = offer.lowN() / route.loads().sourceEndPerTree();
     boolean captured = offer.captured() && offer.holdN() >= tree.holdN();
@@ -245,7 +257,7 @@ public final class Judge {
     Ratios without = Ratios.of(statics, wedges, free, parts);
     // a stop at the ceiling helps only where the plan itself stays below it
     boolean helps = anyBelowOne(without, " at high") && !anyBelowOne(without, " at plan");
-    if (!helps || site.gear().loadCell() == null) {
+    if (!helps || !cell) {
       return new Stopped(without, false);
     }
     SourceAtTree read =

@@ -1,9 +1,12 @@
 package org.fallwright.core.plan;
 
 import java.util.List;
+import java.util.Map;
 import org.fallwright.core.anchor.AnchorFigures;
 import org.fallwright.core.line.LegLoads;
+import org.fallwright.core.line.LineFigures;
 import org.fallwright.core.line.Point3;
+import org.fallwright.core.line.RatedFigures;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.reference.Species;
 import org.fallwright.core.site.Gear;
@@ -23,7 +26,8 @@ import org.fallwright.core.tree.TreeFigures;
  * @param points attachment, redirects, end; metres from the stump's centre at hinge level
  * @param loads tensions and loads of the legs
  * @param redirectBlock the redirect block; null: no redirect
- * @param line the pull line
+ * @param line the pull line as it is rigged
+ * @param rated what the rated hardware may carry, by the part's name
  * @param offer what the source gives at its line end
  * @param ratios ratios after any stop; null where the tree cannot be moved
  * @param anchors anchors of the way
@@ -38,7 +42,8 @@ public record Reckoned(
     List<Point3> points,
     LegLoads loads,
     Gear.Block redirectBlock,
-    Gear.Line line,
+    LineFigures line,
+    Map<String, RatedFigures> rated,
     PullOffer offer,
     Ratios ratios,
     List<HeldAnchor> anchors,

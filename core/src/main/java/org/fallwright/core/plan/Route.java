@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Set;
 import org.fallwright.core.line.LegLoads;
 import org.fallwright.core.line.Point3;
+import org.fallwright.core.line.Sheave;
 import org.fallwright.core.pull.HaulLine;
 import org.fallwright.core.pull.PullSource;
 import org.fallwright.core.site.Anchor;
@@ -44,7 +45,7 @@ record Route(
       Anchor a = site.anchor(id).orElseThrow();
       bearing = bearing == null ? a.place() : bearing;
       line.add(at(a, LinePoint.Role.REDIRECT));
-      efficiencies.add(block(site).efficiency());
+      efficiencies.add(Sheave.of(block(site)).value());
     }
     Gear.Source gear = site.source(way.source()).orElseThrow();
     LinePoint end =

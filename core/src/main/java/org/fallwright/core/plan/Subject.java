@@ -11,7 +11,6 @@ import org.fallwright.core.reference.SpeciesTable;
 import org.fallwright.core.reference.Spreads;
 import org.fallwright.core.site.Conditions;
 import org.fallwright.core.site.CutPlan;
-import org.fallwright.core.site.Gear;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.SubjectTree;
@@ -108,11 +107,7 @@ final class Subject {
             tree.leanDeg().value(),
             tree.leanAzimuthDeg().value(),
             crown);
-    Gear.Line line =
-        site.gear().lines().stream()
-            .filter(l -> l.id().equals(setup.line()))
-            .findFirst()
-            .orElseThrow();
+    double stiffness = GearParts.lineFigures(site, setup).stiffnessN();
     List<Point3> points = route.points().subList(1, route.points().size());
     Double slack = site.conditions().slackM();
     return new PullCase(
@@ -130,7 +125,7 @@ final class Subject {
         new LineSet(
             setup.attachHeightM() - cut.heightM(),
             points,
-            points.stream().map(p -> line.stiffnessN()).toList(),
+            points.stream().map(p -> stiffness).toList(),
             haul(route),
             slack == null ? Allowances.SLACK.value() : slack),
         spread(setup, route));

@@ -7,7 +7,6 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
-import org.fallwright.core.line.PartStrength;
 import org.fallwright.core.pull.PullSource;
 import org.fallwright.core.pull.PullSources;
 import org.fallwright.core.pull.SourceDescription.PlaceKind;
@@ -112,8 +111,8 @@ final class Ways {
   }
 
   /**
-   * Whether a shorter line that is as strong and as stiff reaches by itself; then a longer one is
-   * no candidate, for it does the same.
+   * Whether a shorter line that is otherwise the same reaches by itself; then a longer one is no
+   * candidate, for it does the same.
    */
   private boolean aShorterLineDoes(Setup way, List<Gear.Line> lines) {
     Gear.Line own = GearParts.line(site, way);
@@ -129,13 +128,21 @@ final class Ways {
         .anyMatch(
             l ->
                 l.lengthM() >= needed
-                    && strength(l) == strength(own)
-                    && l.wireRope() == own.wireRope()
-                    && l.stiffnessN() == own.stiffnessN());
-  }
-
-  private static double strength(Gear.Line l) {
-    return PartStrength.line(l, 1).strengthN();
+                    && own.equals(
+                        new Gear.Line(
+                            own.id(),
+                            l.material(),
+                            l.diameterM(),
+                            own.lengthM(),
+                            l.breakingLoadN(),
+                            l.treeEnd(),
+                            l.sourceEnd(),
+                            l.bend(),
+                            l.wet(),
+                            l.weathered(),
+                            l.age(),
+                            l.stiffnessN(),
+                            own.pullLine())));
   }
 
   private List<Setup.Driver> drivers(Gear.Source tackle) {

@@ -222,8 +222,7 @@ public record Site(
 
   /** The same site with a thing that was left behind at hand again. */
   public Site taking(String item) {
-    return withGear(
-        gear, kit, leftBehind.stream().filter(l -> !l.item().equals(item)).toList());
+    return withGear(gear, kit, leftBehind.stream().filter(l -> !l.item().equals(item)).toList());
   }
 
   /** The site as it is judged: with the gear at hand alone. */

@@ -34,6 +34,7 @@ import org.fallwright.core.units.Range;
  * @param deadOrDecayed whether the wood at the hinge is dead or decayed
  * @param inLeaf whether the crown is in leaf
  * @param iceOrWet whether ice, wet snow or rain loads the crown
+ * @param massBy how a mass that was neither entered nor weighed is reckoned
  */
 public record SubjectTree(
     String id,
@@ -57,7 +58,16 @@ public record SubjectTree(
     Double shellM,
     boolean deadOrDecayed,
     boolean inLeaf,
-    boolean iceOrWet) {
+    boolean iceOrWet,
+    MassBy massBy) {
+  /** How a mass that was not entered is reckoned. */
+  public enum MassBy {
+    /** Published equation by DBH and species. */
+    EQUATION,
+    /** Volume of the stem by its measured diameters, green density and the crown's share. */
+    STEM
+  }
+
   /** Where DBH is measured, along the stem from the ground [m]; common practice. */
   public static final double BREAST_HEIGHT_M = 1.3;
 
@@ -106,6 +116,7 @@ public record SubjectTree(
     Range.checkOrNull("crown_share", crownShare, 0, 1, "");
     Range.checkOrNull("crown_area_m2", crownAreaM2, 0, 5000, "m²");
     Range.checkOrNull("shell_m", shellM, 0.001, 3, "m");
+    Range.present("mass_by", massBy);
     for (StemDiameter d : diameters) {
       Range.check("diameters.height_m", d.heightM(), 0, heightM.value(), "m");
     }

@@ -2,6 +2,7 @@ package org.fallwright.core.store;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.util.stream.Stream;
 import org.fallwright.core.site.Site;
 
 /**
@@ -28,5 +29,20 @@ final class Migrations {
     if (!site.has("left_behind")) {
       site.putArray("left_behind");
     }
+    if (site.path("tree") instanceof ObjectNode tree && !tree.has("mass_by")) {
+      tree.put("mass_by", "equation");
+    }
+    JsonNode gear = site.path("gear");
+    objects(gear.path("lines")).forEach(GearOfFormOne::line);
+    objects(gear.path("blocks")).forEach(GearOfFormOne::block);
+    objects(gear.path("slings")).forEach(GearOfFormOne::sling);
+    objects(gear.path("connectors")).forEach(GearOfFormOne::connector);
+    if (gear.path("load_cell") instanceof ObjectNode cell && !cell.has("at")) {
+      cell.put("at", "source-end");
+    }
+  }
+
+  private static Stream<ObjectNode> objects(JsonNode list) {
+    return list.valueStream().filter(ObjectNode.class::isInstance).map(ObjectNode.class::cast);
   }
 }

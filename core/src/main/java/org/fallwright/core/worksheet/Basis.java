@@ -1,5 +1,6 @@
 package org.fallwright.core.worksheet;
 
+import org.fallwright.core.line.Share;
 import org.fallwright.core.reference.Kind;
 import org.fallwright.core.site.How;
 
@@ -39,6 +40,10 @@ public enum Basis {
       case ESTIMATED -> ESTIMATED;
       case GUESSED -> GUESSED;
     };
+  }
+
+  static Basis of(Share share) {
+    return share.kind() == null ? ENTERED : of(share.kind());
   }
 
   static Basis of(Kind kind) {

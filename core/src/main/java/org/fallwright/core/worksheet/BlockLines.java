@@ -4,6 +4,8 @@ import static org.fallwright.core.worksheet.Dimension.LENGTH;
 import static org.fallwright.core.worksheet.Dimension.NUMBER;
 
 import org.fallwright.core.line.LegLoads;
+import org.fallwright.core.line.Share;
+import org.fallwright.core.line.Sheave;
 import org.fallwright.core.plan.Reckoned;
 
 /** Loads on the redirect blocks and tension at the source, for each unit of tension at the tree. */
@@ -31,12 +33,8 @@ final class BlockLines {
           "a_N", "line on the tree north of it", "w_a × tan(λ) × cos(γ)", LENGTH, Basis.GEOMETRY);
     }
     if (r.redirectBlock() != null) {
-      w.given(
-          "k_b",
-          "tension that a block passes on, hauling",
-          r.redirectBlock().efficiency(),
-          NUMBER,
-          Basis.ENTERED);
+      Share k = Sheave.of(r.redirectBlock());
+      w.given("k_b", k.what(), k.value(), NUMBER, Basis.of(k), k.source());
     }
     w.given("i_1", "tension in the first leg", 1, NUMBER, Basis.STATICS);
     int blocks = r.loads().blocks().size();

@@ -292,7 +292,7 @@ final class EnteredLines {
     }
     w.given(
         "EA",
-        "softest axial stiffness of line " + r.line().id(),
+        "softest axial stiffness of line " + r.judged().setup().line(),
         r.line().stiffnessN(),
         FORCE,
         Basis.ENTERED);

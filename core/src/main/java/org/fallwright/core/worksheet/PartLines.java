@@ -11,15 +11,12 @@ import java.util.List;
 import org.fallwright.core.plan.Reckoned;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.reference.Allowances;
-import org.fallwright.core.site.Gear;
 import org.fallwright.core.statics.Part;
 import org.fallwright.core.statics.Ratios;
 import org.fallwright.core.statics.TreeSide;
 
 /** Every part at plan and at the most the source can do, the ceiling, the source and its margin. */
 final class PartLines {
-  private static final String HARDWARE = "(block|sling|connector) at .*|load cell .*";
-
   private final Workings w;
   private final Reckoned r;
   private final Ratios ratios;
@@ -95,18 +92,12 @@ final class PartLines {
     } else if (p.name().startsWith("anchor ")) {
       w.work(b, "strength", anchors.removeFirst(), FORCE, Basis.STATICS);
       w.given(f, factor, p.designFactor(), NUMBER, Basis.PLANNING_ALLOWANCE);
-    } else if (p.name().equals("line " + r.line().id())) {
-      Gear.Line l = r.line();
-      w.given("b_l", "breaking load on its label", l.breakingLoadN(), FORCE, Basis.ENTERED);
-      w.given("q_e", "what its ends leave", l.terminationFactor(), NUMBER, Basis.ENTERED);
-      w.given("q_k", "what its tightest bend leaves", l.bendFactor(), NUMBER, Basis.ENTERED);
-      w.given("q_a", "what wet and age leave", l.ageFactor(), NUMBER, Basis.ENTERED);
-      w.work(b, "strength", "b_l × q_e × q_k × q_a", FORCE, Basis.COMMON_PRACTICE);
+    } else if (p.name().equals("line " + r.line().line().id())) {
+      new GearLines(w).line(r.line());
+      w.work(b, "strength", "b_l × q_e × q_k × q_w × q_v × q_a", FORCE, Basis.COMMON_PRACTICE);
       w.given(f, factor, p.designFactor(), NUMBER, Basis.COMMON_PRACTICE);
-    } else if (p.name().matches(HARDWARE)) {
-      w.given("E_" + i, "rated load", p.strengthN() / p.designFactor(), FORCE, Basis.ENTERED);
-      w.given(
-          f, "factor of its standard, asked as planned", p.designFactor(), NUMBER, Basis.ENTERED);
+    } else if (r.rated().containsKey(p.name())) {
+      new GearLines(w).rated(i, r.rated().get(p.name()));
       w.work(b, "strength", "E_" + i + " × F_" + i, FORCE, Basis.COMMON_PRACTICE);
     } else {
       w.given(b, "strength", p.strengthN(), FORCE, Basis.SOURCE);

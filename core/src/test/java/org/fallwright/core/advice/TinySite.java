@@ -20,6 +20,7 @@ import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Quantity;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Spot;
+import org.fallwright.core.site.Stated;
 import org.fallwright.core.site.SubjectTree;
 
 /**
@@ -27,6 +28,9 @@ import org.fallwright.core.site.SubjectTree;
  * and a rated anchor. Nothing is in the way.
  */
 final class TinySite {
+  private static final Gear.End SPLICE =
+      new Gear.End(Gear.End.Kind.EYE_SPLICE, new Stated(0.9, "the test"));
+
   double lowN = 12_000;
   double highN = 15_000;
   double leanDeg = 4;
@@ -102,7 +106,8 @@ final class TinySite {
             null,
             false,
             true,
-            false),
+            false,
+            SubjectTree.MassBy.EQUATION),
         new CutPlan(
             0.3, CutPlan.Face.OPEN, 0.25, 70, List.of(hingeM), How.MEASURED, null, 0.01, false),
         List.of(),
@@ -122,11 +127,41 @@ final class TinySite {
                 null)),
         new Gear(
             List.of(
-                new Gear.Line("rope", "HMPE", false, 0.012, 120, 150_000, 0.9, 1, 1, 2.4e6, true)),
-            List.of(new Gear.Block("block", 40_000, 4, 0.9)),
-            List.of(new Gear.Sling("sling", 40_000, 5, 4)),
-            List.of(new Gear.Connector("link", 40_000, 5, 4)),
-            new Gear.LoadCell("cell", 50_000, 5),
+                new Gear.Line(
+                    "rope",
+                    Gear.Material.HMPE,
+                    0.012,
+                    120,
+                    150_000.0,
+                    SPLICE,
+                    SPLICE,
+                    null,
+                    false,
+                    false,
+                    null,
+                    2.4e6,
+                    true)),
+            List.of(
+                new Gear.Block(
+                    "block",
+                    40_000,
+                    4.0,
+                    Gear.Block.SheaveKind.OTHER,
+                    null,
+                    new Stated(0.9, "the test"))),
+            List.of(
+                new Gear.Sling(
+                    "sling",
+                    Gear.Sling.Kind.OTHER,
+                    40_000.0,
+                    null,
+                    5.0,
+                    Gear.Sling.Hitch.AS_RIGGED,
+                    null,
+                    4)),
+            List.of(
+                new Gear.Connector("link", Gear.Connector.Kind.RATED, 40_000.0, 5.0, null, 0, 4)),
+            new Gear.LoadCell("cell", 50_000, 5, Gear.LoadCell.At.SOURCE_END),
             List.of(
                 new Gear.Source(
                     "steady", "steady", List.of("spot", "point"), List.of(), List.of(), pull))),

@@ -6,6 +6,7 @@ import static org.assertj.core.api.Assertions.within;
 
 import java.util.List;
 import org.fallwright.core.site.Gear;
+import org.fallwright.core.site.Stated;
 import org.junit.jupiter.api.Test;
 
 class LineTest {
@@ -88,7 +89,23 @@ class LineTest {
 
   @Test
   void ruleSetsCanAskMoreOfALineNeverLess() {
-    Gear.Line wire = new Gear.Line("W", "steel", true, 0.01, 50, 60e3, 0.8, 0.9, 1, 5e6, true);
+    LineFigures wire =
+        LineFigures.of(
+            new Gear.Line(
+                "W",
+                Gear.Material.WIRE_STEEL_CORE,
+                0.01,
+                50,
+                60e3,
+                new Gear.End(Gear.End.Kind.WIRE_CLIPS, null),
+                new Gear.End(Gear.End.Kind.WIRE_SWAGED_SOCKET, null),
+                new Stated(0.9, "the test"),
+                false,
+                false,
+                null,
+                5e6,
+                true),
+            null);
     assertThat(PartStrength.line(wire, 1).designFactor()).isEqualTo(3);
     assertThat(PartStrength.line(wire, 5).designFactor()).isEqualTo(5);
     assertThat(PartStrength.line(wire, 1).strengthN()).isCloseTo(60e3 * 0.72, within(1e-6));

@@ -26,6 +26,7 @@ import org.fallwright.core.site.Quantity;
 import org.fallwright.core.site.Shape;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Spot;
+import org.fallwright.core.site.Stated;
 import org.fallwright.core.site.StemDiameter;
 import org.fallwright.core.site.SubjectTree;
 import org.fallwright.core.site.Target;
@@ -134,7 +135,8 @@ final class RandomSites {
         maybe(() -> in(0.001, 3)),
         flag(),
         flag(),
-        flag());
+        flag(),
+        any(SubjectTree.MassBy.values()));
   }
 
   private CutPlan cut() {
@@ -295,29 +297,13 @@ final class RandomSites {
 
   private Gear gear(List<String> places) {
     return new Gear(
-        list(
-            0,
-            3,
-            i ->
-                new Gear.Line(
-                    "line " + i,
-                    text(),
-                    flag(),
-                    in(0.003, 0.1),
-                    in(1, 1000),
-                    in(500, 5e6),
-                    in(0.1, 1),
-                    in(0.1, 1),
-                    in(0.1, 1),
-                    in(1e3, 1e9),
-                    flag())),
-        list(0, 2, i -> new Gear.Block("block " + i, in(100, 1e7), in(1, 12), in(0.3, 1))),
-        list(0, 2, i -> new Gear.Sling("sling " + i, in(100, 1e7), in(1, 12), random.nextInt(101))),
-        list(
-            0,
-            2,
-            i -> new Gear.Connector("link " + i, in(100, 1e7), in(1, 12), random.nextInt(101))),
-        maybe(() -> new Gear.LoadCell(text(), in(100, 1e7), in(1, 12))),
+        list(0, 3, i -> line("line " + i)),
+        list(0, 2, i -> block("block " + i)),
+        list(0, 2, i -> sling("sling " + i)),
+        list(0, 2, i -> connector("link " + i)),
+        maybe(
+            () ->
+                new Gear.LoadCell(text(), in(100, 1e7), in(1, 12), any(Gear.LoadCell.At.values()))),
         list(
             0,
             4,
@@ -329,6 +315,107 @@ final class RandomSites {
                     i == 0 ? List.of() : List.of("source 0"),
                     list(0, 2, j -> one(places)),
                     parameters(3))));
+  }
+
+  private Gear.Line line(String id) {
+    Gear.Material m = any(Gear.Material.values());
+    boolean label = m == Gear.Material.HMPE || flag();
+    return new Gear.Line(
+        id,
+        m,
+        label ? in(0.003, 0.1) : in(0.004, 0.026),
+        in(1, 1000),
+        label ? in(500, 5e6) : null,
+        maybe(() -> end(m)),
+        maybe(() -> end(m)),
+        maybe(() -> stated(0.1)),
+        flag(),
+        flag(),
+        maybe(() -> stated(0.1)),
+        maybe(() -> in(1e3, 1e9)),
+        flag());
+  }
+
+  private Gear.End end(Gear.Material m) {
+    return m.chain() || flag()
+        ? new Gear.End(Gear.End.Kind.OTHER, stated(0.1))
+        : new Gear.End(
+            m.wire() ? Gear.End.Kind.WIRE_CLIPS : Gear.End.Kind.BOWLINE, maybe(() -> stated(0.1)));
+  }
+
+  private Stated stated(double least) {
+    return new Stated(in(least, 1), text());
+  }
+
+  private Gear.Block block(String id) {
+    boolean other = flag();
+    return new Gear.Block(
+        id,
+        in(100, 1e7),
+        maybe(() -> in(1, 12)),
+        other ? Gear.Block.SheaveKind.OTHER : Gear.Block.SheaveKind.RESCUE_PULLEY,
+        maybe(() -> in(0.005, 2)),
+        other ? stated(0.3) : maybe(() -> stated(0.3)));
+  }
+
+  private Gear.Sling sling(String id) {
+    int count = random.nextInt(101);
+    return switch (random.nextInt(4)) {
+      case 0 ->
+          new Gear.Sling(
+              id,
+              Gear.Sling.Kind.OTHER,
+              in(100, 1e7),
+              maybe(() -> in(0.004, 0.05)),
+              in(1, 12),
+              Gear.Sling.Hitch.AS_RIGGED,
+              null,
+              count);
+      case 1 ->
+          new Gear.Sling(
+              id,
+              Gear.Sling.Kind.CHAIN_80,
+              null,
+              in(0.004, 0.05),
+              maybe(() -> in(1, 12)),
+              Gear.Sling.Hitch.VERTICAL,
+              null,
+              count);
+      case 2 ->
+          new Gear.Sling(
+              id,
+              Gear.Sling.Kind.WEBBING,
+              in(100, 1e7),
+              null,
+              null,
+              Gear.Sling.Hitch.BASKET,
+              maybe(() -> in(30, 90)),
+              count);
+      default ->
+          new Gear.Sling(
+              id,
+              Gear.Sling.Kind.NATURAL_FIBRE,
+              in(100, 1e7),
+              null,
+              null,
+              Gear.Sling.Hitch.CHOKER,
+              maybe(() -> in(0, 180)),
+              count);
+    };
+  }
+
+  private Gear.Connector connector(String id) {
+    int count = random.nextInt(101);
+    return flag()
+        ? new Gear.Connector(id, Gear.Connector.Kind.RATED, in(100, 1e7), in(1, 12), null, 0, count)
+        : new Gear.Connector(
+            id,
+            Gear.Connector.Kind.SHACKLE,
+            maybe(() -> in(100, 1e7)),
+            maybe(() -> in(1, 12)),
+            in(0.004, 0.1),
+            in(0, 90),
+            count);
   }
 
   private ObjectNode parameters(int depth) {

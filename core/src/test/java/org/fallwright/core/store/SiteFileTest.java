@@ -17,7 +17,12 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Map;
+import org.fallwright.core.line.LineFigures;
+import org.fallwright.core.line.PartStrength;
+import org.fallwright.core.line.RatedFigures;
+import org.fallwright.core.line.Sheave;
 import org.fallwright.core.site.Anchor;
+import org.fallwright.core.site.Gear;
 import org.fallwright.core.site.How;
 import org.fallwright.core.site.Looked;
 import org.fallwright.core.site.Site;
@@ -29,8 +34,51 @@ class SiteFileTest {
 
   @Test
   void theFrozenSampleOfFormOneReadsAsThePresentForm() throws IOException {
-    assertThat(SiteFile.read(Samples.utf8(Samples.formOne()), "one"))
-        .isEqualTo(SiteFile.read(Samples.utf8(Samples.present()), "two"));
+    Site one = SiteFile.read(Samples.utf8(Samples.formOne()), "one");
+    ObjectNode present = (ObjectNode) SiteJson.MAPPER.readTree(Samples.present());
+    ObjectNode lifted = (ObjectNode) SiteJson.MAPPER.readTree(SiteFile.bytes(one));
+    // the present sample's gear has more than form 1 could say
+    for (String gear : List.of("lines", "blocks", "slings", "connectors", "load_cell")) {
+      ((ObjectNode) present.get("gear")).set(gear, lifted.get("gear").get(gear));
+    }
+    assertThat(one).isEqualTo(SiteFile.read(SiteJson.MAPPER.writeValueAsBytes(present), "present"));
+  }
+
+  @Test
+  void theGearOfFormOneHoldsWhatItHeld() throws IOException {
+    Gear gear = SiteFile.read(Samples.utf8(Samples.formOne()), "one").gear();
+    assertThat(gear.lines())
+        .extracting(Gear.Line::material)
+        .containsExactly(Gear.Material.HMPE, Gear.Material.POLYESTER);
+    // breaking load × ends × bend × age of that file: 120 kN × 0.9 and 55 kN × 0.9
+    assertThat(gear.lines())
+        .extracting(l -> LineFigures.of(l, gear.blocks().get(0)).strengthN())
+        .containsExactly(108e3, 49.5e3);
+    assertThat(gear.lines())
+        .extracting(l -> LineFigures.of(l, null).stiffnessN())
+        .containsExactly(2.4e6, 0.22e6);
+    assertThat(Sheave.of(gear.blocks().get(0)).value()).isEqualTo(0.95);
+    assertThat(gear.slings()).extracting(s -> RatedFigures.of(s).asRiggedN()).containsExactly(30e3);
+    assertThat(gear.connectors())
+        .extracting(c -> PartStrength.of(RatedFigures.of(c)).strengthN())
+        .containsExactly(31900 * 5.0);
+  }
+
+  @Test
+  void aMaterialThatHasNoWordInFormTwoKeepsItsFigures() throws IOException {
+    String other =
+        Samples.formOne()
+            .replace(
+                "\"material\": \"HMPE\",\n      \"wire_rope\": false",
+                "\"material\": \"6x19\",\n      \"wire_rope\": true")
+            .replace("\"polyester\"", "\"aramid, old\"");
+    List<Gear.Line> lines = SiteFile.read(Samples.utf8(other), "one").gear().lines();
+    assertThat(lines.get(0).material()).isEqualTo(Gear.Material.WIRE_FIBRE_CORE);
+    assertThat(PartStrength.line(LineFigures.of(lines.get(0), null), 1).designFactor())
+        .isEqualTo(3);
+    assertThat(lines.get(1).material()).isEqualTo(Gear.Material.POLYPROPYLENE);
+    assertThat(lines.get(1).age().why()).contains("aramid, old");
+    assertThat(LineFigures.of(lines.get(1), null).strengthN()).isEqualTo(49.5e3);
   }
 
   @Test

@@ -57,7 +57,8 @@ final class SampleTree {
         null,
         false,
         true,
-        false);
+        false,
+        SubjectTree.MassBy.EQUATION);
   }
 
   /** The sample oak with what is known of its pieces and its crown. */
@@ -91,6 +92,7 @@ final class SampleTree {
         null,
         false,
         inLeaf,
-        iceOrWet);
+        iceOrWet,
+        SubjectTree.MassBy.EQUATION);
   }
 }

@@ -87,7 +87,8 @@ class TreeFiguresTest {
             null,
             false,
             true,
-            false);
+            false,
+            SubjectTree.MassBy.EQUATION);
     assertThat(figures(wide).crownAreaM2()).isCloseTo(94.25, within(0.005));
     assertThat(figures(wide).crownMiddleM()).isEqualTo(14);
     assertThat(figures(t).crownAreaM2()).isCloseTo(81.3, within(0.05));
