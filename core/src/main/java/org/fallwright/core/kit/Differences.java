@@ -4,12 +4,14 @@ import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.lang.reflect.RecordComponent;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Locale;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Collectors;
 import org.fallwright.core.site.Gear;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.units.DisplayUnits;
@@ -131,6 +133,12 @@ public final class Differences {
     }
     if (value instanceof Boolean b) {
       return b ? "yes" : "no";
+    }
+    if (value instanceof Record r) {
+      return Arrays.stream(r.getClass().getRecordComponents())
+          .map(inner -> shown(inner, value(inner, r)))
+          .filter(word -> !word.isEmpty())
+          .collect(Collectors.joining(", "));
     }
     return value == null ? "" : Words.of(value);
   }

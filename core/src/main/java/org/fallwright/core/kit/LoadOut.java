@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import org.fallwright.core.plan.Check;
+import org.fallwright.core.plan.JoinedLines;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.Setup;
 import org.fallwright.core.site.Gear;
@@ -74,8 +75,7 @@ public record LoadOut(
    */
   public static LoadOut of(Site site, List<Judged> setups, Kit kit) {
     Map<String, Integer> needed = new LinkedHashMap<>();
-    setups.forEach(
-        j -> of(site.atHand().gear(), j).forEach((id, n) -> needed.merge(id, n, Math::max)));
+    setups.forEach(j -> of(site.atHand(), j).forEach((id, n) -> needed.merge(id, n, Math::max)));
     List<Truck> trucks = new ArrayList<>();
     ItemWords words = new ItemWords(site.display().units());
     Loading loading = new Loading(site.atHand().gear(), needed, words);
@@ -125,10 +125,11 @@ public record LoadOut(
   }
 
   /** How many of each thing a setup needs. */
-  private static Map<String, Integer> of(Gear gear, Judged judged) {
+  private static Map<String, Integer> of(Site site, Judged judged) {
     Setup s = judged.setup();
+    Gear gear = site.gear();
     Map<String, Integer> needs = new LinkedHashMap<>();
-    needs.put(s.line(), 1);
+    JoinedLines.parts(site, s.line()).forEach(l -> needs.put(l.id(), 1));
     if (s.driver() != null) {
       gear.lines().stream().filter(l -> !l.pullLine()).forEach(l -> needs.put(l.id(), 1));
       needs.put(s.driver().source(), 1);

@@ -40,7 +40,8 @@ final class KitChecks {
     Gear.Line line = GearParts.line(site, setup);
     double takeUp = t.movable() ? t.takeUpM() : 0;
     List<Double> legs = route.loads().legs().stream().map(LegLoads.Leg::lengthM).toList();
-    PathFit fit = fit(legs, line, offer, takeUp);
+    List<Gear.Line> joined = JoinedLines.parts(site, setup.line());
+    PathFit fit = fit(legs, joined, offer, takeUp);
     boolean reaches = fit.neededM() <= fit.availableM();
     grade.rule(
         "line length",
@@ -60,7 +61,7 @@ final class KitChecks {
                     ? "."
                     : longer(
                         nearer(setup.place(), route.points(), fit.neededM() - fit.availableM()),
-                        spares.line(l -> fit(legs, l, offer, takeUp).fits()),
+                        spares.line(l -> fit(legs, List.of(l), offer, takeUp).fits()),
                         fit.neededM() - fit.availableM())));
     if (reaches && !fit.fits()) {
       grade.rule(
@@ -72,7 +73,7 @@ final class KitChecks {
           null,
           () ->
               sentence(fit.shortOf())
-                  + least(spares.line(l -> fit(legs, l, offer, takeUp).fits())));
+                  + least(spares.line(l -> fit(legs, List.of(l), offer, takeUp).fits())));
     }
     haulLine(setup, route, takeUp);
     enough(
@@ -86,8 +87,14 @@ final class KitChecks {
         gear.connectors());
   }
 
-  private static PathFit fit(List<Double> legs, Gear.Line line, PullOffer offer, double takeUp) {
-    return PathFit.of(legs, line.lengthM(), Allowances.LINE_SPARE.value(), offer.wireM(), takeUp);
+  private static PathFit fit(
+      List<Double> legs, List<Gear.Line> lines, PullOffer offer, double takeUp) {
+    return PathFit.of(
+        legs,
+        lines.stream().map(Gear.Line::lengthM).toList(),
+        Allowances.LINE_SPARE.value(),
+        offer.wireM(),
+        takeUp);
   }
 
   /** Standing nearer at a spot; at an anchor nothing can be moved. */

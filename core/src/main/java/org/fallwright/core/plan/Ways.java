@@ -18,8 +18,9 @@ import org.fallwright.core.site.Site;
 
 /**
  * All candidates of a site: every source in every mode at every place where it can be, direct or
- * over one redirect on every other anchor, with each attach height and hinge thickness on offer;
- * and every lay. The order is fixed.
+ * over one redirect on every other anchor, with each attach height and hinge thickness on offer,
+ * with each pull line, and with two joined where none reaches alone; and every lay. The order is
+ * fixed.
  */
 final class Ways {
   private final Site site;
@@ -57,6 +58,9 @@ final class Ways {
             of(attach, hinge, line, source).stream()
                 .filter(way -> !aShorterLineDoes(way, lines))
                 .forEach(ways::add);
+          }
+          if (lines.size() > 1) {
+            of(attach, hinge, lines.get(0), source).forEach(way -> ways.addAll(joined(way, lines)));
           }
         }
       }
@@ -163,6 +167,32 @@ final class Ways {
       }
     }
     return drivers;
+  }
+
+  /** The way with each two lines joined that reach, where no line does by itself. */
+  private List<Setup> joined(Setup way, List<Gear.Line> lines) {
+    PullSource source = kind(site.source(way.source()).orElseThrow()).orElseThrow();
+    PullSource driver =
+        way.driver() == null
+            ? null
+            : kind(site.source(way.driver().source()).orElseThrow()).orElseThrow();
+    Route route = Route.of(site, way, source, driver);
+    double needed = route.loads().lengthM() + Allowances.LINE_SPARE.value();
+    List<Setup> ways = new ArrayList<>();
+    if (needed <= lines.get(lines.size() - 1).lengthM()) {
+      return ways;
+    }
+    double wire = Reach.of(site, way, route, new Reach.Pulled(0, 0), source, driver).wireM();
+    if (needed > lines.get(lines.size() - 1).lengthM() + wire) {
+      for (Gear.Line a : lines) {
+        for (Gear.Line b : lines) {
+          if (a != b && a.lengthM() + b.lengthM() + wire >= needed) {
+            ways.add(way.withLine(JoinedLines.name(a, b)));
+          }
+        }
+      }
+    }
+    return ways;
   }
 
   private Optional<PullSource> kind(Gear.Source source) {
