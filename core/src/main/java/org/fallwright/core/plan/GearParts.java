@@ -95,6 +95,9 @@ final class GearParts {
     PartStrength rope =
         PartStrength.line(line, line.line().material().fibre() ? rules.fibreFactor().value() : 1);
     add("line " + setup.line(), rope, end, 1);
+    if (JoinedLines.parts(site, setup.line()).size() > 1) {
+      connector("joint of " + setup.line(), end, 1, false);
+    }
     for (int i = 0; i < setup.redirects().size(); i++) {
       redirect(site.anchor(setup.redirects().get(i)).orElseThrow(), loads.blocks().get(i));
     }
@@ -137,15 +140,16 @@ final class GearParts {
 
   /** The pull line as it is rigged in a setup. */
   static LineFigures lineFigures(Site site, Setup setup) {
-    return LineFigures.of(
-        line(site, setup), setup.redirects().isEmpty() ? null : Route.block(site));
+    return LineFigures.of(line(site, setup), over(site, setup));
   }
 
+  /** The pull line of a setup, two joined as one. */
   static Gear.Line line(Site site, Setup setup) {
-    return site.gear().lines().stream()
-        .filter(l -> l.id().equals(setup.line()))
-        .findFirst()
-        .orElseThrow();
+    return JoinedLines.whole(site, setup.line(), over(site, setup));
+  }
+
+  private static Gear.Block over(Site site, Setup setup) {
+    return setup.redirects().isEmpty() ? null : Route.block(site);
   }
 
   /**

@@ -42,7 +42,9 @@ public final class Judge {
    */
   private static final int NOT_MADE = 1000;
 
+  /** The site with the gear at hand alone. */
   private final Site site;
+
   private final PullSources sources;
   private final RuleSet rules;
   private final DisplayUnits in;
@@ -55,6 +57,7 @@ public final class Judge {
   private final Site reaching;
 
   private final LineRun lineRun;
+  private final Spares spares;
   private final Map<Setup, Route> routes = new ConcurrentHashMap<>();
   private final Map<Pulled, Statics> reckoned = new ConcurrentHashMap<>();
 
@@ -62,8 +65,8 @@ public final class Judge {
    * @throws IllegalArgumentException one sentence, where the site names a species, surface or rule
    *     set that is not known
    */
-  public Judge(Site site, PullSources sources) {
-    this.site = site;
+  public Judge(Site entered, PullSources sources) {
+    site = entered.atHand();
     this.sources = sources;
     for (double height : site.offer().attachHeightsM()) {
       double above = height - site.cut().heightM();
@@ -84,6 +87,7 @@ public final class Judge {
     knowledge = new Knowledge(site, rules);
     reaching = reaching(site);
     landing = new Landing(reaching, rules, in, subject, knowledge);
+    spares = new Spares(entered, in);
     lineRun = new LineRun(site, in, knowledge);
   }
 
@@ -98,7 +102,9 @@ public final class Judge {
 
   /** Notes that hold for every setup of the site, a sentence each. */
   List<String> notes() {
-    return subject.notes();
+    List<String> notes = new ArrayList<>(subject.notes());
+    spares.note().ifPresent(notes::add);
+    return notes;
   }
 
   /** The setup with all its checks, its zones and notes. */
@@ -212,7 +218,7 @@ public final class Judge {
     usable(grade, parts);
     Landing.Zones zones = landing.check(grade, setup, route, tree, full);
     lineRun.check(grade, setup, route);
-    new KitChecks(site, in, grade).check(setup, route, tree, offer, parts);
+    new KitChecks(site, spares, in, grade).check(setup, route, tree, offer, parts);
     ForceChecks forces = new ForceChecks(site, in, grade);
     forces.movement(tree, setup.attachHeightM() - site.cut().heightM());
     List<String> notes = new ArrayList<>(zones.notes());

@@ -66,7 +66,7 @@ public final class Planner {
   public Plan plan(Site site, DoubleConsumer progress, BooleanSupplier cancelled) {
     Judge judge = new Judge(site, sources);
     LeftOut out = new LeftOut(site);
-    Ways ways = new Ways(site, sources, out);
+    Ways ways = new Ways(site.atHand(), sources, out);
     List<Setup> all = ways.all();
     List<Double> lays = ways.lays();
     AtomicInteger done = new AtomicInteger();

@@ -19,8 +19,9 @@ import org.fallwright.core.site.Site;
 
 /**
  * All candidates of a site: every source in every mode at every place where it can be, direct or
- * over one redirect on every other anchor, with each attach height and hinge thickness on offer;
- * and every lay. The order is fixed.
+ * over one redirect on every other anchor, with each attach height and hinge thickness on offer,
+ * with each pull line, and with two joined where none reaches alone; and every lay. The order is
+ * fixed.
  */
 final class Ways {
   private final Site site;
@@ -28,6 +29,9 @@ final class Ways {
   private final LeftOut out;
   private final List<String> notes = new ArrayList<>();
 
+  /**
+   * @param site the site with the gear at hand alone
+   */
   Ways(Site site, PullSources sources, LeftOut out) {
     this.site = site;
     this.sources = sources;
@@ -48,13 +52,16 @@ final class Ways {
             .sorted(Comparator.comparingDouble(Gear.Line::lengthM))
             .toList();
     if (lines.isEmpty()) {
-      notes.add("No pull line is in the gear, so nothing can be pulled.");
+      notes.add("No pull line is at hand, so nothing can be pulled.");
     }
     for (double attach : site.offer().attachHeightsM()) {
       for (double hinge : site.cut().hingeThicknessesM()) {
         for (Gear.Source source : site.gear().sources()) {
           for (Gear.Line line : lines) {
             ways.addAll(ofWhatWorks(attach, hinge, line, source, lines));
+          }
+          if (lines.size() > 1) {
+            of(attach, hinge, lines.get(0), source).forEach(way -> ways.addAll(joined(way, lines)));
           }
         }
       }
@@ -178,6 +185,32 @@ final class Ways {
       }
     }
     return drivers;
+  }
+
+  /** The way with each two lines joined that reach, where no line does by itself. */
+  private List<Setup> joined(Setup way, List<Gear.Line> lines) {
+    PullSource source = kind(site.source(way.source()).orElseThrow()).orElseThrow();
+    PullSource driver =
+        way.driver() == null
+            ? null
+            : kind(site.source(way.driver().source()).orElseThrow()).orElseThrow();
+    Route route = Route.of(site, way, source, driver);
+    double needed = route.loads().lengthM() + Allowances.LINE_SPARE.value();
+    List<Setup> ways = new ArrayList<>();
+    if (needed <= lines.get(lines.size() - 1).lengthM()) {
+      return ways;
+    }
+    double wire = Reach.of(site, way, route, new Reach.Pulled(0, 0, 0), source, driver).wireM();
+    if (needed > lines.get(lines.size() - 1).lengthM() + wire) {
+      for (Gear.Line a : lines) {
+        for (Gear.Line b : lines) {
+          if (a != b && a.lengthM() + b.lengthM() + wire >= needed) {
+            ways.add(way.withLine(JoinedLines.name(a, b)));
+          }
+        }
+      }
+    }
+    return ways;
   }
 
   private Optional<PullSource> kind(Gear.Source source) {

@@ -2,6 +2,8 @@ package org.fallwright.core.site;
 
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.List;
+import java.util.Set;
+import java.util.stream.Stream;
 import org.fallwright.core.units.Range;
 
 /**
@@ -27,6 +29,54 @@ public record Gear(
     slings = List.copyOf(Range.present("slings", slings));
     connectors = List.copyOf(Range.present("connectors", connectors));
     sources = List.copyOf(Range.present("sources", sources));
+  }
+
+  /** Anything in the gear, by its name. */
+  public interface Item {
+    String id();
+
+    /** How many of it there are. */
+    default int count() {
+      return 1;
+    }
+  }
+
+  /** Everything in the gear, in the order of the file. */
+  public List<Item> items() {
+    return Stream.of(
+            lines.stream(),
+            blocks.stream(),
+            slings.stream(),
+            connectors.stream(),
+            Stream.ofNullable(loadCell),
+            sources.stream())
+        .<Item>flatMap(s -> s)
+        .toList();
+  }
+
+  /** The same gear but for the things of these names, which drive nothing either. */
+  public Gear without(Set<String> ids) {
+    return new Gear(
+        kept(lines, ids),
+        kept(blocks, ids),
+        kept(slings, ids),
+        kept(connectors, ids),
+        loadCell == null || ids.contains(loadCell.id()) ? null : loadCell,
+        kept(sources, ids).stream()
+            .map(
+                s ->
+                    new Source(
+                        s.id(),
+                        s.plugin(),
+                        s.places(),
+                        s.drivers().stream().filter(d -> !ids.contains(d)).toList(),
+                        s.driverPlaces(),
+                        s.parameters()))
+            .toList());
+  }
+
+  private static <T extends Item> List<T> kept(List<T> items, Set<String> ids) {
+    return items.stream().filter(i -> !ids.contains(i.id())).toList();
   }
 
   /** What a line is made of. */
@@ -135,7 +185,8 @@ public record Gear(
       boolean weathered,
       Stated age,
       Double stiffnessN,
-      boolean pullLine) {
+      boolean pullLine)
+      implements Item {
     /** Thickest fibre rope whose breaking load a rule gives [m]. */
     public static final double THICKEST_BY_RULE_M = 0.026;
 
@@ -190,7 +241,8 @@ public record Gear(
       Double standardFactor,
       SheaveKind sheave,
       Double sheaveDiameterM,
-      Stated efficiency) {
+      Stated efficiency)
+      implements Item {
     /** Kinds of sheave. */
     public enum SheaveKind {
       WIRE_ON_ROLLERS,
@@ -238,7 +290,8 @@ public record Gear(
       Double standardFactor,
       Hitch hitch,
       Double angleDeg,
-      int count) {
+      int count)
+      implements Item {
     /** Kinds of sling. */
     public enum Kind {
       ROUND_SLING,
@@ -308,7 +361,8 @@ public record Gear(
       Double standardFactor,
       Double bodyDiameterM,
       double asideDeg,
-      int count) {
+      int count)
+      implements Item {
     /** Kinds of connector. */
     public enum Kind {
       SHACKLE,
@@ -339,7 +393,8 @@ public record Gear(
    *
    * @param at where it sits
    */
-  public record LoadCell(String id, double ratedLoadN, double standardFactor, At at) {
+  public record LoadCell(String id, double ratedLoadN, double standardFactor, At at)
+      implements Item {
     /** Where a load cell can sit. */
     public enum At {
       /** In the pull line at the tree. */
@@ -376,7 +431,8 @@ public record Gear(
       List<String> places,
       List<String> drivers,
       List<String> driverPlaces,
-      ObjectNode parameters) {
+      ObjectNode parameters)
+      implements Item {
     public Source {
       Range.text("id", id);
       Range.text("plugin", plugin);

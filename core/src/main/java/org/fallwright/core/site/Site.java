@@ -4,6 +4,7 @@ import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.fallwright.core.units.DisplayUnits;
 import org.fallwright.core.units.Range;
@@ -20,6 +21,9 @@ import org.fallwright.core.units.Range;
  * @param picture base map; null: blank ground
  * @param cases named cases of other days
  * @param revisions the setup as set on the day, oldest first
+ * @param gear all the gear thought of, also what is left behind
+ * @param kit name of the kit file that the gear was taken from; null: none
+ * @param leftBehind gear that does not come to the site
  */
 public record Site(
     int version,
@@ -41,7 +45,9 @@ public record Site(
     Conditions conditions,
     Offer offer,
     List<Case> cases,
-    List<Revision> revisions) {
+    List<Revision> revisions,
+    String kit,
+    List<LeftBehind> leftBehind) {
   /** The version written. */
   public static final int VERSION = 2;
 
@@ -83,6 +89,11 @@ public record Site(
     cases = List.copyOf(Range.present("cases", cases));
     revisions = List.copyOf(Range.present("revisions", revisions));
     oneNameEach(cases.stream().map(Case::id));
+    if (kit != null) {
+      Range.text("kit", kit);
+    }
+    leftBehind = List.copyOf(Range.present("left_behind", leftBehind));
+    leftBehind(gear, leftBehind);
     oneNameEach(
         Stream.of(
                 Stream.of(tree.id()),
@@ -139,6 +150,41 @@ public record Site(
     return Copy.with(this, "wires", others);
   }
 
+  /**
+   * The same site with other gear.
+   *
+   * @param from name of the kit file that it was taken from; null: none
+   * @param stays what of it does not come to the site
+   */
+  public Site withGear(Gear other, String from, List<LeftBehind> stays) {
+    return Copy.with(
+        Copy.with(Copy.with(Copy.with(this, "leftBehind", List.of()), "gear", other), "kit", from),
+        "leftBehind",
+        stays);
+  }
+
+  /** The same site with one more thing left behind; one that is so already stays so. */
+  public Site leaving(LeftBehind thing) {
+    return leftBehind.stream().anyMatch(l -> l.item().equals(thing.item()))
+        ? this
+        : withGear(gear, kit, Stream.concat(leftBehind.stream(), Stream.of(thing)).toList());
+  }
+
+  /** The same site with a thing that was left behind at hand again. */
+  public Site taking(String item) {
+    return withGear(gear, kit, leftBehind.stream().filter(l -> !l.item().equals(item)).toList());
+  }
+
+  /** The site as it is judged: with the gear at hand alone. */
+  public Site atHand() {
+    return leftBehind.isEmpty()
+        ? this
+        : withGear(
+            gear.without(leftBehind.stream().map(LeftBehind::item).collect(Collectors.toSet())),
+            kit,
+            List.of());
+  }
+
   public Optional<Anchor> anchor(String id) {
     return anchors.stream().filter(a -> a.id().equals(id)).findFirst();
   }
@@ -169,6 +215,24 @@ public record Site(
                 "the name \"" + id + "\" is used twice; each thing must have its own");
           }
         });
+  }
+
+  private static void leftBehind(Gear gear, List<LeftBehind> stays) {
+    for (LeftBehind left : stays) {
+      long named = gear.items().stream().filter(i -> i.id().equals(left.item())).count();
+      if (named != 1) {
+        throw new IllegalArgumentException(
+            "left_behind names \""
+                + left.item()
+                + "\"; "
+                + (named == 0 ? "nothing" : "more than one thing")
+                + " of that name is in the gear");
+      }
+      if (stays.stream().filter(l -> l.item().equals(left.item())).count() > 1) {
+        throw new IllegalArgumentException(
+            "left_behind names \"" + left.item() + "\" more than once; once is enough");
+      }
+    }
   }
 
   private static void ends(List<Anchor> anchors, Anchor.TwoLegs two, String leg, String id) {

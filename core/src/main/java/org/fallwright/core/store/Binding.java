@@ -17,30 +17,43 @@ import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
-import org.fallwright.core.site.Site;
 
-/** From a tree of JSON to the site's records; every refusal becomes one sentence. */
-final class Binding {
+/**
+ * From a tree of JSON to a document's records; every refusal becomes one sentence.
+ *
+ * @param <T> record that holds the content
+ */
+final class Binding<T> {
   private static final Pattern QUOTED = Pattern.compile("\"([^\"]*)\"");
-  private static final Pattern DANGLING =
-      Pattern.compile("(?:gear\\.sources|anchors)\\..*( names \".*)");
+  private static final Pattern DANGLING = Pattern.compile("[a-z_]+(?:\\..*)?( names \".*)");
 
-  private Binding() {}
+  private final Document<T> document;
+  private final String file;
 
-  static Site site(JsonNode root, String file) throws SiteFileException {
-    Site site;
+  /**
+   * @param document the kind of document
+   * @param file its file's name, for messages
+   */
+  Binding(Document<T> document, String file) {
+    this.document = document;
+    this.file = file;
+  }
+
+  T bind(JsonNode root) throws SiteFileException {
+    T content;
     try {
-      site = SiteJson.MAPPER.treeToValue(root, Site.class);
+      content = SiteJson.MAPPER.treeToValue(root, document.type());
     } catch (JsonMappingException e) {
       throw new SiteFileException(file + ": " + sentence(root, e) + ".", e);
     } catch (JsonProcessingException | IllegalArgumentException e) {
-      throw new SiteFileException(file + " does not hold a site of this form.", e);
+      throw new SiteFileException(
+          file + " does not hold a " + document.noun() + " of this form.", e);
     }
-    echo(root, SiteJson.MAPPER.valueToTree(site), "", file);
-    return site;
+    echo(root, SiteJson.MAPPER.valueToTree(content), "");
+    return content;
   }
 
-  private static String sentence(JsonNode root, JsonMappingException e) {
+  private String sentence(JsonNode root, JsonMappingException e) {
     String path = path(e.getPath());
     if (e instanceof UnrecognizedPropertyException unknown) {
       return unknown(path, Said.fields(unknown.getReferringClass()));
@@ -90,11 +103,10 @@ final class Binding {
   }
 
   /** What a record's constructor said, with the path to the field that it named. */
-  private static String refused(
-      JsonNode root, JsonNode given, String path, Class<?> record, String said) {
+  private String refused(JsonNode root, JsonNode given, String path, Class<?> record, String said) {
     List<String> fields = Said.fields(record);
     String first = said.split("[ .]", 2)[0];
-    String places = record == Site.class ? String.join(" and ", named(root, said)) : "";
+    String places = record == document.type() ? String.join(" and ", named(root, said)) : "";
     if (!places.isEmpty()) {
       Matcher dangling = DANGLING.matcher(said);
       return dangling.matches() ? places + dangling.group(1) : places + ": " + said;
@@ -113,7 +125,7 @@ final class Binding {
     return (fields.size() == 1 ? Tree.child(path, fields.get(0)) : path) + ": " + said;
   }
 
-  /** Where the name that a sentence about the whole site quotes stands in the file. */
+  /** Where the name that a sentence about the whole document quotes stands in the file. */
   private static List<String> named(JsonNode root, String said) {
     Matcher name = QUOTED.matcher(said);
     List<String> places = new ArrayList<>();
@@ -140,24 +152,19 @@ final class Binding {
   /**
    * Compares what the file holds with what was understood, so that nothing is made to fit unseen.
    */
-  private static void echo(JsonNode given, JsonNode understood, String path, String file)
-      throws SiteFileException {
+  private void echo(JsonNode given, JsonNode understood, String path) throws SiteFileException {
     if (given.isNumber() && understood.isNumber()) {
       if (given.doubleValue() == understood.doubleValue()) {
         return;
       }
     } else if (given.isArray() && understood.isArray() && given.size() == understood.size()) {
       for (int i = 0; i < given.size(); i++) {
-        echo(given.get(i), understood.get(i), path + "[" + i + "]", file);
+        echo(given.get(i), understood.get(i), path + "[" + i + "]");
       }
       return;
     } else if (given.isObject() && understood.isObject() && given.size() == understood.size()) {
       for (Map.Entry<String, JsonNode> field : given.properties()) {
-        echo(
-            field.getValue(),
-            understood.path(field.getKey()),
-            Tree.child(path, field.getKey()),
-            file);
+        echo(field.getValue(), understood.path(field.getKey()), Tree.child(path, field.getKey()));
       }
       return;
     } else if (given.equals(understood)) {

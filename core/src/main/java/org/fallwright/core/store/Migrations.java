@@ -23,6 +23,12 @@ final class Migrations {
 
   private static void fromFormOne(ObjectNode site) {
     site.put("version", Site.VERSION);
+    if (!site.has("kit")) {
+      site.putNull("kit");
+    }
+    if (!site.has("left_behind")) {
+      site.putArray("left_behind");
+    }
     if (site.path("tree") instanceof ObjectNode tree && !tree.has("mass_by")) {
       tree.put("mass_by", "equation");
     }

@@ -20,9 +20,9 @@ import com.fasterxml.jackson.databind.json.JsonMapper;
 import com.fasterxml.jackson.databind.type.LogicalType;
 import java.util.Locale;
 
-/** How the site's records are spelled in JSON, and how strictly JSON is bound to them. */
+/** How the records of site and kit are spelled in JSON, and how strictly JSON is bound to them. */
 final class SiteJson {
-  /** Binds JSON to the site's records and refuses whatever the library would make fit. */
+  /** Binds JSON to those records and refuses whatever the library would make fit. */
   static final JsonMapper MAPPER = mapper();
 
   /** Two spaces, line feed on every system, fields in the order of the records. */

@@ -11,7 +11,6 @@ import com.fasterxml.jackson.databind.exc.MismatchedInputException;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.util.Map;
-import org.fallwright.core.site.Site;
 
 /**
  * From text to a tree of JSON that is whole, has one meaning, holds finite numbers only, and is of
@@ -19,13 +18,15 @@ import org.fallwright.core.site.Site;
  */
 final class Tree {
   private final String file;
+  private final Document<?> document;
 
-  private Tree(String file) {
+  private Tree(String file, Document<?> document) {
     this.file = file;
+    this.document = document;
   }
 
-  static JsonNode parse(String text, String file) throws SiteFileException {
-    Tree tree = new Tree(file);
+  static JsonNode parse(String text, String file, Document<?> document) throws SiteFileException {
+    Tree tree = new Tree(file, document);
     JsonNode root = tree.parse(text);
     tree.version(root);
     tree.sound(root, "", false);
@@ -54,17 +55,26 @@ final class Tree {
 
   private JsonNode parse(String text) throws SiteFileException {
     if (text.isBlank()) {
-      throw new SiteFileException(file + " is empty; a site file holds one JSON object.");
+      throw new SiteFileException(
+          file + " is empty; a " + document.file() + " holds one JSON object.");
     }
     try (JsonParser parser = SiteJson.MAPPER.createParser(text)) {
       try {
         JsonNode root = SiteJson.MAPPER.readTree(parser);
         if (parser.nextToken() != null) {
-          throw at(parser.currentTokenLocation(), "", "there is more after the site's last brace");
+          throw at(
+              parser.currentTokenLocation(),
+              "",
+              "there is more after the " + document.noun() + "'s last brace");
         }
         if (root == null || !root.isObject()) {
           throw new SiteFileException(
-              file + " holds " + Said.value(root) + "; a site file holds one JSON object.");
+              file
+                  + " holds "
+                  + Said.value(root)
+                  + "; a "
+                  + document.file()
+                  + " holds one JSON object.");
         }
         return root;
       } catch (MismatchedInputException e) {
@@ -75,7 +85,7 @@ final class Tree {
         throw at(
             parser.currentLocation(),
             path(parser.getParsingContext().pathAsPointer()),
-            "a number, a text or the nesting is far too long for a site file");
+            "a number, a text or the nesting is far too long for a " + document.file());
       } catch (JsonEOFException e) {
         throw at(
             e.getLocation(),
@@ -116,13 +126,13 @@ final class Tree {
               + Said.value(version)
               + "; it must be a whole number, at least 1.");
     }
-    if (!version.canConvertToInt() || version.intValue() > Site.VERSION) {
+    if (!version.canConvertToInt() || version.intValue() > document.present()) {
       throw new SiteFileException(
           file
               + " was written by a newer Fallwright (form "
               + Said.value(version)
               + "); this one reads up to form "
-              + Site.VERSION
+              + document.present()
               + ".");
     }
   }

@@ -168,6 +168,8 @@ final class TinySite {
         new Conditions(Quantity.measured(gustMps), windTowardDeg, null, null),
         new Offer(List.of(attachM), How.MEASURED, 90, List.of(), 1),
         List.of(),
+        List.of(),
+        null,
         List.of());
   }
 

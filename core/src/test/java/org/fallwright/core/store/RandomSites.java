@@ -16,6 +16,7 @@ import org.fallwright.core.site.DropZone;
 import org.fallwright.core.site.Fix;
 import org.fallwright.core.site.Gear;
 import org.fallwright.core.site.How;
+import org.fallwright.core.site.LeftBehind;
 import org.fallwright.core.site.Looked;
 import org.fallwright.core.site.Offer;
 import org.fallwright.core.site.Origin;
@@ -77,6 +78,7 @@ final class RandomSites {
     List<String> places = new ArrayList<>();
     anchors.forEach(a -> places.add(a.id()));
     spots.forEach(s -> places.add(s.id()));
+    Gear gear = gear(places);
     return new Site(
         Site.VERSION,
         text(),
@@ -93,7 +95,7 @@ final class RandomSites {
         list(0, 2, i -> new DropZone("zone " + i, polygon())),
         anchors,
         spots,
-        gear(places),
+        gear,
         new Conditions(
             quantity(0, 40),
             maybe(() -> in(0, 360)),
@@ -106,7 +108,12 @@ final class RandomSites {
             list(0, 3, i -> in(0, 360)),
             random.nextInt(2)),
         list(0, 3, i -> day("case " + i)),
-        list(0, 2, i -> revision()));
+        list(0, 2, i -> revision()),
+        maybe(this::text),
+        gear.items().stream()
+            .filter(i -> flag())
+            .map(i -> new LeftBehind(i.id(), maybe(this::text)))
+            .toList());
   }
 
   private Case day(String id) {

@@ -7,6 +7,7 @@ import java.util.stream.Collectors;
 import org.fallwright.core.site.Anchor;
 import org.fallwright.core.site.DropZone;
 import org.fallwright.core.site.Gear;
+import org.fallwright.core.site.LeftBehind;
 import org.fallwright.core.site.Looked;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Spot;
@@ -67,6 +68,9 @@ final class CheckCommand extends Subcommand {
     row("spots", site.spots().stream().map(Spot::id).toList());
     row("lines", site.gear().lines().stream().map(Gear.Line::id).toList());
     row("sources", site.gear().sources().stream().map(Gear.Source::id).toList());
+    if (!site.leftBehind().isEmpty()) {
+      row("left behind", site.leftBehind().stream().map(LeftBehind::item).toList());
+    }
     List<Looked.What> open =
         List.of(Looked.What.values()).stream()
             .filter(w -> site.found(w) == Looked.Found.NOT_LOOKED)

@@ -114,6 +114,8 @@ public final class Fallwright implements Runnable {
             .addSubcommand(new SheetCommand(home))
             .addSubcommand(new WorksheetCommand(home))
             .addSubcommand(new StandCommand(home))
+            .addSubcommand(new LoadOutCommand(home))
+            .addSubcommand(new KitCommand(home))
             .addSubcommand(new CheckCommand(home))
             .addSubcommand(new SourcesCommand(home))
             .addSubcommand(new AdviseCommand(home.plugins(), home.version()))

@@ -1,6 +1,7 @@
 package org.fallwright.ui.cli;
 
 import java.nio.file.Path;
+import java.util.List;
 import org.fallwright.ui.home.Home;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
@@ -27,6 +28,13 @@ final class PlanCommand extends Subcommand {
   @Option(names = "--all", description = "Show every ranked setup, also those not workable.")
   private boolean all;
 
+  @Option(
+      names = "--without",
+      paramLabel = "ITEM",
+      split = ",",
+      description = "Try it with these things of the gear left behind; the file stays as it is.")
+  private List<String> without = List.of();
+
   PlanCommand(Home home) {
     super(home);
   }
@@ -36,7 +44,7 @@ final class PlanCommand extends Subcommand {
     if (top < 1) {
       throw new Refused("--top is " + top + "; it must be at least 1.");
     }
-    Planned planned = Planned.of(home, file);
+    Planned planned = Planned.of(home, file, Kits.without(Planned.read(file), file, without));
     if (json != null) {
       WholeFile.write(json, planned.json());
     }

@@ -91,7 +91,16 @@ final class PageFlow {
 
   /** A row of a table: for each column its paragraphs. */
   void row(List<Column> columns, List<List<Paragraph>> cells) {
-    double height = 0;
+    row(columns, cells, 0);
+  }
+
+  /**
+   * A row with an empty box to be ticked with a pen at its left end.
+   *
+   * @param box side of the box [points]; 0: none
+   */
+  void row(List<Column> columns, List<List<Paragraph>> cells, double box) {
+    double height = box;
     for (int i = 0; i < columns.size(); i++) {
       double h = 0;
       for (Paragraph p : cells.get(i)) {
@@ -111,6 +120,9 @@ final class PageFlow {
                   List<String> lines = broken(p.text(), p.font(), columns.get(i).width());
                   y1 = set(pen, lines, p.font(), columns.get(i).x(), y1);
                 }
+              }
+              if (box > 0) {
+                pen.box(columns.get(0).x(), at + PADDING, box);
               }
               pen.rule(left, left + width, at);
             }));

@@ -1,17 +1,10 @@
 package org.fallwright.ui.sheet;
 
-import de.rototor.pdfbox.graphics2d.PdfBoxGraphics2D;
-import de.rototor.pdfbox.graphics2d.PdfBoxGraphics2DFontTextDrawer;
 import java.awt.Color;
 import java.awt.Graphics2D;
 import java.awt.image.BufferedImage;
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
-import java.io.InputStream;
-import java.util.Calendar;
-import java.util.GregorianCalendar;
-import java.util.Locale;
-import java.util.TimeZone;
 import javax.imageio.IIOImage;
 import javax.imageio.ImageIO;
 import javax.imageio.ImageTypeSpecifier;
@@ -19,11 +12,6 @@ import javax.imageio.ImageWriter;
 import javax.imageio.metadata.IIOMetadata;
 import javax.imageio.metadata.IIOMetadataNode;
 import javax.imageio.stream.ImageOutputStream;
-import org.apache.pdfbox.pdmodel.PDDocument;
-import org.apache.pdfbox.pdmodel.PDPage;
-import org.apache.pdfbox.pdmodel.PDPageContentStream;
-import org.apache.pdfbox.pdmodel.common.PDRectangle;
-import org.apache.pdfbox.pdmodel.font.PDType0Font;
 import org.fallwright.core.plan.Plan;
 import org.fallwright.core.site.Site;
 import org.fallwright.ui.map.GroundPainter;
@@ -67,29 +55,7 @@ public final class SheetFile {
 
   /** One page of PDF with its typeface embedded. */
   public byte[] pdf() throws IOException {
-    try (PDDocument doc = new PDDocument()) {
-      Calendar fixed = new GregorianCalendar(TimeZone.getTimeZone("UTC"), Locale.ROOT);
-      fixed.setTimeInMillis(0);
-      doc.setDocumentId(0L);
-      doc.getDocumentInformation().setTitle(title);
-      doc.getDocumentInformation().setProducer("Fallwright");
-      doc.getDocumentInformation().setCreationDate(fixed);
-      PDPage page = new PDPage(new PDRectangle((float) paper.width(), (float) paper.height()));
-      doc.addPage(page);
-      PdfBoxGraphics2DFontTextDrawer fonts = new PdfBoxGraphics2DFontTextDrawer();
-      register(doc, fonts, SheetFonts.PLAIN.getFontName(), SheetFonts.PLAIN_FILE);
-      register(doc, fonts, SheetFonts.BOLD.getFontName(), SheetFonts.BOLD_FILE);
-      PdfBoxGraphics2D g = new PdfBoxGraphics2D(doc, (float) paper.width(), (float) paper.height());
-      g.setFontTextDrawer(fonts);
-      painter.paint(g);
-      g.dispose();
-      try (PDPageContentStream stream = new PDPageContentStream(doc, page)) {
-        stream.drawForm(g.getXFormObject());
-      }
-      ByteArrayOutputStream out = new ByteArrayOutputStream();
-      doc.save(out);
-      return out.toByteArray();
-    }
+    return PdfPages.of(paper, title, 1, (g, i) -> painter.paint(g));
   }
 
   /** The page as a picture. */
@@ -133,14 +99,6 @@ public final class SheetFile {
       return out.toByteArray();
     } finally {
       writer.dispose();
-    }
-  }
-
-  private static void register(
-      PDDocument doc, PdfBoxGraphics2DFontTextDrawer fonts, String name, String file)
-      throws IOException {
-    try (InputStream in = SheetFonts.open(file)) {
-      fonts.registerFont(name, PDType0Font.load(doc, in, true));
     }
   }
 }

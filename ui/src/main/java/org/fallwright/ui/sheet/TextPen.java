@@ -5,6 +5,7 @@ import java.awt.Font;
 import java.awt.Graphics2D;
 import java.awt.font.FontRenderContext;
 import java.awt.geom.Line2D;
+import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -80,6 +81,15 @@ final class TextPen {
       g.setColor(Color.BLACK);
       g.setStroke(new java.awt.BasicStroke(0.6f));
       g.draw(new Line2D.Double(x1, y, x2, y));
+    }
+  }
+
+  /** An empty square with its upper left corner at (x, y). */
+  void box(double x, double y, double side) {
+    if (g != null) {
+      g.setColor(Color.BLACK);
+      g.setStroke(new java.awt.BasicStroke(1f));
+      g.draw(new Rectangle2D.Double(x, y, side, side));
     }
   }
 

@@ -1,21 +1,9 @@
 package org.fallwright.ui.sheet;
 
-import de.rototor.pdfbox.graphics2d.PdfBoxGraphics2D;
-import de.rototor.pdfbox.graphics2d.PdfBoxGraphics2DFontTextDrawer;
 import java.awt.Font;
-import java.io.ByteArrayOutputStream;
 import java.io.IOException;
-import java.io.InputStream;
-import java.util.Calendar;
-import java.util.GregorianCalendar;
 import java.util.List;
 import java.util.Locale;
-import java.util.TimeZone;
-import org.apache.pdfbox.pdmodel.PDDocument;
-import org.apache.pdfbox.pdmodel.PDPage;
-import org.apache.pdfbox.pdmodel.PDPageContentStream;
-import org.apache.pdfbox.pdmodel.common.PDRectangle;
-import org.apache.pdfbox.pdmodel.font.PDType0Font;
 import org.fallwright.core.worksheet.Compared;
 import org.fallwright.core.worksheet.Line;
 import org.fallwright.core.worksheet.Section;
@@ -59,34 +47,15 @@ public final class WorksheetPages {
 
   /** The document. */
   public byte[] pdf() throws IOException {
-    try (PDDocument doc = new PDDocument()) {
-      Calendar fixed = new GregorianCalendar(TimeZone.getTimeZone("UTC"), Locale.ROOT);
-      fixed.setTimeInMillis(0);
-      doc.setDocumentId(0L);
-      doc.getDocumentInformation().setTitle("Worksheet. " + SheetFonts.printable(sheet.title()));
-      doc.getDocumentInformation().setProducer("Fallwright");
-      doc.getDocumentInformation().setCreationDate(fixed);
-      PdfBoxGraphics2DFontTextDrawer fonts = new PdfBoxGraphics2DFontTextDrawer();
-      register(doc, fonts, SheetFonts.PLAIN, SheetFonts.PLAIN_FILE);
-      register(doc, fonts, SheetFonts.BOLD, SheetFonts.BOLD_FILE);
-      for (int i = 0; i < flow.pages(); i++) {
-        PDPage page = new PDPage(new PDRectangle((float) paper.width(), (float) paper.height()));
-        doc.addPage(page);
-        PdfBoxGraphics2D g =
-            new PdfBoxGraphics2D(doc, (float) paper.width(), (float) paper.height());
-        g.setFontTextDrawer(fonts);
-        TextPen pen = new TextPen(g);
-        flow.paint(i, pen);
-        foot(pen, i);
-        g.dispose();
-        try (PDPageContentStream stream = new PDPageContentStream(doc, page)) {
-          stream.drawForm(g.getXFormObject());
-        }
-      }
-      ByteArrayOutputStream out = new ByteArrayOutputStream();
-      doc.save(out);
-      return out.toByteArray();
-    }
+    return PdfPages.of(
+        paper,
+        "Worksheet. " + sheet.title(),
+        flow.pages(),
+        (g, i) -> {
+          TextPen pen = new TextPen(g);
+          flow.paint(i, pen);
+          foot(pen, i);
+        });
   }
 
   private void foot(TextPen pen, int page) {
@@ -222,13 +191,5 @@ public final class WorksheetPages {
 
   private static String printable(String text) {
     return SheetFonts.printable(text);
-  }
-
-  private static void register(
-      PDDocument doc, PdfBoxGraphics2DFontTextDrawer fonts, Font font, String file)
-      throws IOException {
-    try (InputStream in = SheetFonts.open(file)) {
-      fonts.registerFont(font.getFontName(), PDType0Font.load(doc, in, true));
-    }
   }
 }
