@@ -15,9 +15,10 @@ import org.fallwright.plugins.vehicle.Chassis.AxleLoad;
  * <p>W weight [N]; a rise of the line above the ground, positive towards the tree [rad]; s slope,
  * positive where the ground rises away from the tree [rad]; mu grip; f rolling resistance. Where
  * the line falls so steeply towards the tree that it presses the wheels down faster than it pulls,
- * no pull ends the grip: {@link #MOST_WEIGHTS} is counted then. Leaves out engine and gearing,
- * ground that falls to the side, and every run-up: only a steady creep with the line tight already.
- * Statics of a rigid body on two axles; the same relations are in any text on vehicle mechanics.
+ * no pull ends the grip: {@link #MOST_WEIGHTS} is counted then. Leaves out engine and gearing, a
+ * line off the heading, ground that falls to the side, and every run-up: only a steady creep with
+ * the line tight already. Statics of a rigid body on two axles; the same relations are in any text
+ * on vehicle mechanics.
  *
  * @param tensionN T [N]
  * @param frontN load on the front axle under T [N]
