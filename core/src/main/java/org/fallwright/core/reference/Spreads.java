@@ -35,12 +35,19 @@ public final class Spreads {
     What(boolean share, String unit, double measured, double estimated, double guessed) {
       this.share = share;
       double[] sd = {measured, estimated, guessed};
-      byHow = Arrays.stream(How.values()).map(how -> figure(how, sd[how.ordinal()], unit)).toList();
+      byHow =
+          Arrays.stream(How.values())
+              .filter(How::usual)
+              .map(how -> figure(how, sd[how.ordinal()], unit))
+              .toList();
     }
 
-    /** The usual standard deviation, in its unit; a share of the value where the unit is empty. */
+    /**
+     * The usual standard deviation, in its unit; a share of the value where the unit is empty. What
+     * is not known or a range counts as guessed where nothing of its own is stated.
+     */
     public Figure usual(How how) {
-      return byHow.get(how.ordinal());
+      return byHow.get(Math.min(how.ordinal(), How.GUESSED.ordinal()));
     }
 
     private Figure figure(How how, double sd, String unit) {
@@ -85,8 +92,19 @@ public final class Spreads {
     if (what == What.MASS_CENTRE) {
       throw new IllegalArgumentException("the spread of a mass centre needs the tree's height");
     }
+    if (q.how() == How.RANGE) {
+      return ofRange(q);
+    }
     double sd = q.plusMinus() != null ? q.plusMinus() : of(what, q.value(), q.how());
     return what == What.GUST ? Math.max(sd, GUST_LEAST_SD.value()) : sd;
+  }
+
+  /**
+   * What a range counts for: its ends stand where the 5th and 95th percentiles of a spread stand,
+   * so that whatever takes a low or a high takes an end.
+   */
+  public static double ofRange(Quantity q) {
+    return q.plusMinus() / Allowances.PERCENTILE_SDS.value();
   }
 
   /** The usual standard deviation of a value got in that way, in the value's unit. */
@@ -105,6 +123,9 @@ public final class Spreads {
    * @param heightM height of the tree [m]
    */
   public static double massCentreM(Quantity q, double heightM) {
+    if (q.how() == How.RANGE) {
+      return ofRange(q);
+    }
     return q.plusMinus() != null
         ? q.plusMinus()
         : What.MASS_CENTRE.usual(q.how()).value() * heightM;

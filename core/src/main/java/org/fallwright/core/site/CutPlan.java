@@ -59,7 +59,7 @@ public record CutPlan(
       throw new IllegalArgumentException("hinge_thicknesses_m is empty; it must have at least one");
     }
     hingeThicknessesM.forEach(t -> Range.check("hinge_thicknesses_m", t, 0.005, 0.5, "m"));
-    Range.present("hinge_how", hingeHow);
+    Range.present("hinge_how", hingeHow).usualOnly("hinge_how");
     Range.checkOrNull("hinge_width_m", hingeWidthM, 0.02, 6, "m");
     Range.check("kerf_m", kerfM, 0, 0.05, "m");
   }

@@ -24,7 +24,7 @@ public record Offer(
       throw new IllegalArgumentException("attach_heights_m is empty; it must have at least one");
     }
     attachHeightsM.forEach(h -> Range.check("attach_heights_m", h, 0.5, 100, "m"));
-    Range.present("attach_how", attachHow);
+    Range.present("attach_how", attachHow).usualOnly("attach_how");
     Range.check("lay_step_deg", layStepDeg, 0.25, 90, "degrees");
     laysDeg = List.copyOf(Range.present("lays_deg", laysDeg));
     laysDeg.forEach(l -> Range.check("lays_deg", l, 0, 360, "degrees"));

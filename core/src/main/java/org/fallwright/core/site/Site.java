@@ -18,6 +18,8 @@ import org.fallwright.core.units.Range;
  * @param ruleSet key of the rule set
  * @param declinationDeg magnetic declination, east positive [degrees]; null: not stated
  * @param picture base map; null: blank ground
+ * @param cases named cases of other days
+ * @param revisions the setup as set on the day, oldest first
  */
 public record Site(
     int version,
@@ -37,7 +39,9 @@ public record Site(
     List<Spot> spots,
     Gear gear,
     Conditions conditions,
-    Offer offer) {
+    Offer offer,
+    List<Case> cases,
+    List<Revision> revisions) {
   /** The version written. */
   public static final int VERSION = 2;
 
@@ -76,6 +80,9 @@ public record Site(
     Range.present("gear", gear);
     Range.present("conditions", conditions);
     Range.present("offer", offer);
+    cases = List.copyOf(Range.present("cases", cases));
+    revisions = List.copyOf(Range.present("revisions", revisions));
+    oneNameEach(cases.stream().map(Case::id));
     oneNameEach(
         Stream.of(
                 Stream.of(tree.id()),
@@ -124,48 +131,12 @@ public record Site(
 
   /** The same site, shown in other units. */
   public Site in(Display other) {
-    return new Site(
-        version,
-        name,
-        origin,
-        other,
-        ruleSet,
-        declinationDeg,
-        picture,
-        tree,
-        cut,
-        targets,
-        wires,
-        looked,
-        dropZones,
-        anchors,
-        spots,
-        gear,
-        conditions,
-        offer);
+    return Copy.with(this, "display", other);
   }
 
   /** The same site with other wires. */
   public Site withWires(List<Wire> others) {
-    return new Site(
-        version,
-        name,
-        origin,
-        display,
-        ruleSet,
-        declinationDeg,
-        picture,
-        tree,
-        cut,
-        targets,
-        others,
-        looked,
-        dropZones,
-        anchors,
-        spots,
-        gear,
-        conditions,
-        offer);
+    return Copy.with(this, "wires", others);
   }
 
   public Optional<Anchor> anchor(String id) {

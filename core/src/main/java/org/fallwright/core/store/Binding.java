@@ -101,7 +101,7 @@ final class Binding {
     }
     if (fields.contains(first)) {
       Class<?> type = record.getRecordComponents()[fields.indexOf(first)].getType();
-      if (given.path(first).isTextual() && !type.isAssignableFrom(String.class)) {
+      if (given.path(first).isTextual() && !type.isAssignableFrom(String.class) && !type.isEnum()) {
         return Tree.child(path, first)
             + " is "
             + Said.value(given.path(first))

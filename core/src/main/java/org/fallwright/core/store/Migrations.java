@@ -22,5 +22,10 @@ final class Migrations {
 
   private static void fromFormOne(ObjectNode site) {
     site.put("version", Site.VERSION);
+    for (String list : new String[] {"cases", "revisions"}) {
+      if (!site.has(list)) {
+        site.putArray(list);
+      }
+    }
   }
 }

@@ -45,7 +45,7 @@ final class Said {
     if (type == int.class || type == Integer.class) {
       return "a whole number, without quotes";
     }
-    if (type == boolean.class) {
+    if (type == boolean.class || type == Boolean.class) {
       return "true or false";
     }
     if (type == String.class) {

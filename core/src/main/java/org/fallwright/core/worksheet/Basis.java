@@ -8,6 +8,8 @@ public enum Basis {
   MEASURED("entered, measured"),
   ESTIMATED("entered, estimated"),
   GUESSED("entered, guessed"),
+  RANGE("entered, the middle of a range"),
+  UNKNOWN("not known, stands in"),
   ENTERED("entered"),
   CHOSEN("chosen in this setup"),
   SOURCE("stated by the pull source"),
@@ -38,6 +40,8 @@ public enum Basis {
       case MEASURED -> MEASURED;
       case ESTIMATED -> ESTIMATED;
       case GUESSED -> GUESSED;
+      case RANGE -> RANGE;
+      case UNKNOWN -> UNKNOWN;
     };
   }
 

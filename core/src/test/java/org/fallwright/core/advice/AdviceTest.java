@@ -15,6 +15,7 @@ import org.fallwright.core.plan.Plan;
 import org.fallwright.core.plan.Planner;
 import org.fallwright.core.plan.Setup;
 import org.fallwright.core.plan.Verdict;
+import org.fallwright.core.site.Copy;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.junit.jupiter.api.Test;
@@ -74,25 +75,8 @@ class AdviceTest {
             0,
             null,
             null);
-    return new Site(
-        s.version(),
-        s.name(),
-        s.origin(),
-        s.display(),
-        s.ruleSet(),
-        null,
-        null,
-        s.tree(),
-        s.cut(),
-        s.targets(),
-        s.wires(),
-        s.looked(),
-        s.dropZones(),
-        s.anchors(),
-        List.of(moved),
-        s.gear(),
-        s.conditions(),
-        s.offer());
+    Site bare = Copy.with(Copy.with(s, "declinationDeg", null), "picture", null);
+    return Copy.with(bare, "spots", List.of(moved));
   }
 
   @Test

@@ -9,6 +9,7 @@ import java.util.function.IntFunction;
 import java.util.function.Supplier;
 import java.util.stream.IntStream;
 import org.fallwright.core.site.Anchor;
+import org.fallwright.core.site.Case;
 import org.fallwright.core.site.Conditions;
 import org.fallwright.core.site.CutPlan;
 import org.fallwright.core.site.DropZone;
@@ -22,6 +23,7 @@ import org.fallwright.core.site.Picture;
 import org.fallwright.core.site.Place;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Quantity;
+import org.fallwright.core.site.Revision;
 import org.fallwright.core.site.Shape;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Spot;
@@ -29,11 +31,14 @@ import org.fallwright.core.site.StemDiameter;
 import org.fallwright.core.site.SubjectTree;
 import org.fallwright.core.site.Target;
 import org.fallwright.core.site.WeighedSection;
+import org.fallwright.core.site.Wetness;
 import org.fallwright.core.site.Wire;
 
 /** Valid sites from a seed: every kind of thing, stated and not stated, over its whole range. */
 final class RandomSites {
   private static final String[] SIGNS = {"a", "Z", "ü", "–", "\"", "\\", "/", "\n", "木", "🌳", " "};
+  private static final How[] USUAL = {How.MEASURED, How.ESTIMATED, How.GUESSED};
+  private static final How[] OF_ONE_VALUE = {How.MEASURED, How.ESTIMATED, How.GUESSED, How.UNKNOWN};
   private final Random random;
 
   RandomSites(long seed) {
@@ -95,10 +100,48 @@ final class RandomSites {
             maybe(() -> in(0.5, 1.6))),
         new Offer(
             list(1, 3, i -> in(0.5, 100)),
-            any(How.values()),
+            any(USUAL),
             in(0.25, 90),
             list(0, 3, i -> in(0, 360)),
-            random.nextInt(2)));
+            random.nextInt(2)),
+        list(0, 3, i -> day("case " + i)),
+        list(0, 2, i -> revision()));
+  }
+
+  private Case day(String id) {
+    return new Case(
+        id,
+        maybe(() -> any(Wetness.values())),
+        maybe(() -> any(Wetness.values())),
+        maybe(this::flag),
+        maybe(this::flag),
+        maybe(() -> quantity(0, 40)),
+        maybe(() -> in(0, 360)),
+        maybe(() -> "1" + random.nextInt(10) + ":05"));
+  }
+
+  private Revision revision() {
+    Revision.AsSet set =
+        new Revision.AsSet(
+            in(0, 360),
+            in(0.5, 100),
+            in(0.005, 0.5),
+            text(),
+            list(0, 2, i -> text()),
+            text(),
+            text(),
+            text(),
+            maybe(() -> new Revision.Driver(text(), text(), text())));
+    return new Revision(
+        text(),
+        text(),
+        text(),
+        set,
+        maybe(() -> any(Wetness.values())),
+        maybe(() -> quantity(0, 40)),
+        list(0, 3, i -> text()),
+        text(),
+        maybe(this::text));
   }
 
   private SubjectTree tree(double height) {
@@ -137,7 +180,7 @@ final class RandomSites {
         in(0.05, 0.6),
         in(10, 120),
         list(1, 3, i -> in(0.005, 0.5)),
-        any(How.values()),
+        any(USUAL),
         maybe(() -> in(0.02, 6)),
         in(0, 0.05),
         flag());
@@ -350,7 +393,9 @@ final class RandomSites {
   }
 
   private Quantity quantity(double least, double most) {
-    return new Quantity(in(least, most), any(How.values()), maybe(() -> in(0, 1e9)));
+    return flag() && flag()
+        ? Quantity.range(in(least, (least + most) / 2), in((least + most) / 2, most))
+        : new Quantity(in(least, most), any(OF_ONE_VALUE), maybe(() -> in(0, 1e9)));
   }
 
   /** From a range, its ends and short figures included. */

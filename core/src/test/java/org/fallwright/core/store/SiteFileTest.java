@@ -18,6 +18,7 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.Map;
 import org.fallwright.core.site.Anchor;
+import org.fallwright.core.site.Copy;
 import org.fallwright.core.site.How;
 import org.fallwright.core.site.Looked;
 import org.fallwright.core.site.Site;
@@ -30,7 +31,11 @@ class SiteFileTest {
   @Test
   void theFrozenSampleOfFormOneReadsAsThePresentForm() throws IOException {
     assertThat(SiteFile.read(Samples.utf8(Samples.formOne()), "one"))
-        .isEqualTo(SiteFile.read(Samples.utf8(Samples.present()), "two"));
+        .isEqualTo(withoutWhatFormOneLacks(SiteFile.read(Samples.utf8(Samples.present()), "two")));
+  }
+
+  private static Site withoutWhatFormOneLacks(Site site) {
+    return Copy.with(Copy.with(site, "cases", List.of()), "revisions", List.of());
   }
 
   @Test

@@ -27,6 +27,8 @@ final class Entered {
     add(lines, "Not looked for: ", notLooked(site));
     add(lines, "Estimated: ", entries(site, How.ESTIMATED));
     add(lines, "Guessed: ", entries(site, How.GUESSED));
+    add(lines, "Known as a range: ", entries(site, How.RANGE));
+    add(lines, "Not known: ", entries(site, How.UNKNOWN));
     add(lines, "Placed from the picture: ", placed(site, Fix.PICTURE));
     add(lines, "Placed by phone: ", placed(site, Fix.PHONE));
     add(lines, "Defaults: ", defaults(site));
