@@ -37,17 +37,17 @@ import org.fallwright.core.site.Wetness;
 import org.fallwright.core.site.Wire;
 
 /** Valid sites from a seed: every kind of thing, stated and not stated, over its whole range. */
-final class RandomSites {
+public final class RandomSites {
   private static final String[] SIGNS = {"a", "Z", "ü", "–", "\"", "\\", "/", "\n", "木", "🌳", " "};
   private static final How[] USUAL = {How.MEASURED, How.ESTIMATED, How.GUESSED};
   private static final How[] OF_ONE_VALUE = {How.MEASURED, How.ESTIMATED, How.GUESSED, How.UNKNOWN};
   private final Random random;
 
-  RandomSites(long seed) {
+  public RandomSites(long seed) {
     random = new Random(seed);
   }
 
-  Site site() {
+  public Site site() {
     double height = in(2, 120);
     List<Anchor> anchors = new ArrayList<>(list(0, 5, i -> anchor("anchor " + i)));
     if (anchors.size() > 1) {
