@@ -105,6 +105,10 @@ final class Altered {
         s.spots(),
         s.gear(),
         day,
-        s.offer());
+        s.offer(),
+        s.tapeTies(),
+        s.peoplePoints(),
+        s.exceptions(),
+        s.zones());
   }
 }

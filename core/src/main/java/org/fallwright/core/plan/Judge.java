@@ -22,6 +22,7 @@ import org.fallwright.core.statics.SourceAtTree;
 import org.fallwright.core.statics.Statics;
 import org.fallwright.core.statics.TreeSide;
 import org.fallwright.core.units.DisplayUnits;
+import org.fallwright.core.zones.OperatorStand;
 
 /**
  * Judges one setup by every check there is; none is left out because another fails. Safe for use by
@@ -44,6 +45,7 @@ public final class Judge {
   private final Subject subject;
   private final SiteTables tables = new SiteTables();
   private final Knowledge knowledge;
+  private final Exceptions exceptions;
   private final Landing landing;
   private final LineRun lineRun;
   private final Map<Setup, Route> routes = new ConcurrentHashMap<>();
@@ -73,13 +75,18 @@ public final class Judge {
     in = DisplayUnits.valueOf(site.display().name());
     subject = new Subject(site);
     knowledge = new Knowledge(site, rules);
+    exceptions = new Exceptions(site, rules);
     landing = new Landing(site, rules, in, subject, knowledge);
     lineRun = new LineRun(site, in, knowledge);
   }
 
   /** Notes that hold for every setup of the site, a sentence each. */
   List<String> notes() {
-    return subject.notes();
+    List<String> notes = new ArrayList<>(subject.notes());
+    notes.addAll(exceptions.notes());
+    notes.addAll(landing.siteNotes());
+    notes.addAll(RuleNotes.of(site, rules, in));
+    return notes;
   }
 
   /** The setup with all its checks, its zones and notes. */
@@ -146,7 +153,7 @@ public final class Judge {
     GearParts parts = new GearParts(site, rules, tables).collect(setup, route, offer);
     String name = name(setup, source);
 
-    Grade grade = new Grade(full);
+    Grade grade = new Grade(full, exceptions);
     knowledge.check(grade);
     usable(grade, parts);
     Landing.Zones zones = landing.check(grade, setup, route, tree, full);
@@ -177,9 +184,13 @@ public final class Judge {
       grade.rule(
           f.id(), f.value(), f.limit(), f.unit(), f.ratio(), place(setup).at(), () -> f.why());
     }
-    new People(site, rules, in, grade).check(setup, zones, offer);
+    People people = new People(site, rules, in, grade);
+    OperatorStand stand = people.stand(setup, route, offer);
+    people.check(setup, stand, zones, offer, tree);
     notes.addAll(offer.notes());
+    Ground ground = full ? landing.ground(setup, zones, stand) : null;
     if (full) {
+      notes.addAll(landing.crewNotes(ground));
       notes.addAll(LandNotes.of(site, setup));
     }
     Check weakest = grade.weakest();
@@ -196,7 +207,7 @@ public final class Judge {
         loads,
         route.line(),
         route.haulOnSite(),
-        zones.ground(),
+        ground,
         notes);
   }
 

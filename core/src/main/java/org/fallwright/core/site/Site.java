@@ -18,6 +18,10 @@ import org.fallwright.core.units.Range;
  * @param ruleSet key of the rule set
  * @param declinationDeg magnetic declination, east positive [degrees]; null: not stated
  * @param picture base map; null: blank ground
+ * @param tapeTies distances taped between two things
+ * @param peoplePoints doors and places of persons
+ * @param exceptions checks that somebody takes an exception to
+ * @param zones what is stated of the zones
  */
 public record Site(
     int version,
@@ -37,7 +41,11 @@ public record Site(
     List<Spot> spots,
     Gear gear,
     Conditions conditions,
-    Offer offer) {
+    Offer offer,
+    List<TapeTie> tapeTies,
+    List<PeoplePoint> peoplePoints,
+    List<TakenException> exceptions,
+    ZoneChoices zones) {
   /** The version written. */
   public static final int VERSION = 2;
 
@@ -76,6 +84,10 @@ public record Site(
     Range.present("gear", gear);
     Range.present("conditions", conditions);
     Range.present("offer", offer);
+    tapeTies = List.copyOf(Range.present("tape_ties", tapeTies));
+    peoplePoints = List.copyOf(Range.present("people_points", peoplePoints));
+    exceptions = List.copyOf(Range.present("exceptions", exceptions));
+    Range.present("zones", zones);
     oneNameEach(
         Stream.of(
                 Stream.of(tree.id()),
@@ -83,7 +95,8 @@ public record Site(
                 wires.stream().map(Wire::id),
                 dropZones.stream().map(DropZone::id),
                 anchors.stream().map(Anchor::id),
-                spots.stream().map(Spot::id))
+                spots.stream().map(Spot::id),
+                peoplePoints.stream().map(PeoplePoint::id))
             .flatMap(s -> s));
     oneNameEach(gear.sources().stream().map(Gear.Source::id));
     oneNameEach(gear.lines().stream().map(Gear.Line::id));
@@ -120,6 +133,20 @@ public record Site(
     if (looked.stream().map(Looked::what).distinct().count() != looked.size()) {
       throw new IllegalArgumentException("looked has two entries of one kind; it may have one");
     }
+    for (PeoplePoint p : peoplePoints) {
+      if (p.of() != null && targets.stream().noneMatch(t -> t.id().equals(p.of()))) {
+        throw new IllegalArgumentException(
+            "people_points."
+                + p.id()
+                + ".of names \""
+                + p.of()
+                + "\"; no target of that name is on the site");
+      }
+    }
+    for (TapeTie t : tapeTies) {
+      tied(tree, targets, anchors, spots, "from", t.from(), t.fromAt());
+      tied(tree, targets, anchors, spots, "to", t.to(), t.toAt());
+    }
   }
 
   /** The same site, shown in other units. */
@@ -142,7 +169,11 @@ public record Site(
         spots,
         gear,
         conditions,
-        offer);
+        offer,
+        tapeTies,
+        peoplePoints,
+        exceptions,
+        zones);
   }
 
   /** The same site with other wires. */
@@ -165,7 +196,11 @@ public record Site(
         spots,
         gear,
         conditions,
-        offer);
+        offer,
+        tapeTies,
+        peoplePoints,
+        exceptions,
+        zones);
   }
 
   public Optional<Anchor> anchor(String id) {
@@ -187,6 +222,29 @@ public record Site(
         .map(Looked::found)
         .findFirst()
         .orElse(Looked.Found.NOT_LOOKED);
+  }
+
+  private static void tied(
+      SubjectTree tree,
+      List<Target> targets,
+      List<Anchor> anchors,
+      List<Spot> spots,
+      String end,
+      String id,
+      Position at) {
+    Optional<Target> target = targets.stream().filter(t -> t.id().equals(id)).findFirst();
+    if (target.isPresent()) {
+      if (at == null && !(target.get().shape() instanceof Shape.Circle)) {
+        throw new IllegalArgumentException(
+            "tape_ties."
+                + end
+                + "_at is null; it must be stated for \""
+                + id
+                + "\", which has no point of its own");
+      }
+    } else if (!tree.id().equals(id)) {
+      known(anchors, spots, "tape_ties." + end, id);
+    }
   }
 
   private static void oneNameEach(Stream<String> ids) {

@@ -22,5 +22,13 @@ final class Migrations {
 
   private static void fromFormOne(ObjectNode site) {
     site.put("version", Site.VERSION);
+    for (String list : new String[] {"tape_ties", "people_points", "exceptions"}) {
+      if (!site.has(list)) {
+        site.putArray(list);
+      }
+    }
+    if (!site.has("zones")) {
+      site.putObject("zones").putNull("slide_m").putNull("people_radius").putNull("energy");
+    }
   }
 }

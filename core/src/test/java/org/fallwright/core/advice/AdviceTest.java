@@ -92,7 +92,11 @@ class AdviceTest {
         List.of(moved),
         s.gear(),
         s.conditions(),
-        s.offer());
+        s.offer(),
+        s.tapeTies(),
+        s.peoplePoints(),
+        s.exceptions(),
+        s.zones());
   }
 
   @Test

@@ -21,6 +21,7 @@ import org.fallwright.core.site.Quantity;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Spot;
 import org.fallwright.core.site.SubjectTree;
+import org.fallwright.core.site.ZoneChoices;
 
 /**
  * A level site with one back-leaner at its origin that leans south, a source on a spot 40 m north,
@@ -131,7 +132,11 @@ final class TinySite {
                 new Gear.Source(
                     "steady", "steady", List.of("spot", "point"), List.of(), List.of(), pull))),
         new Conditions(Quantity.measured(gustMps), windTowardDeg, null, null),
-        new Offer(List.of(attachM), How.MEASURED, 90, List.of(), 1));
+        new Offer(List.of(attachM), How.MEASURED, 90, List.of(), 1),
+        List.of(),
+        List.of(),
+        List.of(),
+        new ZoneChoices(null, null, new ZoneChoices.AcceptedEnergy(1e6, "the climber", "today")));
   }
 
   private static Place place(Position at) {

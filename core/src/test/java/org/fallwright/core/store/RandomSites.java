@@ -18,6 +18,7 @@ import org.fallwright.core.site.How;
 import org.fallwright.core.site.Looked;
 import org.fallwright.core.site.Offer;
 import org.fallwright.core.site.Origin;
+import org.fallwright.core.site.PeoplePoint;
 import org.fallwright.core.site.Picture;
 import org.fallwright.core.site.Place;
 import org.fallwright.core.site.Position;
@@ -27,9 +28,12 @@ import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Spot;
 import org.fallwright.core.site.StemDiameter;
 import org.fallwright.core.site.SubjectTree;
+import org.fallwright.core.site.TakenException;
+import org.fallwright.core.site.TapeTie;
 import org.fallwright.core.site.Target;
 import org.fallwright.core.site.WeighedSection;
 import org.fallwright.core.site.Wire;
+import org.fallwright.core.site.ZoneChoices;
 
 /** Valid sites from a seed: every kind of thing, stated and not stated, over its whole range. */
 final class RandomSites {
@@ -98,7 +102,38 @@ final class RandomSites {
             any(How.values()),
             in(0.25, 90),
             list(0, 3, i -> in(0, 360)),
-            random.nextInt(2)));
+            random.nextInt(2)),
+        ties(places),
+        list(
+            0,
+            3,
+            i ->
+                new PeoplePoint(
+                    "door " + i,
+                    any(PeoplePoint.Kind.values()),
+                    position(),
+                    any(Fix.values()),
+                    maybe(() -> in(0, 100)),
+                    null)),
+        list(0, 2, i -> new TakenException(text(), text(), text(), text())),
+        new ZoneChoices(
+            maybe(() -> in(0, 200)),
+            maybe(() -> in(1, 10)),
+            maybe(() -> new ZoneChoices.AcceptedEnergy(in(1, 1e6), text(), text()))));
+  }
+
+  private List<TapeTie> ties(List<String> places) {
+    return list(
+        0,
+        3,
+        i ->
+            new TapeTie(
+                "tree",
+                maybe(this::position),
+                one(places),
+                maybe(this::position),
+                in(0.1, 500),
+                maybe(() -> in(0, 10))));
   }
 
   private SubjectTree tree(double height) {
