@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.function.Supplier;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.site.Position;
+import org.fallwright.core.site.TakenException;
 
 /**
  * Gathers the checks of one setup and gives each its verdict.
@@ -20,14 +21,17 @@ final class Grade {
   static final double WORKABLE = Allowances.WORKABLE_RATIO.value();
 
   private final boolean full;
+  private final Exceptions exceptions;
   private final List<Check> checks = new ArrayList<>();
   private final List<Double> standings = new ArrayList<>();
 
   /**
    * @param full whether each check says why; a quick look leaves that empty
+   * @param exceptions what somebody takes an exception to
    */
-  Grade(boolean full) {
+  Grade(boolean full, Exceptions exceptions) {
     this.full = full;
+    this.exceptions = exceptions;
   }
 
   private String said(Supplier<String> why) {
@@ -112,8 +116,29 @@ final class Grade {
   }
 
   private void put(Check check, double standing) {
-    checks.add(check);
-    standings.add(standing);
+    TakenException taken = excepted(check);
+    if (taken == null) {
+      checks.add(check);
+      standings.add(standing);
+      return;
+    }
+    checks.add(
+        new Check(
+            check.id(),
+            check.value(),
+            check.limit(),
+            check.unit(),
+            check.ratio(),
+            Verdict.TIGHT,
+            check.place(),
+            full ? check.why() + " " + Exceptions.said(taken) : ""));
+    standings.add(check.verdict() == Verdict.TIGHT ? standing : 1 / WORKABLE);
+  }
+
+  private TakenException excepted(Check check) {
+    return check.verdict() == Verdict.TIGHT || check.verdict() == Verdict.NOT_WORKABLE
+        ? exceptions.to(check).orElse(null)
+        : null;
   }
 
   List<Check> checks() {

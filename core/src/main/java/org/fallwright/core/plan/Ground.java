@@ -2,6 +2,7 @@ package org.fallwright.core.plan;
 
 import java.util.List;
 import org.fallwright.core.site.Position;
+import org.fallwright.core.zones.LayTargets;
 import org.locationtech.jts.geom.Geometry;
 
 /**
@@ -16,6 +17,12 @@ import org.locationtech.jts.geom.Geometry;
  * @param escapes ends of the ways out, best first
  * @param halfAngleDeg aim half-angle [degrees]
  * @param wireReachM radius about the stump within which any wire stops the work [m]
+ * @param slide where the felled tree may slide on, beyond where it comes to lie; null: it does not
+ * @param bridles insides of the angles of two-legged anchors, with their margin
+ * @param atStake what stands in the sit-back zone
+ * @param hangUps trees on the site that the falling crown can hang up in
+ * @param places where the crew stands, in the order of their numbers
+ * @param clearFirst what is to be seen to before the work, nearest first
  */
 public record Ground(
     Geometry footprint,
@@ -26,4 +33,20 @@ public record Ground(
     Geometry recoil,
     List<Position> escapes,
     double halfAngleDeg,
-    double wireReachM) {}
+    double wireReachM,
+    Geometry slide,
+    List<Geometry> bridles,
+    List<LayTargets.Overlap> atStake,
+    List<String> hangUps,
+    List<StandingPlace> places,
+    List<ClearFirst> clearFirst) {
+  public Ground {
+    bights = List.copyOf(bights);
+    escapes = List.copyOf(escapes);
+    bridles = List.copyOf(bridles);
+    atStake = List.copyOf(atStake);
+    hangUps = List.copyOf(hangUps);
+    places = List.copyOf(places);
+    clearFirst = List.copyOf(clearFirst);
+  }
+}

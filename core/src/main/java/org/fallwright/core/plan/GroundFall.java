@@ -58,6 +58,11 @@ record GroundFall(double eastward, double northward) {
     return new GroundFall((ez * (nn + hair) - nz * en) / det, (nz * (ee + hair) - ez * en) / det);
   }
 
+  /** Steepest fall of the ground, whichever way [degrees]. */
+  double steepestDeg() {
+    return Math.toDegrees(Math.atan(Math.hypot(eastward, northward)));
+  }
+
   /** Fall of the ground along an azimuth [degrees], positive downhill. */
   double alongDeg(double azimuthDeg) {
     double a = Math.toRadians(azimuthDeg);

@@ -27,6 +27,7 @@ import org.fallwright.core.statics.SourceAtTree;
 import org.fallwright.core.statics.Statics;
 import org.fallwright.core.statics.TreeSide;
 import org.fallwright.core.units.DisplayUnits;
+import org.fallwright.core.zones.OperatorStand;
 
 /**
  * Judges one setup by every check there is; none is left out because another fails. Safe for use by
@@ -51,6 +52,7 @@ public final class Judge {
   private final Subject subject;
   private final SiteTables tables = new SiteTables();
   private final Knowledge knowledge;
+  private final Exceptions exceptions;
   private final Landing landing;
 
   /** The site with the tree as tall and as far over as its ranges allow, for the zones. */
@@ -86,6 +88,7 @@ public final class Judge {
     subject = new Subject(site);
     knowledge = new Knowledge(site, rules);
     reaching = reaching(site);
+    exceptions = new Exceptions(site, rules);
     landing = new Landing(reaching, rules, in, subject, knowledge);
     spares = new Spares(entered, in);
     lineRun = new LineRun(site, in, knowledge);
@@ -104,6 +107,9 @@ public final class Judge {
   List<String> notes() {
     List<String> notes = new ArrayList<>(subject.notes());
     spares.note().ifPresent(notes::add);
+    notes.addAll(exceptions.notes());
+    notes.addAll(landing.siteNotes());
+    notes.addAll(RuleNotes.of(site, rules, in));
     return notes;
   }
 
@@ -213,7 +219,7 @@ public final class Judge {
     GearParts parts = new GearParts(site, rules, tables).collect(setup, route, offer);
     String name = name(setup, source);
 
-    Grade grade = new Grade(full);
+    Grade grade = new Grade(full, exceptions);
     knowledge.check(grade);
     usable(grade, parts);
     Landing.Zones zones = landing.check(grade, setup, route, tree, full);
@@ -246,9 +252,13 @@ public final class Judge {
       grade.rule(
           f.id(), f.value(), f.limit(), f.unit(), f.ratio(), place(setup).at(), () -> f.why());
     }
-    new People(reaching, rules, in, grade).check(setup, route, zones, offer);
+    People people = new People(reaching, rules, in, grade);
+    OperatorStand stand = people.stand(setup, route, offer);
+    people.check(setup, route, stand, zones, offer, tree);
     notes.addAll(offer.notes());
+    Ground ground = full ? landing.ground(setup, zones, stand) : null;
     if (full) {
+      notes.addAll(landing.crewNotes(ground));
       notes.addAll(LandNotes.of(site, setup));
     }
     Check weakest = grade.weakest();
@@ -265,7 +275,7 @@ public final class Judge {
         loads,
         route.line(),
         route.haulOnSite(),
-        zones.ground(),
+        ground,
         notes);
   }
 

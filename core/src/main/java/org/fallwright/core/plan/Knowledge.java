@@ -34,6 +34,16 @@ final class Knowledge {
     return rules.approachDistanceM(w.voltageKv());
   }
 
+  /**
+   * Whether a line's owner has said, by name, that it is dead and earthed. It still counts as live
+   * for every distance; only the full circle about the tree no longer forbids the work.
+   */
+  static boolean saidDead(Wire w) {
+    return w.state() == Wire.State.DEAD_AND_EARTHED
+        && w.voltageSaidBy() != null
+        && !w.voltageSaidBy().isBlank();
+  }
+
   void check(Grade grade) {
     for (Entry e : Entry.of(site)) {
       if (e.quantity().how() == How.UNKNOWN) {

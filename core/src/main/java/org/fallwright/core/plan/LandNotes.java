@@ -35,8 +35,7 @@ final class LandNotes {
         Stream.of(
             "Both legs of "
                 + a.id()
-                + " are under load: nobody inside their angle or past their ends; no zone is drawn"
-                + " for them."),
+                + " are under load: nobody inside their angle or past their ends."),
         Stream.of(two.first(), two.second())
             .flatMap(id -> ask(id, site.anchor(id).orElseThrow().land())));
   }

@@ -11,6 +11,7 @@ import org.fallwright.core.site.Shape;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.SubjectTree;
 import org.fallwright.core.site.Target;
+import org.fallwright.core.site.Wire;
 import org.fallwright.core.statics.TreeSide;
 import org.fallwright.core.units.DisplayUnits;
 import org.fallwright.core.zones.Bight;
@@ -19,11 +20,18 @@ import org.fallwright.core.zones.EscapeRoutes;
 import org.fallwright.core.zones.FallFootprint;
 import org.fallwright.core.zones.FallOutline;
 import org.fallwright.core.zones.LayTargets;
+import org.fallwright.core.zones.Leg;
+import org.fallwright.core.zones.LookOut;
+import org.fallwright.core.zones.OperatorStand;
 import org.fallwright.core.zones.Recoil;
 import org.fallwright.core.zones.SitBackZone;
+import org.fallwright.core.zones.TapeTies;
 import org.fallwright.core.zones.TargetClearance;
 import org.fallwright.core.zones.WireCheck;
 import org.locationtech.jts.geom.Coordinate;
+import org.locationtech.jts.geom.Geometry;
+import org.locationtech.jts.operation.overlayng.OverlayNG;
+import org.locationtech.jts.operation.overlayng.OverlayNGRobust;
 
 /** Where the tree lands: targets, drop zone, wires, the zones about it and the ways out. */
 final class Landing {
@@ -31,8 +39,15 @@ final class Landing {
   private final RuleSet rules;
   private final DisplayUnits in;
   private final Knowledge knowledge;
+  private final Subject subject;
   private final FallOutline outline;
+  private final TapeTies ties;
   private final LayTargets targets;
+  private final List<Target> near;
+  private final LayTargets hangUps;
+  private final LookOut lookOut;
+  private final double peopleM;
+  private final List<ClearFirst> clearFirst;
   private final DropZoneFit dropZone;
   private final WireCheck wires;
   private final List<WireCheck.Reach> reach;
@@ -40,63 +55,107 @@ final class Landing {
   private final GroundFall ground;
   private final Map<Fall, Landed> falls = new ConcurrentHashMap<>();
   private final Map<Out, List<Position>> waysOut = new ConcurrentHashMap<>();
-  private final Map<List<Position>, Angles> angles = new ConcurrentHashMap<>();
+  private final Map<Along, Angles> angles = new ConcurrentHashMap<>();
 
   /** All that a footprint depends on. */
   private record Fall(double layDeg, double steeringShare) {}
 
   /** A footprint and how the things on the site stand to it. */
-  private record Landed(
+  record Landed(
       FallFootprint footprint,
       List<TargetClearance> clearances,
+      List<TargetClearance> hangUps,
       DropZoneFit.Fit fit,
       List<WireCheck.InLay> wires) {}
 
   /** All that the ways out depend on; the sit-back zone follows from the lay. */
-  private record Out(double layDeg, double steeringShare, List<Position> path) {}
+  private record Out(double layDeg, double steeringShare, Along along) {}
 
-  /** The insides of a line's angles, and where its parted ends fly. */
-  record Angles(List<Bight> bights, Recoil recoil) {}
+  /** The path of the line and the two-legged anchors on it. */
+  private record Along(List<Position> path, List<BridleLegs> bridles) {}
+
+  /** The inside of the angle of a two-legged anchor. */
+  record Bridle(String id, Bight inside) {}
+
+  /** The insides of a line's angles and of its anchors', and where parted ends fly. */
+  record Angles(List<Bight> bights, List<Bridle> bridles, Recoil recoil) {
+    List<Bight> all() {
+      if (bridles.isEmpty()) {
+        return bights;
+      }
+      List<Bight> all = new ArrayList<>(bights);
+      bridles.forEach(b -> all.add(b.inside()));
+      return all;
+    }
+  }
 
   /**
    * The zones of a setup.
    *
-   * @param footprint the footprint
-   * @param ground for painting; null in a quick look
+   * @param landed the footprint, and how the things on the site stand to it
    * @param clearanceM least clearance to a target that must not be hit, the one that is nearest to
    *     what it asks [m]; NaN: none
    * @param clearanceTarget that target, or null
    * @param angles insides of the line's angles, and where parted ends fly
+   * @param about the same with the sit-back zone and the legs, as a person meets them
+   * @param waysOut ends of the ways out, best first
    * @param notes sentences
    */
   record Zones(
-      FallFootprint footprint,
-      Ground ground,
+      Landed landed,
       double clearanceM,
       String clearanceTarget,
       Angles angles,
-      List<String> notes) {}
+      EscapeRoutes.Zones about,
+      List<Position> waysOut,
+      List<String> notes) {
+    FallFootprint footprint() {
+      return landed.footprint();
+    }
+  }
 
   Landing(Site site, RuleSet rules, DisplayUnits in, Subject subject, Knowledge knowledge) {
     this.site = site;
     this.rules = rules;
     this.in = in;
     this.knowledge = knowledge;
+    this.subject = subject;
     SubjectTree t = site.tree();
-    outline =
-        new FallOutline(
-            t.heightM().value(),
-            t.crownBaseM(),
-            t.crownRadiusM(),
-            subject.figures().stumpDiameterM(),
-            t.leanDeg().value(),
-            t.leanAzimuthDeg().value());
-    targets = new LayTargets(site.targets(), t.stump());
+    outline = outline(site, subject.figures().stumpDiameterM());
+    ties = new TapeTies(site.tapeTies(), t.id(), t.stump(), site.targets());
+    targets = new LayTargets(site.targets(), ties::errorM);
     dropZone = site.dropZones().isEmpty() ? null : new DropZoneFit(site.dropZones());
     wires = new WireCheck(site.wires(), t.stump(), site.cut().heightM(), outline);
     reach = knowledge.ofWires() ? wires.reach(knowledge.approach()) : List.of();
     escapes = new EscapeRoutes(site.targets());
     ground = GroundFall.of(site);
+    near = HangUps.near(site, outline.farthestM() + slideM(Double.POSITIVE_INFINITY));
+    hangUps = new LayTargets(near, t.stump());
+    lookOut = new LookOut(site.targets());
+    peopleM = PeopleRing.factor(site, rules) * t.heightM().value();
+    clearFirst = ClearFirst.within(site, peopleM);
+  }
+
+  private static FallOutline outline(Site site, double stumpDiameterM) {
+    SubjectTree t = site.tree();
+    FallOutline round =
+        new FallOutline(
+            t.heightM().value(),
+            t.crownBaseM(),
+            t.crownRadiusM(),
+            stumpDiameterM,
+            t.leanDeg().value(),
+            t.leanAzimuthDeg().value());
+    if (t.crownOutline() != null) {
+      return round.drawn(t.crownOutline().geometry(), t.stump().at(), site.cut().heightM());
+    }
+    return t.crownOffsetM() == null ? round : round.offset(t.crownOffsetM());
+  }
+
+  /** How far the tree may slide on where the ground falls so [m]. */
+  private double slideM(double fallDeg) {
+    double fall = Math.min(fallDeg, 90);
+    return FallFootprint.slideM(site.tree().heightM().value(), fall, site.zones().slideM());
   }
 
   /** Where the tree lands, wires, ways out. */
@@ -104,26 +163,28 @@ final class Landing {
     double share = tree.movable() ? Math.max(0, tree.steerShare()) : Double.POSITIVE_INFINITY;
     Landed landed = falls.computeIfAbsent(new Fall(setup.layDeg(), share), this::land);
     TargetClearance nearest = targets(grade, landed);
+    hangUps(grade, landed);
     dropZone(grade, landed);
     wires(grade, landed);
-    List<Position> path = route.path();
-    Angles angles = angles(path);
+    List<BridleLegs> bridles = BridleLegs.of(site, setup);
+    Along along = new Along(route.path(), bridles);
+    Angles angles = this.angles.computeIfAbsent(along, Landing::anglesOf);
     double back = setup.layDeg() + Math.toDegrees(Math.atan2(tree.vgM(), tree.ugM()));
     SitBackZone sitBack =
         SitBackZone.of(site.tree().stump().at(), normal(back), site.tree().heightM().value());
+    List<Leg> legs = route.legs();
+    if (!bridles.isEmpty()) {
+      legs = new ArrayList<>(legs);
+      for (BridleLegs b : bridles) {
+        legs.addAll(b.legs());
+      }
+    }
+    EscapeRoutes.Zones about =
+        new EscapeRoutes.Zones(landed.footprint(), sitBack, angles.all(), angles.recoil(), legs);
     List<Position> ways =
         waysOut.computeIfAbsent(
-            new Out(setup.layDeg(), share, path),
-            o ->
-                escapes.ends(
-                    new EscapeRoutes.Zones(
-                        landed.footprint(),
-                        sitBack,
-                        angles.bights(),
-                        angles.recoil(),
-                        route.legs()),
-                    rules.escapeLengthM().value(),
-                    site.tree().heightM().value()));
+            new Out(setup.layDeg(), share, along),
+            o -> escapes.ends(about, wayOutM(), site.tree().heightM().value()));
     grade.rule(
         "ways out",
         ways.size(),
@@ -136,18 +197,35 @@ final class Landing {
                 ? "No way out ends clear of the footprint, the sit-back zone, the line's angle and its"
                     + " ends."
                 : ways.size() + " way(s) out end clear of every zone.");
-    Ground ground = full ? ground(landed, sitBack, angles, ways, setup) : null;
     return new Zones(
-        landed.footprint(),
-        ground,
+        landed,
         nearest == null ? Double.NaN : nearest.clearanceM(),
         nearest == null ? null : nearest.targetId(),
         angles,
+        about,
+        ways,
         full ? notes(landed, setup, sitBack, route) : List.of());
   }
 
-  private Angles angles(List<Position> path) {
-    return angles.computeIfAbsent(path, p -> new Angles(Bight.along(p), new Recoil(p)));
+  /** Least length of a way out: the rule's, and past the crown as it stands where a rule asks. */
+  private double wayOutM() {
+    double length = rules.escapeLengthM().value();
+    if (!rules.escapeOutsideCrown().yes()) {
+      return length;
+    }
+    Position stump = site.tree().stump().at();
+    double crown =
+        stump.distanceTo(outline.axisInCrown(stump, site.cut().heightM())) + outline.crownReachM();
+    return Math.max(length, crown);
+  }
+
+  private static Angles anglesOf(Along along) {
+    List<List<Position>> more = along.bridles().stream().map(BridleLegs::path).toList();
+    List<Bridle> bridles =
+        along.bridles().stream()
+            .map(b -> new Bridle(b.id(), Bight.along(b.path()).get(0)))
+            .toList();
+    return new Angles(Bight.along(along.path()), bridles, new Recoil(along.path(), more));
   }
 
   /** The footprint of a lay were the hinge not to steer at all. */
@@ -161,7 +239,7 @@ final class Landing {
         site.tree().stump().at(),
         fall.layDeg(),
         fall.steeringShare(),
-        FallFootprint.slideM(site.tree().heightM().value(), ground.alongDeg(fall.layDeg()), null));
+        slideM(ground.alongDeg(fall.layDeg())));
   }
 
   private Landed land(Fall fall) {
@@ -169,13 +247,16 @@ final class Landing {
     return new Landed(
         f,
         targets.clearances(f),
+        near.isEmpty() ? List.of() : hangUps.clearances(f),
         dropZone == null ? null : dropZone.of(f),
         knowledge.ofWires() ? wires.inLay(f, knowledge.approach()) : List.of());
   }
 
   private TargetClearance targets(Grade grade, Landed landed) {
     TargetClearance nearest = null;
-    for (TargetClearance c : landed.clearances()) {
+    for (int i = 0; i < landed.clearances().size(); i++) {
+      TargetClearance c = landed.clearances().get(i);
+      Target t = site.targets().get(i);
       if (c.mayBeHit()) {
         continue;
       }
@@ -191,11 +272,7 @@ final class Landing {
           c.nearest(),
           () ->
               c.overlaps()
-                  ? "The tree can come down on "
-                      + c.targetId()
-                      + ": "
-                      + amount(c.overlapAmount(), c.overlapUnit())
-                      + " of it."
+                  ? struck(t) + ": " + amount(c.overlapAmount(), c.overlapUnit()) + " of it."
                   : "It clears "
                       + c.targetId()
                       + " by "
@@ -203,6 +280,41 @@ final class Landing {
                       + (c.askedM() > 0 ? " of the " + in.length(c.askedM()) + " asked." : "."));
     }
     return nearest;
+  }
+
+  /** What it means for a kind of thing to be struck. */
+  private static String struck(Target t) {
+    return switch (t.kind()) {
+      case TREE -> "The tree can hang up in " + t.id();
+      case ROAD -> "The tree can come down across " + t.id();
+      case PLACE_OF_PEOPLE -> "The tree can come down on " + t.id() + ", where people are";
+      case BURIED -> "The tree can come down on the ground over " + t.id();
+      case STRUCTURE, FENCE, CAR, PLANTING, OTHER ->
+          "The tree can come down on " + t.id() + (t.occupied() ? ", where people may be" : "");
+    };
+  }
+
+  /** Trees that may serve as anchors, and parked vehicles: nobody drew them as targets. */
+  private void hangUps(Grade grade, Landed landed) {
+    for (int i = 0; i < landed.hangUps().size(); i++) {
+      TargetClearance c = landed.hangUps().get(i);
+      boolean tree = near.get(i).kind() == Target.Kind.TREE;
+      grade.plain(
+          (tree ? "hang-up in " : "clear of ") + c.targetId(),
+          c.clearanceM(),
+          0,
+          "m",
+          c.ratio(),
+          c.nearest(),
+          () ->
+              c.overlaps()
+                  ? (tree ? "The tree can hang up in " : "The tree can come down on ")
+                      + c.targetId()
+                      + ": "
+                      + amount(c.overlapAmount(), c.overlapUnit())
+                      + (tree ? " of its crown." : " of its place.")
+                  : "It clears " + c.targetId() + " by " + in.length(c.clearanceM()) + ".");
+    }
   }
 
   private static double spare(TargetClearance c) {
@@ -251,45 +363,178 @@ final class Landing {
                   + " are asked.");
     }
     for (WireCheck.Reach r : reach) {
-      double there = r.groundM() - r.errorM();
-      grade.rule(
+      reach(grade, r);
+    }
+  }
+
+  private void reach(Grade grade, WireCheck.Reach r) {
+    double there = r.groundM() - r.errorM();
+    Wire wire =
+        site.wires().stream().filter(w -> w.id().equals(r.wireId())).findFirst().orElseThrow();
+    if (r.stops() && Knowledge.saidDead(wire)) {
+      grade.tightAtBest(
           "wire " + r.wireId() + " in reach",
           there,
           r.stopM(),
           "m",
-          // on the limit itself the work stops too
-          r.stops() ? Math.min(there / r.stopM(), Math.nextDown(1.0)) : there / r.stopM(),
           r.place(),
           () ->
-              r.stops()
-                  ? "Line "
-                      + r.wireId()
-                      + " is within reach of the tree whichever way it goes: stop, its owner must make"
-                      + " it dead or attend."
-                  : "Line "
-                      + r.wireId()
-                      + " is "
-                      + in.length(there)
-                      + " off; within "
-                      + in.length(r.stopM())
-                      + " the work stops.");
+              "Line "
+                  + r.wireId()
+                  + " is within reach of the tree whichever way it goes; dead and earthed, said by "
+                  + wire.voltageSaidBy()
+                  + ". Only while that stands in writing, its earths in sight.");
+      return;
     }
+    grade.rule(
+        "wire " + r.wireId() + " in reach",
+        there,
+        r.stopM(),
+        "m",
+        // on the limit itself the work stops too
+        r.stops() ? Math.min(there / r.stopM(), Math.nextDown(1.0)) : there / r.stopM(),
+        r.place(),
+        () ->
+            r.stops()
+                ? "Line "
+                    + r.wireId()
+                    + " is within reach of the tree whichever way it goes: stop, its owner must make"
+                    + " it dead or attend."
+                : "Line "
+                    + r.wireId()
+                    + " is "
+                    + in.length(there)
+                    + " off; within "
+                    + in.length(r.stopM())
+                    + " the work stops.");
   }
 
-  private Ground ground(
-      Landed landed, SitBackZone sitBack, Angles angles, List<Position> ways, Setup setup) {
+  /** The zones for painting and for other programs, with the crew's places. */
+  Ground ground(Setup setup, Zones z, OperatorStand operator) {
     double height = site.tree().heightM().value();
+    FallFootprint f = z.footprint();
     return new Ground(
-        landed.footprint().geometry(),
+        f.geometry(),
         site.tree().stump().at().along(setup.layDeg(), height),
-        sitBack.geometry(),
-        rules.peopleRadiusFactor().value() * height,
-        angles.bights().stream().map(Bight::geometry).toList(),
-        angles.recoil().geometry(),
-        ways,
-        landed.footprint().halfAngleDeg(),
-        reach.stream().mapToDouble(WireCheck.Reach::stopM).max().orElse(Double.NaN));
+        z.about().sitBack().geometry(),
+        peopleM,
+        z.angles().bights().stream().map(Bight::geometry).toList(),
+        z.angles().recoil().geometry(),
+        z.waysOut(),
+        f.halfAngleDeg(),
+        reach.stream().mapToDouble(WireCheck.Reach::stopM).max().orElse(Double.NaN),
+        slide(f),
+        z.angles().bridles().stream().map(b -> b.inside().geometry()).toList(),
+        z.about().sitBack().atStake(targets),
+        hangsUpIn(z.landed()),
+        CrewPlaces.of(
+            site,
+            in,
+            z,
+            operator,
+            lookOut.find(z.about(), peopleM, operator == null ? null : operator.at())),
+        clearFirst);
   }
+
+  /** The ground that only the slide covers; null: no slide is counted. */
+  private Geometry slide(FallFootprint f) {
+    if (slideM(ground.alongDeg(f.layDeg())) == 0) {
+      return null;
+    }
+    FallFootprint still = FallFootprint.of(outline, f.stump(), f.layDeg(), f.steeringShare(), 0);
+    return OverlayNGRobust.overlay(f.geometry(), still.geometry(), OverlayNG.DIFFERENCE);
+  }
+
+  private List<String> hangsUpIn(Landed landed) {
+    List<String> ids = new ArrayList<>();
+    for (int i = 0; i < landed.clearances().size(); i++) {
+      if (site.targets().get(i).kind() == Target.Kind.TREE
+          && landed.clearances().get(i).overlaps()) {
+        ids.add(site.targets().get(i).id());
+      }
+    }
+    for (int i = 0; i < landed.hangUps().size(); i++) {
+      if (near.get(i).kind() == Target.Kind.TREE && landed.hangUps().get(i).overlaps()) {
+        ids.add(near.get(i).id());
+      }
+    }
+    return ids;
+  }
+
+  /** What must be said of the crew's places. */
+  List<String> crewNotes(Ground g) {
+    List<String> notes = new ArrayList<>();
+    if (g.places().stream().noneMatch(p -> p.role() == StandingPlace.Role.LOOK_OUT)) {
+      notes.add(
+          "No place for a look-out was found from where the stump and the source are in sight; use"
+              + " two, or radio.");
+    }
+    if (!g.clearFirst().isEmpty()) {
+      notes.add(
+          "Clear before work, within "
+              + in.length(peopleM)
+              + " of the stump: "
+              + String.join(
+                  "; ", g.clearFirst().stream().map(c -> c.id() + ": " + c.act()).toList())
+              + ".");
+    }
+    return notes;
+  }
+
+  /** What must be said of the ground and of tapes, whatever the setup. */
+  List<String> siteNotes() {
+    List<String> notes = new ArrayList<>();
+    for (Target t : site.targets()) {
+      ties.disagreementM(t)
+          .ifPresent(
+              off ->
+                  notes.add(
+                      "A tape to "
+                          + t.id()
+                          + " and its drawing disagree by "
+                          + in.length(off)
+                          + "; that counts as its position error. Draw it again."));
+      if (ties.oneWayOnly(t)) {
+        notes.add(
+            "The tapes to "
+                + t.id()
+                + " all run one way and fix it to the stump in that way only; tape a second point of"
+                + " it.");
+      }
+    }
+    if (ground.steepestDeg() > Allowances.SLIDE_SLOPE.value() && rules.moreOnSlopes().yes()) {
+      notes.add(
+          "The ground falls "
+              + in.angle(Math.toRadians(ground.steepestDeg()))
+              + " by the heights entered. Where trees or logs may roll or slide the people ring must"
+              + " be more than two tree heights; no rule says how much"
+              + (site.zones().peopleRadius() == null ? ", and none is stated here." : "."));
+    }
+    for (WireCheck.Reach r : reach) {
+      Wire wire =
+          site.wires().stream().filter(w -> w.id().equals(r.wireId())).findFirst().orElseThrow();
+      boolean towers = wire.voltageKv() > HIGHEST_ON_POLES_KV;
+      rules
+          .consultDistanceM(towers)
+          .filter(c -> !c.metBy(r.groundM() - r.errorM(), 1))
+          .ifPresent(
+              c ->
+                  notes.add(
+                      "Line "
+                          + r.wireId()
+                          + " is nearer than "
+                          + in.length(c.value())
+                          + ": ask its operator first ("
+                          + c.citation()
+                          + "; "
+                          + c.status().words()
+                          + ")."));
+    }
+    return notes;
+  }
+
+  /** A line above this stands on towers, where nobody says otherwise [kV]. */
+  private static final double HIGHEST_ON_POLES_KV = 33;
 
   private List<String> notes(Landed landed, Setup setup, SitBackZone sitBack, Route route) {
     List<String> notes = new ArrayList<>();
@@ -304,8 +549,7 @@ final class Landing {
     for (TargetClearance c : landed.clearances()) {
       if (c.mayBeHit() && c.overlaps()) {
         notes.add(
-            "The tree can come down on "
-                + c.targetId()
+            struck(target(c.targetId()))
                 + " ("
                 + amount(c.overlapAmount(), c.overlapUnit())
                 + "), which may be hit.");
@@ -318,10 +562,14 @@ final class Landing {
             .toList();
     notes.add(
         stake.isEmpty()
-            ? "If line or hinge is lost the tree falls back; no line stops it once it goes."
+            ? "If line or hinge is lost the tree falls back with up to "
+                + fallBack()
+                + "; no line stops it once it goes."
             : "If line or hinge is lost the tree falls back on "
                 + String.join(", ", stake)
-                + ": nobody indoors, nobody on that side. No line stops it once it goes.");
+                + ": nobody indoors, nobody on that side. It brings up to "
+                + fallBack()
+                + "; no line stops it once it goes.");
     for (WireCheck.Reach r : reach) {
       if (!r.stops() && r.advises()) {
         notes.add(
@@ -339,6 +587,18 @@ final class Landing {
       }
     }
     return notes;
+  }
+
+  /** Energy of the whole tree falling from where its mass centre stands. */
+  private String fallBack() {
+    double high = subject.figures().massCentreM() - site.cut().heightM();
+    return in.energy(subject.figures().massKg() * G * high);
+  }
+
+  private static final double G = 9.80665;
+
+  private Target target(String id) {
+    return site.targets().stream().filter(t -> t.id().equals(id)).findFirst().orElseThrow();
   }
 
   private boolean ground(String id) {

@@ -1,9 +1,12 @@
 package org.fallwright.core.plan;
 
 import java.util.ArrayList;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.concurrent.ConcurrentHashMap;
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Target;
 import org.fallwright.core.units.DisplayUnits;
@@ -18,8 +21,13 @@ final class LineRun {
   private final LegCheck legs;
   private final Map<Setup, List<Passed>> passed = new ConcurrentHashMap<>();
 
-  /** What a leg passes, with the number of the leg. */
-  private record Passed(int leg, LegCheck.Passing what) {}
+  /**
+   * What a leg passes.
+   *
+   * @param check id of its check
+   * @param subject what passes it, as a sentence begins
+   */
+  private record Passed(String check, String subject, LegCheck.Passing what) {}
 
   LineRun(Site site, DisplayUnits in, Knowledge knowledge) {
     this.site = site;
@@ -42,7 +50,7 @@ final class LineRun {
       LegCheck.Passing what = p.what();
       boolean over = what.clearanceM() <= 0;
       grade.plain(
-          "line clear of " + what.what() + (p.leg() > 0 ? ", leg " + (p.leg() + 1) : ""),
+          p.check(),
           what.clearanceM(),
           what.askedM(),
           "m",
@@ -50,10 +58,12 @@ final class LineRun {
           what.place(),
           () ->
               over
-                  ? "The line runs over or through "
+                  ? p.subject()
+                      + " over or through "
                       + what.what()
                       + (movable(what.what()) ? "; move it before the work." : ".")
-                  : "The line passes "
+                  : p.subject()
+                      + " past "
                       + what.what()
                       + " at "
                       + in.length(what.clearanceM())
@@ -74,15 +84,52 @@ final class LineRun {
     List<LinePoint> points = route.all();
     for (int i = 0; i < list.size(); i++) {
       double error = Math.max(error(points.get(i).id()), error(points.get(i + 1).id()));
-      for (LegCheck.Passing p :
-          legs.passing(list.get(i), error, w -> knowledge.approach().applyAsDouble(w) + error)) {
-        boolean wire = site.wires().stream().anyMatch(w -> w.id().equals(p.what()));
-        if (wire || p.clearanceM() < NEAR * p.askedM()) {
-          all.add(new Passed(i, p));
-        }
+      String which = i > 0 ? ", leg " + (i + 1) : "";
+      add(all, list.get(i), error, "line clear of ", which, "The line runs");
+    }
+    for (BridleLegs b : BridleLegs.of(site, setup)) {
+      double error =
+          Math.max(error(b.apex().id()), Math.max(error(b.first().id()), error(b.second().id())));
+      for (int i = 0; i < 2; i++) {
+        String which = ", leg to " + (i == 0 ? b.first() : b.second()).id();
+        add(
+            all,
+            b.legs().get(i),
+            error,
+            "bridle " + b.id() + " clear of ",
+            which,
+            "A leg of " + b.id() + " runs");
+      }
+    }
+    if (knowledge.ofWires()) {
+      Set<String> manned = new LinkedHashSet<>(setup.redirects());
+      manned.add(setup.place());
+      if (setup.driver() != null) {
+        manned.add(setup.driver().place());
+      }
+      for (String id : manned) {
+        legs.machine(Route.place(site, id), Allowances.MACHINE_REACH.value(), knowledge.approach())
+            .forEach(
+                p ->
+                    all.add(
+                        new Passed(
+                            "wire " + p.what() + " from " + id,
+                            "What stands at " + id + " is",
+                            p)));
       }
     }
     return all;
+  }
+
+  private void add(
+      List<Passed> all, Leg leg, double error, String check, String which, String subject) {
+    for (LegCheck.Passing p :
+        legs.passing(leg, error, w -> knowledge.approach().applyAsDouble(w) + error)) {
+      boolean wire = site.wires().stream().anyMatch(w -> w.id().equals(p.what()));
+      if (wire || p.clearanceM() < NEAR * p.askedM()) {
+        all.add(new Passed(check + p.what() + which, subject, p));
+      }
+    }
   }
 
   /** Multiple of what is asked beyond which a thing beside the line is not listed. */

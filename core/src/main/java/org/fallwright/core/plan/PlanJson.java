@@ -18,6 +18,7 @@ import java.util.Map;
 import java.util.TreeMap;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
+import org.fallwright.core.site.TakenException;
 
 /**
  * Writes the plan document: what the planner found, for other programs to read. SI throughout, the
@@ -84,6 +85,14 @@ public final class PlanJson {
     for (Map.Entry<String, Judged> e : new TreeMap<>(plan.bestRejected()).entrySet()) {
       rejected.set(e.getKey(), setup(null, e.getValue()));
     }
+    ArrayNode exceptions = doc.putArray("exceptions");
+    for (TakenException e : site.exceptions()) {
+      ObjectNode one = exceptions.addObject();
+      one.put("check", e.check());
+      one.put("by", e.by());
+      one.put("why", e.why());
+      one.put("when", e.when());
+    }
     texts(doc, "notes", plan.notes());
     texts(doc, "not_checked", header.notChecked());
     texts(doc, "cautions", header.cautions());
@@ -111,6 +120,7 @@ public final class PlanJson {
     j.loads().forEach(l -> loads.add(load(l)));
     points(o, "path", j.line());
     points(o, "haul_path", j.haul());
+    o.set("zones", ZonesJson.of(j.ground()));
     texts(o, "notes", j.notes());
     return o;
   }
@@ -209,7 +219,7 @@ public final class PlanJson {
     }
   }
 
-  private static void place(ObjectNode o, String name, Position p) {
+  static void place(ObjectNode o, String name, Position p) {
     o.putArray(name).add(rounded(p.eastM())).add(rounded(p.northM()));
   }
 
@@ -222,7 +232,7 @@ public final class PlanJson {
     return text == null || text.isBlank() ? null : text;
   }
 
-  private static void number(ObjectNode o, String name, double value) {
+  static void number(ObjectNode o, String name, double value) {
     o.put(name, Double.isFinite(value) ? rounded(value) : null);
   }
 

@@ -95,7 +95,8 @@ record Route(
         at, stump.groundM() + heightAboveGround, LinePoint.Role.ATTACHMENT, site.tree().id());
   }
 
-  private static LinePoint at(Anchor a, LinePoint.Role role) {
+  /** Where a line is fastened to an anchor. */
+  static LinePoint at(Anchor a, LinePoint.Role role) {
     return new LinePoint(a.place().at(), a.place().groundM() + a.slingHeightM(), role, a.id());
   }
 

@@ -388,6 +388,27 @@ public final class Allowances {
       allowance("escape-least", 90, "deg", "least escape direction off the lay that is weighed");
   public static final Figure ESCAPE_MOST =
       allowance("escape-most", 150, "deg", "greatest escape direction off the lay that is weighed");
+  public static final Figure TIE_ANGLE =
+      allowance(
+          "tie-angle", 20, "deg", "least angle between two tapes that fix a target to the stump");
+  public static final Figure WIRE_SWING =
+      allowance("wire-swing", 45, "deg", "how far wind may swing a conductor out of the vertical");
+  public static final Figure MACHINE_REACH =
+      allowance(
+          "machine-reach",
+          3,
+          "m",
+          "reach of a machine or of people about their place, aside and upwards, against wires");
+  public static final Figure WINCH_BEFORE_ANCHOR =
+      allowance("winch-before-anchor", 2, "m", "how far a winch stands before its anchor");
+  public static final Figure BESIDE_HAND_WINCH =
+      allowance("beside-hand-winch", 1, "m", "how far beside a hand winch its operator stands");
+  public static final Figure LOOK_OUT_RINGS =
+      allowance(
+          "look-out-rings",
+          4,
+          "",
+          "rings, 5 m apart, outside the people ring that are searched for the look-out's place");
 
   // Doubt
   public static final Figure SAMPLES =

@@ -7,5 +7,9 @@ public enum Comparison {
   @JsonProperty(">=")
   AT_LEAST,
   @JsonProperty(">")
-  MORE_THAN
+  MORE_THAN,
+  @JsonProperty("<=")
+  AT_MOST,
+  @JsonProperty("<")
+  LESS_THAN
 }

@@ -47,7 +47,12 @@ public record Rule(
    */
   public boolean metBy(double measured, double unitSize) {
     double limit = value * unitSize;
-    return comparison == Comparison.MORE_THAN ? measured > limit : measured >= limit;
+    return switch (comparison) {
+      case AT_LEAST -> measured >= limit;
+      case MORE_THAN -> measured > limit;
+      case AT_MOST -> measured <= limit;
+      case LESS_THAN -> measured < limit;
+    };
   }
 
   Rule from(String setKey) {

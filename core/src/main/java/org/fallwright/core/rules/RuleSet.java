@@ -32,10 +32,6 @@ public final class RuleSet {
     return key;
   }
 
-  List<ApproachTable> tables() {
-    return tables;
-  }
-
   /** What it is called. */
   public String name() {
     return name;
@@ -54,6 +50,75 @@ public final class RuleSet {
   /** Distance of the person at the pull source [tree lengths]. */
   public Rule operatorRadiusFactor() {
     return all.rule(key, "operator_radius");
+  }
+
+  /** How far beside a powered winch its operator stands [m]. */
+  public Rule operatorBesideWinchM() {
+    return all.rule(key, "operator_beside_winch");
+  }
+
+  /** Whether the people radius must be more where trees or logs may roll or slide. */
+  public Rule moreOnSlopes() {
+    return all.rule(key, "more_on_slopes");
+  }
+
+  /** Length of the felling path to provide [tree lengths]; only where this set has one. */
+  public Optional<Rule> pathLengthFactor() {
+    return all.own(key, "path_length");
+  }
+
+  /** Wind beyond which felling is not begun [km/h]; only where this set has one. */
+  public Optional<Rule> windStopKmh() {
+    return all.own(key, "wind_stop");
+  }
+
+  /** DBH beyond which wedges are to be at hand [m]; only where this set has one. */
+  public Optional<Rule> wedgesOverDbhM() {
+    return all.own(key, "wedges_over_dbh");
+  }
+
+  /** Length of a piece felled beside a structure over its distance; only where this set has one. */
+  public Optional<Rule> pieceOverDistance() {
+    return all.own(key, "piece_over_distance");
+  }
+
+  /** Least and most of the face's depth over the diameter, and of an open face's opening. */
+  public Optional<Rule> face(FaceLimit limit) {
+    return all.own(key, limit.item);
+  }
+
+  /** Limits that rules or teaching put on the face. */
+  public enum FaceLimit {
+    DEPTH_LEAST("face_depth_least"),
+    DEPTH_MOST("face_depth_most"),
+    OPEN_LEAST_DEG("open_face_least"),
+    OPEN_MOST_DEG("open_face_most");
+
+    private final String item;
+
+    FaceLimit(String item) {
+      this.item = item;
+    }
+  }
+
+  /** Every rule there is, in a fixed order, with what this set has to say on it. */
+  public List<Entry> entries() {
+    return all.entries(key);
+  }
+
+  /**
+   * A rule's place in a set.
+   *
+   * @param item key of the rule
+   * @param basis what it is measured on
+   * @param own what this set says; empty: nothing
+   * @param used what counts: its own, else the strictest of all sets; empty: nothing is asked
+   */
+  public record Entry(String item, String basis, Optional<Rule> own, Optional<Rule> used) {}
+
+  /** The set's own approach tables. */
+  public List<ApproachTable> approachTables() {
+    return tables;
   }
 
   /** Whether people whom the felling needs may be named and work nearer. */

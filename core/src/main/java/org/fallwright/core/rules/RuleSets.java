@@ -122,7 +122,34 @@ public final class RuleSets {
     return own(key, item).orElseGet(() -> strictest(item));
   }
 
+  /** Whether a gap is filled from the other sets. */
+  private boolean filled(String item) {
+    return !items.get(item).strictest().equals("none");
+  }
+
+  List<RuleSet.Entry> entries(String key) {
+    return items.entrySet().stream()
+        .map(
+            e -> {
+              Optional<Rule> own = own(key, e.getKey());
+              return new RuleSet.Entry(
+                  e.getKey(),
+                  e.getValue().basis(),
+                  own,
+                  filled(e.getKey()) ? Optional.of(rule(key, e.getKey())) : own);
+            })
+        .toList();
+  }
+
+  /** Every approach table there is, those that no set uses among them. */
+  public List<ApproachTable> allTables() {
+    return List.copyOf(tables.values());
+  }
+
   private Rule strictest(String item) {
+    if (!filled(item)) {
+      throw new IllegalStateException("a gap in " + item + " is not filled from other sets");
+    }
     // a strict "more than" is stricter than "at least"; between equals the better read text is
     // named
     Comparator<Rule> byValue = Comparator.comparingDouble(Rule::value);
@@ -152,7 +179,7 @@ public final class RuleSets {
   }
 
   private List<ApproachTable> setTables(String key) {
-    return sets.get(key).tables();
+    return sets.get(key).approachTables();
   }
 
   private static Optional<Rule> greatest(List<ApproachTable> from, double kv) {

@@ -9,7 +9,7 @@ public enum Status {
   /** Read on a page that restates it. */
   SECONDARY("secondary"),
   /** Not read. */
-  FROM_MEMORY("from memory"),
+  FROM_MEMORY("from memory, verify"),
   /** No rule: the program's own choice. */
   OWN("the program's own");
 

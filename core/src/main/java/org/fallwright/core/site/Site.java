@@ -24,6 +24,10 @@ import org.fallwright.core.units.Range;
  * @param gear all the gear thought of, also what is left behind
  * @param kit name of the kit file that the gear was taken from; null: none
  * @param leftBehind gear that does not come to the site
+ * @param tapeTies distances taped between two things
+ * @param peoplePoints doors and places of persons
+ * @param exceptions checks that somebody takes an exception to
+ * @param zones what is stated of the zones
  */
 public record Site(
     int version,
@@ -47,7 +51,11 @@ public record Site(
     List<Case> cases,
     List<Revision> revisions,
     String kit,
-    List<LeftBehind> leftBehind) {
+    List<LeftBehind> leftBehind,
+    List<TapeTie> tapeTies,
+    List<PeoplePoint> peoplePoints,
+    List<TakenException> exceptions,
+    ZoneChoices zones) {
   /** The version written. */
   public static final int VERSION = 2;
 
@@ -94,6 +102,10 @@ public record Site(
     }
     leftBehind = List.copyOf(Range.present("left_behind", leftBehind));
     leftBehind(gear, leftBehind);
+    tapeTies = List.copyOf(Range.present("tape_ties", tapeTies));
+    peoplePoints = List.copyOf(Range.present("people_points", peoplePoints));
+    exceptions = List.copyOf(Range.present("exceptions", exceptions));
+    Range.present("zones", zones);
     oneNameEach(
         Stream.of(
                 Stream.of(tree.id()),
@@ -101,7 +113,8 @@ public record Site(
                 wires.stream().map(Wire::id),
                 dropZones.stream().map(DropZone::id),
                 anchors.stream().map(Anchor::id),
-                spots.stream().map(Spot::id))
+                spots.stream().map(Spot::id),
+                peoplePoints.stream().map(PeoplePoint::id))
             .flatMap(s -> s));
     oneNameEach(gear.sources().stream().map(Gear.Source::id));
     oneNameEach(gear.lines().stream().map(Gear.Line::id));
@@ -137,6 +150,20 @@ public record Site(
     }
     if (looked.stream().map(Looked::what).distinct().count() != looked.size()) {
       throw new IllegalArgumentException("looked has two entries of one kind; it may have one");
+    }
+    for (PeoplePoint p : peoplePoints) {
+      if (p.of() != null && targets.stream().noneMatch(t -> t.id().equals(p.of()))) {
+        throw new IllegalArgumentException(
+            "people_points."
+                + p.id()
+                + ".of names \""
+                + p.of()
+                + "\"; no target of that name is on the site");
+      }
+    }
+    for (TapeTie t : tapeTies) {
+      tied(tree, targets, anchors, spots, "from", t.from(), t.fromAt());
+      tied(tree, targets, anchors, spots, "to", t.to(), t.toAt());
     }
   }
 
@@ -204,6 +231,29 @@ public record Site(
         .map(Looked::found)
         .findFirst()
         .orElse(Looked.Found.NOT_LOOKED);
+  }
+
+  private static void tied(
+      SubjectTree tree,
+      List<Target> targets,
+      List<Anchor> anchors,
+      List<Spot> spots,
+      String end,
+      String id,
+      Position at) {
+    Optional<Target> target = targets.stream().filter(t -> t.id().equals(id)).findFirst();
+    if (target.isPresent()) {
+      if (at == null && !(target.get().shape() instanceof Shape.Circle)) {
+        throw new IllegalArgumentException(
+            "tape_ties."
+                + end
+                + "_at is null; it must be stated for \""
+                + id
+                + "\", which has no point of its own");
+      }
+    } else if (!tree.id().equals(id)) {
+      known(anchors, spots, "tape_ties." + end, id);
+    }
   }
 
   private static void oneNameEach(Stream<String> ids) {

@@ -40,10 +40,14 @@ final class Migrations {
     if (gear.path("load_cell") instanceof ObjectNode cell && !cell.has("at")) {
       cell.put("at", "source-end");
     }
-    for (String list : new String[] {"cases", "revisions"}) {
+    for (String list :
+        new String[] {"cases", "revisions", "tape_ties", "people_points", "exceptions"}) {
       if (!site.has(list)) {
         site.putArray(list);
       }
+    }
+    if (!site.has("zones")) {
+      site.putObject("zones").putNull("slide_m").putNull("people_radius").putNull("energy");
     }
   }
 

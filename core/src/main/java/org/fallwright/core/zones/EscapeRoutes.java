@@ -52,7 +52,8 @@ public final class EscapeRoutes {
       legs = List.copyOf(legs);
     }
 
-    private boolean free(Position end) {
+    /** Whether a place is outside every zone. */
+    boolean free(Position end) {
       return !sitBack.contains(end)
           && !recoil.contains(end)
           && bights.stream().noneMatch(b -> b.contains(end))

@@ -17,12 +17,15 @@ import org.locationtech.jts.operation.overlayng.OverlayNGRobust;
  *
  * <p>Outline, s along the lay and r to its right, a height above the ground landing at s = that
  * height: the stem, |r| ≤ Ds/2 from −max(0.1 H, 2 m) behind the stump to R = H + max(0.1 H, 3 m);
- * the crown, an ellipse from its base to R, half as wide as the crown's radius. Both count as they
- * are and pushed sideways to r + s·tan λ_v by the side lean λ_v, tan λ_v = tan λ·sin(γ − lay). A
- * slide draws stem and crown out beyond R. Heights count at full length on slopes, the safe side.
+ * the crown, an ellipse from its base to R, half as wide as the crown's radius, or its outline as
+ * drawn from above, stretched along the lay in the same way: hindmost corner to its base, foremost
+ * to R. Both count as they are and pushed sideways to r + s·tan λ_v by the side lean λ_v, tan λ_v =
+ * tan λ·sin(γ − lay). A slide draws stem and crown out beyond R. Heights count at full length on
+ * slopes, the safe side.
  *
  * <p>Source: own reckoning; half-angle, butt and margin are planning allowances. Leaves out broken
- * wood thrown further and a tree that rolls.
+ * wood thrown further, a tree that rolls, and at which height a drawn crown is how wide: a view
+ * from above does not tell.
  */
 public final class FallFootprint {
   /** Aim half-angle of a hinge that steers nothing [degrees]: planning allowance. */
@@ -43,6 +46,7 @@ public final class FallFootprint {
   private final Position stump;
   private final double layDeg;
   private final double halfAngleDeg;
+  private final double steeringShare;
   private final double lengthM;
   private final List<Polygon> pieces;
   private final List<Edges> pieceEdges;
@@ -50,10 +54,16 @@ public final class FallFootprint {
   private Edges edges;
 
   private FallFootprint(
-      Position stump, double layDeg, double halfAngleDeg, double lengthM, List<Polygon> pieces) {
+      Position stump,
+      double layDeg,
+      double steeringShare,
+      double halfAngleDeg,
+      double lengthM,
+      List<Polygon> pieces) {
     this.stump = stump;
     this.layDeg = layDeg;
     this.halfAngleDeg = halfAngleDeg;
+    this.steeringShare = steeringShare;
     this.lengthM = lengthM;
     this.pieces = List.copyOf(pieces);
     this.pieceEdges = pieces.stream().map(Edges::new).toList();
@@ -78,11 +88,15 @@ public final class FallFootprint {
     Sweep sweep = new Sweep(stump, layDeg, half);
     List<Polygon> pieces = new ArrayList<>(4);
     boolean leansAside = Math.abs(push) * (reach + slideM) > 1e-6;
+    List<double[]> crown =
+        outline.crown().isEmpty()
+            ? Sweep.ellipse(outline.crownBaseM(), reach, outline.crownRadiusM())
+            : Sweep.stretched(outline.crown(), layDeg, outline.crownBaseM(), reach);
     for (double p : leansAside ? new double[] {0, push} : new double[] {0}) {
-      pieces.add(sweep.crown(outline.crownBaseM(), reach, outline.crownRadiusM(), slideM, p));
+      pieces.add(sweep.crown(crown, slideM, p));
       pieces.add(sweep.strip(outline.stumpDiameterM() / 2, reach + slideM, outline.buttM(), p));
     }
-    return new FallFootprint(stump, layDeg, half, reach, pieces);
+    return new FallFootprint(stump, layDeg, steeringShare, half, reach, pieces);
   }
 
   /**
@@ -120,6 +134,11 @@ public final class FallFootprint {
 
   public double layDeg() {
     return layDeg;
+  }
+
+  /** Share of the hinge's steering capacity in use. */
+  public double steeringShare() {
+    return steeringShare;
   }
 
   /** Aim half-angle [degrees]. */

@@ -2,6 +2,7 @@ package org.fallwright.core.zones;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.ToDoubleFunction;
 import org.fallwright.core.site.Place;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Target;
@@ -25,11 +26,19 @@ public final class LayTargets {
    * @param stump the stump, for its position error
    */
   public LayTargets(List<Target> targets, Place stump) {
+    this(targets, t -> t.errorM() + stump.errorM());
+  }
+
+  /**
+   * @param targets the targets
+   * @param errorM position error between the stump and a target [m]
+   */
+  public LayTargets(List<Target> targets, ToDoubleFunction<Target> errorM) {
     List<Ready> all = new ArrayList<>();
     for (Target t : Range.present("targets", targets)) {
       Geometry g = t.shape().geometry();
       double required = t.requiredDistanceM();
-      double asked = required > 0 ? required + t.errorM() + stump.errorM() : 0;
+      double asked = required > 0 ? required + errorM.applyAsDouble(t) : 0;
       all.add(new Ready(t, g, new Edges(g), asked));
     }
     ready = List.copyOf(all);

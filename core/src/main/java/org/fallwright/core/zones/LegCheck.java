@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.function.ToDoubleFunction;
 import org.fallwright.core.site.Anchor;
+import org.fallwright.core.site.Place;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Target;
 import org.fallwright.core.site.Wire;
@@ -93,8 +94,33 @@ public final class LegCheck {
         Segment3.Nearest n = line.nearest(c);
         best = n.distanceM() < best.distanceM() ? n : best;
       }
-      double asked = approachM.applyAsDouble(w.wire) + w.wire.errorM();
+      double asked = approachM.applyAsDouble(w.wire) + w.wire.errorM() + WireCheck.swingM(w.wire);
       all.add(new Passing(w.wire.id(), best.distanceM(), asked, line.planAt(best.at())));
+    }
+    all.sort((p, q) -> Double.compare(p.clearanceM - p.askedM, q.clearanceM - q.askedM));
+    return all;
+  }
+
+  /**
+   * Distance of a machine or of people at a place from a wire, least clearance over what is asked
+   * first: all within the reach of the place and as high above its ground counts as the machine.
+   *
+   * @param reachM its reach, aside and upwards [m]
+   * @param approachM approach distance of a wire by the rule set [m]
+   */
+  public List<Passing> machine(Place place, double reachM, ToDoubleFunction<Wire> approachM) {
+    Segment3 post =
+        Segment3.between(place.at(), place.groundM(), place.at(), place.groundM() + reachM);
+    List<Passing> all = new ArrayList<>();
+    for (ReadyWire w : wires) {
+      double nearest =
+          w.chords.stream().mapToDouble(post::distanceTo).min().orElse(Double.POSITIVE_INFINITY);
+      double asked =
+          approachM.applyAsDouble(w.wire)
+              + place.errorM()
+              + w.wire.errorM()
+              + WireCheck.swingM(w.wire);
+      all.add(new Passing(w.wire.id(), nearest - reachM, asked, place.at()));
     }
     all.sort((p, q) -> Double.compare(p.clearanceM - p.askedM, q.clearanceM - q.askedM));
     return all;

@@ -47,6 +47,21 @@ public final class Recoil {
    *     two
    */
   public Recoil(List<Position> path) {
+    this(path, List.of());
+  }
+
+  /**
+   * @param path as above
+   * @param others further loaded paths, as the two legs of an anchor, each from end to end
+   */
+  public Recoil(List<Position> path, List<List<Position>> others) {
+    int lastLeg = add(path);
+    lastFans = List.copyOf(fans.subList(lastLeg, fans.size()));
+    others.forEach(this::add);
+  }
+
+  /** Adds a path; answers at which fan its last leg begins. */
+  private int add(List<Position> path) {
     if (path.size() < 2) {
       throw new IllegalArgumentException(
           "a line has " + path.size() + " points; it must have at least 2");
@@ -67,7 +82,7 @@ public final class Recoil {
         discs.add(new Disc(b, Math.min(length, b.distanceTo(path.get(i + 1)))));
       }
     }
-    lastFans = List.copyOf(fans.subList(lastLeg, fans.size()));
+    return lastLeg;
   }
 
   public boolean contains(Position p) {

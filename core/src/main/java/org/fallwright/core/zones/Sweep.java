@@ -75,31 +75,19 @@ final class Sweep {
   }
 
   /**
-   * The swept crown: an ellipse from its base to the tip.
+   * The swept crown.
    *
-   * @param baseM distance of its base from the stump [m]
-   * @param tipM distance of its tip from the stump [m]
-   * @param radiusM half its width [m]
-   * @param slideM how far its outer half is drawn out [m]
+   * @param corners its outline as felled, r and s of each corner, anticlockwise with s upwards, no
+   *     edge bent inwards
+   * @param slideM how far it slides on along the lay [m]
    * @param push shift to the right per metre of s
    */
-  Polygon crown(double baseM, double tipM, double radiusM, double slideM, double push) {
-    double grow = 1 / Math.cos(Math.PI / CROWN_CORNERS);
-    double middle = (baseM + tipM) / 2;
-    double half = (tipM - baseM) / 2;
-    List<double[]> p = new ArrayList<>(CROWN_CORNERS + 2);
-    for (int i = 0; i < CROWN_CORNERS; i++) {
-      double a = 2 * Math.PI * i / CROWN_CORNERS;
-      double r = grow * radiusM * Math.cos(a);
-      double s = Math.max(middle + grow * half * Math.sin(a), 1e-6);
-      boolean outerHalf = i <= CROWN_CORNERS / 2;
-      if (i == 0 && slideM > 0) {
-        p.add(pushed(r, s, push));
-      }
-      p.add(pushed(r, outerHalf ? s + slideM : s, push));
-      if (i == CROWN_CORNERS / 2 && slideM > 0) {
-        p.add(pushed(r, s, push));
-      }
+  Polygon crown(List<double[]> corners, double slideM, double push) {
+    List<double[]> p = new ArrayList<>(corners.size() + 2);
+    for (double[] c : drawnOut(corners, slideM)) {
+      // wholly ahead of the stump, so that a near and a far side can be told
+      double s = Math.max(c[1], 1e-6);
+      p.add(new double[] {c[0] + push * s, s});
     }
     int n = p.size();
     // Corners run anticlockwise: an edge seen from outside by the stump belongs to the far side.
@@ -128,8 +116,66 @@ final class Sweep {
     return close(ring);
   }
 
-  private static double[] pushed(double r, double s, double push) {
-    return new double[] {r + push * s, s};
+  /** The crown seen from above as a circle, stretched along the lay: an ellipse, drawn around. */
+  static List<double[]> ellipse(double baseM, double tipM, double radiusM) {
+    double grow = 1 / Math.cos(Math.PI / CROWN_CORNERS);
+    double middle = (baseM + tipM) / 2;
+    double half = (tipM - baseM) / 2;
+    List<double[]> p = new ArrayList<>(CROWN_CORNERS);
+    for (int i = 0; i < CROWN_CORNERS; i++) {
+      double a = 2 * Math.PI * i / CROWN_CORNERS;
+      p.add(new double[] {grow * radiusM * Math.cos(a), middle + grow * half * Math.sin(a)});
+    }
+    return p;
+  }
+
+  /**
+   * The crown as drawn from above, stretched along the lay like the circle: its hindmost corner
+   * comes to the crown's base, its foremost to the tip; what lies aside stays as far aside.
+   *
+   * @param about corners east and north of the stem's axis, anticlockwise
+   */
+  static List<double[]> stretched(List<Position> about, double layDeg, double baseM, double tipM) {
+    Turn back = new Turn(Math.toRadians(layDeg));
+    List<double[]> p = new ArrayList<>(about.size());
+    double hind = Double.POSITIVE_INFINITY;
+    double fore = Double.NEGATIVE_INFINITY;
+    for (Position c : about) {
+      double s = c.eastM() * back.sin + c.northM() * back.cos;
+      p.add(new double[] {c.eastM() * back.cos - c.northM() * back.sin, s});
+      hind = Math.min(hind, s);
+      fore = Math.max(fore, s);
+    }
+    double stretch = (tipM - baseM) / (fore - hind);
+    for (double[] c : p) {
+      c[1] = baseM + (c[1] - hind) * stretch;
+    }
+    return p;
+  }
+
+  /** The ground covered while a crown slides on along the lay: its front half is drawn out. */
+  private static List<double[]> drawnOut(List<double[]> corners, double slideM) {
+    if (slideM <= 0) {
+      return corners;
+    }
+    int n = corners.size();
+    List<double[]> p = new ArrayList<>(n + 2);
+    for (int i = 0; i < n; i++) {
+      double[] c = corners.get(i);
+      // an edge that runs to the left is on the far side, and slides on with its corners
+      boolean before = corners.get((i + n - 1) % n)[0] > c[0];
+      boolean after = c[0] > corners.get((i + 1) % n)[0];
+      double[] on = {c[0], c[1] + slideM};
+      if (before && after) {
+        p.add(on);
+      } else if (before || after) {
+        p.add(before ? on : c);
+        p.add(before ? c : on);
+      } else {
+        p.add(c);
+      }
+    }
+    return p;
   }
 
   /** The far side: its corners are given from right to left. */

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.function.ToDoubleFunction;
+import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.site.Place;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Shape;
@@ -23,7 +24,8 @@ import org.locationtech.jts.geom.Geometry;
  * more.
  *
  * <p>All round: the ground distance to the nearest point below a conductor, as if the tree could
- * fall any way. Leaves out conductors that swing in the wind.
+ * fall any way. Either way the conductor may be blown aside: {@link #swingM} counts as one more
+ * position error.
  */
 public final class WireCheck {
   private final FallOutline outline;
@@ -38,7 +40,7 @@ public final class WireCheck {
   /**
    * Least distance of a wire in a lay.
    *
-   * @param leastM least distance that cannot be ruled out, position errors taken off [m]
+   * @param leastM least distance that cannot be ruled out, position errors and swing taken off [m]
    * @param askedM approach distance asked [m]
    * @param place where on the conductor, in plan
    */
@@ -52,7 +54,8 @@ public final class WireCheck {
    * A wire against the full circle about the stump.
    *
    * @param groundM distance on the ground to the nearest point below the conductor [m]
-   * @param errorM position errors of stump and wire [m]; count as if the wire were so much nearer
+   * @param errorM position errors of stump and wire and the wire's swing [m]; count as if the wire
+   *     were so much nearer
    * @param stopM H + approach distance: within it the work stops [m]
    * @param adviceM 2 H + approach distance: within it the wire's owner is asked first [m]
    * @param place the point below the conductor
@@ -80,7 +83,7 @@ public final class WireCheck {
     Range.check("height_m", cutHeightM, 0, 5, "m");
     double lean = Math.tan(Math.toRadians(outline.leanDeg()));
     double h = outline.heightM();
-    double ball = Math.max(outline.reachM(), Math.hypot(h, h * lean + outline.crownRadiusM()));
+    double ball = Math.max(outline.reachM(), Math.hypot(h, h * lean + outline.crownReachM()));
     double z = stump.groundM() + cutHeightM;
     double x = stump.at().eastM();
     double y = stump.at().northM();
@@ -89,7 +92,7 @@ public final class WireCheck {
         Shape.FACTORY
             .createLineString(
                 new Coordinate[] {new Coordinate(x, y), new Coordinate(top.eastM(), top.northM())})
-            .buffer(outline.crownRadiusM() / Math.cos(Math.PI / 48), 12);
+            .buffer(outline.crownReachM() / Math.cos(Math.PI / 48), 12);
     for (Wire wire : wires) {
       List<Chord> chords = new ArrayList<>();
       for (Segment3 s : Segment3.conductor(wire)) {
@@ -97,8 +100,13 @@ public final class WireCheck {
         chords.add(new Chord(s, new Edges(plan), Math.max(0, s.distanceTo(x, y, z) - ball)));
       }
       chords.sort(Comparator.comparingDouble(Chord::outsideBallM));
-      this.wires.add(new Ready(wire, chords, wire.errorM() + stump.errorM()));
+      this.wires.add(new Ready(wire, chords, wire.errorM() + swingM(wire) + stump.errorM()));
     }
+  }
+
+  /** How far wind may blow a conductor aside where it sags most, sag·sin 45° [m]: an allowance. */
+  public static double swingM(Wire wire) {
+    return wire.sagM() * Math.sin(Math.toRadians(Allowances.WIRE_SWING.value()));
   }
 
   /**

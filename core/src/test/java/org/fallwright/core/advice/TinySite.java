@@ -22,6 +22,7 @@ import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Spot;
 import org.fallwright.core.site.Stated;
 import org.fallwright.core.site.SubjectTree;
+import org.fallwright.core.site.ZoneChoices;
 
 /**
  * A level site with one back-leaner at its origin that leans south, a source on a spot 40 m north,
@@ -170,7 +171,11 @@ final class TinySite {
         List.of(),
         List.of(),
         null,
-        List.of());
+        List.of(),
+        List.of(),
+        List.of(),
+        List.of(),
+        new ZoneChoices(null, null, new ZoneChoices.AcceptedEnergy(1e6, "the climber", "today")));
   }
 
   private static Place place(Position at) {

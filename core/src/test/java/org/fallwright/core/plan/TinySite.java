@@ -88,7 +88,8 @@ final class TinySite {
           .put("hinge_width_m", 0.24)
           .set("hinge_thicknesses_m", mapper.readTree("[0.03]"));
       number((ObjectNode) s.get("conditions"), "gust_mps", 0);
-      for (String list : new String[] {"targets", "wires", "drop_zones", "spots"}) {
+      for (String list :
+          new String[] {"targets", "wires", "drop_zones", "spots", "people_points"}) {
         s.set(list, mapper.createArrayNode());
       }
       s.set(

@@ -20,6 +20,7 @@ import org.fallwright.core.site.LeftBehind;
 import org.fallwright.core.site.Looked;
 import org.fallwright.core.site.Offer;
 import org.fallwright.core.site.Origin;
+import org.fallwright.core.site.PeoplePoint;
 import org.fallwright.core.site.Picture;
 import org.fallwright.core.site.Place;
 import org.fallwright.core.site.Position;
@@ -31,10 +32,13 @@ import org.fallwright.core.site.Spot;
 import org.fallwright.core.site.Stated;
 import org.fallwright.core.site.StemDiameter;
 import org.fallwright.core.site.SubjectTree;
+import org.fallwright.core.site.TakenException;
+import org.fallwright.core.site.TapeTie;
 import org.fallwright.core.site.Target;
 import org.fallwright.core.site.WeighedSection;
 import org.fallwright.core.site.Wetness;
 import org.fallwright.core.site.Wire;
+import org.fallwright.core.site.ZoneChoices;
 
 /** Valid sites from a seed: every kind of thing, stated and not stated, over its whole range. */
 public final class RandomSites {
@@ -113,7 +117,24 @@ public final class RandomSites {
         gear.items().stream()
             .filter(i -> flag())
             .map(i -> new LeftBehind(i.id(), maybe(this::text)))
-            .toList());
+            .toList(),
+        ties(places),
+        list(
+            0,
+            3,
+            i ->
+                new PeoplePoint(
+                    "door " + i,
+                    any(PeoplePoint.Kind.values()),
+                    position(),
+                    any(Fix.values()),
+                    maybe(() -> in(0, 100)),
+                    null)),
+        list(0, 2, i -> new TakenException(text(), text(), text(), text())),
+        new ZoneChoices(
+            maybe(() -> in(0, 200)),
+            maybe(() -> in(1, 10)),
+            maybe(() -> new ZoneChoices.AcceptedEnergy(in(1, 1e6), text(), text()))));
   }
 
   private Case day(String id) {
@@ -150,6 +171,20 @@ public final class RandomSites {
         list(0, 3, i -> text()),
         text(),
         maybe(this::text));
+  }
+
+  private List<TapeTie> ties(List<String> places) {
+    return list(
+        0,
+        3,
+        i ->
+            new TapeTie(
+                "tree",
+                maybe(this::position),
+                one(places),
+                maybe(this::position),
+                in(0.1, 500),
+                maybe(() -> in(0, 10))));
   }
 
   private SubjectTree tree(double height) {
