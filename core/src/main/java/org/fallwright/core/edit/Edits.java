@@ -1,5 +1,6 @@
 package org.fallwright.core.edit;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Objects;
 import java.util.function.UnaryOperator;
@@ -7,10 +8,12 @@ import org.fallwright.core.edit.Edit.Kind;
 import org.fallwright.core.site.Anchor;
 import org.fallwright.core.site.Copy;
 import org.fallwright.core.site.Gear;
+import org.fallwright.core.site.PeoplePoint;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Spot;
 import org.fallwright.core.site.SubjectTree;
+import org.fallwright.core.site.TakenException;
 
 /** The changes there are. Distances [m], angles clockwise [degrees]. */
 public final class Edits {
@@ -84,8 +87,9 @@ public final class Edits {
   }
 
   /**
-   * Takes a thing off the plan, and its name from the places of the gear. The tree stays; an anchor
-   * that holds a leg of another stays as long as that does.
+   * Takes a thing off the plan, its name from the places of the gear, and the tapes to it and the
+   * exceptions about it. The tree stays; an anchor that holds a leg of another stays as long as
+   * that does.
    */
   public static Edit remove(String id) {
     return new Edit(
@@ -104,7 +108,7 @@ public final class Edits {
                   id + " holds a leg of " + two.id() + "; remove " + two.id() + " first");
             }
           }
-          return Things.put(withPlaces(site, p -> p.equals(id) ? null : p), id, null);
+          return Things.put(unnamed(site, id), id, null);
         });
   }
 
@@ -140,21 +144,78 @@ public final class Edits {
             throw new IllegalArgumentException(
                 "the name \"" + newId + "\" is used twice; each thing must have its own");
           }
-          if (thing instanceof SubjectTree) {
-            return Copy.with(site, "tree", thing);
-          }
-          // the places are given up and taken again, so that no name dangles in between
-          Site bare = withPlaces(site, p -> p.equals(id) ? null : p);
-          List<Anchor> legs =
-              bare.anchors().stream()
-                  .map(a -> a.id().equals(id) ? (Anchor) thing : renamedLegs(a, id, newId))
-                  .toList();
-          Site named =
-              thing instanceof Anchor
-                  ? Copy.with(bare, "anchors", legs)
-                  : Things.put(bare, id, thing);
-          return Copy.with(named, "gear", places(site.gear(), p -> p.equals(id) ? newId : p));
+          // what names it is given up and taken again, so that no name dangles in between
+          Site named = named(unnamed(site, id), id, thing);
+          return again(named, site, n -> n != null && n.equals(id) ? newId : n, newId);
         });
+  }
+
+  private static Site named(Site bare, String id, Record thing) {
+    if (!(thing instanceof Anchor)) {
+      return Things.put(bare, id, thing);
+    }
+    List<Anchor> anchors =
+        bare.anchors().stream()
+            .map(a -> a.id().equals(id) ? (Anchor) thing : renamedLegs(a, id, Things.id(thing)))
+            .toList();
+    return Copy.with(bare, "anchors", anchors);
+  }
+
+  /** The site without whatever names a thing: places of the gear, tapes, doors, exceptions. */
+  private static Site unnamed(Site site, String id) {
+    Site bare = Copy.with(site, "gear", places(site.gear(), p -> p.equals(id) ? null : p));
+    bare =
+        Copy.with(
+            bare,
+            "tapeTies",
+            site.tapeTies().stream()
+                .filter(t -> !t.from().equals(id) && !t.to().equals(id))
+                .toList());
+    bare =
+        Copy.with(
+            bare,
+            "peoplePoints",
+            site.peoplePoints().stream()
+                .map(p -> id.equals(p.of()) ? Copy.with(p, "of", null) : p)
+                .toList());
+    return Copy.with(
+        bare,
+        "exceptions",
+        site.exceptions().stream().filter(e -> !e.check().endsWith(" " + id)).toList());
+  }
+
+  /** The site with what named a thing before, under its new name. */
+  private static Site again(Site bare, Site before, UnaryOperator<String> name, String newId) {
+    Site site = Copy.with(bare, "gear", places(before.gear(), name));
+    site =
+        Copy.with(
+            site,
+            "tapeTies",
+            before.tapeTies().stream()
+                .map(t -> Copy.with(t, "from", name.apply(t.from())))
+                .map(t -> Copy.with(t, "to", name.apply(t.to())))
+                .toList());
+    List<PeoplePoint> points = new ArrayList<>();
+    for (int i = 0; i < before.peoplePoints().size(); i++) {
+      String of = name.apply(before.peoplePoints().get(i).of());
+      points.add(Copy.with(bare.peoplePoints().get(i), "of", of));
+    }
+    site = Copy.with(site, "peoplePoints", points);
+    return Copy.with(
+        site,
+        "exceptions",
+        before.exceptions().stream().map(e -> renamed(e, name, newId)).toList());
+  }
+
+  private static TakenException renamed(
+      TakenException e, UnaryOperator<String> name, String newId) {
+    int space = e.check().indexOf(' ');
+    for (int i = space; i >= 0; i = e.check().indexOf(' ', i + 1)) {
+      if (name.apply(e.check().substring(i + 1)).equals(newId)) {
+        return Copy.with(e, "check", e.check().substring(0, i + 1) + newId);
+      }
+    }
+    return e;
   }
 
   /** Puts a thing's whole entry in place of the one of its name. */
@@ -201,10 +262,6 @@ public final class Edits {
       return first.second().equals(id) ? Copy.with(first, "second", newId) : first;
     }
     return a;
-  }
-
-  private static Site withPlaces(Site site, UnaryOperator<String> change) {
-    return Copy.with(site, "gear", places(site.gear(), change));
   }
 
   private static Gear places(Gear gear, UnaryOperator<String> change) {

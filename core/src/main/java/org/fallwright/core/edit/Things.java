@@ -7,6 +7,7 @@ import java.util.stream.Stream;
 import org.fallwright.core.site.Anchor;
 import org.fallwright.core.site.Copy;
 import org.fallwright.core.site.DropZone;
+import org.fallwright.core.site.PeoplePoint;
 import org.fallwright.core.site.Place;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Shape;
@@ -28,7 +29,8 @@ public final class Things {
             site.wires().stream(),
             site.dropZones().stream(),
             site.anchors().stream().map(a -> (Record) a),
-            site.spots().stream())
+            site.spots().stream(),
+            site.peoplePoints().stream())
         .flatMap(s -> s)
         .map(Record.class::cast)
         .toList();
@@ -59,6 +61,9 @@ public final class Things {
     if (thing instanceof Spot s) {
       return s.id();
     }
+    if (thing instanceof PeoplePoint p) {
+      return p.id();
+    }
     throw new IllegalArgumentException(thing.getClass().getSimpleName() + " is no thing on a plan");
   }
 
@@ -66,6 +71,9 @@ public final class Things {
   public static List<Position> points(Record thing) {
     if (thing instanceof Wire w) {
       return w.poles().stream().map(Wire.Pole::at).toList();
+    }
+    if (thing instanceof PeoplePoint p) {
+      return List.of(p.at());
     }
     return shape(thing).map(Outline::points).orElseGet(() -> List.of(place(thing).at()));
   }
@@ -87,6 +95,9 @@ public final class Things {
     }
     if (thing instanceof SubjectTree t) {
       return tree(t, points.get(0));
+    }
+    if (thing instanceof PeoplePoint p) {
+      return Copy.with(p, "at", points.get(0));
     }
     return Copy.with(thing, "place", Copy.with(place(thing), "at", points.get(0)));
   }
@@ -125,6 +136,9 @@ public final class Things {
     }
     if (thing instanceof DropZone) {
       return "dropZones";
+    }
+    if (thing instanceof PeoplePoint) {
+      return "peoplePoints";
     }
     return thing instanceof Anchor ? "anchors" : "spots";
   }
