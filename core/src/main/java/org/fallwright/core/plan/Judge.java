@@ -11,6 +11,7 @@ import org.fallwright.core.pull.HaulLine;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullSource;
 import org.fallwright.core.pull.PullSources;
+import org.fallwright.core.pull.SourceFault;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.rules.RuleSet;
 import org.fallwright.core.rules.RuleSets;
@@ -128,15 +129,16 @@ public final class Judge {
     PullSource source = source(setup);
     PullSource driver = driver(setup);
     Route route = Route.of(site, setup, source, driver);
-    Statics statics = statics(setup, route);
+    Asked asked = ask(setup, route, source, driver);
+    Statics statics = asked.statics();
     TreeSide tree = statics.treeSide();
-    PullOffer offer = Reach.of(site, setup, route, Reach.Pulled.of(tree), source, driver);
+    PullOffer offer = asked.offer();
     GearParts parts = new GearParts(site, rules, tables).collect(setup, route, offer);
     return new Reckoned(
         judge(setup),
         subject.species(),
         subject.figures(),
-        subject.pull(setup, route),
+        subject.pull(setup, route, offer.stiffnessNPerM()),
         statics,
         route.points(),
         route.loads(),
@@ -212,10 +214,15 @@ public final class Judge {
   private Judged judge(Setup setup, boolean full) {
     PullSource source = source(setup);
     PullSource driver = driver(setup);
-    Route route = routes.computeIfAbsent(setup.withLay(0), w -> Route.of(site, w, source, driver));
-    Statics statics = statics(setup, route);
+    Route route = routes.get(setup.withLay(0));
+    if (route == null) { // not computed inside the map: a plugin that hangs must not hold a lock
+      route = Route.of(site, setup, source, driver);
+      routes.put(setup.withLay(0), route);
+    }
+    Asked asked = ask(setup, route, source, driver);
+    Statics statics = asked.statics();
     TreeSide tree = statics.treeSide();
-    PullOffer offer = Reach.of(site, setup, route, Reach.Pulled.of(tree), source, driver);
+    PullOffer offer = asked.offer();
     GearParts parts = new GearParts(site, rules, tables).collect(setup, route, offer);
     String name = name(setup, source);
 
@@ -287,9 +294,37 @@ public final class Judge {
       String line,
       List<LinePoint> points,
       List<LinePoint> haul,
-      HaulLine haulLine) {}
+      HaulLine haulLine,
+      Double sourceNPerM) {}
 
-  private Statics statics(Setup s, Route route) {
+  private record Asked(Statics statics, PullOffer offer) {}
+
+  /** What the source gives; one that is elastic itself is asked again with its own give in it. */
+  private Asked ask(Setup setup, Route route, PullSource source, PullSource driver) {
+    Statics statics = statics(setup, route, null);
+    PullOffer offer = offer(setup, route, statics, source, driver);
+    if (offer.stiffnessNPerM() == null) {
+      return new Asked(statics, offer);
+    }
+    Statics softer = statics(setup, route, offer.stiffnessNPerM());
+    PullOffer again = offer(setup, route, softer, source, driver);
+    if (!offer.stiffnessNPerM().equals(again.stiffnessNPerM())) {
+      throw new SourceFault(
+          source.describe().id(),
+          "The pull source \""
+              + source.describe().id()
+              + "\" changes its own stiffness with the line's, which it must not.",
+          null);
+    }
+    return new Asked(softer, again);
+  }
+
+  private PullOffer offer(
+      Setup setup, Route route, Statics statics, PullSource source, PullSource driver) {
+    return Reach.of(site, setup, route, Reach.Pulled.of(statics.treeSide()), source, driver);
+  }
+
+  private Statics statics(Setup s, Route route, Double sourceNPerM) {
     return reckoned.computeIfAbsent(
         new Pulled(
             s.layDeg(),
@@ -298,8 +333,9 @@ public final class Judge {
             s.line(),
             route.line(),
             route.haulOnSite(),
-            route.haulLine()),
-        p -> new Statics(subject.pull(s, route)));
+            route.haulLine(),
+            sourceNPerM),
+        p -> new Statics(subject.pull(s, route, sourceNPerM)));
   }
 
   /**

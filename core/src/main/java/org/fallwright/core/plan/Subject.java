@@ -87,8 +87,12 @@ final class Subject {
     return notes;
   }
 
-  /** The case of a setup whose line runs along a route. */
-  PullCase pull(Setup setup, Route route) {
+  /**
+   * The case of a setup whose line runs along a route.
+   *
+   * @param sourceNPerM stiffness of the source itself [N/m]; null: rigid
+   */
+  PullCase pull(Setup setup, Route route, Double sourceNPerM) {
     SubjectTree tree = site.tree();
     CutPlan cut = site.cut();
     Position shift = figures.crownShiftM();
@@ -127,7 +131,8 @@ final class Subject {
             points,
             points.stream().map(p -> stiffness).toList(),
             haul(route),
-            slack == null ? Allowances.SLACK.value() : slack),
+            slack == null ? Allowances.SLACK.value() : slack,
+            sourceNPerM),
         spread(setup, route));
   }
 

@@ -12,13 +12,25 @@ import org.fallwright.core.line.Point3;
  * @param legStiffnessN softest axial stiffness EA of each leg [N], one per leg
  * @param base further loaded leg at the tree, or null
  * @param slackM slack and sag to take in [m]
+ * @param sourceNPerM stiffness of the source itself, behind the last leg [N/m]; null: rigid
  */
 public record LineSet(
     double attachHeightM,
     List<Point3> points,
     List<Double> legStiffnessN,
     BaseLeg base,
-    double slackM) {
+    double slackM,
+    Double sourceNPerM) {
+  /** With a rigid source. */
+  public LineSet(
+      double attachHeightM,
+      List<Point3> points,
+      List<Double> legStiffnessN,
+      BaseLeg base,
+      double slackM) {
+    this(attachHeightM, points, legStiffnessN, base, slackM, null);
+  }
+
   /**
    * A further loaded leg, such as the base leg of a line over a fork.
    *

@@ -8,10 +8,11 @@ import org.fallwright.core.tree.StemTaper;
  * Stiffness of what the pull stretches, seen at the tree.
  *
  * <p>Line: 1/K = Σ L·r²/(EA) over all loaded legs as found standing, the softest EA, r the leg's
- * tension over the tension at the tree while holding. Path, while the stem is whole: 1/K_p = 1/K +
- * cos²α·Σ (w_a − z)²·Δz/(E·π·d⁴/64·(1 − loss)), z the middles of ⌈w_a/0.5⌉ equal slices from the
- * hinge to the attachment, E the mean green modulus, d inside the bark, α the rise of the first
- * leg. Left out: what slings, anchors and sag give.
+ * tension over the tension at the tree while holding; plus 1/k_S of a source that is elastic
+ * itself. Path, while the stem is whole: 1/K_p = 1/K + cos²α·Σ (w_a − z)²·Δz/(E·π·d⁴/64·(1 −
+ * loss)), z the middles of ⌈w_a/0.5⌉ equal slices from the hinge to the attachment, E the mean
+ * green modulus, d inside the bark, α the rise of the first leg. Left out: what slings, anchors and
+ * sag give.
  *
  * @param lineNPerM K [N/m]
  * @param pathNPerM K_p [N/m]
@@ -40,6 +41,9 @@ record PathStiffness(double lineNPerM, double pathNPerM, double riseRad, double 
     if (line.base() != null) {
       LineSet.BaseLeg b = line.base();
       give += b.lengthM() * b.ratio() * b.ratio() / b.stiffnessN();
+    }
+    if (line.sourceNPerM() != null) {
+      give += 1 / line.sourceNPerM();
     }
     double wa = line.attachHeightM();
     int slices = (int) Math.ceil(wa / SLICE);

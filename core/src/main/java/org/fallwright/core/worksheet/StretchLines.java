@@ -70,6 +70,11 @@ final class StretchLines {
       w.given("j_h", "its tension over that at the tree", haul.ratio(), NUMBER, Basis.STATICS);
       give.add("L_h × j_h^2 ÷ EA_h");
     }
+    Double own = r.pull().line().sourceNPerM();
+    if (own != null) {
+      w.given("k_S", "stiffness of the source itself", own, STIFFNESS, Basis.SOURCE);
+      give.add("1 ÷ k_S");
+    }
     w.work("L_all", "length of all legs", String.join(" + ", length), LENGTH, Basis.GEOMETRY);
     w.work(
         "c_L",
