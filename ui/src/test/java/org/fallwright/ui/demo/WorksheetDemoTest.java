@@ -90,6 +90,38 @@ class WorksheetDemoTest {
             anchor(s, "A1", "rated")
                 .put("breaking_load_N", 150000.0)
                 .put("vouched_by", "the owner"));
+    sites.put(
+        "pickets",
+        s ->
+            anchor(s, "A1", "pickets")
+                .put("sling_height_m", 0.1)
+                .put("holdfast", "two-one")
+                .put("count", 1)
+                .put("soil", "undisturbed-loam")
+                .put("wet", true));
+    sites.put(
+        "buried log",
+        s ->
+            anchor(s, "A1", "deadman")
+                .put("sling_height_m", 0.1)
+                .put("depth_m", 1.6)
+                .put("face_height_m", 0.45)
+                .put("length_m", 1.8)
+                .put("line_run", 3)
+                .put("soil", "soft"));
+    sites.put(
+        "two legs",
+        s -> {
+          ObjectNode legs = anchor(s, "A1", "two-legs").put("first", "R1").put("second", "R2");
+          for (int i = 1; i < 3; i++) {
+            ObjectNode r =
+                legs.deepCopy().retain("id", "place", "sling_height_m", "rejected", "land");
+            r.put("type", "rated").put("id", "R" + i);
+            ((ObjectNode) r.get("place")).putArray("at").add(i == 1 ? 12 : 34).add(60);
+            r.put("breaking_load_N", 1e5).put("vouched_by", "the owner");
+            ((ArrayNode) s.get("anchors")).add(r);
+          }
+        });
     sites.put("sources disagree", s -> tree(s).put("species", "sitka-spruce"));
     sites.put("iced", s -> tree(s).put("ice_or_wet", true));
     sites.put(
