@@ -12,8 +12,8 @@ import org.fallwright.core.pull.SourceDescription.Parameter;
 import org.fallwright.core.pull.SourceDescription.PlaceKind;
 
 /** A source that gives one pull, whatever the ground; it holds what it pulls and is captured. */
-final class SteadyPull implements PullSource {
-  static final PullSources ONLY = () -> List.of(new SteadyPull());
+public final class SteadyPull implements PullSource {
+  public static final PullSources ONLY = () -> List.of(new SteadyPull());
 
   @Override
   public SourceDescription describe() {
