@@ -18,12 +18,20 @@ import org.junit.jupiter.api.Test;
 class RemediesPropertyTest {
   private static final int SITES = 40;
 
+  /** Random sites whose source is weak, so that many do not work. */
+  private static TinySite weak(long seed) {
+    TinySite t = TinySite.random(new Random(seed));
+    t.lowN *= 0.4;
+    t.leanDeg += 3;
+    return t;
+  }
+
   @Test
   void whatIsProposedIsAsGoodAsSaidWhenItIsMadeAndPlanned() {
     int proposals = 0;
     Set<Kind> kinds = new TreeSet<>();
     for (long seed = 1; seed <= SITES; seed++) {
-      TinySite t = TinySite.random(new Random(seed));
+      TinySite t = weak(seed);
       Site site = t.site();
       Remedies all = Remedies.of(site, SteadyPull.ONLY, t.direct());
       for (Remedy r : all.remedies()) {
@@ -48,7 +56,7 @@ class RemediesPropertyTest {
   @Test
   void theyComeInTheOrderOfTheirEffort() {
     for (long seed = 1; seed <= SITES; seed++) {
-      TinySite t = TinySite.random(new Random(seed));
+      TinySite t = weak(seed);
       assertThat(Remedies.of(t.site(), SteadyPull.ONLY, t.redirected()).remedies())
           .as("seed %d", seed)
           .isSortedAccordingTo(Remedies.SMALLEST_FIRST);
