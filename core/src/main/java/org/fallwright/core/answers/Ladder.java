@@ -160,8 +160,8 @@ public record Ladder(
             .orElse(null);
     Position at =
         worst == null || worst.place() == null ? place(site, judged, rung) : worst.place();
-    if (worst == null) {
-      boolean refused = rung == Rung.ANCHOR && refused(judged);
+    boolean refused = rung == Rung.ANCHOR && refused(judged);
+    if (worst == null || refused) {
       return new Step(
           rung,
           refused ? Verdict.NOT_WORKABLE : Verdict.WORKABLE,

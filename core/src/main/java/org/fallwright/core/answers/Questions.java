@@ -21,6 +21,7 @@ import org.fallwright.core.site.Quantity;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Spot;
 import org.fallwright.core.site.Wire;
+import org.fallwright.core.units.DisplayUnits;
 
 /**
  * What is still open on a site, ranked by what it decides: how many of the leading setups have
@@ -93,15 +94,28 @@ public record Questions(int setups, List<Question> questions) {
     double[] ends = ends(e, asked.site.tree().heightM().value());
     return new Question(
         e.field(),
-        String.format(
-            Locale.ROOT,
-            "What is the %s really: %.4g or %.4g %s?",
-            e.name(),
-            ends[0],
-            ends[1],
-            e.unit()),
+        "What is the "
+            + e.name()
+            + " really: "
+            + shown(asked.site, e, ends[0])
+            + " or "
+            + shown(asked.site, e, ends[1])
+            + "?",
         asked.differ(s -> at(e, s, ends[0]), s -> at(e, s, ends[1])),
         e.quantity().how() == How.UNKNOWN);
+  }
+
+  private static String shown(Site site, Entry e, double value) {
+    DisplayUnits in = site.display().units();
+    return switch (e.unit()) {
+      case "deg" -> in.angle(Math.toRadians(value));
+      case "kg" -> in.mass(value);
+      case "m/s" -> in.speed(value);
+      default ->
+          e.component().startsWith("dbh") || e.component().startsWith("stump")
+              ? in.smallLength(value)
+              : in.length(value);
+    };
   }
 
   private static void places(Site site, Asked asked, List<Question> all) {

@@ -186,14 +186,14 @@ public final class Judge {
     }
     PullSource source = source(setup);
     Route route = Route.of(site, setup, source, null);
-    Statics statics = statics(setup, route);
+    Statics statics = statics(setup, route, null);
     Reach.Pulled pulled = Reach.Pulled.of(statics.treeSide());
     return new StandingGround(
         site,
         rules,
         knowledge,
         setup,
-        new PlanField(subject.pull(setup, route)),
+        new PlanField(subject.pull(setup, route, null)),
         Reach.lowByRise(site, setup, route, pulled, source),
         route,
         landing.widest(setup.layDeg()),
