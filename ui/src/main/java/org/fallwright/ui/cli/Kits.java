@@ -35,8 +35,7 @@ final class Kits {
   static Site without(Site site, Path siteFile, List<String> items) {
     Site left = site;
     for (String item : items) {
-      String where =
-          of(site, siteFile).flatMap(k -> k.trucksOf(item)).orElse(null);
+      String where = of(site, siteFile).flatMap(k -> k.trucksOf(item)).orElse(null);
       try {
         left = left.leaving(new LeftBehind(item, where));
       } catch (IllegalArgumentException e) {

@@ -62,10 +62,7 @@ final class LoadOutCommand extends Subcommand {
     }
     Planned planned = Planned.of(home, file);
     List<Judged> setups = setups(planned);
-    Kit kit =
-        kitFile == null
-            ? Kits.of(planned.site(), file).orElse(null)
-            : Kits.read(kitFile);
+    Kit kit = kitFile == null ? Kits.of(planned.site(), file).orElse(null) : Kits.read(kitFile);
     LoadOut list = LoadOut.of(planned.site(), setups, kit);
     if (out == null) {
       out().print(LoadOutText.of(list));
@@ -92,9 +89,7 @@ final class LoadOutCommand extends Subcommand {
     List<Judged> ranked = planned.plan().ranked();
     if (rank == null) {
       List<Judged> possible =
-          ranked.stream()
-              .filter(j -> Exit.of(j.verdict()) == Exit.DONE)
-              .toList();
+          ranked.stream().filter(j -> Exit.of(j.verdict()) == Exit.DONE).toList();
       if (possible.isEmpty()) {
         throw new Refused("No setup is workable or tight, so there is nothing to load for.");
       }

@@ -44,8 +44,7 @@ final class PlanCommand extends Subcommand {
     if (top < 1) {
       throw new Refused("--top is " + top + "; it must be at least 1.");
     }
-    Planned planned =
-        Planned.of(home, file, Kits.without(Planned.read(file), file, without));
+    Planned planned = Planned.of(home, file, Kits.without(Planned.read(file), file, without));
     if (json != null) {
       WholeFile.write(json, planned.json());
     }
