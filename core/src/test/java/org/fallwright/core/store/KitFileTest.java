@@ -85,6 +85,10 @@ class KitFileTest {
         .hasMessage("job.json is empty; a kit file holds one JSON object.");
     assertThatThrownBy(() -> KitFile.read(Samples.utf8("[1]"), "job.json"))
         .hasMessage("job.json holds a list of 1; a kit file holds one JSON object.");
+    assertThatThrownBy(() -> KitFile.read(Samples.utf8(Samples.present()), "job.json"))
+        .hasMessage("job.json is a site file, not a kit file.");
+    assertThatThrownBy(() -> SiteFile.read(DEMO))
+        .hasMessage("two-trucks.fallkit.json is a kit file, not a site file.");
     assertThatThrownBy(() -> KitFile.read(folder))
         .hasMessage(folder.getFileName() + " is a folder, not a kit file.");
     assertThatThrownBy(() -> KitFile.read(Samples.utf8(sample() + "{}"), "job.json"))

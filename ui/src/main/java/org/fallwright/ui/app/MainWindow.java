@@ -50,8 +50,7 @@ public final class MainWindow extends JFrame {
     super(Messages.text("window.title"));
     this.wiring = wiring;
     StatusBar status = new StatusBar(this::stop, this::cautions);
-    StartCard start =
-        new StartCard(this::choose, wiring.demo() == null ? null : this::openDemo);
+    StartCard start = new StartCard(this::choose, wiring.demo() == null ? null : this::openDemo);
     desk = new Desk(open, look, status, start);
     desk.onTicked(this::ticked);
     saving = new Saving(this, open, wiring.sites(), wiring.demo(), this::title);

@@ -80,7 +80,9 @@ class WindowTest {
     assertThat(onEvents(() -> window.shown().chosen().orElseThrow().setup().line()))
         .isEqualTo("L2");
     SwingUtilities.invokeAndWait(() -> window.saving().save());
-    assertThat(SiteFile.read(folder.resolve("oak.fallsite.json")).leftBehind()).extracting(l -> l.item()).containsExactly("L1");
+    assertThat(SiteFile.read(folder.resolve("oak.fallsite.json")).leftBehind())
+        .extracting(l -> l.item())
+        .containsExactly("L1");
     assertThat(onEvents(() -> window.getTitle())).doesNotContain("edited");
   }
 
