@@ -5,10 +5,12 @@ import java.util.Collections;
 import java.util.List;
 import org.fallwright.core.line.LegLoads;
 import org.fallwright.core.line.Point3;
+import org.fallwright.core.plan.CellLoad;
 import org.fallwright.core.plan.Figures;
 import org.fallwright.core.plan.Judge;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.LinePoint;
+import org.fallwright.core.plan.Reckoned;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.units.DisplayUnits;
 
@@ -17,9 +19,12 @@ import org.fallwright.core.units.DisplayUnits;
  *
  * <p>Hauling, each leg nearer the source carries the tension before it over the block's efficiency;
  * holding, all legs carry the same, for friction is never credited. A sling at a block carries the
- * resultant of both legs. The haul part of a block system is not among the places.
+ * resultant of both legs. The haul part of a block system carries its share of the source end's
+ * tension: hauling over sheaves that pass on as little as is reckoned with, holding over sheaves
+ * without friction.
  *
- * @param places the places from the tree outwards; empty where the tree cannot be moved
+ * @param places the places from the tree outwards, the load cell's own among them; empty where the
+ *     tree cannot be moved
  * @param sentence how to use them, in one sentence
  */
 public record Readings(List<Reading> places, String sentence) {
@@ -64,14 +69,22 @@ public record Readings(List<Reading> places, String sentence) {
     List<Reading> places = places(judged);
     Reading last = places.get(places.size() - 1);
     String end = judged.setup().place();
+    Reckoned r = judge.reckon(judged.setup());
     if (site.anchor(end).isPresent()) {
-      judge.parts(judged.setup()).stream()
+      r.ratios().parts().stream()
           .filter(p -> p.name().equals("sling at " + end))
           .findFirst()
           .ifPresent(
               p -> places.add(reading(p.name(), judged.figures(), p.hauling(), p.holding())));
     }
-    return new Readings(places, sentence(site.display().units(), last));
+    double perTree = r.loads().sourceEndPerTree();
+    CellLoad.haulPart(judged.setup(), perTree, r.offer())
+        .ifPresent(c -> places.add(reading(judged, c)));
+    Reading own =
+        CellLoad.of(site, judged.setup(), perTree, r.offer())
+            .map(c -> reading(judged, c))
+            .orElse(last);
+    return new Readings(places, sentence(site.display().units(), own));
   }
 
   private static String sentence(DisplayUnits in, Reading at) {
@@ -112,6 +125,10 @@ public record Readings(List<Reading> places, String sentence) {
       }
     }
     return places;
+  }
+
+  private static Reading reading(Judged j, CellLoad c) {
+    return reading(c.place(), j.figures(), c.hauling(), c.holding());
   }
 
   private static Reading reading(String at, Figures f, double hauling, double holding) {

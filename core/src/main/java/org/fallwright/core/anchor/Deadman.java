@@ -96,10 +96,18 @@ public record Deadman(
    * @param soft whether the soil is fine-grained, sandy or very wet
    */
   public static double holdsN(double depthM, int run, double faceM, double lengthM, boolean soft) {
-    int depthFt = Math.min(DEEPEST_FT, (int) (depthM / Units.FOOT + ROUNDING_FT));
     double area = faceM / Units.FOOT * (lengthM / Units.FOOT - Hardware.value("deadman.trench"));
-    double pounds = power(depthFt, run) * Math.max(0, area);
+    double pounds = power(wholeFeet(depthM), run) * Math.max(0, area);
     return pounds * Units.POUND_FORCE * (soft ? Hardware.value("deadman.soft") : 1);
+  }
+
+  private static int wholeFeet(double depthM) {
+    return Math.min(DEEPEST_FT, (int) (depthM / Units.FOOT + ROUNDING_FT));
+  }
+
+  /** Holding power of that log's face under that load, in loam [lb/ft²]. */
+  public static double power(Anchor.BuriedLog log, AnchorLoad load) {
+    return power(wholeFeet(log.depthM()), Math.min(log.lineRun(), runOf(load.upliftDeg())));
   }
 
   /** The flattest slope of the table that is no flatter than the load's; 0 past 45 degrees. */

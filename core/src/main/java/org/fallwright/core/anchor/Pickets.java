@@ -1,6 +1,7 @@
 package org.fallwright.core.anchor;
 
 import java.util.Locale;
+import org.fallwright.core.reference.Figure;
 import org.fallwright.core.reference.Hardware;
 import org.fallwright.core.site.Anchor;
 import org.fallwright.core.site.Anchor.Holdfast;
@@ -66,6 +67,17 @@ public final class Pickets {
           case THREE_TWO_ONE -> inGround(woodN("three-two-one"), 6, soil);
         };
     return wet ? ground * Hardware.value("picket.wet") : ground;
+  }
+
+  /** A row of the table that its holding power is from. */
+  public static Figure row(Anchor.Pickets p) {
+    boolean pins = p.holdfast() == Holdfast.THIN_PINS || p.holdfast() == Holdfast.THICK_PINS;
+    return Hardware.of(
+        pins || p.soil() != PicketSoil.UNDISTURBED_LOAM
+            ? "pin.1in.cohesive-poor"
+            : p.holdfast() == Holdfast.STEEL_ROW
+                ? "picket.steel"
+                : "picket." + p.holdfast().name().toLowerCase(Locale.ROOT).replace('_', '-'));
   }
 
   private static double inGround(double inLoamN, int pickets, PicketSoil soil) {

@@ -1,9 +1,12 @@
 package org.fallwright.core.line;
 
+import java.util.Comparator;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.stream.Stream;
+import org.fallwright.core.reference.Figure;
 import org.fallwright.core.reference.Hardware;
+import org.fallwright.core.reference.Kind;
 import org.fallwright.core.units.Range;
 import org.fallwright.core.units.Units;
 
@@ -103,14 +106,31 @@ public enum FibreRope {
    * @param breakingN breaking load on the label [N]
    */
   public double softestN(double breakingN) {
+    return Range.check("breaking_load_N", breakingN, 100, 5e6, "N") / softness().value();
+  }
+
+  /** The greatest stretch over the share of the breaking load at which it is reached. */
+  Share softness() {
+    String what = "stretch over share of the breaking load, the softest known";
     if (this == MANILA) {
-      return NYLON.softestN(breakingN);
+      return new Share(what + ": of nylon", NYLON.softness().value(), Kind.PLANNING_ALLOWANCE, "");
     }
-    Range.check("breaking_load_N", breakingN, 100, 5e6, "N");
+    FibreRope of = this == POLYPROPYLENE ? NYLON : this;
     return Stream.of(At.FIFTH, At.BREAK)
-        .flatMap(at -> stretch(at).stream().map(s -> at.share() * breakingN / s.high()))
-        .mapToDouble(n -> n)
-        .min()
+        .flatMap(
+            at -> {
+              Optional<Figure> row =
+                  Hardware.find("fibre." + of.key + ".stretch-" + at.key + ".high");
+              return stretch(at).stream()
+                  .map(
+                      s ->
+                          new Share(
+                              what,
+                              s.high() / at.share(),
+                              row.orElseThrow().kind(),
+                              row.orElseThrow().source()));
+            })
+        .max(Comparator.comparingDouble(Share::value))
         .orElseThrow();
   }
 
@@ -119,10 +139,13 @@ public enum FibreRope {
     return Hardware.value("fibre." + key + ".wet");
   }
 
-  /** Share of its strength that a synthetic line keeps after two years in the weather. */
-  public OptionalDouble weathered() {
-    return this == MANILA
-        ? OptionalDouble.empty()
-        : OptionalDouble.of(Hardware.value("fibre.weather"));
+  /** Share of its strength that it keeps after two years in the weather. */
+  public double weathered() {
+    return weather().value();
+  }
+
+  /** The same with what stands behind it: published of synthetic lines, of manila none was read. */
+  Figure weather() {
+    return Hardware.of(this == MANILA ? "fibre.manila.weather" : "fibre.weather");
   }
 }

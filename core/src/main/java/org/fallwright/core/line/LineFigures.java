@@ -61,7 +61,9 @@ public record LineFigures(
         line.wet() && fibre
             ? Share.row("fibre." + word(line) + ".wet")
             : Share.whole("dry, or not of fibre"),
-        line.weathered() && fibre ? Share.row("fibre.weather") : Share.whole("no years of weather"),
+        line.weathered() && fibre
+            ? Share.of(bare(line).fibre().weather())
+            : Share.whole("no years of weather"),
         line.age() == null
             ? Share.whole("as new")
             : Share.stated("what age and wear leave", line.age()),
@@ -119,9 +121,12 @@ public record LineFigures(
   }
 
   private static double softestN(Gear.Line line, double breakingN) {
-    return line.material().fibre()
-        ? bare(line).fibre().softestN(breakingN)
-        : WireRope.softestN(breakingN);
+    return breakingN / bare(line).softness().value();
+  }
+
+  /** Stretch over the share of the breaking load, the softest known of its material. */
+  public Share softness() {
+    return line.material().fibre() ? fibre().softness() : WireRope.softness();
   }
 
   private static LineFigures bare(Gear.Line line) {

@@ -13,6 +13,9 @@ import org.fallwright.core.units.Units;
  * @param spacingM least spacing [m]
  */
 public record WireClips(int count, double spacingM) {
+  /** Thickest rope of the table [m]. */
+  public static final double THICKEST_M = 1.5 * Units.INCH;
+
   private static final String[] SIZE = {
     "1/2", "5/8", "3/4", "7/8", "1", "1-1/8", "1-1/4", "1-3/8", "1-1/2"
   };
@@ -25,7 +28,7 @@ public record WireClips(int count, double spacingM) {
    * @param dropForged whether the clips are drop-forged; others need one more
    */
   public static WireClips of(double ropeM, boolean dropForged) {
-    Range.check("diameter_m", ropeM, 0.003, 1.5 * Units.INCH, "m");
+    Range.check("diameter_m", ropeM, 0.003, THICKEST_M, "m");
     int eighths = (int) Math.ceil(8 * ropeM / Units.INCH - 1e-6);
     String size = SIZE[Math.max(0, eighths - EIGHTHS)];
     int count = (int) Hardware.value("wire.clips." + size);

@@ -1,5 +1,6 @@
 package org.fallwright.core.line;
 
+import org.fallwright.core.reference.Figure;
 import org.fallwright.core.reference.Hardware;
 import org.fallwright.core.reference.Kind;
 import org.fallwright.core.units.Range;
@@ -39,10 +40,17 @@ public enum WireRope {
    * for 6×19; chain of the same breaking load counts as no stiffer (planning allowance).
    */
   public static double softestN(double breakingN) {
-    Range.check("breaking_load_N", breakingN, 100, 5e6, "N");
-    return Math.min(
-        0.2 * breakingN / Hardware.value("wire.stretch-20.high"),
-        breakingN / Hardware.value("wire.stretch-break.high"));
+    return Range.check("breaking_load_N", breakingN, 100, 5e6, "N") / softness().value();
+  }
+
+  /** The greatest stretch over the share of the breaking load at which it is reached. */
+  static Share softness() {
+    Figure atBreak = Hardware.of("wire.stretch-break.high");
+    return new Share(
+        "stretch over share of the breaking load, the softest known of wire rope",
+        Math.max(Hardware.value("wire.stretch-20.high") / 0.2, atBreak.value()),
+        atBreak.kind(),
+        atBreak.source());
   }
 
   /**

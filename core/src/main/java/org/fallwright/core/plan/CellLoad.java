@@ -19,7 +19,7 @@ public record CellLoad(String place, double hauling, double holding) {
    *
    * @param endPerTree tension at the source's line end per newton at the tree, hauling
    */
-  static Optional<CellLoad> of(Site site, Setup setup, double endPerTree, PullOffer offer) {
+  public static Optional<CellLoad> of(Site site, Setup setup, double endPerTree, PullOffer offer) {
     Gear.LoadCell cell = site.gear().loadCell();
     if (cell == null) {
       return Optional.empty();
@@ -40,7 +40,7 @@ public record CellLoad(String place, double hauling, double holding) {
   }
 
   /** The haul part of a block system; empty: there is none. */
-  static Optional<CellLoad> haulPart(Setup setup, double endPerTree, PullOffer offer) {
+  public static Optional<CellLoad> haulPart(Setup setup, double endPerTree, PullOffer offer) {
     return setup.driver() == null
         ? Optional.empty()
         : Optional.of(

@@ -91,7 +91,9 @@ final class GearParts {
   private void gather(Setup setup, Route route, PullOffer offer) {
     LegLoads loads = route.loads();
     double end = loads.sourceEndPerTree();
-    PartStrength rope = PartStrength.line(lineFigures(site, setup), rules.fibreFactor().value());
+    LineFigures line = lineFigures(site, setup);
+    PartStrength rope =
+        PartStrength.line(line, line.line().material().fibre() ? rules.fibreFactor().value() : 1);
     add("line " + setup.line(), rope, end, 1);
     if (JoinedLines.parts(site, setup.line()).size() > 1) {
       connector("joint of " + setup.line(), end, 1, false);

@@ -186,6 +186,7 @@ public final class Judge {
       loads = loads(r, tree);
       if (full) {
         notes.addAll(SetupNotes.of(site, in, setup, tree, r, offer));
+        notes.addAll(GearNotes.of(site, in, setup, parts, cell.isPresent()));
       }
     } else {
       figures = FiguresOf.unmovable(route, tree, zones);

@@ -6,6 +6,7 @@ import java.util.Locale;
 import java.util.Optional;
 import java.util.stream.Stream;
 import org.fallwright.core.line.LegLoads;
+import org.fallwright.core.line.LineFigures;
 import org.fallwright.core.line.PathFit;
 import org.fallwright.core.line.Point3;
 import org.fallwright.core.pull.PullOffer;
@@ -75,6 +76,7 @@ final class KitChecks {
               sentence(fit.shortOf())
                   + least(spares.line(l -> fit(legs, List.of(l), offer, takeUp).fits())));
     }
+    overBlock(setup);
     haulLine(setup, route, takeUp);
     enough(
         "blocks", "block", site.gear().blocks(), spares.all().blocks(), setup.redirects().size());
@@ -102,6 +104,41 @@ final class KitChecks {
     int end = points.size() - 1;
     return site.spot(place)
         .flatMap(s -> Nearer.by(points.get(end - 1).minus(points.get(end)), shorterM, in));
+  }
+
+  /** Whether the line can run over the block at all: no chain does, nor a rope thicker than it. */
+  private void overBlock(Setup setup) {
+    if (!setup.redirects().isEmpty()) {
+      JoinedLines.parts(site, setup.line()).forEach(this::overBlock);
+    }
+  }
+
+  private void overBlock(Gear.Line line) {
+    Double sheave = Route.block(site).sheaveDiameterM();
+    if (line.material().chain()) {
+      grade.rule(
+          "sheave",
+          0,
+          1,
+          "",
+          0,
+          null,
+          () -> "Line " + line.id() + " is a chain: it does not run over a block.");
+    } else if (sheave != null && sheave < LineFigures.LEAST_RATIO * line.diameterM()) {
+      grade.rule(
+          "sheave",
+          sheave,
+          LineFigures.LEAST_RATIO * line.diameterM(),
+          "m",
+          0,
+          null,
+          () ->
+              "The sheave of block "
+                  + Route.block(site).id()
+                  + " is thinner than line "
+                  + line.id()
+                  + ": what so sharp a bend leaves is not known.");
+    }
   }
 
   /** The line of a block system: its parts over the take-up, its haul leg, wraps and tails. */

@@ -3,6 +3,7 @@ package org.fallwright.core.plan;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import org.fallwright.core.line.ElasticLine;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.site.Site;
@@ -42,12 +43,13 @@ final class SetupNotes {
                   ? "nothing bounds the jerk: no line of this stiffness holds it."
                   : "up to " + in.both(u -> u.forceAtLeast(peak)) + " can come on it."));
     }
-    double energy = t.workingN() * t.workingN() / (2 * t.lineNPerM());
+    ElasticLine line = ElasticLine.of(t.workingN(), t.lineNPerM());
     notes.add(
         String.format(
             Locale.ROOT,
-            "The loaded line stores %s. Nobody on its axis, past its ends or inside its angle%s.",
-            in.energy(energy),
+            "The loaded line stretches %s and stores %s. Nobody on its axis, past its ends or inside its angle%s.",
+            in.length(line.stretchM()),
+            in.energy(line.energyJ()),
             offer.operators() > 0 ? "; who works the source accepts it by name" : ""));
     return notes;
   }

@@ -403,6 +403,12 @@ public final class Allowances {
           1.25,
           "",
           "crown's mass under rain, wet snow or rime over its mass without; glaze can be far more");
+  public static final Figure STEM_MEASURED_FROM =
+      allowance(
+          "stem-measured-from",
+          0.25,
+          "",
+          "share of the tree's height from which a diameter must be known for a mass by the stem");
   public static final Figure MASS_CENTRE_SHARE =
       allowance(
           "mass-centre-share",

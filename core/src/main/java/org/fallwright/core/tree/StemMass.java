@@ -7,8 +7,8 @@ import org.fallwright.core.units.Range;
 /**
  * Green mass of a stem: volume times green density. The density of a kind of tree is what the
  * sources give, and where the moisture of its heartwood and sapwood is known a stem can be as dry
- * as the one and as wet as the other: low and high are the ends of all of it. A check beside the
- * mass equation, not in place of it.
+ * as the one and as wet as the other: low and high are the ends of all of it. A tree's mass where
+ * the site asks for it ({@link DerivedMass}), else a check beside the mass equation.
  *
  * @param lowKg with the least density [kg]: where mass helps
  * @param massKg with the nominal density [kg]

@@ -19,7 +19,7 @@ import org.fallwright.core.site.SubjectTree;
  * @param massKg green mass above the cut [kg]
  * @param massSdKg its standard deviation, everything in it [kg]
  * @param massOwnSdKg the same without what DBH brings, for where DBH is varied on its own [kg]
- * @param massDerived whether the mass is by equation
+ * @param massDerived whether the mass was neither entered nor weighed
  * @param massCentreM height of the mass centre above the ground [m]
  * @param massCentreSdM its standard deviation [m]
  * @param crownShiftM how far a one-sided crown moves the mass centre off the stem's axis, [east,

@@ -1,7 +1,5 @@
 package org.fallwright.core.tree;
 
-import static org.fallwright.core.reference.Spreads.What.DBH;
-import static org.fallwright.core.reference.Spreads.What.GREEN_DENSITY;
 import static org.fallwright.core.reference.Spreads.What.MASS;
 
 import java.util.ArrayList;
@@ -18,12 +16,11 @@ import org.fallwright.core.site.SubjectTree;
 
 /**
  * Mass of the tree and where it sits. The best that was entered is taken: pieces that were weighed,
- * else a mass entered, else dry mass by {@link MassEquation} times the species' green factor.
+ * else a mass entered, else the {@link DerivedMass} that the site asks for.
  *
- * <p>A mass by equation is that of the whole tree above the ground: the stump left standing is not
- * taken off, which is the safe side; the leaves of a bare broadleaf are. Its spread is that of the
- * equation ({@link Allowances#MASS_RESIDUAL}) and of the green density, and what DBH brings on top:
- * s² = s_own² + (b1·s_D/D)²·m². The green crown is taken to have the share of the dry one.
+ * <p>A derived mass is that of the whole tree above the ground: the stump left standing is not
+ * taken off, which is the safe side; the leaves of a bare broadleaf are. Its spread: s² = s_own² +
+ * s_D², the second what DBH brings. The green crown is taken to have the share of the dry one.
  *
  * <p>Ice, wet snow or rain comes on top of any of them: {@link CrownLoad} with {@link
  * Allowances#ICE_OR_WET_CROWN}.
@@ -31,7 +28,7 @@ import org.fallwright.core.site.SubjectTree;
  * @param massKg green mass above the cut [kg]
  * @param sdKg its standard deviation, everything in it [kg]
  * @param ownSdKg the same without what DBH brings [kg]
- * @param derived whether the mass is by equation
+ * @param derived whether the mass is derived
  * @param centreM height of the mass centre above the ground [m]
  * @param centreSdM its standard deviation [m]
  * @param crownShiftM crown share × offset of the crown from the stem's axis, [east, north] [m]
@@ -49,13 +46,13 @@ record TreeMass(
   private static final Position NONE = new Position(0, 0);
 
   static TreeMass of(SubjectTree tree, CutPlan cut, Species species) {
-    TreeMass still = weighed(tree, species);
+    TreeMass still = weighed(tree, cut, species);
     boolean aside = tree.crownOffsetM() != null || tree.crownOutline() != null;
     if (!aside && !tree.iceOrWet()) {
       return still;
     }
     List<String> remarks = new ArrayList<>(still.remarks);
-    double share = crownShare(tree, species);
+    double share = DerivedMass.crownShare(tree, species);
     if (tree.crownShare() == null) {
       remarks.add(said("crown taken as %.0f %% of the mass, by DBH", 100 * share));
     }
@@ -92,23 +89,9 @@ record TreeMass(
         List.copyOf(remarks));
   }
 
-  /** Share of the crown in the mass: as entered, else by DBH. */
-  private static double crownShare(SubjectTree tree, Species species) {
-    if (tree.crownShare() != null) {
-      return tree.crownShare();
-    }
-    DryShares shares = DryShares.of(species.broadleaf(), tree.dbhM().value());
-    return bare(tree, species) ? shares.bareCrown() : shares.crown();
-  }
-
-  private static boolean bare(SubjectTree tree, Species species) {
-    return species.broadleaf() && !tree.inLeaf();
-  }
-
   /** The tree without a load on its crown and upright over its axis. */
-  private static TreeMass weighed(SubjectTree tree, Species species) {
+  private static TreeMass weighed(SubjectTree tree, CutPlan cut, Species species) {
     List<String> remarks = new ArrayList<>();
-    double equation = byEquationKg(tree, species);
     double mass;
     double own;
     double ofDbh = 0;
@@ -123,20 +106,15 @@ record TreeMass(
       mass = tree.massKg().value();
       own = Spreads.of(MASS, tree.massKg());
     } else {
-      mass = equation;
-      own =
-          mass
-              * Math.hypot(
-                  Allowances.MASS_RESIDUAL.value(), GREEN_DENSITY.usual(How.ESTIMATED).value());
-      ofDbh =
-          mass
-              * MassEquation.of(species.massGroup()).b1()
-              * Spreads.of(DBH, tree.dbhM())
-              / tree.dbhM().value();
-      remarks.addAll(ofEquation(tree, species));
+      DerivedMass derived = DerivedMass.of(tree, cut, species);
+      mass = derived.massKg();
+      own = derived.ownSdKg();
+      ofDbh = derived.ofDbhKg();
+      remarks.addAll(derived.remarks());
     }
     boolean derived = tree.massKg() == null && tree.sections() == null;
-    if (Math.abs(mass - equation) > Allowances.MASS_RESIDUAL.value() * equation) {
+    double equation = DerivedMass.byEquationKg(tree, species);
+    if (!derived && Math.abs(mass - equation) > Allowances.MASS_RESIDUAL.value() * equation) {
       remarks.add(
           said(
               "mass of %.0f kg as entered; by DBH and species it would be %.0f kg",
@@ -156,32 +134,6 @@ record TreeMass(
         Spreads.massCentreM(centre, height),
         NONE,
         List.copyOf(remarks));
-  }
-
-  private static double byEquationKg(SubjectTree tree, Species species) {
-    double dbh = tree.dbhM().value();
-    double leafy = MassEquation.of(species.massGroup()).dryKg(dbh) * species.dryToGreen().value();
-    return bare(tree, species) ? leafy * (1 - DryShares.of(true, dbh).foliage()) : leafy;
-  }
-
-  private static List<String> ofEquation(SubjectTree tree, Species species) {
-    List<String> remarks = new ArrayList<>();
-    double dbh = tree.dbhM().value();
-    remarks.add("mass by equation from DBH and species; a weighed or counted mass is better");
-    MassEquation.of(species.massGroup())
-        .warning(dbh)
-        .ifPresent(
-            w -> {
-              double volume = StemVolume.of(species).volumeM3(dbh, tree.heightM().value());
-              double crown = DryShares.of(species.broadleaf(), dbh).crown();
-              double other = StemMass.of(volume, species).treeKg(crown);
-              remarks.add(said("%s; by stem volume and density it would be %.0f kg", w, other));
-            });
-    if (bare(tree, species)) {
-      remarks.add(
-          said("bare: its leaves, %.1f %%, are off", 100 * DryShares.of(true, dbh).foliage()));
-    }
-    return remarks;
   }
 
   private static String said(String format, Object... values) {

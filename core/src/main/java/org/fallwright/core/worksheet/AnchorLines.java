@@ -14,10 +14,14 @@ import static org.fallwright.core.worksheet.Dimension.VOLUME;
 
 import java.util.ArrayDeque;
 import java.util.Deque;
+import java.util.Map;
+import org.fallwright.core.anchor.Deadman;
+import org.fallwright.core.anchor.Pickets;
 import org.fallwright.core.plan.HeldAnchor;
 import org.fallwright.core.plan.Reckoned;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.reference.Figure;
+import org.fallwright.core.reference.Hardware;
 import org.fallwright.core.reference.Species;
 import org.fallwright.core.reference.SpeciesTable;
 import org.fallwright.core.site.Anchor;
@@ -51,6 +55,15 @@ final class AnchorLines {
         w.note("Refused: " + h.capacity().why() + ".");
         continue;
       }
+      if (h.anchor() instanceof Anchor.TwoLegs two) {
+        w.note(
+            "Its legs share its load by the angles between them; "
+                + two.first()
+                + " and "
+                + two.second()
+                + " bear their own.");
+        continue;
+      }
       String b = "B_a" + i;
       if (h.anchor() instanceof Anchor.StandingTree t) {
         tree(i, b, h, t);
@@ -58,6 +71,17 @@ final class AnchorLines {
         stump(i, b, h, s);
       } else if (h.anchor() instanceof Anchor.ParkedVehicle v) {
         vehicle(i, b, h, v);
+      } else if (h.anchor() instanceof Anchor.BuriedLog l) {
+        log(i, b, h, l);
+      } else if (h.anchor() instanceof Anchor.Pickets p) {
+        Figure row = Pickets.row(p);
+        w.given(
+            b,
+            "strength: " + h.capacity().why(),
+            h.capacity().strengthN(),
+            FORCE,
+            Basis.of(row.kind()),
+            row.source());
       } else {
         w.given(
             b, "strength: " + h.capacity().why(), h.capacity().strengthN(), FORCE, Basis.ENTERED);
@@ -131,6 +155,43 @@ final class AnchorLines {
         "q_p × M_a" + i + " ÷ z_a" + i,
         FORCE,
         Basis.PLANNING_ALLOWANCE);
+  }
+
+  private void log(int i, String b, HeldAnchor h, Anchor.BuriedLog l) {
+    String source = Hardware.of("deadman.3ft.1").source();
+    w.given(
+        "P_a" + i,
+        "holding power of its face in loam by depth and rise of the line, lbf/ft²",
+        Deadman.power(l, h.load()),
+        NUMBER,
+        Basis.PUBLISHED,
+        source);
+    w.given("f_a" + i, "height of its face", l.faceHeightM(), LENGTH, Basis.ENTERED);
+    w.given("l_a" + i, "its length", l.lengthM(), LENGTH, Basis.ENTERED);
+    String soft = "";
+    if (l.soil() == Anchor.DeadmanSoil.SOFT) {
+      w.given("q_g" + i, "what soft ground leaves", Hardware.of("deadman.soft"), NUMBER);
+      soft = " × q_g" + i;
+    }
+    String feet = Workings.fit(w.unit(LENGTH) / Units.FOOT);
+    w.work(
+        b,
+        "what the ground before it holds; 1 ft of it goes to the line's trench",
+        "P_a"
+            + i
+            + " × f_a"
+            + i
+            + feet
+            + " × (l_a"
+            + i
+            + feet
+            + " − 1)"
+            + soft
+            + Workings.fit(Units.POUND_FORCE / w.unit(FORCE)),
+        FORCE,
+        Basis.PUBLISHED,
+        source,
+        Map.of());
   }
 
   private StemVolume form(String species, Anchor.Soil soil, boolean deep) {

@@ -13,7 +13,9 @@ import static org.fallwright.core.worksheet.Dimension.STRESS;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import org.fallwright.core.line.Point3;
+import org.fallwright.core.line.Share;
 import org.fallwright.core.plan.LinePoint;
 import org.fallwright.core.plan.Reckoned;
 import org.fallwright.core.plan.Setup;
@@ -25,6 +27,7 @@ import org.fallwright.core.site.Place;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.SubjectTree;
 import org.fallwright.core.site.WeighedSection;
+import org.fallwright.core.tree.DerivedMass;
 import org.fallwright.core.tree.MassEquation;
 
 /** What the setup chooses and what was entered of tree, cut, wood, day and line. */
@@ -197,6 +200,10 @@ final class EnteredLines {
       w.given("m", "green mass of the tree", t.massKg(), MASS);
       return;
     }
+    if (DerivedMass.byStem(t)) {
+      stem(t);
+      return;
+    }
     MassEquation e = MassEquation.of(r.species().massGroup());
     w.given(
         "b_0",
@@ -214,6 +221,50 @@ final class EnteredLines {
         "exp(b_0 + b_1 × ln(D" + cm + ")) × q_w" + Workings.fit(1 / w.unit(MASS)),
         MASS,
         Basis.PUBLISHED);
+  }
+
+  /**
+   * The mass by the stem's volume, cone stumps between the known diameters, and the crown's share.
+   */
+  private void stem(SubjectTree t) {
+    List<String> pieces = new ArrayList<>();
+    int i = 0;
+    for (Map.Entry<Double, Double> k : r.tree().taper().known().entrySet()) {
+      String h = "z_m" + i;
+      String d = "d_m" + i;
+      w.given(h, "height of stem diameter " + i, k.getKey(), LENGTH, Basis.ENTERED);
+      if (k.getKey() == site.cut().heightM()) {
+        w.work(d, "stem over bark at the cut", "D_s ÷ q_B", SMALL_LENGTH, Basis.PLANNING_ALLOWANCE);
+      } else {
+        w.given(d, "its diameter over bark", k.getValue(), SMALL_LENGTH, Basis.ENTERED);
+      }
+      String below = i == 0 ? d : "d_m" + (i - 1);
+      pieces.add(
+          (i == 0 ? h : "(" + h + " − z_m" + (i - 1) + ")")
+              + (i == 0
+                  ? " × 3 × " + d + "^2"
+                  : " × (" + below + "^2 + " + below + " × " + d + " + " + d + "^2)"));
+      i++;
+    }
+    double small = w.unit(SMALL_LENGTH);
+    w.given("ρ_g", "green density", r.species().greenDensity(), DENSITY);
+    boolean entered = t.crownShare() != null;
+    w.given(
+        "q_y",
+        "share of the mass that is crown" + (entered ? "" : ", by DBH"),
+        DerivedMass.crownShare(t, r.species()),
+        NUMBER,
+        entered ? Basis.ENTERED : Basis.PUBLISHED,
+        entered ? "" : "jenkins-2003");
+    w.work(
+        "m",
+        "green mass of the tree: its stem and the crown's share",
+        "π ÷ 12 × ("
+            + String.join(" + ", pieces)
+            + ") × ρ_g ÷ (1 − q_y)"
+            + Workings.fit(w.unit(LENGTH) * small * small * w.unit(DENSITY) / w.unit(MASS)),
+        MASS,
+        Basis.GEOMETRY);
   }
 
   private void wood() {
@@ -290,12 +341,15 @@ final class EnteredLines {
       w.given(
           "Z_" + i, p.id() + ", the line's height there", p.elevationM(), LENGTH, Basis.ENTERED);
     }
-    w.given(
-        "EA",
-        "softest axial stiffness of line " + r.judged().setup().line(),
-        r.line().stiffnessN(),
-        FORCE,
-        Basis.ENTERED);
+    new GearLines(w).breaking(r.line());
+    String name = "softest axial stiffness of line " + r.judged().setup().line();
+    if (r.line().softest()) {
+      Share s = r.line().softness();
+      w.given("s_E", s.what(), s.value(), NUMBER, Basis.of(s), s.source());
+      w.work("EA", name, "b_l ÷ s_E", FORCE, Basis.of(s));
+    } else {
+      w.given("EA", name, r.line().stiffnessN(), FORCE, Basis.ENTERED);
+    }
     if (site.conditions().slackM() != null) {
       w.given(
           "s_0", "slack and sag of the line", site.conditions().slackM(), LENGTH, Basis.ENTERED);

@@ -21,19 +21,23 @@ final class GearLines {
     this.w = w;
   }
 
-  /** Breaking load of a line and what its ends, bend, water, weather and age leave of it. */
-  void line(LineFigures l) {
+  /** Breaking load of a line. */
+  void breaking(LineFigures l) {
     if (l.byRule()) {
       byRule(l);
     } else {
       w.given("b_l", "breaking load on its label", l.breakingN(), FORCE, Basis.ENTERED);
     }
+  }
+
+  /** What a line's ends, bend, water, weather and age leave of it. */
+  void line(LineFigures l) {
     share("q_e1", l.treeEnd(), "its end at the tree");
     share("q_e2", l.sourceEnd(), "its other end");
     w.work("q_e", "what its weaker end leaves", "min(q_e1, q_e2)", NUMBER, Basis.RULE);
     share("q_k", l.bend(), "its tightest bend");
-    share("q_w", l.wet(), "wet");
-    share("q_v", l.weather(), "weather");
+    share("q_n", l.wet(), "wet");
+    share("q_j", l.weather(), "weather");
     share("q_a", l.age(), "age and wear");
   }
 
@@ -105,7 +109,7 @@ final class GearLines {
     }
     StringBuilder formula = new StringBuilder(e);
     for (int j = 0; j < r.shares().size(); j++) {
-      String q = "q_" + (char) ('f' + j) + i;
+      String q = "q_" + (char) ('x' + j) + i;
       share(q, r.shares().get(j), "");
       formula.append(" × ").append(q);
     }

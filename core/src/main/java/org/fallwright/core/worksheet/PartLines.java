@@ -94,7 +94,7 @@ final class PartLines {
       w.given(f, factor, p.designFactor(), NUMBER, Basis.PLANNING_ALLOWANCE);
     } else if (p.name().equals("line " + r.line().line().id())) {
       new GearLines(w).line(r.line());
-      w.work(b, "strength", "b_l × q_e × q_k × q_w × q_v × q_a", FORCE, Basis.COMMON_PRACTICE);
+      w.work(b, "strength", "b_l × q_e × q_k × q_n × q_j × q_a", FORCE, Basis.COMMON_PRACTICE);
       w.given(f, factor, p.designFactor(), NUMBER, Basis.COMMON_PRACTICE);
     } else if (r.rated().containsKey(p.name())) {
       new GearLines(w).rated(i, r.rated().get(p.name()));
@@ -109,7 +109,8 @@ final class PartLines {
   private void loads(int i, Part p) {
     int block = redirect(p);
     String haul = "load for each unit of tension at the tree, hauling";
-    if (p.name().equals("stem")) {
+    boolean atTheTree = p.name().startsWith("load cell ") && p.hauling() == 1;
+    if (p.name().equals("stem") || atTheTree) {
       w.given("y_" + i, haul, p.hauling(), NUMBER, Basis.STATICS);
     } else if (block > 0) {
       w.work("y_" + i, haul, "p_h" + block, NUMBER, Basis.STATICS);
@@ -181,6 +182,17 @@ final class PartLines {
             FORCE,
             Basis.PLANNING_ALLOWANCE);
         w.work("S_stop", "reading to stop at, at the tree", "C", FORCE, Basis.STATICS);
+        for (int i = 0; i < ratios.parts().size(); i++) {
+          if (ratios.parts().get(i).name().startsWith("load cell ")) {
+            w.work(
+                "S_read",
+                "the same where the load cell sits, " + r.judged().figures().stopReadingAt(),
+                "S_stop × min(y_" + (i + 1) + ", j_" + (i + 1) + ")",
+                FORCE,
+                Basis.RULE);
+            w.compare("S_read", r.judged().figures().stopReadingN(), FORCE);
+          }
+        }
       }
       case DEVICE -> {
         w.allow("q_d0", Allowances.DEVICE_LOW, NUMBER);

@@ -95,4 +95,32 @@ final class SampleTree {
         iceOrWet,
         SubjectTree.MassBy.EQUATION);
   }
+
+  /** The same tree, its mass asked for by its stem. */
+  static SubjectTree byStem(SubjectTree t) {
+    return new SubjectTree(
+        t.id(),
+        t.species(),
+        t.stump(),
+        t.dbhM(),
+        t.stumpDiameterM(),
+        t.diameters(),
+        t.heightM(),
+        t.crownBaseM(),
+        t.crownRadiusM(),
+        t.leanDeg(),
+        t.leanAzimuthDeg(),
+        t.massKg(),
+        t.massCentreM(),
+        t.sections(),
+        t.crownShare(),
+        t.crownOffsetM(),
+        t.crownOutline(),
+        t.crownAreaM2(),
+        t.shellM(),
+        t.deadOrDecayed(),
+        t.inLeaf(),
+        t.iceOrWet(),
+        SubjectTree.MassBy.STEM);
+  }
 }

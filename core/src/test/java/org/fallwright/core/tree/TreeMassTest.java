@@ -33,6 +33,41 @@ class TreeMassTest {
     return figures(SampleTree.crowned(pieces, share, offset, outline, true, false));
   }
 
+  /**
+   * Cone stumps between 0.617 m (0.58 / 0.94) at the cut, 0.52 at 1.3 m, 0.42 at 6 m, 0.30 at 10.5
+   * m and the top: 1.7899 m³ with the 0.3 m below the cut; × 1,026 kg/m³ ÷ (1 − 0.2075), branches
+   * and leaves of a hardwood of 52 cm: 2,317 kg. The equation gives 3,711 kg, which its 95th
+   * percentile must reach.
+   */
+  @Test
+  void aMassByTheStemsMeasuredDiameters() {
+    TreeFigures f = figures(SampleTree.byStem(SampleTree.oak()));
+    assertThat(f.massKg()).isCloseTo(1.78988 * 1026 / (1 - 0.207533), within(0.5));
+    assertThat(f.massDerived()).isTrue();
+    assertThat(f.massKg() + 1.645 * f.massOwnSdKg()).isGreaterThanOrEqualTo(3711 - 1);
+    assertThat(f.remarks())
+        .contains(
+            "mass by the stem's measured diameters, green density and a crown of 21 % of it; a"
+                + " crown with room about it is heavier",
+            "by DBH and species it would be 3711 kg");
+  }
+
+  @Test
+  void aStemWithNothingMeasuredAboveBreastHeightIsNotWeighedByIt() {
+    SubjectTree t = SampleTree.oak();
+    SubjectTree bare =
+        SampleTree.byStem(SampleTree.oak(t.dbhM(), t.stumpDiameterM(), List.of(), null, null));
+    assertThat(figures(bare).massKg()).isEqualTo(figures(t).massKg());
+    assertThat(figures(bare).remarks())
+        .contains(
+            "no diameter was measured 4.4 m up the stem or higher, so the mass is not by the stem");
+    SubjectTree entered =
+        SampleTree.byStem(
+            SampleTree.oak(
+                t.dbhM(), t.stumpDiameterM(), t.diameters(), Quantity.measured(3000), null));
+    assertThat(figures(entered).massKg()).isEqualTo(3000);
+  }
+
   /** A measured mass is spread by 5 %, its centre by 2 % of the height. */
   @Test
   void weighedSectionsGiveMassAndMassCentre() {

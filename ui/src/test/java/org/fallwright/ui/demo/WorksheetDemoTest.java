@@ -39,12 +39,22 @@ class WorksheetDemoTest {
     rows.put("pick-up on the driveway", DemoSite.ROW_4);
     rows.put("three parts", DemoSite.tackle(3, "3", "pickup", "rwd", "V1"));
     rows.put("read load cell", DemoSite.tackle(3, "4", "pickup", "rwd", "V1"));
+    rows.put("read in the haul part", DemoSite.tackle(3, "4", "pickup", "rwd", "V1"));
     rows.put("wet birch", DemoSite.redirected(342, "hand-winch", "pull", "A3", "A2"));
     rows.put("stump", DemoSite.direct(39, "hand-winch", "pull", "S1"));
     rows.put("crew", DemoSite.direct(0, "crew", "pull", "HC"));
     rows.put("lever lost", DemoSite.direct(188, "hand-winch", "pull", "A1"));
     return rows.entrySet().stream()
-        .map(e -> Arguments.of(units + ", " + e.getKey(), sheet(units, s -> {}, e.getValue())));
+        .map(
+            e ->
+                Arguments.of(
+                    units + ", " + e.getKey(), sheet(units, cell(e.getKey()), e.getValue())));
+  }
+
+  private static Consumer<ObjectNode> cell(String row) {
+    return s ->
+        ((ObjectNode) s.at("/gear/load_cell"))
+            .put("at", row.equals("read in the haul part") ? "haul-part" : "source-end");
   }
 
   private static Stream<Arguments> changed(String units) {
@@ -80,6 +90,38 @@ class WorksheetDemoTest {
             anchor(s, "A1", "rated")
                 .put("breaking_load_N", 150000.0)
                 .put("vouched_by", "the owner"));
+    sites.put(
+        "pickets",
+        s ->
+            anchor(s, "A1", "pickets")
+                .put("sling_height_m", 0.1)
+                .put("holdfast", "two-one")
+                .put("count", 1)
+                .put("soil", "undisturbed-loam")
+                .put("wet", true));
+    sites.put(
+        "buried log",
+        s ->
+            anchor(s, "A1", "deadman")
+                .put("sling_height_m", 0.1)
+                .put("depth_m", 1.6)
+                .put("face_height_m", 0.45)
+                .put("length_m", 1.8)
+                .put("line_run", 3)
+                .put("soil", "soft"));
+    sites.put(
+        "two legs",
+        s -> {
+          ObjectNode legs = anchor(s, "A1", "two-legs").put("first", "R1").put("second", "R2");
+          for (int i = 1; i < 3; i++) {
+            ObjectNode r =
+                legs.deepCopy().retain("id", "place", "sling_height_m", "rejected", "land");
+            r.put("type", "rated").put("id", "R" + i);
+            ((ObjectNode) r.get("place")).putArray("at").add(i == 1 ? 12 : 34).add(60);
+            r.put("breaking_load_N", 1e5).put("vouched_by", "the owner");
+            ((ArrayNode) s.get("anchors")).add(r);
+          }
+        });
     sites.put("sources disagree", s -> tree(s).put("species", "sitka-spruce"));
     sites.put("iced", s -> tree(s).put("ice_or_wet", true));
     sites.put(
@@ -99,6 +141,35 @@ class WorksheetDemoTest {
             points.addArray().add(p[0]).add(p[1]);
           }
         });
+    sites.put("mass by equation, in leaf", s -> tree(s).putNull("mass_kg"));
+    sites.put("mass by the stem", s -> tree(s).putNull("mass_kg").put("mass_by", "stem"));
+    sites.put(
+        "wire rope without a label",
+        s -> {
+          line(s, "wire-steel-core", 0.01)
+              .put("weathered", true)
+              .putNull("source_end")
+              .putObject("tree_end")
+              .put("kind", "wire-clips")
+              .putNull("stated");
+          DemoSite.entry(s.at("/gear/slings"), "Slings")
+              .put("hitch", "choker")
+              .put("angle_deg", 95);
+          DemoSite.entry(s.at("/gear/connectors"), "Shackles")
+              .putNull("rated_load_N")
+              .put("body_diameter_m", 0.022)
+              .put("aside_deg", 40);
+          DemoSite.entry(s.at("/gear/blocks"), "Block").putNull("efficiency");
+        });
+    sites.put("nylon without a label", s -> line(s, "nylon", 0.024).putNull("tree_end"));
+    sites.put(
+        "chain slings",
+        s ->
+            DemoSite.entry(s.at("/gear/slings"), "Slings")
+                .put("kind", "chain-80")
+                .putNull("rated_load_N")
+                .put("diameter_m", 0.01)
+                .put("hitch", "basket"));
     sites.put("another rule set", s -> s.put("rule_set", "DE-DGUV"));
     sites.put("hinge too strong", s -> cutThick(s, 0.3));
     sites.put("dead hinge", s -> tree(s).put("dead_or_decayed", true));
@@ -130,6 +201,15 @@ class WorksheetDemoTest {
 
   private static ObjectNode tree(ObjectNode site) {
     return (ObjectNode) site.get("tree");
+  }
+
+  /** The demo's long line made of something else, its breaking load and stiffness not known. */
+  private static ObjectNode line(ObjectNode site, String material, double diameter) {
+    ObjectNode line = DemoSite.entry(site.at("/gear/lines"), "L1");
+    return line.put("material", material)
+        .put("diameter_m", diameter)
+        .putNull("breaking_load_N")
+        .putNull("stiffness_N");
   }
 
   private static ObjectNode anchor(ObjectNode site, String id, String type) {
