@@ -32,7 +32,7 @@ public final class ItemWords {
   }
 
   String condition(Stowed s) {
-    String seen = s.inspected() == null ? "" : "looked at " + s.inspected();
+    String seen = s.inspected() == null ? "" : "seen " + s.inspected();
     return s.condition() == null ? seen : s.condition() + (seen.isEmpty() ? "" : ", " + seen);
   }
 

@@ -110,8 +110,9 @@ public record LoadOut(
       lines.add(
           String.format(
               Locale.ROOT,
-              "%s at %s%s%s, lay %05.1f°, line at %s: %s",
+              "%s (%s) at %s%s%s, lay %05.1f°, line at %s: %s",
               s.source(),
+              s.mode(),
               s.place(),
               s.redirects().isEmpty() ? "" : " over " + String.join(", ", s.redirects()),
               s.driver() == null

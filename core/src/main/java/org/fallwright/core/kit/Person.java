@@ -1,6 +1,7 @@
 package org.fallwright.core.kit;
 
 import java.util.List;
+import java.util.Locale;
 import org.fallwright.core.units.Range;
 
 /**
@@ -26,8 +27,13 @@ public record Person(String id, List<Role> roles, Double massKg, Double statureM
   public Person {
     Range.text("id", id);
     roles = List.copyOf(Range.present("roles", roles));
-    if (roles.stream().distinct().count() != roles.size()) {
-      throw new IllegalArgumentException("roles has one twice; each may be there once");
+    for (Role role : roles) {
+      if (roles.indexOf(role) != roles.lastIndexOf(role)) {
+        throw new IllegalArgumentException(
+            "roles has "
+                + role.name().toLowerCase(Locale.ROOT).replace('_', '-')
+                + " twice; each may be there once");
+      }
     }
     Range.checkOrNull("mass_kg", massKg, 30, 200, "kg");
     Range.checkOrNull("stature_m", statureM, 1, 2.3, "m");

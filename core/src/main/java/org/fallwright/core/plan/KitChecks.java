@@ -92,10 +92,12 @@ final class KitChecks {
 
   /** Whether the line can run over the block at all: no chain does, nor a rope thicker than it. */
   private void overBlock(Setup setup) {
-    if (setup.redirects().isEmpty()) {
-      return;
+    if (!setup.redirects().isEmpty()) {
+      JoinedLines.parts(site, setup.line()).forEach(this::overBlock);
     }
-    Gear.Line line = GearParts.line(site, setup);
+  }
+
+  private void overBlock(Gear.Line line) {
     Double sheave = Route.block(site).sheaveDiameterM();
     if (line.material().chain()) {
       grade.rule(

@@ -16,6 +16,7 @@ import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.nio.file.StandardOpenOption;
 import java.util.Arrays;
+import java.util.Map;
 import java.util.UUID;
 import java.util.function.UnaryOperator;
 
@@ -30,6 +31,9 @@ import java.util.function.UnaryOperator;
  * @param lift brings a tree of an older form to the present one
  */
 record Document<T>(Class<T> type, String noun, int present, UnaryOperator<JsonNode> lift) {
+  /** A field by which each kind of content is known from the others. */
+  static final Map<String, String> MARKS = Map.of("site", "tree", "kit", "trucks");
+
   /** Largest file that is read [bytes]. */
   static final int LARGEST = 20_000_000;
 

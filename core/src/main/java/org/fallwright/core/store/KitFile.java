@@ -40,12 +40,13 @@ public final class KitFile {
     if (site.kit() == null) {
       return Optional.empty();
     }
+    Path file;
     try {
-      Path file = siteFile.toAbsolutePath().resolveSibling(Path.of(site.kit()).getFileName());
-      return Files.isRegularFile(file) ? Optional.of(read(file)) : Optional.empty();
+      file = siteFile.toAbsolutePath().resolveSibling(site.kit());
     } catch (InvalidPathException e) {
       return Optional.empty();
     }
+    return Files.isRegularFile(file) ? Optional.of(read(file)) : Optional.empty();
   }
 
   /** As {@link #read(Path)}, from bytes; {@code name} is for messages. */

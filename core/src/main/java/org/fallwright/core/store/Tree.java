@@ -28,6 +28,7 @@ final class Tree {
   static JsonNode parse(String text, String file, Document<?> document) throws SiteFileException {
     Tree tree = new Tree(file, document);
     JsonNode root = tree.parse(text);
+    tree.kind(root);
     tree.version(root);
     tree.sound(root, "", false);
     return root;
@@ -115,6 +116,16 @@ final class Tree {
             + ": "
             + what
             + ".");
+  }
+
+  /** A file of another kind is called by its name. */
+  private void kind(JsonNode root) throws SiteFileException {
+    for (Map.Entry<String, String> other : Document.MARKS.entrySet()) {
+      if (root.has(other.getValue()) && !root.has(Document.MARKS.get(document.noun()))) {
+        throw new SiteFileException(
+            file + " is a " + other.getKey() + " file, not a " + document.file() + ".");
+      }
+    }
   }
 
   private void version(JsonNode root) throws SiteFileException {

@@ -93,6 +93,40 @@ class LinePropertyTest {
     assertThat(fits).as("seed %d", seed).isBetween(20, 480);
   }
 
+  /** Against a search in steps of a centimetre along the path. */
+  @ParameterizedTest
+  @ValueSource(longs = {41, 42, 43, 44})
+  void joinedLinesThatFitKeepBothJointsClear(long seed) {
+    Random random = new Random(seed);
+    int fits = 0;
+    for (int i = 0; i < 200; i++) {
+      List<Double> legs = List.of(5 + 30 * random.nextDouble(), 5 + 30 * random.nextDouble());
+      double a = 10 + 40 * random.nextDouble();
+      double b = 5 + 30 * random.nextDouble();
+      double wire = 1 + 30 * random.nextDouble();
+      double takeUp = 6 * random.nextDouble();
+      PathFit fit = PathFit.of(legs, List.of(a, b), 2, wire, takeUp);
+      double total = legs.get(0) + legs.get(1);
+      double found = Double.NaN;
+      for (double s = Math.max(0, total - b - wire); s <= a - 2; s += 0.01) {
+        boolean clear = s + b + takeUp <= total - PathFit.CLEAR_M;
+        for (double joint : new double[] {s, s + b}) {
+          clear &=
+              joint >= legs.get(0) + PathFit.CLEAR_M
+                  || joint + takeUp <= legs.get(0) - PathFit.CLEAR_M;
+        }
+        found = clear ? s : found;
+      }
+      // a room narrower than the steps may be missed by the search
+      if (!Double.isNaN(found)) {
+        fits++;
+        assertThat(fit.fits()).as("seed %d", seed).isTrue();
+        assertThat(fit.jointM()).as("seed %d", seed).isBetween(found - 1e-9, found + 0.0101);
+      }
+    }
+    assertThat(fits).as("seed %d", seed).isBetween(10, 190);
+  }
+
   private static List<Point3> path(Random random, int legs) {
     List<Point3> path = new ArrayList<>();
     for (int i = 0; i <= legs; i++) {

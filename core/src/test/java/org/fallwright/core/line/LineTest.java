@@ -50,6 +50,24 @@ class LineTest {
   }
 
   @Test
+  void jointsOfLinesKeepTheirDistanceAndClearOfEveryBlock() {
+    // one block at 30 m; the first joint is free up to 18 m and 20 m before the wire's
+    PathFit fit = PathFit.of(List.of(30.0, 25.0), List.of(20.0, 20.0), 2, 30, 3);
+    assertThat(fit.fits()).isTrue();
+    assertThat(fit.jointM()).isEqualTo(18);
+    // both joints would have to pass: the second is always within the block's reach
+    PathFit none = PathFit.of(List.of(30.0, 2.0), List.of(20.0, 14.0), 2, 0, 3);
+    assertThat(none.fits()).isTrue();
+    assertThat(none.jointM()).isEqualTo(18);
+    PathFit meets = PathFit.of(List.of(30.0, 4.0), List.of(32.0, 6.0), 2, 0, 4);
+    assertThat(meets.fits()).isFalse();
+    assertThat(meets.shortOf()).containsExactly("a joint would meet a block within 4.0 m of haul");
+    PathFit source = PathFit.of(List.of(30.0), List.of(32.0, 2.0), 2, 0, 4);
+    assertThat(source.shortOf())
+        .containsExactly("a joint would meet the source within 4.0 m of haul");
+  }
+
+  @Test
   void aLineWithoutWireMustReachByItself() {
     // 44.1 m of leg and 1.9 m of knots on a 45 m line
     PathFit fit = PathFit.of(List.of(44.1), 45, 1.9, 0, 3);

@@ -21,8 +21,12 @@ class SiteFileFaultsTest {
   private static final Pattern FAULT = Pattern.compile("- (.*)\n\\+ (.*)\n= (.*)\n");
 
   static Stream<Arguments> faults() throws IOException {
+    return faults("faults.txt");
+  }
+
+  static Stream<Arguments> faults(String list) throws IOException {
     return FAULT
-        .matcher(Samples.resource("faults.txt"))
+        .matcher(Samples.resource(list))
         .results()
         .map(m -> Arguments.of(lines(m.group(1)), lines(m.group(2)), m.group(3)));
   }

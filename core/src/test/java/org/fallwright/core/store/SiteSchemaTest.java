@@ -139,7 +139,7 @@ class SiteSchemaTest {
   }
 
   /** Copies of the site with one change each, at every place outside a plugin's parameters. */
-  private static void change(JsonNode root, JsonNode node, JsonPointer at, List<JsonNode> changed) {
+  static void change(JsonNode root, JsonNode node, JsonPointer at, List<JsonNode> changed) {
     if (node.isObject()) {
       copy(root, at, changed, o -> ((ObjectNode) o).put("surplus", 1));
     }

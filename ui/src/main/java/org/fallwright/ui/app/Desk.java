@@ -5,11 +5,14 @@ import java.awt.CardLayout;
 import java.awt.Dimension;
 import java.util.EnumSet;
 import java.util.List;
+import java.util.function.BiConsumer;
 import javax.swing.BorderFactory;
 import javax.swing.JComponent;
 import javax.swing.JPanel;
 import javax.swing.JScrollPane;
 import javax.swing.JSplitPane;
+import javax.swing.JTabbedPane;
+import org.fallwright.core.kit.Kit;
 import org.fallwright.core.plan.Check;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.site.Fix;
@@ -26,6 +29,8 @@ import org.fallwright.ui.map.PlanScene;
 import org.fallwright.ui.map.PlanView;
 import org.fallwright.ui.particulars.Entered;
 import org.fallwright.ui.particulars.EnteredPanel;
+import org.fallwright.ui.particulars.GearAtHand;
+import org.fallwright.ui.particulars.GearPanel;
 import org.fallwright.ui.setups.Answer;
 import org.fallwright.ui.setups.AnswerStrip;
 import org.fallwright.ui.setups.FindingsPanel;
@@ -44,6 +49,7 @@ final class Desk extends JPanel {
   private final OpenSite open;
   private final AnswerStrip strip = new AnswerStrip();
   private final EnteredPanel entered = new EnteredPanel();
+  private final GearPanel gear = new GearPanel();
   private final PlanView plan = new PlanView();
   private final ProfilePanel profile = new ProfilePanel();
   private final WaysPanel ways = new WaysPanel();
@@ -53,6 +59,7 @@ final class Desk extends JPanel {
   private final JPanel middle = new JPanel(cards);
   private Look look;
   private boolean picture;
+  private Kit kit;
 
   Desk(OpenSite open, Look look, StatusBar status, StartCard start) {
     super(new BorderLayout());
@@ -65,13 +72,15 @@ final class Desk extends JPanel {
     middle.add(drawings, "site");
     JSplitPane right = split(JSplitPane.VERTICAL_SPLIT, ways, findings, 0.5);
     right.setPreferredSize(new Dimension(450, 600));
-    JScrollPane rail = new JScrollPane(entered);
-    rail.setBorder(BorderFactory.createEmptyBorder());
+    JTabbedPane rail = new JTabbedPane();
+    rail.addTab(Messages.text("entered.tab"), scroll(entered));
+    rail.addTab(Messages.text("gear.tab"), scroll(gear));
+    rail.putClientProperty("JTabbedPane.tabWidthMode", "equal");
+    rail.putClientProperty("JTabbedPane.tabAreaAlignment", "fill");
     rail.setPreferredSize(new Dimension(240, 600));
     rail.setMinimumSize(new Dimension(200, 100));
     middle.setPreferredSize(new Dimension(330, 400));
     middle.setMinimumSize(new Dimension(300, 300));
-    rail.setHorizontalScrollBarPolicy(JScrollPane.HORIZONTAL_SCROLLBAR_NEVER);
     JSplitPane inner = split(JSplitPane.HORIZONTAL_SPLIT, middle, right, 1);
     add(strip, BorderLayout.PAGE_START);
     add(split(JSplitPane.HORIZONTAL_SPLIT, rail, inner, 0), BorderLayout.CENTER);
@@ -85,8 +94,14 @@ final class Desk extends JPanel {
     showAll();
   }
 
-  /** Shows a site on its picture's tiles; null: blank ground. */
-  void open(Site site, TileStore tiles) {
+  /**
+   * Shows a site on its picture's tiles; null: blank ground.
+   *
+   * @param from the kit that its gear is from; null: not at hand
+   */
+  void open(Site site, TileStore tiles, Kit from) {
+    kit = from;
+    gear();
     picture = tiles != null;
     plan.show(site, tiles);
     scale();
@@ -97,6 +112,16 @@ final class Desk extends JPanel {
   void look(Look other) {
     look = other;
     showAll();
+  }
+
+  /** Who is told which thing of the gear now comes, or stays. */
+  void onTicked(BiConsumer<String, Boolean> listener) {
+    gear.onTicked(listener);
+  }
+
+  /** Where a thing of the gear is, by the kit; null: not known. */
+  String whereIs(String item) {
+    return kit == null ? null : kit.trucksOf(item).orElse(null);
   }
 
   Look look() {
@@ -157,6 +182,7 @@ final class Desk extends JPanel {
     Amounts amounts = amounts();
     Palette palette = look.palette();
     entered.show(open.site().map(s -> Entered.of(s, amounts)).orElse(null), palette);
+    gear();
     status.progress(open.progress());
     status.picture(open.site().map(s -> PictureDate.words(s, picture)).orElse(" "));
     status.next(NextThing.of(open));
@@ -164,6 +190,10 @@ final class Desk extends JPanel {
     chosenShown();
     scale();
     redraw();
+  }
+
+  private void gear() {
+    gear.show(open.site().map(s -> GearAtHand.of(s, kit, open.display())).orElse(null));
   }
 
   private void chosenShown() {
@@ -259,6 +289,13 @@ final class Desk extends JPanel {
 
   private Amounts amounts() {
     return new Amounts(open.display());
+  }
+
+  private static JScrollPane scroll(JComponent c) {
+    JScrollPane s = new JScrollPane(c);
+    s.setBorder(BorderFactory.createEmptyBorder());
+    s.setHorizontalScrollBarPolicy(JScrollPane.HORIZONTAL_SCROLLBAR_NEVER);
+    return s;
   }
 
   private static JSplitPane split(int way, JComponent a, JComponent b, double weight) {

@@ -5,6 +5,7 @@ import java.awt.GraphicsEnvironment;
 import java.awt.Rectangle;
 import java.awt.event.WindowAdapter;
 import java.awt.event.WindowEvent;
+import java.io.IOException;
 import java.nio.file.Path;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
@@ -14,8 +15,11 @@ import javax.swing.JFileChooser;
 import javax.swing.JFrame;
 import javax.swing.JOptionPane;
 import javax.swing.SwingUtilities;
+import org.fallwright.core.kit.Kit;
 import org.fallwright.core.plan.Plan;
+import org.fallwright.core.site.LeftBehind;
 import org.fallwright.core.site.Site;
+import org.fallwright.core.store.KitFile;
 import org.fallwright.maps.tiles.TileStore;
 import org.fallwright.ui.document.OpenSite;
 import org.fallwright.ui.task.NewestWins;
@@ -40,19 +44,26 @@ public final class MainWindow extends JFrame {
   private final NewestWins reading = new NewestWins(worker, SwingUtilities::invokeLater);
   private final NewestWins planning = new NewestWins(worker, SwingUtilities::invokeLater);
   private final Desk desk;
+  private final Saving saving;
 
   public MainWindow(Wiring wiring, Look look) {
     super(Messages.text("window.title"));
     this.wiring = wiring;
     StatusBar status = new StatusBar(this::stop, this::cautions);
-    StartCard start =
-        new StartCard(this::choose, wiring.demo() == null ? null : () -> open(wiring.demo()));
+    StartCard start = new StartCard(this::choose, wiring.demo() == null ? null : this::openDemo);
     desk = new Desk(open, look, status, start);
+    desk.onTicked(this::ticked);
+    saving = new Saving(this, open, wiring.sites(), wiring.demo(), this::title);
     setContentPane(desk);
     setJMenuBar(new Menus(this, wiring.demo() != null));
-    setDefaultCloseOperation(DISPOSE_ON_CLOSE);
+    setDefaultCloseOperation(DO_NOTHING_ON_CLOSE);
     addWindowListener(
         new WindowAdapter() {
+          @Override
+          public void windowClosing(WindowEvent e) {
+            quit();
+          }
+
           @Override
           public void windowClosed(WindowEvent e) {
             planning.cancel();
@@ -78,12 +89,12 @@ public final class MainWindow extends JFrame {
         (progress, cancelled) -> {
           Site site = wiring.sites().read(file);
           TileStore tiles = wiring.pictures().open(site, file);
-          return new Read(site, tiles);
+          return new Read(site, tiles, kit(site, file));
         },
         new Telling<Read>() {
           @Override
           public void done(Read read) {
-            show(read.site(), read.tiles(), file);
+            show(read, file);
           }
 
           @Override
@@ -109,12 +120,21 @@ public final class MainWindow extends JFrame {
             open.file().map(p -> p.toAbsolutePath().getParent().toFile()).orElse(null));
     chooser.setDialogTitle(Messages.text("open.title"));
     if (chooser.showOpenDialog(this) == JFileChooser.APPROVE_OPTION) {
-      open(chooser.getSelectedFile().toPath());
+      saving.before(() -> open(chooser.getSelectedFile().toPath()));
     }
   }
 
   void openDemo() {
-    open(wiring.demo());
+    saving.before(() -> open(wiring.demo()));
+  }
+
+  Saving saving() {
+    return saving;
+  }
+
+  /** Closes the window, after edits have been saved or given up. */
+  void quit() {
+    saving.before(this::dispose);
   }
 
   void otherUnits() {
@@ -165,13 +185,37 @@ public final class MainWindow extends JFrame {
     return desk;
   }
 
-  private record Read(Site site, TileStore tiles) {}
+  private record Read(Site site, TileStore tiles, Kit kit) {}
 
-  private void show(Site site, TileStore tiles, Path file) {
-    setTitle(Messages.text("window.title.site", site.name()));
-    open.open(file, site);
-    desk.open(site, tiles);
-    plan(site);
+  /** The kit beside the site; null where it is not there or cannot be read. */
+  private static Kit kit(Site site, Path file) {
+    try {
+      return KitFile.beside(site, file).orElse(null);
+    } catch (IOException e) {
+      LOG.warn("Kit file not read", e);
+      return null;
+    }
+  }
+
+  private void show(Read read, Path file) {
+    open.open(file, read.site());
+    desk.open(read.site(), read.tiles(), read.kit());
+    title();
+    plan(read.site());
+  }
+
+  private void title() {
+    String name = Messages.text("window.title.site", open.site().orElseThrow().name());
+    setTitle(open.changed() ? Messages.text("window.title.changed", name) : name);
+  }
+
+  /** A thing of the gear comes to the site, or stays: everything is judged again. */
+  void ticked(String item, boolean atHand) {
+    Site site = open.site().orElseThrow();
+    open.edited(
+        atHand ? site.taking(item) : site.leaving(new LeftBehind(item, desk.whereIs(item))));
+    title();
+    plan();
   }
 
   private void plan(Site site) {

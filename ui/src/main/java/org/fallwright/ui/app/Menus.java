@@ -22,9 +22,11 @@ final class Menus extends JMenuBar {
     if (demo) {
       item(file, "menu.demo", "ctrl D", window::openDemo);
     }
+    item(file, "menu.save", "ctrl S", () -> window.saving().save());
+    item(file, "menu.save-as", "ctrl shift S", () -> window.saving().saveAs());
     item(file, "menu.plan", "F5", window::plan);
     file.addSeparator();
-    item(file, "menu.quit", "ctrl Q", window::dispose);
+    item(file, "menu.quit", "ctrl Q", window::quit);
 
     JMenu view = menu("menu.view", 'V');
     item(view, "menu.units", "ctrl U", window::otherUnits);

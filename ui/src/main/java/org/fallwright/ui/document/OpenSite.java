@@ -3,6 +3,7 @@ package org.fallwright.ui.document;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Objects;
 import java.util.Optional;
 import java.util.stream.Stream;
 import org.fallwright.core.plan.Check;
@@ -41,6 +42,9 @@ public final class OpenSite {
   private Site.Display display = Site.Display.US;
   private double progress = Double.NaN;
   private String failure;
+  private Site.Display displayOnFile = Site.Display.US;
+  private boolean changed;
+  private Setup wanted;
 
   public void listen(Listener listener) {
     listeners.add(listener);
@@ -51,12 +55,43 @@ public final class OpenSite {
     file = from;
     site = opened;
     display = opened.display();
+    displayOnFile = display;
+    changed = false;
+    wanted = null;
     plan = null;
     chosen = null;
     check = null;
     failure = null;
     progress = Double.NaN;
     tell(Change.SITE);
+  }
+
+  /** The site with an edit that is not on file yet; its plan is no longer true. */
+  public void edited(Site after) {
+    wanted = chosen == null ? wanted : chosen.setup();
+    site = after;
+    changed = true;
+    plan = null;
+    chosen = null;
+    check = null;
+    tell(Change.SITE);
+  }
+
+  /** The site is on file as it is now. */
+  public void saved(Path to) {
+    file = to;
+    changed = false;
+    tell(Change.SITE);
+  }
+
+  /** Whether there are edits that are not on file. */
+  public boolean changed() {
+    return changed;
+  }
+
+  /** The site as it is to be written: other units on the screen are no edit. */
+  public Optional<Site> toSave() {
+    return site().map(s -> s.in(displayOnFile));
   }
 
   /** Planning has got so far, 0 to 1. */
@@ -73,14 +108,31 @@ public final class OpenSite {
     tell(Change.PROGRESS);
   }
 
-  /** A plan is there; its best setup is chosen. */
+  /** A plan is there; its best setup is chosen, or after an edit the one looked at before. */
   public void planned(Plan made) {
     plan = made;
     progress = Double.NaN;
     failure = null;
-    chosen = made.ranked().isEmpty() ? null : made.ranked().get(0);
+    chosen =
+        made.ranked().stream()
+            .filter(j -> wanted != null && sameWay(j.setup(), wanted))
+            .findFirst()
+            .or(() -> made.ranked().stream().findFirst())
+            .orElse(null);
+    wanted = null;
     check = null;
     tell(Change.PLAN);
+  }
+
+  /** The same way to pull, be it with another line or lay. */
+  private static boolean sameWay(Setup a, Setup b) {
+    return a.source().equals(b.source())
+        && a.mode().equals(b.mode())
+        && a.place().equals(b.place())
+        && a.redirects().equals(b.redirects())
+        && Objects.equals(a.driver(), b.driver())
+        && a.attachHeightM() == b.attachHeightM()
+        && a.hingeThicknessM() == b.hingeThicknessM();
   }
 
   /** The same plan in other words: what was chosen stays chosen. */

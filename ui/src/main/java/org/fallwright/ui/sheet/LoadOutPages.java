@@ -36,7 +36,7 @@ public final class LoadOutPages {
     this.list = list;
     this.program = program;
     flow = new PageFlow(MARGIN, MARGIN, paper.width() - 2 * MARGIN, paper.height() - MARGIN - 16);
-    columns = columns(0.04, 0.06, 0.37, 0.13, 0.19, 0.21);
+    columns = columns(0.04, 0.06, 0.33, 0.11, 0.22, 0.24);
     fill();
   }
 

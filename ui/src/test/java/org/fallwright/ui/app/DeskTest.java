@@ -91,7 +91,7 @@ class DeskTest {
     open.open(null, site);
     desk.setSize(1500, 900);
     layOut(desk);
-    desk.open(site, null);
+    desk.open(site, null, null);
     open.planned(plan);
     layOut(desk);
     desk.fit();

@@ -69,6 +69,24 @@ class WindowTest {
   }
 
   @Test
+  void untickingALinePlansAgainWithoutIt() throws Exception {
+    open(DemoSite.asItIs().only("pickup", "V1"));
+    waitFor(() -> window.shown().chosen().isPresent());
+    assertThat(onEvents(() -> window.shown().chosen().orElseThrow().setup().line()))
+        .isEqualTo("L1");
+    SwingUtilities.invokeAndWait(() -> window.ticked("L1", false));
+    assertThat(onEvents(() -> window.getTitle())).endsWith("(edited)");
+    waitFor(() -> window.shown().chosen().isPresent());
+    assertThat(onEvents(() -> window.shown().chosen().orElseThrow().setup().line()))
+        .isEqualTo("L2");
+    SwingUtilities.invokeAndWait(() -> window.saving().save());
+    assertThat(SiteFile.read(folder.resolve("oak.fallsite.json")).leftBehind())
+        .extracting(l -> l.item())
+        .containsExactly("L1");
+    assertThat(onEvents(() -> window.getTitle())).doesNotContain("edited");
+  }
+
+  @Test
   void theStripFollowsUnitsAndChoice() throws Exception {
     open(DemoSite.asItIs().lays(90, 3, 7));
     waitFor(() -> window.shown().chosen().isPresent());

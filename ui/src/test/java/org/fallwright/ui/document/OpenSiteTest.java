@@ -3,10 +3,12 @@ package org.fallwright.ui.document;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import com.fasterxml.jackson.databind.node.ArrayNode;
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.Plan;
+import org.fallwright.core.site.LeftBehind;
 import org.fallwright.core.site.Site;
 import org.fallwright.ui.demo.DemoSite;
 import org.junit.jupiter.api.Test;
@@ -57,6 +59,34 @@ class OpenSiteTest {
     assertThat(open.chosen().orElseThrow().setup()).isEqualTo(before.setup());
     assertThat(open.chosen().orElseThrow().sentence()).isNotEqualTo(before.sentence());
     assertThat(open.site()).contains(metric);
+  }
+
+  @Test
+  void anEditDropsThePlanAndComesBackToTheWayLookedAt() {
+    open.open(null, site);
+    open.planned(plan);
+    Judged before = plan.ranked().get(2);
+    open.choose(before);
+    assertThat(open.changed()).isFalse();
+    Site edited = site.leaving(new LeftBehind("LC1", null));
+    open.edited(edited);
+    assertThat(open.changed()).isTrue();
+    assertThat(open.plan()).isEmpty();
+    assertThat(open.chosen()).isEmpty();
+    open.planned(plan);
+    assertThat(open.chosen()).contains(before);
+    open.planned(plan);
+    assertThat(open.chosen()).contains(plan.ranked().get(0));
+  }
+
+  @Test
+  void otherUnitsOnTheScreenAreNotSaved() {
+    open.open(null, site);
+    open.edited(site.leaving(new LeftBehind("LC1", null)).in(Site.Display.METRIC));
+    assertThat(open.toSave()).contains(site.leaving(new LeftBehind("LC1", null)));
+    open.saved(Path.of("x.fallsite.json"));
+    assertThat(open.changed()).isFalse();
+    assertThat(open.file()).contains(Path.of("x.fallsite.json"));
   }
 
   @Test
