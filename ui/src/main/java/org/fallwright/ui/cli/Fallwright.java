@@ -118,6 +118,7 @@ public final class Fallwright implements Runnable {
             .addSubcommand(new AdviseCommand(home.plugins(), home.version()))
             .addSubcommand(new SpeciesCommand())
             .addSubcommand(new FiguresCommand())
+            .addSubcommand(new RulesCommand())
             .addSubcommand(new MeasureCommand())
             .addSubcommand(new OpenCommand(home, desktop))
             .addSubcommand(new DemoCommand(home, desktop));
