@@ -60,7 +60,8 @@ final class CrewPlaces {
                 places,
                 Role.LOOK_OUT,
                 p,
-                "Outside the people ring and every zone; stump"
+                in.length(stump.distanceTo(p))
+                    + " from the stump, outside the people ring and every zone; stump"
                     + (operator == null ? "" : " and source")
                     + " in sight past the buildings drawn."));
     return places;

@@ -129,7 +129,7 @@ final class Landing {
     reach = knowledge.ofWires() ? wires.reach(knowledge.approach()) : List.of();
     escapes = new EscapeRoutes(site.targets());
     ground = GroundFall.of(site);
-    near = HangUps.near(site, outline.farthestM() + slideM(Double.POSITIVE_INFINITY));
+    near = HangUps.near(site, outline.farthestM() + slideM(ground.steepestDeg()));
     hangUps = new LayTargets(near, t.stump());
     lookOut = new LookOut(site.targets());
     peopleM = PeopleRing.factor(site, rules) * t.heightM().value();
@@ -154,8 +154,7 @@ final class Landing {
 
   /** How far the tree may slide on where the ground falls so [m]. */
   private double slideM(double fallDeg) {
-    double fall = Math.min(fallDeg, 90);
-    return FallFootprint.slideM(site.tree().heightM().value(), fall, site.zones().slideM());
+    return FallFootprint.slideM(site.tree().heightM().value(), fallDeg, site.zones().slideM());
   }
 
   /** Where the tree lands, wires, ways out. */

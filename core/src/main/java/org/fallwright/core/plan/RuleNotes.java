@@ -84,7 +84,7 @@ final class RuleNotes {
   private static String wire(Wire w, Rule r, DisplayUnits in) {
     return String.format(
         Locale.ROOT,
-        "Line %s, %s kV between phases%s%s: keep %s, by %s (%s)%s.",
+        "Line %s (%s kV between phases%s%s): keep %s, by %s (%s)%s.",
         w.id(),
         plain(w.voltageKv()),
         w.voltageSaidBy() == null ? "" : ", said by " + w.voltageSaidBy(),

@@ -12,7 +12,7 @@ import org.locationtech.jts.io.WKTWriter;
 
 /**
  * The zones of a setup in the plan document. Outlines are well-known text, east and north in metres
- * of the site plane, to the millimetre: one line each, and any map program reads them.
+ * of the site plane, to the centimetre: one line each, and any map program reads them.
  */
 final class ZonesJson {
   private ZonesJson() {}
@@ -71,7 +71,7 @@ final class ZonesJson {
       return null;
     }
     WKTWriter writer = new WKTWriter();
-    writer.setPrecisionModel(new PrecisionModel(1000));
+    writer.setPrecisionModel(new PrecisionModel(100));
     return writer.write(g);
   }
 }

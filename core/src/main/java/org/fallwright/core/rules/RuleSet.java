@@ -15,6 +15,9 @@ public final class RuleSet {
     REFUSED
   }
 
+  /** Unit of the rule on free-hand pulling. */
+  public static final String FREE_HAND_UNIT = "1 flagged, 2 refused";
+
   private final RuleSets all;
   private final String key;
   private final String name;

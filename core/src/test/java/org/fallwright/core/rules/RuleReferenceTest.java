@@ -6,6 +6,7 @@ import static org.assertj.core.api.Assertions.within;
 import java.util.List;
 import java.util.Map;
 import org.fallwright.core.outside.CheckValue;
+import org.fallwright.core.reference.Allowances;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -208,6 +209,121 @@ class RuleReferenceTest {
   void victoria(double kv, double metres) {
     CheckValue.of("Victoria, No Go Zone rules", "approach at " + kv + " kV", metres, "m")
         .isMet(ALL.byKey("AU").approachDistanceM(kv).orElseThrow().value(), 0);
+  }
+
+  /** MUTCD 2012, California edition, Table 6H-4: a 12 ft lane at 25, 35, 40, 45 and 55 mph. */
+  @ParameterizedTest
+  @CsvSource({"25, 125", "35, 245", "40, 320", "45, 540", "55, 660"})
+  void mergingTaper(double mph, double feet) {
+    CheckValue.of("California MUTCD 2012 Table 6H-4", "12 ft lane at " + mph + " mph", feet, "ft")
+        .isMet(WorkZoneTaper.mergingM(12 * FT, mph * 0.44704) / FT, 0.51);
+  }
+
+  /** The same note: a shoulder asks a third, 82 ft at 35 mph. */
+  @Test
+  void shoulderTaper() {
+    CheckValue.of("California MUTCD 2012 Table 6H-4", "12 ft shoulder at 35 mph", 82, "ft")
+        .isMet(WorkZoneTaper.shoulderM(12 * FT, 35 * 0.44704) / FT, 0.5);
+  }
+
+  /** EM 385-1-1, 31-8: a structure 30 ft away, pieces of at most a third. */
+  @Test
+  void piecesBesideAStructure() {
+    Rule rule = ALL.byKey("US-EM385").pieceOverDistance().orElseThrow();
+    CheckValue.of("EM 385-1-1, 31-8", "piece 30 ft from a structure", 10, "ft")
+        .fromMemory()
+        .isMet(rule.value() * 30, 1e-9);
+    assertThat(rule.metBy(10, 30)).isTrue();
+    assertThat(rule.metBy(10.1, 30)).isFalse();
+  }
+
+  /** OAR 437-007-0815: wedges on hand from over 15 in. */
+  @ParameterizedTest
+  @CsvSource({"15.0, false", "15.1, true"})
+  void wedgesOnHand(double inches, boolean asked) {
+    assertThat(ALL.byKey("US-OSHA").wedgesOverDbhM().orElseThrow().metBy(inches * IN, 1))
+        .isEqualTo(asked);
+  }
+
+  /** Beaufort land scale: 39 km/h is force 5, 40 km/h force 6. */
+  @ParameterizedTest
+  @CsvSource({"20, F4", "29, F4", "30, F5", "39, F5", "40, F6", "50, F6", "51, F7", "61, F7"})
+  void beaufort(double kmh, Beaufort force) {
+    assertThat(Beaufort.of(kmh / 3.6)).isEqualTo(force);
+  }
+
+  /**
+   * 29 CFR 1910.269, 69 kV phase to ground: the present table's 3.29 ft, not the 3 ft 0 in of the
+   * one before 2014.
+   */
+  @Test
+  void thePresentTableOfQualifiedWorkers() {
+    double metres = distance("US-1910.269-R6", 69);
+    CheckValue.of("29 CFR 1910.269 Table R-6 (2014)", "69 kV, phase to ground", 3.29, "ft")
+        .fromMemory()
+        .isMet(metres / FT, 0.01);
+    assertThat(metres).as("more than the superseded table's").isGreaterThan(3 * FT + 0.05);
+    for (String key : ALL.keys()) {
+      assertThat(ALL.byKey(key).approachTables())
+          .as(key)
+          .doesNotContain(ALL.table("US-1910.269-R6"));
+    }
+  }
+
+  /** Widths and depths of hinge and face: Hale 2019; 0.8 D is training practice. */
+  @Test
+  void hingeOfASixtyCentimetreStem() {
+    CheckValue.of("Hale 2019, The Craft of Felling", "hinge of a 60 cm stem", 6.0, "cm")
+        .isMet(Allowances.HINGE_THICKNESS_SHARE.value() * 60, 1e-9);
+    CheckValue.of("training practice", "hinge length of a 60 cm stem", 48, "cm")
+        .fromMemory()
+        .isMet(Allowances.HINGE_WIDTH_SHARE.value() * 60, 1e-9);
+  }
+
+  /** Depth of the face: Michigan a third, Washington a quarter, EM 385-1-1 a third. */
+  @Test
+  void depthOfTheFace() {
+    CheckValue.of("WAC 296-54-53910(10)", "face depth over diameter", 0.25, "")
+        .isMet(face("US-OSHA", RuleSet.FaceLimit.DEPTH_LEAST), 0);
+    CheckValue.of("Mich. Admin. Code R 408.15336(3)", "face depth over diameter", 1 / 3.0, "")
+        .isMet(face("US-OSHA", RuleSet.FaceLimit.DEPTH_MOST), 1e-9);
+    CheckValue.of("EM 385-1-1, 31-2.d", "face depth over diameter", 1 / 3.0, "")
+        .isMet(face("US-EM385", RuleSet.FaceLimit.DEPTH_LEAST), 1e-9);
+    CheckValue.of("OSHA CPL 2-1.22, J.11.f(2)", "least opening of an open face", 70, "deg")
+        .isMet(face("US-OSHA", RuleSet.FaceLimit.OPEN_LEAST_DEG), 0);
+    CheckValue.of("OSHA CPL 2-1.22, J.11.f(2)", "greatest opening of an open face", 90, "deg")
+        .isMet(face("US-OSHA", RuleSet.FaceLimit.OPEN_MOST_DEG), 0);
+    assertThat(ALL.byKey("NZ").face(RuleSet.FaceLimit.DEPTH_MOST)).isEmpty();
+  }
+
+  private static double face(String key, RuleSet.FaceLimit limit) {
+    return ALL.byKey(key).face(limit).orElseThrow().value();
+  }
+
+  /** Bavarian state forest-owner school: about 5 m beside the winch. */
+  @Test
+  void besideTheWinch() {
+    CheckValue.of("Bavarian state forest-owner school", "beside a winch run by machine", 5, "m")
+        .isMet(ALL.byKey("DE-DGUV").operatorBesideWinchM().value(), 0);
+    assertThat(ALL.byKey("NZ").operatorBesideWinchM().fallbackFrom()).isEqualTo("DE-DGUV");
+  }
+
+  /** EM 385-1-1, 31-8: two tree lengths of path. */
+  @Test
+  void fellingPath() {
+    CheckValue.of("EM 385-1-1, 31-8", "felling path, tree lengths", 2, "")
+        .fromMemory()
+        .isMet(ALL.byKey("US-EM385").pathLengthFactor().orElseThrow().value(), 0);
+  }
+
+  /** WorkCover New South Wales code 2006, from memory; Victoria's greater distances stay. */
+  @ParameterizedTest
+  @CsvSource({"132, 3, 10", "330, 6, 10", "500, 8, 10"})
+  void newSouthWales(double kv, double metres, double used) {
+    CheckValue.of("WorkCover NSW code 2006", "approach at " + kv + " kV", metres, "m")
+        .fromMemory()
+        .isMet(distance("AU-NSW", kv), 0);
+    assertThat(ALL.byKey("AU").approachDistanceM(kv).orElseThrow().value()).isEqualTo(used);
   }
 
   private static void winch(String what, double kN, Rule rule) {

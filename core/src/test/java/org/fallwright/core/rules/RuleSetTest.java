@@ -26,7 +26,9 @@ class RuleSetTest {
           RuleSet::redirectStropOverSource,
           RuleSet::chokerOverSource,
           RuleSet::freeHandRule,
-          RuleSet::extraAdviceTwoH);
+          RuleSet::extraAdviceTwoH,
+          RuleSet::operatorBesideWinchM,
+          RuleSet::moreOnSlopes);
 
   @Test
   void thereAreSevenSets() {
@@ -80,6 +82,38 @@ class RuleSetTest {
     assertThat(ALL.byKey("UK").lineTwiceSource().value()).isEqualTo(2);
     assertThat(ALL.byKey("UK").lineTwiceSource().fallbackFrom()).isEqualTo("DE-DGUV");
     assertThat(ALL.byKey("US-OSHA").lineTwiceSource().value()).isZero();
+  }
+
+  @Test
+  void aSetListsEveryRuleWithWhatCounts() {
+    for (String key : ALL.keys()) {
+      RuleSet set = ALL.byKey(key);
+      assertThat(set.entries()).as(key).hasSizeGreaterThan(25);
+      for (RuleSet.Entry e : set.entries()) {
+        e.own().ifPresent(own -> assertThat(e.used()).as(e.item()).contains(own));
+        if (e.own().isEmpty() && e.used().isPresent()) {
+          assertThat(e.used().get().fallback()).as(key + " " + e.item()).isTrue();
+        }
+      }
+    }
+    // a place's advice on its own lines is nobody else's rule
+    assertThat(entry("NZ", "consult_poles").used()).isEmpty();
+    assertThat(entry("UK", "consult_poles").used()).isPresent();
+    assertThat(entry("NZ", "operator_radius").used().orElseThrow().fallbackFrom())
+        .isEqualTo("DE-DGUV");
+  }
+
+  private static RuleSet.Entry entry(String key, String item) {
+    return ALL.byKey(key).entries().stream()
+        .filter(e -> e.item().equals(item))
+        .findFirst()
+        .orElseThrow();
+  }
+
+  @Test
+  void whatIsFromMemoryAsksToBeVerified() {
+    assertThat(Status.FROM_MEMORY.words()).isEqualTo("from memory, verify");
+    assertThat(Status.READ.words()).isEqualTo("read");
   }
 
   @Test

@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Random;
+import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Shape;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
@@ -122,6 +123,127 @@ class FallFootprintPropertyTest {
     assertThat(mirrored.symDifference(expectMirrored).getArea())
         .as("seed " + seed)
         .isLessThan(corners);
+  }
+
+  /** A crown drawn as a circle about the stem lies as the round crown does. */
+  @ParameterizedTest
+  @ValueSource(longs = {1, 2, 3, 4, 5})
+  void aCrownDrawnRoundIsTheRoundCrown(long seed) {
+    Random r = new Random(seed);
+    FallOutline round = randomTree(r);
+    double lay = 360 * r.nextDouble();
+    Position axis = round.axisInCrown(Things.at(0, 0), 0.3);
+    Geometry circle =
+        Shape.FACTORY
+            .createPoint(new Coordinate(axis.eastM(), axis.northM()))
+            .buffer(round.crownRadiusM(), 32);
+    Geometry drawn =
+        FallFootprint.of(round.drawn(circle, Things.at(0, 0), 0.3), Things.at(0, 0), lay, 0.3, 0)
+            .geometry();
+    Geometry plain = FallFootprint.of(round, Things.at(0, 0), lay, 0.3, 0).geometry();
+    assertThat(drawn.symDifference(plain).getArea())
+        .as("seed " + seed)
+        .isLessThan(0.01 * plain.getArea());
+  }
+
+  /** Every turn of the drawn crown, stretched corner by corner, lies inside, with the stem. */
+  @ParameterizedTest
+  @ValueSource(longs = {1, 2, 3, 4, 5, 6, 7, 8, 9, 10})
+  void holdsEveryTurnOfADrawnCrown(long seed) {
+    Random r = new Random(seed);
+    FallOutline tree = drawn(r, 0, false);
+    double lay = 360 * r.nextDouble();
+    double slide = r.nextBoolean() ? 0 : 6 * r.nextDouble();
+    FallFootprint f = FallFootprint.of(tree, Things.at(0, 0), lay, r.nextDouble(), slide);
+    double hind = Double.POSITIVE_INFINITY;
+    double fore = Double.NEGATIVE_INFINITY;
+    for (Position c : tree.crown()) {
+      double s = c.eastM() * sin(lay) + c.northM() * cos(lay);
+      hind = Math.min(hind, s);
+      fore = Math.max(fore, s);
+    }
+    double push = Math.tan(Math.toRadians(tree.leanDeg())) * sin(tree.leanAzimuthDeg() - lay);
+    Geometry allowed = f.geometry().buffer(1e-6);
+    for (Position c : tree.crown()) {
+      double s = c.eastM() * sin(lay) + c.northM() * cos(lay);
+      double aside = c.eastM() * cos(lay) - c.northM() * sin(lay);
+      double along =
+          tree.crownBaseM() + (s - hind) / (fore - hind) * (tree.reachM() - tree.crownBaseM());
+      for (int i = -4; i <= 4; i++) {
+        double turned = lay + i / 4.0 * f.halfAngleDeg();
+        for (double p : new double[] {aside, aside + along * push}) {
+          double e = along * sin(turned) + p * cos(turned);
+          double n = along * cos(turned) - p * sin(turned);
+          assertThat(allowed.covers(Shape.FACTORY.createPoint(new Coordinate(e, n))))
+              .as("seed %d, corner %s, turn %d", seed, c, i)
+              .isTrue();
+        }
+      }
+    }
+    assertThat(f.geometry().isValid()).as("seed " + seed).isTrue();
+  }
+
+  @ParameterizedTest
+  @ValueSource(longs = {1, 2, 3, 4, 5})
+  void turningOrMirroringADrawnCrownTurnsOrMirrorsItsFootprint(long seed) {
+    double lay = 360 * new Random(seed).nextDouble();
+    double turn = 77;
+    Geometry here =
+        FallFootprint.of(drawn(new Random(seed), 0, false), Things.at(0, 0), lay, 0.4, 3)
+            .geometry();
+    Geometry turned =
+        FallFootprint.of(drawn(new Random(seed), turn, false), Things.at(0, 0), lay + turn, 0.4, 3)
+            .geometry();
+    Geometry mirrored =
+        FallFootprint.of(drawn(new Random(seed), 0, true), Things.at(0, 0), 360 - lay, 0.4, 3)
+            .geometry();
+    double corners = 5e-4 * here.getArea();
+    assertThat(
+            turned
+                .symDifference(
+                    AffineTransformation.rotationInstance(-Math.toRadians(turn)).transform(here))
+                .getArea())
+        .as("seed " + seed)
+        .isLessThan(corners);
+    assertThat(
+            mirrored
+                .symDifference(AffineTransformation.scaleInstance(-1, 1).transform(here))
+                .getArea())
+        .as("seed " + seed)
+        .isLessThan(corners);
+  }
+
+  /** A leaning tree with a crown of some corners about its stem, turned, then mirrored. */
+  private static FallOutline drawn(Random r, double turnDeg, boolean mirrored) {
+    double lean = 15 * r.nextDouble();
+    double azimuth = 360 * r.nextDouble();
+    FallOutline t = new FallOutline(5 + 20 * r.nextDouble(), 2, 2, 0.4, lean, 0);
+    int corners = 3 + r.nextInt(6);
+    List<Position> about = new ArrayList<>();
+    for (int i = 0; i < corners; i++) {
+      double a = (i + 0.8 * r.nextDouble()) * 360 / corners;
+      double d = 1 + 5 * r.nextDouble();
+      about.add(Things.at(0, 0).along(mirrored ? -a - turnDeg : a + turnDeg, d));
+    }
+    double toward = mirrored ? 360 - azimuth : (azimuth + turnDeg) % 360;
+    FallOutline leaning =
+        new FallOutline(
+            t.heightM(), t.crownBaseM(), t.crownRadiusM(), t.stumpDiameterM(), lean, toward);
+    Position axis = leaning.axisInCrown(Things.at(0, 0), 0.3);
+    Shape.Polygon outline =
+        new Shape.Polygon(
+            about.stream()
+                .map(p -> Things.at(p.eastM() + axis.eastM(), p.northM() + axis.northM()))
+                .toList());
+    return leaning.drawn(outline.geometry(), Things.at(0, 0), 0.3);
+  }
+
+  private static double sin(double deg) {
+    return Math.sin(Math.toRadians(deg));
+  }
+
+  private static double cos(double deg) {
+    return Math.cos(Math.toRadians(deg));
   }
 
   private static FallOutline lean(FallOutline t, double azimuth) {

@@ -103,6 +103,64 @@ class FallFootprintTest {
   }
 
   @Test
+  void aCrownDrawnToOneSideLiesToThatSide() {
+    // from above: two metres to the left of the stem, four to the right, four deep
+    FallOutline tree =
+        new FallOutline(12, 6, 3, 1.2, 0, 0)
+            .drawn(Things.polygon(-2, -2, 4, -2, 4, 2, -2, 2).geometry(), Things.at(0, 0), 0.3);
+    assertThat(picture(FallFootprint.of(tree, Things.at(0, 0), 0, 0, 0), -5, 6, -3, 16))
+        .isEqualTo(
+            """
+            ............
+            ...#######..
+            ..#########.
+            ..#########.
+            ..#########.
+            ...#######..
+            ...#######..
+            ...#######..
+            ...#######..
+            ...#######..
+            ...#######..
+            ....###.....
+            .....#......
+            .....#......
+            .....#......
+            .....#......
+            .....o......
+            .....#......
+            .....#......
+            ............
+            """);
+    // felled to the south, what stands out to the east still comes down to the east
+    FallFootprint south = FallFootprint.of(tree, Things.at(0, 0), 180, 0, 0);
+    assertThat(south.contains(Things.at(3.9, -10))).isTrue();
+    assertThat(south.contains(Things.at(-3.9, -10))).isFalse();
+  }
+
+  @Test
+  void aDrawnCrownSlidesOnAsAWhole() {
+    FallOutline tree =
+        new FallOutline(8, 4, 1.5, 1.2, 0, 0)
+            .drawn(Things.polygon(-1, -1, 2, -1, 2, 1, -1, 1).geometry(), Things.at(0, 0), 0.3);
+    FallFootprint still = FallFootprint.of(tree, Things.at(0, 0), 0, 0, 0);
+    FallFootprint slid = FallFootprint.of(tree, Things.at(0, 0), 0, 0, 4);
+    assertThat(still.contains(Things.at(1.9, 14))).isFalse();
+    assertThat(slid.contains(Things.at(1.9, 14))).isTrue();
+    assertThat(slid.geometry().buffer(1e-6).covers(still.geometry())).isTrue();
+  }
+
+  @Test
+  void aCrownOffItsStemCountsOnBothSidesOfIt() {
+    FallOutline tree = new FallOutline(12, 6, 2, 0.4, 0, 0).offset(Things.at(3, 0));
+    FallFootprint f = FallFootprint.of(tree, Things.at(0, 0), 0, 0, 0);
+    assertThat(f.contains(Things.at(4.9, 10.5))).isTrue();
+    assertThat(f.contains(Things.at(-1.9, 10.5))).isTrue();
+    assertThat(f.contains(Things.at(-4, 10.5))).isFalse();
+    assertThat(tree.crownReachM()).isCloseTo(5, within(0.01));
+  }
+
+  @Test
   void aSlideDrawsTheCrownOut() {
     FallOutline tree = new FallOutline(8, 4, 1.5, 1.2, 0, 0);
     assertThat(picture(FallFootprint.of(tree, Things.at(0, 0), 0, 0, 4), -4, 4, -3, 16))

@@ -128,6 +128,7 @@ public final class Fallwright implements Runnable {
             .addSubcommand(new TodayCommand(home))
             .addSubcommand(new SpeciesCommand())
             .addSubcommand(new FiguresCommand())
+            .addSubcommand(new RulesCommand())
             .addSubcommand(new MeasureCommand())
             .addSubcommand(new OpenCommand(home, desktop))
             .addSubcommand(new DemoCommand(home, desktop));

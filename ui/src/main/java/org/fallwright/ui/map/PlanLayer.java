@@ -9,11 +9,14 @@ public enum PlanLayer {
   FOOTPRINT,
   PEOPLE_RING,
   BIGHTS,
+  HANG_UPS,
   WIRES,
   TREE,
   ANCHORS,
   SPOTS,
   LINE,
   WAYS_OUT,
+  CLEAR_FIRST,
+  STANDING_PLACES,
   LABELS
 }

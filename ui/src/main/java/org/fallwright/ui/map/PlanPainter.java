@@ -69,6 +69,9 @@ public final class PlanPainter {
     if (scene.shows(PlanLayer.BIGHTS)) {
       ZonesPainter.bights(canvas, chosen);
     }
+    if (scene.shows(PlanLayer.HANG_UPS)) {
+      CrewPainter.hangUps(canvas, chosen.ground());
+    }
   }
 
   private void objects(Canvas canvas) {
@@ -91,8 +94,15 @@ public final class PlanPainter {
     if (chosen != null && scene.shows(PlanLayer.LINE)) {
       LinePainter.setup(canvas, chosen);
     }
+    Ground ground = chosen == null ? null : chosen.ground();
+    if (ground != null && scene.shows(PlanLayer.CLEAR_FIRST)) {
+      CrewPainter.clearFirst(canvas, ground);
+    }
     if (scene.shows(PlanLayer.ANCHORS)) {
       SupportsPainter.marks(canvas);
+    }
+    if (ground != null && scene.shows(PlanLayer.STANDING_PLACES)) {
+      CrewPainter.places(canvas, ground);
     }
   }
 
@@ -113,6 +123,7 @@ public final class PlanPainter {
       e.expandToInclude(ground.footprint().getEnvelopeInternal());
       e.expandToInclude(ground.sitBack().getEnvelopeInternal());
       ground.bights().forEach(b -> e.expandToInclude(b.getEnvelopeInternal()));
+      ground.bridles().forEach(b -> e.expandToInclude(b.getEnvelopeInternal()));
       chosen.line().forEach(p -> include(e, p.at()));
       chosen.haul().forEach(p -> include(e, p.at()));
     }

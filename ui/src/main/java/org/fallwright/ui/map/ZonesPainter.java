@@ -3,6 +3,7 @@ package org.fallwright.ui.map;
 import java.awt.Shape;
 import java.awt.geom.Line2D;
 import java.awt.geom.Point2D;
+import java.util.List;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.site.Position;
 import org.fallwright.ui.text.Messages;
@@ -35,6 +36,16 @@ final class ZonesPainter {
     c.pen().fill(s, Palette.clear(c.palette().halo(), LIGHTEN));
     c.pen().dots(s, c.palette().footprint(), 15, 2.2);
     c.pen().stroke(s, c.palette().footprint(), 3.2);
+    if (chosen.ground().slide() != null) {
+      slide(c, chosen.ground().slide());
+    }
+  }
+
+  /** Where the felled tree may slide on: the dotted ground beyond, struck through across. */
+  private static void slide(Canvas c, Geometry m) {
+    Shape s = c.view().toPixels(m);
+    c.pen().hatch(s, Palette.clear(c.palette().footprint(), 190), 9, 1, 0);
+    c.labelOn(Messages.text("plan.slide"), m, 2, true, c.palette().footprint());
   }
 
   static void peopleRing(Canvas c, Judged chosen) {
@@ -52,7 +63,12 @@ final class ZonesPainter {
   }
 
   static void bights(Canvas c, Judged chosen) {
-    for (Geometry m : chosen.ground().bights()) {
+    all(c, chosen.ground().bights());
+    all(c, chosen.ground().bridles());
+  }
+
+  private static void all(Canvas c, List<Geometry> insides) {
+    for (Geometry m : insides) {
       Shape s = c.view().toPixels(m);
       c.pen().fill(s, Palette.clear(c.palette().halo(), LIGHTEN));
       c.pen().hatch(s, Palette.clear(c.palette().bight(), 190), 14, 1, 25);
@@ -86,7 +102,7 @@ final class ZonesPainter {
       c.pen().stroke(c.pen().head(to, way, 9), c.palette().wayOut(), 2.4);
       n++;
       c.keepFree(from, to);
-      c.label(Messages.text("plan.way-out", String.valueOf(n)), to, 5, 3, c.palette().wayOut());
+      c.label(Messages.text("plan.way-out"), to, 5, 3, c.palette().wayOut());
     }
   }
 }

@@ -35,7 +35,10 @@ public final class Cautions {
           "shear together with bending in the hinge, and cuts that are not as planned",
           "the stem's own weight in its bending",
           "what slings, anchors and the sag of the line give way",
-          "the tree's own roots before the cut: a proof pull is for that");
+          "the tree's own roots before the cut: a proof pull is for that",
+          "how far a leg of the line sags or swings, beside what it passes",
+          "broken wood that flies, and a tree that rolls",
+          "what ground, hedges and plants hide from the look-out");
 
   private Cautions() {}
 }

@@ -10,13 +10,16 @@ import java.util.function.UnaryOperator;
 import org.fallwright.core.advice.NotByPulling;
 import org.fallwright.core.plan.Check;
 import org.fallwright.core.plan.Figures;
+import org.fallwright.core.plan.Ground;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.PartLoad;
 import org.fallwright.core.plan.Plan;
 import org.fallwright.core.plan.Setup;
+import org.fallwright.core.plan.StandingPlace;
 import org.fallwright.core.plan.Verdict;
 import org.fallwright.core.site.CutPlan;
 import org.fallwright.core.site.Picture;
+import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.units.DisplayUnits;
 
@@ -32,6 +35,7 @@ import org.fallwright.core.units.DisplayUnits;
  * @param setup what is set up where
  * @param keepOut who and what must stay clear
  * @param loads loads on the parts with what is allowed, the nearest to it first
+ * @param crew what is to be cleared before the work, and who stands where
  * @param unsettled checks that are tight or worse
  * @param notes warnings of this setup
  * @param cautions what goes with every plan
@@ -48,6 +52,7 @@ record SheetContent(
     List<Line> setup,
     List<Line> keepOut,
     List<Load> loads,
+    List<Line> crew,
     List<Unsettled> unsettled,
     List<String> notes,
     List<String> cautions,
@@ -98,6 +103,7 @@ record SheetContent(
                         f.apply(l.allowedAtMost),
                         l.overAtMost))
             .toList(),
+        lines(crew, f),
         unsettled.stream().map(u -> new Unsettled(u.verdict, f.apply(u.text))).toList(),
         notes.stream().map(f).toList(),
         cautions.stream().map(f).toList(),
@@ -135,6 +141,7 @@ record SheetContent(
         setup(site, in, j),
         keepOut(site, in, j),
         loads(in, j),
+        crew(site, in, j.ground()),
         unsettled(j),
         j.notes(),
         Cautions.ALWAYS,
@@ -304,6 +311,43 @@ record SheetContent(
                   : "it falls towards " + String.join(", ", behind) + ". No line stops it"));
     }
     return lines;
+  }
+
+  private static List<Line> crew(Site site, DisplayUnits in, Ground g) {
+    List<Line> lines = new ArrayList<>();
+    if (g == null) {
+      return lines;
+    }
+    lines.add(
+        new Line(
+            "Clear before work",
+            g.clearFirst().isEmpty()
+                ? "nothing drawn in the people ring; look again, and ask at every door"
+                : String.join(
+                    "; ",
+                    g.clearFirst().stream().map(c -> "[ ] " + c.id() + ": " + c.act()).toList())));
+    lines.add(new Line("Who stands where", places(site, in, g)));
+    return lines;
+  }
+
+  /** Number, role, distance and bearing of each standing place. */
+  private static String places(Site site, DisplayUnits in, Ground g) {
+    Position stump = site.tree().stump().at();
+    return String.join(
+        "; ",
+        g.places().stream()
+            .map(
+                p ->
+                    p.number()
+                        + " "
+                        + p.role().word()
+                        + (p.role() == StandingPlace.Role.FELLER
+                            ? ""
+                            : " "
+                                + in.length(stump.distanceTo(p.at()))
+                                + " at "
+                                + azimuth(stump.azimuthTo(p.at()))))
+            .toList());
   }
 
   private static List<Load> loads(DisplayUnits in, Judged j) {

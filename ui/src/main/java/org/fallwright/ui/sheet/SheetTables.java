@@ -121,13 +121,19 @@ final class SheetTables {
     if (shown < rows.size()) {
       y = pen.line((rows.size() - shown) + " more parts in the plan document.", SMALL, x, y);
     }
-    return pen.wrapped(
-        "At most: the source stalls, slips or jerks. × over what is allowed.",
-        SMALL,
-        x,
-        y + 1,
-        width,
-        2);
+    y =
+        pen.wrapped(
+            "At most: the source stalls, slips or jerks. × over what is allowed.",
+            SMALL,
+            x,
+            y + 1,
+            width,
+            2);
+    for (SheetContent.Line l : content.crew()) {
+      y = pen.line(l.name(), HEAD, x, y + 2);
+      y = pen.wrapped(l.value(), BODY, x, y, width, 6);
+    }
+    return y;
   }
 
   private static Font font(boolean over) {
