@@ -16,6 +16,7 @@ import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullRequest;
 import org.fallwright.core.pull.PullSource;
 import org.fallwright.core.pull.SourceDescription;
+import org.fallwright.core.pull.Wording;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.junit.jupiter.api.Test;
@@ -30,7 +31,11 @@ class GroundZonesPlanTest {
     @Override
     public SourceDescription describe() {
       return new SourceDescription(
-          "steady", "Worked", Set.of(SourceDescription.PlaceKind.ANCHOR), false, List.of());
+          "steady",
+          new Wording("Worked", "Worked"),
+          Set.of(SourceDescription.PlaceKind.ANCHOR),
+          false,
+          List.of());
     }
 
     @Override
@@ -41,9 +46,13 @@ class GroundZonesPlanTest {
     @Override
     public PullOffer offer(PullRequest request) {
       double pull = request.parameters().get("pull_N").asDouble();
-      return new PullOffer(
-          pull, pull, pull, true, "as told", 1, false, 0.05, 0, 1, 1, 1, List.of(), List.of(),
-          List.of());
+      Wording said = new Wording("as told", "como se dice");
+      return PullOffer.giving(pull, pull, new PullOffer.Limit(said, said))
+          .holds(pull, true)
+          .overrun(0.05)
+          .anchor(1, 1)
+          .people(PullOffer.Standing.one("winch", "torno"))
+          .done();
     }
   }
 

@@ -116,7 +116,7 @@ class KitChecksTest {
   @Test
   void twoLinesAreJoinedWhereNoneReachesAlone() {
     Site two = site(20, 15, s -> {});
-    List<Setup> ways = new Ways(two, TinySite.SOURCES).all();
+    List<Setup> ways = new Ways(two, TinySite.SOURCES, new LeftOut(two)).all();
     assertThat(ways).extracting(Setup::line).contains("L2 + L1", "L1 + L2");
     Judge judge = new Judge(two, TinySite.SOURCES);
     Judged j = judge.judge(DIRECT.withLine("L1 + L2"));
@@ -125,7 +125,8 @@ class KitChecksTest {
         .extracting(PartLoad::part)
         .contains("line L1 + L2", "connector at joint of L1 + L2");
     assertThat(why(two, DIRECT.withLine("L1 + L2"), "connectors")).startsWith("2 connectors");
-    List<Setup> enough = new Ways(site(80, 15, s -> {}), TinySite.SOURCES).all();
+    Site reaching = site(80, 15, s -> {});
+    List<Setup> enough = new Ways(reaching, TinySite.SOURCES, new LeftOut(reaching)).all();
     assertThat(enough).extracting(Setup::line).doesNotContain("L2 + L1", "L1 + L2");
   }
 
