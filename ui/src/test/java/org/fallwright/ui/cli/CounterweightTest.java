@@ -38,7 +38,8 @@ class CounterweightTest {
     try (Stream<Path> built = Files.list(BUILT)) {
       Path jar =
           built
-              .filter(f -> f.getFileName().toString().matches("fallwright-counterweight-[0-9.]+jar"))
+              .filter(
+                  f -> f.getFileName().toString().matches("fallwright-counterweight-[0-9.]+jar"))
               .findFirst()
               .orElseThrow();
       Files.copy(jar, plugins.resolve("counterweight.jar"));
@@ -133,8 +134,7 @@ class CounterweightTest {
   private Said run(String... args) {
     StringWriter out = new StringWriter();
     StringWriter err = new StringWriter();
-    int status =
-        Fallwright.run(home, s -> {}, args, new PrintWriter(out), new PrintWriter(err));
+    int status = Fallwright.run(home, s -> {}, args, new PrintWriter(out), new PrintWriter(err));
     return new Said(status, out.toString(), err.toString());
   }
 }
