@@ -130,7 +130,14 @@ public final class Planner {
     List<String> notes = new ArrayList<>(ways.notes());
     notes.addAll(out.notes());
     notes.addAll(judge.notes());
-    return new Plan(best, judged, total.byVerdict, total.byBinding, total.bestRejected, notes);
+    return new Plan(
+        best,
+        judged,
+        total.byVerdict,
+        total.byBinding,
+        total.bestRejected,
+        notes,
+        ways.described());
   }
 
   /**

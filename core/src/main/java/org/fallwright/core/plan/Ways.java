@@ -4,11 +4,14 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.TreeMap;
 import java.util.TreeSet;
 import org.fallwright.core.pull.PullSource;
 import org.fallwright.core.pull.PullSources;
+import org.fallwright.core.pull.SourceDescription;
 import org.fallwright.core.pull.SourceDescription.PlaceKind;
 import org.fallwright.core.pull.SourceFault;
 import org.fallwright.core.reference.Allowances;
@@ -41,6 +44,15 @@ final class Ways {
   /** What could not be used, a sentence each; filled by {@link #all}. */
   List<String> notes() {
     return List.copyOf(new LinkedHashSet<>(notes));
+  }
+
+  /** What the sources of the site's gear say of themselves, by id. */
+  Map<String, SourceDescription> described() {
+    Map<String, SourceDescription> by = new TreeMap<>();
+    for (Gear.Source gear : site.gear().sources()) {
+      sources.byId(gear.plugin()).map(PullSource::describe).ifPresent(d -> by.put(d.id(), d));
+    }
+    return by;
   }
 
   /** Every way to pull; the lay of each is 0 and means nothing yet. */

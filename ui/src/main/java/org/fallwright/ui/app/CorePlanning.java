@@ -34,6 +34,7 @@ public record CorePlanning(PullSources sources) implements Planning {
         plan.byVerdict(),
         plan.byBindingCheck(),
         rejected,
-        plan.notes());
+        plan.notes(),
+        plan.sources());
   }
 }

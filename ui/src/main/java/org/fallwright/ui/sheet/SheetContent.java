@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Objects;
+import java.util.Optional;
 import java.util.function.Function;
 import java.util.function.UnaryOperator;
 import org.fallwright.core.advice.NotByPulling;
@@ -18,10 +19,12 @@ import org.fallwright.core.plan.Setup;
 import org.fallwright.core.plan.StandingPlace;
 import org.fallwright.core.plan.Verdict;
 import org.fallwright.core.site.CutPlan;
+import org.fallwright.core.site.Gear;
 import org.fallwright.core.site.Picture;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.units.DisplayUnits;
+import org.fallwright.ui.text.SourceText;
 
 /**
  * Every word and figure on the sheet, apart from the plan's own labels.
@@ -138,7 +141,7 @@ record SheetContent(
         sentence(plan, j),
         readings(in, j.figures()),
         pull(in, j.figures()),
-        setup(site, in, j),
+        setup(site, in, j, plan),
         keepOut(site, in, j),
         loads(in, j),
         crew(site, in, j.ground()),
@@ -240,7 +243,7 @@ record SheetContent(
     };
   }
 
-  private static List<Line> setup(Site site, DisplayUnits in, Judged j) {
+  private static List<Line> setup(Site site, DisplayUnits in, Judged j, Plan plan) {
     Setup s = j.setup();
     CutPlan cut = site.cut();
     List<Line> lines = new ArrayList<>();
@@ -268,15 +271,24 @@ record SheetContent(
       lines.add(new Line("Block at", String.join(", then ", s.redirects())));
     }
     lines.add(new Line("Source", placed(s.source(), s.mode(), s.place())));
+    gear(site, plan, s.source()).ifPresent(lines::add);
     if (s.driver() != null) {
       Setup.Driver d = s.driver();
       lines.add(new Line("Hauled by", placed(d.source(), d.mode(), d.place())));
+      gear(site, plan, d.source()).ifPresent(lines::add);
     }
     lines.add(
         new Line(
             "Gusts",
             "planned to " + in.speed(site.conditions().gustMps().value()) + " at the crown"));
     return lines;
+  }
+
+  /** What was entered of a source, in the source's own words. */
+  private static Optional<Line> gear(Site site, Plan plan, String id) {
+    Gear.Source source = site.source(id).orElseThrow();
+    return Optional.ofNullable(plan.sources().get(source.plugin()))
+        .map(d -> new Line(id, SourceText.inOneLine(d, source.parameters(), Locale.ENGLISH)));
   }
 
   private static String placed(String source, String mode, String place) {
