@@ -136,7 +136,12 @@ public enum FibreRope {
 
   /** Share of its strength that it keeps when wet. */
   public double wet() {
-    return Hardware.value("fibre." + key + ".wet");
+    return inWater().value();
+  }
+
+  /** The same with what stands behind it. */
+  Figure inWater() {
+    return Hardware.of("fibre." + key + ".wet");
   }
 
   /** Share of its strength that it keeps after two years in the weather. */

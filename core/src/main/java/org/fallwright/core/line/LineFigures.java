@@ -2,6 +2,7 @@ package org.fallwright.core.line;
 
 import java.util.Arrays;
 import java.util.Comparator;
+import java.util.Locale;
 import org.fallwright.core.reference.Kind;
 import org.fallwright.core.site.Gear;
 
@@ -59,7 +60,7 @@ public record LineFigures(
         end(line, line.sourceEnd()),
         bend(line, over, ratio),
         line.wet() && fibre
-            ? Share.row("fibre." + word(line) + ".wet")
+            ? Share.of(bare(line).fibre().inWater())
             : Share.whole("dry, or not of fibre"),
         line.weathered() && fibre
             ? Share.of(bare(line).fibre().weather())
@@ -104,10 +105,6 @@ public record LineFigures(
   /** The core of a wire rope. */
   public WireRope core() {
     return WireRope.valueOf(line.material().name().replace("WIRE_", ""));
-  }
-
-  private static String word(Gear.Line line) {
-    return line.material().name().toLowerCase(java.util.Locale.ROOT);
   }
 
   private static double byRuleN(Gear.Line line) {
@@ -164,7 +161,7 @@ public record LineFigures(
   static String words(Gear.End.Kind kind) {
     return kind == Gear.End.Kind.OTHER
         ? "end"
-        : kind.name().toLowerCase(java.util.Locale.ROOT).replace('_', ' ');
+        : kind.name().toLowerCase(Locale.ROOT).replace('_', ' ');
   }
 
   private static Share bend(Gear.Line line, Gear.Block over, double ratio) {

@@ -89,7 +89,7 @@ public record RatedFigures(String id, double ratedN, Rule rule, List<Share> shar
       case AS_RIGGED:
         return List.of();
       case VERTICAL:
-        return List.of(Share.row("sling.vertical"));
+        return List.of(Share.of(SlingHitch.VERTICAL.figure()));
       case BASKET:
         double leg = s.angleDeg() == null ? SlingHitch.FLATTEST_DEG : s.angleDeg();
         return List.of(
@@ -99,14 +99,14 @@ public record RatedFigures(String id, double ratedN, Rule rule, List<Share> shar
                 Kind.COMMON_PRACTICE,
                 ""));
       default:
-        String row =
+        SlingHitch choker =
             switch (s.kind()) {
-              case NATURAL_FIBRE -> "sling.choker-natural";
-              case WIRE_ROPE -> "sling.choker-wire";
-              default -> "sling.choker-synthetic";
+              case NATURAL_FIBRE -> SlingHitch.CHOKER_NATURAL_FIBRE;
+              case WIRE_ROPE -> SlingHitch.CHOKER_WIRE;
+              default -> SlingHitch.CHOKER_SYNTHETIC;
             };
         return List.of(
-            Share.row(row),
+            Share.of(choker.figure()),
             Share.row(SlingHitch.chokeRow(s.angleDeg() == null ? 0 : s.angleDeg())));
     }
   }

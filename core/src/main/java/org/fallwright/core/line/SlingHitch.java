@@ -1,5 +1,6 @@
 package org.fallwright.core.line;
 
+import org.fallwright.core.reference.Figure;
 import org.fallwright.core.reference.Hardware;
 import org.fallwright.core.units.Range;
 
@@ -19,15 +20,20 @@ public enum SlingHitch {
 
   private static final int[] CHOKE_FROM_DEG = {120, 90, 60, 30, 0};
 
-  private final double factor;
+  private final Figure figure;
 
   SlingHitch(String key) {
-    factor = Hardware.value(key);
+    figure = Hardware.of(key);
   }
 
   /** Factor on the vertical rating. */
   public double factor() {
-    return factor;
+    return figure.value();
+  }
+
+  /** The same with what stands behind it. */
+  Figure figure() {
+    return figure;
   }
 
   /** Factor of a basket whose legs stand at an angle to the horizontal [degrees]. */
