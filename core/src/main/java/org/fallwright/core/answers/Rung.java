@@ -73,6 +73,11 @@ public enum Rung {
     return checks.stream().anyMatch(p -> p.matcher(checkId).matches());
   }
 
+  /** The rungs that know a check of that id: one, or none where only a pull source knows it. */
+  public static List<Rung> known(String checkId) {
+    return java.util.Arrays.stream(values()).filter(r -> r.holds(checkId)).toList();
+  }
+
   /**
    * The rung of a check. What only a pull source knows, a check or a part of its own, belongs to
    * the source.
