@@ -109,7 +109,7 @@ public final class Judge {
     List<String> notes = new ArrayList<>(subject.notes());
     spares.note().ifPresent(notes::add);
     notes.addAll(exceptions.notes());
-    notes.addAll(landing.siteNotes());
+    notes.addAll(landing.words().ofSite());
     notes.addAll(RuleNotes.of(site, rules, in));
     return notes;
   }
@@ -265,7 +265,7 @@ public final class Judge {
     notes.addAll(offer.notes());
     Ground ground = full ? landing.ground(setup, zones, stand) : null;
     if (full) {
-      notes.addAll(landing.crewNotes(ground));
+      notes.addAll(landing.words().ofCrew(ground));
       notes.addAll(LandNotes.of(site, setup));
     }
     Check weakest = grade.weakest();

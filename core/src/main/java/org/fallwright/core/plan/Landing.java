@@ -4,10 +4,8 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
-import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.rules.RuleSet;
 import org.fallwright.core.site.Position;
-import org.fallwright.core.site.Shape;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.SubjectTree;
 import org.fallwright.core.site.Target;
@@ -28,7 +26,6 @@ import org.fallwright.core.zones.SitBackZone;
 import org.fallwright.core.zones.TapeTies;
 import org.fallwright.core.zones.TargetClearance;
 import org.fallwright.core.zones.WireCheck;
-import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Geometry;
 import org.locationtech.jts.operation.overlayng.OverlayNG;
 import org.locationtech.jts.operation.overlayng.OverlayNGRobust;
@@ -39,15 +36,14 @@ final class Landing {
   private final RuleSet rules;
   private final DisplayUnits in;
   private final Knowledge knowledge;
-  private final Subject subject;
   private final FallOutline outline;
-  private final TapeTies ties;
   private final LayTargets targets;
   private final List<Target> near;
   private final LayTargets hangUps;
   private final LookOut lookOut;
   private final double peopleM;
   private final List<ClearFirst> clearFirst;
+  private final LandingNotes words;
   private final DropZoneFit dropZone;
   private final WireCheck wires;
   private final List<WireCheck.Reach> reach;
@@ -119,10 +115,9 @@ final class Landing {
     this.rules = rules;
     this.in = in;
     this.knowledge = knowledge;
-    this.subject = subject;
     SubjectTree t = site.tree();
     outline = outline(site, subject.figures().stumpDiameterM());
-    ties = new TapeTies(site.tapeTies(), t.id(), t.stump(), site.targets());
+    TapeTies ties = new TapeTies(site.tapeTies(), t.id(), t.stump(), site.targets());
     targets = new LayTargets(site.targets(), ties::errorM);
     dropZone = site.dropZones().isEmpty() ? null : new DropZoneFit(site.dropZones());
     wires = new WireCheck(site.wires(), t.stump(), site.cut().heightM(), outline);
@@ -134,6 +129,7 @@ final class Landing {
     lookOut = new LookOut(site.targets());
     peopleM = PeopleRing.factor(site, rules) * t.heightM().value();
     clearFirst = ClearFirst.within(site, peopleM);
+    words = new LandingNotes(site, rules, in, subject, ground, ties, targets, reach);
   }
 
   private static FallOutline outline(Site site, double stumpDiameterM) {
@@ -150,6 +146,11 @@ final class Landing {
       return round.drawn(t.crownOutline().geometry(), t.stump().at(), site.cut().heightM());
     }
     return t.crownOffsetM() == null ? round : round.offset(t.crownOffsetM());
+  }
+
+  /** What is said of where the tree lands. */
+  LandingNotes words() {
+    return words;
   }
 
   /** How far the tree may slide on where the ground falls so [m]. */
@@ -203,7 +204,7 @@ final class Landing {
         angles,
         about,
         ways,
-        full ? notes(landed, setup, sitBack, route) : List.of());
+        full ? words.of(landed, setup, sitBack, route) : List.of());
   }
 
   /** Least length of a way out: the rule's, and past the crown as it stands where a rule asks. */
@@ -271,7 +272,10 @@ final class Landing {
           c.nearest(),
           () ->
               c.overlaps()
-                  ? struck(t) + ": " + amount(c.overlapAmount(), c.overlapUnit()) + " of it."
+                  ? LandingNotes.struck(t)
+                      + ": "
+                      + words.amount(c.overlapAmount(), c.overlapUnit())
+                      + " of it."
                   : "It clears "
                       + c.targetId()
                       + " by "
@@ -279,18 +283,6 @@ final class Landing {
                       + (c.askedM() > 0 ? " of the " + in.length(c.askedM()) + " asked." : "."));
     }
     return nearest;
-  }
-
-  /** What it means for a kind of thing to be struck. */
-  private static String struck(Target t) {
-    return switch (t.kind()) {
-      case TREE -> "The tree can hang up in " + t.id();
-      case ROAD -> "The tree can come down across " + t.id();
-      case PLACE_OF_PEOPLE -> "The tree can come down on " + t.id() + ", where people are";
-      case BURIED -> "The tree can come down on the ground over " + t.id();
-      case STRUCTURE, FENCE, CAR, PLANTING, OTHER ->
-          "The tree can come down on " + t.id() + (t.occupied() ? ", where people may be" : "");
-    };
   }
 
   /** Trees that may serve as anchors, and parked vehicles: nobody drew them as targets. */
@@ -310,7 +302,7 @@ final class Landing {
                   ? (tree ? "The tree can hang up in " : "The tree can come down on ")
                       + c.targetId()
                       + ": "
-                      + amount(c.overlapAmount(), c.overlapUnit())
+                      + words.amount(c.overlapAmount(), c.overlapUnit())
                       + (tree ? " of its crown." : " of its place.")
                   : "It clears " + c.targetId() + " by " + in.length(c.clearanceM()) + ".");
     }
@@ -318,10 +310,6 @@ final class Landing {
 
   private static double spare(TargetClearance c) {
     return c.clearanceM() - c.askedM();
-  }
-
-  private String amount(double amount, String unit) {
-    return unit.equals("m") ? in.length(amount) : in.area(amount);
   }
 
   private void dropZone(Grade grade, Landed landed) {
@@ -458,165 +446,6 @@ final class Landing {
       }
     }
     return ids;
-  }
-
-  /** What must be said of the crew's places. */
-  List<String> crewNotes(Ground g) {
-    List<String> notes = new ArrayList<>();
-    if (g.places().stream().noneMatch(p -> p.role() == StandingPlace.Role.LOOK_OUT)) {
-      notes.add(
-          "No place for a look-out was found from where the stump and the source are in sight; use"
-              + " two, or radio.");
-    }
-    if (!g.clearFirst().isEmpty()) {
-      notes.add(
-          "Clear before work, within "
-              + in.length(peopleM)
-              + " of the stump: "
-              + String.join(
-                  "; ", g.clearFirst().stream().map(c -> c.id() + ": " + c.act()).toList())
-              + ".");
-    }
-    return notes;
-  }
-
-  /** What must be said of the ground and of tapes, whatever the setup. */
-  List<String> siteNotes() {
-    List<String> notes = new ArrayList<>();
-    for (Target t : site.targets()) {
-      ties.disagreementM(t)
-          .ifPresent(
-              off ->
-                  notes.add(
-                      "A tape to "
-                          + t.id()
-                          + " and its drawing disagree by "
-                          + in.length(off)
-                          + "; that counts as its position error. Draw it again."));
-      if (ties.oneWayOnly(t)) {
-        notes.add(
-            "The tapes to "
-                + t.id()
-                + " all run one way and fix it to the stump in that way only; tape a second point of"
-                + " it.");
-      }
-    }
-    if (ground.steepestDeg() > Allowances.SLIDE_SLOPE.value() && rules.moreOnSlopes().yes()) {
-      notes.add(
-          "The ground falls "
-              + in.angle(Math.toRadians(ground.steepestDeg()))
-              + " by the heights entered. Where trees or logs may roll or slide the people ring must"
-              + " be more than two tree heights; no rule says how much"
-              + (site.zones().peopleRadius() == null ? ", and none is stated here." : "."));
-    }
-    for (WireCheck.Reach r : reach) {
-      Wire wire =
-          site.wires().stream().filter(w -> w.id().equals(r.wireId())).findFirst().orElseThrow();
-      boolean towers = wire.voltageKv() > HIGHEST_ON_POLES_KV;
-      rules
-          .consultDistanceM(towers)
-          .filter(c -> !c.metBy(r.groundM() - r.errorM(), 1))
-          .ifPresent(
-              c ->
-                  notes.add(
-                      "Line "
-                          + r.wireId()
-                          + " is nearer than "
-                          + in.length(c.value())
-                          + ": ask its operator first ("
-                          + c.citation()
-                          + "; "
-                          + c.status().words()
-                          + ")."));
-    }
-    return notes;
-  }
-
-  /** A line above this stands on towers, where nobody says otherwise [kV]. */
-  private static final double HIGHEST_ON_POLES_KV = 33;
-
-  private List<String> notes(Landed landed, Setup setup, SitBackZone sitBack, Route route) {
-    List<String> notes = new ArrayList<>();
-    double fall = ground.alongDeg(setup.layDeg());
-    if (fall > Allowances.SLIDE_SLOPE.value()) {
-      notes.add(
-          "The ground falls about "
-              + in.angle(Math.toRadians(fall))
-              + " along this lay by the heights entered: the felled tree may slide on, and ground for"
-              + " that is counted.");
-    }
-    for (TargetClearance c : landed.clearances()) {
-      if (c.mayBeHit() && c.overlaps()) {
-        notes.add(
-            struck(target(c.targetId()))
-                + " ("
-                + amount(c.overlapAmount(), c.overlapUnit())
-                + "), which may be hit.");
-      }
-    }
-    List<String> stake =
-        sitBack.atStake(targets).stream()
-            .filter(o -> !ground(o.targetId()))
-            .map(o -> o.targetId() + " (" + amount(o.amount(), o.unit()) + ")")
-            .toList();
-    notes.add(
-        stake.isEmpty()
-            ? "If line or hinge is lost the tree falls back with up to "
-                + fallBack()
-                + "; no line stops it once it goes."
-            : "If line or hinge is lost the tree falls back on "
-                + String.join(", ", stake)
-                + ": nobody indoors, nobody on that side. It brings up to "
-                + fallBack()
-                + "; no line stops it once it goes.");
-    for (WireCheck.Reach r : reach) {
-      if (!r.stops() && r.advises()) {
-        notes.add(
-            "Line "
-                + r.wireId()
-                + " lies within two tree lengths and the approach distance: "
-                + (rules.extraAdviceTwoH().yes()
-                    ? "its owner's plan is asked for first."
-                    : "ask its owner before the work."));
-      }
-    }
-    for (Target t : site.targets()) {
-      if (!LineRun.matters(t) && t.kind() == Target.Kind.ROAD && crosses(t, route)) {
-        notes.add("The line runs along or over " + t.id() + ": close it for the work.");
-      }
-    }
-    return notes;
-  }
-
-  /** Energy of the whole tree falling from where its mass centre stands. */
-  private String fallBack() {
-    double high = subject.figures().massCentreM() - site.cut().heightM();
-    return in.energy(subject.figures().massKg() * G * high);
-  }
-
-  private static final double G = 9.80665;
-
-  private Target target(String id) {
-    return site.targets().stream().filter(t -> t.id().equals(id)).findFirst().orElseThrow();
-  }
-
-  private boolean ground(String id) {
-    return site.targets().stream()
-        .anyMatch(
-            t ->
-                t.id().equals(id)
-                    && (t.kind() == Target.Kind.ROAD || t.kind() == Target.Kind.BURIED));
-  }
-
-  private static boolean crosses(Target t, Route route) {
-    List<Position> path = route.path();
-    return t.shape()
-        .geometry()
-        .intersects(
-            Shape.FACTORY.createLineString(
-                path.stream()
-                    .map(p -> new Coordinate(p.eastM(), p.northM()))
-                    .toArray(Coordinate[]::new)));
   }
 
   private static double normal(double deg) {
