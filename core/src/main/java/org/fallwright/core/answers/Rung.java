@@ -13,16 +13,19 @@ public enum Rung {
   LAY(
       "lay lands clear",
       "clear of .+",
+      "hang-up in .+",
       "inside .+",
       "wire .+ in the lay",
       "wire .+ in reach",
       "voltage of .+",
       "wires looked for"),
-  LINE("line runs clear", "line clear of .+"),
+  LINE("line runs clear", "line clear of .+", "bridle .+ clear of .+", "wire .+ from .+"),
   KIT(
       "kit reaches",
       "line length",
       "joint",
+      "sheave",
+      "take-up of the source",
       "haul line",
       "blocks",
       "slings",
@@ -52,6 +55,8 @@ public enum Rung {
       "ways out",
       "operator distance",
       "operator clear",
+      "operator off the line",
+      "stored energy",
       "people indoors");
 
   private final String word;

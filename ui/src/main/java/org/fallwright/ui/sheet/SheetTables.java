@@ -34,6 +34,7 @@ final class SheetTables {
   private int mostLoads = 16;
   private int mostUnsettled = 10;
   private int mostNotes = 8;
+  private int mostCrewLines = 6;
 
   SheetTables(SheetContent content, double left, double right) {
     this.content = content;
@@ -67,6 +68,8 @@ final class SheetTables {
       mostLoads--;
     } else if (mostUnsettled > FEWEST) {
       mostUnsettled--;
+    } else if (mostCrewLines > FEWEST) {
+      mostCrewLines--;
     } else {
       return false;
     }
@@ -131,7 +134,7 @@ final class SheetTables {
             2);
     for (SheetContent.Line l : content.crew()) {
       y = pen.line(l.name(), HEAD, x, y + 2);
-      y = pen.wrapped(l.value(), BODY, x, y, width, 6);
+      y = pen.wrapped(l.value(), BODY, x, y, width, mostCrewLines);
     }
     return y;
   }

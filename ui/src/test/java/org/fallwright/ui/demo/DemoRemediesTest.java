@@ -152,7 +152,12 @@ class DemoRemediesTest {
   void aPlanOfTheChangedSiteFindsIt() {
     DemoSite[] sites = {
       DEMO.only("pickup", "V2"),
-      DEMO.only("hand-winch", "S1"),
+      DEMO.only("hand-winch", "A3")
+          .with(
+              s ->
+                  ((ArrayNode) s.get("cut").withArray("hinge_thicknesses_m"))
+                      .removeAll()
+                      .add(0.09)),
       DEMO.only("pickup", "V1")
           .with(s -> ((ObjectNode) s.at("/conditions/gust_mps")).put("value", 9.0)),
       DEMO.only("hand-winch", "A3")
