@@ -31,8 +31,7 @@ class AnswerCommandsTest {
   @BeforeEach
   void write() throws SiteFileException {
     file = folder.resolve("small.fallsite.json");
-    SiteFile.write(
-        DemoSite.asItIs().in(Site.Display.METRIC).only("hand-winch", "A3").site(), file);
+    SiteFile.write(DemoSite.asItIs().in(Site.Display.METRIC).only("hand-winch", "A3").site(), file);
   }
 
   private int run(String command, String... more) {
@@ -50,7 +49,9 @@ class AnswerCommandsTest {
     assertThat(run("why", "A2")).as("%s", err).isEqualTo(3);
     assertThat(out.toString().lines().filter(l -> l.contains(": kept, ") || l.contains(": MISSED")))
         .hasSize(7);
-    assertThat(out.toString()).contains(">> anchor holds: MISSED, not workable").doesNotContain("NaN");
+    assertThat(out.toString())
+        .contains(">> anchor holds: MISSED, not workable")
+        .doesNotContain("NaN");
     assertThat(run("why", "--setup", "1")).as("%s", err).isZero();
     assertThat(out.toString()).doesNotContain(">>");
     assertThat(run("why")).isEqualTo(2);
@@ -100,14 +101,15 @@ class AnswerCommandsTest {
   void todayPrintsTheSlipAndRecordsOnlyWhatSomebodyAccepts() throws SiteFileException {
     Site before = SiteFile.read(file);
     assertThat(run("today", "--line-at", "8.0")).as("%s", err).isZero();
-    assertThat(out.toString()).contains("Revision B, not recorded").contains("line at 8.00 m, was 10.5 m");
+    assertThat(out.toString())
+        .contains("Revision B, not recorded")
+        .contains("line at 8.00 m, was 10.5 m");
     assertThat(SiteFile.read(file)).isEqualTo(before);
     assertThat(run("today", "--line-at", "8.0", "--record", "2026-05-04 09:12")).isEqualTo(2);
     assertThat(err.toString()).contains("somebody must accept it by name");
     assertThat(SiteFile.read(file)).isEqualTo(before);
     assertThat(
-            run(
-                "today", "--line-at", "8.0", "--record", "2026-05-04 09:12", "--accepted-by", "A"))
+            run("today", "--line-at", "8.0", "--record", "2026-05-04 09:12", "--accepted-by", "A"))
         .as("%s", err)
         .isZero();
     assertThat(SiteFile.read(file).revisions()).hasSize(1);
