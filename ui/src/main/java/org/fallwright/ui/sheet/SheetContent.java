@@ -24,6 +24,7 @@ import org.fallwright.core.site.Picture;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.units.DisplayUnits;
+import org.fallwright.ui.text.Amounts;
 import org.fallwright.ui.text.SourceText;
 
 /**
@@ -284,11 +285,16 @@ record SheetContent(
     return lines;
   }
 
-  /** What was entered of a source, in the source's own words. */
+  /** The first of what was entered of a source, in the source's own words. */
   private static Optional<Line> gear(Site site, Plan plan, String id) {
     Gear.Source source = site.source(id).orElseThrow();
     return Optional.ofNullable(plan.sources().get(source.plugin()))
-        .map(d -> new Line(id, SourceText.inOneLine(d, source.parameters(), Locale.ENGLISH)));
+        .map(
+            d ->
+                new Line(
+                    id,
+                    SourceText.inOneLine(
+                        d, source.parameters(), Locale.ENGLISH, new Amounts(site.display()), 2)));
   }
 
   private static String placed(String source, String mode, String place) {

@@ -26,24 +26,42 @@ public final class SourceText {
   private static final Wording OPTIONAL = new Wording("may be left out", "se puede omitir");
   private static final Wording ONLY = new Wording("only where %s is %s", "solo si %s es %s");
 
+  /** Below it a length is shown as one of the cut or the stem [m]. */
+  private static final double SMALL_M = 0.5;
+
   private SourceText() {}
 
   /** A parameter's name and the value that a site states for it. */
   public record Stated(String name, String value) {}
 
-  /** What a site states of a source, in the order of the source's description. */
-  public static List<Stated> stated(SourceDescription source, ObjectNode values, Locale in) {
+  /** What a site states of a source, in the order of its description and the reader's units. */
+  public static List<Stated> stated(
+      SourceDescription source, ObjectNode values, Locale in, Amounts amounts) {
     return source.parameters().stream()
         .filter(p -> values.hasNonNull(p.key()))
-        .map(p -> new Stated(p.label().in(in), value(p, values.get(p.key()), in)))
+        .map(p -> new Stated(p.label().in(in), shown(p, values.get(p.key()), in, amounts)))
         .toList();
   }
 
-  /** The same in one line: "Mass: 300 kg · Drop: 3 m". */
-  public static String inOneLine(SourceDescription source, ObjectNode values, Locale in) {
-    return stated(source, values, in).stream()
-        .map(s -> s.name() + ": " + s.value())
-        .collect(Collectors.joining(" · "));
+  private static String shown(Parameter p, JsonNode value, Locale in, Amounts amounts) {
+    if (!value.isNumber() || p.unit().isEmpty()) {
+      return value(p, value, in);
+    }
+    double si = value.doubleValue();
+    return p.unit().equals("m") && Math.abs(si) < SMALL_M
+        ? amounts.small(si)
+        : amounts.amount(si, p.unit());
+  }
+
+  /** The first {@code most} of the same in one line: "Mass: 300 kg · Drop: 3 m …". */
+  public static String inOneLine(
+      SourceDescription source, ObjectNode values, Locale in, Amounts amounts, int most) {
+    List<Stated> all = stated(source, values, in, amounts);
+    return all.stream()
+            .limit(most)
+            .map(s -> s.name() + ": " + s.value())
+            .collect(Collectors.joining(" · "))
+        + (all.size() > most ? " …" : "");
   }
 
   /** All that somebody needs who fills in the source's parameters, line by line. */

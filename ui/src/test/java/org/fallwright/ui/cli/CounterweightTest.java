@@ -91,8 +91,8 @@ class CounterweightTest {
     assertThat(sheet.err).isEmpty();
     try (PDDocument doc = Loader.loadPDF(Files.readAllBytes(pdf))) {
       assertThat(new PDFTextStripper().getText(doc).replaceAll("\\s+", " "))
-          .contains("Mass of the weight: 300 kg")
-          .contains("Drop: 6 m");
+          .contains("Mass of the weight: 661 lb")
+          .contains("Drop: 19 ft 8 in");
     }
   }
 

@@ -15,6 +15,7 @@ import org.fallwright.core.pull.SourceDescription;
 import org.fallwright.core.pull.Wording;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.units.Range;
+import org.fallwright.plugins.api.Amount;
 import org.fallwright.plugins.api.PullSourceExtension;
 import org.pf4j.Extension;
 
@@ -141,10 +142,10 @@ public final class BlockSystem implements PullSourceExtension {
               Math.min(MOST_RATIO, kit.lineM() / needed),
               String.format(
                   Locale.ROOT,
-                  "The line of the tackle at the pull line is %.1f m; its parts and tails need"
-                      + " %.1f m.",
-                  kit.lineM(),
-                  needed)));
+                  "The line of the tackle at the pull line is %s; its parts and tails need"
+                      + " %s.",
+                  Amount.length(kit.lineM()),
+                  Amount.length(needed))));
     }
     return checks;
   }

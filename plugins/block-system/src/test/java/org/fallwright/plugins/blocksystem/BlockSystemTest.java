@@ -68,7 +68,8 @@ class BlockSystemTest {
     assertThat(four.checks()).containsExactly(DRIVERS_CHECK);
     assertThat(four.notes()).contains("Creep.");
     assertThat(four.limit().what().english()).isEqualTo("grip of the rear axle, through 4:1");
-    assertThat(four.notes().get(0)).startsWith("The haul end moves 11.2 m, 4 times the take-up");
+    assertThat(four.notes().get(0))
+        .startsWith("The haul end moves 11.2 m (36 ft 9 in), 4 times the take-up");
   }
 
   @Test
@@ -244,7 +245,7 @@ class BlockSystemTest {
     assertThat(not.travel().mostM()).isEqualTo(1.0);
     assertThat(not.notes().get(0))
         .isEqualTo(
-            "The haul end moves 8.4 m, 3 times the take-up; with 1.5 m between its blocks it must"
+            "The haul end moves 8.40 m (27 ft 7 in), 3 times the take-up; with 1.50 m (4 ft 11 in) between its blocks it must"
                 + " be reset 2 times, and nothing holds the line meanwhile.");
     PullOffer held =
         offer("3", close.deepCopy().put("capture_N", 9000).put("capture_at", "pull-line"));
@@ -253,19 +254,20 @@ class BlockSystemTest {
     assertThat(held.people()).hasSize(2);
     assertThat(held.people().get(1).where()).isEqualTo(PullOffer.Where.AT_CAPTURE);
     PullOffer far = offer("3", close.deepCopy().put("room_m", 5));
-    assertThat(far.notes().get(0)).endsWith("its blocks are far enough apart at 5.0 m.");
+    assertThat(far.notes().get(0))
+        .endsWith("its blocks are far enough apart at 5.00 m (16 ft 5 in).");
   }
 
   @Test
   void saysWhichOfItsPartsIsLoadedMost() {
     assertThat(offer("2", "fixed").notes())
         .contains(
-            "Of its own parts the tackle line is loaded most: it comes to its limit at 17.5 kN on"
-                + " the pull line.");
+            "Of its own parts the tackle line is loaded most: it comes to its limit at 17.4 kN (3,930"
+                + " lbf) on the pull line.");
     assertThat(offer("4", "fixed").notes())
         .contains(
             "Of its own parts the tackle block at the anchor is loaded most: it comes to its limit"
-                + " at 23.0 kN on the pull line.");
+                + " at 22.9 kN (5,160 lbf) on the pull line.");
   }
 
   @Test

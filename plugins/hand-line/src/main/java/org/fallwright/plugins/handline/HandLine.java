@@ -13,6 +13,7 @@ import org.fallwright.core.pull.SourceDescription;
 import org.fallwright.core.pull.Wording;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.reference.Surface;
+import org.fallwright.plugins.api.Amount;
 import org.fallwright.plugins.api.ParameterReader;
 import org.fallwright.plugins.api.PullSourceExtension;
 import org.pf4j.Extension;
@@ -189,16 +190,16 @@ public final class HandLine implements PullSourceExtension {
       notes.add(
           String.format(
               Locale.ROOT,
-              "Walking back, the crew needs %.1f m clear behind it, which is not stated.",
-              haul + SPARE_M));
+              "Walking back, the crew needs %s clear behind it, which is not stated.",
+              Amount.length(haul + SPARE_M)));
     } else if (haul > room - SPARE_M && gang.capture() != Capture.NONE) {
       notes.add(
           String.format(
               Locale.ROOT,
-              "The haul is %.1f m and there are %.1f m behind the crew: it walks back in several"
+              "The haul is %s and there are %s behind the crew: it walks back in several"
                   + " bites, the line held between them.",
-              haul,
-              room));
+              Amount.length(haul),
+              Amount.length(room)));
     }
   }
 }

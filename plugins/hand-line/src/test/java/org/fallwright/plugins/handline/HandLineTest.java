@@ -171,14 +171,15 @@ class HandLineTest {
     assertThat(held.travel().mostM()).isNull();
     assertThat(held.notes())
         .contains(
-            "The haul is 3.0 m and there are 2.5 m behind the crew: it walks back in several bites,"
+            "The haul is 3.00 m (9 ft 10 in) and there are 2.50 m (8 ft 2 in) behind the crew: it walks back in several bites,"
                 + " the line held between them.");
     PullOffer hands =
         handLine.offer(request(DRY, walks.deepCopy().put("haul", "hand-over-hand"), 2.5));
     assertThat(hands.lowN()).isCloseTo(4 * 0.79 * 147, within(1e-9));
     assertThat(hands.travel().mostM()).isNull();
     assertThat(handLine.offer(request(DRY, parameters(4, 0.1, false), 0)).notes())
-        .contains("Walking back, the crew needs 4.0 m clear behind it, which is not stated.");
+        .contains(
+            "Walking back, the crew needs 4.00 m (13 ft 1 in) clear behind it, which is not stated.");
   }
 
   @Test

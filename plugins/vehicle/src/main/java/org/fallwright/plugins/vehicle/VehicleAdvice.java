@@ -8,6 +8,7 @@ import org.fallwright.core.pull.PullOffer.Part;
 import org.fallwright.core.pull.PullRequest;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.units.DisplayUnits;
+import org.fallwright.plugins.api.Amount;
 import org.fallwright.plugins.vehicle.Chassis.AxleLoad;
 
 /** What is checked and said of a vehicle's pull beside its figures. */
@@ -67,10 +68,10 @@ final class VehicleAdvice {
               Math.min(MOST_RATIO, there / asked),
               String.format(
                   Locale.ROOT,
-                  "%.1f m clear ahead of the vehicle, %.1f m asked: its travel and %.0f m.",
-                  there,
-                  asked,
-                  RUN_OUT_SPARE_M)));
+                  "%s clear ahead of the vehicle, %s asked: its travel and %s.",
+                  Amount.length(there),
+                  Amount.length(asked),
+                  Amount.length(RUN_OUT_SPARE_M))));
     }
     if (request.stand().offHeadingRad() != null) {
       double off = Math.toDegrees(request.stand().offHeadingRad());
@@ -106,8 +107,8 @@ final class VehicleAdvice {
       notes.add(
           String.format(
               Locale.ROOT,
-              "The clear way ahead is not stated; this pull asks for %.1f m.",
-              runOutAskedM()));
+              "The clear way ahead is not stated; this pull asks for %s.",
+              Amount.length(runOutAskedM())));
     }
     if (figures.standIn() != null) {
       notes.add(

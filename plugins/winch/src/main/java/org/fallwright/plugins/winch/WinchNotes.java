@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import org.fallwright.core.pull.PullRequest;
+import org.fallwright.plugins.api.Amount;
 
 /** Remarks and warnings of a winch. */
 final class WinchNotes {
@@ -14,8 +15,6 @@ final class WinchNotes {
    */
   static final double KEPT_UP_N = 225;
 
-  private static final double MM = 1000;
-
   private WinchNotes() {}
 
   static List<String> of(Plate winch, int layer, PullRequest request) {
@@ -23,15 +22,17 @@ final class WinchNotes {
     double lineIn = request.pull().lineInM();
     if (winch.kind().powered()) {
       notes.add(
-          say("It takes in %.2f m in about %.0f s.", lineIn, Math.ceil(lineIn / winch.speedMps())));
+          say(
+              "It takes in %s in about %.0f s.",
+              Amount.length(lineIn), Math.ceil(lineIn / winch.speedMps())));
     } else {
       notes.add(
           say(
-              "About %.0f %s of %.0f mm take in %.2f m.",
+              "About %.0f %s of %s take in %s.",
               Math.ceil(lineIn / winch.strokeM()),
               winch.kind().crank() ? "turns" : "strokes",
-              winch.strokeM() * MM,
-              lineIn));
+              Amount.smallLength(winch.strokeM()),
+              Amount.length(lineIn)));
       hand(winch, layer, request.pull().workingN()).ifPresent(notes::add);
     }
     if (winch.reel() != null) {
@@ -39,8 +40,8 @@ final class WinchNotes {
       if (winch.reel().startOutM() > 0) {
         notes.add(
             say(
-                "Reckoned with %.1f m of wire pulled out at the start; with less out it pulls less.",
-                winch.reel().startOutM()));
+                "Reckoned with %s of wire pulled out at the start; with less out it pulls less.",
+                Amount.length(winch.reel().startOutM())));
       }
     }
     notes.add(
@@ -68,9 +69,9 @@ final class WinchNotes {
     double pull = Math.min(workingN, winch.ratedOnLayerN(layer));
     double force = winch.drive().handN(pull * winch.further(layer));
     return Optional.of(
-        say("At the pull that is planned the hand presses with about %.0f N", force)
+        say("At the pull that is planned the hand presses with about %s", Amount.force(force))
             + (force > KEPT_UP_N
-                ? say("; more than %.0f N nobody keeps up: take turns.", KEPT_UP_N)
+                ? say("; more than %s nobody keeps up: take turns.", Amount.forceAtMost(KEPT_UP_N))
                 : "."));
   }
 

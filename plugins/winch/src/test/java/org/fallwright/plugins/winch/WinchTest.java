@@ -40,9 +40,9 @@ class WinchTest {
   @Test
   void tellsTheStrokesForTheTakeUpAtItsOwnLineEnd() {
     assertThat(winch.offer(request(throughRope(), 2.86, 1)).notes())
-        .contains("About 48 strokes of 60 mm take in 2.86 m.");
+        .contains("About 48 strokes of 60 mm (2.4 in) take in 2.86 m (9 ft 5 in).");
     assertThat(winch.offer(request(throughRope(), 2.86, 3)).notes())
-        .contains("About 143 strokes of 60 mm take in 8.58 m.");
+        .contains("About 143 strokes of 60 mm (2.4 in) take in 8.58 m (28 ft 2 in).");
   }
 
   @ParameterizedTest
@@ -225,7 +225,7 @@ class WinchTest {
     assertThat(easy.lowN()).isEqualTo(9800);
     assertThat(easy.notes())
         .contains(
-            "At the pull that is planned the hand presses with about 245 N; more than 225 N nobody"
+            "At the pull that is planned the hand presses with about 0.245 kN (55.1 lbf); more than 0.225 kN (50.5 lbf) nobody"
                 + " keeps up: take turns.");
     PullOffer hard = winch.offer(request(throughRope().put("hand_N", 700), 1, 1));
     assertThat(hard.lowN()).isCloseTo(9800 * 550 / 700.0, within(1e-9));
@@ -327,7 +327,7 @@ class WinchTest {
   @Test
   void tellsHowLongAHaulTakes() {
     assertThat(winch.offer(request(poweredDrum(), 2.86, 1)).notes())
-        .contains("It takes in 2.86 m in about 58 s.");
+        .contains("It takes in 2.86 m (9 ft 5 in) in about 58 s.");
   }
 
   @Test
