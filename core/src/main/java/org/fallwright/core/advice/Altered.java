@@ -105,6 +105,7 @@ final class Altered {
         s.spots(),
         s.gear(),
         day,
-        s.offer());
+        s.offer(),
+        s.strips());
   }
 }

@@ -105,10 +105,12 @@ final class GearParts {
   }
 
   static Gear.Line line(Site site, Setup setup) {
-    return site.gear().lines().stream()
-        .filter(l -> l.id().equals(setup.line()))
-        .findFirst()
-        .orElseThrow();
+    for (Gear.Line l : site.gear().lines()) {
+      if (l.id().equals(setup.line())) {
+        return l;
+      }
+    }
+    throw new java.util.NoSuchElementException("no line \"" + setup.line() + "\" is in the gear");
   }
 
   /**

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
+import java.util.function.Supplier;
 import org.fallwright.core.pull.HaulLine;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullSource;
@@ -14,8 +15,9 @@ import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.rules.RuleSet;
 import org.fallwright.core.rules.RuleSets;
 import org.fallwright.core.site.Gear;
-import org.fallwright.core.site.Place;
+import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
+import org.fallwright.core.statics.LineSet;
 import org.fallwright.core.statics.Part;
 import org.fallwright.core.statics.Ratios;
 import org.fallwright.core.statics.SourceAtTree;
@@ -35,12 +37,13 @@ public final class Judge {
   /**
    * More than there are checks: those that cannot be made where the tree does not move all count.
    */
-  private static final int NOT_MADE = 1000;
+  static final int NOT_MADE = 1000;
 
   private final Site site;
   private final PullSources sources;
   private final RuleSet rules;
   private final DisplayUnits in;
+  private final Places places;
   private final Subject subject;
   private final SiteTables tables = new SiteTables();
   private final Knowledge knowledge;
@@ -53,10 +56,10 @@ public final class Judge {
    * @throws IllegalArgumentException one sentence, where the site names a species, surface or rule
    *     set that is not known
    */
-  public Judge(Site site, PullSources sources) {
-    this.site = site;
+  public Judge(Site given, PullSources sources) {
+    site = given.laidOut();
     this.sources = sources;
-    for (double height : site.offer().attachHeightsM()) {
+    for (double height : site.offer().attachHeights()) {
       double above = height - site.cut().heightM();
       if (above <= Allowances.ATTACH_LEAST.value()) {
         throw new IllegalArgumentException(
@@ -71,6 +74,7 @@ public final class Judge {
     }
     rules = RuleSets.shipped().byKey(site.ruleSet());
     in = DisplayUnits.valueOf(site.display().name());
+    places = new Places(site);
     subject = new Subject(site);
     knowledge = new Knowledge(site, rules);
     landing = new Landing(site, rules, in, subject, knowledge);
@@ -82,21 +86,20 @@ public final class Judge {
     return subject.notes();
   }
 
-  /** The setup with all its checks, its zones and notes. */
-  public Judged judge(Setup setup) {
-    return judge(setup, true);
-  }
-
-  /** The same checks, figures and sentence without zones and notes, which take longer. */
-  Judged quick(Setup setup) {
-    return judge(setup, false);
+  /** The same checks, with their verdicts and ratios alone. */
+  Look quick(Setup setup) {
+    Grade grade = new Grade(false);
+    Found found = check(grade, setup, false);
+    TreeSide tree = found.statics().treeSide();
+    int parts = tree.movable() ? found.stopped().ratios().parts().size() : 0;
+    return new Look(setup.layDeg(), parts, tree.movable() ? 0 : NOT_MADE, grade.slice());
   }
 
   /** The setup as judged, with all that its figures were reckoned from. */
   public Reckoned reckon(Setup setup) {
     PullSource source = source(setup);
     PullSource driver = driver(setup);
-    Route route = Route.of(site, setup, source, driver);
+    Route route = Route.of(places, setup, source, driver);
     Statics statics = statics(setup, route);
     TreeSide tree = statics.treeSide();
     PullOffer offer = Reach.of(site, setup, route, Reach.Pulled.of(tree), source, driver);
@@ -136,52 +139,167 @@ public final class Judge {
         : kind(site.source(setup.driver().source()).orElseThrow().plugin());
   }
 
-  private Judged judge(Setup setup, boolean full) {
+  /** What the checks of a setup brought to light. */
+  private record Found(
+      Route route,
+      Statics statics,
+      PullOffer offer,
+      Landing.Zones zones,
+      Stopped stopped,
+      Supplier<String> name) {}
+
+  /** Every check, in the fixed order. */
+  private Found check(Grade grade, Setup setup, boolean full) {
     PullSource source = source(setup);
     PullSource driver = driver(setup);
-    Route route = routes.computeIfAbsent(setup.withLay(0), w -> Route.of(site, w, source, driver));
+    Route route =
+        routes.computeIfAbsent(setup.withLay(0), w -> Route.of(places, w, source, driver));
     Statics statics = statics(setup, route);
     TreeSide tree = statics.treeSide();
     PullOffer offer = Reach.of(site, setup, route, Reach.Pulled.of(tree), source, driver);
-    GearParts parts = new GearParts(site, rules, tables).collect(setup, route, offer);
-    String name = name(setup, source);
+    GearParts parts = parts(setup, route, offer);
+    Supplier<String> name = () -> name(setup, source);
 
-    Grade grade = new Grade(full);
     knowledge.check(grade);
     usable(grade, parts);
     Landing.Zones zones = landing.check(grade, setup, route, tree, full);
-    lineRun.check(grade, setup, route);
+    lineRun.check(grade, route);
+    kit(grade, setup, route, tree, offer, parts);
+    movement(grade, setup, tree);
+    Stopped stopped = pulled(grade, setup, statics, offer, route, parts.parts(), name);
+    people(grade, setup, zones, offer);
+    return new Found(route, statics, offer, zones, stopped, name);
+  }
+
+  /** The site as it is judged, its strips laid out. */
+  Site site() {
+    return site;
+  }
+
+  Places places() {
+    return places;
+  }
+
+  Subject subject() {
+    return subject;
+  }
+
+  Knowledge knowledge() {
+    return knowledge;
+  }
+
+  Landing landing() {
+    return landing;
+  }
+
+  LineRun lineRun() {
+    return lineRun;
+  }
+
+  /** What bears the line of a way. */
+  GearParts parts(Setup way, Route route, PullOffer offer) {
+    return new GearParts(site, rules, tables).collect(way, route, offer);
+  }
+
+  /** A lay pulled over the first support of a route, for a search. */
+  Fall fall(Ways.End end, Route route, double layDeg) {
+    Setup lay = end.way(List.of(), "").withLay(layDeg);
+    Fall.Kept all = kept(lay, route);
+    Grade lands = new Grade(false);
+    landing.lands(lands, all.landed());
+    Grade moves = new Grade(false);
+    movement(moves, lay, all.statics().treeSide());
+    return new Fall(layDeg, site.cut().wedges(), lands.slice(), moves.slice(), all);
+  }
+
+  /** What was not kept of it. */
+  Fall.Kept fall(Ways.End end, Route route, Fall fall) {
+    return kept(end.way(List.of(), "").withLay(fall.layDeg()), route);
+  }
+
+  private Fall.Kept kept(Setup lay, Route route) {
+    LineSet line = subject.line(lay.attachHeightM(), route.points().get(1), 1e6);
+    Statics statics = new Statics(subject.pull(lay, line, route.bearingErrorM()));
+    TreeSide tree = statics.treeSide();
+    Landing.Landed landed = landing.lookAt(lay.layDeg(), Landing.steeringShare(tree));
+    return new Fall.Kept(
+        statics, landed, landing.ends(landed, landing.sitBack(lay.layDeg(), tree)));
+  }
+
+  /** The line and the gear. */
+  void kit(Grade grade, Setup setup, Route route, TreeSide tree, PullOffer offer, GearParts parts) {
     new KitChecks(site, in, grade).check(setup, route, tree, offer, parts);
-    ForceChecks forces = new ForceChecks(site, in, grade);
-    forces.movement(tree, setup.attachHeightM() - site.cut().heightM());
-    List<String> notes = new ArrayList<>(zones.notes());
-    Figures figures;
-    List<PartLoad> loads = List.of();
+  }
+
+  /** Whether hinge and line let it move. */
+  void movement(Grade grade, Setup setup, TreeSide tree) {
+    new ForceChecks(site, in, grade).movement(tree, setup.attachHeightM() - site.cut().heightM());
+  }
+
+  /**
+   * Whether the source pulls and holds, and every part bears it; then what the source says itself.
+   *
+   * @return null where the tree does not move, for then none of the first can be said
+   */
+  Stopped pulled(
+      Grade grade,
+      Setup setup,
+      Statics statics,
+      PullOffer offer,
+      Route route,
+      List<Part> parts,
+      Supplier<String> name) {
+    TreeSide tree = statics.treeSide();
+    Stopped stopped = null;
     if (tree.movable()) {
-      Stopped stopped = stop(statics, offer, route, parts.parts());
+      ForceChecks forces = new ForceChecks(site, in, grade);
+      stopped = stop(statics, offer, route, parts);
       Ratios r = stopped.ratios();
       forces.pull(r, tree, offer, name);
       forces.parts(r, tree);
       if (stopped.leans()) {
         leaning(grade, offer, r);
       }
-      figures = FiguresOf.reckon(site, route, statics, r, offer, stopped.leans(), zones);
-      loads = loads(r, tree);
-      if (full) {
-        notes.addAll(SetupNotes.of(site, in, setup, tree, r, offer));
-      }
-    } else {
-      figures = FiguresOf.unmovable(route, tree, zones);
     }
+    Position at =
+        places.place(setup.driver() == null ? setup.place() : setup.driver().place()).at();
     for (PullOffer.Finding f : offer.checks()) {
-      grade.rule(
-          f.id(), f.value(), f.limit(), f.unit(), f.ratio(), place(setup).at(), () -> f.why());
+      grade.rule(f.id(), f.value(), f.limit(), f.unit(), f.ratio(), at, () -> f.why());
     }
+    return stopped;
+  }
+
+  /** Whether people can stand clear. */
+  void people(Grade grade, Setup setup, Landing.Zones zones, PullOffer offer) {
     new People(site, rules, in, grade).check(setup, zones, offer);
-    notes.addAll(offer.notes());
-    if (full) {
-      notes.addAll(LandNotes.of(site, setup));
+  }
+
+  /** The setup with all its checks, its zones and notes. */
+  public Judged judge(Setup setup) {
+    Grade grade = new Grade(true);
+    Found found = check(grade, setup, true);
+    TreeSide tree = found.statics().treeSide();
+    List<String> notes = new ArrayList<>(found.zones().notes());
+    Figures figures;
+    List<PartLoad> loads = List.of();
+    if (tree.movable()) {
+      Ratios r = found.stopped().ratios();
+      figures =
+          FiguresOf.reckon(
+              site,
+              found.route(),
+              found.statics(),
+              r,
+              found.offer(),
+              found.stopped().leans(),
+              found.zones());
+      loads = loads(r, tree);
+      notes.addAll(SetupNotes.of(site, in, setup, tree, r, found.offer()));
+    } else {
+      figures = FiguresOf.unmovable(found.route(), tree, found.zones());
     }
+    notes.addAll(found.offer().notes());
+    notes.addAll(LandNotes.of(site, setup));
     Check weakest = grade.weakest();
     return new Judged(
         setup,
@@ -190,13 +308,13 @@ public final class Judge {
         grade.standing(),
         grade.standings(),
         grade.failing() + (tree.movable() ? 0 : NOT_MADE),
-        full ? Sentence.of(grade.verdict(), weakest, figures, name, in) : "",
+        Sentence.of(grade.verdict(), weakest, figures, found.name().get(), in),
         figures,
         grade.checks(),
         loads,
-        route.line(),
-        route.haulOnSite(),
-        zones.ground(),
+        found.route().line(),
+        found.route().haulOnSite(),
+        found.zones().ground(),
         notes);
   }
 
@@ -227,7 +345,7 @@ public final class Judge {
    * The ratios after any stop, and whether the setup leans on a person who reads a load cell: it
    * does where a part would give way at the most the source can do, and a load cell is there.
    */
-  private record Stopped(Ratios ratios, boolean leans) {}
+  record Stopped(Ratios ratios, boolean leans) {}
 
   private Stopped stop(Statics statics, PullOffer offer, Route route, List<Part> parts) {
     TreeSide tree = statics.treeSide();
@@ -238,7 +356,7 @@ public final class Judge {
         new SourceAtTree(low, offer.holdN(), offer.highN(), captured, SourceAtTree.Stop.NONE, 0);
     Ratios without = Ratios.of(statics, wedges, free, parts);
     // a stop at the ceiling helps only where the plan itself stays below it
-    boolean helps = anyBelowOne(without, " at high") && !anyBelowOne(without, " at plan");
+    boolean helps = !without.holdsAtHigh() && without.holdsAtPlan();
     if (!helps || site.gear().loadCell() == null) {
       return new Stopped(without, false);
     }
@@ -253,22 +371,16 @@ public final class Judge {
     return new Stopped(Ratios.of(statics, wedges, read, parts), true);
   }
 
-  private static boolean anyBelowOne(Ratios r, String checks) {
-    return r.byCheck().entrySet().stream()
-        .anyMatch(e -> e.getKey().endsWith(checks) && e.getValue() < 1);
-  }
-
   private void leaning(Grade grade, PullOffer offer, Ratios r) {
-    String stop = in.both(u -> u.forceAtMost(r.ceiling().tensionN()));
-    String why =
-        "Works only with a person reading the load cell who stops it at "
-            + stop
-            + ": beyond that "
-            + r.ceiling().part()
-            + " is loaded past its factor.";
+    Supplier<String> why =
+        () ->
+            "Works only with a person reading the load cell who stops it at "
+                + in.both(u -> u.forceAtMost(r.ceiling().tensionN()))
+                + ": beyond that "
+                + r.ceiling().part()
+                + " is loaded past its factor.";
     if (offer.powered()) {
-      grade.tightAtBest(
-          "stop reading", r.ceiling().tensionN(), r.source().highN(), "N", null, () -> why);
+      grade.tightAtBest("stop reading", r.ceiling().tensionN(), r.source().highN(), "N", null, why);
     } else {
       grade.factored(
           "stop reading",
@@ -277,11 +389,12 @@ public final class Judge {
           "N",
           Double.POSITIVE_INFINITY,
           null,
-          () -> why);
+          why);
     }
   }
 
-  private void usable(Grade grade, GearParts parts) {
+  /** Whether each anchor may be used. */
+  void usable(Grade grade, GearParts parts) {
     Map<String, HeldAnchor> byAnchor = new LinkedHashMap<>();
     for (HeldAnchor h : parts.anchors()) {
       byAnchor.merge(h.anchor().id(), h, (a, b) -> a.capacity().refused() ? a : b);
@@ -315,10 +428,6 @@ public final class Judge {
                     p.designFactor(),
                     p.lastFactor()))
         .toList();
-  }
-
-  private Place place(Setup s) {
-    return Route.place(site, s.driver() == null ? s.place() : s.driver().place());
   }
 
   private String name(Setup s, PullSource source) {

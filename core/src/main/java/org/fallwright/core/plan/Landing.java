@@ -39,14 +39,17 @@ final class Landing {
   private final EscapeRoutes escapes;
   private final GroundFall ground;
   private final Map<Fall, Landed> falls = new ConcurrentHashMap<>();
+  private final Map<Double, Landed> widest = new ConcurrentHashMap<>();
   private final Map<Out, List<Position>> waysOut = new ConcurrentHashMap<>();
   private final Map<List<Position>, Angles> angles = new ConcurrentHashMap<>();
+
+  private static final double WIDEST = FallFootprint.halfAngleDeg(Double.POSITIVE_INFINITY);
 
   /** All that a footprint depends on. */
   private record Fall(double layDeg, double steeringShare) {}
 
   /** A footprint and how the things on the site stand to it. */
-  private record Landed(
+  record Landed(
       FallFootprint footprint,
       List<TargetClearance> clearances,
       DropZoneFit.Fit fit,
@@ -56,7 +59,11 @@ final class Landing {
   private record Out(double layDeg, double steeringShare, List<Position> path) {}
 
   /** The insides of a line's angles, and where its parted ends fly. */
-  record Angles(List<Bight> bights, Recoil recoil) {}
+  record Angles(List<Bight> bights, Recoil recoil) {
+    static Angles of(List<Position> path) {
+      return new Angles(Bight.along(path), new Recoil(path));
+    }
+  }
 
   /**
    * The zones of a setup.
@@ -101,16 +108,23 @@ final class Landing {
 
   /** Where the tree lands, wires, ways out. */
   Zones check(Grade grade, Setup setup, Route route, TreeSide tree, boolean full) {
-    double share = tree.movable() ? Math.max(0, tree.steerShare()) : Double.POSITIVE_INFINITY;
-    Landed landed = falls.computeIfAbsent(new Fall(setup.layDeg(), share), this::land);
-    TargetClearance nearest = targets(grade, landed);
-    dropZone(grade, landed);
-    wires(grade, landed);
+    double share = steeringShare(tree);
+    Landed landed =
+        full
+            ? falls.computeIfAbsent(new Fall(setup.layDeg(), share), this::land)
+            : lookAt(setup.layDeg(), share);
+    TargetClearance nearest = lands(grade, landed);
     List<Position> path = route.path();
+    SitBackZone sitBack = sitBack(setup.layDeg(), tree);
+    if (!full) {
+      Angles angles = Angles.of(path);
+      boolean any =
+          ends(landed, sitBack)
+              .any(new EscapeRoutes.Line(angles.bights(), angles.recoil(), route.legs()));
+      waysOut(grade, any ? 1 : 0);
+      return new Zones(landed.footprint(), null, Double.NaN, null, angles, List.of());
+    }
     Angles angles = angles(path);
-    double back = setup.layDeg() + Math.toDegrees(Math.atan2(tree.vgM(), tree.ugM()));
-    SitBackZone sitBack =
-        SitBackZone.of(site.tree().stump().at(), normal(back), site.tree().heightM().value());
     List<Position> ways =
         waysOut.computeIfAbsent(
             new Out(setup.layDeg(), share, path),
@@ -124,41 +138,92 @@ final class Landing {
                         route.legs()),
                     rules.escapeLengthM().value(),
                     site.tree().heightM().value()));
-    grade.rule(
-        "ways out",
-        ways.size(),
-        1,
-        "",
-        ways.isEmpty() ? 0 : Double.POSITIVE_INFINITY,
-        site.tree().stump().at(),
-        () ->
-            ways.isEmpty()
-                ? "No way out ends clear of the footprint, the sit-back zone, the line's angle and its"
-                    + " ends."
-                : ways.size() + " way(s) out end clear of every zone.");
-    Ground ground = full ? ground(landed, sitBack, angles, ways, setup) : null;
+    waysOut(grade, ways.size());
+    Ground ground = ground(landed, sitBack, angles, ways, setup);
     return new Zones(
         landed.footprint(),
         ground,
         nearest == null ? Double.NaN : nearest.clearanceM(),
         nearest == null ? null : nearest.targetId(),
         angles,
-        full ? notes(landed, setup, sitBack, route) : List.of());
+        notes(landed, setup, sitBack, route));
+  }
+
+  /** Share of the hinge's side strength by which the fall is aimed; infinite: it steers nothing. */
+  static double steeringShare(TreeSide tree) {
+    return tree.movable() ? Math.max(0, tree.steerShare()) : Double.POSITIVE_INFINITY;
+  }
+
+  /** What is at stake behind. */
+  SitBackZone sitBack(double layDeg, TreeSide tree) {
+    double back = layDeg + Math.toDegrees(Math.atan2(tree.vgM(), tree.ugM()));
+    return SitBackZone.of(site.tree().stump().at(), normal(back), site.tree().heightM().value());
+  }
+
+  /** Targets, drop zone and wires; the target that is nearest to what it asks. */
+  TargetClearance lands(Grade grade, Landed landed) {
+    TargetClearance nearest = targets(grade, landed);
+    dropZone(grade, landed);
+    wires(grade, landed);
+    return nearest;
+  }
+
+  /** The ways out, to be asked for many lines. */
+  EscapeRoutes.Ends ends(Landed landed, SitBackZone sitBack) {
+    return escapes.ends(
+        landed.footprint(), sitBack, rules.escapeLengthM().value(), site.tree().heightM().value());
+  }
+
+  void waysOut(Grade grade, int ways) {
+    grade.rule(
+        "ways out",
+        ways,
+        1,
+        "",
+        ways == 0 ? 0 : Double.POSITIVE_INFINITY,
+        site.tree().stump().at(),
+        () ->
+            ways == 0
+                ? "No way out ends clear of the footprint, the sit-back zone, the line's angle and"
+                      + " its ends."
+                : ways + " way(s) out end clear of every zone.");
+  }
+
+  /** A footprint as far as verdicts need it: not how deep or how much of anything lies in it. */
+  Landed lookAt(double layDeg, double share) {
+    // a hinge that steers nothing aims at the same fan whatever the line
+    return FallFootprint.halfAngleDeg(share) == WIDEST
+        ? widest.computeIfAbsent(layDeg, lay -> look(lay, Double.POSITIVE_INFINITY))
+        : look(layDeg, share);
+  }
+
+  private Landed look(double layDeg, double share) {
+    FallFootprint f = footprint(layDeg, share);
+    return new Landed(
+        f,
+        targets.gaps(f),
+        dropZone == null
+            ? null
+            : new DropZoneFit.Fit(
+                Double.NaN, dropZone.holds(f) ? 0 : Double.NaN, site.tree().stump().at()),
+        knowledge.ofWires() ? wires.inLay(f, knowledge.approach()) : List.of());
   }
 
   private Angles angles(List<Position> path) {
-    return angles.computeIfAbsent(path, p -> new Angles(Bight.along(p), new Recoil(p)));
+    return angles.computeIfAbsent(path, Angles::of);
+  }
+
+  private FallFootprint footprint(double layDeg, double share) {
+    return FallFootprint.of(
+        outline,
+        site.tree().stump().at(),
+        layDeg,
+        share,
+        FallFootprint.slideM(site.tree().heightM().value(), ground.alongDeg(layDeg), null));
   }
 
   private Landed land(Fall fall) {
-    FallFootprint f =
-        FallFootprint.of(
-            outline,
-            site.tree().stump().at(),
-            fall.layDeg(),
-            fall.steeringShare(),
-            FallFootprint.slideM(
-                site.tree().heightM().value(), ground.alongDeg(fall.layDeg()), null));
+    FallFootprint f = footprint(fall.layDeg(), fall.steeringShare());
     return new Landed(
         f,
         targets.clearances(f),
@@ -257,8 +322,8 @@ final class Landing {
               r.stops()
                   ? "Line "
                       + r.wireId()
-                      + " is within reach of the tree whichever way it goes: stop, its owner must make"
-                      + " it dead or attend."
+                      + " is within reach of the tree whichever way it goes: stop, its owner must"
+                      + " make it dead or attend."
                   : "Line "
                       + r.wireId()
                       + " is "
@@ -291,8 +356,8 @@ final class Landing {
       notes.add(
           "The ground falls about "
               + in.angle(Math.toRadians(fall))
-              + " along this lay by the heights entered: the felled tree may slide on, and ground for"
-              + " that is counted.");
+              + " along this lay by the heights entered: the felled tree may slide on, and ground"
+              + " for that is counted.");
     }
     for (TargetClearance c : landed.clearances()) {
       if (c.mayBeHit() && c.overlaps()) {

@@ -3,9 +3,12 @@ package org.fallwright.core.plan;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.concurrent.ConcurrentHashMap;
+import java.util.stream.Collectors;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Target;
+import org.fallwright.core.site.Wire;
 import org.fallwright.core.units.DisplayUnits;
 import org.fallwright.core.zones.Leg;
 import org.fallwright.core.zones.LegCheck;
@@ -16,15 +19,14 @@ final class LineRun {
   private final DisplayUnits in;
   private final Knowledge knowledge;
   private final LegCheck legs;
-  private final Map<Setup, List<Passed>> passed = new ConcurrentHashMap<>();
-
-  /** What a leg passes, with the number of the leg. */
-  private record Passed(int leg, LegCheck.Passing what) {}
+  private final Set<String> wires;
+  private final Map<Leg, List<LegCheck.Passing>> passed = new ConcurrentHashMap<>();
 
   LineRun(Site site, DisplayUnits in, Knowledge knowledge) {
     this.site = site;
     this.in = in;
     this.knowledge = knowledge;
+    wires = site.wires().stream().map(Wire::id).collect(Collectors.toUnmodifiableSet());
     legs =
         new LegCheck(
             site.targets().stream().filter(LineRun::matters).toList(),
@@ -37,12 +39,27 @@ final class LineRun {
     return !t.mayBeHit() && !(t.kind() == Target.Kind.ROAD && t.requiredDistanceM() == 0);
   }
 
-  void check(Grade grade, Setup setup, Route route) {
-    for (Passed p : passed.computeIfAbsent(setup.withLay(0), w -> passing(setup, route))) {
-      LegCheck.Passing what = p.what();
+  void check(Grade grade, Route route) {
+    List<Leg> list = route.legs();
+    List<LinePoint> points = route.all();
+    for (int i = 0; i < list.size(); i++) {
+      leg(grade, i, list.get(i), points.get(i).id(), points.get(i + 1).id());
+    }
+  }
+
+  /**
+   * One leg.
+   *
+   * @param number how many are nearer to the tree
+   * @param from id of what it begins at
+   * @param to id of what it ends at
+   */
+  void leg(Grade grade, int number, Leg leg, String from, String to) {
+    for (LegCheck.Passing what :
+        passed.computeIfAbsent(leg, l -> passing(l, Math.max(error(from), error(to))))) {
       boolean over = what.clearanceM() <= 0;
       grade.plain(
-          "line clear of " + what.what() + (p.leg() > 0 ? ", leg " + (p.leg() + 1) : ""),
+          "line clear of " + what.what() + (number > 0 ? ", leg " + (number + 1) : ""),
           what.clearanceM(),
           what.askedM(),
           "m",
@@ -67,19 +84,13 @@ final class LineRun {
     return site.targets().stream().anyMatch(t -> t.id().equals(id) && t.movable());
   }
 
-  /** What the legs pass within ten times the distance asked; the rest is plainly clear. */
-  private List<Passed> passing(Setup setup, Route route) {
-    List<Passed> all = new ArrayList<>();
-    List<Leg> list = route.legs();
-    List<LinePoint> points = route.all();
-    for (int i = 0; i < list.size(); i++) {
-      double error = Math.max(error(points.get(i).id()), error(points.get(i + 1).id()));
-      for (LegCheck.Passing p :
-          legs.passing(list.get(i), error, w -> knowledge.approach().applyAsDouble(w) + error)) {
-        boolean wire = site.wires().stream().anyMatch(w -> w.id().equals(p.what()));
-        if (wire || p.clearanceM() < NEAR * p.askedM()) {
-          all.add(new Passed(i, p));
-        }
+  /** What a leg passes within ten times the distance asked; the rest is plainly clear. */
+  private List<LegCheck.Passing> passing(Leg leg, double error) {
+    List<LegCheck.Passing> all = new ArrayList<>();
+    for (LegCheck.Passing p :
+        legs.passing(leg, error, w -> knowledge.approach().applyAsDouble(w) + error)) {
+      if (wires.contains(p.what()) || p.clearanceM() < NEAR * p.askedM()) {
+        all.add(p);
       }
     }
     return all;

@@ -1,6 +1,7 @@
 package org.fallwright.core.plan;
 
 import java.util.List;
+import java.util.function.Supplier;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.rules.RuleSet;
 import org.fallwright.core.site.Place;
@@ -37,12 +38,13 @@ final class People {
       double height = site.tree().heightM().value();
       double asked = rules.operatorRadiusFactor().value() * height;
       boolean far = rules.operatorRadiusFactor().metBy(o.fromStumpM(), height);
-      String stands =
-          "Who works the source stands "
-              + in.length(o.fromStumpM())
-              + " from the stump; "
-              + in.length(asked)
-              + " are asked";
+      Supplier<String> stands =
+          () ->
+              "Who works the source stands "
+                  + in.length(o.fromStumpM())
+                  + " from the stump; "
+                  + in.length(asked)
+                  + " are asked";
       if (!far && rules.teamException().yes()) {
         grade.tightAtBest(
             "operator distance",
@@ -50,7 +52,7 @@ final class People {
             asked,
             "m",
             place.at(),
-            () -> stands + ": only as one of the team, named on the sheet with the reason.");
+            () -> stands.get() + ": only as one of the team, named on the sheet with the reason.");
       } else {
         grade.rule(
             "operator distance",
@@ -61,7 +63,7 @@ final class People {
                 ? Math.max(1, o.fromStumpM() / asked)
                 : Math.min(o.fromStumpM() / asked, Math.nextDown(1.0)),
             place.at(),
-            () -> stands + (far ? "." : ", and these rules know no exception."));
+            () -> stands.get() + (far ? "." : ", and these rules know no exception."));
       }
       boolean clear = o.outsideFootprint() && o.outsideBights();
       grade.rule(

@@ -1,6 +1,7 @@
 package org.fallwright.core.plan;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import org.fallwright.core.line.Point3;
 import org.fallwright.core.pull.HaulLine;
@@ -11,7 +12,6 @@ import org.fallwright.core.reference.SpeciesTable;
 import org.fallwright.core.reference.Spreads;
 import org.fallwright.core.site.Conditions;
 import org.fallwright.core.site.CutPlan;
-import org.fallwright.core.site.Gear;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.SubjectTree;
@@ -31,6 +31,7 @@ final class Subject {
   private final TreeFigures figures;
   private final Wood wood;
   private final Wind wind;
+  private final TreeBody body;
 
   Subject(Site site) {
     this.site = site;
@@ -58,6 +59,21 @@ final class Subject {
             figures.crownAreaM2(),
             figures.crownMiddleM() - cut.heightM(),
             day.airDensity() == null ? Allowances.AIR_DENSITY.value() : day.airDensity());
+    Position shift = figures.crownShiftM();
+    body =
+        new TreeBody(
+            tree.heightM().value(),
+            tree.dbhM().value(),
+            cut.heightM(),
+            tree.diameters(),
+            figures.stumpDiameterM(),
+            tree.shellM(),
+            tree.deadOrDecayed(),
+            figures.massKg(),
+            figures.massCentreM() - cut.heightM(),
+            tree.leanDeg().value(),
+            tree.leanAzimuthDeg().value(),
+            new Point3(shift.eastM(), shift.northM(), 0));
   }
 
   TreeFigures figures() {
@@ -90,31 +106,17 @@ final class Subject {
 
   /** The case of a setup whose line runs along a route. */
   PullCase pull(Setup setup, Route route) {
-    SubjectTree tree = site.tree();
+    return pull(setup, line(setup, route), route.bearingErrorM());
+  }
+
+  /**
+   * The case of a setup over a line.
+   *
+   * @param setup its lay, attachment and hinge; the rest is no part of it
+   * @param bearingErrorM position error of the line's first bearing point [m]
+   */
+  PullCase pull(Setup setup, LineSet line, double bearingErrorM) {
     CutPlan cut = site.cut();
-    Position shift = figures.crownShiftM();
-    Point3 crown = new Point3(shift.eastM(), shift.northM(), 0);
-    TreeBody body =
-        new TreeBody(
-            tree.heightM().value(),
-            tree.dbhM().value(),
-            cut.heightM(),
-            tree.diameters(),
-            figures.stumpDiameterM(),
-            tree.shellM(),
-            tree.deadOrDecayed(),
-            figures.massKg(),
-            figures.massCentreM() - cut.heightM(),
-            tree.leanDeg().value(),
-            tree.leanAzimuthDeg().value(),
-            crown);
-    Gear.Line line =
-        site.gear().lines().stream()
-            .filter(l -> l.id().equals(setup.line()))
-            .findFirst()
-            .orElseThrow();
-    List<Point3> points = route.points().subList(1, route.points().size());
-    Double slack = site.conditions().slackM();
     return new PullCase(
         setup.layDeg(),
         body,
@@ -127,13 +129,31 @@ final class Subject {
             cut.wedges(),
             Allowances.HINGE_K_LEAST.value()),
         wind,
-        new LineSet(
-            setup.attachHeightM() - cut.heightM(),
-            points,
-            points.stream().map(p -> line.stiffnessN()).toList(),
-            haul(route),
-            slack == null ? Allowances.SLACK.value() : slack),
-        spread(setup, route));
+        line,
+        spread(setup, bearingErrorM));
+  }
+
+  /** The line of a way as it is set. */
+  LineSet line(Setup setup, Route route) {
+    double stiffness = GearParts.line(site, setup).stiffnessN();
+    List<Point3> points = route.points().subList(1, route.points().size());
+    return line(setup.attachHeightM(), points, stiffness, haul(route));
+  }
+
+  /** A line straight to a bearing point. */
+  LineSet line(double attachHeightM, Point3 bearing, double stiffnessN) {
+    return line(attachHeightM, List.of(bearing), stiffnessN, null);
+  }
+
+  private LineSet line(
+      double attachHeightM, List<Point3> points, double stiffnessN, LineSet.BaseLeg haul) {
+    Double slack = site.conditions().slackM();
+    return new LineSet(
+        attachHeightM - site.cut().heightM(),
+        points,
+        Collections.nCopies(points.size(), stiffnessN),
+        haul,
+        slack == null ? Allowances.SLACK.value() : slack);
   }
 
   /**
@@ -150,7 +170,7 @@ final class Subject {
             1 / haul.parts());
   }
 
-  private Spread spread(Setup setup, Route route) {
+  private Spread spread(Setup setup, double bearingErrorM) {
     SubjectTree tree = site.tree();
     double thickness =
         Spreads.of(Spreads.What.HINGE_THICKNESS, setup.hingeThicknessM(), site.cut().hingeHow());
@@ -165,7 +185,7 @@ final class Subject {
         thickness / setup.hingeThicknessM(),
         Spreads.of(Spreads.What.GUST, site.conditions().gustMps()) / gust,
         Spreads.of(Spreads.What.ATTACH_HEIGHT, setup.attachHeightM(), site.offer().attachHow()),
-        Allowances.BEARING_ASIDE.value() * route.bearingErrorM());
+        Allowances.BEARING_ASIDE.value() * bearingErrorM);
   }
 
   private static String sentence(String remark) {

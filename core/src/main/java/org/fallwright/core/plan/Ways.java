@@ -19,116 +19,163 @@ import org.fallwright.core.site.Site;
 
 /**
  * All candidates of a site: every source in every mode at every place where it can be, direct or
- * over one redirect on every other anchor, with each attach height and hinge thickness on offer;
- * and every lay. The order is fixed.
+ * over one redirect or two on every other anchor, with each attach height, hinge thickness and pull
+ * line on offer; and every lay. The order is fixed.
+ *
+ * <p>There can be very many, so they are not listed: an {@link End} stands for all ways that end at
+ * one source, and gives them one redirect path at a time.
  */
 final class Ways {
   private final Site site;
   private final PullSources sources;
   private final List<String> notes = new ArrayList<>();
+  private final List<Gear.Line> lines;
+  private final List<End> ends = new ArrayList<>();
 
+  /**
+   * A source in one mode at one place, pulling at one height on one hinge.
+   *
+   * @param source what pulls
+   * @param driver what hauls it, or null
+   */
+  record End(
+      double attachHeightM,
+      double hingeThicknessM,
+      Gear.Source gear,
+      String mode,
+      String place,
+      Setup.Driver by,
+      PullSource source,
+      PullSource driver) {
+    /** The way over those redirects with that line; its lay is 0 and means nothing yet. */
+    Setup way(List<String> redirects, String line) {
+      return new Setup(
+          0, attachHeightM, hingeThicknessM, line, redirects, gear.id(), mode, place, by);
+    }
+  }
+
+  /**
+   * @param site a site laid out
+   */
   Ways(Site site, PullSources sources) {
     this.site = site;
     this.sources = sources;
-  }
-
-  /** What could not be used, a sentence each; filled by {@link #all}. */
-  List<String> notes() {
-    return List.copyOf(new LinkedHashSet<>(notes));
-  }
-
-  /** Every way to pull; the lay of each is 0 and means nothing yet. */
-  List<Setup> all() {
-    List<Setup> ways = new ArrayList<>();
-    List<Gear.Line> lines =
+    lines =
         site.gear().lines().stream()
             .filter(Gear.Line::pullLine)
             .sorted(Comparator.comparingDouble(Gear.Line::lengthM))
             .toList();
     if (lines.isEmpty()) {
       notes.add("No pull line is in the gear, so nothing can be pulled.");
+      return;
     }
-    for (double attach : site.offer().attachHeightsM()) {
-      for (double hinge : site.cut().hingeThicknessesM()) {
+    for (double attach : site.offer().attachHeights()) {
+      for (double hinge : site.hingeThicknesses()) {
         for (Gear.Source source : site.gear().sources()) {
-          for (Gear.Line line : lines) {
-            of(attach, hinge, line, source).stream()
-                .filter(way -> !aShorterLineDoes(way, lines))
-                .forEach(ways::add);
-          }
+          add(attach, hinge, source);
         }
       }
     }
-    return ways;
   }
 
-  private List<Setup> of(double attach, double hinge, Gear.Line line, Gear.Source source) {
-    Optional<PullSource> kind = kind(source);
+  /** What could not be used, a sentence each. */
+  List<String> notes() {
+    return List.copyOf(new LinkedHashSet<>(notes));
+  }
+
+  /** All ends, in their order. */
+  List<End> ends() {
+    return ends;
+  }
+
+  private void add(double attach, double hinge, Gear.Source gear) {
+    Optional<PullSource> kind = kind(gear);
     if (kind.isEmpty()) {
-      return List.of();
+      return;
     }
-    List<Setup> ways = new ArrayList<>();
-    for (String mode : kind.get().modes(source.parameters())) {
-      for (String place : source.places()) {
-        if (!canBe(kind.get(), source, place)) {
+    for (String mode : kind.get().modes(gear.parameters())) {
+      for (String place : gear.places()) {
+        if (!canBe(kind.get(), gear, place)) {
           continue;
         }
-        List<Setup.Driver> drivers = new ArrayList<>();
-        if (kind.get().describe().needsDriver()) {
-          drivers.addAll(drivers(source));
-        } else {
-          drivers.add(null);
+        if (!kind.get().describe().needsDriver()) {
+          ends.add(new End(attach, hinge, gear, mode, place, null, kind.get(), null));
+          continue;
         }
-        for (Setup.Driver driver : drivers) {
-          if (driver != null && driver.place().equals(place)) {
-            continue;
-          }
-          ways.add(
-              new Setup(0, attach, hinge, line.id(), List.of(), source.id(), mode, place, driver));
-          if (site.offer().redirects() >= 1 && !site.gear().blocks().isEmpty()) {
-            for (Anchor a : site.anchors()) {
-              if (!a.id().equals(place)) {
-                ways.add(
-                    new Setup(
-                        0,
-                        attach,
-                        hinge,
-                        line.id(),
-                        List.of(a.id()),
-                        source.id(),
-                        mode,
-                        place,
-                        driver));
-              }
-            }
+        for (Setup.Driver by : drivers(gear)) {
+          if (!by.place().equals(place)) {
+            PullSource driver = kind(site.source(by.source()).orElseThrow()).orElseThrow();
+            ends.add(new End(attach, hinge, gear, mode, place, by, kind.get(), driver));
           }
         }
       }
     }
-    return ways;
+  }
+
+  /** How many groups of redirect paths an end has: see {@link #paths}. */
+  int groups() {
+    return redirects() < 2 ? 1 : 1 + site.anchors().size();
+  }
+
+  private int redirects() {
+    return site.gear().blocks().isEmpty() ? 0 : site.offer().redirects();
   }
 
   /**
-   * Whether a shorter line that is as strong and as stiff reaches by itself; then a longer one is
-   * no candidate, for it does the same.
+   * The redirect paths of one group: of the first the straight one and those over one block, of
+   * each further one those over two blocks, whose first is on one anchor.
    */
-  private boolean aShorterLineDoes(Setup way, List<Gear.Line> lines) {
-    Gear.Line own = GearParts.line(site, way);
-    PullSource source = kind(site.source(way.source()).orElseThrow()).orElseThrow();
-    PullSource driver =
-        way.driver() == null
-            ? null
-            : kind(site.source(way.driver().source()).orElseThrow()).orElseThrow();
-    double needed =
-        Route.of(site, way, source, driver).loads().lengthM() + Allowances.LINE_SPARE.value();
-    return lines.stream()
-        .takeWhile(l -> l != own)
-        .anyMatch(
-            l ->
-                l.lengthM() >= needed
-                    && strength(l) == strength(own)
-                    && l.wireRope() == own.wireRope()
-                    && l.stiffnessN() == own.stiffnessN());
+  List<List<String>> paths(End end, int group) {
+    List<List<String>> paths = new ArrayList<>();
+    if (group == 0) {
+      paths.add(List.of());
+      if (redirects() >= 1) {
+        for (Anchor a : site.anchors()) {
+          if (!a.id().equals(end.place())) {
+            paths.add(List.of(a.id()));
+          }
+        }
+      }
+      return paths;
+    }
+    String first = site.anchors().get(group - 1).id();
+    if (!first.equals(end.place())) {
+      for (Anchor a : site.anchors()) {
+        if (!a.id().equals(end.place()) && !a.id().equals(first)) {
+          paths.add(List.of(first, a.id()));
+        }
+      }
+    }
+    return paths;
+  }
+
+  /**
+   * The lines worth trying along a path: not one that is longer than another which is as strong and
+   * as stiff and reaches by itself, for it does the same.
+   *
+   * @param pathM length of the path [m]
+   */
+  List<Gear.Line> lines(double pathM) {
+    if (lines.size() == 1) {
+      return lines;
+    }
+    double needed = pathM + Allowances.LINE_SPARE.value();
+    List<Gear.Line> worth = new ArrayList<>(lines.size());
+    for (Gear.Line own : lines) {
+      boolean shorterDoes =
+          lines.stream()
+              .takeWhile(l -> l != own)
+              .anyMatch(
+                  l ->
+                      l.lengthM() >= needed
+                          && strength(l) == strength(own)
+                          && l.wireRope() == own.wireRope()
+                          && l.stiffnessN() == own.stiffnessN());
+      if (!shorterDoes) {
+        worth.add(own);
+      }
+    }
+    return worth;
   }
 
   private static double strength(Gear.Line l) {
@@ -137,6 +184,7 @@ final class Ways {
 
   private List<Setup.Driver> drivers(Gear.Source tackle) {
     List<Setup.Driver> drivers = new ArrayList<>();
+    List<String> allowed = tackle.driverPlaces();
     for (String id : tackle.drivers()) {
       Gear.Source driver = site.source(id).orElseThrow();
       Optional<PullSource> kind = kind(driver);
@@ -144,8 +192,7 @@ final class Ways {
         continue;
       }
       for (String place : driver.places()) {
-        boolean allowed = tackle.driverPlaces().isEmpty() || tackle.driverPlaces().contains(place);
-        if (allowed && canBe(kind.get(), driver, place)) {
+        if ((allowed.isEmpty() || allowed.contains(place)) && canBe(kind.get(), driver, place)) {
           for (String mode : kind.get().modes(driver.parameters())) {
             drivers.add(new Setup.Driver(id, mode, place));
           }
@@ -184,7 +231,7 @@ final class Ways {
   }
 
   /** Every lay: the grid, those asked for, and straight to every place a line can lead to. */
-  List<Double> lays() {
+  double[] lays() {
     Set<Double> lays = new TreeSet<>();
     double step = site.offer().layStepDeg();
     for (int i = 0; i * step < 360; i++) {
@@ -194,6 +241,6 @@ final class Ways {
     Position stump = site.tree().stump().at();
     site.anchors().forEach(a -> lays.add(stump.azimuthTo(a.place().at())));
     site.spots().forEach(s -> lays.add(stump.azimuthTo(s.place().at())));
-    return List.copyOf(lays);
+    return lays.stream().mapToDouble(Double::doubleValue).toArray();
   }
 }

@@ -1,5 +1,6 @@
 package org.fallwright.core.site;
 
+import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
@@ -18,6 +19,7 @@ import org.fallwright.core.units.Range;
  * @param ruleSet key of the rule set
  * @param declinationDeg magnetic declination, east positive [degrees]; null: not stated
  * @param picture base map; null: blank ground
+ * @param strips ground along which a source can stand anywhere
  */
 public record Site(
     int version,
@@ -37,7 +39,8 @@ public record Site(
     List<Spot> spots,
     Gear gear,
     Conditions conditions,
-    Offer offer) {
+    Offer offer,
+    List<Strip> strips) {
   /** The version written. */
   public static final int VERSION = 2;
 
@@ -76,6 +79,8 @@ public record Site(
     Range.present("gear", gear);
     Range.present("conditions", conditions);
     Range.present("offer", offer);
+    strips = List.copyOf(Range.present("strips", strips));
+    List<Spot> standing = standing(spots, strips, tree);
     oneNameEach(
         Stream.of(
                 Stream.of(tree.id()),
@@ -83,7 +88,8 @@ public record Site(
                 wires.stream().map(Wire::id),
                 dropZones.stream().map(DropZone::id),
                 anchors.stream().map(Anchor::id),
-                spots.stream().map(Spot::id))
+                standing.stream().map(Spot::id),
+                strips.stream().map(Strip::id))
             .flatMap(s -> s));
     oneNameEach(gear.sources().stream().map(Gear.Source::id));
     oneNameEach(gear.lines().stream().map(Gear.Line::id));
@@ -101,10 +107,10 @@ public record Site(
     }
     for (Gear.Source s : gear.sources()) {
       for (String place : s.places()) {
-        known(anchors, spots, "gear.sources." + s.id() + ".places", place);
+        known(anchors, standing, strips, "gear.sources." + s.id() + ".places", place);
       }
       for (String place : s.driverPlaces()) {
-        known(anchors, spots, "gear.sources." + s.id() + ".driver_places", place);
+        known(anchors, standing, strips, "gear.sources." + s.id() + ".driver_places", place);
       }
       for (String driver : s.drivers()) {
         if (gear.sources().stream().noneMatch(o -> o.id().equals(driver))) {
@@ -142,7 +148,8 @@ public record Site(
         spots,
         gear,
         conditions,
-        offer);
+        offer,
+        strips);
   }
 
   /** The same site with other wires. */
@@ -165,19 +172,118 @@ public record Site(
         spots,
         gear,
         conditions,
-        offer);
+        offer,
+        strips);
   }
 
   public Optional<Anchor> anchor(String id) {
-    return anchors.stream().filter(a -> a.id().equals(id)).findFirst();
+    for (Anchor a : anchors) {
+      if (a.id().equals(id)) {
+        return Optional.of(a);
+      }
+    }
+    return Optional.empty();
   }
 
+  /** The spot of that name, or the place of that name on a strip. */
   public Optional<Spot> spot(String id) {
-    return spots.stream().filter(s -> s.id().equals(id)).findFirst();
+    for (Spot s : spots) {
+      if (s.id().equals(id)) {
+        return Optional.of(s);
+      }
+    }
+    if (strips.isEmpty()) {
+      return Optional.empty();
+    }
+    return standing().stream().filter(s -> s.id().equals(id)).findFirst();
+  }
+
+  /** Every place where a vehicle, a machine or people can stand: the spots, then the strips'. */
+  public List<Spot> standing() {
+    return standing(spots, strips, tree);
+  }
+
+  /**
+   * The same site with the places of its strips drawn as spots: what the planner works on. Sources
+   * that can be on a strip can be at each of its places.
+   */
+  public Site laidOut() {
+    if (strips.isEmpty()) {
+      return this;
+    }
+    Gear all =
+        new Gear(
+            gear.lines(),
+            gear.blocks(),
+            gear.slings(),
+            gear.connectors(),
+            gear.loadCell(),
+            gear.sources().stream()
+                .map(
+                    s ->
+                        new Gear.Source(
+                            s.id(),
+                            s.plugin(),
+                            laidOut(s.places()),
+                            s.drivers(),
+                            laidOut(s.driverPlaces()),
+                            s.parameters()))
+                .toList());
+    return new Site(
+        version,
+        name,
+        origin,
+        display,
+        ruleSet,
+        declinationDeg,
+        picture,
+        tree,
+        cut,
+        targets,
+        wires,
+        looked,
+        dropZones,
+        anchors,
+        standing(),
+        all,
+        conditions,
+        offer,
+        List.of());
+  }
+
+  private List<String> laidOut(List<String> places) {
+    return places.stream()
+        .flatMap(
+            name ->
+                strips.stream()
+                    .filter(s -> s.id().equals(name))
+                    .findFirst()
+                    .map(s -> s.places(tree.stump().at()).stream().map(Spot::id))
+                    .orElseGet(() -> Stream.of(name)))
+        .toList();
+  }
+
+  private static List<Spot> standing(List<Spot> spots, List<Strip> strips, SubjectTree tree) {
+    if (strips.isEmpty()) {
+      return spots;
+    }
+    List<Spot> all = new ArrayList<>(spots);
+    strips.forEach(s -> all.addAll(s.places(tree.stump().at())));
+    return all;
+  }
+
+  /** Every hinge thickness on offer [m]. */
+  public List<Double> hingeThicknesses() {
+    return Steps.with(cut.hingeThicknessesM(), offer.hingeRange());
   }
 
   public Optional<Gear.Source> source(String id) {
-    return gear.sources().stream().filter(s -> s.id().equals(id)).findFirst();
+    for (Gear.Source s : gear.sources()) {
+      if (s.id().equals(id)) {
+        return Optional.of(s);
+      }
+    }
+    return Optional.empty();
   }
 
   /** What was looked for; not looked where the list is silent. */
@@ -213,11 +319,13 @@ public record Site(
     }
   }
 
-  private static void known(List<Anchor> anchors, List<Spot> spots, String field, String id) {
+  private static void known(
+      List<Anchor> anchors, List<Spot> standing, List<Strip> strips, String field, String id) {
     if (anchors.stream().noneMatch(a -> a.id().equals(id))
-        && spots.stream().noneMatch(s -> s.id().equals(id))) {
+        && standing.stream().noneMatch(s -> s.id().equals(id))
+        && strips.stream().noneMatch(s -> s.id().equals(id))) {
       throw new IllegalArgumentException(
-          field + " names \"" + id + "\"; no anchor or spot of that name is on the site");
+          field + " names \"" + id + "\"; no anchor, spot or strip of that name is on the site");
     }
   }
 }

@@ -22,5 +22,16 @@ final class Migrations {
 
   private static void fromFormOne(ObjectNode site) {
     site.put("version", Site.VERSION);
+    absent(site, "strips", site.arrayNode());
+    if (site.path("offer") instanceof ObjectNode offer) {
+      absent(offer, "attach_range", offer.nullNode());
+      absent(offer, "hinge_range", offer.nullNode());
+    }
+  }
+
+  private static void absent(ObjectNode of, String field, JsonNode value) {
+    if (!of.has(field)) {
+      of.set(field, value);
+    }
   }
 }

@@ -41,6 +41,30 @@ public final class LayTargets {
   }
 
   /**
+   * The same for a search: apart from each other all is as in {@link #clearances}; of what overlaps
+   * it is only said that it does, not how deep or how much.
+   */
+  public List<TargetClearance> gaps(FallFootprint footprint) {
+    List<TargetClearance> all = new ArrayList<>(ready.size());
+    for (Ready r : ready) {
+      if (!r.target().mayBeHit()) {
+        Edges.Gap gap = footprint.gapTo(r.edges());
+        Coordinate at = gap.onOther();
+        all.add(
+            new TargetClearance(
+                r.target().id(),
+                gap.distanceM(),
+                r.askedM(),
+                Double.NaN,
+                "",
+                new Position(at.x, at.y),
+                false));
+      }
+    }
+    return all;
+  }
+
+  /**
    * The least {@link TargetClearance#ratio} of a footprint, without depths and amounts: the quick
    * question of a search. Infinite where nothing limits.
    */

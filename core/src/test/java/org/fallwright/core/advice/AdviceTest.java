@@ -92,7 +92,8 @@ class AdviceTest {
         List.of(moved),
         s.gear(),
         s.conditions(),
-        s.offer());
+        s.offer(),
+        s.strips());
   }
 
   @Test

@@ -131,7 +131,8 @@ final class TinySite {
                 new Gear.Source(
                     "steady", "steady", List.of("spot", "point"), List.of(), List.of(), pull))),
         new Conditions(Quantity.measured(gustMps), windTowardDeg, null, null),
-        new Offer(List.of(attachM), How.MEASURED, 90, List.of(), 1));
+        new Offer(List.of(attachM), How.MEASURED, 90, List.of(), 1, null, null),
+        List.of());
   }
 
   private static Place place(Position at) {
