@@ -86,8 +86,17 @@ public final class Recoil {
   }
 
   public boolean contains(Position p) {
-    return fans.stream().anyMatch(f -> f.contains(p))
-        || discs.stream().anyMatch(d -> d.at.distanceTo(p) <= d.radiusM);
+    for (Sector f : fans) {
+      if (f.contains(p)) {
+        return true;
+      }
+    }
+    for (Disc d : discs) {
+      if (d.at.distanceTo(p) <= d.radiusM) {
+        return true;
+      }
+    }
+    return false;
   }
 
   /** Whether a place lies on the axis of the last leg: in one of its fans. */

@@ -24,6 +24,11 @@ record Sector(Position apex, double azimuthDeg, double halfAngleDeg, double radi
   }
 
   boolean contains(Position p) {
+    // most points are ruled out by a square in which the fan lies
+    if (Math.abs(p.eastM() - apex.eastM()) > radiusM
+        || Math.abs(p.northM() - apex.northM()) > radiusM) {
+      return false;
+    }
     double d = apex.distanceTo(p);
     return d == 0 || d <= radiusM && offDeg(p) <= halfAngleDeg;
   }

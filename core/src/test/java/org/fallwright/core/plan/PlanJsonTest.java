@@ -74,7 +74,7 @@ class PlanJsonTest {
               JsonNode setup = doc.path("best_rejected").path(id);
               assertThat(setup.path("rank").isNull()).isTrue();
               assertThat(setup.path("verdict").asText()).isEqualTo("not workable");
-              assertThat(setup.at("/weakest/check").asText()).isEqualTo(id);
+              assertThat(firstMissed(setup)).isEqualTo(id);
               assertThat(doc.path("by_binding_check").path(id).asInt())
                   .isEqualTo(plan.byBindingCheck().get(id))
                   .isPositive();
@@ -85,6 +85,15 @@ class PlanJsonTest {
         .isPositive();
     assertThat(doc.at("/by_verdict/cannot judge yet").asInt()).isZero();
     assertThat(doc.path("notes").get(0).asText()).contains("\"capstan\" is left out");
+  }
+
+  private static String firstMissed(JsonNode setup) {
+    for (JsonNode check : setup.path("checks")) {
+      if (check.path("verdict").asText().equals("not workable")) {
+        return check.path("id").asText();
+      }
+    }
+    return "";
   }
 
   @Test
@@ -215,7 +224,7 @@ class PlanJsonTest {
   }
 
   private static Schema schema() throws IOException {
-    try (InputStream in = PlanJson.class.getResourceAsStream("plan-1.schema.json")) {
+    try (InputStream in = PlanJson.class.getResourceAsStream("plan-2.schema.json")) {
       return SchemaRegistry.withDefaultDialect(SpecificationVersion.DRAFT_2020_12)
           .getSchema(new String(in.readAllBytes(), StandardCharsets.UTF_8), InputFormat.JSON);
     }
