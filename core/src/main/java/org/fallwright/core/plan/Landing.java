@@ -185,7 +185,7 @@ final class Landing {
         () ->
             ways == 0
                 ? "No way out ends clear of the footprint, the sit-back zone, the line's angle and"
-                      + " its ends."
+                    + " its ends."
                 : ways + " way(s) out end clear of every zone.");
   }
 

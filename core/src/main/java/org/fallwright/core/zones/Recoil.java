@@ -35,6 +35,12 @@ public final class Recoil {
   private final List<Disc> discs = new ArrayList<>();
 
   private record Disc(Position at, double radiusM) {
+    boolean contains(Position p) {
+      double e = p.eastM() - at.eastM();
+      double n = p.northM() - at.northM();
+      return e * e + n * n <= radiusM * radiusM;
+    }
+
     Geometry geometry() {
       return Shape.FACTORY
           .createPoint(new Coordinate(at.eastM(), at.northM()))
@@ -77,7 +83,7 @@ public final class Recoil {
       }
     }
     for (Disc d : discs) {
-      if (d.at.distanceTo(p) <= d.radiusM) {
+      if (d.contains(p)) {
         return true;
       }
     }
