@@ -12,7 +12,8 @@ import java.util.Map;
  * @param byVerdict how many have each verdict
  * @param byBindingCheck of those not workable, how many miss each check first, in the fixed order
  *     of the checks
- * @param bestRejected of those that miss a check first, the one that comes nearest to passing it
+ * @param bestRejected of those that miss a check first, the one that comes nearest to passing it;
+ *     of the {@link #MOST_REASONS} checks that most miss first
  * @param notes what was missing or left out, a sentence each: sources without a plugin, gear that
  *     cannot be used
  */
@@ -23,6 +24,9 @@ public record Plan(
     Map<String, Integer> byBindingCheck,
     Map<String, Judged> bestRejected,
     List<String> notes) {
+  /** Most checks of which the nearest setup is shown: those that most setups miss first. */
+  public static final int MOST_REASONS = 50;
+
   /** Most ways that a plan shows. */
   public static final int MOST_WAYS = 200;
 
