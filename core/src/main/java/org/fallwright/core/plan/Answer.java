@@ -20,7 +20,7 @@ record Answer(Judge judge, Ways ways, LeftOut out, Tally tally, Top top) {
     List<String> all = notes();
     all.addAll(judge.notes());
     Map<String, Judged> rejected = new ConcurrentHashMap<>();
-    tally.nearest().entrySet().parallelStream()
+    tally.nearest(Plan.MOST_REASONS).entrySet().parallelStream()
         .forEach(e -> rejected.put(e.getKey(), judge.judge(e.getValue())));
     return new Plan(
         top.best().parallelStream().map(e -> judge.judge(e.setup())).toList(),

@@ -13,7 +13,8 @@ import org.fallwright.core.pull.SourceDescription;
  * @param byVerdict how many have each verdict
  * @param byBindingCheck of those not workable, how many miss each check first, in the fixed order
  *     of the checks
- * @param bestRejected of those that miss a check first, the one that comes nearest to passing it
+ * @param bestRejected of those that miss a check first, the one that comes nearest to passing it;
+ *     of the {@link #MOST_REASONS} checks that most miss first
  * @param notes what was missing or left out, a sentence each: sources without a plugin, gear that
  *     cannot be used
  * @param sources what the sources of the site's gear say of themselves, by id
@@ -26,6 +27,9 @@ public record Plan(
     Map<String, Judged> bestRejected,
     List<String> notes,
     Map<String, SourceDescription> sources) {
+  /** Most checks of which the nearest setup is shown: those that most setups miss first. */
+  public static final int MOST_REASONS = 50;
+
   /** Most ways that a plan shows. */
   public static final int MOST_WAYS = 200;
 

@@ -1,5 +1,6 @@
 package org.fallwright.core.plan;
 
+import java.util.Comparator;
 import java.util.EnumMap;
 import java.util.HashMap;
 import java.util.Map;
@@ -96,10 +97,19 @@ final class Tally {
     return by;
   }
 
-  /** Of those that miss each check first, the one that comes nearest to passing it. */
-  Map<String, Setup> nearest() {
+  /**
+   * Of those that miss a check first, the one that comes nearest to passing it.
+   *
+   * @param most of how many checks, those that most miss first; of equals the first by their ids
+   */
+  Map<String, Setup> nearest(int most) {
     Map<String, Setup> by = new TreeMap<>();
-    missed.forEach((id, m) -> by.put(id, m.nearest));
+    missed.entrySet().stream()
+        .sorted(
+            Comparator.<Map.Entry<String, Missed>>comparingLong(e -> -e.getValue().count)
+                .thenComparing(Map.Entry.comparingByKey()))
+        .limit(most)
+        .forEach(e -> by.put(e.getKey(), e.getValue().nearest));
     return by;
   }
 

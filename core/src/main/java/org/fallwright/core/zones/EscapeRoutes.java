@@ -221,10 +221,17 @@ public final class EscapeRoutes {
     private boolean along(int at, int offDeg, Line line) {
       Position stump = footprint.stump();
       double azimuth = footprint.layDeg() + offDeg;
+      double sin = Math.sin(Math.toRadians(azimuth));
+      double cos = Math.cos(Math.toRadians(azimuth));
+      double covered = 0;
       int i = at;
       for (double length = leastM; length <= mostM; length += LONGER_M, i++) {
         byte state = known[i];
-        if (state == TAKEN) {
+        if (state == TAKEN || length < covered) {
+          continue;
+        }
+        covered = line.recoil.discUntil(stump, sin, cos, length);
+        if (length < covered) {
           continue;
         }
         Position end = stump.along(azimuth, length);

@@ -30,7 +30,9 @@ class SearchOracleTest {
     StringBuilder s = new StringBuilder();
     s.append(a.tally().all()).append(a.tally().byVerdict()).append('\n');
     a.tally().byMissed().forEach((id, n) -> s.append(id).append(' ').append(n).append('\n'));
-    a.tally().nearest().forEach((id, n) -> s.append(id).append(' ').append(n).append('\n'));
+    a.tally()
+        .nearest(Plan.MOST_REASONS)
+        .forEach((id, n) -> s.append(id).append(' ').append(n).append('\n'));
     for (Top.Entry e : a.top().best()) {
       Look l = e.look();
       s.append(e.setup())
