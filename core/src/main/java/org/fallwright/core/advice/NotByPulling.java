@@ -24,7 +24,7 @@ public record NotByPulling(int judged, List<Binding> binding, String sentence) {
    * A check that rules setups out.
    *
    * @param check its id
-   * @param setups how many setups it is the weakest link of
+   * @param setups how many setups miss it first
    */
   public record Binding(String check, int setups) {}
 

@@ -111,9 +111,11 @@ public record Ladder(
         .orElseThrow(
             () ->
                 new IllegalArgumentException(
-                    id
-                        + " is in no setup: no source of the gear lists it among its places, and no"
-                        + " redirect block can be there"));
+                    plan.ranked().size() < Plan.MOST_WAYS
+                        ? id
+                            + " is in no setup: no source of the gear lists it among its places, and"
+                            + " no redirect block can be there"
+                        : id + " is in none of the best " + Plan.MOST_WAYS + " setups"));
   }
 
   private static Judged onLay(Plan plan, double lay, Judge judge) {

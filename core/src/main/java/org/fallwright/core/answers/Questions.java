@@ -4,6 +4,8 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
+import java.util.Set;
+import java.util.stream.Collectors;
 import org.fallwright.core.plan.Judge;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.Plan;
@@ -20,6 +22,7 @@ import org.fallwright.core.site.Looked;
 import org.fallwright.core.site.Quantity;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Spot;
+import org.fallwright.core.site.Strip;
 import org.fallwright.core.site.Wire;
 import org.fallwright.core.units.DisplayUnits;
 
@@ -135,7 +138,20 @@ public record Questions(int setups, List<Question> questions) {
             new Question(
                 "spots." + s.id(),
                 "Whose land is " + s.id() + " on, and may it be used?",
-                asked.using(s.id()),
+                asked.using(Set.of(s.id())),
+                false));
+      }
+    }
+    for (Strip s : site.strips()) {
+      if (s.land() == null) {
+        all.add(
+            new Question(
+                "strips." + s.id(),
+                "Whose land is " + s.id() + " on, and may it be used?",
+                asked.using(
+                    s.places(site.tree().stump().at()).stream()
+                        .map(Spot::id)
+                        .collect(Collectors.toSet())),
                 false));
       }
     }
@@ -236,11 +252,11 @@ public record Questions(int setups, List<Question> questions) {
     }
 
     /** Setups that use a place and would do. */
-    int using(String id) {
+    int using(Set<String> ids) {
       Judge judge = new Judge(site, sources);
       return (int)
           setups.stream()
-              .filter(s -> Uses.of(s).contains(id))
+              .filter(s -> Uses.of(s).stream().anyMatch(ids::contains))
               .filter(s -> judge.quick(s).verdict().compareTo(Verdict.TIGHT) <= 0)
               .count();
     }

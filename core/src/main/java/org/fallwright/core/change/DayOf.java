@@ -9,6 +9,7 @@ import org.fallwright.core.site.Copy;
 import org.fallwright.core.site.Quantity;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Spot;
+import org.fallwright.core.site.Strip;
 import org.fallwright.core.site.SubjectTree;
 import org.fallwright.core.site.Wetness;
 
@@ -35,7 +36,7 @@ public final class DayOf {
             s, "conditions", Copy.with(s.conditions(), "windTowardDeg", day.windTowardDeg()));
   }
 
-  /** With wet or dry ground at every spot, parked vehicle and picket; null: as it is. */
+  /** With wet or dry ground at every spot and strip, parked vehicle and picket; null: as it is. */
   public static Site withGround(Site site, Wetness ground) {
     if (ground == null) {
       return site;
@@ -49,7 +50,9 @@ public final class DayOf {
               ? Copy.with(v, "wet", wet)
               : a instanceof Anchor.Pickets p ? Copy.with(p, "wet", wet) : a);
     }
-    return Copy.with(Copy.with(site, "spots", spots), "anchors", anchors);
+    List<Strip> strips = site.strips().stream().map(s -> Copy.with(s, "wet", wet)).toList();
+    Site other = Copy.with(Copy.with(site, "spots", spots), "strips", strips);
+    return Copy.with(other, "anchors", anchors);
   }
 
   /** With saturated or drained soil at every anchor tree and stump; null: as it is. */

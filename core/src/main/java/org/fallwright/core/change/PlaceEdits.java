@@ -8,6 +8,7 @@ import org.fallwright.core.site.Place;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Spot;
+import org.fallwright.core.site.Strip;
 import org.fallwright.core.site.Target;
 
 /** What can be changed on the ground: where it is stood, slings, wet ground, things in the way. */
@@ -35,9 +36,9 @@ final class PlaceEdits {
       String id = places.get(i);
       Position before = i == 0 ? e.site.tree().stump().at() : p.at(places.get(i - 1));
       for (int way : new int[] {-1, 1}) {
-        e.site
-            .spot(id)
-            .ifPresent(
+        e.site.spots().stream()
+            .filter(s -> s.id().equals(id)) // other places of a strip are candidates already
+            .forEach(
                 s ->
                     all.add(
                         new Dial(STAND_STEPS, 4, n -> p.stand(s, before, way * n * STAND_STEP_M))));
@@ -137,6 +138,8 @@ final class PlaceEdits {
     Site s = e.site;
     List<Spot> spots =
         s.spots().stream().map(o -> ids.contains(o.id()) ? Copy.with(o, "wet", false) : o).toList();
+    List<Strip> strips =
+        s.strips().stream().map(o -> holdsAny(o, ids) ? Copy.with(o, "wet", false) : o).toList();
     List<Anchor> anchors =
         s.anchors().stream().map(a -> ids.contains(a.id()) ? dried(a) : a).toList();
     return e.changed(
@@ -144,7 +147,11 @@ final class PlaceEdits {
         ids.size(),
         "",
         "wait for dry ground at " + String.join(" and ", ids),
-        Copy.with(Copy.with(s, "spots", spots), "anchors", anchors));
+        Copy.with(Copy.with(Copy.with(s, "spots", spots), "strips", strips), "anchors", anchors));
+  }
+
+  private boolean holdsAny(Strip strip, List<String> ids) {
+    return strip.places(e.site.tree().stump().at()).stream().anyMatch(p -> ids.contains(p.id()));
   }
 
   private Site spots(Spot moved) {

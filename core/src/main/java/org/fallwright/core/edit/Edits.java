@@ -1,8 +1,10 @@
 package org.fallwright.core.edit;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Objects;
+import java.util.Set;
 import java.util.function.UnaryOperator;
 import org.fallwright.core.edit.Edit.Kind;
 import org.fallwright.core.site.Anchor;
@@ -146,7 +148,7 @@ public final class Edits {
           }
           // what names it is given up and taken again, so that no name dangles in between
           Site named = named(unnamed(site, id), id, thing);
-          return again(named, site, n -> n != null && n.equals(id) ? newId : n, newId);
+          return again(named, site, renamed(site, id, newId), newId);
         });
   }
 
@@ -161,9 +163,26 @@ public final class Edits {
     return Copy.with(bare, "anchors", anchors);
   }
 
+  /** What each name is after a thing has another; the places of a strip begin with its name. */
+  private static UnaryOperator<String> renamed(Site site, String id, String newId) {
+    Set<String> own = names(site, id);
+    return n -> own.contains(n) ? newId + n.substring(id.length()) : n;
+  }
+
+  /** The name of a thing, and those of its places where it is a strip. */
+  private static Set<String> names(Site site, String id) {
+    Set<String> names = new HashSet<>(Set.of(id));
+    site.strips().stream()
+        .filter(s -> s.id().equals(id))
+        .flatMap(s -> s.places(site.tree().stump().at()).stream())
+        .forEach(p -> names.add(p.id()));
+    return names;
+  }
+
   /** The site without whatever names a thing: places of the gear, tapes, doors, exceptions. */
   private static Site unnamed(Site site, String id) {
-    Site bare = Copy.with(site, "gear", places(site.gear(), p -> p.equals(id) ? null : p));
+    Set<String> own = names(site, id);
+    Site bare = Copy.with(site, "gear", places(site.gear(), p -> own.contains(p) ? null : p));
     bare =
         Copy.with(
             bare,

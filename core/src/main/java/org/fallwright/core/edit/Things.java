@@ -13,6 +13,7 @@ import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Shape;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Spot;
+import org.fallwright.core.site.Strip;
 import org.fallwright.core.site.SubjectTree;
 import org.fallwright.core.site.Target;
 import org.fallwright.core.site.Wire;
@@ -30,7 +31,8 @@ public final class Things {
             site.dropZones().stream(),
             site.anchors().stream().map(a -> (Record) a),
             site.spots().stream(),
-            site.peoplePoints().stream())
+            site.peoplePoints().stream(),
+            site.strips().stream())
         .flatMap(s -> s)
         .map(Record.class::cast)
         .toList();
@@ -64,6 +66,9 @@ public final class Things {
     if (thing instanceof PeoplePoint p) {
       return p.id();
     }
+    if (thing instanceof Strip s) {
+      return s.id();
+    }
     throw new IllegalArgumentException(thing.getClass().getSimpleName() + " is no thing on a plan");
   }
 
@@ -75,12 +80,16 @@ public final class Things {
     if (thing instanceof PeoplePoint p) {
       return List.of(p.at());
     }
+    if (thing instanceof Strip s) {
+      return s.points();
+    }
     return shape(thing).map(Outline::points).orElseGet(() -> List.of(place(thing).at()));
   }
 
   /** Whether points can be added to it and taken from it. */
   public static boolean hasOutline(Record thing) {
     return thing instanceof Wire
+        || thing instanceof Strip
         || shape(thing).filter(s -> !(s instanceof Shape.Circle)).isPresent();
   }
 
@@ -88,6 +97,9 @@ public final class Things {
   static Record through(Record thing, List<Position> points) {
     if (thing instanceof Wire w) {
       return Copy.with(w, "poles", poles(w.poles(), points));
+    }
+    if (thing instanceof Strip) {
+      return Copy.with(thing, "points", points);
     }
     Optional<Shape> shape = shape(thing);
     if (shape.isPresent()) {
@@ -139,6 +151,9 @@ public final class Things {
     }
     if (thing instanceof PeoplePoint) {
       return "peoplePoints";
+    }
+    if (thing instanceof Strip) {
+      return "strips";
     }
     return thing instanceof Anchor ? "anchors" : "spots";
   }

@@ -1,7 +1,7 @@
 package org.fallwright.core.plan;
 
 import java.util.Locale;
-import java.util.Map;
+import java.util.function.Supplier;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.site.Position;
@@ -33,14 +33,19 @@ final class ForceChecks {
   void movement(TreeSide t, double attachAboveHingeM) {
     double asked = Allowances.LEVER_LEAST.value() * attachAboveHingeM;
     if (t.status() == Status.HINGE_NEVER_LETS_GO) {
-      String why =
-          Double.isNaN(t.thicknessThatWouldM())
-              ? "The hinge never lets go: the wind alone beats the tree's weight."
-              : "The hinge never lets go; one of "
-                  + in.smallLength(t.thicknessThatWouldM())
-                  + " would.";
       grade.factored(
-          "hinge lets go", t.hingeNm(), t.hingeNm() + t.windNm(), "N·m", 0, stump(), () -> why);
+          "hinge lets go",
+          t.hingeNm(),
+          t.hingeNm() + t.windNm(),
+          "N·m",
+          0,
+          stump(),
+          () ->
+              Double.isNaN(t.thicknessThatWouldM())
+                  ? "The hinge never lets go: the wind alone beats the tree's weight."
+                  : "The hinge never lets go; one of "
+                      + in.smallLength(t.thicknessThatWouldM())
+                      + " would.");
     } else {
       grade.factored(
           "hinge lets go",
@@ -88,15 +93,13 @@ final class ForceChecks {
   }
 
   /** Pull, hold, hinge. */
-  void pull(Ratios r, TreeSide t, PullOffer offer, String source) {
-    Map<String, Double> by = r.byCheck();
-    String gives = in.both(u -> u.forceAtMost(r.source().lowN()));
+  void pull(Ratios r, TreeSide t, PullOffer offer, Supplier<String> source) {
     grade.plain(
         "pull",
         r.source().lowN(),
         t.planN(),
         "N",
-        by.get("pull"),
+        r.pull(),
         null,
         () ->
             t.planN() == 0
@@ -104,9 +107,9 @@ final class ForceChecks {
                 : "The pull to plan for is "
                     + in.both(u -> u.forceAtLeast(t.planN()))
                     + " at the tree; "
-                    + source
+                    + source.get()
                     + " gives "
-                    + gives
+                    + in.both(u -> u.forceAtMost(r.source().lowN()))
                     + " ("
                     + offer.limit().what().english()
                     + ").");
@@ -124,38 +127,39 @@ final class ForceChecks {
                   + in.both(u -> u.forceAtLeast(t.workingN()))
                   + ".");
     }
-    String rests =
-        String.format(
-            Locale.ROOT,
-            "Not asked: sitting back, the tree rests on its stump (%.2f).",
-            t.restShare());
+    Supplier<String> rests =
+        () ->
+            String.format(
+                Locale.ROOT,
+                "Not asked: sitting back, the tree rests on its stump (%.2f).",
+                t.restShare());
     grade.plain(
         "hold",
         r.source().holdN(),
         t.holdN(),
         "N",
-        by.get("hold"),
+        r.hold(),
         null,
         () ->
             r.holdAsked()
                 ? "Without its hinge the tree pulls back with "
                     + in.both(u -> u.forceAtLeast(t.holdN()))
                     + "; "
-                    + source
+                    + source.get()
                     + " holds "
                     + in.both(u -> u.forceAtMost(r.source().holdN()))
                     + "."
-                : rests);
+                : rests.get());
     grade.plain(
         "hold stability",
         r.holding().stability(),
         Allowances.HOLD_STABILITY_ASKED.value(),
         "",
-        by.get("hold stability"),
+        r.holdStability(),
         null,
         () ->
             !r.holdAsked()
-                ? rests
+                ? rests.get()
                 : !r.source().captured()
                     ? "A constant force can pull a tree over; it can never hold one."
                     : String.format(
@@ -163,7 +167,7 @@ final class ForceChecks {
                         "The line is %.1f times as stiff as the tree is unstable.",
                         r.holding().stability()));
     start(r, t);
-    hinge(by, t);
+    hinge(r, t);
   }
 
   private void start(Ratios r, TreeSide t) {
@@ -182,55 +186,57 @@ final class ForceChecks {
                 + " it goes as soon as the hinge is ready: be away before the last wood is cut.");
   }
 
-  private void hinge(Map<String, Double> by, TreeSide t) {
+  private void hinge(Ratios r, TreeSide t) {
     share(
         false,
         "steering",
         t.steerShare(),
         Ratios.HINGE_SHARE,
-        by.get("steering"),
+        r.steering(),
         "Side lean, wind and line take %.1f %% of the hinge's side strength; %.0f %% may be used.");
     share(
         true,
         "hinge turning",
         t.turnShare(),
         Ratios.HINGE_SHARE,
-        by.get("hinge turning"),
+        r.turning(),
         "The line turns the hinge with %.1f %% of its strength; %.0f %% may be used.");
     share(
         true,
         "hinge crushing",
         t.crushShare(),
         Ratios.CRUSH_SHARE,
-        by.get("hinge crushing"),
+        r.crushing(),
         "Weight and line press the hinge to %.1f %% of its strength; %.0f %% may be used.");
   }
 
   private void share(
       boolean factored, String id, double share, double most, double ratio, String why) {
     double shown = Math.max(0, share);
-    String text = String.format(Locale.ROOT, why, 100 * shown, 100 * most);
+    Supplier<String> text = () -> String.format(Locale.ROOT, why, 100 * shown, 100 * most);
     if (factored) {
-      grade.factored(id, shown, most, "", ratio, stump(), () -> text);
+      grade.factored(id, shown, most, "", ratio, stump(), text);
     } else {
-      grade.plain(id, shown, most, "", ratio, stump(), () -> text);
+      grade.plain(id, shown, most, "", ratio, stump(), text);
     }
   }
 
   /** Every part, at plan and at the most the source can do. */
   void parts(Ratios r, TreeSide t) {
-    for (Part p : r.parts()) {
+    for (int i = 0; i < r.parts().size(); i++) {
+      Part p = r.parts().get(i);
       double plan = t.workingN() * p.atPlan();
       double high = r.source().highN() * p.holding();
       double allowed = p.strengthN() / p.designFactor();
       double last = p.strengthN() / p.lastFactor();
+      Position at = grade.full() ? at(p.name()) : null;
       grade.factored(
           p.name() + " at plan",
           allowed,
           plan,
           "N",
-          r.byCheck().get(p.name() + " at plan"),
-          at(p.name()),
+          r.atPlan()[i],
+          at,
           () ->
               capital(p.name())
                   + " bears "
@@ -243,8 +249,8 @@ final class ForceChecks {
           last,
           high,
           "N",
-          r.byCheck().get(p.name() + " at high"),
-          at(p.name()),
+          r.atHigh()[i],
+          at,
           () ->
               capital(p.name())
                   + " bears "

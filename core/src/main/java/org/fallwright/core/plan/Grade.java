@@ -34,6 +34,11 @@ final class Grade {
     this.exceptions = exceptions;
   }
 
+  /** Whether each check says why. */
+  boolean full() {
+    return full;
+  }
+
   private String said(Supplier<String> why) {
     return full ? why.get() : "";
   }
@@ -110,9 +115,19 @@ final class Grade {
       double workable,
       Position at,
       Supplier<String> why) {
+    if (Double.isNaN(ratio)) {
+      // nothing there, nothing asked and yet a thing in the way: not met
+      add(id, value, limit, unit, 0, workable, at, why);
+      return;
+    }
     Verdict v =
         ratio >= workable ? Verdict.WORKABLE : ratio >= 1 ? Verdict.TIGHT : Verdict.NOT_WORKABLE;
     put(new Check(id, value, limit, unit, ratio, v, at, said(why)), ratio / workable);
+  }
+
+  /** The same in short. */
+  Slice slice() {
+    return Slice.of(checks, standings);
   }
 
   private void put(Check check, double standing) {

@@ -52,6 +52,10 @@ record GroundFall(double eastward, double northward) {
       ez += e * z;
       nz += n * z;
     }
+    if (ee + nn == 0) {
+      // nothing near enough says how the ground lies
+      return new GroundFall(0, 0);
+    }
     // a hair of level ground square to the rest keeps heights on one line from tilting it sideways
     double hair = 1e-9 * (ee + nn) + Double.MIN_NORMAL;
     double det = (ee + hair) * (nn + hair) - en * en;

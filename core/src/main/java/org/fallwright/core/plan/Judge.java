@@ -7,6 +7,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.ConcurrentHashMap;
+import java.util.function.Supplier;
 import org.fallwright.core.pull.HaulLine;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullSource;
@@ -18,9 +19,10 @@ import org.fallwright.core.rules.RuleSets;
 import org.fallwright.core.site.Copy;
 import org.fallwright.core.site.Gear;
 import org.fallwright.core.site.How;
-import org.fallwright.core.site.Place;
+import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.site.SubjectTree;
+import org.fallwright.core.statics.LineSet;
 import org.fallwright.core.statics.Part;
 import org.fallwright.core.statics.PlanField;
 import org.fallwright.core.statics.Ratios;
@@ -42,7 +44,7 @@ public final class Judge {
   /**
    * More than there are checks: those that cannot be made where the tree does not move all count.
    */
-  private static final int NOT_MADE = 1000;
+  static final int NOT_MADE = 1000;
 
   /** The site with the gear at hand alone. */
   private final Site site;
@@ -50,6 +52,7 @@ public final class Judge {
   private final PullSources sources;
   private final RuleSet rules;
   private final DisplayUnits in;
+  private final Places places;
   private final Subject subject;
   private final SiteTables tables = new SiteTables();
   private final Knowledge knowledge;
@@ -69,9 +72,9 @@ public final class Judge {
    *     set that is not known
    */
   public Judge(Site entered, PullSources sources) {
-    site = entered.atHand();
+    site = entered.atHand().laidOut();
     this.sources = sources;
-    for (double height : site.offer().attachHeightsM()) {
+    for (double height : site.offer().attachHeights()) {
       double above = height - site.cut().heightM();
       if (above <= Allowances.ATTACH_LEAST.value()) {
         throw new IllegalArgumentException(
@@ -86,6 +89,7 @@ public final class Judge {
     }
     rules = RuleSets.shipped().byKey(site.ruleSet());
     in = DisplayUnits.valueOf(site.display().name());
+    places = new Places(site);
     subject = new Subject(site);
     knowledge = new Knowledge(site, rules);
     reaching = reaching(site);
@@ -114,21 +118,25 @@ public final class Judge {
     return notes;
   }
 
-  /** The setup with all its checks, its zones and notes. */
-  public Judged judge(Setup setup) {
-    return judge(setup, true);
+  /** Every check, with its verdict and ratio alone. */
+  Look look(Setup setup) {
+    Grade grade = quickly();
+    Found found = check(grade, setup, false);
+    TreeSide tree = found.statics().treeSide();
+    int parts = tree.movable() ? found.stopped().ratios().parts().size() : 0;
+    return new Look(setup.layDeg(), parts, tree.movable() ? 0 : NOT_MADE, grade.slice());
   }
 
-  /** The same checks, figures and sentence without zones and notes, which take longer. */
-  public Judged quick(Setup setup) {
-    return judge(setup, false);
+  /** Gathers checks without a sentence. */
+  Grade quickly() {
+    return new Grade(false, exceptions);
   }
 
   /** The setup as judged, with all that its figures were reckoned from. */
   public Reckoned reckon(Setup setup) {
     PullSource source = source(setup);
     PullSource driver = driver(setup);
-    Route route = Route.of(site, setup, source, driver);
+    Route route = Route.of(places, setup, source, driver);
     Asked asked = ask(setup, route, source, driver);
     Statics statics = asked.statics();
     TreeSide tree = statics.treeSide();
@@ -146,15 +154,7 @@ public final class Judge {
         GearParts.lineFigures(site, setup),
         parts.rated(),
         offer,
-        tree.movable()
-            ? stop(
-                    statics,
-                    offer,
-                    route,
-                    parts.parts(),
-                    CellLoad.of(site, setup, route.loads().sourceEndPerTree(), offer).isPresent())
-                .ratios()
-            : null,
+        tree.movable() ? stop(setup, statics, offer, route, parts.parts()).ratios() : null,
         parts.anchors(),
         tables);
   }
@@ -185,7 +185,7 @@ public final class Judge {
               + " is an anchor, and its places are the anchors");
     }
     PullSource source = source(setup);
-    Route route = Route.of(site, setup, source, null);
+    Route route = Route.of(places, setup, source, null);
     Statics statics = statics(setup, route, null);
     Reach.Pulled pulled = Reach.Pulled.of(statics.treeSide());
     return new StandingGround(
@@ -211,59 +211,194 @@ public final class Judge {
         : kind(site.source(setup.driver().source()).orElseThrow().plugin());
   }
 
-  private Judged judge(Setup setup, boolean full) {
+  /** What the checks of a setup brought to light. */
+  private record Found(
+      Route route,
+      Statics statics,
+      PullOffer offer,
+      GearParts parts,
+      Landing.Zones zones,
+      Stopped stopped,
+      OperatorStand stand,
+      Supplier<String> name) {}
+
+  /**
+   * Every check, in the fixed order.
+   *
+   * @param exact whether figures are worked out that no verdict hangs on
+   */
+  private Found check(Grade grade, Setup setup, boolean exact) {
     PullSource source = source(setup);
     PullSource driver = driver(setup);
     Route route = routes.get(setup.withLay(0));
     if (route == null) { // not computed inside the map: a plugin that hangs must not hold a lock
-      route = Route.of(site, setup, source, driver);
+      route = Route.of(places, setup, source, driver);
       routes.put(setup.withLay(0), route);
     }
     Asked asked = ask(setup, route, source, driver);
     Statics statics = asked.statics();
     TreeSide tree = statics.treeSide();
     PullOffer offer = asked.offer();
-    GearParts parts = new GearParts(site, rules, tables).collect(setup, route, offer);
-    String name = name(setup, source);
+    GearParts parts = parts(setup, route, offer);
+    Supplier<String> name = () -> name(setup, source);
 
-    Grade grade = new Grade(full, exceptions);
     knowledge.check(grade);
     usable(grade, parts);
-    Landing.Zones zones = landing.check(grade, setup, route, tree, full);
+    Landing.Zones zones = landing.check(grade, setup, route, tree, exact);
     lineRun.check(grade, setup, route);
+    kit(grade, setup, route, tree, offer, parts);
+    movement(grade, setup, tree);
+    Stopped stopped = pulled(grade, setup, statics, offer, route, parts.parts(), name);
+    OperatorStand stand = people(grade, setup, route, zones, offer, tree);
+    return new Found(route, statics, offer, parts, zones, stopped, stand, name);
+  }
+
+  /** The site as it is judged: the gear at hand alone, its strips laid out. */
+  Site site() {
+    return site;
+  }
+
+  Places places() {
+    return places;
+  }
+
+  Subject subject() {
+    return subject;
+  }
+
+  Knowledge knowledge() {
+    return knowledge;
+  }
+
+  Landing landing() {
+    return landing;
+  }
+
+  LineRun lineRun() {
+    return lineRun;
+  }
+
+  /** What bears the line of a way. */
+  GearParts parts(Setup way, Route route, PullOffer offer) {
+    return new GearParts(site, rules, tables).collect(way, route, offer);
+  }
+
+  /** A lay pulled over the first support of a route, for a search. */
+  Fall fall(Ways.End end, Route route, double layDeg) {
+    Setup lay = end.way(List.of(), "").withLay(layDeg);
+    Fall.Kept all = kept(lay, route);
+    Grade lands = quickly();
+    landing.lands(lands, all.landed());
+    Grade moves = quickly();
+    movement(moves, lay, all.statics().treeSide());
+    return new Fall(layDeg, site.cut().wedges(), lands.slice(), moves.slice(), all);
+  }
+
+  /** What was not kept of it. */
+  Fall.Kept fall(Ways.End end, Route route, Fall fall) {
+    return kept(end.way(List.of(), "").withLay(fall.layDeg()), route);
+  }
+
+  private Fall.Kept kept(Setup lay, Route route) {
+    LineSet line = subject.line(lay.attachHeightM(), route.points().get(1), 1e6);
+    Statics statics = new Statics(subject.pull(lay, line, route.bearingErrorM()));
+    TreeSide tree = statics.treeSide();
+    Landing.Landed landed = landing.lookAt(lay.layDeg(), Landing.steeringShare(tree));
+    return new Fall.Kept(
+        statics, landed, landing.ends(landed, landing.sitBack(lay.layDeg(), tree)));
+  }
+
+  /** The line and the gear. */
+  void kit(Grade grade, Setup setup, Route route, TreeSide tree, PullOffer offer, GearParts parts) {
     new KitChecks(site, spares, in, grade).check(setup, route, tree, offer, parts);
-    ForceChecks forces = new ForceChecks(site, in, grade);
-    forces.movement(tree, setup.attachHeightM() - site.cut().heightM());
-    List<String> notes = new ArrayList<>(zones.notes());
-    Figures figures;
-    List<PartLoad> loads = List.of();
+  }
+
+  /** Whether hinge and line let it move. */
+  void movement(Grade grade, Setup setup, TreeSide tree) {
+    new ForceChecks(site, in, grade).movement(tree, setup.attachHeightM() - site.cut().heightM());
+  }
+
+  /**
+   * Whether the source pulls and holds, and every part bears it; then what the source says itself.
+   *
+   * @return null where the tree does not move, for then none of the first can be said
+   */
+  Stopped pulled(
+      Grade grade,
+      Setup setup,
+      Statics statics,
+      PullOffer offer,
+      Route route,
+      List<Part> parts,
+      Supplier<String> name) {
+    TreeSide tree = statics.treeSide();
+    Stopped stopped = null;
     if (tree.movable()) {
-      Optional<CellLoad> cell = CellLoad.of(site, setup, route.loads().sourceEndPerTree(), offer);
-      Stopped stopped = stop(statics, offer, route, parts.parts(), cell.isPresent());
+      ForceChecks forces = new ForceChecks(site, in, grade);
+      stopped = stop(setup, statics, offer, route, parts);
       Ratios r = stopped.ratios();
       forces.pull(r, tree, offer, name);
       forces.parts(r, tree);
       if (stopped.leans()) {
         leaning(grade, offer, r);
       }
-      figures = FiguresOf.reckon(cell, route, statics, r, offer, stopped.leans(), zones);
-      loads = loads(r, tree);
-      if (full) {
-        notes.addAll(SetupNotes.of(site, in, setup, tree, r, offer));
-        notes.addAll(GearNotes.of(site, in, setup, parts, cell.isPresent()));
-      }
-    } else {
-      figures = FiguresOf.unmovable(route, tree, zones);
     }
+    Position at =
+        places.place(setup.driver() == null ? setup.place() : setup.driver().place()).at();
     for (PullOffer.Finding f : offer.checks()) {
-      grade.rule(
-          f.id(), f.value(), f.limit(), f.unit(), f.ratio(), place(setup).at(), () -> f.why());
+      grade.rule(f.id(), f.value(), f.limit(), f.unit(), f.ratio(), at, () -> f.why());
     }
+    return stopped;
+  }
+
+  /** Whether people can stand clear; where the source is worked, null: nobody works it. */
+  OperatorStand people(
+      Grade grade, Setup setup, Route route, Landing.Zones zones, PullOffer offer, TreeSide tree) {
     People people = new People(reaching, rules, in, grade);
     OperatorStand stand = people.stand(setup, route, offer);
     people.check(setup, route, stand, zones, offer, tree);
-    notes.addAll(offer.notes());
-    Ground ground = full ? landing.ground(setup, zones, stand) : null;
+    return stand;
+  }
+
+  /** The setup with all its checks, its zones and notes. */
+  public Judged judge(Setup setup) {
+    return judge(setup, true);
+  }
+
+  /** The same checks and figures without sentences, zones and notes, which take longer. */
+  public Judged quick(Setup setup) {
+    return judge(setup, false);
+  }
+
+  private Judged judge(Setup setup, boolean full) {
+    Grade grade = full ? new Grade(true, exceptions) : quickly();
+    Found found = check(grade, setup, true);
+    TreeSide tree = found.statics().treeSide();
+    List<String> notes = new ArrayList<>(found.zones().notes());
+    Figures figures;
+    List<PartLoad> loads = List.of();
+    if (tree.movable()) {
+      Ratios r = found.stopped().ratios();
+      figures =
+          FiguresOf.reckon(
+              found.stopped().cell(),
+              found.route(),
+              found.statics(),
+              r,
+              found.offer(),
+              found.stopped().leans(),
+              found.zones());
+      loads = loads(r, tree);
+      if (full) {
+        notes.addAll(SetupNotes.of(site, in, setup, tree, r, found.offer()));
+        boolean cell = found.stopped().cell().isPresent();
+        notes.addAll(GearNotes.of(site, in, setup, found.parts(), cell));
+      }
+    } else {
+      figures = FiguresOf.unmovable(found.route(), tree, found.zones());
+    }
+    notes.addAll(found.offer().notes());
+    Ground ground = full ? landing.ground(setup, found.zones(), found.stand()) : null;
     if (full) {
       notes.addAll(landing.words().ofCrew(ground));
       notes.addAll(LandNotes.of(site, setup));
@@ -276,12 +411,12 @@ public final class Judge {
         grade.standing(),
         grade.standings(),
         grade.failing() + (tree.movable() ? 0 : NOT_MADE),
-        full ? Sentence.of(grade.verdict(), weakest, figures, name, in) : "",
+        full ? Sentence.of(grade.verdict(), weakest, figures, found.name().get(), in) : "",
         figures,
         grade.checks(),
         loads,
-        route.line(),
-        route.haulOnSite(),
+        found.route().line(),
+        found.route().haulOnSite(),
         ground,
         notes);
   }
@@ -342,10 +477,11 @@ public final class Judge {
    * The ratios after any stop, and whether the setup leans on a person who reads a load cell: it
    * does where a part would give way at the most the source can do, and a load cell is there.
    */
-  private record Stopped(Ratios ratios, boolean leans) {}
+  record Stopped(Ratios ratios, boolean leans, Optional<CellLoad> cell) {}
 
   private Stopped stop(
-      Statics statics, PullOffer offer, Route route, List<Part> parts, boolean cell) {
+      Setup setup, Statics statics, PullOffer offer, Route route, List<Part> parts) {
+    Optional<CellLoad> cell = CellLoad.of(site, setup, route.loads().sourceEndPerTree(), offer);
     TreeSide tree = statics.treeSide();
     double low = offer.lowN() / route.loads().sourceEndPerTree();
     boolean captured = offer.captured() && offer.holdN() >= tree.holdN();
@@ -354,9 +490,9 @@ public final class Judge {
         new SourceAtTree(low, offer.holdN(), offer.highN(), captured, SourceAtTree.Stop.NONE, 0);
     Ratios without = Ratios.of(statics, wedges, free, parts);
     // a stop at the ceiling helps only where the plan itself stays below it
-    boolean helps = anyBelowOne(without, " at high") && !anyBelowOne(without, " at plan");
-    if (!helps || !cell) {
-      return new Stopped(without, false);
+    boolean helps = !without.holdsAtHigh() && without.holdsAtPlan();
+    if (!helps || cell.isEmpty()) {
+      return new Stopped(without, false, cell);
     }
     SourceAtTree read =
         new SourceAtTree(
@@ -366,25 +502,19 @@ public final class Judge {
             captured,
             SourceAtTree.Stop.READER,
             offer.overrunM());
-    return new Stopped(Ratios.of(statics, wedges, read, parts), true);
-  }
-
-  private static boolean anyBelowOne(Ratios r, String checks) {
-    return r.byCheck().entrySet().stream()
-        .anyMatch(e -> e.getKey().endsWith(checks) && e.getValue() < 1);
+    return new Stopped(Ratios.of(statics, wedges, read, parts), true, cell);
   }
 
   private void leaning(Grade grade, PullOffer offer, Ratios r) {
-    String stop = in.both(u -> u.forceAtMost(r.ceiling().tensionN()));
-    String why =
-        "Works only with a person reading the load cell who stops it at "
-            + stop
-            + ": beyond that "
-            + r.ceiling().part()
-            + " is loaded past its factor.";
+    Supplier<String> why =
+        () ->
+            "Works only with a person reading the load cell who stops it at "
+                + in.both(u -> u.forceAtMost(r.ceiling().tensionN()))
+                + ": beyond that "
+                + r.ceiling().part()
+                + " is loaded past its factor.";
     if (offer.powered()) {
-      grade.tightAtBest(
-          "stop reading", r.ceiling().tensionN(), r.source().highN(), "N", null, () -> why);
+      grade.tightAtBest("stop reading", r.ceiling().tensionN(), r.source().highN(), "N", null, why);
     } else {
       grade.factored(
           "stop reading",
@@ -393,11 +523,12 @@ public final class Judge {
           "N",
           Double.POSITIVE_INFINITY,
           null,
-          () -> why);
+          why);
     }
   }
 
-  private void usable(Grade grade, GearParts parts) {
+  /** Whether each anchor may be used. */
+  void usable(Grade grade, GearParts parts) {
     Map<String, HeldAnchor> byAnchor = new LinkedHashMap<>();
     for (HeldAnchor h : parts.anchors()) {
       byAnchor.merge(h.anchor().id(), h, (a, b) -> a.capacity().refused() ? a : b);
@@ -431,10 +562,6 @@ public final class Judge {
                     p.designFactor(),
                     p.lastFactor()))
         .toList();
-  }
-
-  private Place place(Setup s) {
-    return Route.place(site, s.driver() == null ? s.place() : s.driver().place());
   }
 
   private String name(Setup s, PullSource source) {

@@ -43,4 +43,9 @@ public record Judged(
     haul = List.copyOf(haul);
     notes = List.copyOf(notes);
   }
+
+  /** The check of an id that it has. */
+  public Check check(String id) {
+    return checks.stream().filter(c -> c.id().equals(id)).findFirst().orElseThrow();
+  }
 }

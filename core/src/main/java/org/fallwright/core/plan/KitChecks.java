@@ -37,9 +37,12 @@ final class KitChecks {
     this.grade = grade;
   }
 
+  /**
+   * @param t what the tree asks; null: the take-up is of no account here
+   */
   void check(Setup setup, Route route, TreeSide t, PullOffer offer, GearParts gear) {
     Gear.Line line = GearParts.line(site, setup);
-    double takeUp = t.movable() ? t.takeUpM() : 0;
+    double takeUp = t != null && t.movable() ? t.takeUpM() : 0;
     List<Double> legs = route.loads().legs().stream().map(LegLoads.Leg::lengthM).toList();
     List<Gear.Line> joined = JoinedLines.parts(site, setup.line());
     PathFit fit = fit(legs, joined, offer, takeUp);

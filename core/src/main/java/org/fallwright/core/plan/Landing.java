@@ -48,10 +48,14 @@ final class Landing {
   private final WireCheck wires;
   private final List<WireCheck.Reach> reach;
   private final EscapeRoutes escapes;
+  private final double wayOutM;
   private final GroundFall ground;
   private final Map<Fall, Landed> falls = new ConcurrentHashMap<>();
+  private final Map<Double, Landed> widest = new ConcurrentHashMap<>();
   private final Map<Out, List<Position>> waysOut = new ConcurrentHashMap<>();
   private final Map<Along, Angles> angles = new ConcurrentHashMap<>();
+
+  private static final double WIDEST = FallFootprint.halfAngleDeg(Double.POSITIVE_INFINITY);
 
   /** All that a footprint depends on. */
   private record Fall(double layDeg, double steeringShare) {}
@@ -68,7 +72,7 @@ final class Landing {
   private record Out(double layDeg, double steeringShare, Along along) {}
 
   /** The path of the line and the two-legged anchors on it. */
-  private record Along(List<Position> path, List<BridleLegs> bridles) {}
+  record Along(List<Position> path, List<BridleLegs> bridles) {}
 
   /** The inside of the angle of a two-legged anchor. */
   record Bridle(String id, Bight inside) {}
@@ -83,6 +87,15 @@ final class Landing {
       bridles.forEach(b -> all.add(b.inside()));
       return all;
     }
+
+    static Angles of(Along along) {
+      List<List<Position>> more = along.bridles().stream().map(BridleLegs::path).toList();
+      List<Bridle> bridles =
+          along.bridles().stream()
+              .map(b -> new Bridle(b.id(), Bight.along(b.path()).get(0)))
+              .toList();
+      return new Angles(Bight.along(along.path()), bridles, new Recoil(along.path(), more));
+    }
   }
 
   /**
@@ -93,7 +106,8 @@ final class Landing {
    *     what it asks [m]; NaN: none
    * @param clearanceTarget that target, or null
    * @param angles insides of the line's angles, and where parted ends fly
-   * @param about the same with the sit-back zone and the legs, as a person meets them
+   * @param about the same with the sit-back zone and the legs, as a person meets them; null: a
+   *     quick look
    * @param waysOut ends of the ways out, best first
    * @param notes sentences
    */
@@ -123,6 +137,7 @@ final class Landing {
     wires = new WireCheck(site.wires(), t.stump(), site.cut().heightM(), outline);
     reach = knowledge.ofWires() ? wires.reach(knowledge.approach()) : List.of();
     escapes = new EscapeRoutes(site.targets());
+    wayOutM = wayOutM();
     ground = GroundFall.of(site);
     near = HangUps.near(site, outline.farthestM() + slideM(ground.steepestDeg()));
     hangUps = new LayTargets(near, t.stump());
@@ -158,45 +173,37 @@ final class Landing {
     return FallFootprint.slideM(site.tree().heightM().value(), fallDeg, site.zones().slideM());
   }
 
-  /** Where the tree lands, wires, ways out. */
-  Zones check(Grade grade, Setup setup, Route route, TreeSide tree, boolean full) {
-    double share = tree.movable() ? Math.max(0, tree.steerShare()) : Double.POSITIVE_INFINITY;
-    Landed landed = falls.computeIfAbsent(new Fall(setup.layDeg(), share), this::land);
-    TargetClearance nearest = targets(grade, landed);
-    hangUps(grade, landed);
-    dropZone(grade, landed);
-    wires(grade, landed);
+  /**
+   * Where the tree lands, wires, ways out.
+   *
+   * @param exact whether depths, amounts and places are worked out that no verdict hangs on
+   */
+  Zones check(Grade grade, Setup setup, Route route, TreeSide tree, boolean exact) {
+    double share = steeringShare(tree);
+    Landed landed =
+        exact
+            ? falls.computeIfAbsent(new Fall(setup.layDeg(), share), this::land)
+            : lookAt(setup.layDeg(), share);
+    TargetClearance nearest = lands(grade, landed);
+    SitBackZone sitBack = sitBack(setup.layDeg(), tree);
     List<BridleLegs> bridles = BridleLegs.of(site, setup);
     Along along = new Along(route.path(), bridles);
-    Angles angles = this.angles.computeIfAbsent(along, Landing::anglesOf);
-    double back = setup.layDeg() + Math.toDegrees(Math.atan2(tree.vgM(), tree.ugM()));
-    SitBackZone sitBack =
-        SitBackZone.of(site.tree().stump().at(), normal(back), site.tree().heightM().value());
-    List<Leg> legs = route.legs();
-    if (!bridles.isEmpty()) {
-      legs = new ArrayList<>(legs);
-      for (BridleLegs b : bridles) {
-        legs.addAll(b.legs());
-      }
+    List<Leg> legs = legs(route, bridles);
+    if (!exact) {
+      Angles angles = Angles.of(along);
+      boolean any =
+          ends(landed, sitBack).any(new EscapeRoutes.Line(angles.all(), angles.recoil(), legs));
+      waysOut(grade, any ? 1 : 0);
+      return new Zones(landed, Double.NaN, null, angles, null, List.of(), List.of());
     }
+    Angles angles = this.angles.computeIfAbsent(along, Angles::of);
     EscapeRoutes.Zones about =
         new EscapeRoutes.Zones(landed.footprint(), sitBack, angles.all(), angles.recoil(), legs);
     List<Position> ways =
         waysOut.computeIfAbsent(
             new Out(setup.layDeg(), share, along),
-            o -> escapes.ends(about, wayOutM(), site.tree().heightM().value()));
-    grade.rule(
-        "ways out",
-        ways.size(),
-        1,
-        "",
-        ways.isEmpty() ? 0 : Double.POSITIVE_INFINITY,
-        site.tree().stump().at(),
-        () ->
-            ways.isEmpty()
-                ? "No way out ends clear of the footprint, the sit-back zone, the line's angle and its"
-                    + " ends."
-                : ways.size() + " way(s) out end clear of every zone.");
+            o -> escapes.ends(about, wayOutM, site.tree().heightM().value()));
+    waysOut(grade, ways.size());
     return new Zones(
         landed,
         nearest == null ? Double.NaN : nearest.clearanceM(),
@@ -204,7 +211,17 @@ final class Landing {
         angles,
         about,
         ways,
-        full ? words.of(landed, setup, sitBack, route) : List.of());
+        grade.full() ? words.of(landed, setup, sitBack, route) : List.of());
+  }
+
+  /** The legs of a line, then those of the two-legged anchors on it. */
+  static List<Leg> legs(Route route, List<BridleLegs> bridles) {
+    if (bridles.isEmpty()) {
+      return route.legs();
+    }
+    List<Leg> legs = new ArrayList<>(route.legs());
+    bridles.forEach(b -> legs.addAll(b.legs()));
+    return legs;
   }
 
   /** Least length of a way out: the rule's, and past the crown as it stands where a rule asks. */
@@ -219,31 +236,79 @@ final class Landing {
     return Math.max(length, crown);
   }
 
-  private static Angles anglesOf(Along along) {
-    List<List<Position>> more = along.bridles().stream().map(BridleLegs::path).toList();
-    List<Bridle> bridles =
-        along.bridles().stream()
-            .map(b -> new Bridle(b.id(), Bight.along(b.path()).get(0)))
-            .toList();
-    return new Angles(Bight.along(along.path()), bridles, new Recoil(along.path(), more));
-  }
-
   /** The footprint of a lay were the hinge not to steer at all. */
   FallFootprint widest(double layDeg) {
-    return footprint(new Fall(layDeg, Double.POSITIVE_INFINITY));
+    return footprint(layDeg, Double.POSITIVE_INFINITY);
   }
 
-  private FallFootprint footprint(Fall fall) {
-    return FallFootprint.of(
-        outline,
+  /** Share of the hinge's side strength by which the fall is aimed; infinite: it steers nothing. */
+  static double steeringShare(TreeSide tree) {
+    return tree.movable() ? Math.max(0, tree.steerShare()) : Double.POSITIVE_INFINITY;
+  }
+
+  /** What is at stake behind. */
+  SitBackZone sitBack(double layDeg, TreeSide tree) {
+    double back = layDeg + Math.toDegrees(Math.atan2(tree.vgM(), tree.ugM()));
+    return SitBackZone.of(site.tree().stump().at(), normal(back), site.tree().heightM().value());
+  }
+
+  /** Targets, hang-ups, drop zone and wires; the target that is nearest to what it asks. */
+  TargetClearance lands(Grade grade, Landed landed) {
+    TargetClearance nearest = targets(grade, landed);
+    hangUps(grade, landed);
+    dropZone(grade, landed);
+    wires(grade, landed);
+    return nearest;
+  }
+
+  /** The ways out, to be asked for many lines. */
+  EscapeRoutes.Ends ends(Landed landed, SitBackZone sitBack) {
+    return escapes.ends(landed.footprint(), sitBack, wayOutM, site.tree().heightM().value());
+  }
+
+  void waysOut(Grade grade, int ways) {
+    grade.rule(
+        "ways out",
+        ways,
+        1,
+        "",
+        ways == 0 ? 0 : Double.POSITIVE_INFINITY,
         site.tree().stump().at(),
-        fall.layDeg(),
-        fall.steeringShare(),
-        slideM(ground.alongDeg(fall.layDeg())));
+        () ->
+            ways == 0
+                ? "No way out ends clear of the footprint, the sit-back zone, the line's angle and"
+                    + " its ends."
+                : ways + " way(s) out end clear of every zone.");
+  }
+
+  /** A footprint as far as verdicts need it: not how deep or how much of anything lies in it. */
+  Landed lookAt(double layDeg, double share) {
+    // a hinge that steers nothing aims at the same fan whatever the line
+    return FallFootprint.halfAngleDeg(share) == WIDEST
+        ? widest.computeIfAbsent(layDeg, lay -> look(lay, Double.POSITIVE_INFINITY))
+        : look(layDeg, share);
+  }
+
+  private Landed look(double layDeg, double share) {
+    FallFootprint f = footprint(layDeg, share);
+    return new Landed(
+        f,
+        targets.gaps(f),
+        near.isEmpty() ? List.of() : hangUps.gaps(f),
+        dropZone == null
+            ? null
+            : new DropZoneFit.Fit(
+                Double.NaN, dropZone.holds(f) ? 0 : Double.NaN, site.tree().stump().at()),
+        knowledge.ofWires() ? wires.inLay(f, knowledge.approach()) : List.of());
+  }
+
+  private FallFootprint footprint(double layDeg, double share) {
+    return FallFootprint.of(
+        outline, site.tree().stump().at(), layDeg, share, slideM(ground.alongDeg(layDeg)));
   }
 
   private Landed land(Fall fall) {
-    FallFootprint f = footprint(fall);
+    FallFootprint f = footprint(fall.layDeg(), fall.steeringShare());
     return new Landed(
         f,
         targets.clearances(f),

@@ -3,7 +3,7 @@ package org.fallwright.core.plan;
 import java.util.List;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
-import java.util.stream.Stream;
+import java.util.function.Function;
 import org.fallwright.core.pull.SourceFault;
 import org.fallwright.core.site.Site;
 
@@ -20,21 +20,32 @@ final class LeftOut {
     this.site = site;
   }
 
+  /**
+   * Plans a site; again from the beginning, without it, where a source fails.
+   *
+   * @param plans plans without the sources that are out
+   */
+  static <T> T without(Site site, Function<LeftOut, T> plans) {
+    LeftOut out = new LeftOut(site);
+    while (true) {
+      try {
+        return plans.apply(out);
+      } catch (SourceFault fault) {
+        if (!out.add(fault)) {
+          throw fault;
+        }
+      }
+    }
+  }
+
   /** Takes note of a fault; false where the source is out already. */
-  boolean add(SourceFault fault) {
+  private boolean add(SourceFault fault) {
     return sentenceByKind.putIfAbsent(fault.sourceId(), fault.getMessage()) == null;
   }
 
   /** Whether a kind of source is out. */
   boolean has(String kind) {
     return sentenceByKind.containsKey(kind);
-  }
-
-  /** Whether a way is pulled or driven by a source that is out. */
-  boolean uses(Setup way) {
-    return !sentenceByKind.isEmpty()
-        && Stream.of(way.source(), way.driver() == null ? way.source() : way.driver().source())
-            .anyMatch(id -> has(site.source(id).orElseThrow().plugin()));
   }
 
   /** A sentence for every source of the site that is out. */

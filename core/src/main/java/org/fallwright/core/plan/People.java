@@ -2,6 +2,7 @@ package org.fallwright.core.plan;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.Supplier;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullOffer.Standing;
 import org.fallwright.core.pull.PullOffer.Where;
@@ -74,12 +75,13 @@ final class People {
       double height = site.tree().heightM().value();
       double asked = rules.operatorRadiusFactor().value() * height;
       boolean far = rules.operatorRadiusFactor().metBy(o.fromStumpM(), height);
-      String stands =
-          "Who works the source stands "
-              + in.length(o.fromStumpM())
-              + " from the stump; "
-              + in.length(asked)
-              + " are asked";
+      Supplier<String> stands =
+          () ->
+              "Who works the source stands "
+                  + in.length(o.fromStumpM())
+                  + " from the stump; "
+                  + in.length(asked)
+                  + " are asked";
       if (!far && rules.teamException().yes()) {
         grade.tightAtBest(
             "operator distance",
@@ -87,7 +89,7 @@ final class People {
             asked,
             "m",
             stand.at(),
-            () -> stands + ": only as one of the team, named on the sheet with the reason.");
+            () -> stands.get() + ": only as one of the team, named on the sheet with the reason.");
       } else {
         grade.rule(
             "operator distance",
@@ -98,7 +100,7 @@ final class People {
                 ? Math.max(1, o.fromStumpM() / asked)
                 : Math.min(o.fromStumpM() / asked, Math.nextDown(1.0)),
             stand.at(),
-            () -> stands + (far ? "." : ", and these rules know no exception."));
+            () -> stands.get() + (far ? "." : ", and these rules know no exception."));
       }
       boolean clear = o.outsideFootprint() && o.outsideBights();
       grade.rule(
@@ -195,7 +197,7 @@ final class People {
     } else {
       grade.tightAtBest("operator off the line", 0, 1, "", stand.at(), () -> where);
     }
-    String stores = "The loaded line stores " + in.energy(energy);
+    Supplier<String> stores = () -> "The loaded line stores " + in.energy(energy);
     double limit = accepted == null ? 0 : accepted.upToJ();
     if (met) {
       grade.rule(
@@ -207,8 +209,8 @@ final class People {
           stand.at(),
           () ->
               accepted == null
-                  ? stores + "."
-                  : stores
+                  ? stores.get() + "."
+                  : stores.get()
                       + "; accepted to "
                       + in.energy(limit)
                       + " by "
@@ -224,7 +226,7 @@ final class People {
           "J",
           stand.at(),
           () ->
-              stores
+              stores.get()
                   + (accepted == null
                       ? "; nobody at the source has accepted that by name."
                       : "; "

@@ -7,11 +7,14 @@ import org.fallwright.core.pull.SourceDescription;
 /**
  * What the planner found.
  *
- * @param ranked the setups worth showing, best first; rank 1 is the first
- * @param judged how many setups were judged
- * @param byVerdict how many had each verdict
- * @param byBindingCheck of those not workable, how many fail first by each check
- * @param bestRejected the best setup that each binding check rejects
+ * @param ranked the best lay of each way, best way first, at most {@link #MOST_WAYS}; rank 1 is the
+ *     first. Ways that differ in the pull line alone are one
+ * @param judged how many setups there are
+ * @param byVerdict how many have each verdict
+ * @param byBindingCheck of those not workable, how many miss each check first, in the fixed order
+ *     of the checks
+ * @param bestRejected of those that miss a check first, the one that comes nearest to passing it;
+ *     of the {@link #MOST_REASONS} checks that most miss first
  * @param notes what was missing or left out, a sentence each: sources without a plugin, gear that
  *     cannot be used
  * @param sources what the sources of the site's gear say of themselves, by id
@@ -24,6 +27,12 @@ public record Plan(
     Map<String, Judged> bestRejected,
     List<String> notes,
     Map<String, SourceDescription> sources) {
+  /** Most checks of which the nearest setup is shown: those that most setups miss first. */
+  public static final int MOST_REASONS = 50;
+
+  /** Most ways that a plan shows. */
+  public static final int MOST_WAYS = 200;
+
   public Plan {
     ranked = List.copyOf(ranked);
     notes = List.copyOf(notes);

@@ -31,7 +31,7 @@ public final class PlanJson {
   public static final String FORMAT = "fallwright-plan";
 
   /** Version written. */
-  public static final int VERSION = 1;
+  public static final int VERSION = 2;
 
   private static final MathContext DIGITS = new MathContext(9);
   private static final ObjectWriter WRITER = writer();

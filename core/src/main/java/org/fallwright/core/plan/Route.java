@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.Set;
 import org.fallwright.core.line.LegLoads;
 import org.fallwright.core.line.Point3;
-import org.fallwright.core.line.Sheave;
 import org.fallwright.core.pull.HaulLine;
 import org.fallwright.core.pull.PullSource;
 import org.fallwright.core.site.Anchor;
@@ -36,42 +35,46 @@ record Route(
     HaulLine haulLine,
     double bearingErrorM) {
 
-  static Route of(Site site, Setup way, PullSource source, PullSource driver) {
+  static Route of(Places places, Setup way, PullSource source, PullSource driver) {
+    Site site = places.site();
     List<LinePoint> line = new ArrayList<>();
     line.add(attachment(site, way.attachHeightM()));
     Place bearing = null;
     List<Double> efficiencies = new ArrayList<>();
     for (String id : way.redirects()) {
-      Anchor a = site.anchor(id).orElseThrow();
+      Anchor a = places.anchor(id);
       bearing = bearing == null ? a.place() : bearing;
       line.add(at(a, LinePoint.Role.REDIRECT));
-      efficiencies.add(Sheave.of(block(site)).value());
+      efficiencies.add(places.efficiency());
     }
-    Gear.Source gear = site.source(way.source()).orElseThrow();
+    Gear.Source gear = places.source(way.source());
     LinePoint end =
         end(
-            site,
+            places,
             way.place(),
             gear,
             source,
             way.driver() == null ? LinePoint.Role.SOURCE : LinePoint.Role.BLOCK_SYSTEM);
     line.add(end);
     if (bearing == null) {
-      bearing = place(site, way.place());
+      bearing = places.place(way.place());
     }
     List<LinePoint> haul = List.of();
     if (way.driver() != null) {
-      Gear.Source hauls = site.source(way.driver().source()).orElseThrow();
-      haul = List.of(end, end(site, way.driver().place(), hauls, driver, LinePoint.Role.SOURCE));
+      Gear.Source hauls = places.source(way.driver().source());
+      haul = List.of(end, end(places, way.driver().place(), hauls, driver, LinePoint.Role.SOURCE));
     }
-    List<Point3> points = line.stream().map(p -> relative(site, p)).toList();
+    List<Point3> points = new ArrayList<>(line.size());
+    for (LinePoint p : line) {
+      points.add(relative(site, p));
+    }
     return new Route(
-        points,
+        List.copyOf(points),
         LegLoads.of(points, efficiencies),
         List.copyOf(line),
         haul.stream().map(p -> relative(site, p)).toList(),
         haul,
-        way.driver() == null ? null : source.haulLine(gear.parameters(), way.mode()),
+        way.driver() == null ? null : places.haulLine(gear, source, way.mode()),
         bearing.errorM());
   }
 
@@ -101,16 +104,12 @@ record Route(
   }
 
   private static LinePoint end(
-      Site site, String id, Gear.Source gear, PullSource source, LinePoint.Role role) {
-    return site.spot(id)
-        .map(
-            s ->
-                new LinePoint(
-                    s.place().at(),
-                    s.place().groundM() + source.lineHeightM(gear.parameters()),
-                    role,
-                    id))
-        .orElseGet(() -> at(site.anchor(id).orElseThrow(), role));
+      Places places, String id, Gear.Source gear, PullSource source, LinePoint.Role role) {
+    Spot spot = places.spot(id);
+    return spot == null
+        ? at(places.anchor(id), role)
+        : new LinePoint(
+            spot.place().at(), spot.place().groundM() + places.lineHeightM(gear, source), role, id);
   }
 
   /** Where a line is fastened to an anchor, relative. */

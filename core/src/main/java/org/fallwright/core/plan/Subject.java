@@ -1,6 +1,7 @@
 package org.fallwright.core.plan;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import org.fallwright.core.line.Point3;
 import org.fallwright.core.pull.HaulLine;
@@ -30,6 +31,7 @@ final class Subject {
   private final TreeFigures figures;
   private final Wood wood;
   private final Wind wind;
+  private final TreeBody body;
 
   Subject(Site site) {
     this.site = site;
@@ -57,6 +59,21 @@ final class Subject {
             figures.crownAreaM2(),
             figures.crownMiddleM() - cut.heightM(),
             day.airDensity() == null ? Allowances.AIR_DENSITY.value() : day.airDensity());
+    Position shift = figures.crownShiftM();
+    body =
+        new TreeBody(
+            tree.heightM().value(),
+            tree.dbhM().value(),
+            cut.heightM(),
+            tree.diameters(),
+            figures.stumpDiameterM(),
+            tree.shellM(),
+            tree.deadOrDecayed(),
+            figures.massKg(),
+            figures.massCentreM() - cut.heightM(),
+            tree.leanDeg().value(),
+            tree.leanAzimuthDeg().value(),
+            new Point3(shift.eastM(), shift.northM(), 0));
   }
 
   TreeFigures figures() {
@@ -93,27 +110,17 @@ final class Subject {
    * @param sourceNPerM stiffness of the source itself [N/m]; null: rigid
    */
   PullCase pull(Setup setup, Route route, Double sourceNPerM) {
-    SubjectTree tree = site.tree();
+    return pull(setup, line(setup, route, sourceNPerM), route.bearingErrorM());
+  }
+
+  /**
+   * The case of a setup over a line.
+   *
+   * @param setup its lay, attachment and hinge; the rest is no part of it
+   * @param bearingErrorM position error of the line's first bearing point [m]
+   */
+  PullCase pull(Setup setup, LineSet line, double bearingErrorM) {
     CutPlan cut = site.cut();
-    Position shift = figures.crownShiftM();
-    Point3 crown = new Point3(shift.eastM(), shift.northM(), 0);
-    TreeBody body =
-        new TreeBody(
-            tree.heightM().value(),
-            tree.dbhM().value(),
-            cut.heightM(),
-            tree.diameters(),
-            figures.stumpDiameterM(),
-            tree.shellM(),
-            tree.deadOrDecayed(),
-            figures.massKg(),
-            figures.massCentreM() - cut.heightM(),
-            tree.leanDeg().value(),
-            tree.leanAzimuthDeg().value(),
-            crown);
-    double stiffness = GearParts.lineFigures(site, setup).stiffnessN();
-    List<Point3> points = route.points().subList(1, route.points().size());
-    Double slack = site.conditions().slackM();
     return new PullCase(
         setup.layDeg(),
         body,
@@ -126,14 +133,40 @@ final class Subject {
             cut.wedges(),
             Allowances.HINGE_K_LEAST.value()),
         wind,
-        new LineSet(
-            setup.attachHeightM() - cut.heightM(),
-            points,
-            points.stream().map(p -> stiffness).toList(),
-            haul(route),
-            slack == null ? Allowances.SLACK.value() : slack,
-            sourceNPerM),
-        spread(setup, route));
+        line,
+        spread(setup, bearingErrorM));
+  }
+
+  /**
+   * The line of a way as it is set.
+   *
+   * @param sourceNPerM stiffness of the source itself [N/m]; null: rigid
+   */
+  LineSet line(Setup setup, Route route, Double sourceNPerM) {
+    double stiffness = GearParts.lineFigures(site, setup).stiffnessN();
+    List<Point3> points = route.points().subList(1, route.points().size());
+    return line(setup.attachHeightM(), points, stiffness, haul(route), sourceNPerM);
+  }
+
+  /** A line straight to a bearing point. */
+  LineSet line(double attachHeightM, Point3 bearing, double stiffnessN) {
+    return line(attachHeightM, List.of(bearing), stiffnessN, null, null);
+  }
+
+  private LineSet line(
+      double attachHeightM,
+      List<Point3> points,
+      double stiffnessN,
+      LineSet.BaseLeg haul,
+      Double sourceNPerM) {
+    Double slack = site.conditions().slackM();
+    return new LineSet(
+        attachHeightM - site.cut().heightM(),
+        points,
+        Collections.nCopies(points.size(), stiffnessN),
+        haul,
+        slack == null ? Allowances.SLACK.value() : slack,
+        sourceNPerM);
   }
 
   /**
@@ -150,7 +183,7 @@ final class Subject {
             1 / haul.parts());
   }
 
-  private Spread spread(Setup setup, Route route) {
+  private Spread spread(Setup setup, double bearingErrorM) {
     SubjectTree tree = site.tree();
     double thickness =
         Spreads.of(Spreads.What.HINGE_THICKNESS, setup.hingeThicknessM(), site.cut().hingeHow());
@@ -165,7 +198,7 @@ final class Subject {
         thickness / setup.hingeThicknessM(),
         Spreads.of(Spreads.What.GUST, site.conditions().gustMps()) / gust,
         Spreads.of(Spreads.What.ATTACH_HEIGHT, setup.attachHeightM(), site.offer().attachHow()),
-        Allowances.BEARING_ASIDE.value() * route.bearingErrorM());
+        Allowances.BEARING_ASIDE.value() * bearingErrorM);
   }
 
   private static String sentence(String remark) {

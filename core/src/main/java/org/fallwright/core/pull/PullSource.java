@@ -45,7 +45,9 @@ public interface PullSource {
   }
 
   /**
-   * What it gives at its place, at the least and at the most.
+   * What it gives at its place, at the least and at the most. Only what it does at the most, its
+   * checks and what it says may hang on the stiffness of the path and the line to take in; all else
+   * may not, so that it can be asked once for all lays.
    *
    * @throws IllegalArgumentException one sentence naming the parameter, its value and its limit
    */

@@ -1,9 +1,11 @@
 package org.fallwright.core.site;
 
+import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.UnaryOperator;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.fallwright.core.units.DisplayUnits;
@@ -28,6 +30,7 @@ import org.fallwright.core.units.Range;
  * @param peoplePoints doors and places of persons
  * @param exceptions checks that somebody takes an exception to
  * @param zones what is stated of the zones
+ * @param strips ground along which a source can stand anywhere
  */
 public record Site(
     int version,
@@ -55,7 +58,8 @@ public record Site(
     List<TapeTie> tapeTies,
     List<PeoplePoint> peoplePoints,
     List<TakenException> exceptions,
-    ZoneChoices zones) {
+    ZoneChoices zones,
+    List<Strip> strips) {
   /** The version written. */
   public static final int VERSION = 2;
 
@@ -106,6 +110,8 @@ public record Site(
     peoplePoints = List.copyOf(Range.present("people_points", peoplePoints));
     exceptions = List.copyOf(Range.present("exceptions", exceptions));
     Range.present("zones", zones);
+    strips = List.copyOf(Range.present("strips", strips));
+    List<Spot> standing = standing(spots, strips, tree);
     oneNameEach(
         Stream.of(
                 Stream.of(tree.id()),
@@ -113,8 +119,9 @@ public record Site(
                 wires.stream().map(Wire::id),
                 dropZones.stream().map(DropZone::id),
                 anchors.stream().map(Anchor::id),
-                spots.stream().map(Spot::id),
-                peoplePoints.stream().map(PeoplePoint::id))
+                standing.stream().map(Spot::id),
+                peoplePoints.stream().map(PeoplePoint::id),
+                strips.stream().map(Strip::id))
             .flatMap(s -> s));
     oneNameEach(gear.sources().stream().map(Gear.Source::id));
     oneNameEach(gear.lines().stream().map(Gear.Line::id));
@@ -132,10 +139,10 @@ public record Site(
     }
     for (Gear.Source s : gear.sources()) {
       for (String place : s.places()) {
-        known(anchors, spots, "gear.sources." + s.id() + ".places", place);
+        known(anchors, standing, strips, "gear.sources." + s.id() + ".places", place);
       }
       for (String place : s.driverPlaces()) {
-        known(anchors, spots, "gear.sources." + s.id() + ".driver_places", place);
+        known(anchors, standing, strips, "gear.sources." + s.id() + ".driver_places", place);
       }
       for (String driver : s.drivers()) {
         if (gear.sources().stream().noneMatch(o -> o.id().equals(driver))) {
@@ -213,15 +220,88 @@ public record Site(
   }
 
   public Optional<Anchor> anchor(String id) {
-    return anchors.stream().filter(a -> a.id().equals(id)).findFirst();
+    for (Anchor a : anchors) {
+      if (a.id().equals(id)) {
+        return Optional.of(a);
+      }
+    }
+    return Optional.empty();
   }
 
+  /** The spot of that name, or the place of that name on a strip. */
   public Optional<Spot> spot(String id) {
-    return spots.stream().filter(s -> s.id().equals(id)).findFirst();
+    for (Spot s : spots) {
+      if (s.id().equals(id)) {
+        return Optional.of(s);
+      }
+    }
+    if (strips.isEmpty()) {
+      return Optional.empty();
+    }
+    return standing().stream().filter(s -> s.id().equals(id)).findFirst();
+  }
+
+  /** Every place where a vehicle, a machine or people can stand: the spots, then the strips'. */
+  public List<Spot> standing() {
+    return standing(spots, strips, tree);
+  }
+
+  /**
+   * The same site with the places of its strips drawn as spots: what the planner works on. Sources
+   * that can be on a strip can be at each of its places.
+   */
+  public Site laidOut() {
+    if (strips.isEmpty()) {
+      return this;
+    }
+    Site bare = Copy.with(this, "gear", placed(names -> List.of()));
+    bare = Copy.with(Copy.with(bare, "strips", List.of()), "spots", standing());
+    return Copy.with(bare, "gear", placed(this::laidOut));
+  }
+
+  private Gear placed(UnaryOperator<List<String>> places) {
+    return Copy.with(
+        gear,
+        "sources",
+        gear.sources().stream()
+            .map(s -> Copy.with(s, "places", places.apply(s.places())))
+            .map(s -> Copy.with(s, "driverPlaces", places.apply(s.driverPlaces())))
+            .toList());
+  }
+
+  private List<String> laidOut(List<String> places) {
+    return places.stream()
+        .flatMap(
+            name ->
+                strips.stream()
+                    .filter(s -> s.id().equals(name))
+                    .findFirst()
+                    .map(s -> s.places(tree.stump().at()).stream().map(Spot::id))
+                    .orElseGet(() -> Stream.of(name)))
+        .toList();
+  }
+
+  private static List<Spot> standing(List<Spot> spots, List<Strip> strips, SubjectTree tree) {
+    if (strips.isEmpty()) {
+      return spots;
+    }
+    List<Spot> all = new ArrayList<>(spots);
+    strips.forEach(s -> all.addAll(s.places(tree.stump().at())));
+    return all;
+  }
+
+  /** Every hinge thickness on offer [m]. */
+  public List<Double> hingeThicknesses() {
+    return Steps.with(cut.hingeThicknessesM(), offer.hingeRange());
   }
 
   public Optional<Gear.Source> source(String id) {
-    return gear.sources().stream().filter(s -> s.id().equals(id)).findFirst();
+    for (Gear.Source s : gear.sources()) {
+      if (s.id().equals(id)) {
+        return Optional.of(s);
+      }
+    }
+    return Optional.empty();
   }
 
   /** What was looked for; not looked where the list is silent. */
@@ -252,7 +332,7 @@ public record Site(
                 + "\", which has no point of its own");
       }
     } else if (!tree.id().equals(id)) {
-      known(anchors, spots, "tape_ties." + end, id);
+      known(anchors, spots, List.of(), "tape_ties." + end, id);
     }
   }
 
@@ -298,11 +378,18 @@ public record Site(
     }
   }
 
-  private static void known(List<Anchor> anchors, List<Spot> spots, String field, String id) {
+  private static void known(
+      List<Anchor> anchors, List<Spot> standing, List<Strip> strips, String field, String id) {
     if (anchors.stream().noneMatch(a -> a.id().equals(id))
-        && spots.stream().noneMatch(s -> s.id().equals(id))) {
+        && standing.stream().noneMatch(s -> s.id().equals(id))
+        && strips.stream().noneMatch(s -> s.id().equals(id))) {
       throw new IllegalArgumentException(
-          field + " names \"" + id + "\"; no anchor or spot of that name is on the site");
+          field
+              + " names \""
+              + id
+              + "\"; no anchor"
+              + (field.startsWith("tape_ties.") ? " or spot" : ", spot or strip")
+              + " of that name is on the site");
     }
   }
 }

@@ -53,8 +53,8 @@ final class OneAtATime {
     for (int i = 0; i < Draw.COUNT; i++) {
       double lo = i == 4 ? K_5 : m.get(i) - Z * sd[i];
       double hi = i == 4 ? K_95 : m.get(i) + Z * sd[i];
-      low[i] = lo == m.get(i) ? mean : new Posture(c, m.with(i, lo));
-      high[i] = hi == m.get(i) ? mean : new Posture(c, m.with(i, hi));
+      low[i] = lo == m.get(i) ? mean : new Posture(c, m.with(i, lo), mean);
+      high[i] = hi == m.get(i) ? mean : new Posture(c, m.with(i, hi), mean);
     }
   }
 

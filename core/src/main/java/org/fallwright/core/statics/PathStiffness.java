@@ -23,6 +23,13 @@ record PathStiffness(double lineNPerM, double pathNPerM, double riseRad, double 
   private static final double SLICE = Allowances.STEM_SLICE.value();
 
   static PathStiffness of(PullCase c, StemTaper taper) {
+    return of(c, bend(c, taper));
+  }
+
+  /**
+   * @param bend Σ (w_a − z)²·Δz/(E·π·d⁴/64·(1 − loss)), see {@link #bend} [m/N]
+   */
+  static PathStiffness of(PullCase c, double bend) {
     LineSet line = c.line();
     Point3 from = StemStrength.attachment(c);
     double give = 0;
@@ -45,7 +52,13 @@ record PathStiffness(double lineNPerM, double pathNPerM, double riseRad, double 
     if (line.sourceNPerM() != null) {
       give += 1 / line.sourceNPerM();
     }
-    double wa = line.attachHeightM();
+    double cos = Math.cos(rise);
+    return new PathStiffness(1 / give, 1 / (give + cos * cos * bend), rise, length);
+  }
+
+  /** How the stem gives below the line, square to it [m/N]; the same whatever the line's course. */
+  static double bend(PullCase c, StemTaper taper) {
+    double wa = c.line().attachHeightM();
     int slices = (int) Math.ceil(wa / SLICE);
     double dz = wa / slices;
     double bend = 0;
@@ -55,7 +68,6 @@ record PathStiffness(double lineNPerM, double pathNPerM, double riseRad, double 
       double ei = c.wood().moePa() * Math.PI * Math.pow(d, 4) / 64 * (1 - c.tree().cavityLoss(d));
       bend += (wa - z) * (wa - z) * dz / ei;
     }
-    double cos = Math.cos(rise);
-    return new PathStiffness(1 / give, 1 / (give + cos * cos * bend), rise, length);
+    return bend;
   }
 }

@@ -44,17 +44,38 @@ final class Posture {
   final double pw;
 
   Posture(PullCase c, Draw d) {
+    this(c, d, shape(c, d));
+  }
+
+  /**
+   * Another draw whose hinge is often the same.
+   *
+   * @param like a posture of the same case
+   */
+  Posture(PullCase c, Draw d, Posture like) {
+    this(
+        c,
+        d,
+        d.stumpDiameterM() == like.draw.stumpDiameterM() && d.thicknessM() == like.draw.thicknessM()
+            ? like.hinge
+            : shape(c, d));
+  }
+
+  private static HingeShape shape(PullCase c, Draw d) {
+    return HingeShape.of(
+        d.stumpDiameterM(),
+        c.cut().faceFraction(),
+        d.thicknessM(),
+        c.cut().widthM(),
+        c.tree().shellM(),
+        c.tree().deadOrDecayed(),
+        c.cut().kerfM(),
+        c.cut().wedges());
+  }
+
+  private Posture(PullCase c, Draw d, HingeShape shape) {
     draw = d;
-    hinge =
-        HingeShape.of(
-            d.stumpDiameterM(),
-            c.cut().faceFraction(),
-            d.thicknessM(),
-            c.cut().widthM(),
-            c.tree().shellM(),
-            c.tree().deadOrDecayed(),
-            c.cut().kerfM(),
-            c.cut().wedges());
+    hinge = shape;
     double lay = Math.toRadians(c.layDeg());
     double sin = Math.sin(lay);
     double cos = Math.cos(lay);

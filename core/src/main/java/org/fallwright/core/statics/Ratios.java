@@ -15,7 +15,14 @@ import org.fallwright.core.reference.Allowances;
  * @param holdAsked whether hold and hold stability are asked: not where the tree sitting back still
  *     rests on its stump, nor where it needs no hold
  * @param parts every part, the stem among them
- * @param byCheck ratio by the check's id, in a fixed order
+ * @param pull of the pull
+ * @param hold of what the source holds
+ * @param holdStability of the hold's stability
+ * @param steering of the hinge's side strength
+ * @param turning of the hinge's strength about the vertical
+ * @param crushing of the hinge's strength along the stem
+ * @param atPlan of each part, in their order, at the plan
+ * @param atHigh the same at the most that the source can do
  */
 public record Ratios(
     SourceAtTree source,
@@ -23,7 +30,14 @@ public record Ratios(
     Holding holding,
     boolean holdAsked,
     List<Part> parts,
-    Map<String, Double> byCheck) {
+    double pull,
+    double hold,
+    double holdStability,
+    double steering,
+    double turning,
+    double crushing,
+    double[] atPlan,
+    double[] atHigh) {
 
   /**
    * Greatest share of the hinge's strength that steering, and turning, may take (planning
@@ -73,27 +87,77 @@ public record Ratios(
     Ceiling ceiling = Ceiling.of(parts);
     SourceAtTree source = StopReading.apply(given, ceiling.tensionN(), side.pathNPerM());
     Holding holding = s.holding(source.captured());
-    boolean asked = side.holdN() > 0 && side.restShare() >= (wedges ? REST_WEDGED : REST);
-    Map<String, Double> by = new LinkedHashMap<>();
-    by.put("pull", ratio(source.lowN(), side.planN()));
-    by.put("hold", asked ? ratio(source.holdN(), side.holdN()) : Double.POSITIVE_INFINITY);
-    by.put("hold stability", asked ? holding.stability() / STABILITY : Double.POSITIVE_INFINITY);
-    by.put("steering", ratio(HINGE_SHARE, side.steerShare()));
-    by.put("hinge turning", ratio(HINGE_SHARE, side.turnShare()));
-    by.put("hinge crushing", ratio(CRUSH_SHARE, side.crushShare()));
-    for (Part p : parts) {
-      by.put(
-          p.name() + " at plan",
-          ratio(p.strengthN() / p.designFactor(), side.workingN() * p.atPlan()));
-      by.put(
-          p.name() + " at high",
-          ratio(p.strengthN() / p.lastFactor(), source.highN() * p.holding()));
+    boolean asked = holdAsked(side, wedges);
+    int n = parts.size();
+    double[] atPlan = new double[n];
+    double[] atHigh = new double[n];
+    for (int i = 0; i < n; i++) {
+      Part p = parts.get(i);
+      atPlan[i] = ratio(p.strengthN() / p.designFactor(), side.workingN() * p.atPlan());
+      atHigh[i] = ratio(p.strengthN() / p.lastFactor(), source.highN() * p.holding());
     }
-    return new Ratios(source, ceiling, holding, asked, List.copyOf(parts), by);
+    return new Ratios(
+        source,
+        ceiling,
+        holding,
+        asked,
+        List.copyOf(parts),
+        ratio(source.lowN(), side.planN()),
+        asked ? ratio(source.holdN(), side.holdN()) : Double.POSITIVE_INFINITY,
+        asked ? holding.stability() / STABILITY : Double.POSITIVE_INFINITY,
+        ratio(HINGE_SHARE, side.steerShare()),
+        ratio(HINGE_SHARE, side.turnShare()),
+        ratio(CRUSH_SHARE, side.crushShare()),
+        atPlan,
+        atHigh);
+  }
+
+  /**
+   * Whether hold and hold stability are asked of a tree that can be moved.
+   *
+   * @param wedges whether wedges are set behind the tree
+   */
+  public static boolean holdAsked(TreeSide side, boolean wedges) {
+    return side.holdN() > 0 && side.restShare() >= (wedges ? REST_WEDGED : REST);
+  }
+
+  /** Ratio by the check's id, in a fixed order. */
+  public Map<String, Double> byCheck() {
+    Map<String, Double> by = new LinkedHashMap<>();
+    by.put("pull", pull);
+    by.put("hold", hold);
+    by.put("hold stability", holdStability);
+    by.put("steering", steering);
+    by.put("hinge turning", turning);
+    by.put("hinge crushing", crushing);
+    for (int i = 0; i < parts.size(); i++) {
+      by.put(parts.get(i).name() + " at plan", atPlan[i]);
+      by.put(parts.get(i).name() + " at high", atHigh[i]);
+    }
+    return by;
+  }
+
+  /** Whether every part bears the plan. */
+  public boolean holdsAtPlan() {
+    return allFrom(1, atPlan);
+  }
+
+  /** Whether every part bears the most that the source can do. */
+  public boolean holdsAtHigh() {
+    return allFrom(1, atHigh);
+  }
+
+  private static boolean allFrom(double least, double[] ratios) {
+    for (double r : ratios) {
+      if (r < least) {
+        return false;
+      }
+    }
+    return true;
   }
 
   /** Capacity over demand; a demand below a billionth of the capacity is none. */
-  static double ratio(double capacity, double demand) {
+  public static double ratio(double capacity, double demand) {
     return demand <= NOTHING * capacity ? Double.POSITIVE_INFINITY : capacity / demand;
   }
 }

@@ -14,13 +14,52 @@ public final class Statics {
   private final PullCase c;
   private final Posture nominal;
   private final OneAtATime spread;
+  private final double bend;
+  private final LettingGo lettingGo;
   private final TreeSide side;
+
+  /**
+   * What the hinge alone, in calm air, lets go at: whatever the line's course.
+   *
+   * @param laterN after a little movement [N]
+   * @param atOnceN at once [N]
+   * @param later that little movement [rad]
+   */
+  private record LettingGo(double laterN, double atOnceN, double later) {}
 
   public Statics(PullCase c) {
     this.c = c;
     nominal = new Posture(c, Draw.nominal(c));
     spread = new OneAtATime(c);
-    side = reckon();
+    StemTaper taper = c.tree().taper();
+    bend = PathStiffness.bend(c, taper);
+    side = reckon(taper);
+    lettingGo = side.movable() ? lettingGo() : null;
+  }
+
+  /** See {@link #over}. */
+  private Statics(Statics like, PullCase c, TreeSide side) {
+    this.c = c;
+    nominal = like.nominal;
+    spread = like.spread;
+    bend = like.bend;
+    lettingGo = like.lettingGo;
+    this.side = side;
+  }
+
+  /**
+   * The same pull over a line that differs only beyond its first bearing point: what that changes
+   * is its stiffness, its length and the take-up.
+   *
+   * @param line a line with the same attachment and first bearing point
+   */
+  public Statics over(LineSet line) {
+    PullCase other =
+        new PullCase(c.layDeg(), c.tree(), c.wood(), c.cut(), c.wind(), line, c.spread());
+    return new Statics(
+        this,
+        other,
+        side.movable() ? side.over(PathStiffness.of(other, bend), line.slackM()) : side);
   }
 
   /** What the tree asks. */
@@ -33,7 +72,7 @@ public final class Statics {
     return new Worked(c, spread, side);
   }
 
-  private TreeSide reckon() {
+  private TreeSide reckon(StemTaper taper) {
     double back = nominal.sitBack();
     double commit = CommitAngle.exists(nominal) ? CommitAngle.of(nominal) : Double.NaN;
     if (Double.isNaN(commit)) {
@@ -62,8 +101,7 @@ public final class Statics {
     double hold = Math.max(0, spread.p95(ForceBalance::hold));
     double working = Math.max(plan, hold);
     double rest = spread.p95(ForceBalance::rest);
-    StemTaper taper = c.tree().taper();
-    PathStiffness stiff = PathStiffness.of(c, taper);
+    PathStiffness stiff = PathStiffness.of(c, bend);
     StemStrength stem = StemStrength.of(c, taper);
     double shortening = nominal.leg(-back) - nominal.leg(end);
     double takeUp = shortening + working / stiff.pathNPerM() + c.line().slackM();
@@ -192,12 +230,20 @@ public final class Statics {
         nominal.weightN * massHigh * (nominal.wg * Math.cos(-back) - nominal.ug * Math.sin(-back));
     double lever = nominal.lever(-back);
     double stability = (k * lever * lever - side.holdN() * leverSlope(-back)) / pendulum;
-    double phi = Math.max(Math.toRadians(1), Math.min(Math.toRadians(2), side.commitRad() / 5));
-    double letsGo = Math.max(0, spread.p5(p -> ForceBalance.letsGo(p, phi)));
-    double top = letsGo + kp * (nominal.leg(0) - nominal.leg(phi));
-    double atOnce = Math.max(0, spread.p5(p -> ForceBalance.letsGo(p, 0)));
-    Start start = side.holdN() < atOnce ? Start.NO : side.holdN() <= top ? Start.STOPS : Start.RUNS;
+    double top = lettingGo.laterN() + kp * (nominal.leg(0) - nominal.leg(lettingGo.later()));
+    Start start =
+        side.holdN() < lettingGo.atOnceN()
+            ? Start.NO
+            : side.holdN() <= top ? Start.STOPS : Start.RUNS;
     return new Holding(stability, top, start);
+  }
+
+  private LettingGo lettingGo() {
+    double phi = Math.max(Math.toRadians(1), Math.min(Math.toRadians(2), side.commitRad() / 5));
+    return new LettingGo(
+        Math.max(0, spread.p5(p -> ForceBalance.letsGo(p, phi))),
+        Math.max(0, spread.p5(p -> ForceBalance.letsGo(p, 0))),
+        phi);
   }
 
   /** dℓ/dφ [m/rad], from ℓ = N/L with the derivatives of both. */

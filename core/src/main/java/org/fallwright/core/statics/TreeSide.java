@@ -75,6 +75,44 @@ public record TreeSide(
     double stemBreakN,
     double stemWeakestM) {
 
+  /** The same over a line of another stiffness and length; the first leg is the same. */
+  TreeSide over(PathStiffness stiff, double slackM) {
+    return new TreeSide(
+        status,
+        hinge,
+        hingeNm,
+        windNm,
+        windAsideNm,
+        ugM,
+        vgM,
+        weightNm,
+        commitRad,
+        endRad,
+        leverM,
+        leverSitM,
+        leverMinM,
+        leverLostRad,
+        thicknessThatWouldM,
+        neededN,
+        planN,
+        holdN,
+        workingN,
+        restShare,
+        stiff.lineNPerM(),
+        stiff.pathNPerM(),
+        riseRad,
+        stiff.lengthM(),
+        shorteningM,
+        shorteningToCommitM,
+        shorteningM + workingN / stiff.pathNPerM() + slackM,
+        gapeM,
+        steerShare,
+        turnShare,
+        crushShare,
+        stemBreakN,
+        stemWeakestM);
+  }
+
   /** Whether the forces could be reckoned. */
   public boolean movable() {
     return status == Status.BACK_LEANER || status == Status.NO_PULL_NEEDED;

@@ -49,6 +49,16 @@ final class Migrations {
     if (!site.has("zones")) {
       site.putObject("zones").putNull("slide_m").putNull("people_radius").putNull("energy");
     }
+    if (!site.has("strips")) {
+      site.putArray("strips");
+    }
+    if (site.path("offer") instanceof ObjectNode offer) {
+      for (String range : new String[] {"attach_range", "hinge_range"}) {
+        if (!offer.has(range)) {
+          offer.putNull(range);
+        }
+      }
+    }
   }
 
   private static Stream<ObjectNode> objects(JsonNode list) {

@@ -55,6 +55,38 @@ public final class DropZoneFit {
     return new Fit(least.distanceM, 0, new Position(least.at.x, least.at.y));
   }
 
+  /**
+   * Whether the footprint lies inside. Where a piece of it plainly sticks out or plainly lies in
+   * the zone that is enough; only in between the areas are laid over each other.
+   */
+  public boolean holds(FallFootprint footprint) {
+    boolean plain = true;
+    for (Edges piece : footprint.pieceEdges()) {
+      double least = Double.POSITIVE_INFINITY;
+      for (int i = 0; i < piece.size(); i++) {
+        Coordinate c = piece.from(i);
+        double d = edges.toEdge(c);
+        if (!edges.contains(c)) {
+          if (d > PLAIN_M) {
+            return false;
+          }
+          d = 0;
+        }
+        least = Math.min(least, d);
+      }
+      // all corners well inside, and no corner of the zone within the piece or near its edges
+      for (int i = 0; i < edges.size() && least > PLAIN_M; i++) {
+        Coordinate c = edges.from(i);
+        least = piece.contains(c) ? 0 : Math.min(least, piece.toEdge(c));
+      }
+      plain &= least > PLAIN_M && !piece.crosses(edges);
+    }
+    return plain || of(footprint).inside();
+  }
+
+  /** Distance beyond which a point is plainly on its side of an edge [m]. */
+  private static final double PLAIN_M = 1e-6;
+
   private record Least(double distanceM, Coordinate at) {}
 
   /** Inside the zone the two edges do not cross, so a corner of either is nearest. */

@@ -1,6 +1,7 @@
 package org.fallwright.core.zones;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Envelope;
@@ -21,6 +22,11 @@ final class Edges {
   private final Envelope envelope;
   private final boolean area;
   private final double[][] corners;
+
+  /** Boxes about each {@link #CHUNK} edges, least and greatest x and y. */
+  private final double[] boxes;
+
+  private static final int CHUNK = 8;
 
   Edges(Geometry geometry) {
     List<Coordinate[]> lines = new ArrayList<>();
@@ -52,6 +58,103 @@ final class Edges {
     corners = all.toArray(double[][]::new);
     envelope = geometry.getEnvelopeInternal();
     area = geometry.getDimension() == 2;
+    boxes = boxes();
+  }
+
+  /** A straight line. */
+  Edges(double fromX, double fromY, double toX, double toY) {
+    ax = new double[] {fromX};
+    ay = new double[] {fromY};
+    bx = new double[] {toX};
+    by = new double[] {toY};
+    corners = new double[][] {{fromX, fromY}, {toX, toY}};
+    envelope = new Envelope(fromX, toX, fromY, toY);
+    area = false;
+    boxes = boxes();
+  }
+
+  /** An area within a closed ring of corners, the first not said again. */
+  Edges(double[][] ring) {
+    int n = ring.length;
+    ax = new double[n];
+    ay = new double[n];
+    bx = new double[n];
+    by = new double[n];
+    envelope = new Envelope();
+    for (int i = 0; i < n; i++) {
+      double[] next = ring[(i + 1) % n];
+      ax[i] = ring[i][0];
+      ay[i] = ring[i][1];
+      bx[i] = next[0];
+      by[i] = next[1];
+      envelope.expandToInclude(ring[i][0], ring[i][1]);
+    }
+    corners = ring;
+    area = true;
+    boxes = boxes();
+  }
+
+  /** The convex hull of outlines. */
+  static Edges hull(List<Edges> outlines) {
+    List<double[]> all = new ArrayList<>();
+    for (Edges e : outlines) {
+      all.addAll(Arrays.asList(e.corners));
+    }
+    all.sort((p, q) -> p[0] != q[0] ? Double.compare(p[0], q[0]) : Double.compare(p[1], q[1]));
+    double[][] ring = new double[2 * all.size()][];
+    int n = 0;
+    for (int i = 0; i < all.size(); i++) {
+      n = turn(ring, n, 0, all.get(i));
+    }
+    int lower = n;
+    for (int i = all.size() - 2; i >= 0; i--) {
+      n = turn(ring, n, lower - 1, all.get(i));
+    }
+    return new Edges(Arrays.copyOf(ring, n - 1));
+  }
+
+  /** Adds a corner to a chain that turns left; corners that it makes needless are dropped. */
+  private static int turn(double[][] ring, int n, int first, double[] p) {
+    int count = n;
+    while (count > first + 1) {
+      double[] a = ring[count - 2];
+      double[] b = ring[count - 1];
+      if ((b[0] - a[0]) * (p[1] - a[1]) - (b[1] - a[1]) * (p[0] - a[0]) > 0) {
+        break;
+      }
+      count--;
+    }
+    ring[count] = p;
+    return count + 1;
+  }
+
+  private double[] boxes() {
+    int n = (ax.length + CHUNK - 1) / CHUNK;
+    double[] all = new double[4 * n];
+    for (int c = 0; c < n; c++) {
+      double minX = Double.POSITIVE_INFINITY;
+      double maxX = Double.NEGATIVE_INFINITY;
+      double minY = Double.POSITIVE_INFINITY;
+      double maxY = Double.NEGATIVE_INFINITY;
+      for (int i = c * CHUNK; i < Math.min(ax.length, (c + 1) * CHUNK); i++) {
+        minX = Math.min(minX, Math.min(ax[i], bx[i]));
+        maxX = Math.max(maxX, Math.max(ax[i], bx[i]));
+        minY = Math.min(minY, Math.min(ay[i], by[i]));
+        maxY = Math.max(maxY, Math.max(ay[i], by[i]));
+      }
+      all[4 * c] = minX;
+      all[4 * c + 1] = maxX;
+      all[4 * c + 2] = minY;
+      all[4 * c + 3] = maxY;
+    }
+    return all;
+  }
+
+  /** Square of the distance from a point to the box about a chunk of edges [m²]. */
+  private double toChunk(double x, double y, int c) {
+    double dx = Math.max(0, Math.max(boxes[4 * c] - x, x - boxes[4 * c + 1]));
+    double dy = Math.max(0, Math.max(boxes[4 * c + 2] - y, y - boxes[4 * c + 3]));
+    return dx * dx + dy * dy;
   }
 
   /**
@@ -86,7 +189,8 @@ final class Edges {
     return contains(p.x, p.y);
   }
 
-  private boolean contains(double x, double y) {
+  /** The same. */
+  boolean contains(double x, double y) {
     if (!area || !envelope.covers(x, y)) {
       return false;
     }
@@ -105,8 +209,12 @@ final class Edges {
   /** Distance from a point to the nearest edge [m]. */
   double toEdge(Coordinate p) {
     double best = Double.POSITIVE_INFINITY;
-    for (int i = 0; i < ax.length; i++) {
-      best = Math.min(best, squared(p.x, p.y, i));
+    for (int c = 0; 4 * c < boxes.length; c++) {
+      if (toChunk(p.x, p.y, c) < best) {
+        for (int i = c * CHUNK; i < Math.min(ax.length, (c + 1) * CHUNK); i++) {
+          best = Math.min(best, squared(p.x, p.y, i));
+        }
+      }
     }
     return Math.sqrt(best);
   }
@@ -142,6 +250,27 @@ final class Edges {
 
   /** The gap between this and another outline. */
   Gap gapTo(Edges other) {
+    return gapTo(other, Double.POSITIVE_INFINITY);
+  }
+
+  /** The same; null where the two are plainly as far apart as {@code unlessM} or farther [m]. */
+  Gap gapTo(Edges other, double unlessM) {
+    double dx =
+        Math.max(
+            0,
+            Math.max(
+                envelope.getMinX() - other.envelope.getMaxX(),
+                other.envelope.getMinX() - envelope.getMaxX()));
+    double dy =
+        Math.max(
+            0,
+            Math.max(
+                envelope.getMinY() - other.envelope.getMaxY(),
+                other.envelope.getMinY() - envelope.getMaxY()));
+    // a hair on the side of looking
+    if (dx * dx + dy * dy > unlessM * unlessM * (1 + 1e-9)) {
+      return null;
+    }
     Coordinate meet = envelope.intersects(other.envelope) ? meeting(other) : null;
     if (meet != null) {
       return new Gap(0, meet);
@@ -151,12 +280,17 @@ final class Edges {
     double x = 0;
     double y = 0;
     for (double[] c : other.corners) {
-      for (int i = 0; i < ax.length; i++) {
-        double d = squared(c[0], c[1], i);
-        if (d < best) {
-          best = d;
-          x = c[0];
-          y = c[1];
+      for (int chunk = 0; 4 * chunk < boxes.length; chunk++) {
+        if (toChunk(c[0], c[1], chunk) >= best) {
+          continue;
+        }
+        for (int i = chunk * CHUNK; i < Math.min(ax.length, (chunk + 1) * CHUNK); i++) {
+          double d = squared(c[0], c[1], i);
+          if (d < best) {
+            best = d;
+            x = c[0];
+            y = c[1];
+          }
         }
       }
     }
@@ -178,12 +312,35 @@ final class Edges {
   }
 
   private Coordinate meeting(Edges o) {
+    Coordinate crossing = crossing(o);
+    if (crossing != null) {
+      return crossing;
+    }
+    if (contains(o.ax[0], o.ay[0])) {
+      return o.from(0);
+    }
+    return o.contains(ax[0], ay[0]) ? from(0) : null;
+  }
+
+  /** Whether an edge of this and one of the other cross or touch. */
+  boolean crosses(Edges other) {
+    return crossing(other) != null;
+  }
+
+  private Coordinate crossing(Edges o) {
     for (int i = 0; i < ax.length; i++) {
+      if (i % CHUNK == 0 && apart(4 * (i / CHUNK), o.envelope)) {
+        i += CHUNK - 1;
+        continue;
+      }
       double minX = Math.min(ax[i], bx[i]);
       double maxX = Math.max(ax[i], bx[i]);
       double minY = Math.min(ay[i], by[i]);
       double maxY = Math.max(ay[i], by[i]);
-      if (!o.envelope.intersects(new Envelope(minX, maxX, minY, maxY))) {
+      if (minX > o.envelope.getMaxX()
+          || maxX < o.envelope.getMinX()
+          || minY > o.envelope.getMaxY()
+          || maxY < o.envelope.getMinY()) {
         continue;
       }
       for (int j = 0; j < o.ax.length; j++) {
@@ -202,10 +359,14 @@ final class Edges {
         }
       }
     }
-    if (contains(o.ax[0], o.ay[0])) {
-      return o.from(0);
-    }
-    return o.contains(ax[0], ay[0]) ? from(0) : null;
+    return null;
+  }
+
+  private boolean apart(int box, Envelope of) {
+    return boxes[box] > of.getMaxX()
+        || boxes[box + 1] < of.getMinX()
+        || boxes[box + 2] > of.getMaxY()
+        || boxes[box + 3] < of.getMinY();
   }
 
   private double side(int i, double x, double y) {

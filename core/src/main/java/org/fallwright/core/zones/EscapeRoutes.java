@@ -5,10 +5,8 @@ import java.util.Comparator;
 import java.util.List;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.site.Position;
-import org.fallwright.core.site.Shape;
 import org.fallwright.core.site.Target;
 import org.fallwright.core.units.Range;
-import org.locationtech.jts.geom.Coordinate;
 
 /**
  * The feller's ways out from the stump.
@@ -132,10 +130,8 @@ public final class EscapeRoutes {
 
   private boolean walkable(Zones zones, Position from, Position to) {
     Edges way = edges(from, to);
-    for (Edges o : obstacles) {
-      if (way.gapTo(o).distanceM() < HALF_WIDTH_M) {
-        return false;
-      }
+    if (!clearOf(way)) {
+      return false;
     }
     for (int i = 1; i < zones.legs.size(); i++) {
       Leg leg = zones.legs.get(i);
@@ -146,11 +142,129 @@ public final class EscapeRoutes {
     return true;
   }
 
+  /** What a line puts in the way of somebody who walks off. */
+  public static final class Line {
+    private final List<Bight> bights;
+    private final Recoil recoil;
+    private final List<Edges> further = new ArrayList<>();
+
+    public Line(List<Bight> bights, Recoil recoil, List<Leg> legs) {
+      this.bights = bights;
+      this.recoil = recoil;
+      for (Leg leg : legs.subList(1, legs.size())) {
+        further.add(edges(leg.from(), leg.to()));
+      }
+    }
+
+    private boolean free(Position end) {
+      if (recoil.contains(end)) {
+        return false;
+      }
+      for (Bight b : bights) {
+        if (b.contains(end)) {
+          return false;
+        }
+      }
+      return true;
+    }
+
+    private boolean walkable(Edges way) {
+      for (Edges leg : further) {
+        if (way.gapTo(leg).distanceM() < HALF_WIDTH_M) {
+          return false;
+        }
+      }
+      return true;
+    }
+  }
+
+  /**
+   * The ways out from one footprint and sit-back zone, to be asked for many lines: only whether
+   * there is one. What the line does not change is worked out once, when first asked for. May be
+   * asked by several threads.
+   */
+  public final class Ends {
+    private static final byte NOT_YET = 0;
+    private static final byte TAKEN = 1;
+    private static final byte FREE = 2;
+    private static final byte BLOCKED = 3;
+
+    private final FallFootprint footprint;
+    private final SitBackZone sitBack;
+    private final double leastM;
+    private final double mostM;
+    private final byte[] known;
+    private final int steps;
+
+    private Ends(FallFootprint footprint, SitBackZone sitBack, double leastM, double heightM) {
+      this.footprint = footprint;
+      this.sitBack = sitBack;
+      this.leastM = leastM;
+      mostM = Math.max(leastM, 2 * heightM);
+      steps = (int) Math.ceil((mostM - leastM) / LONGER_M) + 1;
+      known = new byte[2 * ((MOST_DEG - LEAST_DEG) / STEP_DEG + 1) * steps];
+    }
+
+    /** Whether {@link EscapeRoutes#ends} of these zones and that line holds any. */
+    public boolean any(Line line) {
+      int at = 0;
+      for (int side = -1; side <= 1; side += 2) {
+        for (int off = LEAST_DEG; off <= MOST_DEG; off += STEP_DEG, at += steps) {
+          if (along(at, side * off, line)) {
+            return true;
+          }
+        }
+      }
+      return false;
+    }
+
+    private boolean along(int at, int offDeg, Line line) {
+      Position stump = footprint.stump();
+      double azimuth = footprint.layDeg() + offDeg;
+      double sin = Math.sin(Math.toRadians(azimuth));
+      double cos = Math.cos(Math.toRadians(azimuth));
+      double covered = 0;
+      int i = at;
+      for (double length = leastM; length <= mostM; length += LONGER_M, i++) {
+        byte state = known[i];
+        if (state == TAKEN || length < covered) {
+          continue;
+        }
+        covered = line.recoil.discUntil(stump, sin, cos, length);
+        if (length < covered) {
+          continue;
+        }
+        Position end = stump.along(azimuth, length);
+        if (state == NOT_YET) {
+          boolean free = !sitBack.contains(end) && !footprint.contains(end);
+          state = !free ? TAKEN : clearOf(edges(stump, end)) ? FREE : BLOCKED;
+          known[i] = state;
+        }
+        if (state != TAKEN && line.free(end)) {
+          return state == FREE && line.walkable(edges(stump, end));
+        }
+      }
+      return false;
+    }
+  }
+
+  /** The ways out from a footprint and a sit-back zone, to be asked for many lines. */
+  public Ends ends(
+      FallFootprint footprint, SitBackZone sitBack, double ruleLengthM, double heightM) {
+    Range.check("escape_length_m", ruleLengthM, 1, 200, "m");
+    return new Ends(footprint, sitBack, ruleLengthM, heightM);
+  }
+
+  private boolean clearOf(Edges way) {
+    for (Edges o : obstacles) {
+      if (way.gapTo(o).distanceM() < HALF_WIDTH_M) {
+        return false;
+      }
+    }
+    return true;
+  }
+
   private static Edges edges(Position a, Position b) {
-    return new Edges(
-        Shape.FACTORY.createLineString(
-            new Coordinate[] {
-              new Coordinate(a.eastM(), a.northM()), new Coordinate(b.eastM(), b.northM())
-            }));
+    return new Edges(a.eastM(), a.northM(), b.eastM(), b.northM());
   }
 }

@@ -5,7 +5,6 @@ import java.util.List;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.units.Range;
-import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Geometry;
 import org.locationtech.jts.geom.Polygon;
 import org.locationtech.jts.operation.overlayng.OverlayNG;
@@ -66,7 +65,10 @@ public final class FallFootprint {
     this.steeringShare = steeringShare;
     this.lengthM = lengthM;
     this.pieces = List.copyOf(pieces);
-    this.pieceEdges = pieces.stream().map(Edges::new).toList();
+    this.pieceEdges = new ArrayList<>(pieces.size());
+    for (Polygon p : pieces) {
+      pieceEdges.add(new Edges(p));
+    }
   }
 
   /**
@@ -165,16 +167,26 @@ public final class FallFootprint {
 
   /** Whether a point lies in the footprint. */
   public boolean contains(Position p) {
-    Coordinate c = new Coordinate(p.eastM(), p.northM());
-    return pieceEdges.stream().anyMatch(e -> e.contains(c));
+    for (Edges e : pieceEdges) {
+      if (e.contains(p.eastM(), p.northM())) {
+        return true;
+      }
+    }
+    return false;
+  }
+
+  /** The edges of each piece. */
+  List<Edges> pieceEdges() {
+    return pieceEdges;
   }
 
   /** The gap to another outline: that of the nearest piece, so the whole is not needed. */
   Edges.Gap gapTo(Edges other) {
     Edges.Gap best = null;
     for (Edges piece : pieceEdges) {
-      Edges.Gap gap = piece.gapTo(other);
-      if (best == null || gap.distanceM() < best.distanceM()) {
+      Edges.Gap gap =
+          piece.gapTo(other, best == null ? Double.POSITIVE_INFINITY : best.distanceM());
+      if (gap != null && (best == null || gap.distanceM() < best.distanceM())) {
         best = gap;
       }
       if (best.distanceM() <= 0) {

@@ -50,6 +50,28 @@ public final class LayTargets {
   }
 
   /**
+   * The same for a search: apart from each other all is as in {@link #clearances}; of what overlaps
+   * it is only said that it does, not how deep or how much; of what may be hit, nothing.
+   */
+  public List<TargetClearance> gaps(FallFootprint footprint) {
+    List<TargetClearance> all = new ArrayList<>(ready.size());
+    for (Ready r : ready) {
+      boolean judged = !r.target().mayBeHit();
+      Edges.Gap gap = judged ? footprint.gapTo(r.edges()) : null;
+      all.add(
+          new TargetClearance(
+              r.target().id(),
+              judged ? gap.distanceM() : Double.NaN,
+              r.askedM(),
+              Double.NaN,
+              "",
+              judged ? new Position(gap.onOther().x, gap.onOther().y) : null,
+              !judged));
+    }
+    return all;
+  }
+
+  /**
    * The least {@link TargetClearance#ratio} of a footprint, without depths and amounts: the quick
    * question of a search. Infinite where nothing limits.
    */

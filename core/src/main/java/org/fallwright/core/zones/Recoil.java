@@ -35,6 +35,12 @@ public final class Recoil {
   private final List<Disc> discs = new ArrayList<>();
 
   private record Disc(Position at, double radiusM) {
+    boolean contains(Position p) {
+      double e = p.eastM() - at.eastM();
+      double n = p.northM() - at.northM();
+      return e * e + n * n <= radiusM * radiusM;
+    }
+
     Geometry geometry() {
       return Shape.FACTORY
           .createPoint(new Coordinate(at.eastM(), at.northM()))
@@ -86,9 +92,45 @@ public final class Recoil {
   }
 
   public boolean contains(Position p) {
-    return fans.stream().anyMatch(f -> f.contains(p))
-        || discs.stream().anyMatch(d -> d.at.distanceTo(p) <= d.radiusM);
+    for (Sector f : fans) {
+      if (f.contains(p)) {
+        return true;
+      }
+    }
+    for (Disc d : discs) {
+      if (d.contains(p)) {
+        return true;
+      }
+    }
+    return false;
   }
+
+  /**
+   * How far along a straight way the disc reaches in which a place on it plainly lies [m]; 0: it
+   * lies plainly in none.
+   *
+   * @param sin sine of the way's azimuth
+   * @param cos its cosine
+   * @param atM how far along the way the place is [m]
+   */
+  double discUntil(Position from, double sin, double cos, double atM) {
+    for (Disc d : discs) {
+      double e = d.at.eastM() - from.eastM();
+      double n = d.at.northM() - from.northM();
+      double middle = e * sin + n * cos;
+      double square = d.radiusM * d.radiusM - (e * e + n * n - middle * middle);
+      if (square > 0) {
+        double half = Math.sqrt(square) - HAIR_M;
+        if (Math.abs(atM - middle) < half) {
+          return middle + half;
+        }
+      }
+    }
+    return 0;
+  }
+
+  /** Rounding that is left to the exact question [m]. */
+  private static final double HAIR_M = 1e-6;
 
   /** Whether a place lies on the axis of the last leg: in one of its fans. */
   public boolean onLastLeg(Position p) {

@@ -6,27 +6,59 @@ import org.fallwright.core.units.Range;
 import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Geometry;
 
-/**
- * A fan of ground.
- *
- * @param apex its point
- * @param azimuthDeg its middle direction [degrees]
- * @param halfAngleDeg half its opening [degrees], up to 90
- * @param radiusM its length [m]
- */
-record Sector(Position apex, double azimuthDeg, double halfAngleDeg, double radiusM) {
+/** A fan of ground. */
+final class Sector {
   private static final double STEP_DEG = 3;
 
-  Sector {
-    Range.check("azimuth_deg", azimuthDeg, -720, 1080, "degrees");
-    Range.check("half_angle_deg", halfAngleDeg, 1, 90, "degrees");
-    Range.check("radius_m", radiusM, 0.01, 2 * Position.FARTHEST, "m");
+  private final Position apex;
+  private final double azimuthDeg;
+  private final double halfAngleDeg;
+  private final double radiusM;
+  private final double sin;
+  private final double cos;
+  private final double cosHalfSquared;
+
+  /**
+   * @param apex its point
+   * @param azimuthDeg its middle direction [degrees]
+   * @param halfAngleDeg half its opening [degrees], up to 90
+   * @param radiusM its length [m]
+   */
+  Sector(Position apex, double azimuthDeg, double halfAngleDeg, double radiusM) {
+    this.apex = apex;
+    this.azimuthDeg = Range.check("azimuth_deg", azimuthDeg, -720, 1080, "degrees");
+    this.halfAngleDeg = Range.check("half_angle_deg", halfAngleDeg, 1, 90, "degrees");
+    this.radiusM = Range.check("radius_m", radiusM, 0.01, 2 * Position.FARTHEST, "m");
+    sin = Math.sin(Math.toRadians(azimuthDeg));
+    cos = Math.cos(Math.toRadians(azimuthDeg));
+    double half = Math.cos(Math.toRadians(halfAngleDeg));
+    cosHalfSquared = half * half;
   }
 
   boolean contains(Position p) {
+    // Most points lie plainly on one side, which needs no angle; a hair is left to the exact
+    // question.
+    double e = p.eastM() - apex.eastM();
+    double n = p.northM() - apex.northM();
+    double square = e * e + n * n;
+    if (square > radiusM * radiusM * (1 + HAIR)) {
+      return false;
+    }
+    double along = e * sin + n * cos;
+    double reach = square * cosHalfSquared;
+    if (along < 0 || along * along < reach * (1 - HAIR)) {
+      if (along < -HAIR * radiusM || along * along < reach * (1 - HAIR) - HAIR * HAIR) {
+        return false;
+      }
+    } else if (along * along > reach * (1 + HAIR) && square < radiusM * radiusM * (1 - HAIR)) {
+      return true;
+    }
     double d = apex.distanceTo(p);
     return d == 0 || d <= radiusM && offDeg(p) <= halfAngleDeg;
   }
+
+  /** Rounding that is left to the exact question. */
+  private static final double HAIR = 1e-9;
 
   /** Distance from a point to the fan, 0 inside [m]. */
   double distanceTo(Position p) {

@@ -30,7 +30,7 @@ import org.locationtech.jts.geom.Geometry;
 public final class WireCheck {
   private final FallOutline outline;
   private final Place stump;
-  private final Geometry standing;
+  private final Edges standing;
   private final List<Ready> wires = new ArrayList<>();
 
   private record Chord(Segment3 piece, Edges plan, double outsideBallM) {}
@@ -89,10 +89,13 @@ public final class WireCheck {
     double y = stump.at().northM();
     Position top = stump.at().along(outline.leanAzimuthDeg(), h * lean);
     standing =
-        Shape.FACTORY
-            .createLineString(
-                new Coordinate[] {new Coordinate(x, y), new Coordinate(top.eastM(), top.northM())})
-            .buffer(outline.crownReachM() / Math.cos(Math.PI / 48), 12);
+        new Edges(
+            Shape.FACTORY
+                .createLineString(
+                    new Coordinate[] {
+                      new Coordinate(x, y), new Coordinate(top.eastM(), top.northM())
+                    })
+                .buffer(outline.crownReachM() / Math.cos(Math.PI / 48), 12));
     for (Wire wire : wires) {
       List<Chord> chords = new ArrayList<>();
       for (Segment3 s : Segment3.conductor(wire)) {
@@ -124,10 +127,9 @@ public final class WireCheck {
 
   /** Footprint and standing crown with all that lies between them in plan. */
   private Edges hull(FallFootprint footprint) {
-    return new Edges(
-        Shape.FACTORY
-            .createGeometryCollection(new Geometry[] {footprint.geometry(), standing})
-            .convexHull());
+    List<Edges> all = new ArrayList<>(footprint.pieceEdges());
+    all.add(standing);
+    return Edges.hull(all);
   }
 
   private static InLay inLay(Edges hull, Ready w, double askedM) {

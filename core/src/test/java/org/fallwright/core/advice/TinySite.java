@@ -167,7 +167,7 @@ public final class TinySite {
                 new Gear.Source(
                     "steady", "steady", List.of("spot", "point"), List.of(), List.of(), pull))),
         new Conditions(Quantity.measured(gustMps), windTowardDeg, null, null),
-        new Offer(List.of(attachM), How.MEASURED, 90, List.of(), 1),
+        new Offer(List.of(attachM), How.MEASURED, 90, List.of(), 1, null, null),
         List.of(),
         List.of(),
         null,
@@ -175,7 +175,8 @@ public final class TinySite {
         List.of(),
         List.of(),
         List.of(),
-        new ZoneChoices(null, null, new ZoneChoices.AcceptedEnergy(1e6, "the climber", "today")));
+        new ZoneChoices(null, null, new ZoneChoices.AcceptedEnergy(1e6, "the climber", "today")),
+        List.of());
   }
 
   private static Place place(Position at) {

@@ -67,7 +67,7 @@ class KitCopyTest {
         .hasMessageStartingWith("\"L9\" is not in the kit; it holds L1, L2, L3, Block");
     assertThatThrownBy(() -> Copied.of(bare, kit, "k", List.of("crew"), List.of("Z")))
         .hasMessage(
-            "gear.sources.crew.places names \"Z\"; no anchor or spot of that name is on the site");
+            "gear.sources.crew.places names \"Z\"; no anchor, spot or strip of that name is on the site");
     Gear cell =
         new Gear(
             List.of(),

@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.within;
 
 import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.function.Consumer;
 import org.fallwright.core.line.LineFigures;
@@ -116,7 +117,7 @@ class KitChecksTest {
   @Test
   void twoLinesAreJoinedWhereNoneReachesAlone() {
     Site two = site(20, 15, s -> {});
-    List<Setup> ways = new Ways(two, TinySite.SOURCES, new LeftOut(two)).all();
+    List<Setup> ways = ways(two);
     assertThat(ways).extracting(Setup::line).contains("L2 + L1", "L1 + L2");
     Judge judge = new Judge(two, TinySite.SOURCES);
     Judged j = judge.judge(DIRECT.withLine("L1 + L2"));
@@ -126,7 +127,7 @@ class KitChecksTest {
         .contains("line L1 + L2", "connector at joint of L1 + L2");
     assertThat(why(two, DIRECT.withLine("L1 + L2"), "connectors")).startsWith("2 connectors");
     Site reaching = site(80, 15, s -> {});
-    List<Setup> enough = new Ways(reaching, TinySite.SOURCES, new LeftOut(reaching)).all();
+    List<Setup> enough = ways(reaching);
     assertThat(enough).extracting(Setup::line).doesNotContain("L2 + L1", "L1 + L2");
   }
 
@@ -143,5 +144,20 @@ class KitChecksTest {
     assertThat(35 / both.stiffnessN())
         .isCloseTo(20 / strong.stiffnessN() + 15 / weak.stiffnessN(), within(1e-15));
     assertThat(JoinedLines.parts(two, "L2")).hasSize(1);
+  }
+
+  private static List<Setup> ways(Site site) {
+    Places places = new Places(site);
+    Ways ways = new Ways(site, TinySite.SOURCES, new LeftOut(site));
+    List<Setup> all = new ArrayList<>();
+    for (Ways.End end : ways.ends()) {
+      for (int group = 0; group < ways.groups(); group++) {
+        for (List<String> path : ways.paths(end, group)) {
+          Route route = Route.of(places, end.way(path, ""), end.source(), end.driver());
+          ways.lines(end, path, route).forEach(line -> all.add(end.way(path, line)));
+        }
+      }
+    }
+    return all;
   }
 }

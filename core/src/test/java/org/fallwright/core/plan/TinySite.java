@@ -32,11 +32,12 @@ final class TinySite {
       new PullOffer.Limit(
           new Wording("as told", "como se dijo"),
           new Wording("It gives what it is told to.", "Da lo que se le dice."));
+  private static ObjectNode demo;
 
   private TinySite() {}
 
   /** A source that gives a force by its parameter {@code pull_N}, holds it, and never more. */
-  static final class Steady implements PullSource {
+  static class Steady implements PullSource {
     @Override
     public SourceDescription describe() {
       return new SourceDescription(
@@ -71,7 +72,7 @@ final class TinySite {
   static Site site(double pullN, Consumer<ObjectNode> change) {
     try {
       ObjectMapper mapper = new ObjectMapper();
-      ObjectNode s = (ObjectNode) mapper.readTree(DEMO.toFile());
+      ObjectNode s = demo(mapper).deepCopy();
       ObjectNode tree = (ObjectNode) s.get("tree");
       ((ObjectNode) tree.get("stump")).set("at", mapper.readTree("[0, 0]"));
       number(tree, "dbh_m", 0.28);
@@ -89,7 +90,7 @@ final class TinySite {
           .set("hinge_thicknesses_m", mapper.readTree("[0.03]"));
       number((ObjectNode) s.get("conditions"), "gust_mps", 0);
       for (String list :
-          new String[] {"targets", "wires", "drop_zones", "spots", "people_points"}) {
+          new String[] {"targets", "wires", "drop_zones", "spots", "people_points", "strips"}) {
         s.set(list, mapper.createArrayNode());
       }
       s.set(
@@ -111,7 +112,7 @@ final class TinySite {
           mapper.readTree(
               """
               {"attach_heights_m": [6], "attach_how": "measured", "lay_step_deg": 5,
-               "lays_deg": [], "redirects": 0}"""));
+               "lays_deg": [], "redirects": 0, "attach_range": null, "hinge_range": null}"""));
       ((ObjectNode) s.get("gear"))
           .set(
               "sources",
@@ -125,6 +126,13 @@ final class TinySite {
     } catch (IOException e) {
       throw new UncheckedIOException(e);
     }
+  }
+
+  private static synchronized ObjectNode demo(ObjectMapper mapper) throws IOException {
+    if (demo == null) {
+      demo = (ObjectNode) mapper.readTree(DEMO.toFile());
+    }
+    return demo;
   }
 
   static Site site(double pullN) {

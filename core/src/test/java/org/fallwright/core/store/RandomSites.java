@@ -31,6 +31,8 @@ import org.fallwright.core.site.Site;
 import org.fallwright.core.site.Spot;
 import org.fallwright.core.site.Stated;
 import org.fallwright.core.site.StemDiameter;
+import org.fallwright.core.site.Steps;
+import org.fallwright.core.site.Strip;
 import org.fallwright.core.site.SubjectTree;
 import org.fallwright.core.site.TakenException;
 import org.fallwright.core.site.TapeTie;
@@ -110,7 +112,9 @@ public final class RandomSites {
             any(USUAL),
             in(0.25, 90),
             list(0, 3, i -> in(0, 360)),
-            random.nextInt(2)),
+            random.nextInt(3),
+            maybe(() -> steps(0.5, 100)),
+            maybe(() -> steps(0.005, 0.5))),
         list(0, 3, i -> day("case " + i)),
         list(0, 2, i -> revision()),
         maybe(this::text),
@@ -134,7 +138,8 @@ public final class RandomSites {
         new ZoneChoices(
             maybe(() -> in(0, 200)),
             maybe(() -> in(1, 10)),
-            maybe(() -> new ZoneChoices.AcceptedEnergy(in(1, 1e6), text(), text()))));
+            maybe(() -> new ZoneChoices.AcceptedEnergy(in(1, 1e6), text(), text()))),
+        list(0, 2, i -> strip("strip " + i)));
   }
 
   private Case day(String id) {
@@ -185,6 +190,30 @@ public final class RandomSites {
                 maybe(this::position),
                 in(0.1, 500),
                 maybe(() -> in(0, 10))));
+  }
+
+  private Steps steps(double least, double most) {
+    double from = in(least, most);
+    double to = Math.max(from, in(least, most));
+    return new Steps(from, to, Math.max(0.001, (to - from) / (1 + random.nextInt(20)) * 1.001));
+  }
+
+  private Strip strip(String id) {
+    Position from = new Position(in(-4000, 4000), in(-4000, 4000));
+    double from0 = in(-500, 8900);
+    return new Strip(
+        id,
+        List.of(from, from.along(in(0, 360), in(50, 900)), from.along(in(0, 360), in(20, 40))),
+        any(Fix.values()),
+        maybe(() -> in(0, 100)),
+        from0,
+        from0 + in(0, 20),
+        in(0.5, 30),
+        in(20, 200),
+        flag(),
+        text(),
+        flag(),
+        maybe(this::text));
   }
 
   private SubjectTree tree(double height) {

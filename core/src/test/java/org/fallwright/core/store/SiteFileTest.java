@@ -38,18 +38,23 @@ class SiteFileTest {
     Site one = SiteFile.read(Samples.utf8(Samples.formOne()), "one");
     ObjectNode present = (ObjectNode) SiteJson.MAPPER.readTree(Samples.present());
     ObjectNode lifted = (ObjectNode) SiteJson.MAPPER.readTree(SiteFile.bytes(one));
-    // the present sample's gear has more than form 1 could say
+    // the present sample's gear and offer have more than form 1 could say
     for (String gear : List.of("lines", "blocks", "slings", "connectors", "load_cell")) {
       ((ObjectNode) present.get("gear")).set(gear, lifted.get("gear").get(gear));
     }
+    present.set("offer", lifted.get("offer"));
     assertThat(one)
         .isEqualTo(
             withoutWhatFormOneLacks(
                 SiteFile.read(SiteJson.MAPPER.writeValueAsBytes(present), "present")));
+    assertThat(one.strips()).isEmpty();
+    assertThat(one.offer().attachHeights()).containsExactly(8.0, 10.5);
+    assertThat(one.hingeThicknesses()).containsExactly(0.045, 0.06);
   }
 
   private static Site withoutWhatFormOneLacks(Site site) {
-    return Copy.with(Copy.with(site, "cases", List.of()), "revisions", List.of());
+    Site bare = Copy.with(site, "cases", List.of());
+    return Copy.with(Copy.with(bare, "revisions", List.of()), "strips", List.of());
   }
 
   @Test

@@ -116,7 +116,8 @@ final class PlanText {
       return;
     }
     out.println();
-    out.println("Ruled out, by the check that decides, with the best setup it rejects:");
+    out.println(
+        "Ruled out, by the first check missed, with the setup that comes nearest to passing it:");
     plan.byBindingCheck().entrySet().stream()
         .sorted(
             Map.Entry.<String, Integer>comparingByValue(Comparator.reverseOrder())
@@ -129,7 +130,9 @@ final class PlanText {
                 Setup s = best.setup();
                 row(
                     "         lay %s, %s: %s",
-                    degrees(s.layDeg()), placed(s.source(), s.mode(), s.place()), best.sentence());
+                    degrees(s.layDeg()),
+                    placed(s.source(), s.mode(), s.place()),
+                    best.check(e.getKey()).why());
               }
             });
   }

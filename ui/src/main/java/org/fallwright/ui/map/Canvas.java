@@ -12,6 +12,7 @@ import org.locationtech.jts.geom.Envelope;
 import org.locationtech.jts.geom.Geometry;
 import org.locationtech.jts.geom.GeometryFactory;
 import org.locationtech.jts.geom.Point;
+import org.locationtech.jts.geom.util.LineStringExtracter;
 import org.locationtech.jts.linearref.LengthIndexedLine;
 
 /** What the painters of one drawing share: the scene, the view, the pen and the labels wanted. */
@@ -88,7 +89,12 @@ record Canvas(PlanScene scene, Viewport view, Pen pen, Labels labels) {
       at = view.toPixel(use.getX(), use.getY());
       clearance = -1;
     } else {
-      Coordinate m = new LengthIndexedLine(seen).extractPoint(seen.getLength() / 2);
+      // what only touches the frame is a point, and not to be seen
+      Geometry lines = LineStringExtracter.getGeometry(seen);
+      if (lines.isEmpty()) {
+        return;
+      }
+      Coordinate m = new LengthIndexedLine(lines).extractPoint(lines.getLength() / 2);
       at = view.toPixel(m.x, m.y);
       clearance = 5 * unit();
     }

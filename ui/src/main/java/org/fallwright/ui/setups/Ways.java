@@ -13,7 +13,8 @@ import org.fallwright.ui.text.Messages;
  *
  * @param summary how many setups were judged, and how many of them work
  * @param ranked the setups worth showing, best first
- * @param ruledOut what rules the others out, most often first, each with the best setup it rejects
+ * @param ruledOut what rules the others out, most often first, each with the setup that comes
+ *     nearest to passing it
  * @param notes what was left out
  */
 public record Ways(String summary, List<Row> ranked, List<Row> ruledOut, List<String> notes) {
@@ -64,9 +65,7 @@ public record Ways(String summary, List<Row> ranked, List<Row> ruledOut, List<St
                               "ways.nearest",
                               Way.title(best.setup()),
                               amounts.azimuth(best.setup().layDeg())),
-                      best == null || best.weakest() == null
-                          ? ""
-                          : amounts.ratio(best.weakest().ratio())));
+                      best == null ? "" : amounts.ratio(best.check(e.getKey()).ratio())));
             });
     return new Ways(summary(plan), ranked, out, plan.notes());
   }

@@ -38,7 +38,7 @@ class DemoPlanTest {
         .containsOnlyKeys(Verdict.WORKABLE, Verdict.TIGHT, Verdict.NOT_WORKABLE);
     assertThat(p.ranked().get(0).verdict()).isEqualTo(Verdict.WORKABLE);
     assertThat(p.byBindingCheck().keySet())
-        .contains("pull", "hold stability", "clear of Shed", "clear of F1", "anchor A2 at high")
+        .contains("pull", "steering", "clear of Shed", "clear of F1", "anchor A2 at plan")
         .hasSizeGreaterThanOrEqualTo(4);
     assertThat(
             p.ranked().stream()
