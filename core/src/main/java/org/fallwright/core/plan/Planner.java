@@ -23,7 +23,8 @@ import org.fallwright.core.site.Site;
  * candidates' own order, so that the answer is the same on every run.
  */
 public final class Planner {
-  private static final Comparator<Judged> BEST_FIRST =
+  /** The order of a plan's setups. */
+  public static final Comparator<Judged> BEST_FIRST =
       Comparator.comparing(Judged::verdict)
           .thenComparingInt(Judged::failing)
           .thenComparing(Comparator.comparingDouble(Judged::standing).reversed())

@@ -44,6 +44,15 @@ final class Posture {
   final double pw;
 
   Posture(PullCase c, Draw d) {
+    this(c, d, c.tree().crownShift());
+  }
+
+  /**
+   * The tree with its crown aside by another measure than the case's.
+   *
+   * @param crown how far the crown moves the mass centre [m]
+   */
+  Posture(PullCase c, Draw d, Point3 crown) {
     draw = d;
     hinge =
         HingeShape.of(
@@ -64,8 +73,8 @@ final class Posture {
     double leanN = lean * Math.cos(towards);
     double uh = hinge.offsetM();
     wg = d.massCentreM();
-    double ge = wg * leanE + c.tree().crownShift().e();
-    double gn = wg * leanN + c.tree().crownShift().n();
+    double ge = wg * leanE + crown.e();
+    double gn = wg * leanN + crown.n();
     ug = ge * sin + gn * cos - uh;
     vg = ge * cos - gn * sin;
     wa = d.attachM();

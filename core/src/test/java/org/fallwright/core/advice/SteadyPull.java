@@ -13,12 +13,12 @@ import org.fallwright.core.pull.SourceDescription.PlaceKind;
 import org.fallwright.core.pull.Wording;
 
 /** A source that gives one pull, whatever the ground; it holds what it pulls and is captured. */
-final class SteadyPull implements PullSource {
+public final class SteadyPull implements PullSource {
   private static final PullOffer.Limit STEADY =
       new PullOffer.Limit(
           new Wording("steady", "constante"), new Wording("It is steady.", "Es constante."));
 
-  static final PullSources ONLY = () -> List.of(new SteadyPull());
+  public static final PullSources ONLY = () -> List.of(new SteadyPull());
 
   @Override
   public SourceDescription describe() {

@@ -27,22 +27,22 @@ import org.fallwright.core.site.SubjectTree;
  * A level site with one back-leaner at its origin that leans south, a source on a spot 40 m north,
  * and a rated anchor. Nothing is in the way.
  */
-final class TinySite {
+public final class TinySite {
   private static final Gear.End SPLICE =
       new Gear.End(Gear.End.Kind.EYE_SPLICE, new Stated(0.9, "the test"));
 
-  double lowN = 12_000;
-  double highN = 15_000;
-  double leanDeg = 4;
-  Double massKg = 2000.0;
-  double gustMps = 3;
-  Double windTowardDeg;
-  double hingeM = 0.04;
-  double attachM = 8;
-  Position anchor = new Position(0, 40);
+  public double lowN = 12_000;
+  public double highN = 15_000;
+  public double leanDeg = 4;
+  public Double massKg = 2000.0;
+  public double gustMps = 3;
+  public Double windTowardDeg;
+  public double hingeM = 0.04;
+  public double attachM = 8;
+  public Position anchor = new Position(0, 40);
 
   /** Sites from a seed, from easy to hopeless. */
-  static TinySite random(Random r) {
+  public static TinySite random(Random r) {
     TinySite t = new TinySite();
     t.lowN = 3000 + r.nextDouble() * 15_000;
     t.highN = t.lowN + 5000;
@@ -55,7 +55,7 @@ final class TinySite {
     return t;
   }
 
-  Setup direct() {
+  public Setup direct() {
     return new Setup(0, attachM, hingeM, "rope", List.of(), "steady", "pull", "spot", null);
   }
 
@@ -69,7 +69,7 @@ final class TinySite {
     return new Setup(0, attachM, hingeM, "rope", List.of(), "steady", "pull", "point", null);
   }
 
-  Site site() {
+  public Site site() {
     List<Looked> looked = new ArrayList<>();
     for (Looked.What what : Looked.What.values()) {
       looked.add(new Looked(what, Looked.Found.NONE, "the climber"));
