@@ -22,6 +22,9 @@ import org.fallwright.core.units.DisplayUnits;
 
 /** Works out the doubt of the setups of one site. Safe for use by several threads. */
 public final class Doubts {
+  /** A margin is shown to two digits. */
+  private static final double SHOWN = 0.005;
+
   private final Site site;
   private final PullSources sources;
   private final DisplayUnits in;
@@ -78,7 +81,7 @@ public final class Doubts {
     if (r.ratios() == null) {
       throw new IllegalArgumentException(
           "this setup cannot move the tree as it is entered, so there is no margin to doubt: "
-              + r.judged().weakest().why());
+              + r.judged().weakest().why().replaceFirst("\\.$", ""));
     }
     Work work = new Work(r);
     List<Doubt.Bar> bars = new ArrayList<>();
@@ -88,9 +91,12 @@ public final class Doubts {
       if (cancelled.getAsBoolean()) {
         throw new CancellationException();
       }
-      bars.add(work.bar(share.input()));
-      if (share.input().measurable()) {
-        measure.add(work.measure(share.input()));
+      Doubt.Bar bar = work.bar(share.input());
+      if (work.moves(bar)) {
+        bars.add(bar);
+        if (share.input().measurable()) {
+          measure.add(work.measure(share.input()));
+        }
       }
       progress.accept((double) ++done / work.shares.size());
     }
@@ -158,6 +164,12 @@ public final class Doubts {
           words.value(input, may.at(may.high())),
           margin(Otherwise.known(input, may.low())),
           margin(Otherwise.known(input, may.high())));
+    }
+
+    /** Whether an input moves the margin by anything that is shown. */
+    boolean moves(Doubt.Bar b) {
+      return Math.abs(b.marginAtHigh() - b.marginAtLow()) > SHOWN * Math.min(1, margin)
+          || Math.max(b.marginAtHigh(), b.marginAtLow()) - margin > SHOWN;
     }
 
     Doubt.Measure measure(Input input) {

@@ -106,7 +106,7 @@ final class Words {
           in.length(
               r.pull().line().attachHeightM() + r.pull().tree().cutHeightM() + at * s.attachM());
       case BEARING -> in.length(Math.abs(at * s.bearingM())) + (at < 0 ? " left" : " right");
-      case GRIP -> String.format(Locale.ROOT, "%.0f %% of the way up", 100 * at);
+      case GRIP -> at < 0.5 ? "near its least" : "near its most";
     };
   }
 

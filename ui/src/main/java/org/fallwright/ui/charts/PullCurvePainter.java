@@ -10,8 +10,11 @@ import org.fallwright.core.statics.BandPoint;
 import org.fallwright.core.units.DisplayUnits;
 import org.fallwright.ui.text.Messages;
 import org.jfree.chart.axis.NumberAxis;
+import org.jfree.chart.plot.ValueMarker;
 import org.jfree.chart.plot.XYPlot;
 import org.jfree.chart.renderer.xy.DeviationRenderer;
+import org.jfree.chart.ui.RectangleAnchor;
+import org.jfree.chart.ui.TextAnchor;
 import org.jfree.data.xy.YIntervalSeries;
 import org.jfree.data.xy.YIntervalSeriesCollection;
 
@@ -58,8 +61,11 @@ public record PullCurvePainter(Doubt doubt, double sourceLowN, DisplayUnits in, 
     XYPlot plot = new XYPlot(data, taken, pull, renderer);
     plot.setRangeGridlinePaint(Color.LIGHT_GRAY);
     plot.setDomainGridlinePaint(Color.LIGHT_GRAY);
-    plot.addRangeMarker(
-        Chart.line(force.fromSi(sourceLowN), Messages.text("charts.pull.source"), font, true));
+    ValueMarker source =
+        Chart.line(force.fromSi(sourceLowN), Messages.text("charts.pull.source"), font, true);
+    source.setLabelAnchor(RectangleAnchor.TOP_LEFT);
+    source.setLabelTextAnchor(TextAnchor.BOTTOM_LEFT);
+    plot.addRangeMarker(source);
     Chart.clean(plot, Messages.text("charts.pull.title"), font).draw(g, where);
   }
 }
