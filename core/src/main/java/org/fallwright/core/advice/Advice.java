@@ -48,8 +48,9 @@ public record Advice(
     }
     Range.check("rank", rank, 1, plan.ranked().size(), "");
     Judge judge = new Judge(site, sources);
-    Setup setup = plan.ranked().get(rank - 1).setup();
-    Judged judged = judge.judge(setup);
+    // as the plan has it: the leading setups are judged over many trials
+    Judged judged = plan.ranked().get(rank - 1);
+    Setup setup = judged.setup();
     return new Advice(
         rank,
         judged,

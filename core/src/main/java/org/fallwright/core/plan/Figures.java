@@ -34,6 +34,7 @@ package org.fallwright.core.plan;
  * @param stopReadingAt where the load cell sits; empty: none
  * @param sourceEndPerTree tension at the source over tension at the tree, hauling
  * @param runsOnStretch whether the line's own stretch carries the tree to its commit angle
+ * @param sampled whether its percentiles are over trials; else one input at a time
  */
 public record Figures(
     double pullNeededN,
@@ -66,4 +67,5 @@ public record Figures(
     double stopReadingN,
     String stopReadingAt,
     double sourceEndPerTree,
-    boolean runsOnStretch) {}
+    boolean runsOnStretch,
+    boolean sampled) {}

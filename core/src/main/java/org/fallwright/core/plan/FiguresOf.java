@@ -17,7 +17,8 @@ final class FiguresOf {
       Ratios r,
       PullOffer offer,
       boolean leans,
-      Landing.Zones zones) {
+      Landing.Zones zones,
+      boolean sampled) {
     TreeSide t = statics.treeSide();
     double slack = t.takeUpM() - t.shorteningM() - t.workingN() / t.pathNPerM();
     return new Figures(
@@ -52,10 +53,11 @@ final class FiguresOf {
         cell.map(c -> c.least() * r.ceiling().tensionN()).orElse(Double.NaN),
         cell.map(CellLoad::place).orElse(""),
         route.loads().sourceEndPerTree(),
-        t.neededN() / t.pathNPerM() > t.shorteningToCommitM());
+        t.neededN() / t.pathNPerM() > t.shorteningToCommitM(),
+        sampled);
   }
 
-  static Figures unmovable(Route route, TreeSide t, Landing.Zones zones) {
+  static Figures unmovable(Route route, TreeSide t, Landing.Zones zones, boolean sampled) {
     double none = Double.NaN;
     return new Figures(
         none,
@@ -88,6 +90,7 @@ final class FiguresOf {
         none,
         "",
         route.loads().sourceEndPerTree(),
-        false);
+        false,
+        sampled);
   }
 }

@@ -25,10 +25,12 @@ import org.fallwright.core.site.SubjectTree;
 import org.fallwright.core.statics.LineSet;
 import org.fallwright.core.statics.Part;
 import org.fallwright.core.statics.PlanField;
+import org.fallwright.core.statics.PullCase;
 import org.fallwright.core.statics.Ratios;
 import org.fallwright.core.statics.SourceAtTree;
 import org.fallwright.core.statics.Statics;
 import org.fallwright.core.statics.TreeSide;
+import org.fallwright.core.statics.Trial;
 import org.fallwright.core.units.DisplayUnits;
 import org.fallwright.core.zones.OperatorStand;
 
@@ -50,6 +52,7 @@ public final class Judge {
   private final Site site;
 
   private final PullSources sources;
+  private final List<Trial> trials;
   private final RuleSet rules;
   private final DisplayUnits in;
   private final Places places;
@@ -72,7 +75,18 @@ public final class Judge {
    *     set that is not known
    */
   public Judge(Site entered, PullSources sources) {
+    this(entered, sources, null);
+  }
+
+  /**
+   * A judge who takes every percentile over trials instead of one input at a time: slower, and it
+   * decides.
+   *
+   * @param trials ways that the site may really be; null: one input at a time
+   */
+  public Judge(Site entered, PullSources sources, List<Trial> trials) {
     site = entered.atHand().laidOut();
+    this.trials = trials == null ? null : List.copyOf(trials);
     this.sources = sources;
     for (double height : site.offer().attachHeights()) {
       double above = height - site.cut().heightM();
@@ -160,6 +174,23 @@ public final class Judge {
   }
 
   /**
+   * What the source of a setup gives at the tree at its least, by how well tyres or boots grip [N];
+   * no stop is counted.
+   *
+   * @param grips shares of the way from the least grip of the ground to its most, 0 to 1
+   */
+  public List<Double> lowsByGrip(Setup setup, List<Double> grips) {
+    PullSource source = source(setup);
+    PullSource driver = driver(setup);
+    Route route = Route.of(places, setup, source, driver);
+    Reach.Pulled pulled = Reach.Pulled.of(ask(setup, route, source, driver).statics().treeSide());
+    return grips.stream()
+        .map(g -> Reach.of(site, setup, route, pulled, source, driver, s -> Grip.of(s, g)).lowN())
+        .map(low -> low / route.loads().sourceEndPerTree())
+        .toList();
+  }
+
+  /**
    * Every part of the setup, the stem among them, with its strength and its load per newton at the
    * tree; none where the tree cannot be moved.
    */
@@ -176,7 +207,8 @@ public final class Judge {
   StandingGround standingGround(Setup setup) {
     if (!setup.redirects().isEmpty() || setup.driver() != null) {
       throw new IllegalArgumentException(
-          "a margin map is of a source that pulls direct; this setup leads its line over an anchor");
+          "a margin map is of a source that pulls direct; this setup leads its line over an"
+              + " anchor");
     }
     if (site.spot(setup.place()).isEmpty()) {
       throw new IllegalArgumentException(
@@ -387,7 +419,8 @@ public final class Judge {
               r,
               found.offer(),
               found.stopped().leans(),
-              found.zones());
+              found.zones(),
+              trials != null);
       loads = loads(r, tree);
       if (full) {
         notes.addAll(SetupNotes.of(site, in, setup, tree, r, found.offer()));
@@ -395,7 +428,7 @@ public final class Judge {
         notes.addAll(GearNotes.of(site, in, setup, found.parts(), cell));
       }
     } else {
-      figures = FiguresOf.unmovable(found.route(), tree, found.zones());
+      figures = FiguresOf.unmovable(found.route(), tree, found.zones(), trials != null);
     }
     notes.addAll(found.offer().notes());
     Ground ground = full ? landing.ground(setup, found.zones(), found.stand()) : null;
@@ -470,7 +503,11 @@ public final class Judge {
             route.haulOnSite(),
             route.haulLine(),
             sourceNPerM),
-        p -> new Statics(subject.pull(s, route, sourceNPerM)));
+        p -> reckon(subject.pull(s, route, sourceNPerM)));
+  }
+
+  private Statics reckon(PullCase pull) {
+    return trials == null ? new Statics(pull) : new Statics(pull, trials);
   }
 
   /**

@@ -43,17 +43,23 @@ public final class PlanJson {
    * @param cautions cautions that go with every plan
    * @param notChecked what the plan does not look at
    * @param notByPulling the sentence that pulling is not the method here; null where it may be
+   * @param doubt how far the figures of the leading setups can be trusted; may be empty
    */
   public record Header(
-      String program, List<String> cautions, List<String> notChecked, String notByPulling) {
+      String program,
+      List<String> cautions,
+      List<String> notChecked,
+      String notByPulling,
+      List<ObjectNode> doubt) {
     public Header {
       cautions = List.copyOf(cautions);
       notChecked = List.copyOf(notChecked);
+      doubt = List.copyOf(doubt);
     }
 
     /** A header of a plan whose method is not spoken of. */
     public Header(String program, List<String> cautions, List<String> notChecked) {
-      this(program, cautions, notChecked, null);
+      this(program, cautions, notChecked, null, List.of());
     }
   }
 
@@ -93,6 +99,8 @@ public final class PlanJson {
       one.put("why", e.why());
       one.put("when", e.when());
     }
+    ArrayNode doubt = doc.putArray("doubt");
+    header.doubt().forEach(doubt::add);
     texts(doc, "notes", plan.notes());
     texts(doc, "not_checked", header.notChecked());
     texts(doc, "cautions", header.cautions());
@@ -177,6 +185,7 @@ public final class PlanJson {
     o.put("stop_reading_at", known(f.stopReadingAt()));
     number(o, "source_end_per_tree", f.sourceEndPerTree());
     o.put("runs_on_stretch", f.runsOnStretch());
+    o.put("sampled", f.sampled());
   }
 
   private static ObjectNode check(Check c) {
@@ -232,7 +241,8 @@ public final class PlanJson {
     return text == null || text.isBlank() ? null : text;
   }
 
-  static void number(ObjectNode o, String name, double value) {
+  /** Puts a number as the document has them: nine digits, null where it is not finite. */
+  public static void number(ObjectNode o, String name, double value) {
     o.put(name, Double.isFinite(value) ? rounded(value) : null);
   }
 

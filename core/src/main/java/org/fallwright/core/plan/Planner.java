@@ -1,5 +1,7 @@
 package org.fallwright.core.plan;
 
+import java.util.Comparator;
+import java.util.List;
 import java.util.function.BooleanSupplier;
 import java.util.function.DoubleConsumer;
 import org.fallwright.core.pull.PullSources;
@@ -17,6 +19,28 @@ import org.fallwright.core.site.Site;
  * without it.
  */
 public final class Planner {
+  /** The order of a plan's setups. */
+  public static final Comparator<Judged> BEST_FIRST =
+      Comparator.comparing(Judged::verdict)
+          .thenComparingInt(Judged::failing)
+          .thenComparing(Comparator.comparingDouble(Judged::standing).reversed())
+          .thenComparing(j -> j.loads().size())
+          .thenComparing(Judged::standings, Planner::nextWeakest)
+          .thenComparing(j -> j.setup().layDeg());
+
+  /**
+   * Of two lists of standings, lowest first, the one whose next weakest is stronger comes first.
+   */
+  private static int nextWeakest(List<Double> a, List<Double> b) {
+    for (int i = 0; i < Math.min(a.size(), b.size()); i++) {
+      int c = Double.compare(b.get(i), a.get(i));
+      if (c != 0) {
+        return c;
+      }
+    }
+    return Integer.compare(a.size(), b.size());
+  }
+
   private final PullSources sources;
 
   public Planner(PullSources sources) {

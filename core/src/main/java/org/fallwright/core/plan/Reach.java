@@ -2,6 +2,7 @@ package org.fallwright.core.plan;
 
 import java.util.List;
 import java.util.function.DoubleUnaryOperator;
+import java.util.function.UnaryOperator;
 import org.fallwright.core.line.Point3;
 import org.fallwright.core.pull.PullOffer;
 import org.fallwright.core.pull.PullRequest;
@@ -39,6 +40,18 @@ final class Reach {
   /** What the source of the way gives at the end of the pull line. */
   static PullOffer of(
       Site site, Setup way, Route route, Pulled pulled, PullSource source, PullSource driver) {
+    return of(site, way, route, pulled, source, driver, UnaryOperator.identity());
+  }
+
+  /** The same on other ground than the site's, the driver's own too. */
+  static PullOffer of(
+      Site site,
+      Setup way,
+      Route route,
+      Pulled pulled,
+      PullSource source,
+      PullSource driver,
+      UnaryOperator<Surface> ground) {
     Gear.Source gear = site.source(way.source()).orElseThrow();
     PullOffer haul = null;
     if (way.driver() != null) {
@@ -49,22 +62,27 @@ final class Reach {
               new PullRequest(
                   hauls.parameters(),
                   way.driver().mode(),
-                  stand(site, way.driver().place(), route.haul(), route.haulOnSite()),
+                  stand(site, way.driver().place(), route.haul(), route.haulOnSite(), ground),
                   new Pull(pulled.stiffnessNPerM(), ratio, pulled.takeUpM(), null),
                   null,
                   null));
     }
-    return source.offer(request(site, way, route, pulled, haul));
+    return source.offer(request(site, way, route, pulled, haul, ground));
   }
 
   private static PullRequest request(
-      Site site, Setup way, Route route, Pulled pulled, PullOffer haul) {
+      Site site,
+      Setup way,
+      Route route,
+      Pulled pulled,
+      PullOffer haul,
+      UnaryOperator<Surface> ground) {
     Gear.Source gear = site.source(way.source()).orElseThrow();
     Gear.Line line = GearParts.line(site, way);
     return new PullRequest(
         gear.parameters(),
         way.mode(),
-        stand(site, way.place(), route.points(), route.line()),
+        stand(site, way.place(), route.points(), route.line(), ground),
         new Pull(
             pulled.stiffnessNPerM(),
             1,
@@ -85,7 +103,7 @@ final class Reach {
    */
   static DoubleUnaryOperator lowByRise(
       Site site, Setup way, Route route, Pulled pulled, PullSource source) {
-    PullRequest here = request(site, way, route, pulled, null);
+    PullRequest here = request(site, way, route, pulled, null, UnaryOperator.identity());
     Stand at = here.stand();
     return rise -> {
       Stand there =
@@ -98,13 +116,18 @@ final class Reach {
     };
   }
 
-  private static Stand stand(Site site, String place, List<Point3> points, List<LinePoint> onSite) {
+  private static Stand stand(
+      Site site,
+      String place,
+      List<Point3> points,
+      List<LinePoint> onSite,
+      UnaryOperator<Surface> other) {
     Point3 end = points.get(points.size() - 1);
     Point3 before = points.get(points.size() - 2);
     Point3 leg = before.minus(end);
     double rise = Math.asin(leg.up() / leg.length());
     Spot spot = site.spot(place).orElse(null);
-    Surface ground = spot == null ? null : SurfaceTable.of(spot.surface(), spot.wet());
+    Surface ground = spot == null ? null : other.apply(SurfaceTable.of(spot.surface(), spot.wet()));
     Double off = null;
     if (spot != null && spot.headingDeg() != null) {
       double pull = Math.atan2(-leg.e(), -leg.n());

@@ -122,6 +122,43 @@ public record SubjectTree(
     }
   }
 
+  /**
+   * The same tree with its dimensions found otherwise.
+   *
+   * @param dbh [m]
+   * @param atCut diameter inside the bark at the cut [m]; NaN: from DBH and flare
+   * @param height [m]
+   * @param lean [degrees]
+   * @param towards direction of the lean [degrees]
+   */
+  public SubjectTree measuring(
+      double dbh, double atCut, double height, double lean, double towards) {
+    return new SubjectTree(
+        id,
+        species,
+        stump,
+        Quantity.measured(dbh),
+        Double.isNaN(atCut) ? null : Quantity.measured(atCut),
+        diameters,
+        Quantity.measured(height),
+        crownBaseM,
+        crownRadiusM,
+        Quantity.measured(lean),
+        Quantity.measured(towards),
+        massKg,
+        massCentreM,
+        sections,
+        crownShare,
+        crownOffsetM,
+        crownOutline,
+        crownAreaM2,
+        shellM,
+        deadOrDecayed,
+        inLeaf,
+        iceOrWet,
+        massBy);
+  }
+
   private static void oneOf(String field, Object stated, String other, Object alsoStated) {
     if (stated != null && alsoStated != null) {
       throw new IllegalArgumentException(

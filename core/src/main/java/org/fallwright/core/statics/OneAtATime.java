@@ -16,7 +16,7 @@ import org.fallwright.core.reference.Spreads;
  * uniform from 1 to 1.5: mean 1.25, 1.025 and 1.475. A first-order figure; sampling decides for the
  * leading setups where it is done.
  */
-final class OneAtATime {
+final class OneAtATime implements Percentiles {
   /** Standard deviations from the mean to the 95th percentile of a normal quantity. */
   static final double Z = Allowances.PERCENTILE_SDS.value();
 
@@ -66,11 +66,13 @@ final class OneAtATime {
         .toList();
   }
 
-  double p95(ToDoubleFunction<Posture> f) {
+  @Override
+  public double p95(ToDoubleFunction<Posture> f) {
     return edge(f, 1);
   }
 
-  double p5(ToDoubleFunction<Posture> f) {
+  @Override
+  public double p5(ToDoubleFunction<Posture> f) {
     return edge(f, -1);
   }
 

@@ -44,7 +44,16 @@ final class Posture {
   final double pw;
 
   Posture(PullCase c, Draw d) {
-    this(c, d, shape(c, d));
+    this(c, d, shape(c, d), c.tree().crownShift());
+  }
+
+  /**
+   * The tree with its crown aside by another measure than the case's.
+   *
+   * @param crown how far the crown moves the mass centre [m]
+   */
+  Posture(PullCase c, Draw d, Point3 crown) {
+    this(c, d, shape(c, d), crown);
   }
 
   /**
@@ -58,7 +67,8 @@ final class Posture {
         d,
         d.stumpDiameterM() == like.draw.stumpDiameterM() && d.thicknessM() == like.draw.thicknessM()
             ? like.hinge
-            : shape(c, d));
+            : shape(c, d),
+        c.tree().crownShift());
   }
 
   private static HingeShape shape(PullCase c, Draw d) {
@@ -73,7 +83,7 @@ final class Posture {
         c.cut().wedges());
   }
 
-  private Posture(PullCase c, Draw d, HingeShape shape) {
+  private Posture(PullCase c, Draw d, HingeShape shape, Point3 crown) {
     draw = d;
     hinge = shape;
     double lay = Math.toRadians(c.layDeg());
@@ -85,8 +95,8 @@ final class Posture {
     double leanN = lean * Math.cos(towards);
     double uh = hinge.offsetM();
     wg = d.massCentreM();
-    double ge = wg * leanE + c.tree().crownShift().e();
-    double gn = wg * leanN + c.tree().crownShift().n();
+    double ge = wg * leanE + crown.e();
+    double gn = wg * leanN + crown.n();
     ug = ge * sin + gn * cos - uh;
     vg = ge * cos - gn * sin;
     wa = d.attachM();

@@ -1,5 +1,9 @@
 package org.fallwright.core.statics;
 
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.Optional;
 import org.fallwright.core.reference.Allowances;
 import org.fallwright.core.tree.StemTaper;
 
@@ -13,7 +17,7 @@ public final class Statics {
 
   private final PullCase c;
   private final Posture nominal;
-  private final OneAtATime spread;
+  private final Percentiles spread;
   private final double bend;
   private final LettingGo lettingGo;
   private final TreeSide side;
@@ -27,10 +31,20 @@ public final class Statics {
    */
   private record LettingGo(double laterN, double atOnceN, double later) {}
 
+  /** With the spreads one input at a time. */
   public Statics(PullCase c) {
+    this(c, new OneAtATime(c));
+  }
+
+  /** With the spreads as the trials have them. */
+  public Statics(PullCase c, List<Trial> trials) {
+    this(c, new Sampled(c, trials));
+  }
+
+  private Statics(PullCase c, Percentiles spread) {
     this.c = c;
+    this.spread = spread;
     nominal = new Posture(c, Draw.nominal(c));
-    spread = new OneAtATime(c);
     StemTaper taper = c.tree().taper();
     bend = PathStiffness.bend(c, taper);
     side = reckon(taper);
@@ -62,6 +76,15 @@ public final class Statics {
         side.movable() ? side.over(PathStiffness.of(other, bend), line.slackM()) : side);
   }
 
+  private OneAtATime oneAtATime() {
+    return spread instanceof OneAtATime o ? o : new OneAtATime(c);
+  }
+
+  /** What each trial says; empty where the spreads are one input at a time. */
+  public Optional<EachTrial> eachTrial() {
+    return spread instanceof Sampled s ? Optional.of(new EachTrial(c, s, side)) : Optional.empty();
+  }
+
   /** What the tree asks. */
   public TreeSide treeSide() {
     return side;
@@ -69,7 +92,7 @@ public final class Statics {
 
   /** What stands behind it, to be worked again. */
   public Worked worked() {
-    return new Worked(c, spread, side);
+    return new Worked(c, oneAtATime(), side);
   }
 
   private TreeSide reckon(StemTaper taper) {
@@ -100,6 +123,9 @@ public final class Statics {
         Math.max(0, Math.max(needed, spread.p95(p -> ForceBalance.need(p, -p.sitBack()))));
     double hold = Math.max(0, spread.p95(ForceBalance::hold));
     double working = Math.max(plan, hold);
+    if (!Double.isFinite(working)) {
+      return unmovable(Status.LEVER_LOST, commit, end, leverMin, -back, Double.NaN);
+    }
     double rest = spread.p95(ForceBalance::rest);
     PathStiffness stiff = PathStiffness.of(c, bend);
     StemStrength stem = StemStrength.of(c, taper);
@@ -211,9 +237,16 @@ public final class Statics {
   }
 
   private double crushing(double working, double rise) {
-    double massHigh = 1 + OneAtATime.Z * c.spread().massRel();
-    double push = nominal.weightN * massHigh + (rise > 0 ? working * Math.sin(rise) : 0);
-    return push / (c.wood().crushPa() * nominal.hinge.steerWidthM() * nominal.hinge.thicknessM());
+    return crushing(c, nominal, nominal.weightN * massHigh(), working, rise);
+  }
+
+  static double crushing(PullCase c, Posture p, double weight, double working, double rise) {
+    double push = weight + (rise > 0 ? working * Math.sin(rise) : 0);
+    return push / (c.wood().crushPa() * p.hinge.steerWidthM() * p.hinge.thicknessM());
+  }
+
+  private double massHigh() {
+    return 1 + OneAtATime.Z * c.spread().massRel();
   }
 
   /**
@@ -222,14 +255,9 @@ public final class Statics {
    * @param captured whether the far end of the line stays where it is
    */
   public Holding holding(boolean captured) {
-    double back = nominal.sitBack();
     double k = captured ? side.lineNPerM() : 0;
     double kp = captured ? side.pathNPerM() : 0;
-    double massHigh = 1 + OneAtATime.Z * c.spread().massRel();
-    double pendulum =
-        nominal.weightN * massHigh * (nominal.wg * Math.cos(-back) - nominal.ug * Math.sin(-back));
-    double lever = nominal.lever(-back);
-    double stability = (k * lever * lever - side.holdN() * leverSlope(-back)) / pendulum;
+    double stability = stability(nominal, nominal.weightN * massHigh(), k, side.holdN());
     double top = lettingGo.laterN() + kp * (nominal.leg(0) - nominal.leg(lettingGo.later()));
     Start start =
         side.holdN() < lettingGo.atOnceN()
@@ -246,15 +274,23 @@ public final class Statics {
         phi);
   }
 
+  /** (K·ℓ² − hold·dℓ/dφ) ÷ (m·g·(w_g·cos φ − u_g·sin φ)), sat back. */
+  static double stability(Posture p, double weight, double lineNPerM, double hold) {
+    double phi = -p.sitBack();
+    double pendulum = weight * (p.wg * Math.cos(phi) - p.ug * Math.sin(phi));
+    double lever = p.lever(phi);
+    return (lineNPerM * lever * lever - hold * leverSlope(p, phi)) / pendulum;
+  }
+
   /** dℓ/dφ [m/rad], from ℓ = N/L with the derivatives of both. */
-  private double leverSlope(double phi) {
-    double u = nominal.ua(phi);
-    double w = nominal.wa(phi);
-    double leg = nominal.leg(phi);
-    double moment = w * nominal.pu - u * nominal.pw;
+  private static double leverSlope(Posture p, double phi) {
+    double u = p.ua(phi);
+    double w = p.wa(phi);
+    double leg = p.leg(phi);
+    double moment = w * p.pu - u * p.pw;
     // du/dφ = w and dw/dφ = −u
-    double dMoment = -u * nominal.pu - w * nominal.pw;
-    double dLeg = (-(nominal.pu - u) * w + (nominal.pw - w) * u) / leg;
+    double dMoment = -u * p.pu - w * p.pw;
+    double dLeg = (-(p.pu - u) * w + (p.pw - w) * u) / leg;
     return dMoment / leg - moment * dLeg / (leg * leg);
   }
 
@@ -271,10 +307,38 @@ public final class Statics {
   }
 
   /**
+   * What the line must bear as it is taken in, the tree as entered and between its 5th and 95th
+   * percentile over the trials; empty where the spreads are one input at a time.
+   */
+  public List<BandPoint> needBand() {
+    EachTrial each = eachTrial().orElse(null);
+    if (each == null || !side.movable()) {
+      return List.of();
+    }
+    double back = -nominal.sitBack();
+    List<BandPoint> band = new ArrayList<>();
+    double[] needs = new double[each.count()];
+    for (int i = 0; i < Movement.ANGLES; i += BandPoint.EVERY) {
+      double phi = Movement.angle(back, side.endRad(), i);
+      for (int j = 0; j < needs.length; j++) {
+        needs[j] = Math.max(0, each.needN(j, phi));
+      }
+      Arrays.sort(needs);
+      band.add(
+          new BandPoint(
+              c.line().slackM() + nominal.leg(back) - nominal.leg(phi),
+              Sampled.percentile(needs, 0.05),
+              Math.max(0, ForceBalance.need(nominal, phi)),
+              Sampled.percentile(needs, 0.95)));
+    }
+    return band;
+  }
+
+  /**
    * Rise of the pull to plan for that each entered quantity alone brings [N], as {@link
    * Draw#NAMES}.
    */
   public double[] planRises() {
-    return spread.rises(p -> ForceBalance.need(p, -p.sitBack()));
+    return oneAtATime().rises(p -> ForceBalance.need(p, -p.sitBack()));
   }
 }

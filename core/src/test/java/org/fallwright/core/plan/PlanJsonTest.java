@@ -217,7 +217,8 @@ class PlanJsonTest {
   void whatIsSaidOfTheMethodStandsInTheHead() throws IOException {
     assertThat(doc.path("not_by_pulling").isNull()).isTrue();
     PlanJson.Header header =
-        new PlanJson.Header("9.9.9", List.of(), List.of(), "Pulling is not the method here.");
+        new PlanJson.Header(
+            "9.9.9", List.of(), List.of(), "Pulling is not the method here.", List.of());
     JsonNode told = read(PlanJson.write(site, plan, header));
     assertThat(told.path("not_by_pulling").asText()).isEqualTo("Pulling is not the method here.");
     assertThat(schema().validate(told.toString(), InputFormat.JSON)).isEmpty();
@@ -300,7 +301,8 @@ class PlanJsonTest {
               {"type": "rated", "id": "R2",
                "place": {"at": [6, 34], "ground_m": 0, "fix": "tapes", "stated_error_m": null},
                "sling_height_m": 1, "rejected": null, "land": null,
-               "breaking_load_N": 8000000, "vouched_by": "A"}""");
+               "breaking_load_N": 8000000, "vouched_by": "A"}\
+              """);
           ((ObjectNode) s.get("offer")).put("redirects", 1);
           ObjectNode gear = (ObjectNode) s.get("gear");
           gear.putNull("load_cell");
@@ -310,13 +312,15 @@ class PlanJsonTest {
               "sources",
               """
               {"id": "tackle", "plugin": "doubled", "places": ["R1"], "drivers": ["steady"],
-               "driver_places": ["R2"], "parameters": {}}""");
+               "driver_places": ["R2"], "parameters": {}}\
+              """);
           TinySite.add(
               gear,
               "sources",
               """
               {"id": "capstan", "plugin": "capstan", "places": ["R1"], "drivers": [],
-               "driver_places": [], "parameters": {}}""");
+               "driver_places": [], "parameters": {}}\
+              """);
         });
   }
 

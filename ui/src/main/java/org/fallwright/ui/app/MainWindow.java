@@ -43,6 +43,7 @@ public final class MainWindow extends JFrame {
           });
   private final NewestWins reading = new NewestWins(worker, SwingUtilities::invokeLater);
   private final NewestWins planning = new NewestWins(worker, SwingUtilities::invokeLater);
+  private final NewestWins doubting = new NewestWins(worker, SwingUtilities::invokeLater);
   private final Desk desk;
   private final Saving saving;
 
@@ -68,6 +69,7 @@ public final class MainWindow extends JFrame {
           public void windowClosed(WindowEvent e) {
             planning.cancel();
             reading.cancel();
+            doubting.cancel();
             worker.shutdownNow();
             desk.plan().close();
           }
@@ -162,6 +164,16 @@ public final class MainWindow extends JFrame {
         });
   }
 
+  /** Works out how far the chosen way can be trusted, in a window of its own. */
+  void doubt() {
+    if (open.chosen().isEmpty()) {
+      JOptionPane.showMessageDialog(this, Messages.text("doubt.nothing"));
+      return;
+    }
+    Site site = open.site().orElseThrow().in(open.display());
+    new DoubtWindow(this, wiring.planning(), doubting, site, open.chosen().get()).setVisible(true);
+  }
+
   void otherLook() {
     Look other = desk.look().other();
     other.use();
@@ -242,7 +254,7 @@ public final class MainWindow extends JFrame {
         });
   }
 
-  private static String sentence(Exception cause) {
+  static String sentence(Exception cause) {
     return cause.getMessage() == null || cause.getMessage().isBlank()
         ? Messages.text("failure.unnamed", cause.getClass().getSimpleName())
         : cause.getMessage();

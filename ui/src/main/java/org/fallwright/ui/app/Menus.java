@@ -40,6 +40,7 @@ final class Menus extends JMenuBar {
     JMenu ways = menu("menu.ways", 'W');
     item(ways, "menu.next-way", "alt DOWN", () -> window.desk().ways().step(1));
     item(ways, "menu.former-way", "alt UP", () -> window.desk().ways().step(-1));
+    item(ways, "menu.doubt", "F8", window::doubt);
 
     JMenu help = menu("menu.help", 'H');
     item(help, "menu.cautions", "F1", window::cautions);

@@ -6,7 +6,7 @@ import java.nio.file.Path;
 import java.util.concurrent.Callable;
 import org.fallwright.core.advice.Advice;
 import org.fallwright.core.advice.AdviceJson;
-import org.fallwright.core.plan.Planner;
+import org.fallwright.core.doubt.Doubted;
 import org.fallwright.core.plan.Verdict;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.store.SiteFile;
@@ -63,7 +63,7 @@ final class AdviseCommand implements Callable<Integer> {
     PrintWriter out = spec.commandLine().getOut();
     try (PluginFolder sources = PluginFolder.open(plugins, program)) {
       Site site = SiteFile.read(file);
-      Advice advice = Advice.of(site, sources, new Planner(sources).plan(site), rank);
+      Advice advice = Advice.of(site, sources, Doubted.plan(site, sources), rank);
       if (json) {
         out.print(new String(AdviceJson.write(site, advice, program), StandardCharsets.UTF_8));
       } else {

@@ -5,9 +5,9 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.Locale;
 import org.fallwright.core.advice.AdviceJson;
+import org.fallwright.core.doubt.Doubted;
 import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.Plan;
-import org.fallwright.core.plan.Planner;
 import org.fallwright.core.plan.Setup;
 import org.fallwright.core.pull.PullSources;
 import org.fallwright.core.site.Site;
@@ -31,7 +31,7 @@ abstract class AnswerCommand extends Subcommand {
   /** What the answer is worked out from. */
   record Asked(Path file, Site site, PullSources sources) {
     Plan plan() {
-      return new Planner(sources).plan(site);
+      return Doubted.plan(site, sources);
     }
   }
 

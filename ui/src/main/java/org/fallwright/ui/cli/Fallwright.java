@@ -120,6 +120,7 @@ public final class Fallwright implements Runnable {
             .addSubcommand(new SourcesCommand(home))
             .addSubcommand(new AdviseCommand(home.plugins(), home.version()))
             .addSubcommand(new WhyCommand(home))
+            .addSubcommand(new DoubtCommand(home))
             .addSubcommand(new ChangeCommand(home))
             .addSubcommand(new CompareCommand(home))
             .addSubcommand(new TradeOffCommand(home))

@@ -3,9 +3,10 @@ package org.fallwright.ui.cli;
 import java.io.IOException;
 import java.nio.file.Path;
 import org.fallwright.core.advice.NotByPulling;
+import org.fallwright.core.doubt.DoubtJson;
+import org.fallwright.core.doubt.Doubted;
 import org.fallwright.core.plan.Plan;
 import org.fallwright.core.plan.PlanJson;
-import org.fallwright.core.plan.Planner;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.store.SiteFile;
 import org.fallwright.core.store.SiteFileException;
@@ -29,7 +30,7 @@ record Planned(Home home, Path file, Site site, Plan plan) {
 
   static Planned of(Home home, Path file, Site site) {
     try (PluginFolder sources = PluginFolder.open(home.plugins(), home.version())) {
-      return new Planned(home, file, site, new Planner(sources).plan(site));
+      return new Planned(home, file, site, Doubted.plan(site, sources));
     } catch (IllegalArgumentException e) {
       throw new Refused(file.getFileName() + ": " + e.getMessage());
     }
@@ -44,14 +45,17 @@ record Planned(Home home, Path file, Site site, Plan plan) {
   }
 
   byte[] json() {
-    return PlanJson.write(
-        site,
-        plan,
-        new PlanJson.Header(
-            home.version(),
-            Cautions.ALWAYS,
-            Cautions.LEFT_OUT,
-            NotByPulling.of(plan).map(NotByPulling::sentence).orElse(null)));
+    try (PluginFolder sources = PluginFolder.open(home.plugins(), home.version())) {
+      return PlanJson.write(
+          site,
+          plan,
+          new PlanJson.Header(
+              home.version(),
+              Cautions.ALWAYS,
+              Cautions.LEFT_OUT,
+              NotByPulling.of(plan).map(NotByPulling::sentence).orElse(null),
+              DoubtJson.of(site, sources, plan)));
+    }
   }
 
   /** The sheet of a setup, as the kind of file that the name's end says. */

@@ -2,7 +2,9 @@ package org.fallwright.ui.task;
 
 import java.util.function.BooleanSupplier;
 import java.util.function.DoubleConsumer;
+import org.fallwright.core.doubt.Doubt;
 import org.fallwright.core.plan.Plan;
+import org.fallwright.core.plan.Setup;
 import org.fallwright.core.site.Site;
 
 /** Plans a site; called off the event thread. */
@@ -21,5 +23,14 @@ public interface Planning {
    */
   default Plan again(Site site, Plan plan) {
     return plan;
+  }
+
+  /**
+   * How far the figures of one setup can be trusted; called off the event thread.
+   *
+   * @throws IllegalArgumentException one sentence, where there is nothing to doubt
+   */
+  default Doubt doubt(Site site, Setup setup, DoubleConsumer progress, BooleanSupplier cancelled) {
+    throw new IllegalArgumentException("the doubt cannot be worked out here");
   }
 }
