@@ -15,8 +15,8 @@ import org.fallwright.core.plan.Judged;
 import org.fallwright.core.site.Fix;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
-import org.fallwright.maps.tiles.TileStore;
 import org.fallwright.ui.document.OpenSite;
+import org.fallwright.ui.home.SiteMaps;
 import org.fallwright.ui.map.GroundPainter;
 import org.fallwright.ui.map.Palette;
 import org.fallwright.ui.map.PictureDate;
@@ -85,12 +85,13 @@ final class Desk extends JPanel {
     showAll();
   }
 
-  /** Shows a site on its picture's tiles; null: blank ground. */
-  void open(Site site, TileStore tiles) {
-    picture = tiles != null;
-    plan.show(site, tiles);
+  /** Shows a site on its pictures. */
+  void open(Site site, SiteMaps.Opened pictures) {
+    picture = pictures.ground() != null;
+    plan.show(site, pictures.ground(), pictures.fault());
+    plan.onFault(this::pictureWords);
     scale();
-    status.picture(PictureDate.words(site, picture));
+    pictureWords();
     redraw();
   }
 
@@ -158,12 +159,16 @@ final class Desk extends JPanel {
     Palette palette = look.palette();
     entered.show(open.site().map(s -> Entered.of(s, amounts)).orElse(null), palette);
     status.progress(open.progress());
-    status.picture(open.site().map(s -> PictureDate.words(s, picture)).orElse(" "));
+    pictureWords();
     status.next(NextThing.of(open));
     answer();
     chosenShown();
     scale();
     redraw();
+  }
+
+  private void pictureWords() {
+    status.picture(open.site().map(s -> PictureDate.words(s, plan.pictureFault())).orElse(" "));
   }
 
   private void chosenShown() {

@@ -16,8 +16,8 @@ import javax.swing.JOptionPane;
 import javax.swing.SwingUtilities;
 import org.fallwright.core.plan.Plan;
 import org.fallwright.core.site.Site;
-import org.fallwright.maps.tiles.TileStore;
 import org.fallwright.ui.document.OpenSite;
+import org.fallwright.ui.home.SiteMaps;
 import org.fallwright.ui.task.NewestWins;
 import org.fallwright.ui.text.Messages;
 import org.slf4j.Logger;
@@ -77,13 +77,13 @@ public final class MainWindow extends JFrame {
     reading.start(
         (progress, cancelled) -> {
           Site site = wiring.sites().read(file);
-          TileStore tiles = wiring.pictures().open(site, file);
-          return new Read(site, tiles);
+          SiteMaps.Opened pictures = wiring.pictures().open(site, file);
+          return new Read(site, pictures);
         },
         new Telling<Read>() {
           @Override
           public void done(Read read) {
-            show(read.site(), read.tiles(), file);
+            show(read.site(), read.pictures(), file);
           }
 
           @Override
@@ -165,12 +165,12 @@ public final class MainWindow extends JFrame {
     return desk;
   }
 
-  private record Read(Site site, TileStore tiles) {}
+  private record Read(Site site, SiteMaps.Opened pictures) {}
 
-  private void show(Site site, TileStore tiles, Path file) {
+  private void show(Site site, SiteMaps.Opened pictures, Path file) {
     setTitle(Messages.text("window.title.site", site.name()));
     open.open(file, site);
-    desk.open(site, tiles);
+    desk.open(site, pictures);
     plan(site);
   }
 

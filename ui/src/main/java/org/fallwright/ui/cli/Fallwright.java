@@ -129,6 +129,7 @@ public final class Fallwright implements Runnable {
             .addSubcommand(new SpeciesCommand())
             .addSubcommand(new FiguresCommand())
             .addSubcommand(new MeasureCommand())
+            .addSubcommand(BasemapCommand.line(home))
             .addSubcommand(new OpenCommand(home, desktop))
             .addSubcommand(new DemoCommand(home, desktop));
     line.getCommandSpec().version("Fallwright " + home.version());
