@@ -147,6 +147,27 @@ public final class TiffRaster implements Raster {
     Rectangle area =
         new Rectangle(column * blockWidth, row * blockHeight, blockWidth, blockHeight)
             .intersection(new Rectangle(layout.width(), layout.height()));
+    int[] pixels = new int[blockWidth * blockHeight];
+    // a strip at a time: the library mixes up some strips that are read together
+    int step = layout.uncompressed() ? blockHeight : layout.pieceHeight();
+    boolean anything = false;
+    boolean opaque = false;
+    for (int y = 0; y < area.height; y += step) {
+      Rectangle part =
+          new Rectangle(area.x, area.y + y, area.width, Math.min(step, area.height - y));
+      fill(decoded(part), pixels, y);
+    }
+    for (int p : pixels) {
+      anything |= (p & 0xffffff) != 0 && p >>> 24 != 0;
+      opaque |= p >>> 24 != 0;
+    }
+    if (!anything && opaque) {
+      black++;
+    }
+    return anything ? pixels : new int[0];
+  }
+
+  private BufferedImage decoded(Rectangle area) throws IOException {
     boolean[] cut = new boolean[1];
     BufferedImage image;
     try {
@@ -163,9 +184,7 @@ public final class TiffRaster implements Raster {
     if (cut[0]) {
       throw damaged(area, null);
     }
-    int[] pixels = new int[blockWidth * blockHeight];
-    boolean anything = fill(image, pixels);
-    return anything ? pixels : new int[0];
+    return image;
   }
 
   private IOException damaged(Rectangle area, Exception cause) {
@@ -180,8 +199,8 @@ public final class TiffRaster implements Raster {
         cause);
   }
 
-  /** Copies an image into the upper left of a block; false if it is black all over. */
-  private boolean fill(BufferedImage image, int[] pixels) {
+  /** Copies an image into a block, at its left edge from a row on. */
+  private void fill(BufferedImage image, int[] pixels, int from) {
     ColorModel model = image.getColorModel();
     int bands = image.getRaster().getNumBands();
     boolean direct =
@@ -189,24 +208,16 @@ public final class TiffRaster implements Raster {
             && model.getComponentSize(0) == 8
             && (bands < 3 || model.getColorSpace().getType() == ColorSpace.TYPE_RGB);
     int width = image.getWidth();
-    int[] row = new int[width * Math.max(bands, 1)];
-    boolean anything = false;
-    boolean opaque = false;
+    int[] row = new int[width * bands];
     for (int y = 0; y < image.getHeight(); y++) {
       if (direct) {
         image.getRaster().getPixels(0, y, width, 1, row);
       }
       for (int x = 0; x < width; x++) {
-        int argb = direct ? pixel(row, x * bands, bands) : image.getRGB(x, y);
-        anything |= (argb & 0xffffff) != 0 && argb >>> 24 != 0;
-        opaque |= argb >>> 24 != 0;
-        pixels[y * blockWidth + x] = argb;
+        pixels[(from + y) * blockWidth + x] =
+            direct ? pixel(row, x * bands, bands) : image.getRGB(x, y);
       }
     }
-    if (!anything && opaque) {
-      black++;
-    }
-    return anything;
   }
 
   private int pixel(int[] row, int at, int bands) {

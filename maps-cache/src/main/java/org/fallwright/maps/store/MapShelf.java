@@ -166,7 +166,6 @@ public record MapShelf(Path folder) {
     } catch (IOException | UncheckedIOException e) {
       throw new IOException("base map " + held.place + " cannot be removed", e);
     }
-    Files.deleteIfExists(held.place.resolveSibling("." + name + ".lock"));
     return held.bytes;
   }
 

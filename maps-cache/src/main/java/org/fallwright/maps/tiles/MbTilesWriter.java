@@ -2,8 +2,8 @@ package org.fallwright.maps.tiles;
 
 import java.io.IOException;
 import java.nio.channels.FileChannel;
-import java.nio.channels.FileLock;
-import java.nio.channels.OverlappingFileLockException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.FileSystemException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
@@ -15,6 +15,9 @@ import java.sql.SQLException;
 import java.sql.Statement;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.Set;
+import java.util.UUID;
+import java.util.concurrent.ConcurrentHashMap;
 import org.fallwright.core.units.Range;
 import org.fallwright.maps.frame.LatLon;
 import org.fallwright.maps.frame.WebMercator;
@@ -26,13 +29,19 @@ import org.sqlite.SQLiteErrorCode;
  * passing name, {@code ….part}, and put there by {@link #finish}, in place of a set of that name.
  * Closed unfinished, it leaves nothing behind, unless it was begun as one to be taken up again.
  *
- * <p>One process at a time: a file {@code .….lock} beside it, which stays, is locked meanwhile.
+ * <p>One process at a time: a file in the folder for passing files is locked meanwhile.
  */
 public final class MbTilesWriter implements AutoCloseable {
   /** Free space that is never filled up [bytes]; planning allowance. */
   private static final long KEPT_FREE = 50_000_000;
 
   private static final String MARK = "fallwright_import";
+
+  /**
+   * Sets being written by this process: closing any opening of a locked file would let go of the
+   * lock that another opening of the same process holds.
+   */
+  private static final Set<Path> WRITING = ConcurrentHashMap.newKeySet();
 
   private final Path file;
   private final Path building;
@@ -79,7 +88,7 @@ public final class MbTilesWriter implements AutoCloseable {
         write(about, format, mark);
         connection.commit();
       }
-      insert = connection.prepareStatement("INSERT OR REPLACE INTO tiles VALUES (?, ?, ?, ?)");
+      insert = connection.prepareStatement("INSERT INTO tiles VALUES (?, ?, ?, ?)");
       query =
           connection.prepareStatement(
               "SELECT tile_data FROM tiles"
@@ -128,6 +137,10 @@ public final class MbTilesWriter implements AutoCloseable {
       insert.setBytes(4, picture);
       insert.executeUpdate();
     } catch (SQLException e) {
+      if (e.getErrorCode() == SQLiteErrorCode.SQLITE_CONSTRAINT.code) {
+        throw new IOException(
+            "tile " + zoom + "/" + x + "/" + y + " is in base map " + file + " already", e);
+      }
       throw told(e);
     }
   }
@@ -182,7 +195,9 @@ public final class MbTilesWriter implements AutoCloseable {
     } catch (SQLException e) {
       throw new IOException("base map " + building + " could not be closed", e);
     } finally {
-      lock.close();
+      if (lock.isOpen()) {
+        unlock();
+      }
     }
   }
 
@@ -217,24 +232,48 @@ public final class MbTilesWriter implements AutoCloseable {
   }
 
   private static FileChannel locked(Path file) throws IOException {
-    Path at = file.resolveSibling("." + file.getFileName() + ".lock");
-    FileChannel channel;
+    String busy = "base map " + file + " is being written by another run just now";
+    if (!Files.isWritable(parent(file))) {
+      throw new IOException("folder " + parent(file) + " cannot be written to");
+    }
+    Path at = lockOf(file);
+    if (!WRITING.add(at)) {
+      throw new IOException(busy);
+    }
+    FileChannel channel = null;
+    boolean got = false;
     try {
+      Files.createDirectories(at.getParent());
       channel = FileChannel.open(at, StandardOpenOption.CREATE, StandardOpenOption.WRITE);
-    } catch (IOException e) {
-      throw new IOException("folder " + parent(file) + " cannot be written to", e);
+      got = channel.tryLock() != null;
+      if (!got) {
+        throw new IOException(busy);
+      }
+      return channel;
+    } catch (FileSystemException e) {
+      throw new IOException("folder " + at.getParent() + " cannot be written to", e);
+    } finally {
+      if (!got) {
+        WRITING.remove(at);
+        if (channel != null) {
+          channel.close();
+        }
+      }
     }
-    FileLock got;
-    try {
-      got = channel.tryLock();
-    } catch (OverlappingFileLockException e) {
-      got = null;
-    }
-    if (got == null) {
-      channel.close();
-      throw new IOException("base map " + file + " is being written by another run just now");
-    }
-    return channel;
+  }
+
+  private void unlock() throws IOException {
+    lock.close();
+    WRITING.remove(lockOf(file));
+  }
+
+  /** In the folder for passing files, by the set's path: it is never deleted, only locked. */
+  private static Path lockOf(Path file) throws IOException {
+    String path = parent(file).toRealPath().resolve(file.getFileName()).toString();
+    String name = UUID.nameUUIDFromBytes(path.getBytes(StandardCharsets.UTF_8)) + ".lock";
+    String user = System.getProperty("user.name", "").replaceAll("\\W", "_");
+    return Path.of(System.getProperty("java.io.tmpdir"), "fallwright-" + user, name)
+        .toAbsolutePath();
   }
 
   /** The mark of an unfinished set, or null. */

@@ -2,8 +2,10 @@ package org.fallwright.maps.tiles;
 
 import java.awt.image.BufferedImage;
 import java.io.ByteArrayInputStream;
+import java.io.EOFException;
 import java.io.IOException;
 import java.util.Iterator;
+import javax.imageio.IIOException;
 import javax.imageio.ImageIO;
 import javax.imageio.ImageReader;
 import javax.imageio.stream.ImageInputStream;
@@ -47,11 +49,13 @@ public final class TileImage {
           throw new IOException("its picture is cut short or damaged");
         }
         return image;
+      } catch (IIOException | EOFException e) {
+        throw new IOException("its picture is cut short or damaged", e);
       } finally {
         reader.dispose();
       }
     } catch (RuntimeException e) {
-      throw new IOException("its picture is damaged", e);
+      throw new IOException("its picture is cut short or damaged", e);
     }
   }
 }

@@ -4,11 +4,13 @@ import java.awt.geom.Point2D;
 import java.awt.image.BufferedImage;
 import java.io.IOException;
 import java.io.UncheckedIOException;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.UUID;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.units.Range;
 import org.fallwright.maps.frame.SiteFrame;
@@ -264,22 +266,24 @@ final class BasemapAdd extends Subcommand {
 
   /** What makes this run the same as one begun before. */
   private String mark() throws IOException {
-    return String.join(
-        "|",
-        file.toAbsolutePath().normalize().toString(),
-        "" + Files.size(file),
-        Files.getLastModifiedTime(file).toString(),
-        title(),
-        source,
-        taken,
-        "" + epsg,
-        "" + finest,
-        "" + page,
-        site == null ? "" : Planned.read(site).origin().toString(),
-        points.toString(),
-        "" + stretched,
-        "" + length,
-        "" + north);
+    String all =
+        String.join(
+            "|",
+            file.toAbsolutePath().normalize().toString(),
+            "" + Files.size(file),
+            Files.getLastModifiedTime(file).toString(),
+            title(),
+            source,
+            taken,
+            "" + epsg,
+            "" + finest,
+            "" + page,
+            site == null ? "" : Planned.read(site).origin().toString(),
+            points.toString(),
+            "" + stretched,
+            "" + length,
+            "" + north);
+    return UUID.nameUUIDFromBytes(all.getBytes(StandardCharsets.UTF_8)).toString();
   }
 
   private String title() {
