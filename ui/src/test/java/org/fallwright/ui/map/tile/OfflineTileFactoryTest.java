@@ -97,7 +97,7 @@ class OfflineTileFactoryTest {
     Tile tile = onEventThread(() -> factory.getTile(5, 6, 12));
     assertThat(tile.isLoaded()).isFalse();
     assertThat(tile.isLoading()).isFalse();
-    assertThat(factory.store()).isEmpty();
+    assertThat(factory.ground()).isEmpty();
     assertThat(factory.blurredBelow()).isEmpty();
   }
 
