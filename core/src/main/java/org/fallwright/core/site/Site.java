@@ -184,6 +184,11 @@ public record Site(
     return Copy.with(this, "wires", others);
   }
 
+  /** The same site on other pictures; null: blank ground. */
+  public Site withPicture(Picture other) {
+    return Copy.with(this, "picture", other);
+  }
+
   /**
    * The same site with other gear.
    *

@@ -32,6 +32,14 @@ final class Migrations {
     if (site.path("tree") instanceof ObjectNode tree && !tree.has("mass_by")) {
       tree.put("mass_by", "equation");
     }
+    if (site.path("picture") instanceof ObjectNode picture) {
+      absent(picture, "shift_east_m", 0);
+      absent(picture, "shift_north_m", 0);
+      absent(picture, "opacity", 1);
+      if (!picture.has("over")) {
+        picture.putArray("over");
+      }
+    }
     JsonNode gear = site.path("gear");
     objects(gear.path("lines")).forEach(GearOfFormOne::line);
     objects(gear.path("blocks")).forEach(GearOfFormOne::block);
@@ -58,6 +66,12 @@ final class Migrations {
           offer.putNull(range);
         }
       }
+    }
+  }
+
+  private static void absent(ObjectNode in, String field, double value) {
+    if (!in.has(field)) {
+      in.put(field, value);
     }
   }
 

@@ -92,7 +92,7 @@ public final class RandomSites {
         any(Site.Display.values()),
         text(),
         maybe(() -> in(-180, 180)),
-        maybe(() -> new Picture(text(), maybe(this::text), text())),
+        maybe(() -> Picture.of(list(1, 4, i -> layer()))),
         tree(height),
         cut(),
         list(0, 4, i -> target("target " + i)),
@@ -257,6 +257,11 @@ public final class RandomSites {
         maybe(() -> in(0.02, 6)),
         in(0, 0.05),
         flag());
+  }
+
+  private Picture.Layer layer() {
+    return new Picture.Layer(
+        text(), maybe(this::text), text(), in(-200, 200), in(-200, 200), in(0, 1));
   }
 
   private Target target(String id) {

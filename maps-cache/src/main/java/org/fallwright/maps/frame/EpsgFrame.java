@@ -48,7 +48,20 @@ public final class EpsgFrame {
   public static EpsgFrame of(String code) {
     Range.text("coordinate system", code);
     try {
-      CoordinateReferenceSystem crs = CRS.decode(code, true);
+      return of(code, CRS.decode(code, true));
+    } catch (FactoryException e) {
+      throw unknown(code, e);
+    }
+  }
+
+  /**
+   * Takes a system that a file defines itself, x before y.
+   *
+   * @param code what it is called in messages
+   * @throws IllegalArgumentException as above
+   */
+  public static EpsgFrame of(String code, CoordinateReferenceSystem crs) {
+    try {
       if (crs.getCoordinateSystem().getDimension() != 2) {
         throw new IllegalArgumentException(
             "coordinate system " + code + " is not one of east and north alone");
@@ -56,12 +69,16 @@ public final class EpsgFrame {
       MathTransform toEarth = CRS.findMathTransform(crs, DefaultGeographicCRS.WGS84);
       return new EpsgFrame(code, crs.getName().getCode(), toEarth, toEarth.inverse());
     } catch (FactoryException | TransformException e) {
-      throw new IllegalArgumentException(
-          "coordinate system "
-              + code
-              + " is not known, or there is no known way from it to latitude and longitude",
-          e);
+      throw unknown(code, e);
     }
+  }
+
+  private static IllegalArgumentException unknown(String code, Exception cause) {
+    return new IllegalArgumentException(
+        "coordinate system "
+            + code
+            + " is not known, or there is no known way from it to latitude and longitude",
+        cause);
   }
 
   public String code() {

@@ -53,11 +53,15 @@ public final class GroundPainter {
     }
   }
 
-  private final TilePyramid pyramid;
+  private final LayeredGround ground;
   private final SiteFrame frame;
 
   public GroundPainter(TileStore store, SiteFrame frame) {
-    this.pyramid = new TilePyramid(store);
+    this(LayeredGround.of(store), frame);
+  }
+
+  public GroundPainter(LayeredGround ground, SiteFrame frame) {
+    this.ground = Range.present("ground", ground);
     this.frame = Range.present("frame", frame);
   }
 
@@ -77,11 +81,10 @@ public final class GroundPainter {
     double metresPerPixel = 1 / Math.sqrt(Math.abs(planeToDevice.getDeterminant()));
     Range.check("metres per pixel", metresPerPixel, 1e-4, 1e4, "m");
     int wanted = zoomFor(metresPerPixel);
-    TileStore store = pyramid.store();
-    if (wanted < store.minZoom() - TOO_COARSE) {
+    if (wanted < ground.minZoom() - TOO_COARSE) {
       return new Drawn(0, false, 0);
     }
-    int zoom = Math.max(store.minZoom(), Math.min(wanted, store.maxZoom()));
+    int zoom = Math.max(ground.minZoom(), Math.min(wanted, ground.maxZoom()));
 
     Graphics2D on = (Graphics2D) g.create();
     try {
@@ -149,17 +152,20 @@ public final class GroundPainter {
     for (int y = tileOf(pixels.getMinY()); y <= y1; y++) {
       for (int x = tileOf(pixels.getMinX()); x <= x1; x++) {
         int within = Math.floorMod(x, across);
-        Optional<TilePyramid.Ground> ground = pyramid.tile(zoom, within, y);
-        if (ground.isPresent()) {
+        Optional<TilePyramid.Ground> found = ground.tile(zoom, within, y);
+        if (found.isPresent()) {
           AffineTransform place = new AffineTransform(planeToUser);
           place.concatenate(tileToPlane(frame, zoom, within, y));
-          laid.add(new Laid(ground.get().image(), place));
-          coarsest = Math.min(coarsest, ground.get().sourceZoom());
+          laid.add(new Laid(found.get().image(), place));
+          coarsest = Math.min(coarsest, found.get().sourceZoom());
         }
       }
     }
     // first a pixel too large all round, so that rounding leaves no bare line between tiles
-    laid.forEach(tile -> on.drawImage(tile.image, tile.enlarged(), null));
+    // (not where tiles can be seen through, which would then be laid on twice)
+    if (laid.stream().noneMatch(tile -> tile.image.getColorModel().hasAlpha())) {
+      laid.forEach(tile -> on.drawImage(tile.image, tile.enlarged(), null));
+    }
     laid.forEach(tile -> on.drawImage(tile.image, tile.place, null));
     int count = laid.size();
     double source = count == 0 ? 0 : WebMercator.metresPerPixel(frame.origin().latDeg(), coarsest);

@@ -47,7 +47,8 @@ public final class MbTiles implements TileStore {
     this.about = about(stated, connection);
     this.query =
         connection.prepareStatement(
-            "SELECT tile_data FROM tiles WHERE zoom_level = ? AND tile_column = ? AND tile_row = ?");
+            "SELECT tile_data FROM tiles WHERE zoom_level = ? AND tile_column = ? AND tile_row ="
+                + " ?");
   }
 
   /**
@@ -69,9 +70,24 @@ public final class MbTiles implements TileStore {
       closeQuietly(connection, e);
       String why =
           e instanceof SQLException
-              ? "is damaged or no tile set in the MBTiles form"
+              ? needsItsFolder(file)
+                  ? "cannot be read in place: it was left in a state that needs a folder that can"
+                      + " be written to"
+                  : "is damaged or no tile set in the MBTiles form"
               : "cannot be used: " + e.getMessage();
       throw new IOException("base map " + file + " " + why, e);
+    }
+  }
+
+  /** Whether it is a database with a log beside it (bytes 18 and 19), in a read-only folder. */
+  private static boolean needsItsFolder(Path file) {
+    try (var in = Files.newInputStream(file)) {
+      byte[] head = in.readNBytes(20);
+      return head.length == 20
+          && head[18] == 2
+          && !Files.isWritable(file.toAbsolutePath().getParent());
+    } catch (IOException e) {
+      return false;
     }
   }
 
@@ -96,6 +112,22 @@ public final class MbTiles implements TileStore {
       throw new IOException(
           "base map " + file + " is damaged: tile " + zoom + "/" + x + "/" + y + " cannot be read",
           e);
+    }
+  }
+
+  @Override
+  public synchronized void forEach(Each each) throws IOException {
+    try (Statement s = connection.createStatement();
+        ResultSet r =
+            s.executeQuery(
+                "SELECT zoom_level, tile_column, tile_row FROM tiles ORDER BY zoom_level")) {
+      while (r.next()) {
+        int zoom = r.getInt(1);
+        int across = WebMercator.tilesAcross(zoom);
+        each.tile(zoom, r.getInt(2), across - 1 - r.getInt(3));
+      }
+    } catch (SQLException | IllegalArgumentException e) {
+      throw new IOException("base map " + file + " is damaged: its tiles cannot be listed", e);
     }
   }
 

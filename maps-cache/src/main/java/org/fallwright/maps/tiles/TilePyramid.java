@@ -4,12 +4,10 @@ import java.awt.Graphics2D;
 import java.awt.RenderingHints;
 import java.awt.geom.AffineTransform;
 import java.awt.image.BufferedImage;
-import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Optional;
-import javax.imageio.ImageIO;
 import org.fallwright.core.units.Range;
 import org.fallwright.maps.frame.WebMercator;
 import org.slf4j.Logger;
@@ -42,6 +40,7 @@ public final class TilePyramid {
   private final TileStore store;
   private final Map<Key, BufferedImage> pictures = remembering(PICTURES_KEPT);
   private final Map<Key, Boolean> missing = remembering(ANSWERS_KEPT);
+  private volatile String fault;
 
   public TilePyramid(TileStore store) {
     this.store = Range.present("store", store);
@@ -87,22 +86,23 @@ public final class TilePyramid {
     return image;
   }
 
+  /** The first damaged tile met with so far, as one sentence. */
+  public Optional<String> fault() {
+    return Optional.ofNullable(fault);
+  }
+
   private BufferedImage read(Key key, byte[] bytes) {
     try {
-      BufferedImage image = ImageIO.read(new ByteArrayInputStream(bytes));
-      if (image != null) {
-        return sized(image);
-      }
-    } catch (IOException | RuntimeException e) {
+      return sized(TileImage.read(bytes));
+    } catch (IOException e) {
       LOG.debug("tile {}/{}/{}", key.zoom, key.x, key.y, e);
+      String found =
+          "tile %d/%d/%d of base map %s is left out: %s"
+              .formatted(key.zoom, key.x, key.y, store.about().name(), e.getMessage());
+      LOG.warn("{}", found);
+      fault = fault == null ? found : fault;
+      return null;
     }
-    LOG.warn(
-        "the picture of tile {}/{}/{} of base map {} cannot be read",
-        key.zoom,
-        key.x,
-        key.y,
-        store.about().name());
-    return null;
   }
 
   /** The picture with 256 pixels a side and a pixel form that draws fast. */

@@ -19,6 +19,15 @@ public interface TileStore extends AutoCloseable {
    */
   Optional<byte[]> tile(int zoom, int x, int y) throws IOException;
 
+  /** What is done with each tile. */
+  @FunctionalInterface
+  interface Each {
+    void tile(int zoom, int x, int y) throws IOException;
+  }
+
+  /** Goes through all tiles stored, coarsest first. */
+  void forEach(Each each) throws IOException;
+
   @Override
   void close() throws IOException;
 

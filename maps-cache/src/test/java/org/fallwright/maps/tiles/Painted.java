@@ -45,6 +45,14 @@ final class Painted implements TileStore {
   }
 
   @Override
+  public void forEach(Each each) throws IOException {
+    for (String key : tiles.keySet()) {
+      String[] n = key.split("/");
+      each.tile(Integer.parseInt(n[0]), Integer.parseInt(n[1]), Integer.parseInt(n[2]));
+    }
+  }
+
+  @Override
   public void close() {}
 
   /** Four squares: red NW, green NE, blue SW, white SE. */

@@ -18,8 +18,8 @@ import org.fallwright.core.plan.Judged;
 import org.fallwright.core.site.Fix;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
-import org.fallwright.maps.tiles.TileStore;
 import org.fallwright.ui.document.OpenSite;
+import org.fallwright.ui.home.SiteMaps;
 import org.fallwright.ui.map.GroundPainter;
 import org.fallwright.ui.map.Palette;
 import org.fallwright.ui.map.PictureDate;
@@ -95,17 +95,18 @@ final class Desk extends JPanel {
   }
 
   /**
-   * Shows a site on its picture's tiles; null: blank ground.
+   * Shows a site on its pictures.
    *
    * @param from the kit that its gear is from; null: not at hand
    */
-  void open(Site site, TileStore tiles, Kit from) {
+  void open(Site site, SiteMaps.Opened pictures, Kit from) {
     kit = from;
     gear();
-    picture = tiles != null;
-    plan.show(site, tiles);
+    picture = pictures.ground() != null;
+    plan.show(site, pictures.ground(), pictures.fault());
+    plan.onFault(this::pictureWords);
     scale();
-    status.picture(PictureDate.words(site, picture));
+    pictureWords();
     redraw();
   }
 
@@ -184,7 +185,7 @@ final class Desk extends JPanel {
     entered.show(open.site().map(s -> Entered.of(s, amounts)).orElse(null), palette);
     gear();
     status.progress(open.progress());
-    status.picture(open.site().map(s -> PictureDate.words(s, picture)).orElse(" "));
+    pictureWords();
     status.next(NextThing.of(open));
     answer();
     chosenShown();
@@ -194,6 +195,10 @@ final class Desk extends JPanel {
 
   private void gear() {
     gear.show(open.site().map(s -> GearAtHand.of(s, kit, open.display())).orElse(null));
+  }
+
+  private void pictureWords() {
+    status.picture(open.site().map(s -> PictureDate.words(s, plan.pictureFault())).orElse(" "));
   }
 
   private void chosenShown() {

@@ -20,8 +20,8 @@ import org.fallwright.core.plan.Plan;
 import org.fallwright.core.site.LeftBehind;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.store.KitFile;
-import org.fallwright.maps.tiles.TileStore;
 import org.fallwright.ui.document.OpenSite;
+import org.fallwright.ui.home.SiteMaps;
 import org.fallwright.ui.task.NewestWins;
 import org.fallwright.ui.text.Messages;
 import org.slf4j.Logger;
@@ -90,8 +90,8 @@ public final class MainWindow extends JFrame {
     reading.start(
         (progress, cancelled) -> {
           Site site = wiring.sites().read(file);
-          TileStore tiles = wiring.pictures().open(site, file);
-          return new Read(site, tiles, kit(site, file));
+          SiteMaps.Opened pictures = wiring.pictures().open(site, file);
+          return new Read(site, pictures, kit(site, file));
         },
         new Telling<Read>() {
           @Override
@@ -197,7 +197,7 @@ public final class MainWindow extends JFrame {
     return desk;
   }
 
-  private record Read(Site site, TileStore tiles, Kit kit) {}
+  private record Read(Site site, SiteMaps.Opened pictures, Kit kit) {}
 
   /** The kit beside the site; null where it is not there or cannot be read. */
   private static Kit kit(Site site, Path file) {
@@ -211,7 +211,7 @@ public final class MainWindow extends JFrame {
 
   private void show(Read read, Path file) {
     open.open(file, read.site());
-    desk.open(read.site(), read.tiles(), read.kit());
+    desk.open(read.site(), read.pictures(), read.kit());
     title();
     plan(read.site());
   }

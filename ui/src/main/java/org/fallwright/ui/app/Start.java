@@ -5,6 +5,7 @@ import java.nio.file.Path;
 import javax.swing.SwingUtilities;
 import org.fallwright.core.pull.PullSources;
 import org.fallwright.core.store.SiteFile;
+import org.fallwright.ui.home.Home;
 
 /** Opens the desktop with the planner, the site reader and the base maps of an installation. */
 public final class Start {
@@ -23,7 +24,7 @@ public final class Start {
         new Wiring(
             new CorePlanning(sources),
             SiteFile::read,
-            new StoredPictures(baseMaps),
+            StoredPictures.in(Home.ownMaps(), baseMaps),
             demo != null && Files.isRegularFile(demo) ? demo : null);
     SwingUtilities.invokeLater(
         () -> {

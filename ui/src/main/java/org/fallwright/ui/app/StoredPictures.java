@@ -1,33 +1,22 @@
 package org.fallwright.ui.app;
 
-import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import org.fallwright.core.site.Site;
-import org.fallwright.maps.tiles.MbTiles;
-import org.fallwright.maps.tiles.TileStore;
-import org.fallwright.ui.text.Messages;
+import org.fallwright.ui.home.SiteMaps;
 
 /**
- * Pictures as tile files: looked for beside the site file, then among the base maps.
+ * Pictures as tile sets: looked for beside the site file, then among the base maps.
  *
- * @param baseMaps folder of the base maps
+ * @param maps where
  */
-public record StoredPictures(Path baseMaps) implements Wiring.Pictures {
+public record StoredPictures(SiteMaps maps) implements Wiring.Pictures {
+  /** Those of the folders given, in their order. */
+  public static StoredPictures in(Path... baseMaps) {
+    return new StoredPictures(SiteMaps.in(baseMaps));
+  }
+
   @Override
-  public TileStore open(Site site, Path siteFile) throws IOException {
-    if (site.picture() == null) {
-      return null;
-    }
-    Path name = Path.of(site.picture().file());
-    if (name.isAbsolute() || name.getNameCount() != 1) {
-      throw new IOException(Messages.text("picture.not-a-name", site.picture().file()));
-    }
-    for (Path p : new Path[] {siteFile.resolveSibling(name), baseMaps.resolve(name)}) {
-      if (Files.isRegularFile(p)) {
-        return MbTiles.open(p);
-      }
-    }
-    return null;
+  public SiteMaps.Opened open(Site site, Path siteFile) {
+    return maps.open(site, siteFile);
   }
 }

@@ -4,7 +4,7 @@ import java.io.IOException;
 import java.nio.file.Path;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.store.SiteFile;
-import org.fallwright.maps.tiles.TileStore;
+import org.fallwright.ui.home.SiteMaps;
 import org.fallwright.ui.task.Planning;
 
 /**
@@ -37,10 +37,7 @@ public record Wiring(Planning planning, Sites sites, Pictures pictures, Path dem
   /** Finds the tiles of the picture that a site names; called off the event thread. */
   @FunctionalInterface
   public interface Pictures {
-    /**
-     * @return the tiles, or null where the site names no picture or its file is not there
-     * @throws IOException with one sentence, where the file is there and cannot be read
-     */
-    TileStore open(Site site, Path siteFile) throws IOException;
+    /** The tiles of all that could be opened, and what could not. */
+    SiteMaps.Opened open(Site site, Path siteFile);
   }
 }

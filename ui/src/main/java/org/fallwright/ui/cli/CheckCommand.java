@@ -1,5 +1,6 @@
 package org.fallwright.ui.cli;
 
+import java.io.IOException;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Locale;
@@ -16,6 +17,7 @@ import org.fallwright.core.site.Target;
 import org.fallwright.core.site.Wire;
 import org.fallwright.core.units.DisplayUnits;
 import org.fallwright.ui.home.Home;
+import org.fallwright.ui.home.SiteMaps;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Parameters;
 
@@ -82,9 +84,7 @@ final class CheckCommand extends Subcommand {
               .map(w -> w.name().toLowerCase(Locale.ROOT).replace('_', ' '))
               .collect(Collectors.joining(", ")));
     }
-    if (site.picture() != null && home.picture(site, file).isEmpty()) {
-      err().println("Base map " + site.picture().file() + " was not found.");
-    }
+    pictures(site);
     return Exit.DONE;
   }
 
@@ -94,5 +94,19 @@ final class CheckCommand extends Subcommand {
 
   private void row(String name, String what) {
     out().println(String.format(Locale.ROOT, "%-15s %s", name, what));
+  }
+
+  private void pictures(Site site) {
+    SiteMaps.Opened opened = home.maps().open(site, file);
+    if (opened.fault() != null) {
+      err().println(opened.fault());
+    }
+    try {
+      if (opened.ground() != null) {
+        opened.ground().close();
+      }
+    } catch (IOException e) {
+      throw new Refused(e.getMessage() + ".");
+    }
   }
 }

@@ -131,6 +131,7 @@ public final class Fallwright implements Runnable {
             .addSubcommand(new FiguresCommand())
             .addSubcommand(new RulesCommand())
             .addSubcommand(new MeasureCommand())
+            .addSubcommand(BasemapCommand.line(home))
             .addSubcommand(new OpenCommand(home, desktop))
             .addSubcommand(new DemoCommand(home, desktop));
     line.getCommandSpec().version("Fallwright " + home.version());

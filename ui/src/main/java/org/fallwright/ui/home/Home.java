@@ -4,12 +4,9 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.net.URISyntaxException;
-import java.nio.file.Files;
-import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.util.Optional;
 import java.util.Properties;
-import java.util.stream.Stream;
 import org.fallwright.core.site.Site;
 
 /**
@@ -39,22 +36,39 @@ public record Home(Path plugins, Path baseMaps, Path demo, String version) {
     return demo.resolve(DEMO_SITE);
   }
 
-  /** The base map that a site names: beside its file, else among the base maps. */
+  /** Where the pictures of sites are looked for. */
+  public SiteMaps maps() {
+    return SiteMaps.in(ownMaps(), baseMaps);
+  }
+
+  /** The picture under all others that a site names. */
   public Optional<Path> picture(Site site, Path siteFile) {
-    if (site.picture() == null) {
-      return Optional.empty();
-    }
     try {
-      Path name = Path.of(site.picture().file());
-      if (!name.equals(name.getFileName())) {
-        return Optional.empty();
-      }
-      return Stream.of(siteFile.toAbsolutePath().resolveSibling(name), baseMaps.resolve(name))
-          .filter(Files::isRegularFile)
-          .findFirst();
-    } catch (InvalidPathException e) {
+      return site.picture() == null
+          ? Optional.empty()
+          : maps().find(site.picture().file(), siteFile);
+    } catch (IOException e) {
       return Optional.empty();
     }
+  }
+
+  /**
+   * The person's own base maps: a folder that can be written to even where the program's cannot.
+   * The system property {@code fallwright.ownmaps} names another one.
+   */
+  public static Path ownMaps() {
+    String user = System.getProperty("user.home", ".");
+    String local = System.getenv("LOCALAPPDATA");
+    String data = System.getenv("XDG_DATA_HOME");
+    Path usual =
+        local != null
+            ? Path.of(local, "Fallwright", "basemaps")
+            : System.getProperty("os.name", "").startsWith("Mac")
+                ? Path.of(user, "Library", "Application Support", "Fallwright", "basemaps")
+                : data != null
+                    ? Path.of(data, "fallwright", "basemaps")
+                    : Path.of(user, ".local", "share", "fallwright", "basemaps");
+    return folder("fallwright.ownmaps", usual);
   }
 
   private static Path folder(String property, Path usual) {

@@ -9,4 +9,9 @@ public interface GroundPainter {
   GroundPainter NONE = (g, view) -> {};
 
   void paint(Graphics2D g, Viewport view);
+
+  /** What could not be drawn and why, in sentences, known after painting; null: nothing. */
+  default String fault() {
+    return null;
+  }
 }

@@ -16,7 +16,7 @@ import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.fallwright.maps.frame.LatLon;
 import org.fallwright.maps.frame.SiteFrame;
-import org.fallwright.maps.tiles.TileStore;
+import org.fallwright.maps.tiles.LayeredGround;
 import org.fallwright.ui.map.tile.OfflineTileFactory;
 import org.fallwright.ui.text.Messages;
 import org.jxmapviewer.JXMapViewer;
@@ -44,6 +44,8 @@ public final class PlanView extends JXMapViewer {
   private Palette palette = Palette.DAY;
   private Envelope wanted;
   private OfflineTileFactory picture;
+  private String notOpened;
+  private Runnable faulty = () -> {};
   private Consumer<Position> pointed = p -> {};
 
   public PlanView() {
@@ -80,16 +82,39 @@ public final class PlanView extends JXMapViewer {
     getAccessibleContext().setAccessibleName(Messages.text("plan.name"));
   }
 
-  /** Shows a site on its picture's tiles; null: blank ground. The store is closed in the end. */
-  public void show(Site site, TileStore tiles) {
+  /**
+   * Shows a site on its pictures.
+   *
+   * @param tiles the pictures; null: blank ground. They are closed in the end
+   * @param fault what of them could not be opened, in sentences; null: nothing
+   */
+  public void show(Site site, LayeredGround tiles, String fault) {
     close();
+    notOpened = fault;
     earth = new SiteFrame(site.origin());
     if (tiles != null) {
       picture = new OfflineTileFactory(tiles);
       picture.addTileListener(t -> repaint());
+      picture.onFault(
+          () -> {
+            faulty.run();
+            repaint();
+          });
     }
     setTileFactory(new StretchedTiles(picture, StretchedTiles.TILE));
     fit(PlanPainter.extent(site, null));
+  }
+
+  /** What of the pictures is not drawn and why, in sentences; null: nothing. */
+  public String pictureFault() {
+    return notOpened != null || picture == null
+        ? notOpened
+        : picture.fault().map(f -> Messages.text("plan.picture-damaged", f)).orElse(null);
+  }
+
+  /** Who is told when a part of the pictures cannot be read. */
+  public void onFault(Runnable listener) {
+    faulty = listener;
   }
 
   /** Lets the picture's file go. */
@@ -99,7 +124,7 @@ public final class PlanView extends JXMapViewer {
     if (old != null) {
       old.dispose();
       try {
-        old.store().orElseThrow().close();
+        old.ground().orElseThrow().close();
       } catch (Exception e) {
         LOG.warn("Picture not closed", e);
       }
@@ -236,7 +261,7 @@ public final class PlanView extends JXMapViewer {
         graphics,
         getWidth(),
         getHeight(),
-        Arrays.asList(scene, view.transform(), flagged, getFont()),
+        Arrays.asList(scene, view.transform(), flagged, getFont(), pictureFault()),
         g -> drawing(g, view));
   }
 
@@ -251,7 +276,7 @@ public final class PlanView extends JXMapViewer {
     NorthArrow.paint(pen, view, scene.site().declinationDeg(), scene.palette(), corner, 38);
     double base = getHeight() - 12 * u;
     ScaleBar.paint(pen, view, scene.amounts(), scene.palette(), 14 * u, base, 200 * u);
-    String date = PictureDate.words(scene.site(), picture != null);
+    String date = PictureDate.words(scene.site(), pictureFault());
     double left = getWidth() - pen.extent(date).getWidth() - 12 * u;
     pen.text(date, left, base, scene.palette().ink());
   }

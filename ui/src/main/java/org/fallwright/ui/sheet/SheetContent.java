@@ -8,6 +8,7 @@ import java.util.Objects;
 import java.util.Optional;
 import java.util.function.Function;
 import java.util.function.UnaryOperator;
+import java.util.stream.Collectors;
 import org.fallwright.core.advice.NotByPulling;
 import org.fallwright.core.plan.Check;
 import org.fallwright.core.plan.Figures;
@@ -24,6 +25,7 @@ import org.fallwright.core.site.Picture;
 import org.fallwright.core.site.Position;
 import org.fallwright.core.site.Site;
 import org.fallwright.core.units.DisplayUnits;
+import org.fallwright.ui.map.PictureDate;
 import org.fallwright.ui.text.Amounts;
 import org.fallwright.ui.text.SourceText;
 
@@ -150,7 +152,7 @@ record SheetContent(
         j.notes(),
         Cautions.ALWAYS,
         notKnown,
-        pictureFault == null ? picture(site.picture()) : pictureFault);
+        pictureFault == null ? picture(site) : pictureFault);
   }
 
   /** The setup's own sentence, behind the advice on the method where no setup will do. */
@@ -427,14 +429,22 @@ record SheetContent(
             : DisplayUnits.ratio(r);
   }
 
-  private static String picture(Picture p) {
-    return p == null
+  private static String picture(Site site) {
+    return site.picture() == null
         ? "Blank ground: no picture."
-        : "Picture: "
-            + p.source()
-            + ", taken "
-            + Objects.requireNonNullElse(p.taken(), "on a date not known")
+        : site.picture().layers().stream()
+                .map(l -> picture(l, site.display().units()))
+                .collect(Collectors.joining("; over it: ", "Picture: ", ""))
             + ". No survey.";
+  }
+
+  private static String picture(Picture.Layer l, DisplayUnits units) {
+    return l.source()
+        + ", taken "
+        + Objects.requireNonNullElse(l.taken(), "on a date not known")
+        + (l.shiftEastM() == 0 && l.shiftNorthM() == 0
+            ? ""
+            : ", moved " + PictureDate.moved(l, units));
   }
 
   private static boolean blank(String s) {

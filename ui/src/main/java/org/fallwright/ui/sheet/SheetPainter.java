@@ -91,7 +91,8 @@ final class SheetPainter {
     tables.paint(g, pen, tablesTop);
     words(pen, wordsTop);
     pen.rule(left, right, foot - 2);
-    pen.fitted(content.picture(), SMALL, left, foot, right - left);
+    String fault = ground.fault();
+    pen.fitted(fault == null ? content.picture() : fault, SMALL, left, foot, right - left);
   }
 
   /** Title, lines to fill in, verdict with its mark, the sentence; returns the lower edge. */

@@ -17,6 +17,7 @@ import org.fallwright.core.plan.Plan;
 import org.fallwright.core.site.Site;
 import org.fallwright.ui.demo.DemoSite;
 import org.fallwright.ui.document.OpenSite;
+import org.fallwright.ui.home.SiteMaps;
 import org.fallwright.ui.map.PlanPainter;
 import org.fallwright.ui.map.Viewport;
 import org.junit.jupiter.api.Test;
@@ -91,7 +92,7 @@ class DeskTest {
     open.open(null, site);
     desk.setSize(1500, 900);
     layOut(desk);
-    desk.open(site, null, null);
+    desk.open(site, SiteMaps.Opened.NOTHING, null);
     open.planned(plan);
     layOut(desk);
     desk.fit();

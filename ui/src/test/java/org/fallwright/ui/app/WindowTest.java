@@ -133,7 +133,7 @@ class WindowTest {
         new Wiring(
             new CorePlanning(DemoSite.sources()),
             SiteFile::read,
-            new StoredPictures(Path.of("..", "maps-cache", "basemaps")),
+            StoredPictures.in(Path.of("..", "maps-cache", "basemaps")),
             null);
     SwingUtilities.invokeAndWait(
         () -> {

@@ -10,8 +10,8 @@ import java.util.concurrent.RejectedExecutionException;
 import java.util.concurrent.atomic.AtomicInteger;
 import javax.swing.SwingUtilities;
 import org.fallwright.maps.frame.WebMercator;
+import org.fallwright.maps.tiles.LayeredGround;
 import org.fallwright.maps.tiles.TilePyramid;
-import org.fallwright.maps.tiles.TileStore;
 import org.jxmapviewer.viewer.Tile;
 import org.jxmapviewer.viewer.TileFactory;
 import org.jxmapviewer.viewer.TileFactoryInfo;
@@ -19,8 +19,8 @@ import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
 
 /**
- * Tiles for the map widget from a store on this machine, or none at all (blank ground). Never goes
- * to a network, never reads the disk on the event thread.
+ * Tiles for the map widget from base maps on this machine, or none at all (blank ground). Never
+ * goes to a network, never reads the disk on the event thread.
  *
  * <p>{@link #getTile} is called on the event thread while the map is painted: it answers at once,
  * with a tile that is filled later and then told to the tile listeners, on the event thread. Tiles
@@ -32,8 +32,7 @@ public final class OfflineTileFactory extends TileFactory {
   private static final int TILES_KEPT = 600;
   private static final int THREADS = 2;
 
-  private final TileStore store;
-  private final TilePyramid pyramid;
+  private final LayeredGround ground;
   private final ExecutorService readers;
   private final Map<Long, StoredTile> tiles =
       new LinkedHashMap<>(128, 0.75f, true) {
@@ -45,16 +44,17 @@ public final class OfflineTileFactory extends TileFactory {
         }
       };
   private volatile String fault;
+  private volatile Runnable faulty = () -> {};
 
   /**
-   * A factory over a store.
+   * A factory over base maps.
    *
-   * @param store the base map, or null for blank ground
+   * @param ground the base maps, or null for blank ground
    */
-  public OfflineTileFactory(TileStore store) {
+  public OfflineTileFactory(LayeredGround ground) {
     super(
         new TileFactoryInfo(
-            store == null ? "blank ground" : store.about().name(),
+            ground == null ? "blank ground" : ground.name(),
             0,
             WebMercator.DEEPEST,
             WebMercator.DEEPEST,
@@ -65,11 +65,10 @@ public final class OfflineTileFactory extends TileFactory {
             "x",
             "y",
             "z"));
-    this.store = store;
-    this.pyramid = store == null ? null : new TilePyramid(store);
+    this.ground = ground;
     AtomicInteger count = new AtomicInteger();
     this.readers =
-        store == null
+        ground == null
             ? null
             : Executors.newFixedThreadPool(
                 THREADS,
@@ -87,9 +86,14 @@ public final class OfflineTileFactory extends TileFactory {
     return WebMercator.DEEPEST - zoom;
   }
 
-  /** The base map, if there is one. */
-  public Optional<TileStore> store() {
-    return Optional.ofNullable(store);
+  /** The base maps, if there are any. */
+  public Optional<LayeredGround> ground() {
+    return Optional.ofNullable(ground);
+  }
+
+  /** Who is told, on the event thread, when the first part that cannot be read is met. */
+  public void onFault(Runnable listener) {
+    faulty = listener;
   }
 
   /**
@@ -97,7 +101,7 @@ public final class OfflineTileFactory extends TileFactory {
    * empty on blank ground.
    */
   public Optional<Integer> blurredBelow() {
-    return store().map(s -> turned(s.maxZoom()));
+    return ground().map(g -> turned(g.maxZoom()));
   }
 
   /** Why the base map could not be read, as one sentence, if that happened. */
@@ -120,7 +124,7 @@ public final class OfflineTileFactory extends TileFactory {
       tile = new StoredTile(within, y, zoom);
       tiles.put(key, tile);
     }
-    if (pyramid == null || y < 0 || y >= across) {
+    if (ground == null || y < 0 || y >= across) {
       tile.answer(null, false);
     } else {
       startLoading(tile);
@@ -150,25 +154,33 @@ public final class OfflineTileFactory extends TileFactory {
   }
 
   private void load(StoredTile tile) {
-    Optional<TilePyramid.Ground> ground = Optional.empty();
+    Optional<TilePyramid.Ground> found = Optional.empty();
     try {
-      ground = pyramid.tile(turned(tile.getZoom()), tile.getX(), tile.getY());
+      found = ground.tile(turned(tile.getZoom()), tile.getX(), tile.getY());
     } catch (IOException e) {
       if (fault == null) {
         LOG.warn("{}", e.getMessage(), e);
       }
-      fault = e.getMessage();
+      fault(e.getMessage());
     }
-    publish(tile, ground.orElse(null));
+    ground.fault().ifPresent(this::fault);
+    publish(tile, found.orElse(null));
   }
 
-  private void publish(StoredTile tile, TilePyramid.Ground ground) {
+  private void fault(String sentence) {
+    if (fault == null) {
+      fault = sentence;
+      SwingUtilities.invokeLater(faulty);
+    }
+  }
+
+  private void publish(StoredTile tile, TilePyramid.Ground found) {
     SwingUtilities.invokeLater(
         () -> {
-          if (ground == null) {
+          if (found == null) {
             tile.answer(null, false);
           } else {
-            tile.answer(ground.image(), ground.blurred());
+            tile.answer(found.image(), found.blurred());
             fireTileLoadedEvent(tile);
           }
         });

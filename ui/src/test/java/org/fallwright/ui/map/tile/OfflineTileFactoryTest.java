@@ -19,6 +19,7 @@ import javax.swing.JComponent;
 import javax.swing.SwingUtilities;
 import org.fallwright.maps.tiles.About;
 import org.fallwright.maps.tiles.Bounds;
+import org.fallwright.maps.tiles.LayeredGround;
 import org.fallwright.maps.tiles.TileStore;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.Test;
@@ -96,7 +97,7 @@ class OfflineTileFactoryTest {
     Tile tile = onEventThread(() -> factory.getTile(5, 6, 12));
     assertThat(tile.isLoaded()).isFalse();
     assertThat(tile.isLoading()).isFalse();
-    assertThat(factory.store()).isEmpty();
+    assertThat(factory.ground()).isEmpty();
     assertThat(factory.blurredBelow()).isEmpty();
   }
 
@@ -145,25 +146,29 @@ class OfflineTileFactoryTest {
   private OfflineTileFactory factory(Map<String, byte[]> tiles) {
     OfflineTileFactory made =
         new OfflineTileFactory(
-            new TileStore() {
-              @Override
-              public About about() {
-                return new About("test", "", "", "", new Bounds(-180, -85, 180, 85), 9, 10);
-              }
+            LayeredGround.of(
+                new TileStore() {
+                  @Override
+                  public About about() {
+                    return new About("test", "", "", "", new Bounds(-180, -85, 180, 85), 9, 10);
+                  }
 
-              @Override
-              public Optional<byte[]> tile(int zoom, int x, int y) throws IOException {
-                asked.add(zoom + "/" + x + "/" + y);
-                askedBy.add(Thread.currentThread().getName());
-                if (tiles == null) {
-                  throw new IOException("base map test is damaged");
-                }
-                return Optional.ofNullable(tiles.get(zoom + "/" + x + "/" + y));
-              }
+                  @Override
+                  public Optional<byte[]> tile(int zoom, int x, int y) throws IOException {
+                    asked.add(zoom + "/" + x + "/" + y);
+                    askedBy.add(Thread.currentThread().getName());
+                    if (tiles == null) {
+                      throw new IOException("base map test is damaged");
+                    }
+                    return Optional.ofNullable(tiles.get(zoom + "/" + x + "/" + y));
+                  }
 
-              @Override
-              public void close() {}
-            });
+                  @Override
+                  public void forEach(Each each) {}
+
+                  @Override
+                  public void close() {}
+                }));
     made.addTileListener(
         tile -> {
           assertThat(SwingUtilities.isEventDispatchThread()).isTrue();
