@@ -2,13 +2,26 @@ package org.fallwright.plugins.api;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import com.sun.source.doctree.DocCommentTree;
+import com.sun.source.doctree.ParamTree;
+import com.sun.source.tree.ClassTree;
+import com.sun.source.tree.CompilationUnitTree;
+import com.sun.source.tree.Tree;
+import com.sun.source.tree.VariableTree;
+import com.sun.source.util.DocTrees;
+import com.sun.source.util.JavacTask;
+import com.sun.source.util.TreePathScanner;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
+import java.util.Set;
 import java.util.regex.Pattern;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
+import javax.lang.model.element.Modifier;
 import javax.tools.Diagnostic;
 import javax.tools.DiagnosticCollector;
 import javax.tools.JavaCompiler;
@@ -22,10 +35,8 @@ import org.junit.jupiter.api.io.TempDir;
 class ContractJavadocTest {
   private static final String SOURCES = "src/main/java/org/fallwright/";
 
-  /** Its components are described where the record begins, and asked for there. */
+  /** A record's components are described where it begins, and {@link Components} asks there. */
   private static final Pattern COMPACT_CONSTRUCTOR = Pattern.compile("\\s*public \\w+ \\{");
-
-  @TempDir private Path classes;
 
   @Test
   void whatAPullSourceMustAnswerIsDescribed() throws IOException {
@@ -65,33 +76,75 @@ class ContractJavadocTest {
         .containsExactlyInAnyOrder("Rope.java:6", "Rope.java:7", "Rope.java:10", "Rope.java:15");
   }
 
-  private List<String> complaints(Path folder) throws IOException {
+  private static List<String> complaints(Path folder) throws IOException {
     JavaCompiler javac = ToolProvider.getSystemJavaCompiler();
     DiagnosticCollector<JavaFileObject> found = new DiagnosticCollector<>();
+    List<String> undescribed = new ArrayList<>();
     try (StandardJavaFileManager files = javac.getStandardFileManager(found, null, null);
         Stream<Path> in = Files.list(folder)) {
       List<Path> sources = in.filter(p -> p.toString().endsWith(".java")).sorted().toList();
       assertThat(sources).isNotEmpty();
-      javac
-          .getTask(
-              null,
-              files,
-              found,
-              List.of(
-                  "-proc:none",
-                  "-Xdoclint:all/public",
-                  "-Xmaxwarns",
-                  "1000",
-                  "-d",
-                  classes.toString()),
-              null,
-              files.getJavaFileObjectsFromPaths(sources))
-          .call();
+      JavacTask task =
+          (JavacTask)
+              javac.getTask(
+                  null,
+                  files,
+                  found,
+                  List.of("-proc:none", "-Xdoclint:all/public", "-Xmaxwarns", "1000"),
+                  null,
+                  files.getJavaFileObjectsFromPaths(sources));
+      Iterable<? extends CompilationUnitTree> units = task.parse();
+      task.analyze();
+      new Components(DocTrees.instance(task), undescribed).scan(units, null);
     }
-    return found.getDiagnostics().stream()
-        .filter(d -> !repeatsTheRecord(d))
-        .map(ContractJavadocTest::told)
+    return Stream.concat(
+            found.getDiagnostics().stream()
+                .filter(d -> !repeatsTheRecord(d))
+                .map(ContractJavadocTest::told),
+            undescribed.stream())
         .toList();
+  }
+
+  /** Finds record components without a description, which javac's own check passes over. */
+  private static final class Components extends TreePathScanner<Void, Void> {
+    private final DocTrees trees;
+    private final List<String> undescribed;
+
+    Components(DocTrees trees, List<String> undescribed) {
+      this.trees = trees;
+      this.undescribed = undescribed;
+    }
+
+    @Override
+    public Void visitClass(ClassTree type, Void none) {
+      if (type.getKind() == Tree.Kind.RECORD) {
+        Set<String> described = described();
+        for (Tree member : type.getMembers()) {
+          if (member instanceof VariableTree v
+              && !v.getModifiers().getFlags().contains(Modifier.STATIC)
+              && !described.contains(v.getName().toString())) {
+            undescribed.add(place(type) + ": no @param for " + v.getName());
+          }
+        }
+      }
+      return super.visitClass(type, none);
+    }
+
+    private Set<String> described() {
+      DocCommentTree comment = trees.getDocCommentTree(getCurrentPath());
+      return comment == null
+          ? Set.of()
+          : comment.getBlockTags().stream()
+              .filter(t -> t instanceof ParamTree p && !p.getDescription().isEmpty())
+              .map(t -> ((ParamTree) t).getName().toString())
+              .collect(Collectors.toSet());
+    }
+
+    private String place(Tree tree) {
+      CompilationUnitTree unit = getCurrentPath().getCompilationUnit();
+      long at = trees.getSourcePositions().getStartPosition(unit, tree);
+      return name(unit.getSourceFile()) + ":" + unit.getLineMap().getLineNumber(at);
+    }
   }
 
   private static boolean repeatsTheRecord(Diagnostic<? extends JavaFileObject> d) {
@@ -109,8 +162,11 @@ class ContractJavadocTest {
   }
 
   private static String told(Diagnostic<? extends JavaFileObject> d) {
-    String file =
-        d.getSource() == null ? "" : Path.of(d.getSource().getName()).getFileName().toString();
+    String file = d.getSource() == null ? "" : name(d.getSource());
     return file + ":" + d.getLineNumber() + ": " + d.getMessage(null);
+  }
+
+  private static String name(JavaFileObject file) {
+    return Path.of(file.getName()).getFileName().toString();
   }
 }
