@@ -21,9 +21,9 @@ import org.fallwright.core.units.Range;
  * @param key its key in the parameters object; a unit, if any, ends it
  * @param kind kind of value
  * @param unit unit of the value, SI where nothing speaks against it; empty where there is none
- * @param least least value of a number
- * @param most greatest value of a number
- * @param choices what may be chosen; empty for other kinds
+ * @param least least value of a number, in the unit; 0 for other kinds
+ * @param most greatest value of a number, in the unit; 0 for other kinds
+ * @param choices what may be chosen, from 1 to 60; empty for other kinds
  * @param preset what a form fills in and marks as not yet touched; null: none. It never stands in
  *     for a value that a site does not state
  * @param optional whether it may be left out
@@ -66,12 +66,25 @@ public record Parameter(
    * @param wording as a person reads it
    */
   public record Choice(String key, Wording wording) {
+    /**
+     * Checks that both are there.
+     *
+     * @throws IllegalArgumentException naming the field and what is asked of it
+     */
     public Choice {
       Range.text("choice", key);
       Range.present("wording", wording);
     }
 
-    /** A choice in both languages. */
+    /**
+     * A choice in both languages.
+     *
+     * @param key as the file says it, from 1 to 200 characters
+     * @param english as a person reads it in English
+     * @param spanish as a person reads it in Spanish
+     * @return the choice
+     * @throws IllegalArgumentException naming the field and what is asked of it
+     */
     public static Choice of(String key, String english, String spanish) {
       return new Choice(key, new Wording(english, spanish));
     }
@@ -84,6 +97,11 @@ public record Parameter(
    * @param choices any of these
    */
   public record Where(String key, List<String> choices) {
+    /**
+     * Checks that a key and at least one choice are there.
+     *
+     * @throws IllegalArgumentException naming the field and what is asked of it
+     */
     public Where {
       Range.text("key", key);
       choices = List.copyOf(Range.present("choices", choices));
@@ -91,6 +109,11 @@ public record Parameter(
     }
   }
 
+  /**
+   * Checks that the description is whole, and that the preset, if any, is a value it allows.
+   *
+   * @throws IllegalArgumentException naming what cannot be described so
+   */
   public Parameter {
     Range.text("key", key);
     if (!key.matches("[A-Za-z][A-Za-z0-9_]*")) {
@@ -116,38 +139,93 @@ public record Parameter(
     }
   }
 
-  /** A number in a unit, that must be stated. */
+  /**
+   * A number in a unit, that must be stated.
+   *
+   * @param key its key in the parameters object; letters, digits and underscores, a letter first; a
+   *     unit, if any, ends it
+   * @param unit unit of the number; empty where there is none
+   * @param least least value that is taken [in the unit]
+   * @param most greatest value that is taken [in the unit]
+   * @param label what a form calls it
+   * @param help what it is and how to find it, a sentence or two
+   * @return the parameter, which a site must state
+   * @throws IllegalArgumentException naming what cannot be described so
+   */
   public static Parameter number(
       String key, String unit, double least, double most, Wording label, Wording help) {
     return new Parameter(
         key, Kind.NUMBER, unit, least, most, List.of(), null, false, null, label, help);
   }
 
-  /** A whole number, that must be stated. */
+  /**
+   * A whole number without a unit, that must be stated.
+   *
+   * @param key its key in the parameters object; letters, digits and underscores, a letter first
+   * @param least least number that is taken
+   * @param most greatest number that is taken
+   * @param label what a form calls it
+   * @param help what it is and how to find it, a sentence or two
+   * @return the parameter, which a site must state
+   * @throws IllegalArgumentException naming what cannot be described so
+   */
   public static Parameter wholeNumber(
       String key, int least, int most, Wording label, Wording help) {
     return new Parameter(
         key, Kind.WHOLE_NUMBER, "", least, most, List.of(), null, false, null, label, help);
   }
 
-  /** Yes or no, that must be stated. */
+  /**
+   * Yes or no, that must be stated.
+   *
+   * @param key its key in the parameters object; letters, digits and underscores, a letter first
+   * @param label what a form calls it
+   * @param help what it is and how to find it, a sentence or two
+   * @return the parameter, which a site must state
+   * @throws IllegalArgumentException naming what cannot be described so
+   */
   public static Parameter flag(String key, Wording label, Wording help) {
     return new Parameter(key, Kind.FLAG, "", 0, 0, List.of(), null, false, null, label, help);
   }
 
-  /** One of some choices, that must be made. */
+  /**
+   * One of some choices, that must be made.
+   *
+   * @param key its key in the parameters object; letters, digits and underscores, a letter first
+   * @param label what a form calls it
+   * @param help what it is and how to find it, a sentence or two
+   * @param choices what may be chosen, from 1 to 60, in the order of a form
+   * @return the parameter, which a site must state
+   * @throws IllegalArgumentException naming what cannot be described so
+   */
   public static Parameter choice(String key, Wording label, Wording help, Choice... choices) {
     return new Parameter(
         key, Kind.CHOICE, "", 0, 0, List.of(choices), null, false, null, label, help);
   }
 
-  /** One or more of some choices, that must be made. */
+  /**
+   * One or more of some choices, that must be made.
+   *
+   * @param key its key in the parameters object; letters, digits and underscores, a letter first
+   * @param label what a form calls it
+   * @param help what it is and how to find it, a sentence or two
+   * @param choices what may be chosen, from 1 to 60, in the order of a form
+   * @return the parameter, which a site must state
+   * @throws IllegalArgumentException naming what cannot be described so
+   */
   public static Parameter choices(String key, Wording label, Wording help, Choice... choices) {
     return new Parameter(
         key, Kind.CHOICES, "", 0, 0, List.of(choices), null, false, null, label, help);
   }
 
-  /** The same with a number that a form fills in. */
+  /**
+   * The same with a number that a form fills in.
+   *
+   * @param value the number [in the parameter's unit]; whole for a whole number
+   * @return a copy with this preset
+   * @throws IllegalArgumentException one sentence with key, value, limits and unit, if the
+   *     parameter itself would refuse it
+   */
   public Parameter preset(double value) {
     return preset(
         kind == Kind.WHOLE_NUMBER && value == Math.rint(value)
@@ -155,12 +233,26 @@ public record Parameter(
             : DoubleNode.valueOf(value));
   }
 
-  /** The same with a flag that a form fills in. */
+  /**
+   * The same with a flag that a form fills in.
+   *
+   * @param value true for yes
+   * @return a copy with this preset
+   * @throws IllegalArgumentException one sentence with key, value, limits and unit, if the
+   *     parameter itself would refuse it
+   */
   public Parameter preset(boolean value) {
     return preset(BooleanNode.valueOf(value));
   }
 
-  /** The same with choices that a form fills in; only one for a single choice. */
+  /**
+   * The same with choices that a form fills in.
+   *
+   * @param keys keys of the choices, each at most once; only one for a single choice
+   * @return a copy with this preset
+   * @throws IllegalArgumentException one sentence with key, value, limits and unit, if the
+   *     parameter itself would refuse it
+   */
   public Parameter preset(String... keys) {
     if (kind != Kind.CHOICES) {
       return preset(TextNode.valueOf(String.join(", ", keys)));
@@ -175,12 +267,23 @@ public record Parameter(
         key, kind, unit, least, most, choices, value, optional, where, label, help);
   }
 
-  /** The same, but it may be left out. */
+  /**
+   * The same, but it may be left out.
+   *
+   * @return a copy that a site need not state
+   */
   public Parameter mayBeLeftOut() {
     return new Parameter(key, kind, unit, least, most, choices, preset, true, where, label, help);
   }
 
-  /** The same, but it applies only where another parameter, described before, says one of these. */
+  /**
+   * The same, but it applies only where another parameter, described before, says one of these.
+   *
+   * @param otherKey key of the other parameter
+   * @param otherChoices keys of its choices beside which this one applies, at least one
+   * @return a copy that must be left out beside all other choices
+   * @throws IllegalArgumentException naming what cannot be described so
+   */
   public Parameter onlyWhere(String otherKey, String... otherChoices) {
     return new Parameter(
         key,
@@ -196,18 +299,32 @@ public record Parameter(
         help);
   }
 
-  /** A copy of the preset; null: there is none. */
+  /**
+   * What a form fills in and marks as not yet touched.
+   *
+   * @return a copy of it; null: there is none
+   */
   @Override
   public JsonNode preset() {
     return preset == null ? null : preset.deepCopy();
   }
 
-  /** The keys of the choices. */
+  /**
+   * The keys of the choices.
+   *
+   * @return them in the order of the description; empty where the kind is no choice
+   */
   public List<String> choiceKeys() {
     return choices.stream().map(Choice::key).toList();
   }
 
-  /** Whether it applies beside these other values. */
+  /**
+   * Whether it applies beside these other values.
+   *
+   * @param values the source's parameters, by key
+   * @return true if it hangs on no other parameter, or if that one is stated and names a choice
+   *     beside which this applies
+   */
   public boolean appliesTo(ObjectNode values) {
     if (where == null) {
       return true;
@@ -230,6 +347,7 @@ public record Parameter(
   /**
    * Refuses a value that is not what this parameter asks.
    *
+   * @param value what a site states; not null
    * @throws IllegalArgumentException one sentence with key, value, limits and unit
    */
   public void check(JsonNode value) {
@@ -280,7 +398,11 @@ public record Parameter(
     return true;
   }
 
-  /** What a value must be, in half a sentence: "a number from 100 to 700 kg". */
+  /**
+   * What a value must be, for the end of a sentence that refuses one.
+   *
+   * @return half a sentence in English: "a number from 100 to 700 kg"
+   */
   public String asked() {
     return asked(kind, unit, least, most, choiceKeys());
   }

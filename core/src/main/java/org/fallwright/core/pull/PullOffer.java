@@ -18,11 +18,11 @@ import org.fallwright.core.units.Range;
  * @param wireM line of its own that it pays out towards the tree [m]
  * @param stiffnessNPerM tension at its line end for a metre that it gives way there, of all that is
  *     elastic in it beyond the pull line [N/m]; null: nothing worth counting
- * @param anchorHauling load on the anchor it sits on per newton at its line end, hauling
- * @param anchorHolding the same, holding
- * @param people who works it and where they stand
+ * @param anchorHauling load on the anchor it sits on per newton at its line end, hauling [N/N]
+ * @param anchorHolding the same, holding [N/N]
+ * @param people who works it and where they stand; this and each list after it at most 60 long
  * @param parts rated parts of its own
- * @param checks checks of its own
+ * @param checks checks that only it can make
  * @param notes warnings and remarks, a sentence each
  */
 public record PullOffer(
@@ -52,6 +52,11 @@ public record PullOffer(
    * @param why one sentence for somebody who does not know the trade
    */
   public record Limit(Wording what, Wording why) {
+    /**
+     * Checks that both are there.
+     *
+     * @throws IllegalArgumentException naming the field and what is asked of it
+     */
     public Limit {
       Range.present("what", what);
       Range.present("why", why);
@@ -61,17 +66,27 @@ public record PullOffer(
   /**
    * How far things move.
    *
-   * @param ratio metres moved at the hand, wheel or haul end for a metre at its line end
+   * @param ratio metres moved at the hand, wheel or haul end for a metre at its line end [m/m]
    * @param mostM most line it can take in at its line end [m], beyond which it must not be counted
    *     on; null: as much as is asked, or it can be reset with the line held
    */
   public record Travel(double ratio, Double mostM) {
+    /**
+     * Checks both.
+     *
+     * @throws IllegalArgumentException naming the field, its value, its limits and its unit
+     */
     public Travel {
       Range.check("travel_ratio", ratio, 1e-3, 1e4, "");
       Range.checkOrNull("travel_most_m", mostM, 0, 1000, "m");
     }
 
-    /** Way of the hand, wheel or haul end for so much line at its line end [m]. */
+    /**
+     * Way of the hand, wheel or haul end for so much line.
+     *
+     * @param lineM line taken in at its line end [m]
+     * @return way at the hand, wheel or haul end [m]
+     */
     public double handM(double lineM) {
       return ratio * lineM;
     }
@@ -94,11 +109,16 @@ public record PullOffer(
    *
    * @param role what they do, in a few words
    * @param where where they stand
-   * @param count how many
+   * @param count how many, from 1 to 50
    * @param nearerM how much nearer to the tree than the source, along the last leg, the foremost of
    *     a row stands [m]; 0 elsewhere
    */
   public record Standing(Wording role, Where where, int count, double nearerM) {
+    /**
+     * Checks all four.
+     *
+     * @throws IllegalArgumentException naming the field, its value, its limits and its unit
+     */
     public Standing {
       Range.present("role", role);
       Range.present("where", where);
@@ -106,7 +126,14 @@ public record PullOffer(
       Range.check("nearer_m", nearerM, 0, where == Where.BESIDE_LINE ? 100 : 0, "m");
     }
 
-    /** One person at the source. */
+    /**
+     * One person at the source.
+     *
+     * @param english what they do, in English
+     * @param spanish the same in Spanish
+     * @return them
+     * @throws IllegalArgumentException naming the field and what is asked of it
+     */
     public static Standing one(String english, String spanish) {
       return new Standing(new Wording(english, spanish), Where.AT_SOURCE, 1, 0);
     }
@@ -117,10 +144,10 @@ public record PullOffer(
    *
    * @param name what it is called
    * @param strengthN ultimate strength [N]
-   * @param designFactor least factor at the planned load
-   * @param lastFactor least factor at the most the source can do
-   * @param hauling load on it per newton at the source's line end, hauling
-   * @param holding the same, holding
+   * @param designFactor least strength over load at the planned load, from 1 to 20
+   * @param lastFactor the same at the most the source can do, from 1 to 20
+   * @param hauling load on it per newton at the source's line end, hauling [N/N]
+   * @param holding the same, holding [N/N]
    */
   public record Part(
       String name,
@@ -129,6 +156,11 @@ public record PullOffer(
       double lastFactor,
       double hauling,
       double holding) {
+    /**
+     * Checks all six.
+     *
+     * @throws IllegalArgumentException naming the field, its value, its limits and its unit
+     */
     public Part {
       Range.text("name", name);
       Range.check("strength_N", strengthN, 1, 1e9, "N");
@@ -145,12 +177,17 @@ public record PullOffer(
    * @param id stable id, lower case with hyphens
    * @param value what there is, in {@code unit}
    * @param limit what is asked, in {@code unit}
-   * @param unit SI unit
+   * @param unit SI unit; empty where there is none
    * @param ratio capacity over demand
-   * @param why one line
+   * @param why what is asked and why, one line
    */
   public record Finding(
       String id, double value, double limit, String unit, double ratio, String why) {
+    /**
+     * Checks all six.
+     *
+     * @throws IllegalArgumentException naming the field, its value, its limits and its unit
+     */
     public Finding {
       Range.text("id", id);
       Range.check("value", value, -1e9, 1e9, Range.present("unit", unit));
@@ -160,6 +197,11 @@ public record PullOffer(
     }
   }
 
+  /**
+   * Checks every figure and list; a high below the low is refused.
+   *
+   * @throws IllegalArgumentException naming the field, its value, its limits and its unit
+   */
   public PullOffer {
     Range.check("low_N", lowN, 0, 1e7, "N");
     Range.check("high_N", highN, lowN, 1e8, "N");
@@ -187,14 +229,19 @@ public record PullOffer(
    * Begins an offer; it holds nothing and loads its anchor one to one unless more is said.
    *
    * @param lowN the pull that can be counted on [N]
-   * @param highN the most it can put on the parts [N]
-   * @param limit what limits the low
+   * @param highN the most it can put on the parts, allowances for jerk and surge included [N]
+   * @param limit what limits the low, and why
+   * @return a draft to which the rest is said; {@link OfferDraft#done} checks all of it
    */
   public static OfferDraft giving(double lowN, double highN, Limit limit) {
     return new OfferDraft(lowN, highN, limit);
   }
 
-  /** How many work it within reach of the loaded line. */
+  /**
+   * How many work it within reach of the loaded line.
+   *
+   * @return all people but those who stand away
+   */
   public int operators() {
     return people.stream().filter(s -> s.where() != Where.AWAY).mapToInt(Standing::count).sum();
   }

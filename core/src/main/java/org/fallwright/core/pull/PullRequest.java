@@ -8,7 +8,7 @@ import org.fallwright.core.units.Range;
 /**
  * What a pull source is asked.
  *
- * @param parameters the source's own parameters
+ * @param parameters the source's own parameters, by key, in the units that it describes
  * @param mode one of its modes
  * @param stand where it stands and how the line comes to it
  * @param pull what it is to do
@@ -42,6 +42,11 @@ public record PullRequest(
       double heightM,
       double legM,
       Double runOutM) {
+    /**
+     * Checks every figure.
+     *
+     * @throws IllegalArgumentException naming the field, its value, its limits and its unit
+     */
     public Stand {
       Range.check("line_rise_rad", lineRiseRad, -Math.PI / 2, Math.PI / 2, "rad");
       Range.check("uphill_rad", uphillRad, -Math.PI / 2, Math.PI / 2, "rad");
@@ -56,12 +61,17 @@ public record PullRequest(
    * What it is to do. Of a tree that cannot be moved stiffness and take-up are 0.
    *
    * @param pathStiffness stiffness of line and stem seen at the tree [N/m]
-   * @param travelRatio metres at this source's line end for a metre of line at the tree
+   * @param travelRatio metres at this source's line end for a metre of line at the tree [m/m]
    * @param takeUpM line to be taken in at the tree [m]
    * @param workingN tension that the plan asks at this source's line end [N]; null: not known yet,
    *     as for a driver. To tell hand forces by; low and high must not hang on it
    */
   public record Pull(double pathStiffness, double travelRatio, double takeUpM, Double workingN) {
+    /**
+     * Checks every figure.
+     *
+     * @throws IllegalArgumentException naming the field, its value, its limits and its unit
+     */
     public Pull {
       Range.check("path_stiffness", pathStiffness, 0, 1e12, "N/m");
       Range.check("travel_ratio", travelRatio, 1e-3, 1e4, "");
@@ -69,7 +79,11 @@ public record PullRequest(
       Range.checkOrNull("working_N", workingN, 0, 1e9, "N");
     }
 
-    /** Line to be taken in at this source's line end [m]. */
+    /**
+     * Line to be taken in at this source's line end.
+     *
+     * @return so much line [m]
+     */
     public double lineInM() {
       return takeUpM * travelRatio;
     }
@@ -79,13 +93,18 @@ public record PullRequest(
    * The line at its line end.
    *
    * @param wireRope whether it is wire rope, else fibre
-   * @param diameterM [m]
+   * @param diameterM its diameter [m]
    * @param breakingLoadN breaking load on its label [N]
    * @param lengthM its length [m]
    * @param pathM how much of it the path takes, from the tree to the source [m]
    */
   public record Line(
       boolean wireRope, double diameterM, double breakingLoadN, double lengthM, double pathM) {
+    /**
+     * Checks every figure.
+     *
+     * @throws IllegalArgumentException naming the field, its value, its limits and its unit
+     */
     public Line {
       Range.check("diameter_m", diameterM, 0.001, 0.2, "m");
       Range.check("breaking_load_N", breakingLoadN, 1, 1e8, "N");
@@ -94,6 +113,11 @@ public record PullRequest(
     }
   }
 
+  /**
+   * Checks that all is there but line and driver, which may be null.
+   *
+   * @throws IllegalArgumentException naming the field and what is asked of it
+   */
   public PullRequest {
     Range.present("parameters", parameters);
     Range.present("mode", mode);
@@ -101,7 +125,13 @@ public record PullRequest(
     Range.present("pull", pull);
   }
 
-  /** The same with other parameters. */
+  /**
+   * The same with other parameters.
+   *
+   * @param otherParameters what is asked instead, by key
+   * @return a request that is alike in all else
+   * @throws IllegalArgumentException naming the field and what is asked of it
+   */
   public PullRequest with(ObjectNode otherParameters) {
     return new PullRequest(otherParameters, mode, stand, pull, line, driver);
   }
@@ -109,7 +139,9 @@ public record PullRequest(
   /**
    * The mode, if it is one of these.
    *
-   * @throws IllegalArgumentException if it is another
+   * @param modes modes that the source has
+   * @return the mode asked for
+   * @throws IllegalArgumentException if it is another, naming it and the modes there are
    */
   public String modeAmong(List<String> modes) {
     if (!modes.contains(mode)) {

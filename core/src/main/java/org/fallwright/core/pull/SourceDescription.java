@@ -15,8 +15,8 @@ import org.fallwright.core.units.Range;
  * @param id stable id, lower case with hyphens
  * @param name display name
  * @param places where it can be, at least one
- * @param needsDriver whether another source hauls it
- * @param parameters its parameters, in the order in which a form asks for them
+ * @param needsDriver whether another source hauls it; it then has a {@link PullSource#haulLine}
+ * @param parameters its parameters, in the order in which a form asks for them, at most 60
  */
 public record SourceDescription(
     String id,
@@ -34,6 +34,12 @@ public record SourceDescription(
     ANCHOR
   }
 
+  /**
+   * Checks the id, that no parameter is described twice, and that each one hangs only on choices
+   * described before it.
+   *
+   * @throws IllegalArgumentException naming what cannot be described so
+   */
   public SourceDescription {
     Range.text("id", id);
     if (!id.matches("[a-z][a-z0-9-]*")) {
@@ -61,7 +67,12 @@ public record SourceDescription(
     }
   }
 
-  /** The parameter of a key. */
+  /**
+   * The parameter of a key.
+   *
+   * @param key its key in the parameters object
+   * @return the parameter; empty where none has this key
+   */
   public Optional<Parameter> parameter(String key) {
     return find(parameters, key);
   }
@@ -71,6 +82,7 @@ public record SourceDescription(
    * wrong kind or out of range, one that is missing and one that does not apply are refused. A
    * value of null counts as not stated; a preset does not stand in for one.
    *
+   * @param values what a site states, by key
    * @throws IllegalArgumentException one sentence with key, value, limits and unit
    */
   public void check(ObjectNode values) {

@@ -12,8 +12,10 @@ public final class SourceFault extends RuntimeException {
   private final String sourceId;
 
   /**
+   * A fault of one source.
+   *
    * @param sourceId stable id of the source
-   * @param sentence what went wrong
+   * @param sentence what went wrong, naming the plugin
    * @param cause what was thrown; may be null
    */
   public SourceFault(String sourceId, String sentence, Throwable cause) {
@@ -21,7 +23,11 @@ public final class SourceFault extends RuntimeException {
     this.sourceId = sourceId;
   }
 
-  /** Stable id of the source that failed. */
+  /**
+   * Which source failed.
+   *
+   * @return its stable id
+   */
   public String sourceId() {
     return sourceId;
   }

@@ -21,6 +21,8 @@ public final class ParameterReader {
   /**
    * Takes the parameters and checks all of them.
    *
+   * @param description what the source says of itself
+   * @param values what a site states, by key
    * @throws IllegalArgumentException see {@link SourceDescription#check}
    */
   public ParameterReader(SourceDescription description, ObjectNode values) {
@@ -29,37 +31,84 @@ public final class ParameterReader {
     this.values = values;
   }
 
-  /** Whether the key has a value. */
+  /**
+   * Whether a parameter has a value.
+   *
+   * @param key key of the parameter
+   * @return false where it is left out or null
+   */
   public boolean isStated(String key) {
     return values.hasNonNull(key);
   }
 
-  /** A number, in the parameter's unit. */
+  /**
+   * A number that must be there.
+   *
+   * @param key key of the parameter
+   * @return the number [in the parameter's unit]
+   * @throws IllegalArgumentException if it is not stated, saying what it must be
+   * @throws IllegalStateException if the source describes no such number: a mistake of the source
+   */
   public double number(String key) {
     return stated(key, Kind.NUMBER).doubleValue();
   }
 
-  /** A number, in the parameter's unit; null where it is not stated. */
+  /**
+   * A number that may have been left out.
+   *
+   * @param key key of the parameter
+   * @return the number [in the parameter's unit]; null where it is not stated
+   * @throws IllegalStateException if the source describes no such number: a mistake of the source
+   */
   public Double numberOrNull(String key) {
     return isStated(key) ? Double.valueOf(number(key)) : null;
   }
 
-  /** A whole number. */
+  /**
+   * A whole number that must be there.
+   *
+   * @param key key of the parameter
+   * @return the number
+   * @throws IllegalArgumentException if it is not stated, saying what it must be
+   * @throws IllegalStateException if the source describes no such whole number: a mistake of the
+   *     source
+   */
   public int wholeNumber(String key) {
     return stated(key, Kind.WHOLE_NUMBER).intValue();
   }
 
-  /** A flag. */
+  /**
+   * A yes or no that must be there.
+   *
+   * @param key key of the parameter
+   * @return true for yes
+   * @throws IllegalArgumentException if it is not stated, saying what it must be
+   * @throws IllegalStateException if the source describes no such flag: a mistake of the source
+   */
   public boolean flag(String key) {
     return stated(key, Kind.FLAG).booleanValue();
   }
 
-  /** The one choice made. */
+  /**
+   * The one choice made, which must be there.
+   *
+   * @param key key of the parameter
+   * @return key of the choice
+   * @throws IllegalArgumentException if it is not stated, saying what it must be
+   * @throws IllegalStateException if the source describes no such choice: a mistake of the source
+   */
   public String choice(String key) {
     return stated(key, Kind.CHOICE).textValue();
   }
 
-  /** The choices made, at least one, in the order of the description. */
+  /**
+   * The choices made, at least one.
+   *
+   * @param key key of the parameter
+   * @return keys of the choices, in the order of the description
+   * @throws IllegalArgumentException if it is not stated, saying what it must be
+   * @throws IllegalStateException if the source describes no such choices: a mistake of the source
+   */
   public List<String> choices(String key) {
     Set<String> chosen = new HashSet<>();
     stated(key, Kind.CHOICES).forEach(n -> chosen.add(n.asText()));
