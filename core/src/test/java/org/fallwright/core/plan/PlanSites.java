@@ -145,7 +145,8 @@ final class PlanSites {
     for (int i = 0; i < n; i++) {
       String id = "A" + i;
       anchors.add(id);
-      String place = place(at(-15, 15, 18, 45));
+      // some within the tree's reach, to hang up in
+      String place = place(one(5) ? at(-9, 9, 10, 15) : at(-15, 15, 18, 45));
       String rejected = one(8) ? "\"it moved\"" : "null";
       TinySite.add(
           s,
