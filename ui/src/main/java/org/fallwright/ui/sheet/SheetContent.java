@@ -295,8 +295,8 @@ record SheetContent(
             d ->
                 new Line(
                     id,
-                    SourceText.inOneLine(
-                        d, source.parameters(), Locale.ENGLISH, new Amounts(site.display()), 2)));
+                    SourceText.firstNumber(
+                        d, source.parameters(), Locale.ENGLISH, new Amounts(site.display()))));
   }
 
   private static String placed(String source, String mode, String place) {

@@ -31,18 +31,6 @@ public final class SourceText {
 
   private SourceText() {}
 
-  /** A parameter's name and the value that a site states for it. */
-  public record Stated(String name, String value) {}
-
-  /** What a site states of a source, in the order of its description and the reader's units. */
-  public static List<Stated> stated(
-      SourceDescription source, ObjectNode values, Locale in, Amounts amounts) {
-    return source.parameters().stream()
-        .filter(p -> values.hasNonNull(p.key()))
-        .map(p -> new Stated(p.label().in(in), shown(p, values.get(p.key()), in, amounts)))
-        .toList();
-  }
-
   private static String shown(Parameter p, JsonNode value, Locale in, Amounts amounts) {
     if (!value.isNumber() || p.unit().isEmpty()) {
       return value(p, value, in);
@@ -53,15 +41,15 @@ public final class SourceText {
         : amounts.amount(si, p.unit());
   }
 
-  /** The first {@code most} of the same in one line: "Mass: 300 kg · Drop: 3 m …". */
-  public static String inOneLine(
-      SourceDescription source, ObjectNode values, Locale in, Amounts amounts, int most) {
-    List<Stated> all = stated(source, values, in, amounts);
-    return all.stream()
-            .limit(most)
-            .map(s -> s.name() + ": " + s.value())
-            .collect(Collectors.joining(" · "))
-        + (all.size() > most ? " …" : "");
+  /** The first number that a site states of a source: "Rated pull: 2,200 lbf …". */
+  public static String firstNumber(
+      SourceDescription source, ObjectNode values, Locale in, Amounts amounts) {
+    return source.parameters().stream()
+            .filter(p -> values.path(p.key()).isNumber())
+            .findFirst()
+            .map(p -> p.label().in(in) + ": " + shown(p, values.get(p.key()), in, amounts))
+            .orElse("")
+        + " …";
   }
 
   /** All that somebody needs who fills in the source's parameters, line by line. */

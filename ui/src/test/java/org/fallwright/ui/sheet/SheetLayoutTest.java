@@ -107,12 +107,14 @@ class SheetLayoutTest {
 
   static Stream<Case> pages() {
     DemoSite plain = DemoSite.coarse(Site.Display.METRIC);
+    DemoSite us = DemoSite.coarse(Site.Display.US);
     DemoSite longNamed = longNames();
     return Stream.of(Paper.values())
         .flatMap(
             p ->
                 Stream.of(
                     new Case(p, plain.site(), plain.plan()),
+                    new Case(p, us.site(), us.plan()),
                     new Case(p, longNamed.site(), longNamed.plan()),
                     new Case(p, longNamed.site(), crowded(longNamed.plan().ranked().get(0)))));
   }
