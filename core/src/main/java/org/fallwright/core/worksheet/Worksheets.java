@@ -79,6 +79,9 @@ public final class Worksheets {
         "Each line can be repeated with a calculator set to degrees: the printed numbers give the"
             + " printed result to its last digit, and that rounded result goes on. So many digits only"
             + " serve to follow the sums; no tree is known that well.",
+        "The spread is worked here one input at a time. A plan tries its leading setups over thousands"
+            + " of ways the site may be, all inputs at once: its figures are a little greater then, and"
+            + " they are the ones that count.",
         "Forces are at the tree, in the leg of the line that leaves it, unless another place is"
             + " named. ^ raises to a power, ln is the natural logarithm; all angles are in degrees.");
   }
