@@ -344,7 +344,7 @@ final class Landing {
                   : "It clears "
                       + c.targetId()
                       + " by "
-                      + in.length(c.clearanceM())
+                      + in.lengthAgainst(c.clearanceM(), c.askedM())
                       + (c.askedM() > 0 ? " of the " + in.length(c.askedM()) + " asked." : "."));
     }
     return nearest;

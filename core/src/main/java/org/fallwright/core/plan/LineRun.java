@@ -139,7 +139,7 @@ final class LineRun {
                     + " past "
                     + what.what()
                     + " at "
-                    + in.length(what.clearanceM())
+                    + in.lengthAgainst(what.clearanceM(), what.askedM())
                     + " of "
                     + in.length(what.askedM())
                     + " asked.");

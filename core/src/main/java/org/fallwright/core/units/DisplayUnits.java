@@ -104,6 +104,15 @@ public enum DisplayUnits {
     return sign + inches / 12 + " ft " + inches % 12 + " in";
   }
 
+  /**
+   * A length on the site that is held against another [m]; one that falls short and would show as
+   * the other is said to be just under it.
+   */
+  public String lengthAgainst(double m, double askedM) {
+    String shown = length(m);
+    return m < askedM && shown.equals(length(askedM)) ? "just under " + shown : shown;
+  }
+
   /** A length of the cut or the stem [m]: millimetres below 10 cm, centimetres; or inches. */
   public String smallLength(double m) {
     if (this == METRIC && Math.abs(m) < 0.1) {

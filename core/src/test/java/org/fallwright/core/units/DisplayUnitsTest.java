@@ -145,4 +145,12 @@ class DisplayUnitsTest {
   private static double number(String shown) {
     return Double.parseDouble(shown.replace(",", "").replaceAll(" .*", ""));
   }
+
+  @Test
+  void aLengthThatFallsShortByAHairNeverShowsAsTheOneAsked() {
+    assertThat(DisplayUnits.US.lengthAgainst(0.895, 0.9)).isEqualTo("just under 2 ft 11 in");
+    assertThat(DisplayUnits.METRIC.lengthAgainst(0.8999, 0.9)).isEqualTo("just under 0.90 m");
+    assertThat(DisplayUnits.US.lengthAgainst(0.9, 0.9)).isEqualTo("2 ft 11 in");
+    assertThat(DisplayUnits.US.lengthAgainst(0.85, 0.9)).isEqualTo("2 ft 9 in");
+  }
 }
