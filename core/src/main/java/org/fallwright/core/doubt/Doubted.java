@@ -14,6 +14,7 @@ import org.fallwright.core.plan.Judged;
 import org.fallwright.core.plan.Plan;
 import org.fallwright.core.plan.Planner;
 import org.fallwright.core.pull.PullSources;
+import org.fallwright.core.pull.SourceFault;
 import org.fallwright.core.site.Site;
 
 /**
@@ -59,12 +60,18 @@ public final class Doubted {
     }
     Doubts doubts = new Doubts(site, sources);
     List<Judged> ranked = new ArrayList<>(plan.ranked());
+    List<String> faults = new ArrayList<>();
     int first = undecided(ranked);
     while (first >= 0) {
       if (cancelled.getAsBoolean()) {
         throw new CancellationException();
       }
-      ranked.set(first, doubts.judge(ranked.get(first).setup()));
+      try {
+        ranked.set(first, doubts.judge(ranked.get(first).setup()));
+      } catch (SourceFault fault) {
+        leaveOut(site, ranked, fault);
+        faults.add(fault.getMessage() + " Its setups are left out.");
+      }
       first = undecided(ranked);
       if (first < 0) {
         ranked.sort(Planner.BEST_FIRST);
@@ -77,8 +84,26 @@ public final class Doubted {
         plan.byVerdict(),
         plan.byBindingCheck(),
         plan.bestRejected(),
-        Stream.concat(plan.notes().stream(), Stream.of(said(ranked.size()))).toList(),
+        Stream.of(plan.notes(), faults, List.of(said(ranked.size())))
+            .flatMap(List::stream)
+            .toList(),
         plan.sources());
+  }
+
+  /** Takes out the setups of a source that failed only now, when the search was over. */
+  private static void leaveOut(Site site, List<Judged> ranked, SourceFault fault) {
+    boolean any =
+        ranked.removeIf(
+            j ->
+                is(site, j.setup().source(), fault)
+                    || j.setup().driver() != null && is(site, j.setup().driver().source(), fault));
+    if (!any) {
+      throw fault;
+    }
+  }
+
+  private static boolean is(Site site, String source, SourceFault fault) {
+    return site.source(source).orElseThrow().plugin().equals(fault.sourceId());
   }
 
   private static String said(int ranked) {
